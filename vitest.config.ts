@@ -1,0 +1,45 @@
+import { defineConfig } from 'vitest/config'
+
+const shared = { resolve: { tsconfigPaths: true } }
+const node = { environment: 'node' as const, testTimeout: 20_000 }
+
+export default defineConfig({
+  ...shared,
+  test: {
+    projects: [
+      {
+        ...shared,
+        test: {
+          ...node,
+          name: 'unit',
+          include: ['{shared,payments,server,components,hooks,seed,db}/**/*.test.ts'],
+        },
+      },
+      { ...shared, test: { ...node, name: 'reference', include: ['tests/reference/**/*.test.ts'] } },
+      {
+        ...shared,
+        test: {
+          ...node,
+          name: 'integration',
+          include: ['tests/{integration,contract}/**/*.test.ts'],
+          globalSetup: ['tests/support/database-server.ts'],
+          hookTimeout: 60_000,
+          testTimeout: 30_000,
+          maxWorkers: 2,
+        },
+      },
+      {
+        ...shared,
+        test: {
+          ...node,
+          name: 'e2e',
+          include: ['tests/e2e/**/*.test.ts'],
+          globalSetup: ['tests/support/whole-product.ts'],
+          hookTimeout: 120_000,
+          testTimeout: 120_000,
+          fileParallelism: false,
+        },
+      },
+    ],
+  },
+})
