@@ -49,7 +49,10 @@ const inner = [
     message: 'the fake processor shares no module with the product',
   },
 ]
-const noBarrels = { selector: 'ExportAllDeclaration', message: 'no barrels: import from the file that defines the thing' }
+const noBarrels = {
+  selector: 'ExportAllDeclaration',
+  message: 'no barrels: import from the file that defines the thing',
+}
 const envOnlyIn = {
   object: 'process',
   property: 'env',
@@ -72,7 +75,15 @@ export default defineConfig([
     },
   },
   {
-    files: ['server/env.ts', 'hooks/api.ts', '*.config.ts', '**/*.mjs', 'tests/**', 'payments/fake/**', 'seed/run.ts'],
+    files: [
+      'server/env.ts',
+      'hooks/api.ts',
+      '*.config.ts',
+      '**/*.mjs',
+      'tests/**',
+      'payments/fake/**',
+      'seed/run.ts',
+    ],
     rules: { 'no-restricted-properties': 'off' },
   },
   { files: ['seed/**', 'scripts/**', 'tests/**', 'payments/fake/**'], rules: { 'no-console': 'off' } },
@@ -86,8 +97,16 @@ export default defineConfig([
         'error',
         {
           patterns: [
-            { group: ['zod', 'zod/*', '@hookform/*', 'react-hook-form'], message: 'forms group only', allowTypeImports: true },
-            { group: ['@/shared/contracts/*'], message: 'types only outside the forms group', allowTypeImports: true },
+            {
+              group: ['zod', 'zod/*', '@hookform/*', 'react-hook-form'],
+              message: 'forms group only',
+              allowTypeImports: true,
+            },
+            {
+              group: ['@/shared/contracts/*'],
+              message: 'types only outside the forms group',
+              allowTypeImports: true,
+            },
           ],
         },
       ],
@@ -99,10 +118,21 @@ export default defineConfig([
     ignores: ['**/*.test.ts'],
     rules: {
       'no-restricted-globals': ['error', 'Date', 'fetch', 'process', 'localStorage'],
-      'no-restricted-properties': ['error', envOnlyIn, { object: 'Math', property: 'random', message: 'chance is an argument' }],
+      'no-restricted-properties': [
+        'error',
+        envOnlyIn,
+        { object: 'Math', property: 'random', message: 'chance is an argument' },
+      ],
       '@typescript-eslint/no-restricted-imports': [
         'error',
-        { patterns: [{ group: ['react*', 'expo*', 'node:*', 'zod', 'drizzle-orm*'], message: 'the domain is plain functions over numbers' }] },
+        {
+          patterns: [
+            {
+              group: ['react*', 'expo*', 'node:*', 'zod', 'drizzle-orm*'],
+              message: 'the domain is plain functions over numbers',
+            },
+          ],
+        },
       ],
     },
   },

@@ -45,7 +45,10 @@ async function readProblem(response: Response): Promise<Problem> {
 
 /** Makes the one typed API client. `base` is '' on the web (same origin), an address in the native app. */
 export function createCall(base: string) {
-  return async function call<N extends CallName>(name: N, input: CallInput<N>): Promise<ReplyOf<Endpoints[N]>> {
+  return async function call<N extends CallName>(
+    name: N,
+    input: CallInput<N>,
+  ): Promise<ReplyOf<Endpoints[N]>> {
     const [method, path, isUpload] = routes[name]
     const { params, query, body, key, file, signal } = input as CallInput<CallName> & { body?: unknown }
     const headers: Record<string, string> = { accept: 'application/json', 'x-tankward': '1' }

@@ -1,0 +1,78 @@
+// Written by scripts/write-routes.mjs from shared/contracts; the contract test fails when it is out of step.
+export interface Endpoints {
+  adjustStock: typeof import('@/shared/contracts/listings').adjustStock
+  beginListing: typeof import('@/shared/contracts/listings').beginListing
+  changeSelling: typeof import('@/shared/contracts/listings').changeSelling
+  discardDraft: typeof import('@/shared/contracts/listings').discardDraft
+  listOwnListings: typeof import('@/shared/contracts/listings').listOwnListings
+  readListing: typeof import('@/shared/contracts/listings').readListing
+  readOwnListing: typeof import('@/shared/contracts/listings').readOwnListing
+  saveDraft: typeof import('@/shared/contracts/listings').saveDraft
+  submitListing: typeof import('@/shared/contracts/listings').submitListing
+  changeMe: typeof import('@/shared/contracts/members').changeMe
+  readMe: typeof import('@/shared/contracts/members').readMe
+  decideReview: typeof import('@/shared/contracts/moderation').decideReview
+  listReviews: typeof import('@/shared/contracts/moderation').listReviews
+  readReview: typeof import('@/shared/contracts/moderation').readReview
+  acceptOrder: typeof import('@/shared/contracts/orders').acceptOrder
+  confirmGood: typeof import('@/shared/contracts/orders').confirmGood
+  declineOrder: typeof import('@/shared/contracts/orders').declineOrder
+  handOver: typeof import('@/shared/contracts/orders').handOver
+  leaveReservation: typeof import('@/shared/contracts/orders').leaveReservation
+  listOrders: typeof import('@/shared/contracts/orders').listOrders
+  markReady: typeof import('@/shared/contracts/orders').markReady
+  payBalance: typeof import('@/shared/contracts/orders').payBalance
+  payDeposit: typeof import('@/shared/contracts/orders').payDeposit
+  readOrder: typeof import('@/shared/contracts/orders').readOrder
+  reserveBatch: typeof import('@/shared/contracts/orders').reserveBatch
+  withdrawRequest: typeof import('@/shared/contracts/orders').withdrawRequest
+  uploadPhoto: typeof import('@/shared/contracts/photos').uploadPhoto
+  findPlaces: typeof import('@/shared/contracts/places').findPlaces
+  countFacets: typeof import('@/shared/contracts/search').countFacets
+  findPins: typeof import('@/shared/contracts/search').findPins
+  searchListings: typeof import('@/shared/contracts/search').searchListings
+  changeFarm: typeof import('@/shared/contracts/sellers').changeFarm
+  openFarm: typeof import('@/shared/contracts/sellers').openFarm
+  readOwnFarm: typeof import('@/shared/contracts/sellers').readOwnFarm
+  readSeller: typeof import('@/shared/contracts/sellers').readSeller
+  startPayouts: typeof import('@/shared/contracts/sellers').startPayouts
+}
+
+export const routes: Record<keyof Endpoints, readonly [method: string, path: string, upload: boolean]> = {
+  adjustStock: ['POST', '/sellers/mine/listings/:listingId/stock-movements', false],
+  beginListing: ['POST', '/sellers/mine/listings', false],
+  changeSelling: ['POST', '/sellers/mine/listings/:listingId/selling', false],
+  discardDraft: ['DELETE', '/sellers/mine/listings/:listingId', false],
+  listOwnListings: ['GET', '/sellers/mine/listings', false],
+  readListing: ['GET', '/listings/:listingId', false],
+  readOwnListing: ['GET', '/sellers/mine/listings/:listingId', false],
+  saveDraft: ['PATCH', '/sellers/mine/listings/:listingId', false],
+  submitListing: ['POST', '/sellers/mine/listings/:listingId/submission', false],
+  changeMe: ['PATCH', '/me', false],
+  readMe: ['GET', '/me', false],
+  decideReview: ['POST', '/moderation/listings/:versionId/decision', false],
+  listReviews: ['GET', '/moderation/listings', false],
+  readReview: ['GET', '/moderation/listings/:versionId', false],
+  acceptOrder: ['POST', '/orders/:orderId/acceptance', false],
+  confirmGood: ['POST', '/orders/:orderId/confirmation', false],
+  declineOrder: ['POST', '/orders/:orderId/refusal', false],
+  handOver: ['POST', '/orders/:orderId/hand-over', false],
+  leaveReservation: ['POST', '/orders/:orderId/departure', false],
+  listOrders: ['GET', '/orders', false],
+  markReady: ['POST', '/orders/:orderId/readiness', false],
+  payBalance: ['POST', '/orders/:orderId/balance-payment', false],
+  payDeposit: ['POST', '/orders/:orderId/deposit-payment', false],
+  readOrder: ['GET', '/orders/:orderId', false],
+  reserveBatch: ['POST', '/listings/:listingId/orders', false],
+  withdrawRequest: ['POST', '/orders/:orderId/withdrawal', false],
+  uploadPhoto: ['POST', '/photos', true],
+  findPlaces: ['GET', '/places', false],
+  countFacets: ['GET', '/listing-facets', false],
+  findPins: ['GET', '/listing-pins', false],
+  searchListings: ['GET', '/listings', false],
+  changeFarm: ['PATCH', '/sellers/mine', false],
+  openFarm: ['POST', '/sellers', false],
+  readOwnFarm: ['GET', '/sellers/mine', false],
+  readSeller: ['GET', '/sellers/:sellerId', false],
+  startPayouts: ['POST', '/sellers/mine/payout-onboarding', false],
+}

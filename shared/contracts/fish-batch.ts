@@ -1,0 +1,151 @@
+import { z } from 'zod'
+
+import { cents, dayText, line, photoId, stateCode, words } from '@/shared/contracts/values'
+
+const QUARTER_INCH_MM = 6.35
+const TWO_INCHES_MM = 50.8
+
+const quarterInches = z
+  .number({ message: 'A length, like 2 1/4 in.' })
+  .min(QUARTER_INCH_MM, 'At least a quarter of an inch.')
+  .max(1524, 'At most 60 inches.')
+  .refine(
+    (mm) => Math.abs(mm / QUARTER_INCH_MM - Math.round(mm / QUARTER_INCH_MM)) < 0.01,
+    'In quarter-inch steps.',
+  )
+
+const wholeCount = (least: number, saying: string) =>
+  z.int({ message: saying }).min(least, saying).max(1_000_000)
+
+export const priceTier = z
+  .object({ fromCount: wholeCount(1, 'From how many?'), unitCents: cents.min(1, 'A price for each animal.') })
+  .strict()
+export type PriceTier = z.output<typeof priceTier>
+
+/** A pickup window as the seller types it: a day and two times in the zone of the place. */
+export const typedWindow = z
+  .object({
+    day: dayText,
+    from: z.string().regex(/^\d{2}:\d{2}$/, 'A time, like 09:00.'),
+    until: z.string().regex(/^\d{2}:\d{2}$/, 'A time, like 10:00.'),
+    capacity: z.int({ message: 'How many buyers fit?' }).min(1, 'At least one buyer.').max(500),
+  })
+  .strict()
+export type TypedWindow = z.output<typeof typedWindow>
+
+export const batchPhoto = z
+  .object({ photoId, takenOn: dayText, hasRuler: z.boolean(), caption: line(120).optional() })
+  .strict()
+
+/**
+ * A batch of fish (crayfish and prawns too) as published: rules of trade practice, one message a field.
+ * Checks that need today's date or the law run in the use case that submits it.
+ */
+export const fishBody = z
+  .object({
+    category: z.literal('fish'),
+    taxonId: z
+      .string({ message: 'Pick the species from the list.' })
+      .min(1, 'Pick the species from the list.')
+      .max(60),
+    strain: line(80).optional(),
+    stage: z.enum(['fry', 'fingerling', 'advanced-fingerling', 'juvenile', 'adult', 'breeder'], {
+      message: 'Which stage?',
+    }),
+    sizeLoMm: quarterInches,
+    sizeHiMm: quarterInches,
+    ungraded: z.boolean(),
+    hatchedOn: dayText,
+    readyOn: dayText.optional(),
+    countOnHand: wholeCount(1, 'How many are there to sell?'),
+    minOrder: wholeCount(1, 'The smallest order.'),
+    orderStep: wholeCount(1, 'Sold in steps of how many?'),
+    mostPerBuyer: wholeCount(1, 'A number, or leave it empty.').optional(),
+    tiers: z.array(priceTier).min(1, 'Give at least one price.').max(8, 'At most eight prices.'),
+    countMethod: z.enum(['hand', 'sample-weight', 'displacement'], { message: 'How do you count?' }),
+    overcountPct: z.int().min(0).max(15, 'At most 15 %.'),
+    sex: z.enum(['mixed', 'all-male', 'unknown'], { message: 'Mixed, all-male or unknown?' }),
+    sexClaimPct: z.int().min(50).max(100).optional(),
+    feed: z
+      .object({ onPellets: z.boolean(), since: dayText.optional(), words: line(160).optional() })
+      .strict(),
+    water: z
+      .object({
+        temperatureC: z.number({ message: 'The water temperature.' }).min(0, 'Not below freezing.').max(40),
+        pH: z.number({ message: 'The pH.' }).min(4).max(10),
+        ghPpm: z.number({ message: 'General hardness in ppm.' }).min(0).max(2000),
+        khPpm: z.number({ message: 'Carbonate hardness in ppm.' }).min(0).max(2000),
+        saltPpt: z.number().min(0).max(40),
+        source: z.enum(['well', 'town', 'rain', 'spring', 'pond'], {
+          message: 'Where does the water come from?',
+        }),
+        measuredOn: dayText,
+      })
+      .strict(),
+    origin: z.enum(['hatched-here', 'grown-on', 'bought-in'], { message: 'Where do they come from?' }),
+    originState: stateCode.optional(),
+    wildCaught: z.literal(false, { message: 'Wild-caught animals are not listed here.' }),
+    health: z
+      .object({
+        treatments: words(400).min(1, 'What treatments in the last 30 days? "None" is an answer.'),
+        lastLosses: words(400).min(1, 'When did you last lose animals, and how many? "None" is an answer.'),
+        papers: words(400).optional(),
+      })
+      .strict(),
+    singleSpeciesChecked: z.literal(true, {
+      message: 'Please check the batch and confirm it holds one species.',
+    }),
+    licenceNumbers: words(300).min(1, 'Your licence or permit numbers, or "none needed" and why.'),
+    statesServed: z.array(stateCode).min(1, 'Which states do you serve?').max(51),
+    placeKind: z.enum(['farm-gate', 'public-place'], { message: 'Where do people collect?' }),
+    windows: z.array(typedWindow).min(1, 'Offer at least one pickup window.').max(40),
+    accept: z.enum(['instant', 'ask']),
+    balanceDue: z.enum(['at-handover', 'before']),
+    depositPct: z.int({ message: '10 to 50 %.' }).min(10, '10 to 50 %.').max(50, '10 to 50 %.'),
+    freeCancelHours: z.int().min(12).max(336),
+    promise: z
+      .object({
+        windowHours: z.int().min(4, '4 to 24 hours.').max(24, '4 to 24 hours.'),
+        survivalDays: z.union([z.literal(0), z.int().min(3).max(7)]),
+        remedy: z.enum(['refund', 'replace']),
+        evidence: line(200).min(1, 'What should the buyer show you?'),
+      })
+      .strict(),
+    photos: z.array(batchPhoto).min(1, 'At least one photo of this batch.').max(6, 'At most six photos.'),
+    words: words(2000),
+  })
+  .strict()
+  .superRefine((batch, ctx) => {
+    const wrong = (path: (string | number)[], message: string) =>
+      ctx.addIssue({ code: 'custom', path, message })
+    if (batch.sizeHiMm < batch.sizeLoMm)
+      wrong(['sizeHiMm'], 'The longest cannot be shorter than the shortest.')
+    if (batch.sizeHiMm - batch.sizeLoMm > TWO_INCHES_MM + 0.01 && !batch.ungraded) {
+      wrong(['ungraded'], 'A spread of more than 2 inches is an ungraded batch: tick it, or grade them.')
+    }
+    batch.tiers.forEach((tier, at) => {
+      const before = batch.tiers[at - 1]
+      if (before && tier.fromCount <= before.fromCount) {
+        wrong(['tiers', at, 'fromCount'], 'Each price starts at a larger count than the one before.')
+      }
+      if (before && tier.unitCents >= before.unitCents) {
+        wrong(['tiers', at, 'unitCents'], 'The price must fall as the count grows.')
+      }
+    })
+    const first = batch.tiers[0]
+    if (first && first.fromCount > batch.minOrder) {
+      wrong(['tiers', 0, 'fromCount'], 'The first price must cover your smallest order.')
+    }
+    if (batch.minOrder > batch.countOnHand) wrong(['minOrder'], 'The smallest order is more than you have.')
+    if (batch.mostPerBuyer !== undefined && batch.mostPerBuyer < batch.minOrder) {
+      wrong(['mostPerBuyer'], 'The most for one buyer is below your smallest order.')
+    }
+    if (batch.origin === 'bought-in' && !batch.originState) wrong(['originState'], 'From which state?')
+    if (!batch.photos.some((photo) => photo.hasRuler)) {
+      wrong(['photos'], 'One photo must show the animals beside a ruler.')
+    }
+    batch.windows.forEach((window, at) => {
+      if (window.until <= window.from) wrong(['windows', at, 'until'], 'The window must end after it starts.')
+    })
+  })
+export type FishBody = z.output<typeof fishBody>

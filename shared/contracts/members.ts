@@ -1,0 +1,45 @@
+import { z } from 'zod'
+
+import { endpoint } from '@/shared/api/endpoint'
+import { cellIdText, line, publicIdText, stateCode, themeChoice, unitSystem } from '@/shared/contracts/values'
+
+export const roles = ['member', 'seller', 'moderator', 'admin'] as const
+
+export const me = z.object({
+  name: z.string(),
+  email: z.string(),
+  emailVerified: z.boolean(),
+  roles: z.array(z.enum(roles)),
+  secondFactor: z.object({ enabled: z.boolean(), required: z.boolean() }),
+  place: z.object({ label: z.string(), cell: cellIdText, state: stateCode }).optional(),
+  units: unitSystem,
+  theme: themeChoice,
+  sellerId: publicIdText.optional(),
+  waiting: z.object({ orders: z.int(), reviews: z.int() }),
+})
+export type Me = z.output<typeof me>
+
+export const readMe = endpoint({
+  method: 'GET',
+  path: '/me',
+  auth: 'member',
+  summary: 'Who is signed in, and what waits for them',
+  reply: me,
+})
+
+export const changeMe = endpoint({
+  method: 'PATCH',
+  path: '/me',
+  auth: 'member',
+  summary: 'Change name, place, units or theme',
+  body: z
+    .object({
+      name: line(80).min(1, 'Please give a name.').optional(),
+      place: cellIdText.optional(),
+      placeLabel: line(120).optional(),
+      units: unitSystem.optional(),
+      theme: themeChoice.optional(),
+    })
+    .strict(),
+  reply: me,
+})
