@@ -38,7 +38,7 @@ describe('location cells', () => {
 
   it('keeps the poles and the date line inside the grid', () => {
     expect(cellContains(mustCell(90, 180), { lat: 89.99, lng: 179.99 })).toBe(true)
-    expect(mustCell(-90, -180)).toEqual({ size: 50, iy: 0, ix: 0 })
+    expect(mustCell(-90, -180)).toEqual({ sizeThousandths: 50, iy: 0, ix: 0 })
   })
 
   it.each([
@@ -97,14 +97,14 @@ describe('location cells', () => {
   ])('does not read the id %j', (text) => expect(parseCellId(text)).toBeNull())
 
   it('never sends a buyer finer or coarser than 0.05 degrees', () => {
-    expect(buyerCellAt({ lat: 45, lng: -110 })?.size).toBe(50)
+    expect(buyerCellAt({ lat: 45, lng: -110 })?.sizeThousandths).toBe(50)
   })
 })
 
 describe('the cell of a seller', () => {
   const point = { lat: 39.12, lng: -84.52 }
   const sizeWith = (people: Partial<Record<CellSize, number>>) =>
-    locationCellForSeller(point, (cell) => people[cell.size] ?? 0)?.size
+    locationCellForSeller(point, (cell) => people[cell.sizeThousandths] ?? 0)?.sizeThousandths
 
   it('stays small in town and grows in thin country', () => {
     expect(sizeWith({ 50: fewestNeighbours })).toBe(50)

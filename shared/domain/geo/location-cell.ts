@@ -3,7 +3,7 @@ export type CellSize = 50 | 100 | 200
 
 /** A square of a fixed grid that starts at 90° S, 180° W; `iy` and `ix` count cells of its own size. */
 export interface LocationCell {
-  size: CellSize
+  sizeThousandths: CellSize
   iy: number
   ix: number
 }
@@ -24,7 +24,7 @@ export function cellAt({ lat, lng }: CellPoint, size: CellSize): LocationCell | 
   const fineY = Math.min(fineIndex(lat + 90), rowsOf(finest) - 1)
   const fineX = Math.min(fineIndex(lng + 180), columnsOf(finest) - 1)
   const ratio = size / finest
-  return { size, iy: Math.floor(fineY / ratio), ix: Math.floor(fineX / ratio) }
+  return { sizeThousandths: size, iy: Math.floor(fineY / ratio), ix: Math.floor(fineX / ratio) }
 }
 
 /** A buyer's place leaves the device as this cell, never as a coordinate. null: not a place on Earth. */
@@ -33,12 +33,12 @@ export function buyerCellAt(point: CellPoint): LocationCell | null {
 }
 
 /** Centre in degrees, the only point of a cell that is ever computed with. */
-export function cellCentre({ size, iy, ix }: LocationCell): CellPoint {
+export function cellCentre({ sizeThousandths: size, iy, ix }: LocationCell): CellPoint {
   return { lat: microDegrees((iy + 0.5) * size - 90_000), lng: microDegrees((ix + 0.5) * size - 180_000) }
 }
 
 /** Edges in degrees. */
-export function cellBounds({ size, iy, ix }: LocationCell) {
+export function cellBounds({ sizeThousandths: size, iy, ix }: LocationCell) {
   return {
     south: microDegrees(iy * size - 90_000),
     north: microDegrees((iy + 1) * size - 90_000),
@@ -49,19 +49,19 @@ export function cellBounds({ size, iy, ix }: LocationCell) {
 
 /** Whether the point's own cell of that size is this one. */
 export function cellContains(cell: LocationCell, point: CellPoint): boolean {
-  const own = cellAt(point, cell.size)
+  const own = cellAt(point, cell.sizeThousandths)
   return own !== null && own.iy === cell.iy && own.ix === cell.ix
 }
 
 /** The cell of a coarser size that holds this one. */
 export function widenCell(cell: LocationCell, size: CellSize): LocationCell {
-  if (size <= cell.size) return cell
-  const ratio = size / cell.size
-  return { size, iy: Math.floor(cell.iy / ratio), ix: Math.floor(cell.ix / ratio) }
+  if (size <= cell.sizeThousandths) return cell
+  const ratio = size / cell.sizeThousandths
+  return { sizeThousandths: size, iy: Math.floor(cell.iy / ratio), ix: Math.floor(cell.ix / ratio) }
 }
 
 /** Whether the indexes lie on the grid of that size. */
-export function isOnGrid({ size, iy, ix }: LocationCell): boolean {
+export function isOnGrid({ sizeThousandths: size, iy, ix }: LocationCell): boolean {
   return iy >= 0 && iy < rowsOf(size) && ix >= 0 && ix < columnsOf(size)
 }
 
