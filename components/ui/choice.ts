@@ -1,0 +1,5 @@
+export interface Choice<Value extends string> {
+  value: Value
+  label: string
+  hint?: string
+}

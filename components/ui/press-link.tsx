@@ -1,0 +1,50 @@
+import { Link as RouterLink, type Href } from 'expo-router'
+import type { ReactNode } from 'react'
+import {
+  Pressable,
+  type GestureResponderEvent,
+  type PressableStateCallbackType,
+  type StyleProp,
+  type ViewStyle,
+} from 'react-native'
+
+type Look = (state: PressableStateCallbackType) => StyleProp<ViewStyle>
+type OnPress = (event: GestureResponderEvent) => void
+
+interface Props {
+  href: Href
+  look: Look
+  children: ReactNode
+  /** Spoken instead of the children; must begin with the words that are seen. */
+  label?: string
+  isCurrent?: boolean
+  nativeID?: string
+}
+
+/** A block that is one link: a tag, a row, a navigation place. */
+export function PressLink({ href, ...rest }: Props) {
+  return (
+    <RouterLink href={href} asChild>
+      <Surface {...rest} />
+    </RouterLink>
+  )
+}
+
+interface SurfaceProps extends Omit<Props, 'href'> {
+  onPress?: OnPress
+  onClick?: OnPress
+}
+
+// The router's slot merges `style` as an object, which loses style functions: hence `look`.
+function Surface({ look, label, isCurrent, onPress, onClick, ...fromRouter }: SurfaceProps) {
+  return (
+    <Pressable
+      {...fromRouter}
+      role="link"
+      aria-label={label}
+      aria-current={isCurrent ? 'page' : undefined}
+      onPress={onPress ?? onClick}
+      style={look}
+    />
+  )
+}
