@@ -3,7 +3,10 @@ import mysql from 'mysql2/promise'
 
 export type Database = MySql2Database<Record<string, never>>
 /** Inside a transaction or outside: stores take either. */
-export type Tx = Pick<Database, 'select' | 'selectDistinct' | 'insert' | 'update' | 'delete' | 'execute' | '$count'>
+export type Tx = Pick<
+  Database,
+  'select' | 'selectDistinct' | 'insert' | 'update' | 'delete' | 'execute' | '$count'
+>
 
 let pool: mysql.Pool | undefined
 let database: Database | undefined

@@ -1,5 +1,7 @@
 import { db, type Tx } from '@/db/client'
 
+export type { Tx }
+
 // Deadlock, lock wait timeout, snapshot conflict: the whole transaction may run again (robustness: 3.3 rule 2).
 const RETRYABLE = new Set([1213, 1205, 1020])
 const MOST_TRIES = 10

@@ -1,0 +1,109 @@
+import { betterAuth } from 'better-auth'
+import { drizzleAdapter } from 'better-auth/adapters/drizzle'
+import { APIError, createAuthMiddleware } from 'better-auth/api'
+import { twoFactor } from 'better-auth/plugins'
+
+import { db } from '@/db/client'
+import * as tables from '@/db/schema/auth'
+import { MOST_PASSWORD, LEAST_PASSWORD, passwordFault } from '@/server/auth/password-fault'
+import { queueMail } from '@/server/mail/queue-mail'
+import { resetPasswordMail } from '@/server/mail/letters/reset-password'
+import { signUpAgainMail } from '@/server/mail/letters/sign-up-again'
+import { verifyEmailMail } from '@/server/mail/letters/verify-email'
+
+export interface AuthSettings {
+  secret: string
+  origin: string
+  /** Other names of the same loopback address, so that opening `localhost` is not a forged request. */
+  alsoTrusted: string[]
+}
+
+const PASSWORD_PATHS = ['/sign-up/email', '/reset-password', '/change-password']
+const MINUTE = 60
+
+function build(settings: AuthSettings) {
+  return betterAuth({
+    appName: 'Tankward',
+    baseURL: settings.origin,
+    basePath: '/api/auth',
+    secret: settings.secret,
+    trustedOrigins: [settings.origin, ...settings.alsoTrusted],
+    database: drizzleAdapter(db(), { provider: 'mysql', schema: tables, transaction: true }),
+    emailAndPassword: {
+      enabled: true,
+      minPasswordLength: LEAST_PASSWORD,
+      maxPasswordLength: MOST_PASSWORD,
+      requireEmailVerification: true,
+      revokeSessionsOnPasswordReset: true,
+      resetPasswordTokenExpiresIn: 10 * MINUTE,
+      sendResetPassword: async ({ user, url }) => queueMail(resetPasswordMail({ to: user, url })),
+      // The screen says the same for a known and an unknown address; the owner of a known one is told by mail.
+      onExistingUserSignUp: async ({ user }) =>
+        queueMail(signUpAgainMail({ to: user, origin: settings.origin })),
+    },
+    emailVerification: {
+      sendOnSignUp: true,
+      sendOnSignIn: true,
+      autoSignInAfterVerification: true,
+      expiresIn: 60 * MINUTE,
+      sendVerificationEmail: async ({ user, url }) => queueMail(verifyEmailMail({ to: user, url })),
+    },
+    user: {
+      additionalFields: { role: { type: 'string', required: false, input: false, defaultValue: 'member' } },
+    },
+    session: {
+      expiresIn: 7 * 24 * 60 * MINUTE,
+      updateAge: 24 * 60 * MINUTE,
+      cookieCache: { enabled: false },
+    },
+    rateLimit: {
+      enabled: true,
+      storage: 'database',
+      window: MINUTE,
+      max: 100,
+      customRules: {
+        '/sign-in/email': { window: 15 * MINUTE, max: 10 },
+        '/sign-up/email': { window: 10 * MINUTE, max: 6 },
+        '/request-password-reset': { window: 10 * MINUTE, max: 3 },
+        '/send-verification-email': { window: 10 * MINUTE, max: 3 },
+        '/two-factor/verify-totp': { window: MINUTE, max: 5 },
+        '/two-factor/verify-backup-code': { window: MINUTE, max: 5 },
+        '/get-session': false,
+      },
+    },
+    advanced: {
+      database: { generateId: 'uuid' },
+      // Test settings would otherwise switch the origin check off.
+      disableOriginCheck: false,
+      useSecureCookies: settings.origin.startsWith('https://'),
+      ipAddress: { ipAddressHeaders: ['x-tankward-ip'] },
+    },
+    plugins: [twoFactor({ issuer: 'Tankward', skipVerificationOnEnable: false })],
+    hooks: {
+      before: createAuthMiddleware(async (ctx) => {
+        if (!PASSWORD_PATHS.includes(ctx.path)) return
+        const body: unknown = ctx.body
+        if (typeof body !== 'object' || body === null) return
+        const given =
+          'newPassword' in body ? body.newPassword : 'password' in body ? body.password : undefined
+        const email = 'email' in body && typeof body.email === 'string' ? body.email : ''
+        const fault = typeof given === 'string' ? passwordFault(given, email) : null
+        if (fault) throw new APIError('UNPROCESSABLE_ENTITY', { code: 'PASSWORD_TOO_COMMON', message: fault })
+      }),
+    },
+  })
+}
+
+export type Auth = ReturnType<typeof build>
+
+let auth: Auth | undefined
+
+export function openAuth(settings: AuthSettings): Auth {
+  auth = build(settings)
+  return auth
+}
+
+export function theAuth(): Auth {
+  if (!auth) throw new Error('openAuth() has not been called')
+  return auth
+}
