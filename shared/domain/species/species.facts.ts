@@ -106,7 +106,7 @@ const rows = [
     fingerlingMonths: [9, 10, 11, 12, 1, 2, 3, 4, 5], spawnLeastC: 21, spawnBestC: 27, hatchDegreeDaysC: null,
     temper: 'low; spines of 4-10 in fish puncture bags, ship those in tanks', sizeRatioMost: 2, fastHours: 48, oxygenModel: 'brown-bullhead', countPerLb: null, countPerLbUsual: null,
     legalNote: null, confidence: 'high',
-    sourceKeys: ['tucker-2004', 'currie-1998', 'piper-1982', 'mischke-2012', 'wynne-2007', 'ifas-catfish', 'alabama-catfish'],
+    sourceKeys: ['tucker-2004', 'currie-1998', 'piper-1982', 'mischke-2012', 'wynne-2007', 'ifas-catfish', 'alabama-catfish', 'srac-462'],
   },
   {
     speciesCode: 9, id: 'rainbow_trout', commonName: 'Rainbow trout', scientificName: 'Oncorhynchus mykiss', kind: 'fish', thermalClass: 'cold',

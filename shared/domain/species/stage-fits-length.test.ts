@@ -4,15 +4,15 @@ import { stages } from '@/shared/domain/species/stages.facts'
 
 describe('stage words against inches', () => {
   it.each([
-    ['fry', 0.5, 1, true],
-    ['fingerling', 0.5, 0.5, false],
-    ['fingerling', 0.75, 1, true],
-    ['fingerling', 3, 4.25, true],
-    ['fingerling', 3, 5, false],
-    ['advanced-fingerling', 4, 6, true],
-    ['juvenile', 2, 12, true],
-    ['adult', 1, 2, null],
-  ] as const)('%s of %d-%d in: %s', (stage, minIn, maxIn, fits) => {
+    { stage: 'fry', minIn: 0.5, maxIn: 1, fits: true },
+    { stage: 'fingerling', minIn: 0.5, maxIn: 0.5, fits: false },
+    { stage: 'fingerling', minIn: 0.75, maxIn: 1, fits: true },
+    { stage: 'fingerling', minIn: 3, maxIn: 4.25, fits: true },
+    { stage: 'fingerling', minIn: 3, maxIn: 5, fits: false },
+    { stage: 'advanced-fingerling', minIn: 4, maxIn: 6, fits: true },
+    { stage: 'juvenile', minIn: 2, maxIn: 12, fits: true },
+    { stage: 'adult', minIn: 1, maxIn: 2, fits: null },
+  ] as const)('$stage of $minIn to $maxIn in: $fits', ({ stage, minIn, maxIn, fits }) => {
     expect(stageFitsLength(stage, minIn, maxIn)).toBe(fits)
   })
 
