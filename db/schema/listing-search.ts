@@ -63,8 +63,8 @@ export const listingSearch = mysqlTable(
     /** 0 best … 500 worst, 501 not rated yet. */
     ratingRank: usmall(),
     // Millionths of a degree: exact, so that a counter that is added to and taken from comes back to zero.
-    latMicro: int().notNull(),
-    lngMicro: int().notNull(),
+    latE6: int().notNull(),
+    lngE6: int().notNull(),
     sellerId: uint(),
     rev: uint(),
     // Where map_cell counts this row now (category 0: nowhere), so that the counters can always be put right.
@@ -119,8 +119,8 @@ export const mapCell = mysqlTable(
     category: utiny(),
     cell: uint(),
     n: int().notNull(),
-    sumLatMicro: bigint({ mode: 'number' }).notNull(),
-    sumLngMicro: bigint({ mode: 'number' }).notNull(),
+    sumLatE6: bigint({ mode: 'number' }).notNull(),
+    sumLngE6: bigint({ mode: 'number' }).notNull(),
   },
   (t) => [primaryKey({ columns: [t.lvl, t.category, t.cell] })],
 )
