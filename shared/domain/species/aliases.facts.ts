@@ -1,0 +1,122 @@
+import type { TaxonId } from '@/shared/domain/species/taxa.facts'
+import type { SourceKey } from '@/shared/sources'
+
+/** `synonym`: an older scientific name. `accepted` is kept for a common name beside the taxon's own. */
+export type AliasKind = 'accepted' | 'synonym' | 'trade' | 'common' | 'foreign' | 'misspelt'
+
+export interface TaxonAlias {
+  alias: string
+  taxonId: TaxonId
+  kind: AliasKind
+  sourceKey: SourceKey
+}
+
+type Named = readonly [TaxonId, AliasKind, ...string[]]
+
+// From memory, all of it: no open name list ships with the product. Moderators add to it; whatever matches nothing
+// goes to them.
+// prettier-ignore
+const fromMemory: readonly Named[] = [
+  ['oreochromis', 'common', 'tilapia', 'tilapias'],
+  ['oreochromis', 'misspelt', 'talapia', 'tilipia', 'telapia', 'tillapia'],
+  ['nile_tilapia', 'synonym', 'Tilapia nilotica', 'Sarotherodon niloticus'],
+  ['nile_tilapia', 'trade', 'Niles', 'black Nile'],
+  ['nile_tilapia', 'misspelt', 'Nile talapia', 'Nile tilipia'],
+  ['blue_tilapia', 'synonym', 'Tilapia aurea', 'Sarotherodon aureus'],
+  ['blue_tilapia', 'misspelt', 'blue talapia', 'blue tilipia'],
+  ['mozambique_hybrid_tilapia', 'synonym', 'Tilapia mossambica', 'Sarotherodon mossambicus'],
+  ['mozambique_hybrid_tilapia', 'misspelt', 'Mozambic tilapia', 'Mozambique talapia'],
+  ['wami_tilapia', 'synonym', 'Oreochromis urolepis hornorum', 'Oreochromis hornorum'],
+  ['red_hybrid_tilapia', 'trade', 'red tilapia', 'Hawaiian gold tilapia', 'gold tilapia'],
+  ['blue_nile_hybrid_tilapia', 'trade', 'white tilapia', 'all-male hybrid tilapia'],
+  ['bluegill', 'common', 'bream', 'brim', 'coppernose', 'coppernose bluegill'],
+  ['bluegill', 'misspelt', 'blue gill', 'bluegil'],
+  ['hybrid_bluegill', 'trade', 'hybrid bream', 'hybrid sunfish', 'HBG'],
+  ['redear_sunfish', 'common', 'shellcracker', 'redear'],
+  ['lepomis', 'common', 'sunfish', 'panfish'],
+  ['largemouth_bass', 'common', 'black bass', 'bass', 'LMB'],
+  ['largemouth_bass', 'misspelt', 'large mouth bass'],
+  ['yellow_perch', 'common', 'ringed perch', 'lake perch', 'jack perch'],
+  ['european_perch', 'common', 'Eurasian perch', 'English perch', 'redfin perch'],
+  ['european_perch', 'foreign', 'Flussbarsch', 'baars'],
+  ['walleye', 'common', 'yellow pike', 'walleyed pike'],
+  ['walleye', 'synonym', 'Stizostedion vitreum'],
+  ['zander', 'common', 'pikeperch', 'pike-perch', 'European walleye'],
+  ['zander', 'synonym', 'Stizostedion lucioperca'],
+  ['zander', 'foreign', 'sandre'],
+  ['channel_catfish', 'common', 'channel cat', 'spotted cat', 'fiddler'],
+  ['channel_catfish', 'misspelt', 'chanel catfish', 'channel cat fish'],
+  ['hybrid_catfish', 'trade', 'channel-blue hybrid'],
+  ['flathead_catfish', 'common', 'mudcat', 'yellow cat'],
+  ['rainbow_trout', 'common', 'steelhead', 'rainbow', 'rainbows'],
+  ['rainbow_trout', 'synonym', 'Salmo gairdneri'],
+  ['rainbow_trout', 'misspelt', 'rainbow trought', 'raindow trout'],
+  ['common_carp_koi', 'accepted', 'koi', 'common carp', 'carp', 'mirror carp'],
+  ['common_carp_koi', 'trade', 'koi carp', 'nishikigoi', 'butterfly koi'],
+  ['goldfish', 'common', 'comet', 'comets', 'feeder goldfish', 'shubunkin', 'fantail'],
+  ['goldfish', 'misspelt', 'gold fish'],
+  ['crucian_carp', 'foreign', 'Karausche'],
+  ['prussian_carp', 'common', 'gibel carp', 'silver crucian'],
+  ['prussian_carp', 'synonym', 'Carassius auratus gibelio'],
+  ['fathead_minnow', 'common', 'fathead', 'rosy red', 'rosy red minnow', 'tuffy'],
+  ['golden_shiner', 'common', 'shiner', 'pond shiner'],
+  ['golden_shiner', 'synonym', 'Notemigonus chrysoleucas'],
+  ['grass_carp', 'common', 'white amur', 'triploid grass carp'],
+  ['silver_carp', 'common', 'flying carp', 'jumping carp'],
+  ['bighead_carp', 'synonym', 'Aristichthys nobilis'],
+  ['hypophthalmichthys', 'common', 'Asian carp'],
+  ['stone_moroko', 'common', 'topmouth gudgeon'],
+  ['eurasian_minnow', 'common', 'European minnow'],
+  ['hybrid_striped_bass', 'trade', 'wiper', 'sunshine bass', 'palmetto bass', 'hybrid striper', 'HSB'],
+  ['striped_bass', 'common', 'striper', 'rockfish'],
+  ['walking_catfish', 'common', 'clarias', 'magur'],
+  ['walking_catfish', 'foreign', 'hito', 'pla duk'],
+  ['african_catfish', 'common', 'sharptooth catfish', 'North African catfish'],
+  ['channidae', 'common', 'snakehead', 'snakeheads', 'snake head fish'],
+  ['channidae', 'misspelt', 'snakhead', 'snakehed'],
+  ['striped_snakehead', 'trade', 'Indian murrel', 'murrel', 'striped murrel', 'snakehead murrel'],
+  ['striped_snakehead', 'foreign', 'haruan', 'dalag', 'gabus', 'pla chon', 'ca loc'],
+  ['bullseye_snakehead', 'trade', 'great snakehead', 'giant murrel', 'cobra snakehead'],
+  ['northern_snakehead', 'foreign', 'gamulchi'],
+  ['parachanna', 'common', 'African snakehead'],
+  ['nile_perch', 'foreign', 'capitaine', 'mbuta'],
+  ['wels_catfish', 'common', 'wels', 'sheatfish'],
+  ['amur_sleeper', 'common', 'Chinese sleeper', 'rotan'],
+  ['redclaw_crayfish', 'common', 'redclaw', 'red claw', 'red claw lobster', 'Australian lobster'],
+  ['redclaw_crayfish', 'misspelt', 'red clow'],
+  ['common_yabby', 'common', 'yabby', 'yabbie', 'Australian yabby', 'blue yabby', 'electric blue yabby'],
+  ['red_swamp_crayfish', 'common', 'crawfish', 'crawdad', 'Louisiana crawfish', 'mudbug'],
+  ['red_swamp_crayfish', 'misspelt', 'crayfich', 'crawfich'],
+  ['marbled_crayfish', 'trade', 'marmorkrebs', 'self-cloning crayfish'],
+  ['marbled_crayfish', 'synonym', 'Procambarus fallax virginalis'],
+  ['rusty_crayfish', 'synonym', 'Orconectes rusticus'],
+  ['freshwater_prawn', 'common', 'Malaysian prawn', 'giant river prawn', 'freshwater shrimp', 'scampi'],
+  ['freshwater_prawn', 'misspelt', 'fresh water prawn', 'prown'],
+  ['eriocheir', 'common', 'Chinese mitten crab', 'hairy crab'],
+  ['dreissena', 'common', 'zebra mussel', 'quagga mussel', 'quagga'],
+  ['acipenseridae', 'common', 'sturgeon', 'sterlet'],
+  ['red_wiggler', 'common', 'red worm', 'red worms', 'compost worm', 'tiger worm', 'manure worm', 'brandling'],
+  ['red_wiggler', 'misspelt', 'red wigler', 'red wriggler', 'redwiggler'],
+  ['red_wiggler', 'synonym', 'Eisenia foetida'],
+  ['european_nightcrawler', 'trade', 'Euros', 'ENC', 'super red'],
+  ['european_nightcrawler', 'synonym', 'Dendrobaena veneta', 'Dendrobaena hortensis'],
+  ['european_nightcrawler', 'misspelt', 'European night crawler', 'Europen nightcrawler'],
+  ['canadian_nightcrawler', 'common', 'nightcrawler', 'dew worm'],
+  ['canadian_nightcrawler', 'misspelt', 'night crawler'],
+  ['amynthas', 'trade', 'snake worm', 'Alabama jumper', 'crazy worm', 'jumping worm', 'Asian jumping worm', 'Georgia jumper', 'super jumper'],
+  ['amynthas', 'misspelt', 'jumpin worm', 'amynthus'],
+  ['black_soldier_fly_larvae', 'trade', 'BSF', 'BSFL', 'soldier fly grub', 'soldier grubs', 'black soldier fly'],
+  ['water_spinach', 'foreign', 'kangkong', 'kang kong', 'ong choy', 'ong choi', 'rau muong', 'kangkung', 'tangkong', 'pak boong'],
+  ['water_spinach', 'common', 'swamp cabbage', 'swamp morning glory', 'Chinese water spinach'],
+  ['water_spinach', 'misspelt', 'water spinich', 'kang cong'],
+  ['giant_salvinia', 'common', 'kariba weed'],
+  ['water_hyacinth', 'synonym', 'Pontederia crassipes'],
+  ['water_hyacinth', 'misspelt', 'water hyacynth'],
+  ['water_lettuce', 'common', 'water cabbage', 'Nile cabbage'],
+  ['parrotfeather', 'common', "parrot's feather", 'parrot feather'],
+  ['brazilian_elodea', 'trade', 'anacharis'],
+]
+
+export const aliases: readonly TaxonAlias[] = fromMemory.flatMap(([taxonId, kind, ...names]) =>
+  names.map((alias): TaxonAlias => ({ alias, taxonId, kind, sourceKey: 'memory' })),
+)
