@@ -73,10 +73,12 @@ export const listingVersion = mysqlTable(
     decidedBy: memberRef(),
     reasonCode: varchar({ length: 32 }),
     reasonText: text(),
+    /** Weight of the flags: the queue shows the riskiest first. */
+    risk: smallint({ unsigned: true }).notNull().default(0),
   },
   (t) => [
     uniqueIndex('u_listing_version').on(t.listingId, t.number),
-    index('k_version_review').on(t.review, t.submittedAt),
+    index('k_version_review').on(t.review, t.risk, t.submittedAt),
   ],
 )
 
@@ -97,9 +99,16 @@ export const stockMovement = mysqlTable(
     shipped: int().notNull().default(0),
     delivered: int().notNull().default(0),
     by: memberRef(),
+    note: varchar({ length: 200 }),
+    /** Set where a seller's own command moves stock: the same command never moves it twice. */
+    commandId: varchar({ length: 80 }),
     at: instant().notNull(),
   },
-  (t) => [index('k_stock_listing').on(t.listingId, t.id), index('k_stock_order').on(t.orderId)],
+  (t) => [
+    index('k_stock_listing').on(t.listingId, t.id),
+    index('k_stock_order').on(t.orderId),
+    uniqueIndex('u_stock_command').on(t.listingId, t.commandId),
+  ],
 )
 
 /** A published place and time to collect. Buyers hold one place in it. */

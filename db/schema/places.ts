@@ -1,12 +1,17 @@
 import { double, index, int, mysqlTable, primaryKey, smallint, varchar } from 'drizzle-orm/mysql-core'
 
-export const zipPlace = mysqlTable('zip_place', {
-  zip: varchar({ length: 5 }).primaryKey(),
-  city: varchar({ length: 64 }).notNull(),
-  state: varchar({ length: 2 }).notNull(),
-  lat: double().notNull(),
-  lng: double().notNull(),
-})
+export const zipPlace = mysqlTable(
+  'zip_place',
+  {
+    zip: varchar({ length: 5 }).primaryKey(),
+    city: varchar({ length: 64 }).notNull(),
+    state: varchar({ length: 2 }).notNull(),
+    lat: double().notNull(),
+    lng: double().notNull(),
+  },
+  // Which town and state lie nearest to a location cell.
+  (t) => [index('k_zip_point').on(t.lat, t.lng)],
+)
 
 export const cityPlace = mysqlTable(
   'city_place',
