@@ -1,0 +1,31 @@
+import { useSegments } from 'expo-router'
+import type { ReactNode } from 'react'
+import { StyleSheet, View } from 'react-native'
+
+import { PhoneBar } from './phone-bar'
+import { Rail } from './rail'
+import { SkipLink } from './skip-link'
+
+import { color } from '@/constants/theme'
+import { useBreakpoint } from '@/hooks/use-breakpoint'
+
+/** The rail stands beside every page; the phone's bar only under the places themselves. */
+export function Frame({ children }: { children: ReactNode }) {
+  const breakpoint = useBreakpoint()
+  const isAtPlace = useSegments()[0] === '(tabs)'
+  return (
+    <View style={[styles.frame, breakpoint === 'phone' ? styles.column : styles.row]}>
+      <SkipLink />
+      {breakpoint === 'phone' ? null : <Rail isNarrow={breakpoint === 'middle'} />}
+      <View style={styles.page}>{children}</View>
+      {breakpoint === 'phone' && isAtPlace ? <PhoneBar /> : null}
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  frame: { flex: 1, backgroundColor: color.mist },
+  row: { flexDirection: 'row' },
+  column: { flexDirection: 'column' },
+  page: { flex: 1, minWidth: 0 },
+})

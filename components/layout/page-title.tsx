@@ -1,0 +1,42 @@
+import { useIsFocused } from 'expo-router'
+import { useEffect, useRef } from 'react'
+import { StyleSheet, View } from 'react-native'
+
+import { Heading } from '@/components/ui/heading'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+
+interface Props {
+  heading: string
+  intro?: string
+  isHidden?: boolean
+}
+
+let isFirstPage = true
+
+/** The one h1. A page that comes into view takes the keyboard here, so that its name is read out. */
+export function PageTitle({ heading, intro, isHidden }: Props) {
+  const box = useRef<View>(null)
+  const isInView = useIsFocused()
+  useEffect(() => {
+    if (!isInView) return
+    if (!isFirstPage) box.current?.focus()
+    isFirstPage = false
+  }, [isInView])
+  return (
+    <View ref={box} tabIndex={-1} style={isHidden ? styles.hidden : styles.title}>
+      <Heading level={1}>{heading}</Heading>
+      {intro ? (
+        <Text tint="muted" style={styles.intro}>
+          {intro}
+        </Text>
+      ) : null}
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  title: { gap: space.sm },
+  intro: { maxWidth: 640 },
+  hidden: { position: 'absolute', width: 1, height: 1, overflow: 'hidden', clipPath: 'inset(50%)' },
+})
