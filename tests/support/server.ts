@@ -1,0 +1,95 @@
+import { randomInt, randomUUID } from 'node:crypto'
+import { mkdtemp, rm } from 'node:fs/promises'
+import type { Server } from 'node:http'
+import { tmpdir } from 'node:os'
+import path from 'node:path'
+
+import { toNodeHandler } from 'better-auth/node'
+import express, { type Express } from 'express'
+import request from 'supertest'
+import type TestAgent from 'supertest/lib/agent'
+
+import { connect, db, disconnect, type Database } from '@/db/client'
+import { BUILT_PASSWORD } from '@/seed/build-member'
+import { openAuth, theAuth } from '@/server/auth/auth'
+import { problemHandler, unknownPath } from '@/server/http/problem-handler'
+import { sameOrigin } from '@/server/http/same-origin'
+import { log } from '@/server/log'
+import { placeRoutes } from '@/server/places/place-routes'
+import { freshDatabase } from '@/tests/support/test-database'
+import { totpOf } from '@/tests/support/totp'
+
+const TEST_ORIGIN = 'http://127.0.0.1:8080'
+
+export interface TestServer {
+  db: Database
+  /** Where uploaded photos land. */
+  uploadDir: string
+  /** A visitor. Each has an address of its own, so that call limits do not mix. */
+  visitor: () => TestAgent
+  /** Signs in through the real sign-in; `secondFactor` sets one up and passes it, as staff must. */
+  signedIn: (email: string, more?: { secondFactor?: boolean }) => Promise<TestAgent>
+  close: () => Promise<void>
+}
+
+/** The header of a command; a repeat passes the same key. */
+export function keyed(key: string = randomUUID()): { 'idempotency-key': string } {
+  return { 'idempotency-key': key }
+}
+
+function app(): Express {
+  const product = express()
+  product.set('trust proxy', 1)
+  product.use((req, res, next) => {
+    res.locals.requestId = randomUUID()
+    req.headers['x-tankward-ip'] = req.ip ?? '0.0.0.0'
+    next()
+  })
+  product.all('/api/auth/*splat', toNodeHandler(theAuth()))
+  product.use('/api/v1', sameOrigin([TEST_ORIGIN]), express.json({ limit: '256kb' }))
+  product.use('/api/v1', placeRoutes())
+  product.use(unknownPath)
+  product.use(problemHandler)
+  return product
+}
+
+async function setUpSecondFactor(agent: TestAgent, password: string): Promise<void> {
+  const begun = await agent.post('/api/auth/two-factor/enable').send({ password }).expect(200)
+  const code = await totpOf((begun.body as { totpURI: string }).totpURI)
+  await agent.post('/api/auth/two-factor/verify-totp').send({ code }).expect(200)
+}
+
+/** The product on a database of its own, answering on a free port. `label`: lower case words with underscores. */
+export async function openTestServer(label: string): Promise<TestServer> {
+  log.level = 'silent'
+  const database = await freshDatabase(label)
+  connect(database.url)
+  openAuth({ secret: 'test-secret-'.repeat(4), origin: TEST_ORIGIN, alsoTrusted: [] })
+  const uploadDir = await mkdtemp(path.join(tmpdir(), 'tankward-test-photos-'))
+  const server = await new Promise<Server>((done, fail) => {
+    const listening = app().listen(0, '127.0.0.1', (error) => (error ? fail(error) : done(listening)))
+  })
+  const visitor = (): TestAgent => {
+    const from = `10.${randomInt(256)}.${randomInt(256)}.${randomInt(1, 255)}`
+    return request
+      .agent(server)
+      .set({ origin: TEST_ORIGIN, 'x-tankward': '1', 'x-forwarded-for': from }) as unknown as TestAgent
+  }
+  return {
+    db: db(),
+    uploadDir,
+    visitor,
+    signedIn: async (email, more) => {
+      const agent = visitor()
+      await agent.post('/api/auth/sign-in/email').send({ email, password: BUILT_PASSWORD }).expect(200)
+      if (more?.secondFactor) await setUpSecondFactor(agent, BUILT_PASSWORD)
+      return agent
+    },
+    close: async () => {
+      await new Promise((done) => server.close(done))
+      await disconnect()
+      await database.drop()
+      await rm(uploadDir, { recursive: true, force: true })
+    },
+  }
+}
