@@ -1,0 +1,31 @@
+import { set, type FieldErrors, type FieldValues, type Resolver } from 'react-hook-form'
+
+import { issueSentence } from './issue-sentence'
+
+import type { z } from 'zod'
+
+interface Options {
+  /** Fields that hold a list: an error of the list itself stands at its root, beside those of its rows. */
+  lists: readonly string[]
+}
+
+/** Makes a form's resolver from a check that answers with parser issues whose paths are the form's own names. */
+export function issueResolver<T extends FieldValues>(
+  check: (typing: T) => readonly z.core.$ZodIssue[],
+  { lists }: Options,
+): Resolver<T> {
+  return (typing) => {
+    const issues = check(typing)
+    if (issues.length === 0) return { values: typing, errors: {} }
+    const errors = {}
+    const seen = new Set<string>()
+    for (const issue of issues) {
+      const path = issue.path.map(String).join('.')
+      const name = lists.includes(path) ? `${path}.root` : path
+      if (seen.has(name)) continue // one sentence a field; the first is the nearest
+      seen.add(name)
+      set(errors, name, { type: issue.code, message: issueSentence(issue) })
+    }
+    return { values: {}, errors: errors as FieldErrors<T> }
+  }
+}
