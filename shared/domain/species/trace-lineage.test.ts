@@ -20,6 +20,11 @@ describe('lineage of a taxon', () => {
     expect(lineage?.hybridParents.map((line) => line[0])).toEqual(['green_sunfish', 'bluegill'])
   })
 
+  it('inherits the flags of its family', () => {
+    expect(traceLineage('rainbow_trout')?.flags).toEqual(['salmonid-papers'])
+    expect(traceLineage('bluegill')?.flags).toEqual([])
+  })
+
   it('knows no lineage of a stranger', () => expect(traceLineage('axolotl')).toBeNull())
 
   it('has a taxon for each of the 20 species, under the same id', () => {

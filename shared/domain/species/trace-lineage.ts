@@ -1,5 +1,5 @@
 import { findTaxon } from '@/shared/domain/species/find-taxon'
-import type { TaxonKind } from '@/shared/domain/species/taxon'
+import type { TaxonFlag, TaxonKind } from '@/shared/domain/species/taxon'
 
 /** What the legal gate needs to know of a taxon: ids from the most to the least specific. */
 export interface TaxonLineage {
@@ -9,6 +9,7 @@ export interface TaxonLineage {
   self: readonly string[]
   /** The same for each parent of a cross; empty for everything else. */
   hybridParents: readonly (readonly string[])[]
+  flags: readonly TaxonFlag[]
 }
 
 /** null: not a taxon of ours. */
@@ -16,7 +17,9 @@ export function traceLineage(taxonId: string): TaxonLineage | null {
   const taxon = findTaxon(taxonId)
   if (!taxon) return null
   const hybridParents = (taxon.hybridParents ?? []).map((parentId) => ancestry(parentId))
-  return { id: taxon.id, kind: taxon.kind, self: ancestry(taxon.id), hybridParents }
+  const self = ancestry(taxon.id)
+  const flags = [...self, ...hybridParents.flat()].flatMap((id) => findTaxon(id)?.flags ?? [])
+  return { id: taxon.id, kind: taxon.kind, self, hybridParents, flags: [...new Set(flags)] }
 }
 
 function ancestry(taxonId: string): string[] {
