@@ -15,6 +15,7 @@ const LAST_WORDS = 12
  * @property {string[]} command program and arguments; "node" means this very Node
  * @property {Record<string, string | undefined>} [environment]
  * @property {number} [graceMs] how long it may take to end after SIGTERM
+ * @property {boolean} [shown] true: it speaks to the person, not to a log
  *
  * @typedef {{ code: number | null, signal: string | null }} Ending
  *
@@ -30,37 +31,46 @@ const LAST_WORDS = 12
 /** Thrown by work that was cut short because everything is being stopped. */
 export class Leaving extends Error {}
 
-/** @param {string} file */
+/** The end of a log; of a crash, the part that names it. @param {string} file */
 async function tailOf(file) {
   const text = await readFile(file, 'utf8').catch(() => '')
-  return text.trimEnd().split('\n').slice(-LAST_WORDS).join('\n')
+  const lines = text
+    .trimEnd()
+    .split('\n')
+    .slice(-5 * LAST_WORDS)
+  const named = lines.findLastIndex((line) => /^(?:\w*Error\b|Uncaught)/.test(line))
+  return (named < 0 ? lines.slice(-LAST_WORDS) : lines.slice(named, named + LAST_WORDS)).join('\n')
+}
+
+/** Nothing to do when it has gone already. @param {number} pid @param {NodeJS.Signals} signal */
+function signalTo(pid, signal) {
+  try {
+    process.kill(pid, signal)
+  } catch (error) {
+    if (!(error instanceof Error && 'code' in error && error.code === 'ESRCH')) throw error
+  }
 }
 
 /** @param {string} log @param {Task} task @returns {Member} */
-function launch(log, { name, command, environment, graceMs = 2_000 }) {
+function launch(log, { name, command, environment, graceMs = 2_000, shown = false }) {
   const [program, ...rest] = command
   mkdirSync(path.dirname(log), { recursive: true })
-  const out = openSync(log, 'w')
+  const out = shown ? null : openSync(log, 'w')
   // A group of its own: Ctrl-C reaches only the starter, which then stops everything in order.
   const child = spawn(program === 'node' ? process.execPath : (program ?? ''), rest, {
     cwd: ROOT,
     env: environment ?? process.env,
     detached: true,
-    stdio: ['ignore', out, out],
+    stdio: ['ignore', out ?? 'inherit', out ?? 'inherit'],
   })
-  closeSync(out)
+  if (out !== null) closeSync(out)
   /** @type {Promise<Ending>} */
   const ended = new Promise((done) => {
     child.once('exit', (code, signal) => done({ code, signal }))
     child.once('error', () => done({ code: 127, signal: null }))
   })
-  /** @param {NodeJS.Signals} signal */
-  const send = (signal) => {
-    try {
-      if (child.pid) process.kill(-child.pid, signal)
-    } catch (error) {
-      if (!(error instanceof Error && 'code' in error && error.code === 'ESRCH')) throw error
-    }
+  const send = (/** @type {NodeJS.Signals} */ signal) => {
+    if (child.pid) signalTo(-child.pid, signal)
   }
   const stop = async () => {
     send('SIGTERM')
@@ -84,26 +94,35 @@ export function makeCrew(logs) {
   /** @param {typeof aboard[number]} member */
   const leave = (member) => void aboard.splice(aboard.indexOf(member), 1)
 
+  const logOf = (/** @type {Task} */ { name }) => path.join(logs, `${name.replaceAll(' ', '-')}.log`)
+
   /** @param {Task} task */
   function start(task) {
     if (leaving) throw new Leaving()
-    const member = launch(path.join(logs, `${task.name.replaceAll(' ', '-')}.log`), task)
+    const member = launch(logOf(task), task)
     aboard.push(member)
     void member.ended.then(() => aboard.includes(member) && leave(member))
     return member
   }
 
+  /** @param {Task} task */
+  async function finish(task) {
+    const ending = await start(task).ended
+    if (leaving) throw new Leaving()
+    return ending
+  }
+
   /** Runs a program to its end; a failure becomes a sentence. @param {Task} task */
   async function run(task) {
-    const member = start(task)
-    const { code, signal } = await member.ended
-    if (leaving) throw new Leaving()
+    const { code, signal } = await finish(task)
     if (code === 0) return
-    const words = await member.lastWords()
+    const log = logOf(task)
+    const words = await tailOf(log)
     const known = explainFailure(words)
     const how = signal ? `was ended by ${signal}` : `failed (exit code ${code})`
-    const log = path.relative(ROOT, path.join(logs, `${task.name.replaceAll(' ', '-')}.log`))
-    throw new Fault(`${known ? `${known}\n` : ''}${task.name} ${how}. Its last words, from ${log}:\n${words}`)
+    throw new Fault(
+      `${known ? `${known}\n` : ''}${task.name} ${how}. Its last words, from ${path.relative(ROOT, log)}:\n${words}`,
+    )
   }
 
   /**
@@ -112,17 +131,18 @@ export function makeCrew(logs) {
    * @param {Promise<T>} coming
    */
   async function adopt(coming) {
-    let drop = () => {}
-    aboard.push({
-      stop: () =>
-        coming.then(
-          (one) => one.stop(),
-          () => undefined,
-        ),
-      drop: () => drop(),
-    })
-    const made = await coming
-    drop = () => void process.kill(made.pid, 'SIGTERM')
+    /** @type {T | null} */
+    let made = null
+    const member = {
+      stop: async () => {
+        await coming.catch(() => undefined)
+        await made?.stop()
+        leave(member)
+      },
+      drop: () => made && signalTo(made.pid, 'SIGTERM'),
+    }
+    aboard.push(member)
+    made = await coming
     if (leaving) throw new Leaving()
     return made
   }
@@ -134,9 +154,9 @@ export function makeCrew(logs) {
   }
   const stopAll = () => (leaving ??= stopInOrder())
   // The starter ends without having stopped them, as a test run does that was broken off.
-  process.once('exit', () => leaving || aboard.forEach((member) => member.drop()))
+  process.once('exit', () => aboard.forEach((member) => member.drop()))
 
-  return { start, run, adopt, stopAll, isLeaving: () => leaving !== null }
+  return { start, finish, run, adopt, stopAll, isLeaving: () => leaving !== null }
 }
 
 /** @typedef {ReturnType<typeof makeCrew>} Crew */

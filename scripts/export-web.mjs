@@ -39,6 +39,7 @@ export async function exportWeb(crew, folder = path.join(ROOT, 'dist')) {
       command: ['node', 'node_modules/expo/bin/cli', 'export', '-p', 'web', '--output-dir', half],
       environment: { ...plainEnvironment(), CI: '1', EXPO_NO_TELEMETRY: '1', NODE_ENV: 'production' },
     })
+    await rm(path.join(half, 'metadata.json'), { force: true })
     await precompress(half)
     await writeFile(path.join(half, STAMP), hash)
     await rename(folder, old).catch((error) => {

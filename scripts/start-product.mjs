@@ -1,20 +1,11 @@
-import { mkdir } from 'node:fs/promises'
 import path from 'node:path'
 
 import { exportWeb } from './export-web.mjs'
 import { Fault } from './fault.mjs'
-import { rememberedPorts, tryPort } from './ports.mjs'
-import { takeOver, writeNote } from './run-note.mjs'
-import { readSecrets } from './secrets.mjs'
-import { seedOnce } from './seed-once.mjs'
-import { namedIn, serverEnvironment } from './server-environment.mjs'
-import { startDatabase } from './start-database.mjs'
-import { startMailCatcher, startPayments } from './start-stand-ins.mjs'
+import { claimGround, layGround } from './lay-ground.mjs'
+import { writeNote } from './run-note.mjs'
 import { step } from './tell.mjs'
 import { deathOf, waitUntilUp } from './wait-until-up.mjs'
-
-// Beside the server's own 8080; tried at the first start of a data folder.
-const FIRST_PORTS = { smtp: 8025, mail: 8026, pay: 8027 }
 
 /**
  * @typedef {object} ProductOptions
@@ -32,35 +23,6 @@ const FIRST_PORTS = { smtp: 8025, mail: 8026, pay: 8027 }
  * @property {string} databaseUrl as the app signs in
  * @property {() => Promise<void>} restartServer
  */
-
-/** @param {number} wanted */
-async function portFor(wanted) {
-  const port = await tryPort(wanted)
-  if (port !== null) return port
-  throw new Fault(
-    `Port ${wanted} is in use by another program. Free it, or choose another: npm start -- --port ${wanted + 1}`,
-  )
-}
-
-/**
- * Everything the server stands on.
- * @param {import('./crew.mjs').Crew} crew @param {ProductOptions & { origin: string }} options
- */
-async function layGround(crew, { dataDir, port, origin, clockOffsetMs, durable, environment }) {
-  const secrets = await readSecrets(dataDir)
-  const ports = await rememberedPorts(dataDir, FIRST_PORTS)
-  const named = namedIn(environment)
-  const given = { dataDir, origin, clockOffsetMs, ports, secrets }
-  const [database, mail, payments] = await Promise.all([
-    named.database ? null : step('Database', () => startDatabase(crew, { dataDir, durable })),
-    named.mail ? null : startMailCatcher(crew, given),
-    named.payments ? null : startPayments(crew, given),
-  ])
-  const databaseUrl = environment.DATABASE_URL ?? database?.url ?? ''
-  const settings = serverEnvironment({ ...given, port, databaseUrl }, environment)
-  if (database) await seedOnce(crew, { database, dataDir, settings })
-  return { database, mail, payments, settings }
-}
 
 /** @param {{ pid: number }} database @param {() => void} gone */
 function watchDatabase(database, gone) {
@@ -82,11 +44,7 @@ function watchDatabase(database, gone) {
  */
 export async function startProduct(crew, options) {
   const dataDir = path.resolve(options.dataDir)
-  await mkdir(dataDir, { recursive: true })
-  await takeOver(dataDir)
-  const port = await portFor(options.port)
-  const origin = `http://127.0.0.1:${port}`
-  await writeNote(dataDir, { origin, pids: [] })
+  const { port, origin } = await claimGround(dataDir, options.port)
   const [{ database, mail, payments, settings }] = await Promise.all([
     layGround(crew, { ...options, dataDir, port, origin }),
     step('Web app', () => exportWeb(crew)),
