@@ -19,6 +19,8 @@ interface Props {
   label?: string
   isCurrent?: boolean
   nativeID?: string
+  /** Told when the pointer comes over the block and leaves it. */
+  onHotChange?: (isHot: boolean) => void
 }
 
 /** A block that is one link: a tag, a row, a navigation place. */
@@ -36,7 +38,7 @@ interface SurfaceProps extends Omit<Props, 'href'> {
 }
 
 // The router's slot merges `style` as an object, which loses style functions: hence `look`.
-function Surface({ look, label, isCurrent, onPress, onClick, ...fromRouter }: SurfaceProps) {
+function Surface({ look, label, isCurrent, onHotChange, onPress, onClick, ...fromRouter }: SurfaceProps) {
   return (
     <Pressable
       {...fromRouter}
@@ -44,6 +46,8 @@ function Surface({ look, label, isCurrent, onPress, onClick, ...fromRouter }: Su
       aria-label={label}
       aria-current={isCurrent ? 'page' : undefined}
       onPress={onPress ?? onClick}
+      onHoverIn={() => onHotChange?.(true)}
+      onHoverOut={() => onHotChange?.(false)}
       style={look}
     />
   )

@@ -1,10 +1,7 @@
+import type { WebKeyEvent } from './web-key-event'
+
 // What react-native-web understands beyond React Native's own types.
 declare module 'react-native' {
-  interface WebKeyEvent {
-    nativeEvent: { key: string; shiftKey: boolean; ctrlKey: boolean; metaKey: boolean; altKey: boolean }
-    preventDefault: () => void
-    stopPropagation: () => void
-  }
   interface AccessibilityProps {
     'aria-activedescendant'?: string
     'aria-autocomplete'?: 'list' | 'none' | 'both'
@@ -44,5 +41,3 @@ declare module 'react-native' {
     backgroundImage?: string
   }
 }
-
-export {}
