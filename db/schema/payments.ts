@@ -1,4 +1,4 @@
-import { bigint, index, int, mysqlTable, uniqueIndex, varchar } from 'drizzle-orm/mysql-core'
+import { bigint, index, int, mysqlTable, smallint, uniqueIndex, varchar } from 'drizzle-orm/mysql-core'
 
 import { instant, jsonOf } from '@/db/schema/columns'
 import { order } from '@/db/schema/orders'
@@ -53,6 +53,8 @@ export const transfer = mysqlTable('transfer', {
   /** wanted | done */
   status: varchar({ length: 8 }).notNull(),
   processorId: varchar({ length: 96 }),
+  /** How often the balance did not bear it. */
+  refusals: smallint({ unsigned: true }).notNull().default(0),
   createdAt: instant().notNull(),
   updatedAt: instant().notNull(),
 })

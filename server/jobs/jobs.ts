@@ -1,0 +1,27 @@
+import { dropOldKeys } from '@/server/http/idempotency-store'
+import { dropOldCounts } from '@/server/http/call-limit-store'
+import type { Job } from '@/server/jobs/job-runner'
+import { ringClocks } from '@/server/jobs/ring-clocks'
+import { refreshQuietPayments } from '@/server/money/refresh-payment'
+import { runEffects } from '@/server/outbox/run-effects'
+
+const SECOND = 1000
+const HOUR = 3600 * SECOND
+const DAY = 24 * HOUR
+
+/** Everything that happens by itself in this process. */
+export function jobsOf(): Job[] {
+  return [
+    { name: 'effects', everyMs: 2 * SECOND, run: runEffects },
+    { name: 'clocks', everyMs: 2 * SECOND, run: ringClocks },
+    { name: 'quiet-payments', everyMs: 10 * SECOND, run: refreshQuietPayments },
+    {
+      name: 'forget',
+      everyMs: HOUR,
+      run: async () => {
+        await dropOldKeys(new Date(Date.now() - DAY))
+        await dropOldCounts(Math.floor((Date.now() - DAY) / SECOND))
+      },
+    },
+  ]
+}

@@ -1,0 +1,117 @@
+import type { Tx } from '@/db/transaction'
+import { now } from '@/server/clock'
+import { projectListings } from '@/server/search/project-listings'
+import { moveStock } from '@/server/orders/stock-store'
+import {
+  changeOrder,
+  freeSlot,
+  hasCommand,
+  lockOrder,
+  writeEvent,
+  type OrderRow,
+} from '@/server/orders/order-store'
+import { readTerms } from '@/server/orders/terms-store'
+import { queueOrderLetters } from '@/server/orders/queue-order-letters'
+import { Problem } from '@/shared/api/problem'
+import { edges, type EdgeId } from '@/shared/domain/orders/edges.facts'
+import { nextClock } from '@/shared/domain/orders/next-clock'
+
+export type Actor = 'buyer' | 'seller' | 'both' | 'system' | 'processor' | 'admin'
+
+export interface EdgeCommand {
+  edge: EdgeId
+  orderId: number
+  /** Repeating a command id changes nothing. */
+  commandId: string
+  actor: Actor
+  actorId?: string
+  note?: string
+  facts?: Record<string, string | number | boolean>
+  /** Columns that change with the state. */
+  change?: Partial<OrderRow>
+  /** Animals that move with the edge; the order's whole quantity unless said otherwise. */
+  quantity?: number
+}
+
+export interface EdgeOutcome {
+  order: OrderRow
+  /** False when this very command was applied before. */
+  applied: boolean
+}
+
+const MONEY_STATES = new Set(['settled', 'cancelled', 'deposit_paid'])
+
+/** Overlays stop edges: a freeze stops all, an open payment dispute whatever would move money. */
+function checkOverlays(order: OrderRow, to: string): void {
+  if (order.freeze !== 'none')
+    throw new Problem('order-moved', 'This order is frozen while staff look into it.')
+  if (order.paymentDispute === 'open' && MONEY_STATES.has(to)) throw new Problem('dispute-open')
+}
+
+async function clockAfter(
+  tx: Tx,
+  order: OrderRow,
+  state: string,
+  at: Date,
+): Promise<{ clockAt: Date | null; clockEdge: string | null }> {
+  const terms = await readTerms(tx, order.listingVersionId)
+  const next = nextClock({
+    state,
+    sinceMs: at.getTime(),
+    category: terms.category,
+    readyMs: terms.readyOn ? Date.parse(`${terms.readyOn}T23:59:59Z`) : null,
+    slotStartMs: order.slotStartsAt?.getTime() ?? null,
+    slotEndMs: order.slotEndsAt?.getTime() ?? null,
+    balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
+    balancePaid: order.balancePaidAt !== null || order.balanceCents === 0,
+    claimWindowHours: terms.promise.windowHours,
+  })
+  return { clockAt: next ? new Date(next.atMs) : null, clockEdge: next?.edge ?? null }
+}
+
+/**
+ * Applies one edge of the order machine inside the caller's transaction: state and version checked, stock moved with
+ * its ledger row, the slot given back when the order ends early, the next clock set, the event written, mails queued.
+ */
+export async function applyEdge(tx: Tx, command: EdgeCommand): Promise<EdgeOutcome> {
+  const edge = edges[command.edge]
+  const before = await lockOrder(tx, command.orderId)
+  if (!before) throw new Problem('not-found')
+  if (await hasCommand(tx, before.id, command.commandId)) return { order: before, applied: false }
+  if (before.state !== edge.from)
+    throw new Problem('order-moved', undefined, { facts: { state: before.state } })
+  checkOverlays(before, edge.to)
+
+  const at = now()
+  const quantity = command.quantity ?? before.quantity
+  const moved = { ...before, ...command.change, state: edge.to }
+  const clock = await clockAfter(tx, moved, edge.to, at)
+  const change = { ...command.change, ...clock, state: edge.to, reason: edge.reason ?? null, updatedAt: at }
+  if (!(await changeOrder(tx, before, change))) throw new Problem('order-moved')
+  await moveStock(tx, {
+    listingId: before.listingId,
+    orderId: before.id,
+    reason: command.edge,
+    quantity,
+    moves: edge.stock,
+    by: command.actorId ?? null,
+    at,
+  })
+  if (edge.to === 'cancelled' && before.windowId !== null) await freeSlot(tx, before.windowId)
+  await writeEvent(tx, {
+    orderId: before.id,
+    commandId: command.commandId,
+    edge: command.edge,
+    fromState: edge.from,
+    toState: edge.to,
+    actor: command.actor,
+    actorId: command.actorId ?? null,
+    note: command.note ?? null,
+    facts: command.facts ?? {},
+    at,
+  })
+  await projectListings(tx, [before.listingId])
+  const order: OrderRow = { ...before, ...change, version: before.version + 1 }
+  await queueOrderLetters(tx, command.edge, order)
+  return { order, applied: true }
+}

@@ -1,0 +1,48 @@
+import type { LetterBlock } from '@/server/mail/letter'
+import { describeListing } from '@/server/listings/describe-listing'
+import type { OrderRow } from '@/server/orders/order-store'
+import type { SellerRow } from '@/server/orders/party-store'
+import type { ListingBody } from '@/shared/contracts/listings'
+import { printSlot } from '@/shared/times/print-time'
+import { printCents } from '@/shared/units/money'
+
+export interface Person {
+  name: string
+  email: string
+}
+
+/** Everything a mail about an order may speak of. */
+export interface LetterFacts {
+  order: OrderRow
+  terms: ListingBody
+  seller: SellerRow
+  buyer: Person
+  sellerPerson: Person
+  origin: string
+}
+
+export function orderUrl({ origin, order }: LetterFacts): string {
+  return `${origin}/orders/${order.publicId}`
+}
+
+/** The tag of the order, as on every page. */
+export function orderTag({ order, terms, seller }: LetterFacts): LetterBlock {
+  const described = describeListing(terms)
+  return {
+    kind: 'tag',
+    title: described.title,
+    size: described.sizeText,
+    count: `${order.quantity} animals`,
+    price: printCents(order.totalCents),
+    place: `${seller.farmName}, ${seller.city}, ${seller.state}`,
+  }
+}
+
+export function slotText({ order }: LetterFacts): string {
+  if (!order.slotStartsAt || !order.slotEndsAt) return 'not chosen yet'
+  return printSlot({
+    startsAt: order.slotStartsAt.toISOString(),
+    endsAt: order.slotEndsAt.toISOString(),
+    zone: order.zone,
+  })
+}

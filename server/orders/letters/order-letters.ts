@@ -1,0 +1,236 @@
+import type { Letter } from '@/server/mail/letter'
+import { orderTag, orderUrl, slotText, type LetterFacts } from '@/server/orders/letters/letter-facts'
+import { promiseWords } from '@/server/orders/promise-words'
+import { fillCaution } from '@/shared/domain/rules/fill-caution'
+import type { EdgeId } from '@/shared/domain/orders/edges.facts'
+import { printMoment } from '@/shared/times/print-time'
+import { printCents } from '@/shared/units/money'
+
+type Writer = (facts: LetterFacts) => Letter[]
+
+const see = (facts: LetterFacts, label: string) => ({ kind: 'button' as const, label, url: orderUrl(facts) })
+const say = (text: string) => ({ kind: 'text' as const, text })
+const untilClock = ({ order }: LetterFacts) =>
+  order.clockAt ? printMoment(order.clockAt.toISOString(), order.zone) : 'the clock ends'
+
+const toBuyer = (facts: LetterFacts, letter: Omit<Letter, 'to'>): Letter => ({ to: facts.buyer, ...letter })
+const toSeller = (facts: LetterFacts, letter: Omit<Letter, 'to'>): Letter => ({
+  to: facts.sellerPerson,
+  ...letter,
+})
+
+const charge = (facts: LetterFacts) => printCents(facts.order.firstChargeCents)
+
+const requested: Writer = (facts) => [
+  toSeller(facts, {
+    subject: `${facts.order.quantity} animals asked for: please answer`,
+    heading: `${facts.buyer.name} asks for ${facts.order.quantity}`,
+    blocks: [
+      orderTag(facts),
+      {
+        kind: 'facts',
+        rows: [
+          ['Pickup', slotText(facts)],
+          ['Answer until', untilClock(facts)],
+        ],
+      },
+      say(
+        'The deposit is earmarked on the buyer’s card. Accept and it is taken; without an answer it is let go.',
+      ),
+      see(facts, 'Answer the request'),
+    ],
+  }),
+  toBuyer(facts, {
+    subject: 'Your request is with the seller',
+    heading: `${facts.seller.farmName} has your request`,
+    blocks: [
+      orderTag(facts),
+      {
+        kind: 'facts',
+        rows: [
+          ['Earmarked, not taken', charge(facts)],
+          ['Pickup', slotText(facts)],
+          ['Answer by', untilClock(facts)],
+        ],
+      },
+      say('If the seller declines or stays silent, nothing is taken and your card is free again.'),
+      see(facts, 'See your order'),
+    ],
+  }),
+]
+
+const accepted: Writer = (facts) => [
+  toBuyer(facts, {
+    subject: 'Your animals are set aside',
+    heading: 'Accepted: choose a day next',
+    blocks: [
+      orderTag(facts),
+      { kind: 'facts', rows: [['Paid', charge(facts)]] },
+      see(facts, 'See your order'),
+    ],
+  }),
+]
+
+const scheduled: Writer = (facts) => [
+  toBuyer(facts, {
+    subject: `Pickup ${slotText(facts)}`,
+    heading: 'It is a date',
+    blocks: [
+      orderTag(facts),
+      {
+        kind: 'facts',
+        rows: [
+          ['When', slotText(facts)],
+          [
+            'Where',
+            `${facts.seller.street}, ${facts.seller.city}, ${facts.seller.state} ${facts.seller.zip}`,
+          ],
+          ['Phone', facts.seller.phone],
+          ['Paid', charge(facts)],
+          ['Still to pay', printCents(facts.order.balanceCents)],
+        ],
+      },
+      say(
+        'Bring a lidded bucket or cooler half full of your own tank water, never fresh tap water, and go straight home.',
+      ),
+      { kind: 'caution', text: fillCaution('G-12', {}) },
+      see(facts, 'Open the pickup sheet'),
+    ],
+  }),
+  toSeller(facts, {
+    subject: `Pickup ${slotText(facts)}: ${facts.order.quantity} animals`,
+    heading: `${facts.buyer.name} comes ${slotText(facts)}`,
+    blocks: [
+      orderTag(facts),
+      say('Mark the order ready when the animals are counted and waiting.'),
+      see(facts, 'See the order'),
+    ],
+  }),
+]
+
+const ready: Writer = (facts) => [
+  toBuyer(facts, {
+    subject: 'Ready for pickup',
+    heading: 'Your animals are ready',
+    blocks: [
+      orderTag(facts),
+      {
+        kind: 'facts',
+        rows: [
+          ['When', slotText(facts)],
+          ['Still to pay', facts.order.balancePaidAt ? printCents(0) : printCents(facts.order.balanceCents)],
+        ],
+      },
+      say('Pay the rest on your phone before you count together. Then your code appears: give it last.'),
+      see(facts, 'Open the order'),
+    ],
+  }),
+]
+
+const handedOver: Writer = (facts) => [
+  toBuyer(facts, {
+    subject: 'Handed over: look after them now',
+    heading: `${facts.order.countHandedOver ?? facts.order.quantity} animals are yours`,
+    blocks: [
+      orderTag(facts),
+      say(promiseWords(facts.terms.promise)),
+      { kind: 'facts', rows: [['Your money is held until', untilClock(facts)]] },
+      { kind: 'caution', text: fillCaution('G-8', { hours: '6' }) },
+      { kind: 'caution', text: fillCaution('G-7', {}) },
+      { kind: 'caution', text: fillCaution('G-1', {}) },
+      see(facts, 'All good, or report a loss'),
+    ],
+  }),
+  toSeller(facts, {
+    subject: 'Handed over',
+    heading: `${facts.buyer.name} has the animals`,
+    blocks: [
+      orderTag(facts),
+      { kind: 'facts', rows: [['The money is released', untilClock(facts)]] },
+      see(facts, 'See the order'),
+    ],
+  }),
+]
+
+const settled: Writer = (facts) => {
+  const { order } = facts
+  const kept = order.firstChargeCents + (order.balancePaidAt ? order.balanceCents : 0) - order.refundedCents
+  return [
+    toBuyer(facts, {
+      subject: 'Receipt: your order is complete',
+      heading: 'All done',
+      blocks: [
+        orderTag(facts),
+        {
+          kind: 'facts',
+          rows: [
+            ['Paid in all', printCents(kept)],
+            ['Refunded', printCents(order.refundedCents)],
+          ],
+        },
+        see(facts, 'See the receipt'),
+      ],
+    }),
+    toSeller(facts, {
+      subject: 'Your money is on its way',
+      heading: `${printCents(kept - order.feeCents - order.taxCents)} released`,
+      blocks: [
+        orderTag(facts),
+        {
+          kind: 'facts',
+          rows: [
+            ['Paid by the buyer', printCents(kept)],
+            ['Our fee', printCents(order.feeCents)],
+          ],
+        },
+        see(facts, 'See the order'),
+      ],
+    }),
+  ]
+}
+
+const ended =
+  (subject: string, why: string): Writer =>
+  (facts) => [
+    toBuyer(facts, {
+      subject,
+      heading: subject,
+      blocks: [
+        orderTag(facts),
+        say(why),
+        { kind: 'button', label: 'Look for others nearby', url: facts.origin },
+      ],
+    }),
+  ]
+
+const withdrawn: Writer = (facts) => [
+  toSeller(facts, {
+    subject: 'A request was taken back',
+    heading: `${facts.buyer.name} took the request back`,
+    blocks: [orderTag(facts), say('The animals are free again. There is nothing for you to do.')],
+  }),
+]
+
+/** The mails of each edge; an edge without a row sends none. */
+export const orderLetters: Partial<Record<EdgeId, Writer>> = {
+  E02: ended(
+    'Your hold has ended',
+    'The 15 minutes passed without payment, so the animals are free again. Nothing was taken from your card.',
+  ),
+  E04: requested,
+  E05: accepted,
+  E07: accepted,
+  E08: ended(
+    'The seller had to decline',
+    'Nothing was taken: the earmarked deposit has been let go, and your bank shows it within a few days.',
+  ),
+  E09: ended(
+    'The seller did not answer in time',
+    'Nothing was taken: the earmarked deposit has been let go. We are sorry for the wait.',
+  ),
+  E10: withdrawn,
+  E14: scheduled,
+  E22: ready,
+  E30: handedOver,
+  E40: settled,
+}

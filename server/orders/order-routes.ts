@@ -1,0 +1,48 @@
+import { Router } from 'express'
+
+import { on } from '@/server/http/on'
+import { acceptOrder } from '@/server/orders/accept-order'
+import { confirmGood } from '@/server/orders/confirm-good'
+import { declineOrder } from '@/server/orders/decline-order'
+import { handOver } from '@/server/orders/hand-over'
+import { leaveReservation } from '@/server/orders/leave-reservation'
+import { listOrders } from '@/server/orders/list-orders'
+import { markReady } from '@/server/orders/mark-ready'
+import { payBalance } from '@/server/orders/pay-balance'
+import { payDeposit } from '@/server/orders/pay-deposit'
+import { showOrder } from '@/server/orders/show-order'
+import { reserveBatch } from '@/server/orders/reserve-batch'
+import { withdrawRequest } from '@/server/orders/withdraw-request'
+import * as orders from '@/shared/contracts/orders'
+
+export function orderRoutes(): Router {
+  const router = Router()
+  on(
+    router,
+    orders.reserveBatch,
+  )(({ caller, params, body, key }) => reserveBatch(caller, params.listingId, { ...body, commandId: key }))
+  on(router, orders.listOrders)(({ caller, query }) => listOrders(caller, query))
+  on(router, orders.readOrder)(({ caller, params }) => showOrder(caller, params.orderId))
+  on(router, orders.payDeposit)(({ caller, params }) => payDeposit(caller, params.orderId))
+  on(
+    router,
+    orders.leaveReservation,
+  )(({ caller, params, key }) => leaveReservation(caller, params.orderId, key))
+  on(
+    router,
+    orders.withdrawRequest,
+  )(({ caller, params, key }) => withdrawRequest(caller, params.orderId, key))
+  on(router, orders.acceptOrder)(({ caller, params, key }) => acceptOrder(caller, params.orderId, key))
+  on(
+    router,
+    orders.declineOrder,
+  )(({ caller, params, body, key }) => declineOrder(caller, params.orderId, { ...body, commandId: key }))
+  on(router, orders.markReady)(({ caller, params, key }) => markReady(caller, params.orderId, key))
+  on(router, orders.payBalance)(({ caller, params }) => payBalance(caller, params.orderId))
+  on(
+    router,
+    orders.handOver,
+  )(({ caller, params, body, key }) => handOver(caller, params.orderId, { ...body, commandId: key }))
+  on(router, orders.confirmGood)(({ caller, params, key }) => confirmGood(caller, params.orderId, key))
+  return router
+}

@@ -1,0 +1,180 @@
+import { randomInt } from 'node:crypto'
+
+import { inTransaction, type Tx } from '@/db/transaction'
+import type { Caller } from '@/server/http/caller'
+import { insertPayment } from '@/server/money/payment-store'
+import { newPublicId } from '@/server/new-public-id'
+import type { CheckedReservation } from '@/server/orders/check-reservation'
+import { orderSettings } from '@/server/orders/order-settings'
+import {
+  countBought,
+  countUnpaidHolds,
+  findWindow,
+  hasOpenWindow,
+  holdFish,
+  holdSlot,
+  insertOrder,
+  readFree,
+  writeEvent,
+  writeEvidence,
+} from '@/server/orders/order-store'
+import type { ReserveAsked } from '@/server/orders/reserve-batch'
+import { noteStock } from '@/server/orders/stock-store'
+import type { FoundPlace } from '@/server/places/find-place'
+import { projectListings } from '@/server/search/project-listings'
+import { Problem } from '@/shared/api/problem'
+import type { GateVerdict } from '@/shared/contracts/rules'
+import { quoteOrder } from '@/shared/domain/money/quote-order'
+import { mayPayInFull } from '@/shared/domain/orders/pay-in-full'
+import { clockMs } from '@/shared/domain/orders/next-clock'
+
+/** Unpaid holds one member may have at a time: a hold costs the seller sales. House rule. */
+const MOST_UNPAID_HOLDS = 3
+
+interface Placing extends CheckedReservation {
+  caller: Caller
+  asked: ReserveAsked
+  place: FoundPlace
+  verdict: GateVerdict
+  at: Date
+}
+
+type Slot = NonNullable<Awaited<ReturnType<typeof findWindow>>>
+
+/** One place in the window asked for; where windows are published, one must be chosen. */
+async function takeSlot(tx: Tx, placing: Placing): Promise<Slot | null> {
+  const { listing, asked, at } = placing
+  if (!asked.windowId) {
+    if (!(await hasOpenWindow(tx, listing.id, at))) return null
+    throw new Problem('fields-invalid', undefined, {
+      errors: [{ detail: 'Choose a pickup time.', pointer: '#/windowId' }],
+    })
+  }
+  const window = await findWindow(tx, listing.id, asked.windowId)
+  if (!window || window.startsAt <= at) {
+    throw new Problem('slot-full', 'That pickup time is no longer offered. Choose another.')
+  }
+  if (!(await holdSlot(tx, window.id))) {
+    throw new Problem('slot-full', 'Somebody took the last place in that pickup time. Choose another.')
+  }
+  return window
+}
+
+async function takeFish(tx: Tx, placing: Placing): Promise<void> {
+  const { listing, asked, caller, terms } = placing
+  if ((await countUnpaidHolds(tx, caller.memberId)) >= MOST_UNPAID_HOLDS) {
+    throw new Problem(
+      'holds-too-many',
+      'Pay or leave one of your open holds first; each ends by itself after 15 minutes.',
+    )
+  }
+  if (terms.mostPerBuyer !== undefined) {
+    const bought = await countBought(tx, caller.memberId, listing.id)
+    if (bought + asked.quantity > terms.mostPerBuyer) {
+      throw new Problem(
+        'batch-short',
+        `At most ${terms.mostPerBuyer} for one buyer; you already have ${bought}.`,
+      )
+    }
+  }
+  if (await holdFish(tx, listing.id, asked.quantity)) return
+  const left = await readFree(listing.id, tx)
+  throw new Problem('batch-short', `Just taken: ${left} left.`, { facts: { left } })
+}
+
+function priced(placing: Placing, slot: Slot | null) {
+  const { terms, asked, at } = placing
+  const { feeBp } = orderSettings()
+  const quote = quoteOrder({
+    tiers: terms.tiers,
+    quantity: asked.quantity,
+    boxCents: 0,
+    freightCents: 0,
+    taxCents: 0,
+    depositBp: terms.depositPct * 100,
+    feeBp,
+  })
+  const isFull =
+    asked.payMode === 'full' &&
+    mayPayInFull({
+      totalCents: quote.totalCents,
+      nowMs: at.getTime(),
+      slotStartMs: slot?.startsAt.getTime() ?? null,
+    })
+  const firstChargeCents = isFull ? quote.totalCents : quote.depositCents
+  return {
+    goodsCents: quote.goodsCents,
+    taxCents: quote.taxCents,
+    totalCents: quote.totalCents,
+    depositCents: quote.depositCents,
+    feeCents: quote.feeCents,
+    feeBp,
+    payMode: isFull ? 'full' : 'deposit',
+    firstChargeCents,
+    balanceCents: quote.totalCents - firstChargeCents,
+  }
+}
+
+async function write(tx: Tx, placing: Placing): Promise<number> {
+  const { listing, seller, caller, asked, place, verdict, terms, versionId, at } = placing
+  await takeFish(tx, placing)
+  const slot = await takeSlot(tx, placing)
+  const money = priced(placing, slot)
+  const orderId = await insertOrder(tx, {
+    publicId: newPublicId(),
+    buyerId: caller.memberId,
+    sellerId: seller.id,
+    listingId: listing.id,
+    listingVersionId: versionId,
+    state: 'reserved',
+    quantity: asked.quantity,
+    handOver: 'pickup',
+    balanceDue: terms.balanceDue,
+    needsAcceptance: terms.accept === 'ask',
+    ...money,
+    windowId: slot?.id ?? null,
+    slotStartsAt: slot?.startsAt ?? null,
+    slotEndsAt: slot?.endsAt ?? null,
+    zone: slot?.zone ?? seller.zone,
+    buyerState: place.state,
+    buyerCell: place.cellId,
+    handOverCode: String(randomInt(0, 1_000_000)).padStart(6, '0'),
+    clockAt: new Date(at.getTime() + clockMs.checkoutHold),
+    clockEdge: 'E02',
+    createdAt: at,
+    updatedAt: at,
+  })
+  const by = caller.memberId
+  const { quantity } = asked
+  await noteStock(
+    tx,
+    { listingId: listing.id, orderId, reason: 'E01', quantity, by, at },
+    { free: -quantity, held: quantity },
+  )
+  await insertPayment(tx, { orderId, purpose: 'deposit', amountCents: money.firstChargeCents, at })
+  await writeEvent(tx, {
+    orderId,
+    commandId: asked.commandId,
+    edge: 'E01',
+    fromState: null,
+    toState: 'reserved',
+    actor: 'buyer',
+    actorId: by,
+    facts: { quantity },
+    at,
+  })
+  await writeEvidence(tx, {
+    orderId,
+    memberId: by,
+    party: 'buyer',
+    shown: { verdict, ticked: asked.ticked },
+    at,
+  })
+  await projectListings(tx, [listing.id])
+  return orderId
+}
+
+/** Holds the fish and the slot and writes the order, all or nothing. Returns the order's number. */
+export async function placeOrder(placing: Placing): Promise<number> {
+  return inTransaction((tx) => write(tx, placing))
+}

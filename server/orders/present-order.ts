@@ -1,0 +1,151 @@
+import { now } from '@/server/clock'
+import { balancesOf, type LedgerAccount } from '@/server/money/ledger-store'
+import { listPaymentsOf, type PaymentRow } from '@/server/money/payment-store'
+import { describeListing } from '@/server/listings/describe-listing'
+import { actsOf, mayMeet, maySeeCode, type Party } from '@/server/orders/order-policy'
+import { listEventsOf, readEvidence, type OrderEventRow, type OrderRow } from '@/server/orders/order-store'
+import type { OrderSeen } from '@/server/orders/party-of'
+import {
+  readListingIds,
+  readPeople,
+  readPlaceKinds,
+  readSellers,
+  type SellerRow,
+} from '@/server/orders/party-store'
+import { promiseWords } from '@/server/orders/promise-words'
+import { readTermsOf } from '@/server/orders/terms-store'
+import type { ListingBody } from '@/shared/contracts/listings'
+import type { GateVerdict } from '@/shared/contracts/rules'
+import type { ShownOrder } from '@/shared/contracts/orders'
+
+interface OrderFacts {
+  terms: ListingBody
+  seller: SellerRow
+  buyerName: string
+  listingId: string
+  events: OrderEventRow[]
+  payments: PaymentRow[]
+  balances: Partial<Record<LedgerAccount, number>>
+  gate?: GateVerdict
+  placeKind?: string
+}
+
+const idsOf = <T>(values: (T | null)[]) => [...new Set(values.filter((value): value is T => value !== null))]
+
+/** Where the order's cents are now, as the strip shows them. */
+function strip(order: OrderRow, facts: OrderFacts): ShownOrder['money']['strip'] {
+  const { held = 0, seller_payable: payable = 0, seller_connected: connected = 0 } = facts.balances
+  return {
+    depositCents: order.firstChargeCents,
+    balanceCents: order.balanceCents,
+    heldCents: Math.max(0, held),
+    releasedCents: Math.max(0, payable + connected),
+    refundedCents: order.refundedCents,
+  }
+}
+
+function slotOf(order: OrderRow, placeKind: string | undefined): ShownOrder['slot'] {
+  if (!order.slotStartsAt || !order.slotEndsAt) return undefined
+  return {
+    startsAt: order.slotStartsAt.toISOString(),
+    endsAt: order.slotEndsAt.toISOString(),
+    zone: order.zone,
+    placeKind: placeKind ?? 'farm-gate',
+  }
+}
+
+function moneyOf(order: OrderRow, facts: OrderFacts): ShownOrder['money'] {
+  const { goodsCents, boxCents, freightCents, taxCents, totalCents, depositCents } = order
+  const { firstChargeCents, balanceCents, feeCents, refundedCents } = order
+  return {
+    ...{ goodsCents, boxCents, freightCents, taxCents, totalCents, depositCents },
+    ...{ firstChargeCents, balanceCents, feeCents, refundedCents },
+    strip: strip(order, facts),
+  }
+}
+
+/** The payment page that is open now, for the buyer alone. */
+function payUrlOf(order: OrderRow, party: Party, payments: PaymentRow[]): string | undefined {
+  if (party !== 'buyer') return undefined
+  const purpose = order.state === 'reserved' ? 'deposit' : 'balance'
+  return payments.findLast((one) => one.purpose === purpose && one.status === 'open')?.payUrl ?? undefined
+}
+
+function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrder {
+  const { terms, seller } = facts
+  const described = describeListing(terms)
+  const { street, city, state, zip, phone } = seller
+  return {
+    orderId: order.publicId,
+    party,
+    state: order.state as ShownOrder['state'],
+    ...(order.reason ? { reason: order.reason } : {}),
+    listingId: facts.listingId,
+    title: described.title,
+    photo: described.photo,
+    quantity: order.quantity,
+    unitCents: Math.round(order.goodsCents / order.quantity),
+    money: moneyOf(order, facts),
+    payMode: order.payMode === 'full' ? 'full' : 'deposit',
+    balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
+    balancePaid: order.balanceCents === 0 || order.balancePaidAt !== null,
+    accepting: order.state === 'requested' && order.acceptedAt !== null,
+    slot: slotOf(order, facts.placeKind),
+    otherParty:
+      party === 'seller' ? { name: facts.buyerName } : { name: seller.farmName, sellerId: seller.publicId },
+    ...(mayMeet(order, party) ? { meeting: { street, city, state, zip, phone } } : {}),
+    ...(maySeeCode(order, party) ? { handOverCode: order.handOverCode } : {}),
+    ...(order.countHandedOver === null ? {} : { countHandedOver: order.countHandedOver }),
+    arrivalPromise: promiseWords(terms.promise),
+    ...(order.clockAt && order.clockEdge
+      ? { clock: { at: order.clockAt.toISOString(), edge: order.clockEdge } }
+      : {}),
+    events: facts.events.map((event) => ({
+      edge: event.edge,
+      to: event.toState as ShownOrder['state'],
+      actor: event.actor,
+      at: event.at.toISOString(),
+    })),
+    gate: facts.gate,
+    payUrl: payUrlOf(order, party, facts.payments),
+    asOf: now().toISOString(),
+    may: actsOf(order, party),
+  }
+}
+
+/** Orders as their viewers may see them; one query a table however many orders there are. */
+export async function presentOrders(seen: OrderSeen[]): Promise<ShownOrder[]> {
+  const rows = seen.map(({ order }) => order)
+  const ids = rows.map((order) => order.id)
+  const [terms, sellers, people, listings, events, payments, balances, evidence, placeKinds] =
+    await Promise.all([
+      readTermsOf(idsOf(rows.map((order) => order.listingVersionId))),
+      readSellers(idsOf(rows.map((order) => order.sellerId))),
+      readPeople(idsOf(rows.map((order) => order.buyerId))),
+      readListingIds(idsOf(rows.map((order) => order.listingId))),
+      listEventsOf(ids),
+      listPaymentsOf(ids),
+      balancesOf(ids),
+      readEvidence(ids),
+      readPlaceKinds(idsOf(rows.map((order) => order.windowId))),
+    ])
+  return seen.flatMap((one) => {
+    const { order } = one
+    const body = terms.get(order.listingVersionId)
+    const seller = sellers.get(order.sellerId)
+    if (!body || !seller) return []
+    return [
+      presentOrder(one, {
+        terms: body,
+        seller,
+        buyerName: people.get(order.buyerId)?.name ?? 'A member who left',
+        listingId: listings.get(order.listingId) ?? '',
+        events: events.filter((event) => event.orderId === order.id),
+        payments: payments.filter((payment) => payment.orderId === order.id),
+        balances: balances.get(order.id) ?? {},
+        gate: evidence.find((row) => row.orderId === order.id && row.party === 'buyer')?.shown.verdict,
+        placeKind: order.windowId === null ? undefined : placeKinds.get(order.windowId),
+      }),
+    ]
+  })
+}
