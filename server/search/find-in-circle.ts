@@ -1,0 +1,46 @@
+import { circleCover } from '@/shared/domain/geo/circle-cover'
+import { kmOfSquaredChord } from '@/shared/domain/geo/earth-point'
+import { categoryCodes } from '@/server/search/category-codes'
+import { readSearchRows } from '@/server/search/read-search-store'
+import { readFoundRows, type FoundRow } from '@/server/search/found-row'
+import { afterSql, orderSql, selectedSql } from '@/server/search/search-order'
+import type { SearchQuery } from '@/server/search/search-query'
+import { circleSql, whole, wishSql } from '@/server/search/search-sql'
+
+/** Index and leading conditions: by species where one is named, else by category. */
+export function classSql({ categoryCode, speciesCode }: SearchQuery): { index: string; where: string[] } {
+  const category =
+    categoryCode === undefined
+      ? `category IN (${categoryCodes.map(whole).join(',')})`
+      : `category=${whole(categoryCode)}`
+  if (speciesCode === undefined) return { index: 'PRIMARY', where: [category] }
+  const species = `species=${whole(speciesCode)}`
+  return { index: 'k_species', where: categoryCode === undefined ? [species] : [species, category] }
+}
+
+/** Text of one page inside a circle of the query's centre; for `nearest`, without what earlier pages hold. */
+export function circlePageSql(query: SearchQuery, radiusKm: number): string {
+  const beyondKm = query.sort === 'nearest' && query.after ? kmOfSquaredChord(query.after.dm2) : 0
+  const ranges = circleCover({ centre: query.origin, radiusKm, beyondKm })
+  const { index, where } = classSql(query)
+  const tests = [...where, ...circleSql(query, ranges, radiusKm), ...wishSql(query), ...afterSql(query)]
+  return `SELECT ${selectedSql(query)} FROM listing_search FORCE INDEX (${index}) WHERE ${tests.join(' AND ')} ORDER BY ${orderSql(query)} LIMIT ${whole(query.limit)}`
+}
+
+export async function findInCircle(query: SearchQuery, radiusKm: number): Promise<FoundRow[]> {
+  return readFoundRows(await readSearchRows(circlePageSql(query, radiusKm)))
+}
+
+/** Reads growing circles. A full page inside a circle is the nearest page there is, so nothing needs remembering. */
+export async function findOutwards(
+  query: SearchQuery,
+  firstKm: number,
+): Promise<{ rows: FoundRow[]; trips: number }> {
+  let km = firstKm
+  for (let trips = 1; ; trips++) {
+    const rows = await findInCircle(query, km)
+    if (rows.length >= query.limit || km >= query.radiusKm) return { rows, trips }
+    const growth = rows.length === 0 ? 8 : Math.max(2, Math.sqrt((query.limit * 1.5) / rows.length))
+    km = Math.min(query.radiusKm, km * growth)
+  }
+}
