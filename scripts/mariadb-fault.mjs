@@ -1,3 +1,5 @@
+import path from 'node:path'
+
 /** A failure that the person at the keyboard can mend: its message is the whole story. */
 export class MariadbFault extends Error {
   /** @param {string} message */

@@ -1,3 +1,4 @@
+import { Buffer } from 'node:buffer'
 import { createHmac } from 'node:crypto'
 
 const ALPHABET = 'ABCDEFGHIJKLMNOPQRSTUVWXYZ234567'

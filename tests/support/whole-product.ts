@@ -55,7 +55,8 @@ export default async function setup(project: TestProject): Promise<() => Promise
       clockOffsetMs: 0,
       durable: false,
       // Not the runner's own: a server that believes to be under test would leave its guards down.
-      environment: { ...plainEnvironment(), LOG_LEVEL: 'warn' },
+      // One proxy hop: the address that a test's browser says it comes from is believed.
+      environment: { ...plainEnvironment(), LOG_LEVEL: 'warn', TRUST_PROXY_HOPS: '1' },
       onDeath: (_name, fault) => console.error(sentenceOf(fault)),
     })
     const { origin, mailOrigin, payOrigin, databaseUrl } = product

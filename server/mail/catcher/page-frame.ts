@@ -18,7 +18,7 @@ li { border-bottom: 1px solid var(--line) }
 li a { display: block; padding: .75rem 0; min-height: 44px; text-decoration: none; color: var(--ink) }
 li a strong { color: var(--link); overflow-wrap: anywhere }
 small, dt { display: block; color: var(--quiet); font-size: .9rem; overflow-wrap: anywhere }
-dl { display: grid; grid-template-columns: max-content 1fr; gap: .25rem 1rem }
+dl { display: grid; grid-template-columns: max-content 1fr; gap: .25rem 1rem; align-items: baseline }
 dd { margin: 0; overflow-wrap: anywhere }
 pre { white-space: pre-wrap; overflow-wrap: anywhere; font: inherit; border: 1px solid var(--line); padding: 1rem }
 iframe { width: 100%; height: 36rem; border: 1px solid var(--line); background: #fff }
