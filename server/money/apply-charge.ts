@@ -28,7 +28,7 @@ async function takeAuthorisation(tx: Tx, { payment, order }: Locked, facts: Paym
       edge: 'E04',
       orderId: order.id,
       commandId: `authorised:${payment.id}`,
-      actor: 'processor',
+      actor: 'payment',
     })
     return
   }
@@ -56,7 +56,7 @@ async function takeFirstCharge(tx: Tx, { payment, order }: Locked): Promise<void
     edge,
     orderId: order.id,
     commandId: `captured:${payment.id}`,
-    actor: edge === 'E05' ? 'processor' : 'seller',
+    actor: edge === 'E05' ? 'payment' : 'seller',
     facts: { cents: payment.amountCents },
   })
   await scheduleOrder(tx, order.id)

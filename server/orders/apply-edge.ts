@@ -13,17 +13,16 @@ import {
 import { readTerms } from '@/server/orders/terms-store'
 import { queueOrderLetters } from '@/server/orders/queue-order-letters'
 import { Problem } from '@/shared/api/problem'
-import { edges, type EdgeId } from '@/shared/domain/orders/edges.facts'
+import { edges, type Edge, type EdgeActor, type EdgeId } from '@/shared/domain/orders/edges.facts'
 import { nextClock } from '@/shared/domain/orders/next-clock'
-
-export type Actor = 'buyer' | 'seller' | 'both' | 'system' | 'processor' | 'admin'
+import type { OrderState } from '@/shared/domain/orders/states.facts'
 
 export interface EdgeCommand {
   edge: EdgeId
   orderId: number
   /** Repeating a command id changes nothing. */
   commandId: string
-  actor: Actor
+  actor: EdgeActor
   actorId?: string
   note?: string
   facts?: Record<string, string | number | boolean>
@@ -51,7 +50,7 @@ function checkOverlays(order: OrderRow, to: string): void {
 async function clockAfter(
   tx: Tx,
   order: OrderRow,
-  state: string,
+  state: OrderState,
   at: Date,
 ): Promise<{ clockAt: Date | null; clockEdge: string | null }> {
   const terms = await readTerms(tx, order.listingVersionId)
@@ -63,8 +62,9 @@ async function clockAfter(
     slotStartMs: order.slotStartsAt?.getTime() ?? null,
     slotEndMs: order.slotEndsAt?.getTime() ?? null,
     balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
-    balancePaid: order.balancePaidAt !== null || order.balanceCents === 0,
+    isBalancePaid: order.balancePaidAt !== null || order.balanceCents === 0,
     claimWindowHours: terms.promise.windowHours,
+    promisedDeliveryMs: null,
   })
   return { clockAt: next ? new Date(next.atMs) : null, clockEdge: next?.edge ?? null }
 }
@@ -74,7 +74,7 @@ async function clockAfter(
  * its ledger row, the slot given back when the order ends early, the next clock set, the event written, mails queued.
  */
 export async function applyEdge(tx: Tx, command: EdgeCommand): Promise<EdgeOutcome> {
-  const edge = edges[command.edge]
+  const edge: Edge = edges[command.edge]
   const before = await lockOrder(tx, command.orderId)
   if (!before) throw new Problem('not-found')
   if (await hasCommand(tx, before.id, command.commandId)) return { order: before, applied: false }

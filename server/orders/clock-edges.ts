@@ -19,7 +19,7 @@ async function sellerSilent(order: OrderRow): Promise<void> {
       edge: 'E09',
       orderId: order.id,
       commandId: ringOf('E09', order),
-      actor: 'system',
+      actor: 'timer',
     })
     if (!outcome.applied) return
     await letMoneyGo(tx, outcome.order)
@@ -30,7 +30,7 @@ async function sellerSilent(order: OrderRow): Promise<void> {
 /** E40: the claim window ended without a word: the money goes to the seller. */
 async function windowEnded(order: OrderRow): Promise<void> {
   await inTransaction((tx) =>
-    settleOrder(tx, { edge: 'E40', orderId: order.id, commandId: ringOf('E40', order), actor: 'system' }),
+    settleOrder(tx, { edge: 'E40', orderId: order.id, commandId: ringOf('E40', order), actor: 'timer' }),
   )
 }
 

@@ -46,7 +46,7 @@ export async function endHold(order: OrderRow, commandId: string): Promise<void>
     log.warn({ orderId: order.id }, 'hold ended although the processor does not answer')
   }
   await inTransaction(async (tx) => {
-    const outcome = await applyEdge(tx, { edge: 'E02', orderId: order.id, commandId, actor: 'system' })
+    const outcome = await applyEdge(tx, { edge: 'E02', orderId: order.id, commandId, actor: 'timer' })
     if (outcome.applied) await letMoneyGo(tx, outcome.order)
   })
 }

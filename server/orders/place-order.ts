@@ -26,7 +26,7 @@ import { Problem } from '@/shared/api/problem'
 import type { GateVerdict } from '@/shared/contracts/rules'
 import { quoteOrder } from '@/shared/domain/money/quote-order'
 import { mayPayInFull } from '@/shared/domain/orders/pay-in-full'
-import { clockMs } from '@/shared/domain/orders/next-clock'
+import { clockMs } from '@/shared/domain/orders/clocks.facts'
 
 /** Unpaid holds one member may have at a time: a hold costs the seller sales. House rule. */
 const MOST_UNPAID_HOLDS = 3
@@ -139,7 +139,7 @@ async function write(tx: Tx, placing: Placing): Promise<number> {
     buyerState: place.state,
     buyerCell: place.cellId,
     handOverCode: String(randomInt(0, 1_000_000)).padStart(6, '0'),
-    clockAt: new Date(at.getTime() + clockMs.checkoutHold),
+    clockAt: new Date(at.getTime() + clockMs('checkoutHold', terms.category)),
     clockEdge: 'E02',
     createdAt: at,
     updatedAt: at,

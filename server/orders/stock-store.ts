@@ -2,8 +2,7 @@ import { eq, sql } from 'drizzle-orm'
 
 import type { Tx } from '@/db/client'
 import { listing, stockMovement } from '@/db/schema/listings'
-
-export type StockPlace = 'free' | 'held' | 'pledged' | 'sold' | 'shipped' | 'delivered'
+import type { StockPlace, StockShift } from '@/shared/domain/orders/edges.facts'
 
 export interface StockMove {
   listingId: number
@@ -11,7 +10,7 @@ export interface StockMove {
   /** The edge, or the seller's word. */
   reason: string
   quantity: number
-  moves: readonly (readonly [place: StockPlace, sign: 1 | -1])[]
+  moves: readonly StockShift[]
   by: string | null
   at: Date
 }

@@ -3,22 +3,7 @@ import { z } from 'zod'
 import { endpoint } from '@/shared/api/endpoint'
 import { gateVerdict } from '@/shared/contracts/rules'
 import { cents, instantText, line, pageOf, publicIdText } from '@/shared/contracts/values'
-
-export const orderStates = [
-  'reserved',
-  'requested',
-  'pledged',
-  'deposit_paid',
-  'scheduled',
-  'weather_hold',
-  'ready',
-  'dispatched',
-  'handed_over',
-  'arrived',
-  'claim_open',
-  'settled',
-  'cancelled',
-] as const
+import { orderStates } from '@/shared/domain/orders/states.facts'
 
 export const orderActs = [
   'pay-deposit',

@@ -1,24 +1,11 @@
-const MINUTE_MS = 60_000
-const HOUR_MS = 60 * MINUTE_MS
-const DAY_MS = 24 * HOUR_MS
+import { clockMs } from '@/shared/domain/orders/clocks.facts'
+import type { EdgeId } from '@/shared/domain/orders/edges.facts'
+import type { OrderState } from '@/shared/domain/orders/states.facts'
 
-/** The waits of the order machine, in milliseconds; a later issue lets an admin edit them. */
-export const clockMs = {
-  checkoutHold: 15 * MINUTE_MS,
-  sellerAnswer: 48 * HOUR_MS,
-  sellerAnswerProduce: 12 * HOUR_MS,
-  authorisationHardStop: 6 * DAY_MS,
-  neverScheduled: 30 * DAY_MS,
-  balanceDueBefore: 48 * HOUR_MS,
-  balanceGrace: 24 * HOUR_MS,
-  missedDay: 72 * HOUR_MS,
-  weatherConsent: 72 * HOUR_MS,
-  lateBox: 36 * HOUR_MS,
-  claimAnswer: 48 * HOUR_MS,
-} as const
+const HOUR_MS = 3_600_000
 
 export interface ClockFacts {
-  state: string
+  state: OrderState
   /** When this state began. All times in ms since 1970. */
   sinceMs: number
   category: string
@@ -27,50 +14,57 @@ export interface ClockFacts {
   slotStartMs: number | null
   slotEndMs: number | null
   balanceDue: 'before' | 'at-handover'
-  balancePaid: boolean
+  isBalancePaid: boolean
   claimWindowHours: number
-  promisedDeliveryMs?: number | null
+  promisedDeliveryMs: number | null
 }
 
 export interface NextClock {
   atMs: number
-  edge: string
+  edge: EdgeId
 }
 
-/** The timer that rings next in a state, so that nothing can rest for ever. null only in a final state. House rules. */
+function whileScheduled(facts: ClockFacts): NextClock {
+  const { sinceMs, category } = facts
+  const slotStartMs = facts.slotStartMs ?? sinceMs
+  if (facts.balanceDue === 'before' && !facts.isBalancePaid) {
+    const dueMs = Math.max(sinceMs, slotStartMs - clockMs('balanceDue', category))
+    return { atMs: dueMs + clockMs('balanceGrace', category), edge: 'E23' }
+  }
+  return { atMs: (facts.slotEndMs ?? slotStartMs) + clockMs('missedDay', category), edge: 'E26' }
+}
+
+/** The timer that rings next in a state, so that nothing can rest for ever. null only in a final state. */
 export function nextClock(facts: ClockFacts): NextClock | null {
-  const { state, sinceMs } = facts
+  const { state, sinceMs, category } = facts
   switch (state) {
     case 'reserved':
-      return { atMs: sinceMs + clockMs.checkoutHold, edge: 'E02' }
+      return { atMs: sinceMs + clockMs('checkoutHold', category), edge: 'E02' }
     case 'requested':
-      return {
-        atMs: sinceMs + (facts.category === 'produce' ? clockMs.sellerAnswerProduce : clockMs.sellerAnswer),
-        edge: 'E09',
-      }
+      return { atMs: sinceMs + clockMs('sellerAnswer', category), edge: 'E09' }
+    case 'pledged':
+      return { atMs: sinceMs + clockMs('poolWaive', category), edge: 'E12' }
     case 'deposit_paid':
-      return { atMs: Math.max(sinceMs, facts.readyMs ?? sinceMs) + clockMs.neverScheduled, edge: 'E17' }
-    case 'scheduled': {
-      const slotStart = facts.slotStartMs ?? sinceMs
-      if (facts.balanceDue === 'before' && !facts.balancePaid) {
-        const due = Math.max(sinceMs, slotStart - clockMs.balanceDueBefore)
-        return { atMs: due + clockMs.balanceGrace, edge: 'E23' }
+      return {
+        atMs: Math.max(sinceMs, facts.readyMs ?? sinceMs) + clockMs('neverScheduled', category),
+        edge: 'E17',
       }
-      return { atMs: (facts.slotEndMs ?? slotStart) + clockMs.missedDay, edge: 'E26' }
-    }
+    case 'scheduled':
+      return whileScheduled(facts)
     case 'weather_hold':
-      return { atMs: sinceMs + clockMs.weatherConsent, edge: 'E21' }
+      return { atMs: sinceMs + clockMs('weatherConsent', category), edge: 'E21' }
     case 'ready':
-      return { atMs: (facts.slotEndMs ?? sinceMs) + clockMs.missedDay, edge: 'E33' }
+      return { atMs: (facts.slotEndMs ?? sinceMs) + clockMs('missedDay', category), edge: 'E33' }
     case 'dispatched':
-      return { atMs: (facts.promisedDeliveryMs ?? sinceMs) + clockMs.lateBox, edge: 'E36' }
+      return { atMs: (facts.promisedDeliveryMs ?? sinceMs) + clockMs('lateBox', category), edge: 'E36' }
     case 'handed_over':
       return { atMs: sinceMs + facts.claimWindowHours * HOUR_MS, edge: 'E40' }
     case 'arrived':
       return { atMs: sinceMs + facts.claimWindowHours * HOUR_MS, edge: 'E38' }
     case 'claim_open':
-      return { atMs: sinceMs + clockMs.claimAnswer, edge: 'E42' }
-    default:
+      return { atMs: sinceMs + clockMs('sellerClaimAnswer', category), edge: 'E42' }
+    case 'settled':
+    case 'cancelled':
       return null
   }
 }
