@@ -1,0 +1,67 @@
+import type { EdgeId } from '@/shared/domain/orders/edges.facts'
+import {
+  endWords,
+  silenceWords,
+  stepOf,
+  stepWords,
+  type PathStep,
+} from '@/shared/domain/orders/order-path-words.facts'
+import { whoseMove, type Move, type MoveFacts } from '@/shared/domain/orders/whose-move'
+import type { CancelReason } from '@/shared/domain/orders/states.facts'
+
+export interface PathFacts extends MoveFacts {
+  reason?: CancelReason
+  /** The seller is asked before the deposit is taken. */
+  needsAcceptance: boolean
+  isPooled: boolean
+  clock: { atMs: number; edge: string } | null
+}
+
+export interface OrderPath {
+  steps: { step: PathStep; words: string; mark: 'done' | 'now' | 'ahead' }[]
+  /** Who has to do what, for the reader of this screen. */
+  move: Move
+  untilMs: number | null
+  /** What happens if nobody moves; '' when nothing does. */
+  ifNobodyMoves: string
+}
+
+/** Where the order is, whose move it is, until when, and what happens if nobody moves. */
+export function orderPath(facts: PathFacts): OrderPath {
+  const line = stepsOf(facts)
+  const here = facts.state === 'cancelled' ? -1 : line.indexOf(currentStep(facts))
+  const end = facts.state === 'cancelled' && facts.reason ? endWords[facts.reason] : null
+  const isOver = facts.state === 'settled' || facts.state === 'cancelled'
+  return {
+    steps: line.map((step, at) => ({
+      step,
+      words: stepWords[step],
+      mark: markOf(at, here, facts.state === 'settled'),
+    })),
+    move: end === null ? whoseMove(facts) : { whose: 'nobody', words: end },
+    untilMs: isOver ? null : (facts.clock?.atMs ?? null),
+    ifNobodyMoves: isOver ? '' : (silenceWords[(facts.clock?.edge ?? '') as EdgeId] ?? ''),
+  }
+}
+
+function stepsOf({ handOver, needsAcceptance, isPooled }: PathFacts): PathStep[] {
+  return [
+    'held',
+    ...(isPooled ? (['pooled'] as const) : needsAcceptance ? (['asked'] as const) : []),
+    'paid',
+    'day',
+    'ready',
+    ...(handOver === 'ship' ? (['sent', 'arrived'] as const) : (['handed-over'] as const)),
+    'settled',
+  ]
+}
+
+function currentStep({ state, handOver }: PathFacts): PathStep {
+  if (state === 'claim_open') return handOver === 'ship' ? 'arrived' : 'handed-over'
+  return state === 'cancelled' ? 'held' : stepOf[state]
+}
+
+function markOf(at: number, here: number, isSettled: boolean): 'done' | 'now' | 'ahead' {
+  if (at < here || (isSettled && at === here)) return 'done'
+  return at === here ? 'now' : 'ahead'
+}
