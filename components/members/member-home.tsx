@@ -1,0 +1,53 @@
+import { StyleSheet, View } from 'react-native'
+
+import { Invitation } from './invitation'
+import { PlaceSetting } from './place-setting'
+import { RoleLinks } from './role-links'
+import { SecurityCard } from './security-card'
+import { SignOut } from './sign-out'
+import { ThemeSetting } from './theme-setting'
+import { UnitsSetting } from './units-setting'
+
+import { Card } from '@/components/ui/card'
+import { ErrorState } from '@/components/ui/error-state'
+import { Link } from '@/components/ui/link'
+import { SkeletonRows } from '@/components/ui/skeleton'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+import { useMe } from '@/hooks/use-me'
+
+export function MemberHome() {
+  const { me, error, refetch } = useMe()
+  if (me === null) return <Invitation />
+  if (!me) {
+    if (!error) return <SkeletonRows label="Loading your account" rows={4} />
+    return (
+      <ErrorState
+        title="We could not load your account"
+        body="Nothing is lost. Try again in a moment."
+        onRetry={() => void refetch()}
+      />
+    )
+  }
+  return (
+    <View style={styles.frame}>
+      <View>
+        <Text size="lead" face="strong">
+          {me.name}
+        </Text>
+        <Text tint="muted">{me.email}</Text>
+      </View>
+      <RoleLinks me={me} />
+      <Card>
+        <PlaceSetting place={me.place} />
+        <UnitsSetting units={me.units} />
+        <ThemeSetting />
+      </Card>
+      <SecurityCard secondFactor={me.secondFactor} />
+      <SignOut />
+      <Link href="/about">What Tankward is, and how your money is held</Link>
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({ frame: { gap: space.lg } })
