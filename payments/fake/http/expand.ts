@@ -34,7 +34,7 @@ function includable(turn: Turn, holder: JsonObject, name: string): Json | undefi
 function expandOne(turn: Turn, holder: JsonObject, names: string[]): void {
   const [name, ...rest] = names
   if (name === undefined) return
-  const here = holder[name] ?? includable(turn, holder, name)
+  const here = Object.hasOwn(holder, name) ? holder[name] : includable(turn, holder, name)
   if (here === undefined) {
     throw badParameter('expand', `This property cannot be expanded (${name}).`)
   }
