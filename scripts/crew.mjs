@@ -1,13 +1,14 @@
 import { spawn } from 'node:child_process'
 import { closeSync, mkdirSync, openSync } from 'node:fs'
-import { readFile } from 'node:fs/promises'
 import path from 'node:path'
 
 import { explainFailure } from './explain-failure.mjs'
 import { Fault } from './fault.mjs'
+import { lastWords } from './last-words.mjs'
+import { pause } from './mariadb-leftover.mjs'
 import { ROOT } from './project-root.mjs'
 
-const LAST_WORDS = 12
+const LONGEST_COMING_MS = 6_000
 
 /**
  * @typedef {object} Task
@@ -30,17 +31,6 @@ const LAST_WORDS = 12
 
 /** Thrown by work that was cut short because everything is being stopped. */
 export class Leaving extends Error {}
-
-/** The end of a log; of a crash, the part that names it. @param {string} file */
-async function tailOf(file) {
-  const text = await readFile(file, 'utf8').catch(() => '')
-  const lines = text
-    .trimEnd()
-    .split('\n')
-    .slice(-5 * LAST_WORDS)
-  const named = lines.findLastIndex((line) => /^(?:\w*Error\b|Uncaught)/.test(line))
-  return (named < 0 ? lines.slice(-LAST_WORDS) : lines.slice(named, named + LAST_WORDS)).join('\n')
-}
 
 /** Nothing to do when it has gone already. @param {number} pid @param {NodeJS.Signals} signal */
 function signalTo(pid, signal) {
@@ -78,7 +68,7 @@ function launch(log, { name, command, environment, graceMs = 2_000, shown = fals
     await ended
     clearTimeout(hard)
   }
-  return { name, pid: child.pid, ended, stop, drop: () => send('SIGTERM'), lastWords: () => tailOf(log) }
+  return { name, pid: child.pid, ended, stop, drop: () => send('SIGTERM'), lastWords: () => lastWords(log) }
 }
 
 /**
@@ -117,7 +107,7 @@ export function makeCrew(logs) {
     const { code, signal } = await finish(task)
     if (code === 0) return
     const log = logOf(task)
-    const words = await tailOf(log)
+    const words = await lastWords(log)
     const known = explainFailure(words)
     const how = signal ? `was ended by ${signal}` : `failed (exit code ${code})`
     throw new Fault(
@@ -135,7 +125,8 @@ export function makeCrew(logs) {
     let made = null
     const member = {
       stop: async () => {
-        await coming.catch(() => undefined)
+        // A database folder in the making ends by itself and starts nothing: not worth more waiting than this.
+        await Promise.race([coming.catch(() => undefined), pause(LONGEST_COMING_MS)])
         await made?.stop()
         leave(member)
       },

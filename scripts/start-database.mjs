@@ -1,11 +1,13 @@
-import { access, rm, writeFile } from 'node:fs/promises'
+import { access, readFile, rm, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 
 import mysql from 'mysql2/promise'
 
+import { hashFiles } from './hash-files.mjs'
 import { startMariadb } from './mariadb.mjs'
 import { narrowRights } from './narrow-rights.mjs'
 import { plainEnvironment } from './plain-environment.mjs'
+import { ROOT } from './project-root.mjs'
 
 export const DATABASE = 'tankward'
 
@@ -24,6 +26,18 @@ async function emptyDatabase(server) {
   await owner.end()
 }
 
+/** @param {import('./crew.mjs').Crew} crew @param {string} ownerUrl @param {string} stamp */
+async function migrate(crew, ownerUrl, stamp) {
+  const hash = await hashFiles(ROOT, ['db/migrations', 'db/migrate.ts'], () => true)
+  if ((await readFile(stamp, 'utf8').catch(() => null)) === hash) return
+  await crew.run({
+    name: 'migrations',
+    command: ['node', 'scripts/migrate-database.mjs'],
+    environment: { ...plainEnvironment(), DATABASE_OWNER_URL: ownerUrl },
+  })
+  await writeFile(stamp, hash)
+}
+
 /**
  * Our own MariaDB under `<dataDir>/mariadb`, migrated. A seed that was cut short is begun again from nothing.
  * @param {import('./crew.mjs').Crew} crew
@@ -33,18 +47,15 @@ export async function startDatabase(crew, { dataDir, durable, startOver = false 
   const dir = path.join(dataDir, 'mariadb')
   const begun = path.join(dir, 'seed-begun')
   const done = path.join(dir, 'seed-done')
+  const migrated = path.join(dir, 'migrated')
   const server = await crew.adopt(
     startMariadb({ dir, durable, bufferPoolMb: durable ? 256 : 128, databases: [DATABASE] }),
   )
   if (startOver || ((await exists(begun)) && !(await exists(done)))) {
     await emptyDatabase(server)
-    await Promise.all([begun, done].map((mark) => rm(mark, { force: true })))
+    await Promise.all([begun, done, migrated].map((mark) => rm(mark, { force: true })))
   }
-  await crew.run({
-    name: 'migrations',
-    command: ['node', 'scripts/migrate-database.mjs'],
-    environment: { ...plainEnvironment(), DATABASE_OWNER_URL: server.url(DATABASE, 'owner') },
-  })
+  await migrate(crew, server.url(DATABASE, 'owner'), migrated)
   await narrowRights(server, DATABASE)
   return {
     pid: server.pid,

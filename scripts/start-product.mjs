@@ -1,8 +1,8 @@
 import path from 'node:path'
 
 import { exportWeb } from './export-web.mjs'
-import { Fault } from './fault.mjs'
 import { claimGround, layGround } from './lay-ground.mjs'
+import { lastWords } from './last-words.mjs'
 import { writeNote } from './run-note.mjs'
 import { step } from './tell.mjs'
 import { deathOf, waitUntilUp } from './wait-until-up.mjs'
@@ -71,10 +71,10 @@ export async function startProduct(crew, options) {
   }
   for (const member of beside) void watch(member)
   if (database) {
-    const fault = new Fault(
-      `The database stopped by itself. Its last words are in ${dataDir}/mariadb/error.log.`,
-    )
-    watchDatabase(database, () => !crew.isLeaving() && options.onDeath('database', fault))
+    watchDatabase(database, async () => {
+      const words = await lastWords(path.join(dataDir, 'mariadb', 'error.log'))
+      if (!crew.isLeaving()) options.onDeath('database', deathOf('database', words))
+    })
   }
   let server = await step('Server', startServer)
   return {

@@ -24,13 +24,17 @@ async function startAndStay(options) {
   /** @param {number} code @param {string} [why] */
   const leave = async (code, why) => {
     if (crew.isLeaving()) return
-    if (why) tell(why)
     await crew.stopAll().catch((error) => tell(sentenceOf(error)))
     await dropNote(dataDir)
+    if (why) tell(why)
     process.exit(code)
   }
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'])
-    process.on(signal, () => void leave(0, '\nStopping …'))
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
+    process.on(signal, () => {
+      if (!crew.isLeaving()) tell('\nStopping …')
+      void leave(0)
+    })
+  }
   // Whoever read our words has gone (npm start | head): go on without.
   process.stdout.on('error', () => undefined)
   process.on('uncaughtException', (error) => void leave(1, sentenceOf(error)))
