@@ -47,15 +47,15 @@ function checkOverlays(order: OrderRow, to: string): void {
   if (order.paymentDispute === 'open' && MONEY_STATES.has(to)) throw new Problem('dispute-open')
 }
 
+/** The timer of the order as it will stand, counted from now. */
 async function clockAfter(
   tx: Tx,
   order: OrderRow,
-  state: OrderState,
   at: Date,
 ): Promise<{ clockAt: Date | null; clockEdge: string | null }> {
   const terms = await readTerms(tx, order.listingVersionId)
   const next = nextClock({
-    state,
+    state: order.state as OrderState,
     sinceMs: at.getTime(),
     category: terms.category,
     readyMs: terms.readyOn ? Date.parse(`${terms.readyOn}T23:59:59Z`) : null,
@@ -85,7 +85,7 @@ export async function applyEdge(tx: Tx, command: EdgeCommand): Promise<EdgeOutco
   const at = now()
   const quantity = command.quantity ?? before.quantity
   const moved = { ...before, ...command.change, state: edge.to }
-  const clock = await clockAfter(tx, moved, edge.to, at)
+  const clock = await clockAfter(tx, moved, at)
   const change = { ...command.change, ...clock, state: edge.to, reason: edge.reason ?? null, updatedAt: at }
   if (!(await changeOrder(tx, before, change))) throw new Problem('order-moved')
   await moveStock(tx, {

@@ -2,10 +2,9 @@ import type { Caller } from '@/server/http/caller'
 import { readListingRow, findSellerOf } from '@/server/orders/party-store'
 import { listOrderRows } from '@/server/orders/order-store'
 import { presentOrders } from '@/server/orders/present-order'
-import type { ParsedQuery } from '@/shared/api/endpoint'
 import { readCursor, writeCursor } from '@/shared/api/cursor'
 import type { Endpoints } from '@/shared/api/routes.gen'
-import type { ReplyOf } from '@/shared/api/endpoint'
+import type { ParsedQuery, ReplyOf } from '@/shared/api/endpoint'
 
 type Asked = ParsedQuery<Endpoints['listOrders']>
 type Page = ReplyOf<Endpoints['listOrders']>

@@ -79,7 +79,7 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
     orderId: order.publicId,
     party,
     state: order.state as ShownOrder['state'],
-    ...(order.reason ? { reason: order.reason } : {}),
+    ...(order.reason ? { reason: order.reason as ShownOrder['reason'] } : {}),
     listingId: facts.listingId,
     title: described.title,
     photo: described.photo,
@@ -89,6 +89,8 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
     payMode: order.payMode === 'full' ? 'full' : 'deposit',
     balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
     balancePaid: order.balanceCents === 0 || order.balancePaidAt !== null,
+    needsAcceptance: order.needsAcceptance,
+    handOver: order.handOver === 'ship' ? 'ship' : 'pickup',
     accepting: order.state === 'requested' && order.acceptedAt !== null,
     slot: slotOf(order, facts.placeKind),
     otherParty:

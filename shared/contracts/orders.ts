@@ -3,7 +3,7 @@ import { z } from 'zod'
 import { endpoint } from '@/shared/api/endpoint'
 import { gateVerdict } from '@/shared/contracts/rules'
 import { cents, instantText, line, pageOf, publicIdText } from '@/shared/contracts/values'
-import { orderStates } from '@/shared/domain/orders/states.facts'
+import { cancelReasons, orderStates } from '@/shared/domain/orders/states.facts'
 
 export const orderActs = [
   'pay-deposit',
@@ -44,7 +44,7 @@ export const shownOrder = z.object({
   orderId: publicIdText,
   party: z.enum(['buyer', 'seller', 'staff']),
   state: z.enum(orderStates),
-  reason: z.string().optional(),
+  reason: z.enum(cancelReasons).optional(),
   listingId: publicIdText,
   title: z.string(),
   photo: z.object({ photoId: z.string(), ground: z.string(), alt: z.string() }).optional(),
@@ -55,6 +55,8 @@ export const shownOrder = z.object({
   balanceDue: z.enum(['at-handover', 'before']),
   balancePaid: z.boolean(),
   accepting: z.boolean(),
+  needsAcceptance: z.boolean(),
+  handOver: z.enum(['pickup', 'ship']),
   slot: z
     .object({ startsAt: instantText, endsAt: instantText, zone: z.string(), placeKind: z.string() })
     .optional(),

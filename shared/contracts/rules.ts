@@ -14,6 +14,8 @@ export const ruleReason = z.object({
   checkedOn: dayText,
   confidence: z.string(),
   overdue: z.boolean(),
+  /** Secondary text or hearsay: shown beside the verdict, without weight in it. */
+  hint: z.boolean(),
 })
 
 /** What the legal gate says to one buyer about one listing, in words and with its sources. */

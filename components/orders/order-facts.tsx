@@ -1,0 +1,67 @@
+import { StyleSheet, View } from 'react-native'
+
+import { Card } from '@/components/ui/card'
+import { Heading } from '@/components/ui/heading'
+import { Link } from '@/components/ui/link'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+import type { ShownOrder } from '@/shared/contracts/orders'
+import { printSlot } from '@/shared/times/print-time'
+import { printCents } from '@/shared/units/money'
+
+function Fact({ name, children }: { name: string; children: string }) {
+  return (
+    <View style={styles.fact}>
+      <Text size="note" tint="muted" style={styles.name}>
+        {name}
+      </Text>
+      <Text style={styles.value}>{children}</Text>
+    </View>
+  )
+}
+
+const mapLink = ({ street, city, state, zip }: NonNullable<ShownOrder['meeting']>) =>
+  `geo:0,0?q=${encodeURIComponent(`${street}, ${city}, ${state} ${zip}`)}`
+
+/** When, where, who and how much: what the two parties agreed on. */
+export function OrderFacts({ order }: { order: ShownOrder }) {
+  const { meeting, slot, party } = order
+  const where = meeting ? `${meeting.street}, ${meeting.city}, ${meeting.state} ${meeting.zip}` : null
+  return (
+    <Card labelledBy="order-facts">
+      <Heading level={2} size="lead" nativeID="order-facts">
+        The agreement
+      </Heading>
+      <Fact name="Animals">{`${order.quantity} at ${printCents(order.unitCents)} each`}</Fact>
+      <Fact name="Pickup">{slot ? printSlot(slot) : 'No day agreed yet'}</Fact>
+      <Fact name="Place">
+        {where && party === 'buyer'
+          ? where
+          : party === 'buyer'
+            ? 'Shown once the day is agreed'
+            : 'Your place'}
+      </Fact>
+      {meeting && party === 'buyer' ? <Fact name="Phone">{meeting.phone}</Fact> : null}
+      <Fact name={party === 'seller' ? 'Buyer' : 'Seller'}>{order.otherParty.name}</Fact>
+      <Fact name="Arrival promise">{order.arrivalPromise}</Fact>
+      {order.countHandedOver === undefined ? null : (
+        <Fact name="Counted together">{String(order.countHandedOver)}</Fact>
+      )}
+      <View style={styles.links}>
+        {meeting && party === 'buyer' ? (
+          <Link href={mapLink(meeting) as `geo:${string}`} isExternal>
+            Open in maps
+          </Link>
+        ) : null}
+        <Link href={`/listings/${order.listingId}`}>See the listing</Link>
+      </View>
+    </Card>
+  )
+}
+
+const styles = StyleSheet.create({
+  fact: { flexDirection: 'row', gap: space.md, flexWrap: 'wrap' },
+  name: { width: 128 },
+  value: { flex: 1, minWidth: 180 },
+  links: { flexDirection: 'row', gap: space.xl, flexWrap: 'wrap' },
+})

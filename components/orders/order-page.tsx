@@ -1,0 +1,119 @@
+import { StyleSheet, View } from 'react-native'
+
+import { HandOverCode } from '@/components/orders/hand-over-code'
+import { HoldCountdown } from '@/components/orders/hold-countdown'
+import { MoneyStrip } from '@/components/orders/money-strip'
+import { OrderActs } from '@/components/orders/order-acts'
+import { OrderFacts } from '@/components/orders/order-facts'
+import { OrderHistory } from '@/components/orders/order-history'
+import { OrderPathLine } from '@/components/orders/order-path-line'
+import { stateWord } from '@/components/orders/state-words'
+import { Page } from '@/components/layout/page'
+import { TwoColumns } from '@/components/layout/two-columns'
+import { Badge } from '@/components/ui/badge'
+import { Banner } from '@/components/ui/banner'
+import { Card } from '@/components/ui/card'
+import { ErrorState } from '@/components/ui/error-state'
+import { SkeletonRows } from '@/components/ui/skeleton'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+import { useOrder } from '@/hooks/use-orders'
+import { Problem } from '@/shared/api/problem'
+import type { ShownOrder } from '@/shared/contracts/orders'
+import { fillCaution } from '@/shared/domain/rules/fill-caution'
+
+const back = { label: 'Orders', href: '/orders' } as const
+
+/** After the payment page: the money's own word may take a second to arrive. */
+function Returned({ order, from }: { order: ShownOrder; from: { paid?: string; left?: string } }) {
+  if (from.paid === 'deposit' && order.state === 'reserved') {
+    return (
+      <Banner tone="info" title="Waiting for the payment" isLive>
+        <Text>The payment service is telling us. This page looks again by itself.</Text>
+      </Banner>
+    )
+  }
+  if (from.left === 'deposit' && order.state === 'reserved') {
+    return (
+      <Banner tone="caution" title="Not paid yet" isLive>
+        <Text>You left the payment page. The animals stay held until the time above.</Text>
+      </Banner>
+    )
+  }
+  return null
+}
+
+function AfterCare({ order }: { order: ShownOrder }) {
+  if (order.party !== 'buyer' || !['handed_over', 'settled'].includes(order.state)) return null
+  return (
+    <Banner tone="info" title="Look after them now">
+      <Text>{fillCaution('G-8', { hours: '6' })}</Text>
+      <Text>{fillCaution('G-7', {})}</Text>
+      <Text>{fillCaution('G-1', {})}</Text>
+    </Banner>
+  )
+}
+
+/** One order, for whichever party looks at it. */
+export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: string; left?: string } }) {
+  const { data: order, error, isPending, refetch, isRefetching } = useOrder(orderId)
+  if (isPending) {
+    return (
+      <Page title="Order" back={back}>
+        <SkeletonRows label="Loading the order" rows={5} />
+      </Page>
+    )
+  }
+  if (!order) {
+    const isGone = error instanceof Problem && error.status === 404
+    return (
+      <Page title="Order" back={back}>
+        <ErrorState
+          title={isGone ? 'We know no such order' : 'We could not load this order'}
+          body={isGone ? 'Look under Orders: it may belong to another account.' : (error?.message ?? '')}
+          onRetry={isGone ? undefined : () => void refetch()}
+          isRetrying={isRefetching}
+        />
+      </Page>
+    )
+  }
+  const { word, tone } = stateWord(order.state)
+  return (
+    <Page
+      title={`${order.quantity} × ${order.title}`}
+      back={back}
+      actions={<Badge word={word} tone={tone} />}
+    >
+      <OrderPathLine order={order} />
+      <Returned order={order} from={from} />
+      <TwoColumns
+        sideLabel="Money"
+        main={
+          <View style={styles.column}>
+            {order.state === 'reserved' ? <HoldCountdown order={order} /> : null}
+            {order.accepting ? (
+              <Banner tone="info" title="Accepted: the deposit is being taken" isLive>
+                <Text>This takes a few seconds, longer when the payment service is busy.</Text>
+              </Banner>
+            ) : null}
+            {order.handOverCode ? <HandOverCode code={order.handOverCode} /> : null}
+            <OrderActs order={order} />
+            <AfterCare order={order} />
+            <OrderFacts order={order} />
+            <OrderHistory order={order} />
+          </View>
+        }
+        side={
+          <Card>
+            <MoneyStrip order={order} />
+            <Text size="note" tint="muted">
+              Your money is held by our payment processor until you confirm, or until the time above.
+            </Text>
+          </Card>
+        }
+      />
+    </Page>
+  )
+}
+
+const styles = StyleSheet.create({ column: { gap: space.lg } })

@@ -1,0 +1,58 @@
+import { StyleSheet, View } from 'react-native'
+
+import { stateWord } from '@/components/orders/state-words'
+import { Badge } from '@/components/ui/badge'
+import { Photo } from '@/components/ui/photo'
+import { PressLink } from '@/components/ui/press-link'
+import { Text } from '@/components/ui/text'
+import { color, radius, space } from '@/constants/theme'
+import { photoUrl } from '@/hooks/api'
+import type { OrderRow } from '@/shared/contracts/orders'
+import { printSlot } from '@/shared/times/print-time'
+import { printCents } from '@/shared/units/money'
+
+const look = ({ pressed }: { pressed: boolean }) => [styles.card, pressed ? styles.pressed : null]
+
+/** One order in the list: what, with whom, when, and what it waits for. */
+export function OrderRowCard({ order }: { order: OrderRow }) {
+  const { word, tone } = stateWord(order.state)
+  return (
+    <PressLink href={`/orders/${order.orderId}`} look={look}>
+      {order.photo ? (
+        <View style={styles.photo}>
+          <Photo
+            uri={photoUrl(order.photo.photoId, 320)}
+            label={order.photo.alt}
+            ratio={1}
+            meanColor={order.photo.ground}
+          />
+        </View>
+      ) : null}
+      <View style={styles.words}>
+        <Text face="title" size="lead">{`${order.quantity} × ${order.title}`}</Text>
+        <Text size="note" tint="muted">{`${order.otherParty.name} · ${printCents(order.totalCents)}`}</Text>
+        {order.slot ? <Text size="note">{printSlot(order.slot)}</Text> : null}
+        <View style={styles.badges}>
+          <Badge word={word} tone={tone} />
+          {order.may.length > 0 ? <Badge word="Your move" tone="today" /> : null}
+        </View>
+      </View>
+    </PressLink>
+  )
+}
+
+const styles = StyleSheet.create({
+  card: {
+    flexDirection: 'row',
+    gap: space.md,
+    padding: space.lg,
+    borderRadius: radius.tag,
+    backgroundColor: color.card,
+    borderWidth: 1,
+    borderColor: color.line,
+  },
+  pressed: { backgroundColor: color.sunk },
+  photo: { width: 72, borderRadius: radius.tag, overflow: 'hidden' },
+  words: { flex: 1, gap: 4, minWidth: 0 },
+  badges: { flexDirection: 'row', gap: space.sm, flexWrap: 'wrap' },
+})

@@ -1,0 +1,4 @@
+// The order screens as one lazily loaded group.
+export { OrderPage } from './order-page'
+export { OrdersHome } from './orders-home'
+export { ReserveBatch } from '../reservations/reserve-batch'

@@ -1,0 +1,44 @@
+import { StyleSheet, View } from 'react-native'
+
+import { OrderList } from '@/components/orders/order-list'
+import { ButtonLink } from '@/components/ui/button-link'
+import { EmptyState } from '@/components/ui/empty-state'
+import { Link } from '@/components/ui/link'
+import { SkeletonRows } from '@/components/ui/skeleton'
+import { space } from '@/constants/theme'
+import { useMe } from '@/hooks/use-me'
+
+/** Orders, seen from the side of the counter one stands on. */
+export function OrdersHome({ as }: { as: 'buyer' | 'seller' }) {
+  const { me, isPending } = useMe()
+  if (isPending) return <SkeletonRows label="Loading your orders" rows={4} />
+  if (!me) {
+    return (
+      <EmptyState
+        title="Sign in to see your orders"
+        body="Every order keeps its pickup time, its money and its next step in one place."
+        action={<ButtonLink label="Sign in" href="/sign-in?returnTo=/orders" />}
+      />
+    )
+  }
+  return (
+    <View style={styles.home}>
+      {me.roles.includes('seller') ? (
+        <View role="navigation" aria-label="Side of the counter" style={styles.sides}>
+          <Link href="/orders" isCurrent={as === 'buyer'}>
+            I buy
+          </Link>
+          <Link href="/orders?as=seller" isCurrent={as === 'seller'}>
+            I sell
+          </Link>
+        </View>
+      ) : null}
+      <OrderList as={as} />
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  home: { gap: space.lg },
+  sides: { flexDirection: 'row', gap: space.xl },
+})
