@@ -1,11 +1,14 @@
 import { QueryClientProvider } from '@tanstack/react-query'
 import { Stack } from 'expo-router'
 
+import { allowOwnScripts } from '@/components/layout/allow-own-scripts'
 import { Frame } from '@/components/layout/frame'
-import { ToastProvider } from '@/components/ui/toast'
 import { useAppFonts } from '@/components/layout/use-app-fonts'
-import { useTheme } from '@/hooks/use-theme'
+import { ToastProvider } from '@/components/ui/toast'
 import { queryClient } from '@/hooks/query-client'
+import { useTheme } from '@/hooks/use-theme'
+
+allowOwnScripts()
 
 export default function RootLayout() {
   const hasFonts = useAppFonts()

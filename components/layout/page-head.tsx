@@ -37,7 +37,11 @@ export function PageHead({ title, back, actions, isPhone }: Props) {
           onPress={() => (router.canGoBack() ? router.back() : router.replace(back.href))}
         />
       ) : null}
-      {!back && isPhone ? <Brand /> : null}
+      {!back && isPhone ? (
+        <View style={styles.brand}>
+          <Brand />
+        </View>
+      ) : null}
       <View style={styles.middle}>
         {back ? (
           <Text size="note" tint="muted" numberOfLines={1} aria-hidden>
@@ -59,5 +63,6 @@ const styles = StyleSheet.create({
     paddingHorizontal: space.sm,
   },
   ruled: { backgroundColor: color.card, borderBottomWidth: 1, borderBottomColor: color.line },
+  brand: { paddingLeft: space.sm },
   middle: { flex: 1, minWidth: 0 },
 })

@@ -5,6 +5,7 @@ import { StyleSheet, View } from 'react-native'
 import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
+import { useBreakpoint } from '@/hooks/use-breakpoint'
 
 interface Props {
   heading: string
@@ -18,6 +19,7 @@ let isFirstPage = true
 export function PageTitle({ heading, intro, isHidden }: Props) {
   const box = useRef<View>(null)
   const isInView = useIsFocused()
+  const isPhone = useBreakpoint() === 'phone'
   useEffect(() => {
     if (!isInView) return
     if (!isFirstPage) box.current?.focus()
@@ -25,7 +27,9 @@ export function PageTitle({ heading, intro, isHidden }: Props) {
   }, [isInView])
   return (
     <View ref={box} tabIndex={-1} style={isHidden ? styles.hidden : styles.title}>
-      <Heading level={1}>{heading}</Heading>
+      <Heading level={1} size={isPhone ? 'title' : 'hero'}>
+        {heading}
+      </Heading>
       {intro ? (
         <Text tint="muted" style={styles.intro}>
           {intro}

@@ -1,3 +1,4 @@
+import { useIsFocused } from 'expo-router'
 import Head from 'expo-router/head'
 import type { ReactNode } from 'react'
 import { ScrollView, StyleSheet, View } from 'react-native'
@@ -30,6 +31,7 @@ interface Props {
 export function Page(props: Props) {
   const { title, heading = title, isHeadingHidden, intro, width = 'page', isScrolled = true, footer } = props
   const isPhone = useBreakpoint() === 'phone'
+  const isInView = useIsFocused()
   const { bottom } = useSafeAreaInsets()
   const body = (
     <View
@@ -37,7 +39,7 @@ export function Page(props: Props) {
         styles.body,
         styles[width],
         isPhone ? styles.phone : styles.roomy,
-        isScrolled ? null : styles.fill,
+        isScrolled ? null : styles.unscrolled,
       ]}
     >
       <PageTitle heading={heading} intro={intro} isHidden={isHeadingHidden} />
@@ -45,7 +47,7 @@ export function Page(props: Props) {
     </View>
   )
   return (
-    <View role="main" tabIndex={-1} style={styles.main}>
+    <View role="main" tabIndex={-1} nativeID={isInView ? 'content' : undefined} style={styles.main}>
       <Head>
         <title>{`${title} · Tankward`}</title>
       </Head>
@@ -65,6 +67,7 @@ const styles = StyleSheet.create({
   readable: { maxWidth: layout.readablePx + 2 * space.xl },
   page: { maxWidth: layout.pagePx + 2 * space.xl },
   full: {},
+  unscrolled: { flex: 1, minHeight: 0, paddingBottom: 0 },
   foot: {
     paddingHorizontal: space.lg,
     paddingTop: space.md,

@@ -11,8 +11,7 @@ export function SkipLink() {
     style: styles.link,
     onClick: (event: { preventDefault: () => void }) => {
       event.preventDefault()
-      const pages = Array.from(document.querySelectorAll('main'))
-      pages.find((page) => page.offsetParent !== null)?.focus()
+      document.getElementById('content')?.focus()
     },
     children: 'Skip to the page',
   })

@@ -1,6 +1,7 @@
-import { lazy, Suspense } from 'react'
+import { lazy } from 'react'
 import { StyleSheet, View } from 'react-native'
 
+import { LazyPart } from '@/components/ui/lazy-part'
 import { Text } from '@/components/ui/text'
 import { color } from '@/constants/theme'
 
@@ -10,9 +11,9 @@ const MapPicture = lazy(() => import('./map-group').then((group) => ({ default: 
 
 export function Map(props: MapProps) {
   return (
-    <Suspense fallback={<Waiting />}>
+    <LazyPart label={props.label} fallback={<Waiting />}>
       <MapPicture {...props} />
-    </Suspense>
+    </LazyPart>
   )
 }
 

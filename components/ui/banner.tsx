@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react'
-import { StyleSheet, View } from 'react-native'
+import { StyleSheet, View, type ViewStyle } from 'react-native'
 
 import { Icon } from './icon'
 import { Text } from './text'
@@ -23,7 +23,7 @@ export function Banner({ tone, title, children, icon, isLive }: Props) {
   const tint = toneTint[tone]
   return (
     <View role={isLive ? (tone === 'danger' ? 'alert' : 'status') : 'note'} style={styles.banner}>
-      <View style={[styles.edge, { backgroundColor: color[tint] }]} />
+      <View style={[styles.edge, { backgroundColor: color[tint] }, edgePattern[tone]]} />
       <View style={styles.icon}>
         <Icon name={icon ?? toneIcon[tone]} tint={tint} />
       </View>
@@ -37,6 +37,14 @@ export function Banner({ tone, title, children, icon, isLive }: Props) {
   )
 }
 
+// The weather tones wear their pattern on the edge too.
+const dots = `radial-gradient(circle, ${color.card} 1.2px, transparent 1.6px)`
+const slants = `repeating-linear-gradient(45deg, ${color.card} 0 2px, transparent 2px 6px)`
+const edgePattern: Partial<Record<Tone, ViewStyle>> = {
+  cold: { backgroundImage: dots, backgroundSize: '6px 6px' },
+  hot: { backgroundImage: slants },
+}
+
 const styles = StyleSheet.create({
   banner: {
     flexDirection: 'row',
@@ -46,7 +54,7 @@ const styles = StyleSheet.create({
     borderColor: color.line,
     overflow: 'hidden',
   },
-  edge: { width: 6 },
+  edge: { width: 8 },
   icon: { paddingTop: space.md, paddingLeft: space.md },
   words: { flex: 1, padding: space.md, gap: space.xs },
 })

@@ -6,7 +6,7 @@ import { nextSorting, sortRows } from './sort-rows'
 import { Text } from './text'
 import { webElement } from './web-element'
 
-import { color, space, touchPx } from '@/constants/theme'
+import { color, font, space, touchPx, type } from '@/constants/theme'
 
 import type { Column, DataTableProps, Sorting } from './data-table-types'
 
@@ -132,11 +132,14 @@ const styles = StyleSheet.create({
   },
   table: { width: '100%' },
   cell: {
+    ...type.note,
+    ...font.body,
     paddingHorizontal: space.md,
     paddingVertical: space.sm,
     height: touchPx,
     textAlign: 'left',
     verticalAlign: 'middle',
+    borderWidth: 0,
     borderBottomWidth: 1,
     borderStyle: 'solid',
     borderColor: color.line,

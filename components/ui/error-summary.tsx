@@ -17,9 +17,11 @@ interface Props {
   errors: readonly FormError[]
   /** Counts the tries to send: each one that fails moves the keyboard here. */
   attempt: number
+  /** Brings a field into view that is not on this step; the keyboard goes there when it has been drawn. */
+  onOpen?: (fieldId: string) => void
 }
 
-export function ErrorSummary({ errors, attempt }: Props) {
+export function ErrorSummary({ errors, attempt, onOpen }: Props) {
   const box = useRef<View>(null)
   const isShown = errors.length > 0
   useEffect(() => {
@@ -36,7 +38,10 @@ export function ErrorSummary({ errors, attempt }: Props) {
           <Pressable
             key={`${fieldId} ${message}`}
             role="link"
-            onPress={() => focusElement(fieldId)}
+            onPress={() => {
+              onOpen?.(fieldId)
+              requestAnimationFrame(() => focusElement(fieldId))
+            }}
             style={styles.line}
           >
             <Text tint="danger" style={styles.link}>

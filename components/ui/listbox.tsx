@@ -64,6 +64,7 @@ const styles = StyleSheet.create({
     paddingHorizontal: 12,
     paddingVertical: 6,
     cursor: 'pointer',
+    borderWidth: 0,
     borderLeftWidth: 4,
     borderStyle: 'solid',
     borderColor: 'transparent',

@@ -38,6 +38,8 @@ declare module 'react-native' {
   interface ViewStyle {
     clipPath?: string
     maskImage?: string
+    maskComposite?: string
     backgroundImage?: string
+    backgroundSize?: string
   }
 }

@@ -59,6 +59,6 @@ export function Select<Value extends string>(props: SelectProps<Value>) {
 }
 
 const styles = StyleSheet.create({
-  select: { paddingRight: space.xxl + space.sm },
+  select: { width: '100%', paddingRight: space.xxl + space.sm },
   arrow: { position: 'absolute', right: space.md, top: 14, pointerEvents: 'none' },
 })
