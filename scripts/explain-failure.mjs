@@ -1,6 +1,6 @@
 const MEANINGS = [
   [
-    /ENOSPC|No space left|disk is full|Errcode: 28|You don't have enough free space/i,
+    /ENOSPC|No space left|disk is full|Errcode: 28|error (?:number )?28\b|You don't have enough free space/i,
     'The disk is full: make room (the packages need about 1.5 GB, the database 0.2 GB) and run the same command again.',
   ],
   [

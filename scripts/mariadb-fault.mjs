@@ -17,7 +17,7 @@ export const INSTALL_HINT =
  * @param {string} log @param {string} dir
  */
 export function explain(log, dir) {
-  if (/No space left|Errcode: 28|ENOSPC|error number 28|disk is full/i.test(log)) {
+  if (/No space left|Errcode: 28|ENOSPC|error (?:number )?28\b|disk is full/i.test(log)) {
     return `The disk that holds ${dir} is full. Make room (about 300 MB) and start again; nothing stored is lost.`
   }
   if (/EACCES|Permission denied|Errcode: 13|EROFS|Read-only file system/i.test(log)) {
