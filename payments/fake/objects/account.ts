@@ -61,6 +61,6 @@ export function presentAccount(_turn: Turn, row: AccountRow): Stripe.Account {
     metadata: row.metadata,
     payouts_enabled: row.payoutsEnabled,
     requirements: requirementsOf(row),
-    type: 'none',
+    type: 'express',
   }
 }

@@ -16,7 +16,6 @@ export const accountLinkEndpoints: Endpoint[] = [
     path: '/v1/account_links',
     accepts: {
       account: 'text',
-      collection_options: { fields: 'text' },
       expand: 'list',
       refresh_url: 'text',
       return_url: 'text',
@@ -28,7 +27,6 @@ export const accountLinkEndpoints: Endpoint[] = [
       if (oneOf(form, 'type', ['account_onboarding']) === null) {
         throw badParameter('type', 'Missing required param: type.', 'parameter_missing')
       }
-      oneOf(form, 'collection_options[fields]', ['currently_due', 'eventually_due'])
       for (const name of ['refresh_url', 'return_url']) {
         if (!URL.canParse(textOf(form, name) ?? ''))
           throw badParameter(name, `Not a valid URL: ${name}`, 'url_invalid')
