@@ -1,0 +1,70 @@
+import type { SellerRow } from '@/server/sellers/seller-store'
+import type { FieldProblem } from '@/shared/api/problem'
+import type { ListingBody } from '@/shared/contracts/listings'
+import { findBlock } from '@/shared/domain/rules/find-block'
+import { findState } from '@/shared/domain/rules/find-state'
+import { findTaxon } from '@/shared/domain/species/find-taxon'
+import { stageFitsLength } from '@/shared/domain/species/stage-fits-length'
+import { traceLineage } from '@/shared/domain/species/trace-lineage'
+
+const MM_PER_INCH = 25.4
+
+/** Why we do not list this animal at all. null: we do. */
+export function blockOn(taxonId: string): string | null {
+  const lineage = traceLineage(taxonId)
+  return lineage ? (findBlock(lineage)?.why ?? null) : null
+}
+
+function animalFaults(body: ListingBody): FieldProblem[] {
+  const taxon = findTaxon(body.taxonId)
+  const pointer = '#/draft/taxonId'
+  if (!taxon) return [{ detail: 'Pick the species from the list.', pointer }]
+  if (taxon.kind !== 'fish' && taxon.kind !== 'crustacean') {
+    return [{ detail: 'This form is for fish, crayfish and prawns.', pointer }]
+  }
+  if (taxon.rank !== 'species' && taxon.rank !== 'hybrid') {
+    return [{ detail: `Which ${taxon.commonName.toLowerCase()}? Pick one species or cross.`, pointer }]
+  }
+  return []
+}
+
+function stageFaults(body: ListingBody): FieldProblem[] {
+  const fits = stageFitsLength(body.stage, body.sizeLoMm / MM_PER_INCH, body.sizeHiMm / MM_PER_INCH)
+  if (fits !== false) return []
+  return [
+    {
+      detail: 'That word does not fit the lengths you gave: choose another stage or check the size.',
+      pointer: '#/draft/stage',
+    },
+  ]
+}
+
+function stateFaults(body: ListingBody, seller: SellerRow): FieldProblem[] {
+  const faults: FieldProblem[] = []
+  if (!findState(seller.state)?.takesAnimals) {
+    faults.push({
+      detail: `We do not trade living animals in ${seller.state} yet.`,
+      pointer: '#/draft/statesServed',
+    })
+  }
+  body.statesServed.forEach((state, at) => {
+    if (!findState(state)?.takesAnimals) {
+      faults.push({
+        detail: `We bring no living animals to ${state} yet.`,
+        pointer: `#/draft/statesServed/${at}`,
+      })
+    }
+  })
+  if (!seller.licences.some((licence) => licence.state === seller.state)) {
+    faults.push({
+      detail: `Answer the licence question for ${seller.state} on your farm page first.`,
+      pointer: '#/draft/licenceNumbers',
+    })
+  }
+  return faults
+}
+
+/** What is wrong with the animal named, its stage, and where it would be sold. */
+export function checkAnimal(body: ListingBody, seller: SellerRow): FieldProblem[] {
+  return [...animalFaults(body), ...stageFaults(body), ...stateFaults(body, seller)]
+}
