@@ -78,10 +78,15 @@ export function wishSql(query: SearchQuery): string[] {
   return wishes
 }
 
+/** No ranges (a circle that earlier pages have whole, a view off the world): no rows. */
+export function rangesSql(column: string, ranges: readonly HilbertRange[]): string {
+  if (ranges.length === 0) return 'FALSE'
+  return `(${ranges.map(({ from, to }) => `${column} BETWEEN ${whole(from)} AND ${whole(to)}`).join(' OR ')})`
+}
+
 /** Inside the circle, both by index ranges and exactly. */
 export function circleSql(query: SearchQuery, ranges: readonly HilbertRange[], radiusKm: number): string[] {
-  const parts = ranges.map(({ from, to }) => `hil BETWEEN ${whole(from)} AND ${whole(to)}`)
-  return [`(${parts.join(' OR ')})`, insideSql(query, radiusKm)]
+  return [rangesSql('hil', ranges), insideSql(query, radiusKm)]
 }
 
 export function insideSql(query: SearchQuery, radiusKm: number): string {
