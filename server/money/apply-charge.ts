@@ -1,7 +1,7 @@
 import { inTransaction, type Tx } from '@/db/transaction'
 import { now } from '@/server/clock'
 import { bookCapture, bookProcessorCost } from '@/server/money/book-capture'
-import { changePayment, lockPayment, type PaymentRow } from '@/server/money/payment-store'
+import { changePayment, lockPayment, STRAY, type PaymentRow } from '@/server/money/payment-store'
 import type { ChargeState } from '@/server/money/read-charge'
 import { refundPayment } from '@/server/money/refund-payment'
 import { applyEdge } from '@/server/orders/apply-edge'
@@ -41,7 +41,7 @@ async function takeBalance(tx: Tx, { payment, order }: Locked): Promise<void> {
     await changeOrder(tx, order, { balancePaidAt: at, updatedAt: at })
     return
   }
-  await refundPayment(tx, { order, payment, amountCents: payment.amountCents, why: 'paid-too-late' })
+  await refundPayment(tx, { order, payment, amountCents: payment.amountCents, why: STRAY })
 }
 
 /** E05 for an instant listing, E07 once the seller has accepted; then the date, when a window was chosen. */
@@ -49,7 +49,7 @@ async function takeFirstCharge(tx: Tx, { payment, order }: Locked): Promise<void
   const edge = order.state === 'reserved' ? 'E05' : order.state === 'requested' ? 'E07' : null
   if (edge === null) {
     // The hold had ended before the money came: it goes straight back.
-    await refundPayment(tx, { order, payment, amountCents: payment.amountCents, why: 'paid-too-late' })
+    await refundPayment(tx, { order, payment, amountCents: payment.amountCents, why: STRAY })
     return
   }
   await applyEdge(tx, {

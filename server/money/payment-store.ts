@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, isNotNull, lte, sql } from 'drizzle-orm'
+import { and, asc, eq, inArray, isNotNull, lte, ne, sql } from 'drizzle-orm'
 
 import { db, type Tx } from '@/db/client'
 import { payment, processorEvent, refund, transfer } from '@/db/schema/payments'
@@ -9,6 +9,9 @@ export type RefundRow = typeof refund.$inferSelect
 export type PaymentStatus = 'opening' | 'open' | 'authorised' | 'captured' | 'voided' | 'expired' | 'failed'
 
 const DUPLICATE = 1062
+
+/** Why a charge that came too late, or twice, went straight back. */
+export const STRAY = 'paid-too-late'
 
 export async function insertPayment(
   tx: Tx,
@@ -110,6 +113,20 @@ export async function finishRefund(
     .update(refund)
     .set({ status: 'done', processorId: done.processorId, updatedAt: done.at })
     .where(eq(refund.id, id))
+}
+
+/** What went back of the goods themselves, and what went back because it should never have been charged. */
+export async function sumRefunds(
+  tx: Tx,
+  orderId: number,
+): Promise<{ goodsCents: number; strayCents: number }> {
+  const rows = await tx
+    .select({ amountCents: refund.amountCents, why: refund.why })
+    .from(refund)
+    .where(and(eq(refund.orderId, orderId), ne(refund.status, 'failed')))
+  const sum = (isStray: boolean) =>
+    rows.filter((row) => (row.why === STRAY) === isStray).reduce((total, row) => total + row.amountCents, 0)
+  return { goodsCents: sum(false), strayCents: sum(true) }
 }
 
 export async function insertTransfer(

@@ -1,25 +1,33 @@
 import type { Tx } from '@/db/transaction'
 import { now } from '@/server/clock'
 import { book } from '@/server/money/ledger-store'
-import { insertTransfer, listPayments } from '@/server/money/payment-store'
+import { insertTransfer, listPayments, sumRefunds } from '@/server/money/payment-store'
 import { applyEdge, type EdgeCommand } from '@/server/orders/apply-edge'
+import { changeOrder, type OrderRow } from '@/server/orders/order-store'
 import { queueEffect } from '@/server/outbox/outbox-store'
-import { settle } from '@/shared/domain/money/settle'
+import { settle, type Settlement } from '@/shared/domain/money/settle'
+
+async function splitOf(tx: Tx, order: OrderRow): Promise<Settlement> {
+  const captured = (await listPayments(order.id, tx)).filter((payment) => payment.status === 'captured')
+  const refunds = await sumRefunds(tx, order.id)
+  return settle({
+    chargedCents: captured.reduce((sum, payment) => sum + payment.amountCents, 0),
+    goodsCents: order.goodsCents,
+    taxCents: order.taxCents,
+    refundedGoodsCents: refunds.goodsCents,
+    refundedOtherCents: refunds.strayCents,
+    feeBp: order.feeBp,
+    debtCents: 0,
+  })
+}
 
 /** E40 (E38): all is good or the window has ended. Splits what is held and queues the one transfer to the seller. */
 export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<void> {
-  const { order, applied } = await applyEdge(tx, { ...command, change: { settledAt: now() } })
+  const at = now()
+  const { order, applied } = await applyEdge(tx, { ...command, change: { settledAt: at } })
   if (!applied) return
-  const captured = (await listPayments(order.id, tx)).filter((payment) => payment.status === 'captured')
-  const chargedCents = captured.reduce((sum, payment) => sum + payment.amountCents, 0)
-  const split = settle({
-    chargedCents,
-    refundedCents: order.refundedCents,
-    taxCents: order.taxCents,
-    feeCents: order.feeCents,
-    debtRecoveredCents: 0,
-  })
-  const { transferCents } = split
+  const { transferCents, feeCents, taxCents } = await splitOf(tx, order)
+  await changeOrder(tx, order, { feeCents, updatedAt: at })
   await book(tx, {
     orderId: order.id,
     sellerId: order.sellerId,
@@ -27,14 +35,14 @@ export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<void> {
     cause: `settle:${order.id}`,
     processorId: null,
     rows: [
-      ['held', -(transferCents + order.feeCents + order.taxCents)],
+      ['held', -(transferCents + feeCents + taxCents)],
       ['seller_payable', transferCents],
-      ['platform_fee', order.feeCents],
-      ['tax_payable', order.taxCents],
+      ['platform_fee', feeCents],
+      ['tax_payable', taxCents],
     ],
-    at: now(),
+    at,
   })
   if (transferCents === 0) return
-  await insertTransfer(tx, { orderId: order.id, amountCents: transferCents, at: now() })
+  await insertTransfer(tx, { orderId: order.id, amountCents: transferCents, at })
   await queueEffect({ kind: 'transfer', ref: order.id, body: {} }, tx)
 }

@@ -40,14 +40,8 @@ async function checkCode(order: OrderRow, code: string): Promise<void> {
   )
 }
 
-/** Fewer handed over than ordered: the part is refunded at the price paid, and the fee with it. */
+/** Fewer handed over than ordered: the part is refunded at the price paid, and the fee falls with it. */
 async function refundShort(tx: Tx, order: OrderRow, count: number): Promise<void> {
-  const short = shortfallRefund({
-    goodsCents: order.goodsCents,
-    ordered: order.quantity,
-    aliveReceived: count,
-    feeBp: order.feeBp,
-  })
   await moveStock(tx, {
     listingId: order.listingId,
     orderId: order.id,
@@ -57,10 +51,16 @@ async function refundShort(tx: Tx, order: OrderRow, count: number): Promise<void
     by: null,
     at: now(),
   })
-  if (short.refundCents === 0) return
+  const short = shortfallRefund({
+    ordered: order.quantity,
+    alive: count,
+    price: { kind: 'each', unitCents: order.goodsCents / order.quantity },
+    boxCents: order.boxCents,
+    freightCents: order.freightCents,
+    isSellersFault: false,
+    promisesFreight: false,
+  })
   await refundOrder(tx, order, { amountCents: short.refundCents, why: 'short-at-hand-over' })
-  const fresh = await lockOrder(tx, order.id)
-  if (fresh) await changeOrder(tx, fresh, { feeCents: short.feeCents, updatedAt: now() })
 }
 
 /**

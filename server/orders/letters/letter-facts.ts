@@ -4,6 +4,7 @@ import type { OrderRow } from '@/server/orders/order-store'
 import type { SellerRow } from '@/server/orders/party-store'
 import type { ListingBody } from '@/shared/contracts/listings'
 import { printSlot } from '@/shared/times/print-time'
+import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
 
 export interface Person {
@@ -31,7 +32,7 @@ export function orderTag({ order, terms, seller }: LetterFacts): LetterBlock {
   return {
     kind: 'tag',
     title: described.title,
-    size: described.sizeText,
+    size: printLengthRange({ minCm: terms.sizeLoMm / 10, maxCm: terms.sizeHiMm / 10 }, 'us'),
     count: `${order.quantity} animals`,
     price: printCents(order.totalCents),
     place: `${seller.farmName}, ${seller.city}, ${seller.state}`,
