@@ -1,5 +1,5 @@
 import { execFile } from 'node:child_process'
-import { readdir, readFile, rm } from 'node:fs/promises'
+import { readdir, readFile, rm, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 import { promisify } from 'node:util'
 
@@ -44,6 +44,17 @@ export async function stopProcess(pid) {
   }
 }
 
+const noteIn = (/** @type {string} */ dir) => path.join(dir, 'running.json')
+
+/** Says which server runs in `dir` and who started it. @param {string} dir @param {{ pid: number, socket: string }} server */
+export async function writeNote(dir, server) {
+  const ownerCommand = await commandOf(process.pid)
+  await writeFile(noteIn(dir), JSON.stringify({ ...server, owner: process.pid, ownerCommand }))
+}
+
+/** @param {string} dir */
+export const removeNote = (dir) => rm(noteIn(dir), { force: true })
+
 /** @param {string} note @returns {Promise<{ pid: number, socket: string, owner: number, ownerCommand: string } | null>} */
 async function readNote(note) {
   try {
@@ -59,8 +70,7 @@ async function readNote(note) {
  * @param {string} dir
  */
 export async function stopLeftover(dir) {
-  const note = path.join(dir, 'running.json')
-  const left = await readNote(note)
+  const left = await readNote(noteIn(dir))
   if (!left) return
   const command = await commandOf(left.pid)
   if (command?.includes(`--datadir=${path.join(dir, 'data')}`)) {
@@ -72,8 +82,9 @@ export async function stopLeftover(dir) {
     }
     await stopProcess(left.pid)
   }
-  await rm(path.dirname(left.socket), { recursive: true, force: true })
-  await rm(note, { force: true })
+  const socketFolder = path.dirname(left.socket)
+  if (path.basename(socketFolder).startsWith('tw-')) await rm(socketFolder, { recursive: true, force: true })
+  await removeNote(dir)
 }
 
 /** Stops and removes every server folder under `parent` whose starter is gone (killed test runs). @param {string} parent */

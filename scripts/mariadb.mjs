@@ -8,7 +8,7 @@ import path from 'node:path'
 
 import { explain, MariadbFault } from './mariadb-fault.mjs'
 import { asRoot, findServer, initDataDir } from './mariadb-folder.mjs'
-import { commandOf, pause, stopLeftover, stopProcess } from './mariadb-leftover.mjs'
+import { pause, removeNote, stopLeftover, stopProcess, writeNote } from './mariadb-leftover.mjs'
 
 const READY_WITHIN_MS = 60_000
 
@@ -137,8 +137,11 @@ function serverFlags(options, at) {
   ]
 }
 
-/** @param {string} server @param {string[]} flags @param {string} dir */
-async function launch(server, flags, dir) {
+/**
+ * @param {string} server @param {string[]} flags @param {{ dir: string, socket: string }} at
+ * @returns {Promise<number | null>} the process; null when the port was taken meanwhile
+ */
+async function launch(server, flags, { dir, socket }) {
   const log = path.join(dir, 'error.log')
   await writeFile(log, '')
   const errors = await open(log, 'a')
@@ -147,6 +150,8 @@ async function launch(server, flags, dir) {
   let failed = null
   child.once('error', (error) => (failed = error))
   child.unref()
+  // Written before the server is ready: if we are killed meanwhile, the next start finds it.
+  if (child.pid) await writeNote(dir, { pid: child.pid, socket })
   const port = Number(flags.find((flag) => flag.startsWith('--port='))?.slice(7))
   const until = Date.now() + READY_WITHIN_MS
   try {
@@ -177,7 +182,7 @@ function running({ dir }, at, secrets) {
   const stop = async () => {
     await stopProcess(at.pid)
     await rm(path.dirname(at.socket), { recursive: true, force: true })
-    await rm(path.join(dir, 'running.json'), { force: true })
+    await removeNote(dir)
   }
   return {
     ...at,
@@ -215,15 +220,10 @@ export async function startMariadb(options) {
     await writeFile(initFile, grantsText(settled, secrets), { mode: 0o600 })
     for (let tries = 0; tries < 5; tries++) {
       const port = options.port || (await freePort())
-      const pid = await launch(server, serverFlags(settled, { port, socket, initFile }), dir)
+      const pid = await launch(server, serverFlags(settled, { port, socket, initFile }), { dir, socket })
       if (pid === null && options.port) break
       if (pid === null) continue
       await rm(initFile)
-      const ownerCommand = await commandOf(process.pid)
-      await writeFile(
-        path.join(dir, 'running.json'),
-        JSON.stringify({ pid, port, socket, owner: process.pid, ownerCommand }),
-      )
       return running(settled, { pid, port, socket }, secrets)
     }
     throw new MariadbFault(
@@ -231,6 +231,7 @@ export async function startMariadb(options) {
     )
   } catch (error) {
     await rm(short, { recursive: true, force: true })
+    await removeNote(dir)
     throw error
   }
 }
