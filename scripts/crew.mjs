@@ -84,7 +84,8 @@ export function makeCrew(logs) {
   /** @param {typeof aboard[number]} member */
   const leave = (member) => void aboard.splice(aboard.indexOf(member), 1)
 
-  const logOf = (/** @type {Task} */ { name }) => path.join(logs, `${name.replaceAll(' ', '-')}.log`)
+  const logOf = (/** @type {{ name: string }} */ { name }) =>
+    path.join(logs, `${name.replaceAll(' ', '-')}.log`)
 
   /** @param {Task} task */
   function start(task) {
@@ -147,7 +148,10 @@ export function makeCrew(logs) {
   // The starter ends without having stopped them, as a test run does that was broken off.
   process.once('exit', () => aboard.forEach((member) => member.drop()))
 
-  return { start, finish, run, adopt, stopAll, isLeaving: () => leaving !== null }
+  /** The end of what a program said, also one that succeeded. @param {string} name */
+  const wordsOf = (name) => lastWords(logOf({ name }))
+
+  return { start, finish, run, adopt, wordsOf, stopAll, isLeaving: () => leaving !== null }
 }
 
 /** @typedef {ReturnType<typeof makeCrew>} Crew */

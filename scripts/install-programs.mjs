@@ -1,3 +1,4 @@
+import { explainFailure } from './explain-failure.mjs'
 import { Fault } from './fault.mjs'
 import { findChromium, findProgram } from './find-program.mjs'
 import { findServer } from './mariadb-folder.mjs'
@@ -43,7 +44,11 @@ export async function installPrograms(crew, { forTests }) {
     const install = [apt, 'install', '-y', '--no-install-recommends', ...WAIT_FOR_OTHERS, ...missing]
     await step(`Installing ${missing.join(', ')}`, () =>
       crew.run({ name: 'apt-get install', command: install, environment }),
-    )
+    ).catch(async (error) => {
+      // Without a network the update only warns, and then every package is unknown.
+      const before = explainFailure(await crew.wordsOf('apt-get update'))
+      throw before ? new Fault(before) : error
+    })
     const still = await missingPackages(forTests)
     if (still.length > 0) throw askForHelp(still)
   }
