@@ -1,11 +1,11 @@
 import { useIsFocused } from 'expo-router'
-import Head from 'expo-router/head'
 import type { ReactNode } from 'react'
 import { ScrollView, StyleSheet, View } from 'react-native'
 import { useSafeAreaInsets } from 'react-native-safe-area-context'
 
 import { PageHead, type PageBack } from './page-head'
 import { PageTitle } from './page-title'
+import { usePageTitle } from './use-page-title'
 
 import { color, layout, space } from '@/constants/theme'
 import { useBreakpoint } from '@/hooks/use-breakpoint'
@@ -32,6 +32,7 @@ export function Page(props: Props) {
   const { title, heading = title, isHeadingHidden, intro, width = 'page', isScrolled = true, footer } = props
   const isPhone = useBreakpoint() === 'phone'
   const isInView = useIsFocused()
+  usePageTitle(title, isInView)
   const { bottom } = useSafeAreaInsets()
   const body = (
     <View
@@ -48,9 +49,6 @@ export function Page(props: Props) {
   )
   return (
     <View role="main" tabIndex={-1} nativeID={isInView ? 'content' : undefined} style={styles.main}>
-      <Head>
-        <title>{`${title} · Tankward`}</title>
-      </Head>
       <PageHead title={heading} back={props.back} actions={props.actions} isPhone={isPhone} />
       {isScrolled ? <ScrollView style={styles.fill}>{body}</ScrollView> : body}
       {footer ? <View style={[styles.foot, { paddingBottom: space.md + bottom }]}>{footer}</View> : null}

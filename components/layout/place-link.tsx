@@ -22,6 +22,7 @@ export function PlaceLink({ label, href, icon, isCurrent, isStacked }: Props) {
   return (
     <PressLink
       href={href}
+      isReturn
       isCurrent={isCurrent}
       look={({ hovered }) => [
         isStacked ? styles.stacked : styles.beside,

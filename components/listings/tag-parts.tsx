@@ -37,7 +37,7 @@ export function TagSizeLine({ facts, size }: PartProps) {
   const isPage = size === 'page'
   return (
     <View style={styles.sizeLine}>
-      <Text size={isPage ? 'title' : 'lead'} face="strong" isFigures>
+      <Text size={isPage ? 'title' : 'lead'} face="strong">
         {facts.sizeText}
       </Text>
       {facts.stage ? (
@@ -63,7 +63,7 @@ export function TagCells({ facts, size }: PartProps) {
           <Text size="small" tint="muted">
             {`${caption} `}
           </Text>
-          <Text size={size === 'page' ? 'lead' : 'body'} face="strong" isFigures>
+          <Text size={size === 'page' ? 'lead' : 'body'} face="strong">
             {value}
           </Text>
         </View>
@@ -98,7 +98,7 @@ export function TagPrice({ facts, size }: PartProps) {
   const isPage = size === 'page'
   return (
     <View>
-      <Text size={isPage ? 'hero' : 'lead'} face="title" isFigures>
+      <Text size={isPage ? 'hero' : facts.priceText.length > longPrice ? 'body' : 'lead'} face="title">
         {facts.priceText}
       </Text>
       <Text size={isPage ? 'body' : 'small'} tint="muted">
@@ -114,8 +114,8 @@ export function TagPlace({ facts, size, isAtEnd }: PartProps & { isAtEnd?: boole
   return (
     <View style={isAtEnd ? styles.placeAtEnd : null}>
       {facts.distanceText ? (
-        <Text size={isPage ? 'lead' : 'note'} face="strong" isFigures style={align}>
-          {facts.distanceText}
+        <Text size={isPage ? 'lead' : 'note'} face="strong" style={align}>
+          {keepUnit(facts.distanceText)}
         </Text>
       ) : null}
       <Text size={isPage ? 'note' : 'small'} tint="muted" style={align}>
@@ -123,6 +123,13 @@ export function TagPlace({ facts, size, isAtEnd }: PartProps & { isAtEnd?: boole
       </Text>
     </View>
   )
+}
+
+const longPrice = 7 // characters: "$1,200.00" would break on the stub
+
+// "about 118 mi" breaks before the figure, never between the figure and its unit.
+function keepUnit(text: string): string {
+  return text.replace(/ (\S+)$/, '\u00a0$1')
 }
 
 const styles = StyleSheet.create({

@@ -43,7 +43,7 @@ interface Cut {
 function cutOut({ kind, seam, insetPx }: Cut): ViewStyle {
   const round = notchPx + insetPx
   const masks = notchPlaces(kind, seam, insetPx).map((place) => punch(round, place))
-  if (kind === 'stub') return { maskImage: masks.join(', '), maskComposite: 'intersect' } as ViewStyle
+  if (kind === 'stub') return { maskImage: masks.join(', '), maskComposite: 'intersect' }
   const punched = punch(hole.radiusPx + insetPx, `${hole.xPx - insetPx}px ${hole.yPx - insetPx}px`)
   // On the slant an inset of one pixel moves the cut by two minus the square root of two.
   const cut = `${(cutPx - insetPx * (2 - Math.SQRT2)).toFixed(2)}px`
@@ -51,7 +51,7 @@ function cutOut({ kind, seam, insetPx }: Cut): ViewStyle {
     clipPath: `polygon(${cut} 0, 100% 0, 100% 100%, 0 100%, 0 ${cut})`,
     maskImage: [punched, ...masks].join(', '),
     maskComposite: 'intersect',
-  } as ViewStyle
+  }
 }
 
 function punch(radiusPx: number, place: string): string {

@@ -59,9 +59,9 @@ const styles = StyleSheet.create({
   row: { flexDirection: 'row', alignItems: 'stretch' },
   body: { flex: 1, minWidth: 0 },
   inside: { flexDirection: 'row', flexGrow: 1, minHeight: 132 },
-  photo: { width: 76 },
+  photo: { width: 80 },
   words: { flex: 1, minWidth: 0, padding: space.md, gap: 6 },
-  stub: { width: 96 },
+  stub: { width: 104 },
   stubInside: {
     flexGrow: 1,
     justifyContent: 'space-between',

@@ -44,9 +44,9 @@ const styles = StyleSheet.create({
   row: { flexDirection: 'row', alignItems: 'stretch' },
   body: { flex: 1, minWidth: 0 },
   inside: { flexDirection: 'row', flexGrow: 1, minHeight: 148 },
-  photo: { width: 76, backgroundColor: color.sunk },
+  photo: { width: 80, backgroundColor: color.sunk },
   words: { flex: 1, padding: space.md, gap: space.md },
-  stub: { width: 96 },
+  stub: { width: 104 },
   stubInside: {
     flexGrow: 1,
     justifyContent: 'space-between',

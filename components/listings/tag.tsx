@@ -20,7 +20,7 @@ interface Props {
 }
 
 /** The laminated tag. With an href the whole tag is one link; without, it is plain facts. */
-export function Tag({ facts, size, level = size === 'page' ? 2 : 3, isFirst }: Props) {
+export function Tag({ facts, size, level = 2, isFirst }: Props) {
   const [isHot, setIsHot] = useState(false)
   if (size === 'page') return <TagPage facts={facts} level={level} />
   const Shape = size === 'row' ? TagRow : TagCard

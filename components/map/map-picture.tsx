@@ -9,7 +9,7 @@ import { areaOf, fitArea, zoom, type MapView, type Size } from './map-view'
 import { useMapGestures } from './use-map-gestures'
 
 import { HiddenText } from '@/components/ui/hidden-text'
-import { color } from '@/constants/theme'
+import { color, radius } from '@/constants/theme'
 
 import type { MapProps } from './map.types'
 
@@ -89,5 +89,12 @@ function SizedMap({ size, ...props }: MapProps & { size: Size }) {
 
 const styles = StyleSheet.create({
   box: { flex: 1, minHeight: 240, overflow: 'hidden' },
-  surface: { flex: 1, backgroundColor: color.sunk, overflow: 'hidden' },
+  surface: {
+    flex: 1,
+    backgroundColor: color.sunk,
+    overflow: 'hidden',
+    borderWidth: 1,
+    borderColor: color.edge,
+    borderRadius: radius.tag,
+  },
 })

@@ -3,7 +3,7 @@ import { StyleSheet, View } from 'react-native'
 import { Icon } from './icon'
 import { Swatch, type SwatchPattern } from './swatch'
 import { Text } from './text'
-import { toneTint } from './tone'
+import { toneIcon, toneTint } from './tone'
 
 import { color, radius, space, type Tone } from '@/constants/theme'
 
@@ -21,10 +21,11 @@ const patternOf: Partial<Record<Tone, SwatchPattern>> = { safe: 'solid', cold: '
 export function Badge({ word, tone, icon }: Props) {
   const pattern = patternOf[tone]
   const tint = toneTint[tone]
+  const sign = icon ?? (tone === 'caution' || tone === 'danger' ? toneIcon[tone] : undefined)
   return (
     <View style={[styles.badge, tone === 'today' ? styles.today : null]}>
       {pattern && !icon ? <Swatch pattern={pattern} tint={tint} sizePx={14} /> : null}
-      {icon ? <Icon name={icon} sizePx={16} tint={tint} /> : null}
+      {sign ? <Icon name={sign} sizePx={16} tint={tint} /> : null}
       <Text size="small" face="strong" tint={tint} style={styles.word}>
         {word}
       </Text>
@@ -33,7 +34,7 @@ export function Badge({ word, tone, icon }: Props) {
 }
 
 const styles = StyleSheet.create({
-  badge: { flexDirection: 'row', alignItems: 'center', gap: 6, minHeight: 22 },
+  badge: { flexDirection: 'row', alignItems: 'center', gap: 6, minHeight: 22, maxWidth: '100%' },
   today: { backgroundColor: color.algae, paddingHorizontal: space.sm, borderRadius: radius.full },
   word: { flexShrink: 1 },
 })

@@ -3,6 +3,7 @@ import { Pressable, StyleSheet, View } from 'react-native'
 
 import { CheckMark } from './check-mark'
 import { FieldError } from './field-frame'
+import { onSpace } from './on-space'
 import { Text } from './text'
 
 import { space, touchPx } from '@/constants/theme'
@@ -34,6 +35,7 @@ export function Checkbox({ label, isChecked, onChange, hint, error, fieldId, isD
         aria-invalid={Boolean(error)}
         disabled={isDisabled}
         onPress={() => onChange(!isChecked)}
+        onKeyDown={isDisabled ? undefined : onSpace(() => onChange(!isChecked))}
         style={styles.row}
       >
         <CheckMark shape="box" isOn={isChecked} isRefused={Boolean(error)} />

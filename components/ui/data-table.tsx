@@ -148,6 +148,6 @@ const styles = StyleSheet.create({
   first: { ...sticky, backgroundColor: color.card, fontWeight: '400' },
   firstHead: { ...sticky },
   numeric: { textAlign: 'right' },
-  sort: { minHeight: touchPx, flexDirection: 'row', alignItems: 'center', gap: space.xs },
+  sort: { width: '100%', minHeight: touchPx, flexDirection: 'row', alignItems: 'center', gap: space.xs },
   sortNumeric: { justifyContent: 'flex-end' },
 })

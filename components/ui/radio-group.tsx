@@ -100,10 +100,12 @@ function Radio<Value extends string>({
       tabIndex={isReached ? 0 : -1}
       onPress={onChoose}
       onKeyDown={(event) => {
-        const by = steps[event.nativeEvent.key]
-        if (by === undefined) return
+        const { key } = event.nativeEvent
+        const by = steps[key]
+        if (by === undefined && key !== ' ') return
         event.preventDefault()
-        onStep(by)
+        if (by === undefined) onChoose()
+        else onStep(by)
       }}
       style={styles.row}
     >

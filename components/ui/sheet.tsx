@@ -23,15 +23,17 @@ export function Sheet({ title, isOpen, onClose, children, footer, shape = 'panel
   return (
     <Modal visible={isOpen} transparent animationType="none" onRequestClose={onClose} aria-label={title}>
       <View style={[styles.back, shape === 'dialog' && !isPhone ? styles.centre : null]}>
-        <Pressable style={styles.scrim} onPress={onClose} tabIndex={-1} aria-hidden />
         <View
           style={[styles.sheet, place]}
           dataSet={{ enter: isPhone ? 'up' : shape === 'panel' ? 'side' : 'fade' }}
         >
           <View style={styles.head}>
-            <Heading level={2} size="lead" style={styles.title}>
-              {title}
-            </Heading>
+            {/* The keyboard lands here first, so that the sheet's name is read out. */}
+            <View tabIndex={-1} style={styles.title}>
+              <Heading level={2} size="lead">
+                {title}
+              </Heading>
+            </View>
             <IconButton icon="close" label={`Close ${title}`} onPress={onClose} />
           </View>
           <ScrollView style={styles.scroll} contentContainerStyle={styles.body}>
@@ -39,6 +41,7 @@ export function Sheet({ title, isOpen, onClose, children, footer, shape = 'panel
           </ScrollView>
           {footer ? <View style={styles.foot}>{footer}</View> : null}
         </View>
+        <Pressable style={styles.scrim} onPress={onClose} tabIndex={-1} aria-hidden />
       </View>
     </Modal>
   )
@@ -48,7 +51,7 @@ const styles = StyleSheet.create({
   back: { flex: 1, flexDirection: 'row', justifyContent: 'flex-end' },
   centre: { justifyContent: 'center', alignItems: 'center' },
   scrim: { position: 'absolute', top: 0, right: 0, bottom: 0, left: 0, backgroundColor: color.scrim },
-  sheet: { backgroundColor: color.mist, maxHeight: '100%' },
+  sheet: { zIndex: 1, backgroundColor: color.mist, maxHeight: '100%' },
   full: { width: '100%', height: '100%' },
   panel: { width: 440, height: '100%', borderLeftWidth: 1, borderLeftColor: color.edge },
   dialog: { width: 560, maxHeight: '90%', borderRadius: radius.tag, borderWidth: 1, borderColor: color.edge },

@@ -1,7 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
 import { HiddenText } from './hidden-text'
-import { Icon } from './icon'
 import { Text } from './text'
 
 import { color, radius, space } from '@/constants/theme'
@@ -34,7 +33,6 @@ export function Steps({ label, steps, current }: Props) {
         <Text size="note" tint="muted" isFigures>
           {`Step ${current + 1} of ${steps.length}`}
         </Text>
-        {current > 0 ? <Icon name="check" sizePx={16} tint="safe" /> : null}
         <Text size="note" face="strong">
           {steps[current] ?? ''}
         </Text>

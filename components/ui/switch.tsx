@@ -1,6 +1,7 @@
 import { useId } from 'react'
 import { Pressable, StyleSheet, View } from 'react-native'
 
+import { onSpace } from './on-space'
 import { Text } from './text'
 
 import { color, radius, space, touchPx } from '@/constants/theme'
@@ -24,6 +25,7 @@ export function Switch({ label, isOn, onChange, hint, isDisabled }: Props) {
       aria-describedby={hint ? `${id}-hint` : undefined}
       disabled={isDisabled}
       onPress={() => onChange(!isOn)}
+      onKeyDown={isDisabled ? undefined : onSpace(() => onChange(!isOn))}
       style={styles.row}
     >
       <View style={styles.words}>
