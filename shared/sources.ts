@@ -15,7 +15,6 @@ export interface Source {
 const table = {
   // Species
   'fao-589': { author: 'Somerville et al.', year: 2014, title: 'Small-scale aquaponic food production, FAO Fisheries and Aquaculture Technical Paper 589', where: 'sect. 7.4, 8.1', reading: 'read' },
-  'fao-589-memory': { author: 'Somerville et al.', year: 2014, title: 'FAO Fisheries and Aquaculture Technical Paper 589, design and filter tables', where: null, reading: 'from memory' },
   'srac-283': { author: 'Popma & Masser', year: 1999, title: 'Tilapia: life history and biology, SRAC Publication 283', where: null, reading: 'read in a reproduction' },
   'srac-282': { author: 'Rakocy', year: 1989, title: 'Tank culture of tilapia, SRAC Publication 282', where: 'growth and feed table', reading: 'from memory' },
   'fb4-2017': { author: 'Deslauriers et al.', year: 2017, title: 'Fish Bioenergetics 4.0: an R-based modeling application, Fisheries 42:586-596', where: 'parameter table and code', reading: 'read' },
@@ -57,47 +56,8 @@ const table = {
   'tomberlin-2009': { author: 'Tomberlin, Adler & Myers', year: 2009, title: 'Development of the black soldier fly in relation to temperature, Environ. Entomol. 38:930-934', where: null, reading: 'abstract read' },
   'villazana-2019': { author: 'Villazana & Alyokhin', year: 2019, title: 'Cold tolerance of black soldier fly larvae, J. Econ. Entomol. 112:2632-2637', where: null, reading: 'abstract read' },
   'bsf-article': { author: 'Encyclopaedia article', year: null, title: 'Hermetia illucens: storage of larvae', where: null, reading: 'read' },
-  // Transport
-  'mx392': { author: 'Swann', year: null, title: 'Transportation of fish in bags, University of Missouri Extension MX392', where: 'opening', reading: 'read in part' },
-  'dupree-huner-1984': { author: 'Dupree & Huner', year: 1984, title: 'Third report to the fish farmers, US Fish and Wildlife Service', where: 'bag loading table', reading: 'read in a reproduction' },
-  'fao-r1316e': { author: 'FAO', year: null, title: 'Seabass fry transport, FAO R1316E', where: 'sect. 19', reading: 'read' },
-  'amend-1982': { author: 'Amend et al.', year: 1982, title: 'Transportation of fish in closed systems, Trans. Am. Fish. Soc.', where: null, reading: 'abstract read' },
-  'seafwa-1962': { author: 'Proc. SEAFWA', year: 1962, title: 'Shipping channel catfish fry in bags', where: null, reading: 'abstract read' },
-  'lsu-cocahoe': { author: 'LSU AgCenter', year: null, title: 'Cocahoe minnow manual', where: 'ch. 9', reading: 'read' },
-  'lsu-stocking': { author: 'LSU AgCenter', year: null, title: 'Stocking procedures: tempering', where: null, reading: 'read' },
-  'lim-2003': { author: 'Lim et al.', year: 2003, title: 'Recent advances in the transportation of ornamental fish, as cited', where: null, reading: 'read in a reproduction' },
-  'froese-1998': { author: 'Froese', year: 1998, title: 'Insulating properties of styrofoam boxes used for transporting live fish, Aquaculture 159:283-292', where: null, reading: 'abstract read' },
-  'margeirsson-2011': { author: 'Margeirsson et al.', year: 2011, title: 'Temperature in fish boxes, Int. J. Refrig. 34:573-585', where: null, reading: 'abstract read' },
-  'grundstein-2010': { author: 'Grundstein et al.', year: 2010, title: 'Heating of closed cars, Bull. Am. Meteorol. Soc.', where: null, reading: 'read' },
-  'mclaren-2005': { author: 'McLaren, Null & Quinn', year: 2005, title: 'Heat stress from enclosed vehicles, Pediatrics 116:e109', where: null, reading: 'read' },
-  // Water
-  'emerson-1975': { author: 'Emerson, Russo, Lund & Thurston', year: 1975, title: 'Aqueous ammonia equilibrium calculations, J. Fish. Res. Board Can. 32:2379-2383', where: 'as tabled by UF/IFAS FA16', reading: 'read in a reproduction' },
-  'ifas-fa16': { author: 'Francis-Floyd et al., UF/IFAS', year: null, title: 'Ammonia in aquatic systems, FA16', where: null, reading: 'read in a reproduction' },
-  'trussell-1972': { author: 'Trussell', year: 1972, title: 'Percent un-ionized ammonia, as printed in a test-kit manual', where: null, reading: 'read' },
-  'benson-krause-1984': { author: 'Benson & Krause', year: 1984, title: 'Dissolved oxygen in fresh and sea water, as in USGS memo 2011.03', where: null, reading: 'read in a reproduction' },
-  'weiss-1974': { author: 'Weiss', year: 1974, title: 'Carbon dioxide in water and seawater, Mar. Chem. 2:203-215', where: null, reading: 'from memory' },
-  'plummer-busenberg-1982': { author: 'Plummer & Busenberg', year: 1982, title: 'Solubilities in the system CaCO3-CO2-H2O, Geochim. Cosmochim. Acta 46', where: 'pK1', reading: 'from memory' },
-  'epa-2013-ammonia': { author: 'US Environmental Protection Agency', year: 2013, title: 'Aquatic life criteria for ammonia, EPA 822-R-13-001', where: 'equations, as used in a state agency script', reading: 'read in a reproduction' },
   'srac-462': { author: 'SRAC', year: null, title: 'Nitrite in fish ponds, SRAC Publication 462', where: null, reading: 'read in a reproduction' },
-  'kentucky-aquaponics-2021': { author: 'Kentucky State University', year: 2021, title: 'Aquaponics production manual', where: 'cycling and first stocking', reading: 'read' },
-  'hobby-cycle-guides': { author: 'Hobby guides', year: null, title: 'Fishless cycling', where: null, reading: 'read' },
-  // Feed, growth, filters
-  'rakocy-2007': { author: 'Rakocy', year: 2007, title: 'Ten guidelines for aquaponic systems', where: 'feeding ratio', reading: 'read in a reproduction' },
-  'srac-454': { author: 'SRAC', year: null, title: 'Recirculating aquaculture tank production systems: aquaponics, SRAC Publication 454', where: null, reading: 'from memory' },
-  'timmons-ebeling': { author: 'Timmons & Ebeling', year: null, title: 'Recirculating aquaculture, as cited', where: null, reading: 'read in a reproduction' },
-  'jongjaraunsuk': { author: 'Jongjaraunsuk et al.', year: null, title: 'Appetite of red tilapia, RMUTSB J.', where: null, reading: 'read' },
-  'liao-1971': { author: 'Liao', year: 1971, title: 'Water requirements of salmonids, Prog. Fish-Cult. 33', where: null, reading: 'from memory' },
-  'boyd-1978': { author: 'Boyd, Romaire & Johnston', year: 1978, title: 'Predicting early morning dissolved oxygen in channel catfish ponds, Trans. Am. Fish. Soc. 107', where: null, reading: 'from memory' },
-  'iwama-tautz-1981': { author: 'Iwama & Tautz', year: 1981, title: 'A simple growth model for salmonids in hatcheries, Can. J. Fish. Aquat. Sci. 38', where: null, reading: 'read in a reproduction' },
-  'jobling-2003': { author: 'Jobling', year: 2003, title: 'The thermal growth coefficient model of fish growth: a cautionary note, Aquac. Res. 34:581-584', where: null, reading: 'read' },
   'aquasearch-tgc': { author: 'AquaSearch', year: null, title: 'Calculations page for fish farmers', where: 'thermal growth coefficient', reading: 'read' },
-  'dwyer-1981': { author: 'Dwyer et al.', year: 1981, title: 'Monthly temperature units of trout growth, as tabled', where: null, reading: 'read in a reproduction' },
-  // Produce and media
-  'nevg-table-16': { author: 'New England Vegetable Management Guide', year: null, title: 'Storage of fresh vegetables, after USDA Handbook 66', where: 'table 16', reading: 'read' },
-  'cantwell-reid': { author: 'Cantwell & Reid, UC Davis', year: null, title: 'Produce facts: herbs', where: null, reading: 'read' },
-  'lange-cameron-1997': { author: 'Lange & Cameron', year: 1997, title: 'Shelf life of sweet basil, HortScience 32:114-116', where: null, reading: 'read' },
-  'media-makers': { author: 'Makers of growing media', year: null, title: 'Bulk density of media', where: null, reading: 'read' },
-  'nist-hb-130': { author: 'NIST', year: 2019, title: 'Handbook 130, uniform method of sale of commodities', where: 'sect. 2.3.2', reading: 'read in part' },
   // Climate and places
   'arguez-2012': { author: 'Arguez et al., NOAA NCEI', year: 2012, title: "NOAA's 1981-2010 US climate normals, Bull. Am. Meteorol. Soc., doi:10.1175/BAMS-D-11-00197.1", where: 'monthly normals', reading: 'read' },
   'census-zcta': { author: 'US Census Bureau', year: 2021, title: 'Gazetteer files: ZIP Code Tabulation Areas', where: 'internal points', reading: 'read' },
@@ -143,6 +103,9 @@ export type SourceKey = keyof typeof table
 
 /** Every citation once. A number that came from a publication carries one of these keys beside it. */
 export const sources: Readonly<Record<SourceKey, Source>> = table
+
+/** Where the shipped tables of places and climate come from; each is credited on the page about sources. */
+export const openDataSources: readonly SourceKey[] = ['geonames', 'census-zcta', 'arguez-2012']
 
 /** One line for a reader: author, year, title, place in it, how it was read. */
 export function printSource(key: SourceKey): string {
