@@ -40,6 +40,12 @@ export function useOwnListing(listingId: string) {
   return useQuery({ ...ownListingQuery(listingId), refetchOnMount: 'always' })
 }
 
+/** Reads a listing again at this moment, past whatever is remembered. */
+export function useReadOwnListing(listingId: string) {
+  const client = useQueryClient()
+  return () => client.fetchQuery({ ...ownListingQuery(listingId), staleTime: 0 })
+}
+
 function remember(client: QueryClient, own: OwnListing) {
   client.setQueryData(ownListingKey(own.listingId), own)
   return client.invalidateQueries({ queryKey: ownListingsQuery.queryKey, exact: true })

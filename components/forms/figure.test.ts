@@ -22,18 +22,18 @@ describe('reading figures as they are typed', () => {
   })
 
   it('takes prices, counts and temperatures with or without their signs', () => {
-    expect(figures.cents.read('$0.89', 'us')).toBe(89)
-    expect(figures.count.read('2,000', 'us')).toBe(2000)
+    expect(figures.cents.read('$0.89')).toBe(89)
+    expect(figures.count.read('2,000')).toBe(2000)
     expect(figures.temperatureC.read('22 C', 'us')).toBe(22)
     expect(figures.temperatureC.read('71.6 F', 'metric')).toBeCloseTo(22, 6)
   })
 
   it('takes water figures with the unit people write behind them', () => {
-    expect(figures.ppm.read('120 ppm', 'us')).toBe(120)
-    expect(figures.ppm.read('120 mg/L', 'us')).toBe(120)
-    expect(figures.saltPpt.read('1.5 ppt', 'us')).toBe(1.5)
-    expect(figures.percent.read('25 %', 'us')).toBe(25)
-    expect(figures.pH.read('7.4', 'us')).toBe(7.4)
-    expect(figures.pH.read('7.4 in', 'us')).toBeNull()
+    expect(figures.ppm.read('120 ppm')).toBe(120)
+    expect(figures.ppm.read('120 mg/L')).toBe(120)
+    expect(figures.saltPpt.read('1.5 ppt')).toBe(1.5)
+    expect(figures.percent.read('25 %')).toBe(25)
+    expect(figures.pH.read('7.4')).toBe(7.4)
+    expect(figures.pH.read('7.4 in')).toBeNull()
   })
 })

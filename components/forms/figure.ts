@@ -15,8 +15,8 @@ export interface Figure {
 const tenths = (value: number) => Number(value.toFixed(1)).toLocaleString('en-US')
 
 /** A bare number, or one with any of these units behind it. */
-const plain = (units: readonly string[]): Figure => ({
-  read: (text) => {
+const plain = (units: readonly string[]) => ({
+  read: (text: string) => {
     const quantity = parseQuantity(text)
     return quantity && ['', ...units].includes(quantity.unit) ? quantity.value : null
   },

@@ -7,12 +7,14 @@ import type { z } from 'zod'
 interface Options {
   /** Fields that hold a list: an error of the list itself stands at its root, beside those of its rows. */
   lists: readonly string[]
+  /** Fields whose one control answers for all that is inside them. */
+  whole?: readonly string[]
 }
 
 /** Makes a form's resolver from a check that answers with parser issues whose paths are the form's own names. */
 export function issueResolver<T extends FieldValues>(
   check: (typing: T) => readonly z.core.$ZodIssue[],
-  { lists }: Options,
+  { lists, whole = [] }: Options,
 ): Resolver<T> {
   return (typing) => {
     const issues = check(typing)
@@ -20,7 +22,8 @@ export function issueResolver<T extends FieldValues>(
     const errors = {}
     const seen = new Set<string>()
     for (const issue of issues) {
-      const path = issue.path.map(String).join('.')
+      const full = issue.path.map(String).join('.')
+      const path = whole.find((field) => full.startsWith(`${field}.`)) ?? full
       const name = lists.includes(path) ? `${path}.root` : path
       if (seen.has(name)) continue // one sentence a field; the first is the nearest
       seen.add(name)

@@ -37,7 +37,7 @@ export function ErrorSummary({ errors, attempt, onOpen }: Props) {
         fieldId ? (
           <Pressable
             key={`${fieldId} ${message}`}
-            role="link"
+            role="button"
             onPress={() => {
               onOpen?.(fieldId)
               requestAnimationFrame(() => focusElement(fieldId))

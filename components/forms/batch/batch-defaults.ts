@@ -51,3 +51,22 @@ export function batchDefaults({ ownState, licenceNumbers }: Given): BatchTyping 
     words: '',
   }
 }
+
+/** The same shape with nothing answered: a saved draft shows what was saved, and no default slips in again. */
+export function batchBlank(): BatchTyping {
+  const usual = batchDefaults({ ownState: '', licenceNumbers: '' })
+  return {
+    ...usual,
+    minOrder: '',
+    orderStep: '',
+    tiers: [],
+    overcountPct: '',
+    sex: '',
+    feed: { onPellets: false, since: '', words: '' },
+    water: { ...usual.water, saltPpt: '' },
+    placeKind: '',
+    depositPct: '',
+    freeCancelHours: '',
+    promise: { windowHours: '', survivalDays: '', remedy: 'refund', evidence: '' },
+  }
+}

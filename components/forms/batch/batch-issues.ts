@@ -1,5 +1,7 @@
 import { fishBody, type FishBody } from '@/shared/contracts/fish-batch'
 import type { ListingDraft } from '@/shared/contracts/listings'
+import { stageFitsLength } from '@/shared/domain/species/stage-fits-length'
+import type { Stage } from '@/shared/domain/species/stages.facts'
 import type { z } from 'zod'
 
 // Passes every rule whatever stands beside it. Rules that compare two fields are only asked once all fields can be
@@ -51,7 +53,7 @@ type OptionalField = 'strain' | 'readyOn' | 'mostPerBuyer' | 'sexClaimPct' | 'or
 /** Everything the contract has to say about a draft, the rules between fields included. Empty: it may be published. */
 export function batchIssues(draft: ListingDraft): z.core.$ZodIssue[] {
   const read = fishBody.safeParse(draft, { reportInput: true })
-  if (read.success) return []
+  if (read.success) return stageIssues(draft)
   const wrong = new Set(read.error.issues.map((issue) => String(issue.path[0])))
   const known = Object.fromEntries(Object.entries(draft).filter(([field]) => !wrong.has(field)))
   const completed = {
@@ -62,5 +64,15 @@ export function batchIssues(draft: ListingDraft): z.core.$ZodIssue[] {
   const also = between.success
     ? []
     : between.error.issues.filter((issue) => !wrong.has(String(issue.path[0])))
-  return [...read.error.issues, ...also]
+  return [...read.error.issues, ...also, ...stageIssues(draft)]
+}
+
+const mmPerInch = 25.4
+
+/** The server refuses a stage that the lengths contradict; the same function says so here. */
+function stageIssues({ stage, sizeLoMm, sizeHiMm }: ListingDraft): z.core.$ZodIssue[] {
+  if (typeof sizeLoMm !== 'number' || typeof sizeHiMm !== 'number') return []
+  if (stageFitsLength(stage as Stage['id'], sizeLoMm / mmPerInch, sizeHiMm / mmPerInch) !== false) return []
+  const message = 'That word does not fit the lengths you gave: choose another stage or check the size.'
+  return [{ code: 'custom', path: ['stage'], message, input: stage }]
 }

@@ -1,0 +1,40 @@
+import { useController, type FieldPathByValue, type FieldValues } from 'react-hook-form'
+
+import { fieldIdOf } from '@/components/forms/field-id'
+import { QuickFill } from '@/components/forms/quick-fill'
+import { DateField } from '@/components/ui/date-field'
+import { TimeField } from '@/components/ui/time-field'
+
+interface Props<T extends FieldValues> {
+  name: FieldPathByValue<T, string>
+  label: string
+  hint?: string
+  isOptional?: boolean
+  /** A time of day instead of a day. */
+  isTime?: boolean
+  /** A day offered in one tap while none is chosen. */
+  quickDay?: { answer: string; day: string }
+}
+
+export function BoundDay<T extends FieldValues>({ name, isTime, quickDay, ...words }: Props<T>) {
+  const { field, fieldState } = useController<T, FieldPathByValue<T, string>>({ name })
+  const Control = isTime ? TimeField : DateField
+  return (
+    <>
+      <Control
+        {...words}
+        fieldId={fieldIdOf(name)}
+        value={field.value}
+        onChange={field.onChange}
+        error={fieldState.error?.message}
+      />
+      {quickDay && !field.value ? (
+        <QuickFill
+          answer={quickDay.answer}
+          fieldLabel={words.label}
+          onPress={() => field.onChange(quickDay.day)}
+        />
+      ) : null}
+    </>
+  )
+}

@@ -1,0 +1,77 @@
+import { StyleSheet, View } from 'react-native'
+
+import { isAnswerDue } from './own-state-words'
+import { ownFacts } from './own-facts'
+import { ReviewOutcome } from './review-outcome'
+
+import { Tag } from '@/components/listings/tag'
+import { TagSkeleton } from '@/components/listings/tag-skeleton'
+import { Button } from '@/components/ui/button'
+import { ButtonLink } from '@/components/ui/button-link'
+import { EmptyState } from '@/components/ui/empty-state'
+import { ErrorState } from '@/components/ui/error-state'
+import { space } from '@/constants/theme'
+import { useOwnListings } from '@/hooks/use-own-listings'
+import { useUnits } from '@/hooks/use-units'
+import type { OwnListing } from '@/shared/contracts/listings'
+
+/** The seller's listings as tags: those a moderator asks about first, then the newest change. */
+export function OwnList() {
+  const query = useOwnListings(true)
+  if (query.isPending) return <TagSkeleton label="Loading your listings" count={3} />
+  if (!query.data) {
+    return (
+      <ErrorState
+        title="We could not load your listings"
+        body={query.error.message}
+        onRetry={() => void query.refetch()}
+        isRetrying={query.isRefetching}
+      />
+    )
+  }
+  const listings = query.data.pages.flatMap((page) => page.items)
+  if (listings.length === 0) {
+    return (
+      <EmptyState
+        title="Nothing listed yet"
+        body="A batch takes about five minutes: have the count, a ruler photo and a water test at hand."
+        action={<ButtonLink href="/sell/listings/new" icon="plus" label="List a batch" />}
+      />
+    )
+  }
+  const ordered = [...listings.filter(isAnswerDue), ...listings.filter((own) => !isAnswerDue(own))]
+  return (
+    <View style={styles.frame}>
+      <View role="list" aria-label="Your listings" style={styles.list}>
+        {ordered.map((own) => (
+          <OwnTag key={own.listingId} own={own} />
+        ))}
+      </View>
+      {query.hasNextPage ? (
+        <Button
+          kind="secondary"
+          label="Show older listings"
+          busyLabel="Loading"
+          isBusy={query.isFetchingNextPage}
+          onPress={() => void query.fetchNextPage()}
+        />
+      ) : null}
+    </View>
+  )
+}
+
+function OwnTag({ own }: { own: OwnListing }) {
+  const units = useUnits()
+  return (
+    <View role="listitem" style={styles.one}>
+      <Tag size="row" facts={ownFacts(own, units)} />
+      <ReviewOutcome own={own} />
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  frame: { gap: space.lg },
+  list: { flexDirection: 'row', flexWrap: 'wrap', gap: space.lg },
+  one: { flexGrow: 1, flexBasis: 420, minWidth: 0, maxWidth: '100%', gap: space.sm },
+})

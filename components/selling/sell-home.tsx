@@ -1,0 +1,44 @@
+import { StyleSheet, View } from 'react-native'
+
+import { OrdersWaiting } from './orders-waiting'
+import { OwnList } from './own-list'
+import { PayoutsBanner } from './payouts-banner'
+import { SellerGate } from './seller-gate'
+
+import { ButtonLink } from '@/components/ui/button-link'
+import { Heading } from '@/components/ui/heading'
+import { Link } from '@/components/ui/link'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+
+export function SellHome() {
+  return (
+    <SellerGate>
+      {(farm, me) => (
+        <View style={styles.home}>
+          <OrdersWaiting count={me.waiting.orders} />
+          <PayoutsBanner payouts={farm.payouts} />
+          <View style={styles.head}>
+            <View style={styles.farm}>
+              <Heading level={2}>{farm.farmName}</Heading>
+              <Text size="note" tint="muted">
+                {`${farm.publicPlace.label} · `}
+                <Link href="/sell/farm" size="note">
+                  Farm, licences and payouts
+                </Link>
+              </Text>
+            </View>
+            <ButtonLink href="/sell/listings/new" icon="plus" label="List a batch" />
+          </View>
+          <OwnList />
+        </View>
+      )}
+    </SellerGate>
+  )
+}
+
+const styles = StyleSheet.create({
+  home: { gap: space.lg },
+  head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.lg },
+  farm: { flexGrow: 1, flexShrink: 1, minWidth: 220, gap: 2 },
+})
