@@ -1,4 +1,4 @@
-// Short, in our own words. {…} is filled by fillCaution. None of them speaks of what a law forbids.
+// Short, in our own words. {…} is filled by fillCaution. They tell what we found and do; they never rule on a law.
 export const cautionTexts = {
   'G-1':
     'Never let these animals, their water or eggs reach a stream, pond, ditch or storm drain. If you no longer want them, ask us or your state agency.',
