@@ -28,7 +28,7 @@ export function circlePageSql(query: SearchQuery, radiusKm: number): string {
 }
 
 export async function findInCircle(query: SearchQuery, radiusKm: number): Promise<FoundRow[]> {
-  return readFoundRows(await readSearchRows(circlePageSql(query, radiusKm)))
+  return readFoundRows(query, await readSearchRows(circlePageSql(query, radiusKm)))
 }
 
 /** Reads growing circles. A full page inside a circle is the nearest page there is, so nothing needs remembering. */

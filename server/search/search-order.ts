@@ -5,6 +5,8 @@ import type { SearchQuery } from '@/server/search/search-query'
 export interface SearchOrder {
   /** Value of the sort asked for. */
   by: string
+  /** Its name among the columns read. */
+  column: 'dm2' | 'unit_cents' | 'sort_by'
   /** Whether rows with equal `by` come nearest first; prices do not, so that the walk by price can stop early. */
   thenNearest: boolean
 }
@@ -12,13 +14,13 @@ export interface SearchOrder {
 export function searchOrder(query: SearchQuery): SearchOrder {
   switch (query.sort) {
     case 'nearest':
-      return { by: chordSql(query), thenNearest: false }
+      return { by: chordSql(query), column: 'dm2', thenNearest: false }
     case 'cheapest':
-      return { by: priceSql(query), thenNearest: false }
+      return { by: priceSql(query), column: 'unit_cents', thenNearest: false }
     case 'soonest':
-      return { by: firstDaySql(query), thenNearest: true }
+      return { by: firstDaySql(query), column: 'sort_by', thenNearest: true }
     case 'best-rated':
-      return { by: 'rating_rank', thenNearest: true }
+      return { by: 'rating_rank', column: 'sort_by', thenNearest: true }
   }
 }
 
@@ -34,12 +36,14 @@ export function afterSql(query: SearchQuery): string[] {
   return [`(${by}>${whole(after.by)} OR (${by}=${whole(after.by)} AND ${tie}))`]
 }
 
-/** ORDER BY over the names of `SELECTED`. */
+/** ORDER BY over the names of `selectedSql`. */
 export function orderSql(query: SearchQuery): string {
-  return searchOrder(query).thenNearest ? 'sort_by,dm2,listing_id' : 'sort_by,listing_id'
+  const { column, thenNearest } = searchOrder(query)
+  return thenNearest ? `${column},dm2,listing_id` : `${column},listing_id`
 }
 
-/** The columns every search reads. */
+/** The columns every search reads. Distance and price are long texts, so they are not said twice. */
 export function selectedSql(query: SearchQuery): string {
-  return `listing_id,${chordSql(query)} AS dm2,${priceSql(query)} AS unit_cents,${searchOrder(query).by} AS sort_by`
+  const { by, column } = searchOrder(query)
+  return `listing_id,${chordSql(query)} AS dm2,${priceSql(query)} AS unit_cents,${column === 'sort_by' ? by : '0'} AS sort_by`
 }

@@ -25,16 +25,17 @@ export function chordSql({ origin }: SearchQuery): string {
   return `(${square('x', x)}+${square('y', y)}+${square('z', z)})`
 }
 
-/** The fifth to eighth price, last first, as text columns hold them. */
+/** The fifth to eighth price, written as digits; what is not used holds a count that nobody orders. */
 function moreTiersSql(count: string): string {
   const { most, countDigits, centsDigits } = MORE_TIERS
-  const width = countDigits + centsDigits
-  const number = (at: number, length: number) => `CAST(SUBSTR(more_tiers,${at},${length}) AS UNSIGNED)`
-  const cases = Array.from({ length: most }, (_, index) => {
-    const at = (most - 1 - index) * width + 1
-    return `WHEN LENGTH(more_tiers)>=${at + width - 1} AND ${count}>=${number(at, countDigits)} THEN ${number(at + countDigits, centsDigits)}`
-  })
-  return `CASE WHEN more_tiers='' THEN price4 ${cases.join(' ')} ELSE price4 END`
+  const start = (tier: number) => tier * (countDigits + centsDigits) + 1
+  const cents = (tier: number) =>
+    tier < 0 ? 'price4' : `SUBSTR(more_tiers,${start(tier) + countDigits},${centsDigits})+0`
+  let text = cents(most - 1)
+  for (let tier = most - 1; tier >= 0; tier--) {
+    text = `IF(${count}<SUBSTR(more_tiers,${start(tier)},${countDigits})+0,${cents(tier - 1)},${text})`
+  }
+  return `IF(more_tiers='',price4,${text})`
 }
 
 /** Cents for one at the count asked, else at the listing's smallest order. */

@@ -18,6 +18,9 @@ export function unitCentsAt(tiers: readonly SearchTier[], count: number): number
   return cents
 }
 
+// The largest count that fits the digits.
+const NEVER = 10 ** MORE_TIERS.countDigits - 1
+
 const digits = (value: number, width: number) => String(value).padStart(width, '0')
 
 /** A row's prices as the table holds them. */
@@ -26,7 +29,8 @@ export function tierColumns({ categoryCode, minQty, tiers }: SearchRow) {
   if (tiers.length === 0 || spare > 0)
     throw new RangeError(`A listing has 1 to 8 prices, not ${tiers.length}`)
   const at = (index: number) => tiers[index] ?? { fromCount: MOST_COUNT, unitCents: 0 }
-  const more = tiers.slice(COLUMN_TIERS)
+  const more =
+    tiers.length > COLUMN_TIERS ? Array.from({ length: MORE_TIERS.most }, (_, i) => at(COLUMN_TIERS + i)) : []
   return {
     price1: at(0).unitCents,
     from2: at(1).fromCount,
@@ -38,7 +42,8 @@ export function tierColumns({ categoryCode, minQty, tiers }: SearchRow) {
     moreTiers: more
       .map(
         (tier) =>
-          digits(tier.fromCount, MORE_TIERS.countDigits) + digits(tier.unitCents, MORE_TIERS.centsDigits),
+          digits(Math.min(tier.fromCount, NEVER), MORE_TIERS.countDigits) +
+          digits(tier.unitCents, MORE_TIERS.centsDigits),
       )
       .join(''),
     smallPrice: unitCentsAt(tiers, Math.max(everydayOrder(categoryCode), minQty)),

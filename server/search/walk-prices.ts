@@ -18,7 +18,8 @@ interface Walked {
   smallPrice: number
 }
 
-function stepSql(query: SearchQuery, at: Footprint, rows: number): string {
+/** Text of the next rows upwards in one category. */
+export function priceStepSql(query: SearchQuery, at: Omit<Footprint, 'ended'>, rows: number): string {
   const { categoryCode, smallPrice, listingId } = at
   const price = whole(smallPrice)
   const tests = [
@@ -34,7 +35,7 @@ function stepSql(query: SearchQuery, at: Footprint, rows: number): string {
 }
 
 async function step(query: SearchQuery, ahead: Footprint[], rows: number): Promise<Walked[]> {
-  const read = await readSearchRows(ahead.map((at) => stepSql(query, at, rows)).join(' UNION ALL '))
+  const read = await readSearchRows(ahead.map((at) => priceStepSql(query, at, rows)).join(' UNION ALL '))
   for (const at of ahead) {
     const mine = read.filter((columns) => columns[5] === at.categoryCode)
     // UNION ALL keeps no order between its parts, nor is it promised within one.
@@ -47,7 +48,7 @@ async function step(query: SearchQuery, ahead: Footprint[], rows: number): Promi
     }
     at.ended = mine.length < rows
   }
-  return readFoundRows(read).map((row, index) => ({ row, smallPrice: read[index]?.[4] ?? 0 }))
+  return readFoundRows(query, read).map((row, index) => ({ row, smallPrice: read[index]?.[4] ?? 0 }))
 }
 
 const byPrice = (a: Walked, b: Walked) => a.row.sortBy - b.row.sortBy || a.row.listingId - b.row.listingId

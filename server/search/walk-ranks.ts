@@ -28,7 +28,8 @@ function conditions(query: SearchQuery, category: string): string {
   ].join(' AND ')
 }
 
-function probeSql(query: SearchQuery, categoryCode: number): string {
+/** Text of a first walk: how far up a page reaches in one category. */
+export function rankProbeSql(query: SearchQuery, categoryCode: number): string {
   const { index, rung } = ladder(query)
   const where = conditions(query, `category=${whole(categoryCode)}`)
   return `(SELECT ${searchOrder(query).by} FROM listing_search FORCE INDEX (${index}) WHERE ${where} ORDER BY ${rung} LIMIT ${whole(query.limit)})`
@@ -43,7 +44,7 @@ export async function walkRanks(
   query: SearchQuery,
   categories: readonly number[],
 ): Promise<FoundRow[] | null> {
-  const probe = await readSearchRows(categories.map((code) => probeSql(query, code)).join(' UNION ALL '))
+  const probe = await readSearchRows(categories.map((code) => rankProbeSql(query, code)).join(' UNION ALL '))
   const reached = probe.map(([by = 0]) => by).sort((a, b) => a - b)
   const top = reached[query.limit - 1]
   // Unrated sellers are half of all, on one rung.
@@ -51,5 +52,5 @@ export async function walkRanks(
   const { index, rung } = ladder(query)
   const where = conditions(query, `category IN (${categories.map(whole).join(',')})`)
   const sql = `SELECT ${selectedSql(query)} FROM listing_search FORCE INDEX (${index}) WHERE ${where} AND ${rung}<=${whole(top)} ORDER BY ${orderSql(query)} LIMIT ${whole(query.limit)}`
-  return readFoundRows(await readSearchRows(sql))
+  return readFoundRows(query, await readSearchRows(sql))
 }

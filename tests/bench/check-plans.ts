@@ -1,0 +1,73 @@
+import { circlePageSql } from '@/server/search/find-in-circle'
+import type { SearchQuery, SearchSort } from '@/server/search/search-query'
+import { priceStepSql } from '@/server/search/walk-prices'
+import { rankProbeSql } from '@/server/search/walk-ranks'
+import { readPlan, type ReadPlan } from '@/tests/bench/read-plan'
+import { TODAY } from '@/tests/bench/make-listings'
+
+/** A query with every wish there is: whatever it tests must be in the index. */
+const everyWish: Omit<SearchQuery, 'sort'> = {
+  origin: { lat: 39.125, lng: -84.525 },
+  radiusKm: 160,
+  categoryCode: 1,
+  speciesCode: 3,
+  sizeMm: { from: 20, to: 60 },
+  count: 20,
+  days: { from: TODAY, until: TODAY + 20 },
+  mostCents: 300,
+  handover: { pickup: true, lanes: [1, 2, 3] },
+  buyerState: 'OH',
+  limit: 24,
+}
+const sorts: SearchSort[] = ['nearest', 'cheapest', 'soonest', 'best-rated']
+const foot = { categoryCode: 1, smallPrice: 0, listingId: 0 }
+
+interface Expected {
+  name: string
+  sql: string
+  plan: Partial<ReadPlan>
+}
+
+function expectations(): Expected[] {
+  const { speciesCode: _species, ...anySpecies } = everyWish
+  return [
+    ...sorts.map((sort) => ({
+      name: `circle by species, ${sort}`,
+      sql: circlePageSql({ ...everyWish, sort }, everyWish.radiusKm),
+      plan: { key: 'k_species', access: 'range', covering: true },
+    })),
+    ...sorts.map((sort) => ({
+      name: `circle by category, ${sort}`,
+      sql: circlePageSql({ ...anySpecies, sort }, everyWish.radiusKm),
+      plan: { key: 'PRIMARY', access: 'range' },
+    })),
+    {
+      name: 'walk by price',
+      sql: priceStepSql({ ...everyWish, sort: 'cheapest' }, foot, 32),
+      plan: { key: 'k_price', access: 'range', covering: true, sorted: false },
+    },
+    {
+      name: 'walk by first day',
+      sql: rankProbeSql({ ...anySpecies, sort: 'soonest' }, 1),
+      plan: { key: 'k_soonest', sorted: false },
+    },
+    {
+      name: 'walk by rating',
+      sql: rankProbeSql({ ...anySpecies, sort: 'best-rated' }, 1),
+      plan: { key: 'k_rated', sorted: false },
+    },
+  ]
+}
+
+/** Texts that MariaDB would not run as they were meant; empty: all is well. */
+export async function planFaults(): Promise<string[]> {
+  const faults: string[] = []
+  for (const { name, sql, plan } of expectations()) {
+    const actual = await readPlan(sql)
+    for (const [part, wanted] of Object.entries(plan)) {
+      const is = actual[part as keyof ReadPlan]
+      if (is !== wanted) faults.push(`${name}: ${part} is ${String(is)}, not ${String(wanted)}`)
+    }
+  }
+  return faults
+}

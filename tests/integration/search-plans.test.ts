@@ -1,0 +1,56 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+
+import { connect, disconnect, rawPool } from '@/db/client'
+import { inTransaction } from '@/db/transaction'
+import { writeSearchRows } from '@/server/search/listing-search-store'
+import { openListingSearch } from '@/server/search/search-listings'
+import { chances } from '@/tests/bench/chances'
+import { planFaults } from '@/tests/bench/check-plans'
+import { shapedQueries, type Shape } from '@/tests/bench/make-query'
+import { makeListings } from '@/tests/bench/make-listings'
+import { readPlan } from '@/tests/bench/read-plan'
+import { rowsRead } from '@/tests/bench/rows-read'
+import { freshDatabase, type TestDatabase } from '@/tests/support/test-database'
+
+const LISTINGS = 4_000
+
+// Rows read for a page on average at this size; measured, and half as much again.
+const BUDGETS: Record<Shape, number> = { A: 20, B: 190, C: 18, D: 103, E: 88, F: 130, G: 166 }
+
+describe('the plans of search', () => {
+  const made = makeListings(LISTINGS, 42)
+  let database: TestDatabase
+
+  beforeAll(async () => {
+    database = await freshDatabase('plans')
+    // One connection: rows read are counted by session.
+    connect(database.url, 1)
+    const rows = Array.from({ length: made.count }, (_, at) => made.row(at))
+    await inTransaction((tx) => writeSearchRows(tx, rows))
+    await rawPool().query('SELECT 1')
+  })
+  afterAll(async () => {
+    await disconnect()
+    await database.drop()
+  })
+
+  it('never leave their index', async () => {
+    expect(await planFaults()).toEqual([])
+  })
+
+  it('would be caught when they do: a column that no index holds costs the covering read', async () => {
+    const sql =
+      'SELECT rev FROM listing_search FORCE INDEX (k_species) WHERE species = 3 AND hil BETWEEN 1 AND 9'
+    expect((await readPlan(sql)).covering).toBe(false)
+  })
+
+  it.each(Object.entries(BUDGETS))('read few rows for shape %s', async (shape, budget) => {
+    const search = openListingSearch()
+    const ask = shapedQueries(shape as Shape, made, chances(11))
+    await search.refresh()
+    let rows = 0
+    for (let asked = 0; asked < 40; asked++) rows += (await rowsRead(() => search.search(ask()))).rows
+    expect(rows / 40).toBeLessThan(budget)
+    expect(rows / 40).toBeGreaterThan(budget / 4)
+  })
+})
