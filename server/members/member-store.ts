@@ -23,8 +23,8 @@ export interface MemberRow {
   seller: { id: number; publicId: string } | null
 }
 
-export async function findMember(memberId: string): Promise<MemberRow | null> {
-  const [found] = await db()
+export async function findMember(memberId: string, tx: Tx = db()): Promise<MemberRow | null> {
+  const [found] = await tx
     .select({
       name: user.name,
       email: user.email,
