@@ -14,7 +14,7 @@ async function projectSome(tx: Tx, listingIds: number[]): Promise<void> {
   const facts = await readSellable(tx, listingIds)
   const ids = facts.map((one) => one.listingId)
   const [windows, rules] = await Promise.all([
-    ids.length > 0 ? readWindowsWithRoom(tx, ids, at) : [],
+    readWindowsWithRoom(ids, at, tx),
     loadRules({ taxonIds: [...new Set(facts.flatMap((one) => taxaOf(one.body.taxonId)))] }, tx),
   ])
   // Real time: revisions rise although the demo's date may stand anywhere.

@@ -1,6 +1,6 @@
 import { and, asc, eq, gt, inArray, lt, sql } from 'drizzle-orm'
 
-import type { Tx } from '@/db/client'
+import { db, type Tx } from '@/db/client'
 import { listing, listingVersion, pickupWindow } from '@/db/schema/listings'
 import { seller } from '@/db/schema/sellers'
 import type { ListingBody } from '@/shared/contracts/listings'
@@ -48,7 +48,12 @@ export interface OpenWindow {
 }
 
 /** Windows to come with a place left, the soonest first. */
-export async function readWindowsWithRoom(tx: Tx, listingIds: number[], at: Date): Promise<OpenWindow[]> {
+export async function readWindowsWithRoom(
+  listingIds: number[],
+  at: Date,
+  tx: Tx = db(),
+): Promise<OpenWindow[]> {
+  if (listingIds.length === 0) return []
   return tx
     .select({ listingId: pickupWindow.listingId, startsAt: pickupWindow.startsAt, zone: pickupWindow.zone })
     .from(pickupWindow)

@@ -1,0 +1,93 @@
+import { describeListing } from '@/server/listings/describe-listing'
+import { findPhotos } from '@/server/photos/photo-store'
+import type { FoundPlace } from '@/server/places/find-place'
+import { askGate, taxaOf } from '@/server/rules/ask-gate'
+import { presentGate } from '@/server/rules/present-gate'
+import { loadRules } from '@/server/rules/rule-store'
+import { readFound, type FoundFacts } from '@/server/search/found-store'
+import { readWindowsWithRoom, type OpenWindow } from '@/server/search/projection-store'
+import type { SearchHit } from '@/server/search/search-query'
+import { presentRating } from '@/server/sellers/present-seller-card'
+import type { FoundListing } from '@/shared/contracts/search'
+import { bearingWords } from '@/shared/domain/geo/bearing-words'
+import type { SpeciesRule } from '@/shared/domain/rules/species-rule'
+import { findTaxon } from '@/shared/domain/species/find-taxon'
+
+interface Around {
+  place: FoundPlace
+  at: Date
+  count?: number | undefined
+}
+
+interface Beside {
+  windows: OpenWindow[]
+  grounds: ReadonlyMap<string, string>
+  rules: SpeciesRule[]
+}
+
+function legalOf(
+  { body, state }: FoundFacts,
+  rules: SpeciesRule[],
+  { place, at }: Around,
+): FoundListing['legal'] {
+  const asked = { body, sellerState: state, buyerState: place.state, viewer: 'visitor' } as const
+  const taxa = taxaOf(body.taxonId)
+  const own = rules.filter((rule) => taxa.includes(rule.taxonId))
+  const { status, buy } = presentGate(askGate(asked, own, at.toISOString().slice(0, 10)), asked)
+  return { status, buy }
+}
+
+function presentOne(
+  hit: SearchHit,
+  facts: FoundFacts,
+  { around, beside }: { around: Around; beside: Beside },
+): FoundListing {
+  const { body, cellLat: lat, cellLng: lng } = facts
+  const taxon = findTaxon(body.taxonId)
+  const next = beside.windows.find((window) => window.listingId === facts.listingId)
+  const rating = presentRating(facts)
+  return {
+    listingId: facts.publicId,
+    category: body.category,
+    ...describeListing(body, beside.grounds),
+    ...(taxon ? { scientificName: taxon.scientificName } : {}),
+    ...(taxon?.speciesId ? { speciesId: taxon.speciesId } : {}),
+    stage: body.stage,
+    sizeLoMm: body.sizeLoMm,
+    sizeHiMm: body.sizeHiMm,
+    free: facts.free,
+    minOrder: body.minOrder,
+    unitCents: hit.unitCents,
+    ...(around.count === undefined ? {} : { totalCents: hit.unitCents * around.count }),
+    waterC: body.water.temperatureC,
+    farmName: facts.farmName,
+    placeText: `${facts.city}, ${facts.state}`,
+    state: facts.state,
+    lat,
+    lng,
+    distanceKm: hit.distanceKm,
+    bearing: bearingWords(around.place.centre, { lat, lng }) ?? 'here',
+    ...(next ? { nextPickup: { startsAt: next.startsAt.toISOString(), zone: next.zone } } : {}),
+    ...(rating ? { rating } : {}),
+    legal: legalOf(facts, beside.rules, around),
+  }
+}
+
+/** Tags for a page of hits, in their order; one query a table however many there are. */
+export async function presentFound(hits: SearchHit[], around: Around): Promise<FoundListing[]> {
+  const ids = hits.map((hit) => hit.listingId)
+  const [found, windows] = await Promise.all([readFound(ids), readWindowsWithRoom(ids, around.at)])
+  const all = [...found.values()]
+  const [photos, rules] = await Promise.all([
+    findPhotos(all.flatMap(({ body }) => body.photos.slice(0, 1).map((photo) => photo.photoId))),
+    loadRules({
+      taxonIds: [...new Set(all.flatMap(({ body }) => taxaOf(body.taxonId)))],
+      jurisdictions: [...new Set(['US', around.place.state, ...all.map(({ state }) => state)])],
+    }),
+  ])
+  const grounds = new Map(photos.map((photo) => [photo.id, photo.ground]))
+  return hits.flatMap((hit) => {
+    const facts = found.get(hit.listingId)
+    return facts ? [presentOne(hit, facts, { around, beside: { windows, grounds, rules } })] : []
+  })
+}
