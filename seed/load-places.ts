@@ -1,0 +1,68 @@
+import { sql } from 'drizzle-orm'
+import type { MySqlTable } from 'drizzle-orm/mysql-core'
+
+import type { Database } from '@/db/client'
+import { cellPopulation, cityPlace, zipPlace } from '@/db/schema/places'
+import { readCsv } from '@/seed/read-csv'
+
+const ROWS_A_STATEMENT = 2000
+
+type Zip = typeof zipPlace.$inferInsert
+type City = typeof cityPlace.$inferInsert
+
+const zipsOf = (states: readonly string[] | undefined): Zip[] =>
+  readCsv('zips.csv', ['zip', 'city', 'state', 'lat', 'lng'])
+    .filter((row) => !states || states.includes(row.state))
+    .map(({ zip, city, state, lat, lng }) => ({ zip, city, state, lat: Number(lat), lng: Number(lng) }))
+
+/** Towns of the population table, and those known only as a post office: there with no people and the mean point. */
+function citiesOf(zips: Zip[], states: readonly string[] | undefined): City[] {
+  const towns: City[] = readCsv('cities.csv', ['name', 'state', 'lat', 'lng', 'population'])
+    .filter((row) => !states || states.includes(row.state))
+    .map(({ name, state, lat, lng, population }) => ({
+      // Nobody types the mark that some Hawaiian names begin with.
+      name: name.replace(/^[‘’'ʻ]/u, ''),
+      state,
+      lat: Number(lat),
+      lng: Number(lng),
+      population: Number(population),
+    }))
+  const key = (name: string, state: string) => `${name.toLowerCase()}|${state}`
+  const known = new Set(towns.map((town) => key(town.name, town.state)))
+  const offices = new Map<string, Zip[]>()
+  for (const zip of zips) {
+    const town = key(zip.city, zip.state)
+    if (!known.has(town)) offices.set(town, [...(offices.get(town) ?? []), zip])
+  }
+  const mean = (values: number[]) => values.reduce((sum, value) => sum + value, 0) / values.length
+  for (const group of offices.values()) {
+    const [first] = group
+    if (!first) continue
+    const lat = mean(group.map((zip) => zip.lat))
+    const lng = mean(group.map((zip) => zip.lng))
+    towns.push({ name: first.city, state: first.state, lat, lng, population: 0 })
+  }
+  return towns
+}
+
+async function fill<T extends MySqlTable>(db: Database, table: T, rows: T['$inferInsert'][]): Promise<void> {
+  if ((await db.$count(table)) === rows.length) return
+  await db.execute(sql`delete from ${table}`)
+  for (let from = 0; from < rows.length; from += ROWS_A_STATEMENT) {
+    await db.insert(table).values(rows.slice(from, from + ROWS_A_STATEMENT))
+  }
+}
+
+/** ZIP codes, towns and people by cell, from assets/data. Full tables are left alone; `states` loads a part for tests. */
+export async function loadPlaces(db: Database, part?: { states: readonly string[] }): Promise<void> {
+  const zips = zipsOf(part?.states)
+  await fill(db, zipPlace, zips)
+  await fill(db, cityPlace, citiesOf(zips, part?.states))
+  const cells = readCsv('cell-population.csv', ['sizeThousandths', 'iy', 'ix', 'population']).map((row) => ({
+    sizeThousandths: Number(row.sizeThousandths),
+    iy: Number(row.iy),
+    ix: Number(row.ix),
+    population: Number(row.population),
+  }))
+  await fill(db, cellPopulation, cells)
+}
