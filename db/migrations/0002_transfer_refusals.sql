@@ -1,0 +1,1 @@
+ALTER TABLE `transfer` ADD `refusals` smallint unsigned DEFAULT 0 NOT NULL;

@@ -1,0 +1,199 @@
+import { randomInt, randomUUID } from 'node:crypto'
+import type { Server } from 'node:http'
+import type { AddressInfo } from 'node:net'
+
+import { sql } from 'drizzle-orm'
+import request from 'supertest'
+import type TestAgent from 'supertest/lib/agent'
+
+import { connect, db, disconnect, type Database } from '@/db/client'
+import { configurePayments } from '@/payments/stripe'
+import { openSellerAccount } from '@/payments/open-seller-account'
+import { startTestFake, type TestFake } from '@/payments/fake/fake-for-tests'
+import { buildBatch, type BuiltBatch } from '@/seed/build-batch'
+import { BUILT_PASSWORD, buildMember, type BuiltMember } from '@/seed/build-member'
+import { buildSeller, type BuiltSeller } from '@/seed/build-seller'
+import { loadPlaces } from '@/seed/load-places'
+import { loadRules } from '@/seed/load-rules'
+import { buildApp } from '@/server/app'
+import { openAuth } from '@/server/auth/auth'
+import { now, setClockOffset } from '@/server/clock'
+import { ringClocks } from '@/server/jobs/ring-clocks'
+import { log } from '@/server/log'
+import type { Letter } from '@/server/mail/letter'
+import { configureOrders } from '@/server/orders/order-settings'
+import { registerDoers } from '@/server/outbox/doers'
+import { finishEffect } from '@/server/outbox/outbox-store'
+import { registerDoer, runEffects } from '@/server/outbox/run-effects'
+import { projectListings } from '@/server/search/project-listings'
+import { inTransaction } from '@/db/transaction'
+import type { ListingBody, ShownListing } from '@/shared/contracts/listings'
+import type { ShownOrder } from '@/shared/contracts/orders'
+import { freshDatabase } from '@/tests/support/test-database'
+
+const ORIGIN = 'http://127.0.0.1:8080'
+const WEBHOOK_SECRET = 'whsec_order_desk_tests'
+const PASSES = 80
+
+/** A live batch and the statements its buyers in Ohio have to tick. */
+export interface DeskBatch extends BuiltBatch {
+  ticks: string[]
+}
+
+export interface OrderDesk {
+  db: Database
+  fake: TestFake
+  letters: Letter[]
+  hatchery: BuiltSeller
+  hatcheryEmail: string
+  /** A live batch of the hatchery. */
+  batch: (name: string, wish?: { free?: number; body?: Partial<ListingBody> }) => Promise<DeskBatch>
+  member: (email: string) => Promise<BuiltMember>
+  signedIn: (email: string) => Promise<TestAgent>
+  visitor: () => TestAgent
+  /** Runs effects and lets webhooks arrive until nothing waits any more. */
+  quiet: () => Promise<void>
+  /** Moves domain time and rings what is due. */
+  travelTo: (at: Date) => Promise<void>
+  /** The same, leaving effects and webhooks where they are. */
+  travelToWithoutRest: (at: Date) => Promise<void>
+  /** Pays an open payment page as a person does. */
+  pay: (order: ShownOrder, card?: string) => Promise<void>
+  close: () => Promise<void>
+}
+
+/** Every hold of a batch as a body that the contract takes. */
+export function reserveBody(batch: DeskBatch, change: Record<string, unknown> = {}) {
+  return {
+    quantity: 25,
+    windowId: batch.windows[0]?.publicId,
+    near: '45202',
+    version: 1,
+    ticked: batch.ticks,
+    ...change,
+  }
+}
+
+export const keyed = (key: string = randomUUID()) => ({ 'idempotency-key': key })
+
+/** The whole server in this process on its own database, with the practice processor beside it over real HTTP. */
+export async function openOrderDesk(label: string): Promise<OrderDesk> {
+  log.level = 'silent'
+  const database = await freshDatabase(label)
+  connect(database.url)
+  setClockOffset(0)
+  openAuth({ secret: 'test-secret-'.repeat(4), origin: ORIGIN, alsoTrusted: [] })
+  configureOrders({ origin: ORIGIN, feeBp: 600 })
+  const letters: Letter[] = []
+  registerDoers()
+  registerDoer('mail', async (effect) => {
+    letters.push(effect.body.letter as Letter)
+    await finishEffect(effect.seq)
+  })
+  const app = buildApp({ origins: [ORIGIN], https: false, webDir: 'nowhere', trustProxyHops: 1 })
+  const server = await new Promise<Server>((done, fail) => {
+    const listening = app.listen(0, '127.0.0.1', (error) => (error ? fail(error) : done(listening)))
+  })
+  const { port } = server.address() as AddressInfo
+  const fake = await startTestFake({
+    webhookUrl: `http://127.0.0.1:${port}/api/v1/stripe-events`,
+    webhookSecret: WEBHOOK_SECRET,
+    platformOrigin: ORIGIN,
+    openingBalanceCents: 100_000,
+  })
+  configurePayments({
+    secretKey: 'sk_test_order_desk',
+    webhookSecret: WEBHOOK_SECRET,
+    host: '127.0.0.1',
+    port: fake.port,
+    protocol: 'http',
+  })
+
+  const base = db()
+  await loadPlaces(base, { states: ['OH', 'KY', 'IN', 'IL'] })
+  await loadRules(base, { demonstration: true, at: new Date() })
+  const hatcheryEmail = 'hatchery@example.org'
+  const owner = await buildMember(base, { email: hatcheryEmail, name: 'Ada Marsh' })
+  const account = await openSellerAccount({
+    sellerId: 'desk',
+    email: hatcheryEmail,
+    displayName: 'Marsh Hatchery',
+    idempotencyKey: `desk-${randomUUID()}`,
+  })
+  await fake.control(`onboarding/${account.accountId}`)
+  const hatchery = await buildSeller(base, { member: owner, payoutAccountId: account.accountId })
+
+  const visitor = (): TestAgent => {
+    const from = `10.${randomInt(256)}.${randomInt(256)}.${randomInt(1, 255)}`
+    return request
+      .agent(server)
+      .set({ origin: ORIGIN, 'x-tankward': '1', 'x-forwarded-for': from }) as unknown as TestAgent
+  }
+  const waiting = async (): Promise<number> => {
+    const [rows] = await base.execute(
+      sql`select count(*) as n from outbox where done_at is null and dead_at is null and run_after <= utc_timestamp(3)`,
+    )
+    const told = await fetch(`${fake.origin}/_control/state`, {
+      headers: { 'x-control-token': 'control-for-tests' },
+    })
+    const state = (await told.json()) as { waitingWebhooks: number }
+    return Number((rows as unknown as { n: number }[])[0]?.n ?? 0) + state.waitingWebhooks
+  }
+  const quiet = async (): Promise<void> => {
+    for (let pass = 0; pass < PASSES; pass++) {
+      await runEffects()
+      if ((await waiting()) === 0) return
+      await new Promise((done) => setTimeout(done, 25))
+    }
+    throw new Error('the outbox and the webhooks did not come to rest')
+  }
+  return {
+    db: base,
+    fake,
+    letters,
+    hatchery,
+    hatcheryEmail,
+    batch: async (name, wish = {}) => {
+      const built = await buildBatch(base, {
+        seller: hatchery,
+        name,
+        at: now(),
+        free: wish.free,
+        body: wish.body,
+      })
+      await inTransaction((tx) => projectListings(tx, [built.id]))
+      const shown = await visitor().get(`/api/v1/listings/${built.publicId}?near=45202`).expect(200)
+      const { gate } = shown.body as ShownListing
+      return { ...built, ticks: gate?.ticks.map((tick) => tick.id) ?? [] }
+    },
+    member: (email) => buildMember(base, { email }),
+    visitor,
+    signedIn: async (email) => {
+      const agent = visitor()
+      await agent.post('/api/auth/sign-in/email').send({ email, password: BUILT_PASSWORD }).expect(200)
+      return agent
+    },
+    quiet,
+    travelTo: async (at) => {
+      setClockOffset(at.getTime() - Date.now())
+      await ringClocks()
+      await quiet()
+    },
+    travelToWithoutRest: async (at) => {
+      setClockOffset(at.getTime() - Date.now())
+      await ringClocks()
+    },
+    pay: async (order, card = '4242424242424242') => {
+      if (!order.payUrl) throw new Error('the order has no payment page')
+      await fake.pay(order.payUrl, card)
+      await quiet()
+    },
+    close: async () => {
+      setClockOffset(0)
+      await fake.stop()
+      await new Promise((done) => server.close(done))
+      await disconnect()
+      await database.drop()
+    },
+  }
+}
