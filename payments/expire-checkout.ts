@@ -1,4 +1,5 @@
 import { askProcessor } from './ask-processor'
+import { idOf } from './id-of'
 import { PaymentFailure } from './payment-failure'
 import { readCheckout } from './read-checkout'
 
@@ -16,13 +17,14 @@ export async function expireCheckout(asked: {
 }): Promise<ExpiredCheckout> {
   const { sessionId, idempotencyKey } = asked
   try {
-    await askProcessor((stripe) => stripe.checkout.sessions.expire(sessionId, {}, { idempotencyKey }))
+    const session = await askProcessor((stripe) =>
+      stripe.checkout.sessions.expire(sessionId, {}, { idempotencyKey }),
+    )
+    return { outcome: 'expired', paymentIntentId: idOf(session.payment_intent) }
   } catch (error) {
     if (!(error instanceof PaymentFailure) || error.kind !== 'refused') throw error
     const now = await readCheckout(sessionId)
     if (now.status === 'open') throw error
     return { outcome: now.status, paymentIntentId: now.paymentIntentId }
   }
-  const { paymentIntentId } = await readCheckout(sessionId)
-  return { outcome: 'expired', paymentIntentId }
 }

@@ -4,7 +4,7 @@ export interface PaymentFacts {
   paymentIntentId: string
   /** `unpaid`: begun, not paid. `authorised`: held on the card. `cancelled`: given up, by us or by lapse. */
   status: 'authorised' | 'cancelled' | 'captured' | 'unpaid'
-  /** Cancelled by the processor itself, because nobody captured in time. */
+  /** A hold the processor gave up by itself, because nobody captured in time. */
   hasLapsed: boolean
   amountCents: number
   capturableCents: number
@@ -49,7 +49,7 @@ export function paymentFacts(payment: Stripe.PaymentIntent): PaymentFacts {
   return {
     paymentIntentId: payment.id,
     status,
-    hasLapsed: payment.status === 'canceled' && payment.cancellation_reason === 'automatic',
+    hasLapsed: status === 'cancelled' && charge !== null && payment.cancellation_reason === 'automatic',
     amountCents: payment.amount,
     capturableCents: payment.amount_capturable,
     capturedCents: payment.amount_received,

@@ -10,7 +10,8 @@ interface Details {
 
 /**
  * Why an act of payment did not happen. `away` leaves open whether it did (refused connection, time-out, 5xx, busy):
- * repeat it with the SAME idempotency key. After any other kind the processor has kept its refusal under the key.
+ * repeat it with the SAME idempotency key. After any other kind a new try needs a new key, for
+ * the processor keeps its refusals under the old one.
  */
 export class PaymentFailure extends Error {
   readonly kind: PaymentFailureKind

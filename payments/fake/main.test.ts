@@ -61,7 +61,8 @@ const params = {
   capture_method: 'manual',
 } as const
 
-describe('the practice processor as a program of its own', () => {
+// Each start loads the program anew, a second or two.
+describe('the practice processor as a program of its own', { timeout: 60_000 }, () => {
   it('killed between requests keeps ids, money and idempotent answers, and resends what was not acknowledged', async () => {
     const catcher = await startWebhookCatcher()
     catcher.answerWith(500)
@@ -91,6 +92,38 @@ describe('the practice processor as a program of its own', () => {
     const third = await start()
     expect((await sdk(third.port).paymentIntents.retrieve(held.id)).status).toBe(captured.status)
     await catcher.stop()
+  })
+
+  it('killed in the middle of the work answers every repeated request with what it did before', async () => {
+    const keys = Array.from({ length: 40 }, (_, index) => `hold:${index}`)
+    const known = new Map<string, string>()
+    const changed: string[] = []
+    const note = (key: string, id: string) => {
+      if ((known.get(key) ?? id) !== id) changed.push(key)
+      known.set(key, id)
+    }
+    for (const killAfterMs of [20, 120]) {
+      const { child, port } = await start()
+      const dead = exitOf(child)
+      const stripe = sdk(port)
+      setTimeout(() => child.kill('SIGKILL'), killAfterMs)
+      const asked = keys.map(async (key) => {
+        const { id } = await stripe.paymentIntents.create(params, { idempotencyKey: key })
+        note(key, id)
+      })
+      await Promise.allSettled(asked)
+      await dead
+    }
+    expect(known.size).toBeGreaterThan(0)
+    const { port } = await start()
+    const stripe = sdk(port)
+    for (const key of keys) {
+      const { id } = await stripe.paymentIntents.create(params, { idempotencyKey: key })
+      note(key, id)
+    }
+    expect(changed).toEqual([])
+    const kept = await stripe.paymentIntents.list({ limit: 100 })
+    expect(kept.data).toHaveLength(keys.length)
   })
 
   it('stops on SIGTERM with code 0', async () => {

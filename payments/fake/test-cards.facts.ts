@@ -29,7 +29,7 @@ function decline(code: string, message: string, more: Partial<Decline> = {}): Ca
 
 const genericDecline = decline('card_declined', PLAIN, { declineCode: 'generic_decline' })
 
-// Source: docs.stripe.com/testing and /declines/codes (read in part); rows marked [M] are from memory.
+// Source: docs.stripe.com/testing and /declines/codes (read in part); the two rows of kind `challenge` are from memory.
 export const testCards: readonly TestCard[] = [
   { number: '4242424242424242', means: 'goes through', outcome: approve, token: 'pm_card_visa' },
   {
@@ -81,13 +81,13 @@ export const testCards: readonly TestCard[] = [
   },
   {
     number: '4000002760003184',
-    means: 'asks for approval by the bank (3-D Secure) [M]',
+    means: 'asks for approval by the bank (3-D Secure)',
     outcome: { kind: 'challenge', after: approve },
     token: 'pm_card_authenticationRequired',
   },
   {
     number: '4000008400001629',
-    means: 'asks for approval, then declines [M]',
+    means: 'asks for approval, then declines',
     outcome: { kind: 'challenge', after: genericDecline },
   },
   {

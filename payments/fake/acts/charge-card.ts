@@ -9,7 +9,7 @@ import { bookMoney, processingFeeCents } from './book-money'
 import { openDispute } from './open-dispute'
 
 /** A customer's card authorisation lives 7 days (docs.stripe.com, place a hold on a payment method). */
-export const AUTHORISATION_DAYS = 7
+const AUTHORISATION_DAYS = 7
 const DAY_S = 86_400
 
 function writeCharge(turn: Turn, payment: PaymentRow, card: CardUsed): ChargeRow {

@@ -19,7 +19,7 @@ function lastErrorOf(row: PaymentRow): Stripe.PaymentIntent.LastPaymentError | n
   }
 }
 
-export function challengeUrl(turn: Turn, paymentId: string): string {
+function challengeUrl(turn: Turn, paymentId: string): string {
   return `${turn.world.origin}/challenge/${paymentId}`
 }
 

@@ -58,7 +58,7 @@ interface Field {
 const numberField: Field = {
   name: 'cardNumber',
   label: 'Card number',
-  hint: 'A practice number',
+  hint: 'One that goes through: 4242 4242 4242 4242',
   isNumeric: true,
 }
 const expiryField: Field = { name: 'expiry', label: 'Expires', hint: 'Month / year', isNumeric: false }
@@ -103,7 +103,7 @@ export function cardFieldsHtml(typed: TypedCard, errors: FieldErrors): Html {
 
 export const practiceCardsHtml = html`<details>
   <summary>Practice cards and what they do</summary>
-  <dl>
+  <dl class="cards">
     ${testCards.map(
       (card) =>
         html`<div>

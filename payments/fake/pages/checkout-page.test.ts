@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto'
 import Stripe from 'stripe'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { startTestFake, type TestFake } from '../fake-for-tests'
@@ -45,6 +46,14 @@ describe('the practice payment page', () => {
     expect(text.match(/<h1>/g)).toHaveLength(1)
     expect(text).not.toContain('<script')
     expect(text).toContain('href="http://platform.test/orders/7"')
+  })
+
+  it('carries a style that its own policy lets through', async () => {
+    const { url } = await openPage()
+    const answer = await fetch(url)
+    const css = /<style>([\s\S]*)<\/style>/.exec(await answer.text())?.[1] ?? ''
+    const hash = createHash('sha256').update(css).digest('base64')
+    expect(answer.headers.get('content-security-policy')).toContain(`'sha256-${hash}'`)
   })
 
   it('takes the money and sends the buyer back with the session named', async () => {
