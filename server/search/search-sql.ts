@@ -10,7 +10,7 @@ import { MORE_TIERS } from '@/server/search/tier-columns'
  * Placeholders would cost a prepared statement for each number of ranges.
  */
 export function whole(value: number | bigint): string {
-  if (typeof value === 'number' && !Number.isSafeInteger(value))
+  if (typeof value !== 'bigint' && !Number.isSafeInteger(value))
     throw new RangeError(`${value} is no whole number`)
   return String(value)
 }
