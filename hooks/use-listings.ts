@@ -1,4 +1,4 @@
-import { queryOptions, useQuery } from '@tanstack/react-query'
+import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query'
 
 import { call } from '@/hooks/api'
 import { STALE } from '@/hooks/stale'
@@ -11,6 +11,6 @@ const listingQuery = (listingId: string, near: string | undefined) =>
   })
 
 /** One listing, with distance and legal status for the place given. */
-export function useListing(listingId: string, near: string | undefined) {
-  return useQuery(listingQuery(listingId, near))
+export function useListing(listingId: string, near: string | undefined, isReady: boolean) {
+  return useQuery({ ...listingQuery(listingId, near), enabled: isReady, placeholderData: keepPreviousData })
 }

@@ -2,6 +2,10 @@ import { queryOptions, useQuery } from '@tanstack/react-query'
 
 import { call } from '@/hooks/api'
 import { STALE } from '@/hooks/stale'
+import type { ReplyOf } from '@/shared/api/endpoint'
+import type { Endpoints } from '@/shared/api/routes.gen'
+
+export type ShownSeller = ReplyOf<Endpoints['readSeller']>
 
 const sellerQuery = (sellerId: string) =>
   queryOptions({

@@ -4,7 +4,7 @@ import { StyleSheet, View } from 'react-native'
 import { UseMyLocation } from './use-my-location'
 
 import { Combobox, type ComboboxChoice } from '@/components/ui/combobox'
-import { space } from '@/constants/theme'
+import { space, type } from '@/constants/theme'
 import type { KeptPlace } from '@/hooks/kept-place'
 import { toKeptPlace } from '@/hooks/use-current-place'
 import { useFirstPlace, usePlaces } from '@/hooks/use-places'
@@ -17,10 +17,12 @@ interface Props {
   placeLabel: string
   onChoose: (place: KeptPlace) => void
   fieldId?: string
+  /** The location sign beside the field instead of a button below it; goes without a hint. */
+  isSmall?: boolean
 }
 
 /** ZIP, city or the device's own location, always as a cell. */
-export function PlaceField({ label, hint, placeLabel, onChoose, fieldId }: Props) {
+export function PlaceField({ label, hint, placeLabel, onChoose, fieldId, isSmall }: Props) {
   const [typed, setTyped] = useState<string | null>(null)
   const [fault, setFault] = useState('')
   const { places, isLoading, error } = usePlaces(typed ?? '')
@@ -52,29 +54,33 @@ export function PlaceField({ label, hint, placeLabel, onChoose, fieldId }: Props
   }
 
   return (
-    <View style={styles.frame}>
-      <Combobox
-        label={label}
-        hint={hint}
-        error={fault || (error ? noAnswer : undefined)}
-        fieldId={fieldId}
-        text={typed ?? placeLabel}
-        onChangeText={(text) => {
-          setTyped(text)
-          setFault('')
-        }}
-        choices={places.map(toChoice)}
-        onChoose={({ id }) => {
-          const chosen = places.find((place) => keyOf(place) === id)
-          if (chosen) choose(chosen)
-        }}
-        isLoading={isLoading}
-        emptyText={(typed ?? '').trim().length > 1 ? noPlace : undefined}
-        placeholder="ZIP code or town"
-        autoComplete="postal-code"
-        onSubmit={() => void chooseTyped()}
-      />
-      <UseMyLocation onCell={chooseCell} onFault={setFault} />
+    <View style={isSmall ? styles.row : styles.frame}>
+      <View style={styles.field}>
+        <Combobox
+          label={label}
+          hint={hint}
+          error={fault || (error ? noAnswer : undefined)}
+          fieldId={fieldId}
+          text={typed ?? placeLabel}
+          onChangeText={(text) => {
+            setTyped(text)
+            setFault('')
+          }}
+          choices={places.map(toChoice)}
+          onChoose={({ id }) => {
+            const chosen = places.find((place) => keyOf(place) === id)
+            if (chosen) choose(chosen)
+          }}
+          isLoading={isLoading}
+          emptyText={(typed ?? '').trim().length > 1 ? noPlace : undefined}
+          placeholder="ZIP code or town"
+          autoComplete="postal-code"
+          onSubmit={() => void chooseTyped()}
+        />
+      </View>
+      <View style={isSmall ? styles.beside : null}>
+        <UseMyLocation onCell={chooseCell} onFault={setFault} isSmall={isSmall} />
+      </View>
     </View>
   )
 }
@@ -88,4 +94,12 @@ const toChoice = (place: Place): ComboboxChoice => ({
   detail: place.zip && !place.label.includes(place.zip) ? `ZIP ${place.zip}` : undefined,
 })
 
-const styles = StyleSheet.create({ frame: { gap: space.xs, alignSelf: 'stretch' } })
+// Level with the box: the label over it is one line of body text and a gap.
+const labelPx = type.body.lineHeight + space.xs
+
+const styles = StyleSheet.create({
+  frame: { gap: space.xs, alignSelf: 'stretch' },
+  row: { flexDirection: 'row', alignItems: 'flex-start', gap: space.sm },
+  field: { flexGrow: 1, flexShrink: 1, minWidth: 0 },
+  beside: { paddingTop: labelPx },
+})

@@ -1,12 +1,17 @@
 import { useState } from 'react'
+import { StyleSheet } from 'react-native'
 
 import { ownCell } from './own-cell'
 
 import { Button } from '@/components/ui/button'
+import { IconButton } from '@/components/ui/icon-button'
+import { color, touchPx } from '@/constants/theme'
 
 interface Props {
   onCell: (cell: string) => Promise<void>
   onFault: (sentence: string) => void
+  /** Only the sign, where a place is known already and room is short. */
+  isSmall?: boolean
 }
 
 const faults = {
@@ -14,7 +19,7 @@ const faults = {
   unknown: 'Your device could not say where it is. Type a ZIP code instead.',
 }
 
-export function UseMyLocation({ onCell, onFault }: Props) {
+export function UseMyLocation({ onCell, onFault, isSmall }: Props) {
   const [isBusy, setIsBusy] = useState(false)
   async function locate() {
     setIsBusy(true)
@@ -22,6 +27,18 @@ export function UseMyLocation({ onCell, onFault }: Props) {
     if ('cell' in answer) await onCell(answer.cell)
     else onFault(faults[answer.why])
     setIsBusy(false)
+  }
+  if (isSmall) {
+    return (
+      <IconButton
+        icon="pin"
+        label="Use my location"
+        tint="netting"
+        isDisabled={isBusy}
+        onPress={() => void locate()}
+        style={styles.small}
+      />
+    )
   }
   return (
     <Button
@@ -34,3 +51,13 @@ export function UseMyLocation({ onCell, onFault }: Props) {
     />
   )
 }
+
+const styles = StyleSheet.create({
+  small: {
+    width: touchPx + 4,
+    height: touchPx + 4,
+    borderWidth: 1,
+    borderColor: color.edge,
+    backgroundColor: color.card,
+  },
+})

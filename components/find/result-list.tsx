@@ -1,0 +1,95 @@
+import { StyleSheet, View } from 'react-native'
+
+import { NoResults } from './no-results'
+import { ResultTag } from './result-tag'
+import type { Find } from './use-find'
+
+import { TagSkeleton } from '@/components/listings/tag-skeleton'
+import { Banner } from '@/components/ui/banner'
+import { Button } from '@/components/ui/button'
+import { ErrorState } from '@/components/ui/error-state'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+import { NoAnswer } from '@/shared/api/call'
+
+interface Props {
+  find: Find
+  selectedPin: string
+  onHot: (pin: string) => void
+}
+
+export function ResultList({ find, selectedPin, onHot }: Props) {
+  const { search, found } = find
+  if (search.isPending) return <TagSkeleton label="Loading listings" count={4} />
+  if (search.isError && found.length === 0) {
+    const isOffline = search.error instanceof NoAnswer
+    return (
+      <ErrorState
+        title={isOffline ? 'No connection' : 'The search did not work'}
+        body={
+          isOffline
+            ? 'Your filters are kept. Go where there is a signal, and try again.'
+            : `${search.error.message}. Your filters are kept.`.replace('..', '.')
+        }
+        onRetry={() => void search.refetch()}
+        isRetrying={search.isFetching}
+      />
+    )
+  }
+  if (found.length === 0) {
+    return <NoResults state={find.state} placeLabel={find.placeLabel} onChange={find.change} />
+  }
+  return (
+    <View style={styles.frame}>
+      {search.isError ? (
+        <Banner isLive tone="caution" title="Not the latest">
+          We could not ask again just now: this list is from a moment ago.
+        </Banner>
+      ) : null}
+      <View
+        role="list"
+        aria-label="Listings"
+        style={[styles.list, search.isPlaceholderData ? styles.old : null]}
+      >
+        {found.map((listing, index) => (
+          <ResultTag
+            key={listing.listingId}
+            found={listing}
+            find={find}
+            isFirst={index === 0}
+            selectedPin={selectedPin}
+            onHot={onHot}
+          />
+        ))}
+      </View>
+      <ListEnd find={find} />
+    </View>
+  )
+}
+
+function ListEnd({ find: { search, found } }: { find: Find }) {
+  if (search.hasNextPage) {
+    return (
+      <Button
+        kind="secondary"
+        isWide
+        label="Show more"
+        busyLabel="Loading more"
+        isBusy={search.isFetchingNextPage}
+        onPress={() => void search.fetchNextPage()}
+      />
+    )
+  }
+  return (
+    <Text tint="muted" size="note" style={styles.end}>
+      {found.length === 1 ? 'That is the only one.' : 'That is all of them.'}
+    </Text>
+  )
+}
+
+const styles = StyleSheet.create({
+  frame: { gap: space.lg },
+  list: { gap: space.md },
+  old: { opacity: 0.55 },
+  end: { textAlign: 'center', paddingVertical: space.md },
+})
