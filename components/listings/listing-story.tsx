@@ -1,0 +1,108 @@
+import { ArrivalPromise } from './arrival-promise'
+import { BatchFacts } from './batch-facts'
+import { CountPicker } from './count-picker'
+import { MoneyTerms } from './money-terms'
+import type { CountLimits } from './order-count'
+import { pageFacts } from './page-facts'
+import { PhotoStrip } from './photo-strip'
+import { PickupWindows } from './pickup-windows'
+import { PriceTable } from './price-table'
+import type { Refusal } from './selling-state'
+import { Tag } from './tag'
+
+import { TwoColumns } from '@/components/layout/two-columns'
+import { PlaceField } from '@/components/places/place-field'
+import { CautionList } from '@/components/rules/caution-list'
+import { listingCautions } from '@/components/rules/listing-cautions'
+import { LegalStatus } from '@/components/rules/legal-status'
+import { SellerSummary } from '@/components/sellers/seller-summary'
+import { Banner } from '@/components/ui/banner'
+import { Card } from '@/components/ui/card'
+import { Heading } from '@/components/ui/heading'
+import { Text } from '@/components/ui/text'
+import { useBreakpoint } from '@/hooks/use-breakpoint'
+import { useCurrentPlace } from '@/hooks/use-current-place'
+import { useUnits } from '@/hooks/use-units'
+import type { ShownListing } from '@/shared/contracts/listings'
+
+interface Props {
+  listing: ShownListing
+  count: number
+  limits: CountLimits
+  refusal: Refusal | null
+  placeLabel: string
+  onCount: (count: number) => void
+  /** The reader has chosen a place of their own. */
+  onPlace: () => void
+}
+
+export function ListingStory({ listing, count, limits, refusal, placeLabel, onCount, onPlace }: Props) {
+  const units = useUnits()
+  const { choose } = useCurrentPlace()
+  const { body, gate } = listing
+  const canBuy = refusal === null
+  // Where the law is why nothing can be held, it is the first thing to read.
+  const isLawful = gate?.buy !== 'no' && gate?.buy !== 'ask-moderators'
+  const legal = gate ? <LegalStatus gate={gate} /> : null
+  const isPhone = useBreakpoint() === 'phone'
+  const photos = <PhotoStrip photos={listing.photos} told={body.photos} />
+  return (
+    <>
+      <Tag facts={pageFacts(listing, { units, count })} size="page" />
+      {refusal ? (
+        <Banner tone={refusal.tone} title={refusal.title}>
+          {refusal.words}
+        </Banner>
+      ) : null}
+      {isPhone ? photos : null}
+      <TwoColumns
+        sideLabel="Price, pickup and grower"
+        isSideFirst
+        main={
+          <>
+            {isPhone ? null : photos}
+            {body.words ? (
+              <Card>
+                <Heading level={2} size="lead">
+                  In the grower’s words
+                </Heading>
+                <Text>{body.words}</Text>
+              </Card>
+            ) : null}
+            <BatchFacts body={body} />
+            <MoneyTerms body={body} />
+            <ArrivalPromise promise={body.promise} />
+            <CautionList cautions={listingCautions(gate)} />
+          </>
+        }
+        side={
+          <>
+            {isLawful ? null : legal}
+            {canBuy ? (
+              <Card>
+                <CountPicker count={count} limits={limits} onChange={onCount} />
+              </Card>
+            ) : null}
+            <PriceTable body={body} count={count} />
+            <PickupWindows windows={listing.windows} />
+            <Card>
+              <PlaceField
+                label="Where will they live?"
+                hint={
+                  gate ? undefined : 'Then we can say how far it is, and what we know about the rules there.'
+                }
+                placeLabel={placeLabel}
+                onChoose={(place) => {
+                  choose(place)
+                  onPlace()
+                }}
+              />
+            </Card>
+            {isLawful ? legal : null}
+            <SellerSummary seller={listing.seller} />
+          </>
+        }
+      />
+    </>
+  )
+}

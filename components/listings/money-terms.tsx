@@ -1,0 +1,50 @@
+import { FactRows } from './fact-rows'
+import { percent } from './percent'
+
+import type { ListingBody } from '@/shared/contracts/listings'
+import { clocks } from '@/shared/domain/orders/clocks.facts'
+
+const minutesPerHour = 60
+
+/** Deposit, balance, cancelling and not coming, in plain words. */
+export function MoneyTerms({ body }: { body: ListingBody }) {
+  const answerHours = clocks.sellerAnswer.minutes / minutesPerHour
+  const graceMinutes = clocks.pickupGrace.minutes
+  return (
+    <FactRows
+      title="Paying and cancelling"
+      facts={[
+        {
+          term: 'Holding',
+          value: `Holding sets your fish aside for ${clocks.checkoutHold.minutes} minutes while you pay the deposit.`,
+        },
+        {
+          term: 'Deposit',
+          value: `${percent(body.depositPct)} of the price of the animals, by card, when you hold them. Our payment processor holds it; the grower gets it after you confirm.`,
+        },
+        {
+          term: 'The rest',
+          value:
+            body.balanceDue === 'at-handover'
+              ? 'By card before you collect; it is released when you have the animals and say all is good.'
+              : `By card, at the latest ${clocks.balanceDue.minutes / minutesPerHour} hours before the pickup window.`,
+        },
+        {
+          term: 'Answer',
+          value:
+            body.accept === 'instant'
+              ? 'The order stands as soon as the deposit is paid.'
+              : `The grower says yes or no within ${answerHours} hours. No answer: nothing is taken from your card.`,
+        },
+        {
+          term: 'Cancelling',
+          value: `Free until ${body.freeCancelHours} hours before the window. After that the grower may keep the deposit, never more.`,
+        },
+        {
+          term: 'Not coming',
+          value: `If you are not there ${graceMinutes} minutes after the window, the grower may keep the deposit; the rest goes back to your card. If the grower is not there, everything goes back.`,
+        },
+      ]}
+    />
+  )
+}

@@ -1,0 +1,39 @@
+import { pickupDay } from './pickup-words'
+import { stageName } from './stage-words'
+import type { TagFacts } from './tag-facts'
+
+import { legalWords } from '@/components/rules/legal-words'
+import type { ShownListing } from '@/shared/contracts/listings'
+import { printCount } from '@/shared/units/count'
+import { aboutDistance } from '@/shared/units/distance'
+import { printLengthRange } from '@/shared/units/length'
+import { printCents } from '@/shared/units/money'
+import { printBothTemperatures } from '@/shared/units/temperature'
+import type { UnitSystem } from '@/shared/units/unit-system'
+
+import { unitCentsAt } from './order-count'
+
+interface Asked {
+  units: UnitSystem
+  count: number
+}
+
+/** A listing as the tag at the head of its own page reads. */
+export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFacts {
+  const { body, seller, gate, distanceKm, bearing } = listing
+  const next = listing.windows.find(({ placesLeft }) => placesLeft > 0)
+  return {
+    title: listing.title,
+    sizeText: printLengthRange({ minCm: body.sizeLoMm / 10, maxCm: body.sizeHiMm / 10 }, units),
+    stage: stageName(body.stage),
+    countText: `${printCount(listing.free)} left`,
+    waterText: printBothTemperatures(body.water.temperatureC, units),
+    priceText: printCents(unitCentsAt(body.tiers, count)),
+    priceUnitText: `a fish, for ${printCount(count)}`,
+    distanceText:
+      distanceKm === undefined ? undefined : `${aboutDistance(distanceKm, units)} ${bearing ?? ''}`.trim(),
+    placeText: seller.placeText,
+    dayText: next ? pickupDay(next) : undefined,
+    badges: gate ? [legalWords(gate.status, gate.buyerState)] : [],
+  }
+}

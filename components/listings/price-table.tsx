@@ -1,0 +1,55 @@
+import { Card } from '@/components/ui/card'
+import { DataTable } from '@/components/ui/data-table'
+import type { Column } from '@/components/ui/data-table-types'
+import { Heading } from '@/components/ui/heading'
+import { Text } from '@/components/ui/text'
+import type { ListingBody } from '@/shared/contracts/listings'
+import { printCount } from '@/shared/units/count'
+import { printCents } from '@/shared/units/money'
+
+import { unitCentsAt } from './order-count'
+
+type Tier = ListingBody['tiers'][number]
+
+const columns: readonly Column<Tier>[] = [
+  { key: 'from', title: 'From', cell: ({ fromCount }) => printCount(fromCount), isNumeric: true },
+  { key: 'one', title: 'For one', cell: ({ unitCents }) => printCents(unitCents), isNumeric: true },
+  { key: 'hundred', title: 'For 100', cell: ({ unitCents }) => printCents(unitCents * 100), isNumeric: true },
+]
+
+interface Props {
+  body: ListingBody
+  count: number
+}
+
+export function PriceTable({ body, count }: Props) {
+  // The first price may be written from a smaller count than anybody can order.
+  const tiers = body.tiers.map((tier) => ({ ...tier, fromCount: Math.max(tier.fromCount, body.minOrder) }))
+  const unitCents = unitCentsAt(tiers, count)
+  const next = tiers.find((tier) => tier.fromCount > count)
+  return (
+    <Card>
+      <Heading level={2} size="lead">
+        Price
+      </Heading>
+      <DataTable
+        label="Price by count"
+        columns={columns}
+        rows={tiers}
+        rowKey={(tier) => String(tier.fromCount)}
+      />
+      <Text>
+        {printCount(count)} cost{' '}
+        <Text face="strong" isFigures>
+          {printCents(unitCents * count)}
+        </Text>
+        , {printCents(unitCents)} each, before sales tax.
+      </Text>
+      {next ? (
+        <Text size="note" tint="muted">
+          From {printCount(next.fromCount)} on, each costs {printCents(next.unitCents)}.
+        </Text>
+      ) : null}
+    </Card>
+  )
+}

@@ -1,0 +1,40 @@
+import { StyleSheet, View } from 'react-native'
+
+import { answerWords, ratingWords, sinceWords } from './seller-words'
+
+import { Badge } from '@/components/ui/badge'
+import { ButtonLink } from '@/components/ui/button-link'
+import { Card } from '@/components/ui/card'
+import { Heading } from '@/components/ui/heading'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+import type { SellerCard } from '@/shared/contracts/sellers'
+
+/** Who sells, on a listing: the record, and the way to the whole page. */
+export function SellerSummary({ seller }: { seller: SellerCard }) {
+  const answers = answerWords(seller)
+  return (
+    <Card>
+      <Heading level={2} size="lead">
+        {seller.farmName}
+      </Heading>
+      <Text tint="muted">
+        {seller.kind === 'hatchery' ? 'Hatchery' : 'Grower'} in {seller.placeText}
+      </Text>
+      <View style={styles.badges}>
+        <Badge word={ratingWords(seller)} tone="neutral" icon="star" />
+        {answers ? <Badge word={answers} tone="neutral" icon="clock" /> : null}
+        <Badge word={sinceWords(seller)} tone="neutral" icon="calendar" />
+      </View>
+      <ButtonLink
+        kind="quiet"
+        icon="forward"
+        href={{ pathname: '/sellers/[sellerId]', params: { sellerId: seller.sellerId } }}
+        label="More about this farm"
+        spokenLabel={`More about this farm: ${seller.farmName}`}
+      />
+    </Card>
+  )
+}
+
+const styles = StyleSheet.create({ badges: { gap: space.xs } })
