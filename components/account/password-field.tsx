@@ -54,7 +54,7 @@ function LengthSoFar({ typed }: { typed: number }) {
   const isEnough = typed >= leastPassword
   return (
     <View style={styles.length}>
-      <Icon name={isEnough ? 'check' : 'minus'} sizePx={18} tint={isEnough ? 'safe' : 'muted'} />
+      {isEnough ? <Icon name="check" sizePx={18} tint="safe" /> : null}
       <Text size="note" tint={isEnough ? 'safe' : 'muted'} isFigures>
         {isEnough ? `${typed} characters: long enough` : `${typed} of at least ${leastPassword} characters`}
       </Text>
