@@ -9,6 +9,7 @@ const ROWS_A_STATEMENT = 2000
 
 type Zip = typeof zipPlace.$inferInsert
 type City = typeof cityPlace.$inferInsert
+type Cell = typeof cellPopulation.$inferInsert
 
 const zipsOf = (states: readonly string[] | undefined): Zip[] =>
   readCsv('zips.csv', ['zip', 'city', 'state', 'lat', 'lng'])
@@ -53,16 +54,29 @@ async function fill<T extends MySqlTable>(db: Database, table: T, rows: T['$infe
   }
 }
 
-/** ZIP codes, towns and people by cell, from assets/data. Full tables are left alone; `states` loads a part for tests. */
-export async function loadPlaces(db: Database, part?: { states: readonly string[] }): Promise<void> {
-  const zips = zipsOf(part?.states)
-  await fill(db, zipPlace, zips)
-  await fill(db, cityPlace, citiesOf(zips, part?.states))
+/** All cells, or those within the rectangle that a part of the ZIP codes spans. */
+function cellsOf(zips: Zip[], isPart: boolean): Cell[] {
+  const span = (values: number[]) => [Math.min(...values), Math.max(...values)] as const
+  const [south, north] = span(zips.map((zip) => zip.lat + 90))
+  const [west, east] = span(zips.map((zip) => zip.lng + 180))
+  const isInside = ({ sizeThousandths: size, iy, ix }: Cell) =>
+    (iy + 1) * size >= south * 1000 &&
+    iy * size <= north * 1000 &&
+    (ix + 1) * size >= west * 1000 &&
+    ix * size <= east * 1000
   const cells = readCsv('cell-population.csv', ['sizeThousandths', 'iy', 'ix', 'population']).map((row) => ({
     sizeThousandths: Number(row.sizeThousandths),
     iy: Number(row.iy),
     ix: Number(row.ix),
     population: Number(row.population),
   }))
-  await fill(db, cellPopulation, cells)
+  return isPart ? cells.filter(isInside) : cells
+}
+
+/** ZIP codes, towns and people by cell, from assets/data. Full tables are left alone; `states` loads a part for tests. */
+export async function loadPlaces(db: Database, part?: { states: readonly string[] }): Promise<void> {
+  const zips = zipsOf(part?.states)
+  await fill(db, zipPlace, zips)
+  await fill(db, cityPlace, citiesOf(zips, part?.states))
+  await fill(db, cellPopulation, cellsOf(zips, part !== undefined))
 }

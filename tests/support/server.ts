@@ -4,18 +4,17 @@ import type { Server } from 'node:http'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
 
-import { toNodeHandler } from 'better-auth/node'
-import express, { type Express } from 'express'
 import request from 'supertest'
 import type TestAgent from 'supertest/lib/agent'
 
 import { connect, db, disconnect, type Database } from '@/db/client'
 import { BUILT_PASSWORD } from '@/seed/build-member'
-import { openAuth, theAuth } from '@/server/auth/auth'
-import { problemHandler, unknownPath } from '@/server/http/problem-handler'
-import { sameOrigin } from '@/server/http/same-origin'
+import { buildApp } from '@/server/app'
+import { openAuth } from '@/server/auth/auth'
 import { log } from '@/server/log'
-import { placeRoutes } from '@/server/places/place-routes'
+import { configureOrders } from '@/server/orders/order-settings'
+import { configurePhotos } from '@/server/photos/photo-files'
+import { forgetPlaces } from '@/server/places/find-place'
 import { freshDatabase } from '@/tests/support/test-database'
 import { totpOf } from '@/tests/support/totp'
 
@@ -37,22 +36,6 @@ export function keyed(key: string = randomUUID()): { 'idempotency-key': string }
   return { 'idempotency-key': key }
 }
 
-function app(): Express {
-  const product = express()
-  product.set('trust proxy', 1)
-  product.use((req, res, next) => {
-    res.locals.requestId = randomUUID()
-    req.headers['x-tankward-ip'] = req.ip ?? '0.0.0.0'
-    next()
-  })
-  product.all('/api/auth/*splat', toNodeHandler(theAuth()))
-  product.use('/api/v1', sameOrigin([TEST_ORIGIN]), express.json({ limit: '256kb' }))
-  product.use('/api/v1', placeRoutes())
-  product.use(unknownPath)
-  product.use(problemHandler)
-  return product
-}
-
 async function setUpSecondFactor(agent: TestAgent, password: string): Promise<void> {
   const begun = await agent.post('/api/auth/two-factor/enable').send({ password }).expect(200)
   const code = await totpOf((begun.body as { totpURI: string }).totpURI)
@@ -65,9 +48,13 @@ export async function openTestServer(label: string): Promise<TestServer> {
   const database = await freshDatabase(label)
   connect(database.url)
   openAuth({ secret: 'test-secret-'.repeat(4), origin: TEST_ORIGIN, alsoTrusted: [] })
+  configureOrders({ origin: TEST_ORIGIN, feeBp: 600 })
   const uploadDir = await mkdtemp(path.join(tmpdir(), 'tankward-test-photos-'))
+  configurePhotos({ dir: uploadDir })
+  forgetPlaces()
+  const app = buildApp({ origins: [TEST_ORIGIN], https: false, webDir: uploadDir, trustProxyHops: 1 })
   const server = await new Promise<Server>((done, fail) => {
-    const listening = app().listen(0, '127.0.0.1', (error) => (error ? fail(error) : done(listening)))
+    const listening = app.listen(0, '127.0.0.1', (error) => (error ? fail(error) : done(listening)))
   })
   const visitor = (): TestAgent => {
     const from = `10.${randomInt(256)}.${randomInt(256)}.${randomInt(1, 255)}`
