@@ -1,0 +1,115 @@
+import { useEffect, useState } from 'react'
+import { View } from 'react-native'
+
+import { decisionWords, reasonOfKey, reasonChoices, type DecisionKind } from './decision-words'
+
+import type { ReviewReason } from '@/components/selling/review-reasons'
+import { Banner } from '@/components/ui/banner'
+import { Button } from '@/components/ui/button'
+import { focusElement } from '@/components/ui/focus-element'
+import { RadioGroup } from '@/components/ui/radio-group'
+import { Sheet } from '@/components/ui/sheet'
+import { Text } from '@/components/ui/text'
+import { TextArea } from '@/components/ui/text-area'
+import type { Decision } from '@/hooks/use-moderation'
+
+interface Props {
+  kind: DecisionKind
+  title: string
+  isBusy: boolean
+  /** What the server said against it. */
+  refusal: string | null
+  onSend: (decision: Decision) => void
+  onClose: () => void
+}
+
+/** One decision: mounted when it is begun, so that nothing of the last one hangs over. */
+export function DecisionSheet({ kind, title, isBusy, refusal, onSend, onClose }: Props) {
+  const [reason, setReason] = useState<ReviewReason | ''>('')
+  const [note, setNote] = useState('')
+  const [isTried, setIsTried] = useState(false)
+  const words = decisionWords[kind]
+  const isApproval = kind === 'approve'
+  const needsNote = kind === 'ask' || reason === 'other'
+  const reasonFault = !isApproval && !reason ? 'A reason goes with it.' : undefined
+  const noteFault = !isApproval && needsNote && !note.trim() ? 'Say what the seller should do.' : undefined
+
+  useEffect(() => {
+    focusElement(isApproval ? 'decision-act' : 'decision-keys')
+  }, [isApproval])
+
+  function send() {
+    setIsTried(true)
+    if (isBusy || reasonFault || noteFault) return
+    const given = note.trim() ? { note: note.trim() } : {}
+    onSend(isApproval || !reason ? { decision: 'approve' } : { decision: kind, reason, ...given })
+  }
+  function press(key: string, isWithControl: boolean) {
+    if (key === 'Enter' && isWithControl) return send()
+    const chosen = reasonOfKey(key)
+    if (chosen) setReason(chosen)
+  }
+
+  return (
+    <Sheet
+      title={`${words.title}: ${title}`}
+      isOpen
+      onClose={onClose}
+      shape="dialog"
+      footer={
+        <Button
+          nativeID="decision-act"
+          kind={kind === 'reject' ? 'danger' : 'primary'}
+          label={words.act}
+          busyLabel={words.busy}
+          isBusy={isBusy}
+          isWide
+          onPress={send}
+        />
+      }
+    >
+      {refusal ? (
+        <Banner tone="danger" title="Not decided" isLive>
+          {refusal}
+        </Banner>
+      ) : null}
+      <Text>{words.effect}</Text>
+      {isApproval ? null : (
+        <>
+          <View
+            nativeID="decision-keys"
+            tabIndex={-1}
+            onKeyDown={(event) =>
+              press(event.nativeEvent.key, event.nativeEvent.ctrlKey || event.nativeEvent.metaKey)
+            }
+          >
+            <RadioGroup
+              label="Reason"
+              hint="Number keys choose."
+              value={reason}
+              choices={reasonChoices}
+              onChange={setReason}
+              error={isTried ? reasonFault : undefined}
+            />
+          </View>
+          <View
+            onKeyDown={({ nativeEvent: { key, ctrlKey, metaKey } }) => {
+              if (key === 'Enter' && (ctrlKey || metaKey)) send()
+            }}
+          >
+            <TextArea
+              label="Words to the seller"
+              hint="What should they do? They read it as you write it."
+              isOptional={!needsNote}
+              value={note}
+              onChangeText={setNote}
+              rows={3}
+              maxLength={600}
+              error={isTried ? noteFault : undefined}
+            />
+          </View>
+        </>
+      )}
+    </Sheet>
+  )
+}

@@ -1,0 +1,66 @@
+/** Everything a moderator reads of a batch, in the order of doubt: what it is, where from, how it is sold. */
+export const factGroups: readonly { title: string; fields: readonly string[] }[] = [
+  {
+    title: 'The fish',
+    fields: [
+      'taxonId',
+      'strain',
+      'stage',
+      'sizeLoMm',
+      'sizeHiMm',
+      'ungraded',
+      'hatchedOn',
+      'readyOn',
+      'sex',
+      'sexClaimPct',
+    ],
+  },
+  {
+    title: 'Origin and health',
+    fields: [
+      'origin',
+      'originState',
+      'wildCaught',
+      'singleSpeciesChecked',
+      'licenceNumbers',
+      'statesServed',
+      'health.treatments',
+      'health.lastLosses',
+      'health.papers',
+    ],
+  },
+  {
+    title: 'Count and price',
+    fields: ['countOnHand', 'countMethod', 'overcountPct', 'minOrder', 'orderStep', 'mostPerBuyer', 'tiers'],
+  },
+  {
+    title: 'Water and feed',
+    fields: [
+      'water.temperatureC',
+      'water.pH',
+      'water.ghPpm',
+      'water.khPpm',
+      'water.saltPpt',
+      'water.source',
+      'water.measuredOn',
+      'feed.onPellets',
+      'feed.since',
+      'feed.words',
+    ],
+  },
+  {
+    title: 'Terms',
+    fields: [
+      'placeKind',
+      'windows',
+      'accept',
+      'balanceDue',
+      'depositPct',
+      'freeCancelHours',
+      'promise.windowHours',
+      'promise.survivalDays',
+      'promise.remedy',
+      'promise.evidence',
+    ],
+  },
+]

@@ -1,0 +1,82 @@
+import { useState } from 'react'
+import { StyleSheet, View } from 'react-native'
+
+import { DeskFault } from './desk-fault'
+import { KeysSheet } from './keys-sheet'
+import { QueueTable } from './queue-table'
+import { QueueTag } from './queue-tag'
+import { stepThrough } from './step-through'
+import { useDeskKeys } from './use-desk-keys'
+
+import { TagSkeleton } from '@/components/listings/tag-skeleton'
+import { Button } from '@/components/ui/button'
+import { EmptyState } from '@/components/ui/empty-state'
+import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
+import { useBreakpoint } from '@/hooks/use-breakpoint'
+import { useReviewQueue } from '@/hooks/use-moderation'
+
+/** What waits for a decision, the riskiest first. */
+export function ReviewQueue() {
+  const query = useReviewQueue()
+  const isPhone = useBreakpoint() === 'phone'
+  const [hasKeys, setHasKeys] = useState(false)
+  // Read once a drawing: ages are to the minute, and the queue is asked again when the page comes into view.
+  const [nowMs] = useState(() => Date.now())
+  const down = () => stepThrough('review-', 1)
+  const up = () => stepThrough('review-', -1)
+  useDeskKeys({ j: down, n: down, k: up, p: up, '?': () => setHasKeys(true) }, !hasKeys)
+  if (query.isPending) return <TagSkeleton label="Loading the queue" count={4} />
+  if (!query.data) {
+    return (
+      <DeskFault error={query.error} onRetry={() => void query.refetch()} isRetrying={query.isRefetching} />
+    )
+  }
+  const rows = query.data.pages.flatMap((page) => page.items)
+  if (rows.length === 0) {
+    return (
+      <EmptyState
+        icon="check"
+        title="Nothing waits"
+        body="New listings and changes appear here by themselves."
+      />
+    )
+  }
+  return (
+    <View style={styles.frame}>
+      {isPhone ? (
+        <View role="list" aria-label="Listings that wait" style={styles.list}>
+          {rows.map((row) => (
+            <QueueTag key={row.versionId} row={row} nowMs={nowMs} />
+          ))}
+        </View>
+      ) : (
+        <>
+          <QueueTable rows={rows} nowMs={nowMs} />
+          <View style={styles.foot}>
+            <Text size="small" tint="muted">
+              j and k move through the queue, Enter opens.
+            </Text>
+            <Button kind="quiet" label="All keys (?)" onPress={() => setHasKeys(true)} />
+          </View>
+        </>
+      )}
+      {query.hasNextPage ? (
+        <Button
+          kind="secondary"
+          label="Show more"
+          busyLabel="Loading"
+          isBusy={query.isFetchingNextPage}
+          onPress={() => void query.fetchNextPage()}
+        />
+      ) : null}
+      <KeysSheet isOpen={hasKeys} onClose={() => setHasKeys(false)} />
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  frame: { gap: space.lg },
+  list: { gap: space.md },
+  foot: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', justifyContent: 'space-between' },
+})

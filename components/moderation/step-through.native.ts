@@ -1,0 +1,1 @@
+export function stepThrough(_idPrefix: string, _by: 1 | -1) {}
