@@ -8,7 +8,7 @@ import { space, touchPx } from '@/constants/theme'
 
 export function Brand({ isMarkOnly = false }: { isMarkOnly?: boolean }) {
   return (
-    <PressLink href="/" isReturn label="Tankward, find" look={() => styles.brand}>
+    <PressLink href="/" label="Tankward, find" look={() => styles.brand}>
       <Mark sizePx={32} />
       {isMarkOnly ? null : (
         <Text size="lead" face="title">

@@ -22,7 +22,6 @@ export function PlaceLink({ label, href, icon, isCurrent, isStacked }: Props) {
   return (
     <PressLink
       href={href}
-      isReturn
       isCurrent={isCurrent}
       look={({ hovered }) => [
         isStacked ? styles.stacked : styles.beside,

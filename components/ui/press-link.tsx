@@ -18,23 +18,21 @@ interface Props {
   /** Spoken instead of the children; must begin with the words that are seen. */
   label?: string
   isCurrent?: boolean
-  /** Goes back to a page that is already open below this one instead of opening it again. */
-  isReturn?: boolean
   nativeID?: string
   /** Told when the pointer comes over the block and leaves it. */
   onHotChange?: (isHot: boolean) => void
 }
 
 /** A block that is one link: a tag, a row, a navigation place. */
-export function PressLink({ href, isReturn, ...rest }: Props) {
+export function PressLink({ href, ...rest }: Props) {
   return (
-    <RouterLink href={href} asChild dismissTo={isReturn}>
+    <RouterLink href={href} asChild>
       <Surface {...rest} />
     </RouterLink>
   )
 }
 
-interface SurfaceProps extends Omit<Props, 'href' | 'isReturn'> {
+interface SurfaceProps extends Omit<Props, 'href'> {
   onPress?: OnPress
   onClick?: OnPress
 }
