@@ -136,10 +136,10 @@ describe('idempotency keys', () => {
   })
 
   it('answers 409 while the first request of a key is still running', async () => {
-    await fake.control('faults', { kind: 'slow', ms: 300, match: 'POST /v1/payment_intents' })
+    await fake.control('faults', { kind: 'slow', ms: 1500, match: 'POST /v1/payment_intents' })
     const key = { 'idempotency-key': 'double click' }
     const first = post('/v1/payment_intents', 'amount=2000&currency=usd', key)
-    await new Promise((resolve) => setTimeout(resolve, 100))
+    await new Promise((resolve) => setTimeout(resolve, 200))
     const second = await post('/v1/payment_intents', 'amount=2000&currency=usd', key)
     expect(second.status).toBe(409)
     expect(await second.json()).toMatchObject({ error: { code: 'idempotency_key_in_use' } })
@@ -164,11 +164,14 @@ describe('planted faults', () => {
   })
 
   it('refuses connections for a while and comes back on the same port', async () => {
-    await fake.control('refuse-connections', { ms: 250 })
-    await new Promise((resolve) => setTimeout(resolve, 60))
-    await expect(call('/v1/balance')).rejects.toThrow()
-    await new Promise((resolve) => setTimeout(resolve, 400))
-    expect((await call('/v1/balance')).status).toBe(200)
+    const isOpen = () =>
+      call('/v1/balance').then(
+        (answer) => answer.status === 200,
+        () => false,
+      )
+    await fake.control('refuse-connections', { ms: 700 })
+    await expect.poll(isOpen, { timeout: 650 }).toBe(false)
+    await expect.poll(isOpen, { timeout: 5000 }).toBe(true)
   })
 
   it('has no control endpoint without the token', async () => {
