@@ -11,6 +11,7 @@ import { connect, db, disconnect, type Database } from '@/db/client'
 import { BUILT_PASSWORD } from '@/seed/build-member'
 import { buildApp } from '@/server/app'
 import { openAuth } from '@/server/auth/auth'
+import { setClockOffset } from '@/server/clock'
 import { log } from '@/server/log'
 import { configureOrders } from '@/server/orders/order-settings'
 import { configurePhotos } from '@/server/photos/photo-files'
@@ -19,6 +20,8 @@ import { freshDatabase } from '@/tests/support/test-database'
 import { totpOf } from '@/tests/support/totp'
 
 const TEST_ORIGIN = 'http://127.0.0.1:8080'
+/** The trade's clock in tests: a Friday morning in Ohio. It runs on from here in real time. */
+export const TEST_NOW = '2027-01-15T15:00:00.000Z'
 
 export interface TestServer {
   db: Database
@@ -45,6 +48,7 @@ async function setUpSecondFactor(agent: TestAgent, password: string): Promise<vo
 /** The product on a database of its own, answering on a free port. `label`: lower case words with underscores. */
 export async function openTestServer(label: string): Promise<TestServer> {
   log.level = 'silent'
+  setClockOffset(Date.parse(TEST_NOW) - Date.now())
   const database = await freshDatabase(label)
   connect(database.url)
   openAuth({ secret: 'test-secret-'.repeat(4), origin: TEST_ORIGIN, alsoTrusted: [] })
