@@ -44,6 +44,11 @@ const inner = [
     message: 'the domain does not know the wire',
   },
   {
+    target: './payments/!(*.test|*-for-tests).ts',
+    from: './payments/fake',
+    message: 'the product does not know the practice processor',
+  },
+  {
     target: './payments/fake',
     from: ['./payments', './shared', './server', './db'],
     except: ['./fake'],

@@ -19,7 +19,7 @@ interface Props {
 export function ReserveBatch({ listingId, count }: Props) {
   const { place, isKnown } = useCurrentPlace()
   const { me, isPending: isAsking } = useMe()
-  const listing = useListing(listingId, place?.near)
+  const listing = useListing(listingId, place?.near, isKnown)
   const back = { label: 'Back to the listing', href: `/listings/${listingId}` } as const
   const title = listing.data ? `Hold ${listing.data.title}` : 'Hold animals'
 

@@ -1,4 +1,4 @@
-import { mysqlTable, varchar } from 'drizzle-orm/mysql-core'
+import { int, mysqlTable, varchar } from 'drizzle-orm/mysql-core'
 
 import { user } from '@/db/schema/auth'
 import { instant, memberRef } from '@/db/schema/columns'
@@ -12,6 +12,8 @@ export const memberProfile = mysqlTable('member_profile', {
   placeCell: varchar({ length: 24 }),
   placeState: varchar({ length: 2 }),
   units: varchar({ length: 8 }).notNull().default('us'),
+  /** Pickups to which the member did not come. */
+  noShows: int({ unsigned: true }).notNull().default(0),
   theme: varchar({ length: 8 }).notNull().default('system'),
   updatedAt: instant().notNull(),
 })

@@ -65,6 +65,12 @@ export const order = mysqlTable(
     balancePaidAt: instant(),
     handedOverAt: instant(),
     settledAt: instant(),
+    /** A party says the other did not come: until the contest clock ends, the other may object. */
+    noShowBy: varchar({ length: 6 }),
+    noShowAt: instant(),
+    buyerMoves: smallint({ unsigned: true }).notNull().default(0),
+    sellerMoves: smallint({ unsigned: true }).notNull().default(0),
+    claimType: varchar({ length: 20 }),
     /** The next timer: when it rings and which edge it tries. Null only in a final state. */
     clockAt: instant(),
     clockEdge: varchar({ length: 4 }),

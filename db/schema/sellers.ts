@@ -37,6 +37,8 @@ export const seller = mysqlTable(
     ratingSum: int({ unsigned: true }).notNull().default(0),
     answeredInTime: int({ unsigned: true }).notNull().default(0),
     answersMissed: int({ unsigned: true }).notNull().default(0),
+    /** Days promised and missed without a die-off to show for it. */
+    daysMissed: int({ unsigned: true }).notNull().default(0),
     createdAt: instant().notNull(),
     updatedAt: instant().notNull(),
   },

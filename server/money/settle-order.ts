@@ -21,11 +21,11 @@ async function splitOf(tx: Tx, order: OrderRow): Promise<Settlement> {
   })
 }
 
-/** E40 (E38): all is good or the window has ended. Splits what is held and queues the one transfer to the seller. */
-export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<void> {
+/** E40 (E38): all is good or the window has ended. Splits what is held and queues the one transfer to the seller; null when it was done before. */
+export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<OrderRow | null> {
   const at = now()
   const { order, applied } = await applyEdge(tx, { ...command, change: { settledAt: at } })
-  if (!applied) return
+  if (!applied) return null
   const { transferCents, feeCents, taxCents } = await splitOf(tx, order)
   await changeOrder(tx, order, { feeCents, updatedAt: at })
   await book(tx, {
@@ -42,7 +42,8 @@ export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<void> {
     ],
     at,
   })
-  if (transferCents === 0) return
+  if (transferCents === 0) return order
   await insertTransfer(tx, { orderId: order.id, amountCents: transferCents, at })
   await queueEffect({ kind: 'transfer', ref: order.id, body: {} }, tx)
+  return order
 }

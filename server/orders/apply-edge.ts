@@ -47,8 +47,11 @@ function checkOverlays(order: OrderRow, to: string): void {
   if (order.paymentDispute === 'open' && MONEY_STATES.has(to)) throw new Problem('dispute-open')
 }
 
+/** A slot whose time has passed stays counted: it was used, if only by waiting. */
+const isAhead = (order: OrderRow, at: Date) => order.slotStartsAt === null || order.slotStartsAt > at
+
 /** The timer of the order as it will stand, counted from now. */
-async function clockAfter(
+export async function clockAfter(
   tx: Tx,
   order: OrderRow,
   at: Date,
@@ -65,6 +68,10 @@ async function clockAfter(
     isBalancePaid: order.balancePaidAt !== null || order.balanceCents === 0,
     claimWindowHours: terms.promise.windowHours,
     promisedDeliveryMs: null,
+    noShow:
+      order.noShowBy && order.noShowAt
+        ? { by: order.noShowBy === 'buyer' ? 'buyer' : 'seller', sinceMs: order.noShowAt.getTime() }
+        : null,
   })
   return { clockAt: next ? new Date(next.atMs) : null, clockEdge: next?.edge ?? null }
 }
@@ -97,7 +104,8 @@ export async function applyEdge(tx: Tx, command: EdgeCommand): Promise<EdgeOutco
     by: command.actorId ?? null,
     at,
   })
-  if (edge.to === 'cancelled' && before.windowId !== null) await freeSlot(tx, before.windowId)
+  if (edge.to === 'cancelled' && before.windowId !== null && isAhead(before, at))
+    await freeSlot(tx, before.windowId)
   await writeEvent(tx, {
     orderId: before.id,
     commandId: command.commandId,

@@ -1,42 +1,74 @@
-import { inTransaction } from '@/db/transaction'
-import { endHold } from '@/server/orders/end-hold'
-import { applyEdge } from '@/server/orders/apply-edge'
-import { letMoneyGo } from '@/server/orders/let-money-go'
-import { markAnswerMissed } from '@/server/orders/party-store'
-import type { OrderRow } from '@/server/orders/order-store'
+import { inTransaction, type Tx } from '@/db/transaction'
+import { now } from '@/server/clock'
 import { settleOrder } from '@/server/money/settle-order'
+import { applyEdge } from '@/server/orders/apply-edge'
+import { endHold } from '@/server/orders/end-hold'
+import { keepDeposit } from '@/server/orders/keep-deposit'
+import { letMoneyGo } from '@/server/orders/let-money-go'
+import { markAnswerMissed, markDayMissed, markNoShow } from '@/server/orders/party-store'
+import type { OrderRow } from '@/server/orders/order-store'
+import { refundEverything } from '@/server/orders/refund-everything'
+import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 
 type ClockEdge = (order: OrderRow) => Promise<void>
+type Aftermath = (tx: Tx, order: OrderRow) => Promise<void>
 
 /** A timer's command id: the same ring twice changes nothing. */
 const ringOf = (edge: string, order: OrderRow) => `clock:${edge}:${order.clockAt?.getTime() ?? 0}`
 
-/** E09: the seller did not answer in time. One who has accepted is waiting for the processor, not for themselves. */
-async function sellerSilent(order: OrderRow): Promise<void> {
-  if (order.acceptedAt !== null) return
-  await inTransaction(async (tx) => {
-    const outcome = await applyEdge(tx, {
-      edge: 'E09',
-      orderId: order.id,
-      commandId: ringOf('E09', order),
-      actor: 'timer',
+/** The edge by the clock, and what follows from it in the same transaction. */
+function byClock(edge: EdgeId, then: Aftermath, change: Partial<OrderRow> = {}): ClockEdge {
+  return (order) =>
+    inTransaction(async (tx) => {
+      const outcome = await applyEdge(tx, {
+        edge,
+        orderId: order.id,
+        commandId: ringOf(edge, order),
+        actor: 'timer',
+        change,
+      })
+      if (outcome.applied) await then(tx, outcome.order)
     })
-    if (!outcome.applied) return
-    await letMoneyGo(tx, outcome.order)
-    await markAnswerMissed(tx, order.sellerId)
-  })
 }
 
-/** E40: the claim window ended without a word: the money goes to the seller. */
-async function windowEnded(order: OrderRow): Promise<void> {
-  await inTransaction((tx) =>
-    settleOrder(tx, { edge: 'E40', orderId: order.id, commandId: ringOf('E40', order), actor: 'timer' }),
-  )
-}
+const sellerSilent = byClock('E09', async (tx, order) => {
+  await letMoneyGo(tx, order)
+  await markAnswerMissed(tx, order.sellerId)
+})
+
+const dayMissed = byClock('E26', async (tx, order) => {
+  await refundEverything(tx, order, 'seller-missed-day')
+  await markDayMissed(tx, order.sellerId)
+})
+
+const buyerAbsent = byClock('E31', async (tx, order) => {
+  await keepDeposit(tx, order, 'buyer-absent')
+  await markNoShow(tx, order.buyerId, now())
+})
+
+const sellerAbsent = byClock('E32', async (tx, order) => {
+  await refundEverything(tx, order, 'seller-absent')
+  await markDayMissed(tx, order.sellerId)
+})
 
 /** What happens when a clock rings, by the edge it tries. */
-export const clockEdges: Record<string, ClockEdge> = {
+export const clockEdges: Partial<Record<string, ClockEdge>> = {
   E02: (order) => endHold(order, ringOf('E02', order)),
-  E09: sellerSilent,
-  E40: windowEnded,
+  // A seller who has accepted waits for the processor, not for themselves.
+  E09: async (order) => (order.acceptedAt === null ? sellerSilent(order) : undefined),
+  E17: byClock('E17', (tx, order) => refundEverything(tx, order, 'never-scheduled')),
+  E23: byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid')),
+  E26: dayMissed,
+  E31: buyerAbsent,
+  E32: sellerAbsent,
+  E33: byClock('E33', async () => undefined, { claimType: 'handover_unclear' }),
+  E40: (order) =>
+    inTransaction(async (tx) => {
+      await settleOrder(tx, {
+        edge: 'E40',
+        orderId: order.id,
+        commandId: ringOf('E40', order),
+        actor: 'timer',
+      })
+    }),
 }

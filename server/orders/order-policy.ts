@@ -1,15 +1,26 @@
+import { now } from '@/server/clock'
 import type { OrderRow } from '@/server/orders/order-store'
 import type { ShownOrder } from '@/shared/contracts/orders'
+import { clockMs } from '@/shared/domain/orders/clocks.facts'
 
 export type Party = ShownOrder['party']
 type OrderAct = ShownOrder['may'][number]
 
-export interface OrderViewer {
-  party: Party
-}
-
 const isRunning = (order: OrderRow) => order.freeze === 'none'
 const isBalancePaid = (order: OrderRow) => order.balanceCents === 0 || order.balancePaidAt !== null
+
+const CANCELLABLE = ['deposit_paid', 'scheduled', 'ready']
+const STOPPABLE = ['requested', ...CANCELLABLE]
+
+/** The one who waits may say so: a buyer from the start of the window, a seller after its end and the grace. */
+function hasWaited(order: OrderRow, party: Party): boolean {
+  const { slotStartsAt, slotEndsAt } = order
+  if (!slotStartsAt || !slotEndsAt) return false
+  const graceMs = clockMs('pickupGrace', 'fish')
+  return party === 'buyer' ? now() >= slotStartsAt : now().getTime() >= slotEndsAt.getTime() + graceMs
+}
+
+const movesOf = (order: OrderRow, party: Party) => (party === 'buyer' ? order.buyerMoves : order.sellerMoves)
 
 /** One readable line an act: who may do it, and in which state. The same answers guard the acts and fill `may`. */
 const abilities: Record<OrderAct, (order: OrderRow, party: Party) => boolean> = {
@@ -26,6 +37,18 @@ const abilities: Record<OrderAct, (order: OrderRow, party: Party) => boolean> = 
     party === 'buyer' && ['scheduled', 'ready'].includes(order.state) && !isBalancePaid(order),
   'hand-over': (order, party) => party === 'seller' && order.state === 'ready' && isBalancePaid(order),
   'confirm-good': (order, party) => party === 'buyer' && order.state === 'handed_over',
+  'choose-slot': (order, party) =>
+    party !== 'staff' &&
+    (order.state === 'deposit_paid' ||
+      (order.state === 'ready' && !order.noShowBy && movesOf(order, party) === 0)),
+  cancel: (order, party) => party !== 'staff' && CANCELLABLE.includes(order.state),
+  'report-no-show': (order, party) =>
+    party !== 'staff' && order.state === 'ready' && !order.noShowBy && hasWaited(order, party),
+  contest: (order, party) =>
+    party !== 'staff' && order.state === 'ready' && Boolean(order.noShowBy) && order.noShowBy !== party,
+  stop: (order, party) => party === 'staff' && STOPPABLE.includes(order.state),
+  decide: (order, party) =>
+    party === 'staff' && order.state === 'claim_open' && order.claimType === 'handover_unclear',
 }
 
 export function mayAct(act: OrderAct, order: OrderRow, party: Party): boolean {

@@ -2,7 +2,11 @@ import { Router } from 'express'
 
 import { on } from '@/server/http/on'
 import { acceptOrder } from '@/server/orders/accept-order'
+import { cancelOrder } from '@/server/orders/cancel-order'
+import { chooseSlot } from '@/server/orders/choose-slot'
 import { confirmGood } from '@/server/orders/confirm-good'
+import { contestNoShow } from '@/server/orders/contest-no-show'
+import { decideOrder } from '@/server/orders/decide-order'
 import { declineOrder } from '@/server/orders/decline-order'
 import { handOver } from '@/server/orders/hand-over'
 import { leaveReservation } from '@/server/orders/leave-reservation'
@@ -10,8 +14,10 @@ import { listOrders } from '@/server/orders/list-orders'
 import { markReady } from '@/server/orders/mark-ready'
 import { payBalance } from '@/server/orders/pay-balance'
 import { payDeposit } from '@/server/orders/pay-deposit'
+import { reportNoShow } from '@/server/orders/report-no-show'
 import { showOrder } from '@/server/orders/show-order'
 import { reserveBatch } from '@/server/orders/reserve-batch'
+import { stopOrder } from '@/server/orders/stop-order'
 import { withdrawRequest } from '@/server/orders/withdraw-request'
 import * as orders from '@/shared/contracts/orders'
 
@@ -44,5 +50,29 @@ export function orderRoutes(): Router {
     orders.handOver,
   )(({ caller, params, body, key }) => handOver(caller, params.orderId, { ...body, commandId: key }))
   on(router, orders.confirmGood)(({ caller, params, key }) => confirmGood(caller, params.orderId, key))
+  on(
+    router,
+    orders.cancelOrder,
+  )(({ caller, params, body, key }) => cancelOrder(caller, params.orderId, { ...body, commandId: key }))
+  on(
+    router,
+    orders.chooseSlot,
+  )(({ caller, params, body, key }) => chooseSlot(caller, params.orderId, { ...body, commandId: key }))
+  on(
+    router,
+    orders.reportNoShow,
+  )(({ caller, params, body, key }) => reportNoShow(caller, params.orderId, { ...body, commandId: key }))
+  on(
+    router,
+    orders.contestNoShow,
+  )(({ caller, params, body, key }) => contestNoShow(caller, params.orderId, { ...body, commandId: key }))
+  on(
+    router,
+    orders.stopOrder,
+  )(({ caller, params, body, key }) => stopOrder(caller, params.orderId, { ...body, commandId: key }))
+  on(
+    router,
+    orders.decideOrder,
+  )(({ caller, params, body, key }) => decideOrder(caller, params.orderId, { ...body, commandId: key }))
   return router
 }

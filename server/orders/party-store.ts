@@ -3,6 +3,7 @@ import { eq, inArray, sql } from 'drizzle-orm'
 import { db, type Tx } from '@/db/client'
 import { user } from '@/db/schema/auth'
 import { listing, pickupWindow } from '@/db/schema/listings'
+import { memberProfile } from '@/db/schema/members'
 import { seller } from '@/db/schema/sellers'
 
 export type SellerRow = typeof seller.$inferSelect
@@ -67,6 +68,22 @@ export async function markAnswerMissed(tx: Tx, sellerId: number): Promise<void> 
     .update(seller)
     .set({ answersMissed: sql`${seller.answersMissed} + 1` })
     .where(eq(seller.id, sellerId))
+}
+
+/** A day promised and missed. */
+export async function markDayMissed(tx: Tx, sellerId: number): Promise<void> {
+  await tx
+    .update(seller)
+    .set({ daysMissed: sql`${seller.daysMissed} + 1` })
+    .where(eq(seller.id, sellerId))
+}
+
+/** A buyer who did not come. */
+export async function markNoShow(tx: Tx, memberId: string, at: Date): Promise<void> {
+  await tx
+    .insert(memberProfile)
+    .values({ memberId, noShows: 1, updatedAt: at })
+    .onDuplicateKeyUpdate({ set: { noShows: sql`${memberProfile.noShows} + 1` } })
 }
 
 export async function markAnswered(tx: Tx, sellerId: number): Promise<void> {

@@ -2,6 +2,7 @@ import { now } from '@/server/clock'
 import { balancesOf, type LedgerAccount } from '@/server/money/ledger-store'
 import { listPaymentsOf, type PaymentRow } from '@/server/money/payment-store'
 import { describeListing } from '@/server/listings/describe-listing'
+import { freeCancelUntil } from '@/server/orders/free-cancel-until'
 import { actsOf, mayMeet, maySeeCode, type Party } from '@/server/orders/order-policy'
 import { listEventsOf, readEvidence, type OrderEventRow, type OrderRow } from '@/server/orders/order-store'
 import type { OrderSeen } from '@/server/orders/party-of'
@@ -71,6 +72,11 @@ function payUrlOf(order: OrderRow, party: Party, payments: PaymentRow[]): string
   return payments.findLast((one) => one.purpose === purpose && one.status === 'open')?.payUrl ?? undefined
 }
 
+function freedom(order: OrderRow, terms: ListingBody): Pick<ShownOrder, 'freeCancelUntil'> {
+  const until = freeCancelUntil(order, terms)
+  return until ? { freeCancelUntil: until.toISOString() } : {}
+}
+
 function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrder {
   const { terms, seller } = facts
   const described = describeListing(terms)
@@ -101,6 +107,15 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
     arrivalPromise: promiseWords(terms.promise),
     ...(order.clockAt && order.clockEdge
       ? { clock: { at: order.clockAt.toISOString(), edge: order.clockEdge } }
+      : {}),
+    ...freedom(order, facts.terms),
+    ...(order.noShowBy && order.noShowAt
+      ? {
+          noShow: {
+            by: order.noShowBy === 'buyer' ? 'buyer' : 'seller',
+            contestUntil: (order.clockAt ?? order.noShowAt).toISOString(),
+          },
+        }
       : {}),
     events: facts.events.map((event) => ({
       edge: event.edge,

@@ -15,7 +15,11 @@ export interface Endpoints {
   listReviews: typeof import('@/shared/contracts/moderation').listReviews
   readReview: typeof import('@/shared/contracts/moderation').readReview
   acceptOrder: typeof import('@/shared/contracts/orders').acceptOrder
+  cancelOrder: typeof import('@/shared/contracts/orders').cancelOrder
+  chooseSlot: typeof import('@/shared/contracts/orders').chooseSlot
   confirmGood: typeof import('@/shared/contracts/orders').confirmGood
+  contestNoShow: typeof import('@/shared/contracts/orders').contestNoShow
+  decideOrder: typeof import('@/shared/contracts/orders').decideOrder
   declineOrder: typeof import('@/shared/contracts/orders').declineOrder
   handOver: typeof import('@/shared/contracts/orders').handOver
   leaveReservation: typeof import('@/shared/contracts/orders').leaveReservation
@@ -24,7 +28,9 @@ export interface Endpoints {
   payBalance: typeof import('@/shared/contracts/orders').payBalance
   payDeposit: typeof import('@/shared/contracts/orders').payDeposit
   readOrder: typeof import('@/shared/contracts/orders').readOrder
+  reportNoShow: typeof import('@/shared/contracts/orders').reportNoShow
   reserveBatch: typeof import('@/shared/contracts/orders').reserveBatch
+  stopOrder: typeof import('@/shared/contracts/orders').stopOrder
   withdrawRequest: typeof import('@/shared/contracts/orders').withdrawRequest
   uploadPhoto: typeof import('@/shared/contracts/photos').uploadPhoto
   findPlaces: typeof import('@/shared/contracts/places').findPlaces
@@ -54,7 +60,11 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   listReviews: ['GET', '/moderation/listings', false],
   readReview: ['GET', '/moderation/listings/:versionId', false],
   acceptOrder: ['POST', '/orders/:orderId/acceptance', false],
+  cancelOrder: ['POST', '/orders/:orderId/cancellation', false],
+  chooseSlot: ['POST', '/orders/:orderId/slot', false],
   confirmGood: ['POST', '/orders/:orderId/confirmation', false],
+  contestNoShow: ['POST', '/orders/:orderId/contest', false],
+  decideOrder: ['POST', '/moderation/orders/:orderId/decision', false],
   declineOrder: ['POST', '/orders/:orderId/refusal', false],
   handOver: ['POST', '/orders/:orderId/hand-over', false],
   leaveReservation: ['POST', '/orders/:orderId/departure', false],
@@ -63,7 +73,9 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   payBalance: ['POST', '/orders/:orderId/balance-payment', false],
   payDeposit: ['POST', '/orders/:orderId/deposit-payment', false],
   readOrder: ['GET', '/orders/:orderId', false],
+  reportNoShow: ['POST', '/orders/:orderId/no-show', false],
   reserveBatch: ['POST', '/listings/:listingId/orders', false],
+  stopOrder: ['POST', '/moderation/orders/:orderId/stop', false],
   withdrawRequest: ['POST', '/orders/:orderId/withdrawal', false],
   uploadPhoto: ['POST', '/photos', true],
   findPlaces: ['GET', '/places', false],

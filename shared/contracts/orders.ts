@@ -15,6 +15,12 @@ export const orderActs = [
   'pay-balance',
   'hand-over',
   'confirm-good',
+  'choose-slot',
+  'cancel',
+  'report-no-show',
+  'contest',
+  'stop',
+  'decide',
 ] as const
 
 const orderParams = z.object({ orderId: publicIdText })
@@ -70,6 +76,9 @@ export const shownOrder = z.object({
   countHandedOver: z.int().optional(),
   arrivalPromise: z.string(),
   clock: z.object({ at: instantText, edge: z.string() }).optional(),
+  /** Until when the buyer may cancel and get everything back; absent where that is always so. */
+  freeCancelUntil: instantText.optional(),
+  noShow: z.object({ by: z.enum(['buyer', 'seller']), contestUntil: instantText }).optional(),
   events: z.array(
     z.object({ edge: z.string(), to: z.enum(orderStates), actor: z.string(), at: instantText }),
   ),
@@ -202,6 +211,86 @@ export const handOver = endpoint({
     .object({
       code: z.string().regex(/^\d{6}$/, 'Six digits, from the buyer’s screen.'),
       count: z.int({ message: 'The count you both saw.' }).min(1, 'The count you both saw.').max(1_000_000),
+    })
+    .strict(),
+  reply: shownOrder,
+})
+
+export const sellerCancelReasons = ['die-off', 'failed-spawn', 'short-count', 'other'] as const
+
+/** Either party ends the order: a buyer for any reason, a seller with one. */
+export const cancelOrder = endpoint({
+  method: 'POST',
+  path: '/orders/:orderId/cancellation',
+  auth: 'member',
+  idempotent: true,
+  summary: 'End the order; what goes back is shown before',
+  params: orderParams,
+  body: z.object({ reason: z.enum(sellerCancelReasons).optional(), note: line(300).optional() }).strict(),
+  reply: shownOrder,
+})
+
+export const chooseSlot = endpoint({
+  method: 'POST',
+  path: '/orders/:orderId/slot',
+  auth: 'member',
+  idempotent: true,
+  summary: 'Agree on a pickup window, or move to another one',
+  params: orderParams,
+  body: z.object({ windowId: publicIdText }).strict(),
+  reply: shownOrder,
+})
+
+export const reportNoShow = endpoint({
+  method: 'POST',
+  path: '/orders/:orderId/no-show',
+  auth: 'member',
+  idempotent: true,
+  summary: 'Say that the other party did not come; they have a day to object',
+  params: orderParams,
+  body: z.object({ note: line(300).optional() }).strict(),
+  reply: shownOrder,
+})
+
+export const contestNoShow = endpoint({
+  method: 'POST',
+  path: '/orders/:orderId/contest',
+  auth: 'member',
+  idempotent: true,
+  summary: 'Object to a reported no-show: a moderator looks at it',
+  params: orderParams,
+  body: z.object({ note: line(300).min(10, 'Say in a sentence what happened.') }).strict(),
+  reply: shownOrder,
+})
+
+export const stopOrder = endpoint({
+  method: 'POST',
+  path: '/moderation/orders/:orderId/stop',
+  auth: 'moderator',
+  idempotent: true,
+  summary: 'Stop an order: everything goes back to the buyer',
+  params: orderParams,
+  body: z
+    .object({
+      cause: z.enum(['prohibited-species', 'recall', 'fraud', 'seller-gone']),
+      animals: z.enum(['free', 'frozen']),
+      note: line(300).min(10, 'Say in a sentence why; both parties read it.'),
+    })
+    .strict(),
+  reply: shownOrder,
+})
+
+export const decideOrder = endpoint({
+  method: 'POST',
+  path: '/moderation/orders/:orderId/decision',
+  auth: 'moderator',
+  idempotent: true,
+  summary: 'Decide an unclear hand-over',
+  params: orderParams,
+  body: z
+    .object({
+      outcome: z.enum(['handed-over', 'buyer-absent', 'seller-absent']),
+      note: line(300).min(10, 'Say in a sentence why; both parties read it.'),
     })
     .strict(),
   reply: shownOrder,

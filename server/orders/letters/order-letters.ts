@@ -1,4 +1,5 @@
 import type { Letter } from '@/server/mail/letter'
+import { endings } from '@/server/orders/letters/ended-letters'
 import { orderTag, orderUrl, slotText, type LetterFacts } from '@/server/orders/letters/letter-facts'
 import { promiseWords } from '@/server/orders/promise-words'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
@@ -189,20 +190,6 @@ const settled: Writer = (facts) => {
   ]
 }
 
-const ended =
-  (subject: string, why: string): Writer =>
-  (facts) => [
-    toBuyer(facts, {
-      subject,
-      heading: subject,
-      blocks: [
-        orderTag(facts),
-        say(why),
-        { kind: 'button', label: 'Look for others nearby', url: facts.origin },
-      ],
-    }),
-  ]
-
 const withdrawn: Writer = (facts) => [
   toSeller(facts, {
     subject: 'A request was taken back',
@@ -213,24 +200,33 @@ const withdrawn: Writer = (facts) => [
 
 /** The mails of each edge; an edge without a row sends none. */
 export const orderLetters: Partial<Record<EdgeId, Writer>> = {
-  E02: ended(
-    'Your hold has ended',
-    'The 15 minutes passed without payment, so the animals are free again. Nothing was taken from your card.',
-  ),
+  E02: endings.holdOver,
   E04: requested,
   E05: accepted,
   E07: accepted,
-  E08: ended(
-    'The seller had to decline',
-    'Nothing was taken: the earmarked deposit has been let go, and your bank shows it within a few days.',
-  ),
-  E09: ended(
-    'The seller did not answer in time',
-    'Nothing was taken: the earmarked deposit has been let go. We are sorry for the wait.',
-  ),
+  E08: endings.declined,
+  E09: endings.silent,
   E10: withdrawn,
   E14: scheduled,
+  E15: endings.buyerCancelled,
+  E16: endings.sellerCancelled,
+  E17: endings.neverScheduled,
   E22: ready,
+  E23: endings.balanceUnpaid,
+  E24: endings.buyerCancelled,
+  E25: endings.sellerCancelled,
+  E26: endings.dayMissed,
+  E28: scheduled,
   E30: handedOver,
+  E31: endings.buyerAbsent,
+  E32: endings.sellerAbsent,
+  E33: endings.unclear,
   E40: settled,
+  E41: endings.decided,
+  E43: endings.stopped,
+  E45: endings.stopped,
+  E46: endings.stopped,
+  E48: endings.stopped,
+  E55: endings.sellerCancelled,
+  E56: endings.buyerCancelled,
 }

@@ -16,6 +16,7 @@ const facts: ClockFacts = {
   isBalancePaid: false,
   claimWindowHours: 24,
   promisedDeliveryMs: null,
+  noShow: null,
 }
 
 describe('the clock of an order', () => {
@@ -35,6 +36,12 @@ describe('the clock of an order', () => {
   it('waits for the day itself once the balance is paid', () => {
     const paid = nextClock({ ...facts, balanceDue: 'before', isBalancePaid: true })
     expect(paid).toEqual({ atMs: (201 + 72) * HOUR_MS, edge: 'E26' })
+  })
+
+  it('leaves a day to object to a reported no-show', () => {
+    const noShow = { by: 'seller', sinceMs: 5 } as const
+    expect(nextClock({ ...facts, state: 'ready', noShow })).toEqual({ atMs: 5 + 24 * HOUR_MS, edge: 'E31' })
+    expect(nextClock({ ...facts, state: 'ready', noShow: { ...noShow, by: 'buyer' } })?.edge).toBe('E32')
   })
 
   it('gives produce 12 hours for the answer and animals 48', () => {

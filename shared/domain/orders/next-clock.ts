@@ -17,6 +17,8 @@ export interface ClockFacts {
   isBalancePaid: boolean
   claimWindowHours: number
   promisedDeliveryMs: number | null
+  /** A reported no-show that is not contested yet. */
+  noShow: { by: 'buyer' | 'seller'; sinceMs: number } | null
 }
 
 export interface NextClock {
@@ -54,6 +56,11 @@ export function nextClock(facts: ClockFacts): NextClock | null {
     case 'weather_hold':
       return { atMs: sinceMs + clockMs('weatherConsent', category), edge: 'E21' }
     case 'ready':
+      if (facts.noShow) {
+        // The one who did not come is not the one who says so.
+        const edge = facts.noShow.by === 'seller' ? 'E31' : 'E32'
+        return { atMs: facts.noShow.sinceMs + clockMs('noShowContest', category), edge }
+      }
       return { atMs: (facts.slotEndMs ?? sinceMs) + clockMs('missedDay', category), edge: 'E33' }
     case 'dispatched':
       return { atMs: (facts.promisedDeliveryMs ?? sinceMs) + clockMs('lateBox', category), edge: 'E36' }

@@ -1,0 +1,116 @@
+import type { Letter } from '@/server/mail/letter'
+import { orderTag, orderUrl, type LetterFacts } from '@/server/orders/letters/letter-facts'
+
+type Writer = (facts: LetterFacts) => Letter[]
+
+interface Ending {
+  subject: string
+  buyer: string
+  seller?: string
+}
+
+/** How an order ended, to the buyer and, where there is something to know, to the seller. */
+export function ended({ subject, buyer, seller }: Ending): Writer {
+  return (facts) => [
+    {
+      to: facts.buyer,
+      subject,
+      heading: subject,
+      blocks: [
+        orderTag(facts),
+        { kind: 'text', text: buyer },
+        { kind: 'button', label: 'See the order', url: orderUrl(facts) },
+        { kind: 'text', text: `Others nearby: ${facts.origin}` },
+      ],
+    },
+    ...(seller
+      ? [
+          {
+            to: facts.sellerPerson,
+            subject,
+            heading: subject,
+            blocks: [
+              orderTag(facts),
+              { kind: 'text' as const, text: seller },
+              { kind: 'button' as const, label: 'See the order', url: orderUrl(facts) },
+            ],
+          },
+        ]
+      : []),
+  ]
+}
+
+const BANK = 'Your bank shows it within a few days.'
+const ALL_BACK = `Every cent you paid is on its way back to your card. ${BANK}`
+
+export const endings = {
+  holdOver: ended({
+    subject: 'Your hold has ended',
+    buyer:
+      'The 15 minutes passed without payment, so the animals are free again. Nothing was taken from your card.',
+  }),
+  declined: ended({
+    subject: 'The seller had to decline',
+    buyer: `Nothing was taken: the earmarked deposit has been let go. ${BANK}`,
+  }),
+  silent: ended({
+    subject: 'The seller did not answer in time',
+    buyer: `Nothing was taken: the earmarked deposit has been let go. ${BANK} We are sorry for the wait.`,
+    seller:
+      'The time to answer passed, so the request has ended and the animals are free again. It counts in your response record.',
+  }),
+  buyerCancelled: ended({
+    subject: 'The order was cancelled',
+    buyer: 'You cancelled the order. The order page shows what goes back to your card.',
+    seller:
+      'The buyer cancelled. The animals are free again; what the terms let you keep is shown with the order.',
+  }),
+  sellerCancelled: ended({ subject: 'The seller cancelled your order', buyer: `We are sorry. ${ALL_BACK}` }),
+  neverScheduled: ended({
+    subject: 'No day was agreed',
+    buyer: `The time to agree on a day has passed. ${ALL_BACK}`,
+    seller:
+      'No day was agreed, so the order has ended and the buyer has everything back. The animals are free again.',
+  }),
+  balanceUnpaid: ended({
+    subject: 'The balance was not paid',
+    buyer:
+      'The balance did not come in time, so the order has ended. The deposit is kept by the terms you agreed to; nothing else is charged.',
+    seller:
+      'The balance did not come. The deposit is yours, less our fee on it, and the animals are free again.',
+  }),
+  dayMissed: ended({
+    subject: 'The day passed without your animals',
+    buyer: `The seller did not have them ready. ${ALL_BACK}`,
+    seller:
+      'The day passed and the order was not marked ready, so the buyer has everything back. It counts in your record.',
+  }),
+  buyerAbsent: ended({
+    subject: 'The pickup was missed',
+    buyer:
+      'Nobody came and nobody objected. The deposit is kept by the terms; everything above it goes back to your card.',
+    seller: 'The deposit is yours, less our fee on it. The animals are free again.',
+  }),
+  sellerAbsent: ended({
+    subject: 'The seller was not there',
+    buyer: ALL_BACK,
+    seller: 'The buyer waited and nobody objected, so they have everything back. It counts in your record.',
+  }),
+  stopped: ended({
+    subject: 'We stopped this order',
+    buyer: `Our moderators stopped the order; the reason stands with it. ${ALL_BACK}`,
+    seller: 'Our moderators stopped the order; the reason stands with it. The buyer has everything back.',
+  }),
+  unclear: ended({
+    subject: 'We are looking at your hand-over',
+    buyer:
+      'The two of you do not agree on what happened, or nobody said. A moderator decides within about five days; your money stays held until then.',
+    seller:
+      'The two of you do not agree on what happened, or nobody said. A moderator decides within about five days; the money stays held until then.',
+  }),
+  decided: ended({
+    subject: 'Your hand-over was decided',
+    buyer: 'A moderator has decided; the reason and what goes where stand with the order.',
+    seller: 'A moderator has decided; the reason and what goes where stand with the order.',
+  }),
+} satisfies Record<string, Writer>

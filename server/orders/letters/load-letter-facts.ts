@@ -1,0 +1,18 @@
+import type { Tx } from '@/db/transaction'
+import type { LetterFacts } from '@/server/orders/letters/letter-facts'
+import { orderSettings } from '@/server/orders/order-settings'
+import type { OrderRow } from '@/server/orders/order-store'
+import { readPeople, readSellerById } from '@/server/orders/party-store'
+import { readTerms } from '@/server/orders/terms-store'
+
+/** Everything a mail about this order may say; null when a party has left. */
+export async function loadLetterFacts(tx: Tx, order: OrderRow): Promise<LetterFacts | null> {
+  const seller = await readSellerById(order.sellerId, tx)
+  if (!seller) throw new Error(`seller ${order.sellerId} is gone`)
+  const people = await readPeople([order.buyerId, seller.memberId], tx)
+  const buyer = people.get(order.buyerId)
+  const sellerPerson = people.get(seller.memberId)
+  if (!buyer || !sellerPerson) return null
+  const terms = await readTerms(tx, order.listingVersionId)
+  return { order, terms, seller, buyer, sellerPerson, origin: orderSettings().origin }
+}
