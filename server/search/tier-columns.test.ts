@@ -74,7 +74,7 @@ describe('prices in the search table', () => {
           ],
         }),
       ).smallPrice,
-    ).toBe(250)
+    ).toBe(300)
   })
 
   it('refuses a listing without a price or with a ninth', () => {

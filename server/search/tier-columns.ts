@@ -5,11 +5,14 @@ export const MOST_COUNT = 16_777_215
 const COLUMN_TIERS = 4
 export const MORE_TIERS = { most: 4, countDigits: 7, centsDigits: 8 } as const
 
-/** Orders up to this size are everyday ones; the walk by price serves them. Index: category code. */
-const EVERYDAY_ORDER: readonly number[] = [0, 99, 9, 9, 9]
+/**
+ * Orders up to this size are everyday ones; the walk by price serves them. Prices of fish first fall at a hundred or
+ * so, of the rest after the first piece. Index: category code.
+ */
+const EVERYDAY_ORDER: readonly number[] = [0, 99, 1, 1, 1]
 
 /** The largest count whose price the walk by price may be asked for. */
-export const everydayOrder = (categoryCode: number): number => EVERYDAY_ORDER[categoryCode] ?? 9
+export const everydayOrder = (categoryCode: number): number => EVERYDAY_ORDER[categoryCode] ?? 1
 
 /** Cents for one at that count. The first tier also covers smaller counts. */
 export function unitCentsAt(tiers: readonly SearchTier[], count: number): number {

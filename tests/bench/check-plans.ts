@@ -43,7 +43,7 @@ function expectations(): Expected[] {
     })),
     {
       name: 'walk by price',
-      sql: priceStepSql({ ...everyWish, sort: 'cheapest' }, foot, 32),
+      sql: priceStepSql({ ...everyWish, sort: 'cheapest' }, foot, { rows: 32 }),
       plan: { key: 'k_price', access: 'range', covering: true, sorted: false },
     },
     {

@@ -61,7 +61,10 @@ function makePrices(made: MadeListings, at: number, chance: Chances): void {
   const animals = made.category[at] === 1
   const least = animals ? chance.pick([1, 1, 5, 10, 25, 25, 50, 100]) : 1
   const base = Math.max(20, Math.round((animals ? 110 : 900) * chance.lognormal(0.7)))
-  const usual = animals ? [50, 100, 250, 500, 1000, 2500, 5000] : [3, 5, 10, 20, 40, 80, 160]
+  const hundreds = chance.yes(0.7)
+    ? [100, 250, 500, 1000, 2500, 5000, 9000]
+    : [50, 100, 250, 500, 1000, 2500, 5000]
+  const usual = animals ? hundreds : [3, 5, 10, 20, 40, 80, 160]
   const steps = chance.yes(0.02) ? 8 : chance.pick([1, 1, 2, 2, 3, 3, 4])
   const tiers = [{ fromCount: least, unitCents: base }]
   let cents = base
