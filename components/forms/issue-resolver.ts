@@ -9,12 +9,14 @@ interface Options {
   lists: readonly string[]
   /** Fields whose one control answers for all that is inside them. */
   whole?: readonly string[]
+  /** What to ask where the contract only says that something is missing; rows are named without their number. */
+  asks?: Readonly<Record<string, string>>
 }
 
 /** Makes a form's resolver from a check that answers with parser issues whose paths are the form's own names. */
 export function issueResolver<T extends FieldValues>(
   check: (typing: T) => readonly z.core.$ZodIssue[],
-  { lists, whole = [] }: Options,
+  { lists, whole = [], asks = {} }: Options,
 ): Resolver<T> {
   return (typing) => {
     const issues = check(typing)
@@ -27,7 +29,7 @@ export function issueResolver<T extends FieldValues>(
       const name = lists.includes(path) ? `${path}.root` : path
       if (seen.has(name)) continue // one sentence a field; the first is the nearest
       seen.add(name)
-      set(errors, name, { type: issue.code, message: issueSentence(issue) })
+      set(errors, name, { type: issue.code, message: issueSentence(issue, asks[path.replace(/\.\d+/g, '')]) })
     }
     return { values: {}, errors: errors as FieldErrors<T> }
   }

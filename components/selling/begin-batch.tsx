@@ -40,7 +40,7 @@ function BeginChoices() {
   }
   if (listings.isPending) return <TagSkeleton label="Loading your listings" count={1} />
   const earlier = (listings.data?.pages[0]?.items ?? [])
-    .filter((own) => own.liveVersion !== undefined)
+    .filter((own) => own.liveVersion !== undefined || own.review !== undefined)
     .slice(0, mostCopies)
   return (
     <View style={styles.frame}>
@@ -75,7 +75,7 @@ function BeginChoices() {
       ) : null}
       <Card>
         <Heading level={2} size="lead">
-          {earlier.length > 0 ? 'Something else' : 'Your first batch'}
+          {earlier.length > 0 ? 'Something else' : 'A new batch'}
         </Heading>
         <Text tint="muted" size="note">
           Have at hand: the count, a photo with a ruler beside the fish, and a water test not older than 14

@@ -1,13 +1,12 @@
 import { ownBadges } from './own-state-words'
 
 import { pickupDay } from '@/components/listings/pickup-words'
-import { stageName } from '@/components/listings/stage-words'
 import { photoUrl } from '@/hooks/api'
 import type { OwnListing } from '@/shared/contracts/listings'
 import { printCount } from '@/shared/units/count'
 import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
-import { printTemperature } from '@/shared/units/temperature'
+import { printBothTemperatures } from '@/shared/units/temperature'
 import type { UnitSystem } from '@/shared/units/unit-system'
 
 import type { TagFacts } from '@/components/listings/tag-facts'
@@ -30,10 +29,9 @@ export function ownFacts(own: OwnListing, units: UnitSystem): TagFacts {
     title: own.title,
     sizeText:
       lo && hi && hi >= lo ? printLengthRange({ minCm: lo / 10, maxCm: hi / 10 }, units) : 'size to come',
-    stage: typeof draft.stage === 'string' ? stageName(draft.stage) : undefined,
     countText:
       own.liveVersion === undefined ? plannedCount(draft.countOnHand) : `${printCount(stock.free)} free`,
-    waterText: waterC === undefined ? undefined : printTemperature(waterC, units),
+    waterText: waterC === undefined ? undefined : printBothTemperatures(waterC, units),
     priceText: cents === undefined ? '$ ?' : printCents(cents),
     priceUnitText: 'a fish',
     placeText: orderWords(own.openOrders),

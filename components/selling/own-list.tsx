@@ -7,7 +7,6 @@ import { ReviewOutcome } from './review-outcome'
 import { Tag } from '@/components/listings/tag'
 import { TagSkeleton } from '@/components/listings/tag-skeleton'
 import { Button } from '@/components/ui/button'
-import { ButtonLink } from '@/components/ui/button-link'
 import { EmptyState } from '@/components/ui/empty-state'
 import { ErrorState } from '@/components/ui/error-state'
 import { space } from '@/constants/theme'
@@ -35,7 +34,6 @@ export function OwnList() {
       <EmptyState
         title="Nothing listed yet"
         body="A batch takes about five minutes: have the count, a ruler photo and a water test at hand."
-        action={<ButtonLink href="/sell/listings/new" icon="plus" label="List a batch" />}
       />
     )
   }

@@ -10,8 +10,10 @@ import { Heading } from '@/components/ui/heading'
 import { Link } from '@/components/ui/link'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
+import { useBreakpoint } from '@/hooks/use-breakpoint'
 
 export function SellHome() {
+  const isPhone = useBreakpoint() === 'phone'
   return (
     <SellerGate>
       {(farm, me) => (
@@ -20,7 +22,9 @@ export function SellHome() {
           <PayoutsBanner payouts={farm.payouts} />
           <View style={styles.head}>
             <View style={styles.farm}>
-              <Heading level={2}>{farm.farmName}</Heading>
+              <Heading level={2} size={isPhone ? 'lead' : 'title'}>
+                {farm.farmName}
+              </Heading>
               <Text size="note" tint="muted">
                 {`${farm.publicPlace.label} · `}
                 <Link href="/sell/farm" size="note">
@@ -28,7 +32,12 @@ export function SellHome() {
                 </Link>
               </Text>
             </View>
-            <ButtonLink href="/sell/listings/new" icon="plus" label="List a batch" />
+            <ButtonLink
+              href="/sell/listings/new"
+              icon="plus"
+              label="List a batch"
+              style={isPhone ? styles.whole : null}
+            />
           </View>
           <OwnList />
         </View>
@@ -41,4 +50,5 @@ const styles = StyleSheet.create({
   home: { gap: space.lg },
   head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.lg },
   farm: { flexGrow: 1, flexShrink: 1, minWidth: 220, gap: 2 },
+  whole: { width: '100%' },
 })

@@ -1,6 +1,7 @@
 import { useRouter } from 'expo-router'
 import { FormProvider, useForm } from 'react-hook-form'
 
+import { batchAsks } from './batch-asks'
 import { batchBlank, batchDefaults } from './batch-defaults'
 import { batchIssues } from './batch-issues'
 import { draftFromTyping } from './draft-from-typing'
@@ -48,6 +49,7 @@ export function BatchForm(props: BatchFormProps) {
     resolver: issueResolver<BatchTyping>((typing) => batchIssues(readDraft(typing)), {
       lists: batchLists,
       whole: ['statesServed'],
+      asks: batchAsks,
     }),
     mode: 'onTouched',
     shouldFocusError: false,

@@ -11,11 +11,13 @@ interface Options {
 }
 
 const answers: Record<string, boolean> = { yes: true, no: false }
+// Texts the contract asks for in words of its own: sent empty, so that those words come back.
+const askedTexts = ['words', 'health.treatments', 'health.lastLosses', 'licenceNumbers', 'promise.evidence']
 
 /** The form's words as the draft that is stored: figures inside units; words that are no figure stay as typed. */
 export function draftFromTyping(typing: BatchTyping, { was, units }: Options): ListingDraft {
   const draft = unwind({ typed: typing, was, path: '', units }) as ListingDraft
-  return { category: 'fish', ...draft, words: typing.words, statesServed: typing.statesServed }
+  return { category: 'fish', ...draft }
 }
 
 interface Layer {
@@ -42,7 +44,7 @@ function unwind({ typed, was, path, units }: Layer): unknown {
 
 function unwindText({ typed, was, path, units }: Layer & { typed: string }): unknown {
   const text = typed.trim()
-  if (text === '') return undefined
+  if (text === '') return askedTexts.includes(path) ? '' : undefined
   if (path === 'wildCaught') return answers[text]
   const figure = batchFigures[path]
   if (!figure) return typed

@@ -1,11 +1,13 @@
 import { useState } from 'react'
 import { useFormContext } from 'react-hook-form'
+import { StyleSheet, View } from 'react-native'
 
 import { checkAgain } from './check-again'
 
 import { BoundText } from '@/components/forms/bound/bound-text'
 import { figures } from '@/components/forms/figure'
 import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
 import { parseLengthCm, printLength } from '@/shared/units/length'
 
 import type { BatchTyping } from './batch-typing'
@@ -42,13 +44,15 @@ export function LengthField({ name, label, placeholder, units }: Props) {
     if (kept !== text) form.setValue(name, kept, { shouldDirty: true, shouldValidate: true })
   }
   return (
-    <>
+    <View style={styles.field}>
       <BoundText<BatchTyping> name={name} label={label} placeholder={placeholder} isFigure onLeave={settle} />
       {note ? (
         <Text size="note" tint="muted" role="status">
           {note}
         </Text>
       ) : null}
-    </>
+    </View>
   )
 }
+
+const styles = StyleSheet.create({ field: { gap: space.xs } })

@@ -1,13 +1,13 @@
 import { figures } from '@/components/forms/figure'
+import { stageName } from '@/components/listings/stage-words'
 import { printDay } from '@/components/selling/day-text'
 import { photoUrl } from '@/hooks/api'
 import { listingTitle } from '@/shared/domain/listings/listing-title'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
-import { stages } from '@/shared/domain/species/stages.facts'
 import { printCount } from '@/shared/units/count'
 import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
-import { printTemperature } from '@/shared/units/temperature'
+import { printBothTemperatures } from '@/shared/units/temperature'
 
 import type { BatchTyping } from './batch-typing'
 import type { TagFacts } from '@/components/listings/tag-facts'
@@ -32,9 +32,9 @@ export function previewFacts(typing: BatchTyping, { units, placeText }: Options)
     title: taxon ? listingTitle({ ...typing, strain: typing.strain || undefined }) : 'Your batch',
     scientificName: taxon?.scientificName,
     sizeText: sizeText(typing, units),
-    stage: stages.find((stage) => stage.id === typing.stage)?.name.toLowerCase(),
-    countText: count === null ? 'how many?' : printCount(count),
-    waterText: waterC === null ? undefined : printTemperature(waterC, units),
+    stage: stageName(typing.stage),
+    countText: count === null ? 'how many?' : `${printCount(count)} left`,
+    waterText: waterC === null ? undefined : printBothTemperatures(waterC, units),
     ...priceText(typing),
     placeText,
     dayText: day ? `Pickup ${printDay(day)}` : undefined,

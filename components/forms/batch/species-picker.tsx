@@ -1,11 +1,13 @@
 import { useState } from 'react'
 import { useController } from 'react-hook-form'
+import { StyleSheet, View } from 'react-native'
 
 import { findListableTaxa, whyNotListed } from './find-listable-taxa'
 
 import { fieldIdOf } from '@/components/forms/field-id'
 import { Combobox } from '@/components/ui/combobox'
 import { Text } from '@/components/ui/text'
+import { space } from '@/constants/theme'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 
 import type { BatchTyping } from './batch-typing'
@@ -21,7 +23,7 @@ export function SpeciesPicker() {
     detail: taxon.scientificName,
   }))
   return (
-    <>
+    <View style={styles.field}>
       <Combobox
         label="Species"
         hint="Common or scientific name, then pick it from the list."
@@ -42,7 +44,7 @@ export function SpeciesPicker() {
         placeholder="Bluegill"
       />
       {chosen ? <ChosenSpecies taxonId={chosen.id} /> : null}
-    </>
+    </View>
   )
 }
 
@@ -58,3 +60,5 @@ function ChosenSpecies({ taxonId }: { taxonId: string }) {
     </Text>
   )
 }
+
+const styles = StyleSheet.create({ field: { gap: space.xs } })

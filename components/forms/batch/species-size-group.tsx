@@ -1,4 +1,5 @@
 import { useWatch } from 'react-hook-form'
+import { StyleSheet, View } from 'react-native'
 
 import { LengthField } from './length-field'
 import { SpeciesPicker } from './species-picker'
@@ -9,6 +10,7 @@ import { BoundChoice } from '@/components/forms/bound/bound-choice'
 import { BoundDay } from '@/components/forms/bound/bound-day'
 import { BoundText } from '@/components/forms/bound/bound-text'
 import { FieldCell, FieldRow, FormGroup } from '@/components/forms/form-group'
+import { space } from '@/constants/theme'
 import { stages } from '@/shared/domain/species/stages.facts'
 
 import type { BatchTyping } from './batch-typing'
@@ -45,14 +47,16 @@ export function SpeciesSizeGroup({ units }: { units: UnitSystem }) {
           />
         </FieldCell>
       </FieldRow>
-      <BoundChoice<BatchTyping>
-        name="stage"
-        label="Stage"
-        choices={stageChoices}
-        isFolded
-        emptyLabel="Choose a stage"
-      />
-      <StageNote />
+      <View style={styles.field}>
+        <BoundChoice<BatchTyping>
+          name="stage"
+          label="Stage"
+          choices={stageChoices}
+          isFolded
+          emptyLabel="Choose a stage"
+        />
+        <StageNote />
+      </View>
       <BoundCheck<BatchTyping>
         name="ungraded"
         label="Ungraded"
@@ -85,3 +89,5 @@ export function SpeciesSizeGroup({ units }: { units: UnitSystem }) {
     </FormGroup>
   )
 }
+
+const styles = StyleSheet.create({ field: { gap: space.xs } })

@@ -29,16 +29,16 @@ export function WindowRow({ at, onRepeat, onRemove }: Props) {
         </Text>
       ) : null}
       <FieldRow>
-        <FieldCell minPx={168}>
+        <FieldCell minPx={160}>
           <BoundDay<BatchTyping> name={`windows.${at}.day`} label="Day" />
         </FieldCell>
-        <FieldCell minPx={124}>
+        <FieldCell minPx={120}>
           <BoundDay<BatchTyping> name={`windows.${at}.from`} label="From" isTime />
         </FieldCell>
-        <FieldCell minPx={124}>
+        <FieldCell minPx={120}>
           <BoundDay<BatchTyping> name={`windows.${at}.until`} label="Until" isTime />
         </FieldCell>
-        <FieldCell minPx={124}>
+        <FieldCell minPx={84}>
           <BoundText<BatchTyping> name={`windows.${at}.capacity`} label="Buyers" isFigure />
         </FieldCell>
       </FieldRow>

@@ -1,8 +1,10 @@
 import { useController, type FieldPathByValue, type FieldValues } from 'react-hook-form'
+import { StyleSheet, View } from 'react-native'
 
 import { fieldIdOf } from '@/components/forms/field-id'
 import { QuickFill } from '@/components/forms/quick-fill'
 import { TextArea } from '@/components/ui/text-area'
+import { space } from '@/constants/theme'
 
 interface Props<T extends FieldValues> {
   name: FieldPathByValue<T, string>
@@ -19,7 +21,7 @@ interface Props<T extends FieldValues> {
 export function BoundArea<T extends FieldValues>({ name, quickAnswer, ...words }: Props<T>) {
   const { field, fieldState } = useController<T, FieldPathByValue<T, string>>({ name })
   return (
-    <>
+    <View style={styles.field}>
       <TextArea
         {...words}
         fieldId={fieldIdOf(name)}
@@ -35,6 +37,8 @@ export function BoundArea<T extends FieldValues>({ name, quickAnswer, ...words }
           onPress={() => field.onChange(quickAnswer)}
         />
       ) : null}
-    </>
+    </View>
   )
 }
+
+const styles = StyleSheet.create({ field: { gap: space.sm } })

@@ -1,9 +1,11 @@
 import { useController, type FieldPathByValue, type FieldValues } from 'react-hook-form'
+import { StyleSheet, View } from 'react-native'
 
 import { fieldIdOf } from '@/components/forms/field-id'
 import { QuickFill } from '@/components/forms/quick-fill'
 import { DateField } from '@/components/ui/date-field'
 import { TimeField } from '@/components/ui/time-field'
+import { space } from '@/constants/theme'
 
 interface Props<T extends FieldValues> {
   name: FieldPathByValue<T, string>
@@ -20,7 +22,7 @@ export function BoundDay<T extends FieldValues>({ name, isTime, quickDay, ...wor
   const { field, fieldState } = useController<T, FieldPathByValue<T, string>>({ name })
   const Control = isTime ? TimeField : DateField
   return (
-    <>
+    <View style={styles.field}>
       <Control
         {...words}
         fieldId={fieldIdOf(name)}
@@ -35,6 +37,8 @@ export function BoundDay<T extends FieldValues>({ name, isTime, quickDay, ...wor
           onPress={() => field.onChange(quickDay.day)}
         />
       ) : null}
-    </>
+    </View>
   )
 }
+
+const styles = StyleSheet.create({ field: { gap: space.sm } })
