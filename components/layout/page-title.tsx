@@ -1,5 +1,5 @@
 import { useIsFocused } from 'expo-router'
-import { useEffect, useRef } from 'react'
+import { useEffect, useEffectEvent, useRef } from 'react'
 import { StyleSheet, View } from 'react-native'
 
 import { Heading } from '@/components/ui/heading'
@@ -13,17 +13,20 @@ interface Props {
   isHidden?: boolean
 }
 
-let isFirstPage = true
+let lastHeading = ''
 
 /** The one h1. A page that comes into view takes the keyboard here, so that its name is read out. */
 export function PageTitle({ heading, intro, isHidden }: Props) {
   const box = useRef<View>(null)
   const isInView = useIsFocused()
   const isPhone = useBreakpoint() === 'phone'
+  const arrive = useEffectEvent(() => {
+    // Neither on the first page nor when a page is drawn anew under its own name, its parts having arrived.
+    if (lastHeading !== '' && lastHeading !== heading) box.current?.focus()
+    lastHeading = heading
+  })
   useEffect(() => {
-    if (!isInView) return
-    if (!isFirstPage) box.current?.focus()
-    isFirstPage = false
+    if (isInView) arrive()
   }, [isInView])
   return (
     <View ref={box} tabIndex={-1} style={isHidden ? styles.hidden : styles.title}>
