@@ -8,6 +8,7 @@ import {
 } from '@tanstack/react-query'
 
 import { call } from '@/hooks/api'
+import type { CallInput } from '@/shared/api/call'
 import { newRequestKey } from '@/hooks/request-key'
 import { STALE } from '@/hooks/stale'
 import type { BodyOf } from '@/shared/api/endpoint'
@@ -93,6 +94,20 @@ export function useHandOver(orderId: string) {
   return useMutation({
     mutationFn: (body: BodyOf<Endpoints['handOver']>) =>
       call('handOver', { params: { orderId }, body, key: newRequestKey() }),
+    onSuccess: keep,
+  })
+}
+
+type WordyAct = 'cancelOrder' | 'chooseSlot' | 'reportNoShow' | 'contestNoShow' | 'stopOrder' | 'decideOrder'
+
+/** One act on an order that carries words or a choice. */
+export function useWordyAct<A extends WordyAct>(act: A, orderId: string) {
+  const keep = useKeepOrder()
+  return useMutation({
+    mutationFn: (body: BodyOf<Endpoints[A]>) => {
+      const input = { params: { orderId }, body, key: newRequestKey() } as unknown as CallInput<A>
+      return call(act, input) as Promise<ShownOrder>
+    },
     onSuccess: keep,
   })
 }

@@ -4,6 +4,7 @@ import { StyleSheet, View } from 'react-native'
 import { DeclineOrder } from '@/components/orders/decline-order'
 import { HandOverForm } from '@/components/orders/hand-over-form'
 import { goToPayment } from '@/components/orders/go-to-payment'
+import { OrderTrouble } from '@/components/orders/order-trouble'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
 import { Confirm } from '@/components/ui/confirm'
@@ -86,6 +87,7 @@ export function OrderActs({ order }: { order: ShownOrder }) {
       {may.has('withdraw') ? (
         <Button label="Take the request back" kind="quiet" isWide onPress={() => setAsking('withdraw')} />
       ) : null}
+      <OrderTrouble order={order} />
       <DeclineOrder order={order} isOpen={isDeclining} onClose={() => setDeclining(false)} />
       <Confirm
         title="Let the animals go?"

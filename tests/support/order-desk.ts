@@ -29,6 +29,7 @@ import { projectListings } from '@/server/search/project-listings'
 import { inTransaction } from '@/db/transaction'
 import type { ListingBody, ShownListing } from '@/shared/contracts/listings'
 import type { ShownOrder } from '@/shared/contracts/orders'
+import { totpOf } from '@/tests/support/totp'
 import { freshDatabase } from '@/tests/support/test-database'
 
 const ORIGIN = 'http://127.0.0.1:8080'
@@ -51,6 +52,8 @@ export interface OrderDesk {
   member: (email: string) => Promise<BuiltMember>
   signedIn: (email: string) => Promise<TestAgent>
   visitor: () => TestAgent
+  /** Signed in with the second factor that staff must have. */
+  staff: (email: string) => Promise<TestAgent>
   /** Runs effects and lets webhooks arrive until nothing waits any more. */
   quiet: () => Promise<void>
   /** Moves domain time and rings what is due. */
@@ -129,6 +132,24 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
       .agent(server)
       .set({ origin: ORIGIN, 'x-tankward': '1', 'x-forwarded-for': from }) as unknown as TestAgent
   }
+  const signedIn = async (email: string): Promise<TestAgent> => {
+    const agent = visitor()
+    await agent.post('/api/auth/sign-in/email').send({ email, password: BUILT_PASSWORD }).expect(200)
+    return agent
+  }
+  let staffAgent: TestAgent | undefined
+  const staff = async (email: string): Promise<TestAgent> => {
+    if (staffAgent) return staffAgent
+    const agent = await signedIn(email)
+    const begun = await agent
+      .post('/api/auth/two-factor/enable')
+      .send({ password: BUILT_PASSWORD })
+      .expect(200)
+    const code = await totpOf((begun.body as { totpURI: string }).totpURI)
+    await agent.post('/api/auth/two-factor/verify-totp').send({ code }).expect(200)
+    staffAgent = agent
+    return agent
+  }
   const waiting = async (): Promise<number> => {
     const [rows] = await base.execute(
       sql`select count(*) as n from outbox where done_at is null and dead_at is null and run_after <= utc_timestamp(3)`,
@@ -168,11 +189,8 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
     },
     member: (email) => buildMember(base, { email }),
     visitor,
-    signedIn: async (email) => {
-      const agent = visitor()
-      await agent.post('/api/auth/sign-in/email').send({ email, password: BUILT_PASSWORD }).expect(200)
-      return agent
-    },
+    signedIn,
+    staff,
     quiet,
     travelTo: async (at) => {
       setClockOffset(at.getTime() - Date.now())
