@@ -34,6 +34,6 @@ export function DecisionBar({ onDecide, hasKeys }: Props) {
 
 const styles = StyleSheet.create({
   bar: { flexDirection: 'row', gap: space.sm },
-  stacked: { flexWrap: 'wrap' },
+  stacked: { flexDirection: 'column' },
   one: { flexGrow: 1, alignSelf: 'auto' },
 })

@@ -1,6 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
-import { taxonText } from './answer-text'
+import { answerWords } from './answer-text'
 import { fieldWords } from './field-words'
 
 import { Badge } from '@/components/ui/badge'
@@ -40,7 +40,6 @@ interface RowProps {
 function DiffRow({ change, numbers }: RowProps) {
   const isPhone = useBreakpoint() === 'phone'
   const { field, material } = change
-  const words = (text: string) => (field === 'taxonId' && text ? taxonText(text) : text)
   return (
     <View style={styles.row}>
       <View style={styles.head}>
@@ -48,8 +47,8 @@ function DiffRow({ change, numbers }: RowProps) {
         {material ? <Badge word="takes it off sale" tone="caution" icon="warn" /> : null}
       </View>
       <View style={isPhone ? styles.stacked : styles.sides}>
-        <Side caption={`Version ${numbers[0]}`} text={words(change.before)} />
-        <Side caption={`Version ${numbers[1]}`} text={words(change.after)} isNew />
+        <Side caption={`Version ${numbers[0]}`} text={answerWords(field, change.before)} />
+        <Side caption={`Version ${numbers[1]}`} text={answerWords(field, change.after)} isNew />
       </View>
     </View>
   )

@@ -32,6 +32,20 @@ interface Props {
 export function ReviewPage({ review, decision, previous, next, onShow, onKeys, onReload }: Props) {
   const breakpoint = useBreakpoint()
   const isWide = breakpoint === 'wide'
+  const flags = (
+    <Card>
+      <Heading level={2} size="lead">
+        Why it waits
+      </Heading>
+      <FlagList flags={review.flags} />
+    </Card>
+  )
+  const record = (
+    <>
+      <SellerRecord seller={review.seller} />
+      <ReviewRules review={review} />
+    </>
+  )
   const side = (
     <View style={styles.column}>
       {isWide && decision ? (
@@ -40,14 +54,8 @@ export function ReviewPage({ review, decision, previous, next, onShow, onKeys, o
           <Button kind="quiet" label="All keys (?)" onPress={onKeys} />
         </Card>
       ) : null}
-      <Card>
-        <Heading level={2} size="lead">
-          Why it waits
-        </Heading>
-        <FlagList flags={review.flags} />
-      </Card>
-      <SellerRecord seller={review.seller} />
-      <ReviewRules review={review} />
+      {flags}
+      {record}
     </View>
   )
   const main = (
@@ -87,8 +95,9 @@ export function ReviewPage({ review, decision, previous, next, onShow, onKeys, o
         </View>
       ) : (
         <View style={styles.column}>
-          {side}
+          {flags}
           {main}
+          {record}
         </View>
       )}
     </Page>
