@@ -30,7 +30,7 @@ export function EmptyState({ title, body, icon = 'fish', action, level = 2 }: Pr
       <Text tint="muted" style={styles.centre}>
         {body}
       </Text>
-      {action}
+      {action ? <View>{action}</View> : null}
     </View>
   )
 }
