@@ -12,6 +12,7 @@ import { step } from './tell.mjs'
 
 // Beside the server's own 8080; tried at the first start of a data folder.
 const FIRST_PORTS = { smtp: 8025, mail: 8026, pay: 8027 }
+const ANY_PORTS = { smtp: 0, mail: 0, pay: 0 }
 
 /** @param {number} wanted */
 async function portFor(wanted) {
@@ -43,7 +44,7 @@ export async function claimGround(dataDir, wantedPort) {
 export async function layGround(crew, options) {
   const { dataDir, port, origin, clockOffsetMs, durable, environment, startOver } = options
   const secrets = await readSecrets(dataDir)
-  const ports = await rememberedPorts(dataDir, FIRST_PORTS)
+  const ports = await rememberedPorts(dataDir, durable ? FIRST_PORTS : ANY_PORTS)
   const named = namedIn(environment)
   const given = { dataDir, origin, clockOffsetMs, ports, secrets }
   const [database, mail, payments] = await Promise.all([
