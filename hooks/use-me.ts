@@ -3,21 +3,13 @@ import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/r
 import { call } from '@/hooks/api'
 import { STALE } from '@/hooks/stale'
 import type { BodyOf } from '@/shared/api/endpoint'
-import { Problem } from '@/shared/api/problem'
 import type { Endpoints } from '@/shared/api/routes.gen'
 import type { Me } from '@/shared/contracts/members'
 
 const meQuery = queryOptions({
   queryKey: ['me'],
   staleTime: STALE.minutes,
-  queryFn: async ({ signal }): Promise<Me | null> => {
-    try {
-      return await call('readMe', { signal })
-    } catch (error) {
-      if (error instanceof Problem && error.slug === 'not-signed-in') return null
-      throw error
-    }
-  },
+  queryFn: ({ signal }): Promise<Me | null> => call('readMe', { signal }),
 })
 
 /** Who is signed in: `undefined` while asking, `null` for a visitor. */

@@ -7,7 +7,7 @@ import { changeMe as changeMeCall, readMe as readMeCall } from '@/shared/contrac
 
 export function memberRoutes(): Router {
   const router = Router()
-  on(router, readMeCall)(async ({ caller }) => readMe(caller))
+  on(router, readMeCall)(async ({ caller }) => (caller ? readMe(caller) : null))
   on(router, changeMeCall)(async ({ caller, body }) => changeMe(caller, body))
   return router
 }

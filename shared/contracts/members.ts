@@ -22,9 +22,10 @@ export type Me = z.output<typeof me>
 export const readMe = endpoint({
   method: 'GET',
   path: '/me',
-  auth: 'member',
-  summary: 'Who is signed in, and what waits for them',
-  reply: me,
+  // A visitor is a fact, not a refusal: every page asks this first.
+  auth: 'public',
+  summary: 'Who is signed in, and what waits for them; null for a visitor',
+  reply: me.nullable(),
 })
 
 export const changeMe = endpoint({
