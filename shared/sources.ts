@@ -58,6 +58,14 @@ const table = {
   'bsf-article': { author: 'Encyclopaedia article', year: null, title: 'Hermetia illucens: storage of larvae', where: null, reading: 'read' },
   'srac-462': { author: 'SRAC', year: null, title: 'Nitrite in fish ponds, SRAC Publication 462', where: null, reading: 'read in a reproduction' },
   'aquasearch-tgc': { author: 'AquaSearch', year: null, title: 'Calculations page for fish farmers', where: 'thermal growth coefficient', reading: 'read' },
+  // Water
+  'emerson-1975': { author: 'Emerson, Russo, Lund & Thurston', year: 1975, title: 'Aqueous ammonia equilibrium calculations, J. Fish. Res. Board Can. 32:2379-2383', where: 'as tabled by UF/IFAS FA16', reading: 'read in a reproduction' },
+  'ifas-fa16': { author: 'Francis-Floyd et al., UF/IFAS', year: null, title: 'Ammonia in aquatic systems, FA16', where: null, reading: 'read in a reproduction' },
+  'trussell-1972': { author: 'Trussell', year: 1972, title: 'Percent un-ionized ammonia, as printed in a test-kit manual', where: null, reading: 'read' },
+  'benson-krause-1984': { author: 'Benson & Krause', year: 1984, title: 'Dissolved oxygen in fresh and sea water, as in USGS memo 2011.03', where: null, reading: 'read in a reproduction' },
+  'weiss-1974': { author: 'Weiss', year: 1974, title: 'Carbon dioxide in water and seawater, Mar. Chem. 2:203-215', where: null, reading: 'from memory' },
+  'plummer-busenberg-1982': { author: 'Plummer & Busenberg', year: 1982, title: 'Solubilities in the system CaCO3-CO2-H2O, Geochim. Cosmochim. Acta 46', where: 'pK1', reading: 'from memory' },
+  'epa-2013-ammonia': { author: 'US Environmental Protection Agency', year: 2013, title: 'Aquatic life criteria for ammonia, EPA 822-R-13-001', where: 'equations, as used in a state agency script', reading: 'read in a reproduction' },
   // Climate and places
   'arguez-2012': { author: 'Arguez et al., NOAA NCEI', year: 2012, title: "NOAA's 1981-2010 US climate normals, Bull. Am. Meteorol. Soc., doi:10.1175/BAMS-D-11-00197.1", where: 'monthly normals', reading: 'read' },
   'census-zcta': { author: 'US Census Bureau', year: 2021, title: 'Gazetteer files: ZIP Code Tabulation Areas', where: 'internal points', reading: 'read' },
