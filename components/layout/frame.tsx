@@ -1,5 +1,5 @@
-import { useSegments } from 'expo-router'
-import type { ReactNode } from 'react'
+import { router, useNavigationContainerRef, useSegments } from 'expo-router'
+import { useEffect, type ReactNode } from 'react'
 import { StyleSheet, View } from 'react-native'
 
 import { PhoneBar } from './phone-bar'
@@ -12,6 +12,7 @@ import { useBreakpoint } from '@/hooks/use-breakpoint'
 /** The rail stands beside every page; the phone's bar only under the places themselves. */
 export function Frame({ children }: { children: ReactNode }) {
   const breakpoint = useBreakpoint()
+  useNotedFirstPage()
   const isAtPlace = useSegments()[0] === '(tabs)'
   return (
     <View style={[styles.frame, breakpoint === 'phone' ? styles.column : styles.row]}>
@@ -21,6 +22,13 @@ export function Frame({ children }: { children: ReactNode }) {
       {breakpoint === 'phone' && isAtPlace ? <PhoneBar /> : null}
     </View>
   )
+}
+
+// The router notes the page a visit starts with before that page has its keys, and would build it anew, unscrolled,
+// when the browser comes back to it. A change of nothing makes it take the note again.
+function useNotedFirstPage() {
+  const navigation = useNavigationContainerRef()
+  useEffect(() => navigation.addListener('ready', () => router.setParams({})), [navigation])
 }
 
 const styles = StyleSheet.create({

@@ -48,7 +48,13 @@ export function Page(props: Props) {
     </View>
   )
   return (
-    <View role="main" tabIndex={-1} nativeID={isInView ? 'content' : undefined} style={styles.main}>
+    <View
+      role="main"
+      tabIndex={-1}
+      nativeID={isInView ? 'content' : undefined}
+      inert={!isInView}
+      style={styles.main}
+    >
       <PageHead title={heading} back={props.back} actions={props.actions} isPhone={isPhone} />
       {isScrolled ? <ScrollView style={styles.fill}>{body}</ScrollView> : body}
       {footer ? <View style={[styles.foot, { paddingBottom: space.md + bottom }]}>{footer}</View> : null}
