@@ -1,7 +1,9 @@
 import { kmOfSquaredChord } from '@/shared/domain/geo/earth-point'
 import { categoryCodes } from '@/server/search/category-codes'
 import type { DensityHistogram } from '@/server/search/density-histogram'
+import type { Overview } from '@/server/search/overview-store'
 import type { SearchQuery } from '@/server/search/search-query'
+import { UNRATED_RANK } from '@/server/search/search-row'
 import { everydayOrder } from '@/server/search/tier-columns'
 
 /** How a page is found. Whatever the plan, the page is the same; only the rows read on the way differ. */
@@ -10,21 +12,23 @@ export type SearchPlan =
   | { kind: 'grow'; firstKm: number }
   /** Read the whole circle and sort it. */
   | { kind: 'circle' }
-  /** Go up the index of the sort in these categories until a page lies inside the circle. */
-  | { kind: 'walk'; categories: readonly number[] }
+  /** Go up the prices in these categories until a page lies inside the circle. */
+  | { kind: 'price-walk'; categories: readonly number[] }
+  /** Read the lowest rungs of the sort in these categories, up to `firstRung`, then more until there is a page. */
+  | { kind: 'rank-walk'; categories: readonly number[]; firstRung: number }
 
 const SMALL_CIRCLE_ROWS = 500
 const SMALL_CIRCLE_HITS = 60
-/** More rows than a page needs, so that the first circle is seldom too small. */
+/** More rows than a page needs, so that the first circle or rung is seldom too small. */
 const ROOM = 1.6
 const LEAST_KM = 4
 /** A cover takes about so much more ground than its circle. */
 const COVER_SHARE = 1.4
-/** Walks of soonest and best rated go twice, and look rows up. */
-const RANK_WALK_WEIGHT = 3
+/** A rung's row inside the circle is looked up, which costs several rows of a covering index. */
+const LOOK_UP_ROWS = 5
 
 export interface Outlook {
-  density: DensityHistogram
+  overview: Overview
   /** Share of candidates that meet the wishes. */
   selectivity: number
 }
@@ -47,33 +51,68 @@ export function guessRadiusKm(query: SearchQuery, density: DensityHistogram, wan
   return km
 }
 
-function walkable(query: SearchQuery, density: DensityHistogram): readonly number[] | null {
-  const own =
-    query.categoryCode ??
-    (query.speciesCode === undefined ? undefined : density.categoryOf(query.speciesCode))
-  if (own === null) return null
-  const categories = own === undefined ? categoryCodes : [own]
-  const beyondEveryday =
-    query.sort === 'cheapest' && categories.some((code) => (query.count ?? 0) > everydayOrder(code))
-  return beyondEveryday ? null : categories
+function categoriesOf(query: SearchQuery, density: DensityHistogram): readonly number[] | null {
+  if (query.categoryCode !== undefined) return [query.categoryCode]
+  if (query.speciesCode === undefined) return categoryCodes
+  const own = density.categoryOf(query.speciesCode)
+  return own === null ? null : [own]
+}
+
+interface Walk {
+  categories: readonly number[]
+  /** Listings in the circle, before the wishes. */
+  candidates: number
+  /** Listings of the categories, of which the walk passes some. */
+  all: number
+}
+
+function planPriceWalk(
+  query: SearchQuery,
+  { categories, candidates, all }: Walk,
+  selectivity: number,
+): SearchPlan {
+  if (categories.some((code) => (query.count ?? 0) > everydayOrder(code))) return { kind: 'circle' }
+  // Every page starts at the bottom.
+  const passed = ((query.limit + (query.after?.seen ?? 0)) * all) / Math.max(candidates * selectivity, 0.1)
+  return passed < candidates * COVER_SHARE ? { kind: 'price-walk', categories } : { kind: 'circle' }
+}
+
+function planRankWalk(query: SearchQuery, walk: Walk, { overview, selectivity }: Outlook): SearchPlan {
+  const { categories, candidates, all } = walk
+  const soonest = query.sort === 'soonest'
+  const ladder = soonest ? overview.days : overview.ranks
+  const inCircle = candidates / Math.max(all, 1)
+  const start = query.after?.by ?? (soonest ? (query.days?.from ?? 0) : 0)
+  // Whoever could be had earlier may still be had from `start` on, so the rungs below it are read too.
+  const skipped = soonest ? 0 : ladder.upTo(categories, start - 1)
+  const want = skipped + (query.limit * ROOM) / Math.max(inCircle * selectivity, 1e-9)
+  const guess = ladder.reaching(categories, want)
+  if (guess === null) return { kind: 'circle' }
+  const firstRung = Math.max(guess, start)
+  const passed = ladder.upTo(categories, firstRung) - skipped
+  const cost = passed * (1 + inCircle * LOOK_UP_ROWS)
+  // Unrated sellers stand on one rung, half of all.
+  const endless = !soonest && firstRung >= UNRATED_RANK
+  if (endless || cost > candidates * COVER_SHARE) return { kind: 'circle' }
+  return { kind: 'rank-walk', categories, firstRung }
 }
 
 /** The cheapest way to a page, judged by rows read. */
-export function planSearch(query: SearchQuery, { density, selectivity }: Outlook): SearchPlan {
+export function planSearch(query: SearchQuery, outlook: Outlook): SearchPlan {
+  const { overview, selectivity } = outlook
+  const { density } = overview
   const candidates = density.within(query, query.origin, query.radiusKm)
-  const hits = candidates * selectivity
+  if (candidates <= SMALL_CIRCLE_ROWS) return { kind: 'circle' }
   if (query.sort === 'nearest') {
-    if (candidates <= SMALL_CIRCLE_ROWS || hits <= SMALL_CIRCLE_HITS) return { kind: 'circle' }
+    if (candidates * selectivity <= SMALL_CIRCLE_HITS) return { kind: 'circle' }
     const want = (query.limit * ROOM) / selectivity
     return { kind: 'grow', firstKm: guessRadiusKm(query, density, want) }
   }
-  if (candidates <= SMALL_CIRCLE_ROWS) return { kind: 'circle' }
-  const categories = walkable(query, density)
+  const categories = categoriesOf(query, density)
   if (!categories) return { kind: 'circle' }
-  const passed = categories.reduce((sum, categoryCode) => sum + density.total({ categoryCode }), 0)
-  // A walk by price starts at the bottom on every page; the other two start at the last hit.
-  const wanted = query.limit + (query.sort === 'cheapest' ? (query.after?.seen ?? 0) : 0)
-  const weight = query.sort === 'cheapest' ? 1 : RANK_WALK_WEIGHT
-  const walked = (wanted * passed) / Math.max(hits, 0.1)
-  return walked * weight < candidates * COVER_SHARE ? { kind: 'walk', categories } : { kind: 'circle' }
+  const all = categories.reduce((sum, categoryCode) => sum + density.total({ categoryCode }), 0)
+  const walk = { categories, candidates, all }
+  return query.sort === 'cheapest'
+    ? planPriceWalk(query, walk, selectivity)
+    : planRankWalk(query, walk, outlook)
 }

@@ -1,12 +1,21 @@
 import { readFoundRows, type FoundRow } from '@/server/search/found-row'
+import type { Ladder } from '@/server/search/ladder'
 import { readSearchRows } from '@/server/search/read-search-store'
-import { afterSql, orderSql, searchOrder, selectedSql } from '@/server/search/search-order'
+import { afterSql, orderSql, selectedSql } from '@/server/search/search-order'
 import type { SearchQuery } from '@/server/search/search-query'
-import { UNRATED_RANK } from '@/server/search/search-row'
 import { insideSql, whole, wishSql } from '@/server/search/search-sql'
 
+/** More of the ladder when a page was not full. */
+const GROWTH = 4
+const MOST_TRIPS = 3
+
+export interface RankWalk {
+  categories: readonly number[]
+  firstRung: number
+}
+
 /** The index of the sort and its column, which never exceeds what rows are sorted by. */
-function ladder(query: SearchQuery): { index: string; rung: string; from: string[] } {
+function rungSql(query: SearchQuery): { index: string; rung: string; from: string[] } {
   const { after, days } = query
   if (query.sort === 'best-rated') {
     return { index: 'k_rated', rung: 'rating_rank', from: after ? [`rating_rank>=${whole(after.by)}`] : [] }
@@ -17,40 +26,39 @@ function ladder(query: SearchQuery): { index: string; rung: string; from: string
   return { index: 'k_soonest', rung: 'next_day', from: [`(${early}next_day>=${whole(after.by)})`] }
 }
 
-function conditions(query: SearchQuery, category: string): string {
-  return [
-    category,
-    ...ladder(query).from,
+/** Text of one page among the rungs up to `top`. */
+export function rankPageSql(query: SearchQuery, categories: readonly number[], top: number): string {
+  const { index, rung, from } = rungSql(query)
+  const tests = [
+    `category IN (${categories.map(whole).join(',')})`,
+    `${rung}<=${whole(top)}`,
+    ...from,
     ...(query.speciesCode === undefined ? [] : [`species=${whole(query.speciesCode)}`]),
     insideSql(query, query.radiusKm),
     ...wishSql(query),
     ...afterSql(query),
-  ].join(' AND ')
-}
-
-/** Text of a first walk: how far up a page reaches in one category. */
-export function rankProbeSql(query: SearchQuery, categoryCode: number): string {
-  const { index, rung } = ladder(query)
-  const where = conditions(query, `category=${whole(categoryCode)}`)
-  return `(SELECT ${searchOrder(query).by} FROM listing_search FORCE INDEX (${index}) WHERE ${where} ORDER BY ${rung} LIMIT ${whole(query.limit)})`
+  ]
+  return `SELECT ${selectedSql(query)} FROM listing_search FORCE INDEX (${index}) WHERE ${tests.join(' AND ')} ORDER BY ${orderSql(query)} LIMIT ${whole(query.limit)}`
 }
 
 /**
- * Soonest or best rated first without reading the circle. Ties are settled by distance, which the index does not
- * know, so a first walk finds how far up a page reaches and a second one sorts what lies below. null: that is so
- * far that the circle is read sooner.
+ * Soonest or best rated first without reading the circle: all rows up to a rung are read, and a full page that does
+ * not go beyond that rung is the page there is. `rows` null: it would take so many rungs that the circle is read
+ * sooner.
  */
 export async function walkRanks(
   query: SearchQuery,
-  categories: readonly number[],
-): Promise<FoundRow[] | null> {
-  const probe = await readSearchRows(categories.map((code) => rankProbeSql(query, code)).join(' UNION ALL '))
-  const reached = probe.map(([by = 0]) => by).sort((a, b) => a - b)
-  const top = reached[query.limit - 1]
-  // Unrated sellers are half of all, on one rung.
-  if (top === undefined || (query.sort === 'best-rated' && top >= UNRATED_RANK)) return null
-  const { index, rung } = ladder(query)
-  const where = conditions(query, `category IN (${categories.map(whole).join(',')})`)
-  const sql = `SELECT ${selectedSql(query)} FROM listing_search FORCE INDEX (${index}) WHERE ${where} AND ${rung}<=${whole(top)} ORDER BY ${orderSql(query)} LIMIT ${whole(query.limit)}`
-  return readFoundRows(query, await readSearchRows(sql))
+  { categories, firstRung }: RankWalk,
+  ladder: Ladder,
+): Promise<{ rows: FoundRow[] | null; trips: number }> {
+  let top = firstRung
+  for (let trips = 1; ; trips++) {
+    const rows = readFoundRows(query, await readSearchRows(rankPageSql(query, categories, top)))
+    const last = rows[query.limit - 1]
+    // A row may be sorted higher than its rung; what is sorted above `top` could be beaten by a row not read.
+    if (last && last.sortBy <= top) return { rows, trips }
+    const next = ladder.reaching(categories, ladder.upTo(categories, top) * GROWTH)
+    if (trips >= MOST_TRIPS || next === null || next <= top) return { rows: null, trips }
+    top = next
+  }
 }

@@ -1,7 +1,7 @@
 import { circlePageSql } from '@/server/search/find-in-circle'
 import type { SearchQuery, SearchSort } from '@/server/search/search-query'
 import { priceStepSql } from '@/server/search/walk-prices'
-import { rankProbeSql } from '@/server/search/walk-ranks'
+import { rankPageSql } from '@/server/search/walk-ranks'
 import { readPlan, type ReadPlan } from '@/tests/bench/read-plan'
 import { TODAY } from '@/tests/bench/make-listings'
 
@@ -47,14 +47,14 @@ function expectations(): Expected[] {
       plan: { key: 'k_price', access: 'range', covering: true, sorted: false },
     },
     {
-      name: 'walk by first day',
-      sql: rankProbeSql({ ...anySpecies, sort: 'soonest' }, 1),
-      plan: { key: 'k_soonest', sorted: false },
+      name: 'rungs by first day',
+      sql: rankPageSql({ ...anySpecies, sort: 'soonest' }, [1], TODAY + 2),
+      plan: { key: 'k_soonest', access: 'range' },
     },
     {
-      name: 'walk by rating',
-      sql: rankProbeSql({ ...anySpecies, sort: 'best-rated' }, 1),
-      plan: { key: 'k_rated', sorted: false },
+      name: 'rungs by rating',
+      sql: rankPageSql({ ...anySpecies, sort: 'best-rated' }, [1], 40),
+      plan: { key: 'k_rated', access: 'range' },
     },
   ]
 }

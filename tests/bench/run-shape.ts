@@ -63,9 +63,15 @@ export async function runShape(shape: Shape, ground: Ground, asked: { queries: n
   async function one(name: string, query: SearchQuery, expected: readonly BruteHit[]): Promise<void> {
     const peer = peers.find((one) => one.name === name)
     const before = performance.now()
-    const answer = peer ? await peer.find(query) : await search.search(query)
+    const answer = await (peer ? peer.find(query) : search.search(query)).catch((error: unknown) =>
+      String(error),
+    )
     ms.get(name)?.push(performance.now() - before)
     if (answer === null) return
+    if (typeof answer === 'string') {
+      faults.push(`${shape} ${name}: ${answer} for ${JSON.stringify(query)}`)
+      return
+    }
     const fault = Array.isArray(answer)
       ? peerFault(answer, expected, query)
       : pageFault(answer.hits, expected)

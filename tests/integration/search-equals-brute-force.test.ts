@@ -9,6 +9,7 @@ import type { FoundRow } from '@/server/search/found-row'
 import { removeSearchRows, writeSearchRows } from '@/server/search/listing-search-store'
 import { openListingSearch } from '@/server/search/search-listings'
 import type { SearchHit, SearchQuery } from '@/server/search/search-query'
+import { countOverview } from '@/server/search/overview-store'
 import { walkPrices } from '@/server/search/walk-prices'
 import { walkRanks } from '@/server/search/walk-ranks'
 import { bruteForce } from '@/tests/bench/brute-force'
@@ -123,7 +124,10 @@ describe('search', () => {
         if (query.sort === 'cheapest' && everyday)
           judge('prices', query, (await walkPrices(query, categories)).rows)
         if (query.sort === 'soonest' || query.sort === 'best-rated') {
-          const rows = await walkRanks(query, categories)
+          const { days, ranks } = await countOverview()
+          const ladder = query.sort === 'soonest' ? days : ranks
+          const firstRung = ladder.reaching(categories, chance.between(1, LISTINGS / 4)) ?? 0
+          const { rows } = await walkRanks(query, { categories, firstRung }, ladder)
           if (rows) judge('ranks', query, rows)
         }
       }
