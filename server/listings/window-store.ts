@@ -1,7 +1,7 @@
-import { and, asc, eq, gt, inArray } from 'drizzle-orm'
+import { and, asc, eq, gt, inArray, lte } from 'drizzle-orm'
 
 import { db, type Tx } from '@/db/client'
-import { pickupWindow } from '@/db/schema/listings'
+import { listing, pickupWindow } from '@/db/schema/listings'
 
 export type WindowRow = typeof pickupWindow.$inferSelect
 export type NewWindow = typeof pickupWindow.$inferInsert
@@ -33,4 +33,14 @@ export async function insertWindows(rows: NewWindow[], tx: Tx): Promise<void> {
 
 export async function setWindow(id: number, change: Partial<NewWindow>, tx: Tx): Promise<void> {
   await tx.update(pickupWindow).set(change).where(eq(pickupWindow.id, id))
+}
+
+/** Live listings with a window that began after `since` and by `at`. */
+export async function listBegunListings(since: Date, at: Date): Promise<number[]> {
+  const rows = await db()
+    .selectDistinct({ id: pickupWindow.listingId })
+    .from(pickupWindow)
+    .innerJoin(listing, eq(listing.id, pickupWindow.listingId))
+    .where(and(eq(listing.state, 'live'), gt(pickupWindow.startsAt, since), lte(pickupWindow.startsAt, at)))
+  return rows.map((row) => row.id)
 }
