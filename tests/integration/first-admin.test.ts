@@ -25,7 +25,7 @@ async function createAdmin(...args: string[]): Promise<{ code: number; said: str
     UPLOAD_DIR: '.data/uploads',
   }
   try {
-    const { stdout } = await run('node', ['--import', 'tsx', 'server/auth/create-admin.ts', ...args], { env })
+    const { stdout } = await run('node', ['--import', 'tsx', 'seed/create-admin.ts', ...args], { env })
     return { code: 0, said: stdout }
   } catch (error) {
     const failed = error as { code?: number; stderr?: string }
