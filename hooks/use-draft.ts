@@ -4,7 +4,7 @@ import { useEffect, useState, useSyncExternalStore } from 'react'
 import { call } from '@/hooks/api'
 import { DraftKeeper } from '@/hooks/draft-keeper'
 import { forgetDraft, keepDraft, readKeptDraft } from '@/hooks/kept-drafts'
-import { ownListingKey } from '@/hooks/use-own-listings'
+import { ownListingKey } from '@/hooks/own-listing-query'
 import type { ListingDraft, OwnListing } from '@/shared/contracts/listings'
 
 const pauseMs = 900

@@ -1,9 +1,14 @@
 import { useEffect, useState } from 'react'
 import { View } from 'react-native'
 
-import { decisionWords, reasonOfKey, reasonChoices, type DecisionKind } from './decision-words'
+import {
+  decisionWords,
+  reasonOfKey,
+  reasonChoices,
+  type DecisionKind,
+  type ReviewReason,
+} from './decision-words'
 
-import type { ReviewReason } from '@/components/selling/review-reasons'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
 import { focusElement } from '@/components/ui/focus-element'

@@ -2,10 +2,7 @@ import { expect, it } from 'vitest'
 
 import { reasonChoices, reasonOfKey } from './decision-words'
 
-import { reviewReasonWords } from '@/components/selling/review-reasons'
-
-it('offers every reason, each with a key of its own', () => {
-  expect(reasonChoices.map((choice) => choice.value)).toEqual(Object.keys(reviewReasonWords))
+it('gives every reason a key of its own, printed in front of it', () => {
   expect(new Set(reasonChoices.map(({ label }) => label.charAt(0))).size).toBe(reasonChoices.length)
   for (const { value, label } of reasonChoices) expect(reasonOfKey(label.charAt(0))).toBe(value)
 })

@@ -1,9 +1,9 @@
-import { reviewReasonWords, type ReviewReason } from '@/components/selling/review-reasons'
 import type { Decision } from '@/hooks/use-moderation'
 
 import type { Choice } from '@/components/ui/choice'
 
 export type DecisionKind = Decision['decision']
+export type ReviewReason = NonNullable<Decision['reason']>
 
 export const decisionWords: Record<
   DecisionKind,
@@ -32,13 +32,26 @@ export const decisionWords: Record<
   },
 }
 
-const reasons = Object.keys(reviewReasonWords) as ReviewReason[]
+const reasonLabels: Record<ReviewReason, string> = {
+  'species-blocked': 'We do not list this species',
+  'species-doubtful': 'Species in doubt',
+  'photo-not-this-batch': 'Photo is not of this batch',
+  'no-ruler': 'No ruler to be seen',
+  'papers-missing': 'Papers missing',
+  'contact-details': 'Contact details in the text',
+  'price-unclear': 'Price unclear',
+  'unsafe-terms': 'Terms that harm buyers or fish',
+  'wild-caught': 'Wild-caught',
+  duplicate: 'The same batch twice',
+  other: 'Something else',
+}
+const reasons = Object.keys(reasonLabels) as ReviewReason[]
 const keys = ['1', '2', '3', '4', '5', '6', '7', '8', '9', '0', 'o']
 
 /** Each reason with the key that chooses it in front. */
 export const reasonChoices: readonly Choice<ReviewReason>[] = reasons.map((reason, at) => ({
   value: reason,
-  label: `${keys[at] ?? ''}  ${reviewReasonWords[reason].label}`,
+  label: `${keys[at] ?? ''}  ${reasonLabels[reason]}`,
 }))
 
 /** The reason a key chooses. undefined: none. */

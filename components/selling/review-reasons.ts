@@ -4,8 +4,6 @@ import type { Endpoints } from '@/shared/api/routes.gen'
 export type ReviewReason = NonNullable<BodyOf<Endpoints['decideReview']>['reason']>
 
 interface ReasonWords {
-  /** As the moderator picks it. */
-  label: string
   /** As the seller reads it. */
   told: string
   /** The field of the batch form where it is put right. */
@@ -14,48 +12,40 @@ interface ReasonWords {
 
 export const reviewReasonWords: Record<ReviewReason, ReasonWords> = {
   'species-blocked': {
-    label: 'We do not list this species',
     told: 'We do not list this species. That is our policy for everyone.',
     field: 'taxonId',
   },
   'species-doubtful': {
-    label: 'Species in doubt',
     told: 'The species is in doubt. Check the name, or say how you know.',
     field: 'taxonId',
   },
   'photo-not-this-batch': {
-    label: 'Photo is not of this batch',
     told: 'A photo does not seem to be of this batch.',
     field: 'photos',
   },
   'no-ruler': {
-    label: 'No ruler to be seen',
     told: 'No photo shows a ruler beside the fish.',
     field: 'photos',
   },
   'papers-missing': {
-    label: 'Papers missing',
     told: 'Licence or health papers are missing.',
     field: 'licenceNumbers',
   },
   'contact-details': {
-    label: 'Contact details in the text',
     told: 'Phone numbers, addresses and links do not belong in a listing: they come with the order.',
     field: 'words',
   },
-  'price-unclear': { label: 'Price unclear', told: 'The price is not clear.', field: 'tiers' },
+  'price-unclear': { told: 'The price is not clear.', field: 'tiers' },
   'unsafe-terms': {
-    label: 'Terms that harm buyers or fish',
     told: 'Some terms would harm buyers or fish.',
     field: 'promise',
   },
   'wild-caught': {
-    label: 'Wild-caught',
     told: 'Wild-caught animals are not listed here.',
     field: 'wildCaught',
   },
-  duplicate: { label: 'The same batch twice', told: 'This batch is listed already.', field: 'taxonId' },
-  other: { label: 'Something else', told: 'A moderator left a note.', field: 'taxonId' },
+  duplicate: { told: 'This batch is listed already.', field: 'taxonId' },
+  other: { told: 'A moderator left a note.', field: 'taxonId' },
 }
 
 /** The words of a reason the server named. undefined: a code this version does not know. */

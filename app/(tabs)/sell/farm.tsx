@@ -5,7 +5,7 @@ import { Page } from '@/components/layout/page'
 import { LazyPart } from '@/components/ui/lazy-part'
 
 const FarmScreen = lazy(() =>
-  import('@/components/forms/forms-group').then((group) => ({ default: group.FarmScreen })),
+  import('@/components/selling/selling-group').then((group) => ({ default: group.FarmScreen })),
 )
 
 export default function FarmPage() {

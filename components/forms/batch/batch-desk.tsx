@@ -6,7 +6,7 @@ import { checkStep, stepOfField } from './batch-steps'
 import { useToast } from '@/components/ui/toast'
 import { forgetDraft } from '@/hooks/kept-drafts'
 import { openDraft, type OpenedDraft } from '@/hooks/use-draft'
-import { useReadOwnListing } from '@/hooks/use-own-listings'
+import { useReadOwnListing } from '@/hooks/use-submit-listing'
 
 import type { ListingDraft, OwnListing } from '@/shared/contracts/listings'
 import type { OwnSeller } from '@/shared/contracts/sellers'

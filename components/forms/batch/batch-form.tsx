@@ -14,8 +14,8 @@ import { usePublish } from './use-publish'
 import { WholeBatch } from './whole-batch'
 
 import { issueResolver } from '@/components/forms/issue-resolver'
-import { licenceWords } from '@/components/selling/licence-words'
-import { todayIn } from '@/components/selling/day-text'
+import { licenceWords } from './licence-words'
+import { todayIn } from '@/components/forms/day-text'
 import { useBreakpoint } from '@/hooks/use-breakpoint'
 import { useDraft, type OpenedDraft } from '@/hooks/use-draft'
 

@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button'
 import { Confirm } from '@/components/ui/confirm'
 import { useToast } from '@/components/ui/toast'
 import { forgetDraft } from '@/hooks/kept-drafts'
-import { useDiscardDraft } from '@/hooks/use-own-listings'
+import { useDiscardDraft } from '@/hooks/use-submit-listing'
 
 import type { OwnListing } from '@/shared/contracts/listings'
 

@@ -1,6 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
-import { printClock } from '@/components/selling/day-text'
+import { printClock } from '@/components/forms/day-text'
 import { Icon } from '@/components/ui/icon'
 import { Text } from '@/components/ui/text'
 import { space, type ColorName } from '@/constants/theme'

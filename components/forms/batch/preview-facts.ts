@@ -1,6 +1,6 @@
 import { figures } from '@/components/forms/figure'
 import { stageName } from '@/components/listings/stage-words'
-import { printDay } from '@/components/selling/day-text'
+import { printDay } from '@/components/forms/day-text'
 import { photoUrl } from '@/hooks/api'
 import { listingTitle } from '@/shared/domain/listings/listing-title'
 import { findTaxon } from '@/shared/domain/species/find-taxon'

@@ -2,7 +2,7 @@ import { useRef, useState } from 'react'
 import type { UseFormReturn } from 'react-hook-form'
 
 import { newRequestKey } from '@/hooks/request-key'
-import { useSubmitListing } from '@/hooks/use-own-listings'
+import { useSubmitListing } from '@/hooks/use-submit-listing'
 import { NoAnswer } from '@/shared/api/call'
 import { Problem } from '@/shared/api/problem'
 

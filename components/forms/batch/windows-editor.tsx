@@ -4,7 +4,7 @@ import { StyleSheet, View } from 'react-native'
 import { WindowRow } from './window-row'
 
 import { fieldIdOf } from '@/components/forms/field-id'
-import { addDays, nextSaturday, zoneWords } from '@/components/selling/day-text'
+import { addDays, nextSaturday, zoneWords } from '@/components/forms/day-text'
 import { Button } from '@/components/ui/button'
 import { FieldError } from '@/components/ui/field-frame'
 import { Text } from '@/components/ui/text'

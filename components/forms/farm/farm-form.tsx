@@ -10,7 +10,7 @@ import { issueResolver } from '@/components/forms/issue-resolver'
 import { Button } from '@/components/ui/button'
 import { space } from '@/constants/theme'
 import { newRequestKey } from '@/hooks/request-key'
-import { useSaveFarm, type FarmBody } from '@/hooks/use-own-farm'
+import { useSaveFarm, type FarmBody } from '@/hooks/use-save-farm'
 import { Problem } from '@/shared/api/problem'
 import type { OwnSeller } from '@/shared/contracts/sellers'
 

@@ -6,7 +6,7 @@ import { LazyPart } from '@/components/ui/lazy-part'
 import { SkeletonRows } from '@/components/ui/skeleton'
 
 const BatchScreen = lazy(() =>
-  import('@/components/forms/forms-group').then((group) => ({ default: group.BatchScreen })),
+  import('@/components/selling/selling-group').then((group) => ({ default: group.BatchScreen })),
 )
 
 export default function BatchFormPage() {

@@ -1,14 +1,19 @@
 import { useRouter } from 'expo-router'
+import { lazy } from 'react'
 
-import { FarmForm } from './farm-form'
+import { StartSelling } from './start-selling'
 
 import { ErrorState } from '@/components/ui/error-state'
+import { LazyPart } from '@/components/ui/lazy-part'
 import { SkeletonRows } from '@/components/ui/skeleton'
-import { StartSelling } from '@/components/selling/start-selling'
 import { useToast } from '@/components/ui/toast'
 import { useMe } from '@/hooks/use-me'
 import { useOwnFarm } from '@/hooks/use-own-farm'
 import type { OwnSeller } from '@/shared/contracts/sellers'
+
+const FarmForm = lazy(() =>
+  import('@/components/forms/forms-group').then((group) => ({ default: group.FarmForm })),
+)
 
 /** Opens a farm or changes it; the way then leads to the payouts until those are ready. */
 export function FarmScreen() {
@@ -33,5 +38,9 @@ export function FarmScreen() {
       />
     )
   }
-  return <FarmForm farm={farm.data ?? null} onSaved={saved} />
+  return (
+    <LazyPart label="Loading the form">
+      <FarmForm farm={farm.data ?? null} onSaved={saved} />
+    </LazyPart>
+  )
 }
