@@ -66,6 +66,12 @@ const table = {
   'weiss-1974': { author: 'Weiss', year: 1974, title: 'Carbon dioxide in water and seawater, Mar. Chem. 2:203-215', where: null, reading: 'from memory' },
   'plummer-busenberg-1982': { author: 'Plummer & Busenberg', year: 1982, title: 'Solubilities in the system CaCO3-CO2-H2O, Geochim. Cosmochim. Acta 46', where: 'pK1', reading: 'from memory' },
   'epa-2013-ammonia': { author: 'US Environmental Protection Agency', year: 2013, title: 'Aquatic life criteria for ammonia, EPA 822-R-13-001', where: 'equations, as used in a state agency script', reading: 'read in a reproduction' },
+  // Growth
+  'liao-1971': { author: 'Liao', year: 1971, title: 'Water requirements of salmonids, Prog. Fish-Cult. 33', where: null, reading: 'from memory' },
+  'boyd-1978': { author: 'Boyd, Romaire & Johnston', year: 1978, title: 'Predicting early morning dissolved oxygen in channel catfish ponds, Trans. Am. Fish. Soc. 107', where: null, reading: 'from memory' },
+  'iwama-tautz-1981': { author: 'Iwama & Tautz', year: 1981, title: 'A simple growth model for salmonids in hatcheries, Can. J. Fish. Aquat. Sci. 38', where: null, reading: 'read in a reproduction' },
+  'jobling-2003': { author: 'Jobling', year: 2003, title: 'The thermal growth coefficient model of fish growth: a cautionary note, Aquac. Res. 34:581-584', where: null, reading: 'read' },
+  'dwyer-1981': { author: 'Dwyer et al.', year: 1981, title: 'Monthly temperature units of trout growth, as tabled', where: null, reading: 'read in a reproduction' },
   // Climate and places
   'arguez-2012': { author: 'Arguez et al., NOAA NCEI', year: 2012, title: "NOAA's 1981-2010 US climate normals, Bull. Am. Meteorol. Soc., doi:10.1175/BAMS-D-11-00197.1", where: 'monthly normals', reading: 'read' },
   'census-zcta': { author: 'US Census Bureau', year: 2021, title: 'Gazetteer files: ZIP Code Tabulation Areas', where: 'internal points', reading: 'read' },
