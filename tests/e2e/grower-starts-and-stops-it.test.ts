@@ -23,7 +23,7 @@ interface Started {
 
 function start(dataDir: string, ...options: string[]): Started {
   const child = spawn('node', ['scripts/start.mjs', '--data', dataDir, ...options], {
-    env: plainEnvironment(),
+    env: { ...plainEnvironment(), NODE_ENV: 'development' },
   })
   let words = ''
   const ready = new Promise<string>((done, fail) => {
