@@ -1,5 +1,6 @@
 import { mkdir } from 'node:fs/promises'
 
+import { forgetDemo, seedWasCut } from './demo-ground.mjs'
 import { Fault } from './fault.mjs'
 import { rememberedPorts, tryPort } from './ports.mjs'
 import { takeOver, writeNote } from './run-note.mjs'
@@ -42,10 +43,12 @@ export async function claimGround(dataDir, wantedPort) {
  * @param {Omit<import('./start-product.mjs').ProductOptions, 'onDeath'> & { origin: string, startOver?: boolean }} options
  */
 export async function layGround(crew, options) {
-  const { dataDir, port, origin, clockOffsetMs, durable, environment, startOver } = options
+  const { dataDir, port, origin, clockOffsetMs, durable, environment } = options
+  const named = namedIn(environment)
+  const startOver = options.startOver === true || (!named.database && (await seedWasCut(dataDir)))
+  if (startOver) await forgetDemo(dataDir)
   const secrets = await readSecrets(dataDir)
   const ports = await rememberedPorts(dataDir, durable ? FIRST_PORTS : ANY_PORTS)
-  const named = namedIn(environment)
   const given = { dataDir, origin, clockOffsetMs, ports, secrets }
   const [database, mail, payments] = await Promise.all([
     named.database ? null : step('Database', () => startDatabase(crew, { dataDir, durable, startOver })),
@@ -54,6 +57,6 @@ export async function layGround(crew, options) {
   ])
   const databaseUrl = environment.DATABASE_URL ?? database?.url ?? ''
   const settings = serverEnvironment({ ...given, port, databaseUrl }, environment)
-  if (database) await seedOnce(crew, { database, dataDir, settings })
+  if (database) await seedOnce(crew, { dataDir, small: !durable, ownerUrl: database.ownerUrl, settings })
   return { database, mail, payments, settings }
 }

@@ -1,28 +1,20 @@
-import { existsSync } from 'node:fs'
-import path from 'node:path'
-
+import { isSeeded, seedAndMark } from './demo-ground.mjs'
 import { demoPeopleFile } from './demo-people.mjs'
-import { ROOT } from './project-root.mjs'
-import { step, tell } from './tell.mjs'
+import { step } from './tell.mjs'
 
 /**
- * @typedef {Awaited<ReturnType<typeof import('./start-database.mjs').startDatabase>>} OwnDatabase
  * @param {import('./crew.mjs').Crew} crew
- * @param {{ database: OwnDatabase, dataDir: string, settings: Record<string, string | undefined> }} given
+ * @param {{ dataDir: string, small: boolean, ownerUrl: string, settings: Record<string, string | undefined> }} given
  */
-export async function seedOnce(crew, { database, dataDir, settings }) {
-  if (await database.isSeeded()) return
-  if (!existsSync(path.join(ROOT, 'seed/run.ts'))) {
-    tell('The database stays empty: there is no seed/run.ts.')
-    return
-  }
+export async function seedOnce(crew, { dataDir, small, ownerUrl, settings }) {
+  if (await isSeeded(dataDir)) return
   const environment = {
     ...settings,
-    DATABASE_OWNER_URL: database.ownerUrl,
+    DATABASE_OWNER_URL: ownerUrl,
     DEMO_PEOPLE_FILE: demoPeopleFile(dataDir),
   }
-  const command = ['node', '--import', 'tsx', 'seed/run.ts']
+  const command = ['node', '--import', 'tsx', 'seed/run.ts', ...(small ? ['--small'] : [])]
   await step('Places, rules and demo people', () =>
-    database.seedOnce(() => crew.run({ name: 'seed', command, environment })),
+    seedAndMark(dataDir, () => crew.run({ name: 'seed', command, environment })),
   )
 }

@@ -2,11 +2,9 @@
 // With DATABASE_URL in the environment: adds what a new installation needs there, and throws nothing away.
 import './check-node.mjs'
 
-import { rm } from 'node:fs/promises'
 import path from 'node:path'
 
 import { makeCrew } from './crew.mjs'
-import { demoPeopleFile } from './demo-people.mjs'
 import { Fault, sentenceOf } from './fault.mjs'
 import { claimGround, layGround } from './lay-ground.mjs'
 import { DATA } from './project-root.mjs'
@@ -20,8 +18,6 @@ async function startOver(crew, dataDir, clockOffsetMs) {
     throw new Fault('This would throw away every row. In production, name the database in DATABASE_URL.')
   }
   const { port, origin } = await claimGround(dataDir, 0)
-  const old = ['uploads', 'stripe', 'mail'].map((name) => path.join(dataDir, name))
-  await Promise.all([...old, demoPeopleFile(dataDir)].map((one) => rm(one, { recursive: true, force: true })))
   const environment = process.env
   await layGround(crew, { dataDir, port, origin, clockOffsetMs, durable: true, environment, startOver: true })
 }

@@ -36,7 +36,8 @@ export function serverEnvironment(own, environment) {
     SMTP_URL: `smtp://127.0.0.1:${own.ports.smtp}`,
     UPLOAD_DIR: path.join(own.dataDir, 'uploads'),
     WEB_DIR: path.join(ROOT, 'dist'),
-    DEMO: production || named.database ? 'off' : 'on',
+    // Invented people do not belong in a named database, and their cards not at a real processor.
+    DEMO: production || named.database || named.payments ? 'off' : 'on',
     ...(own.clockOffsetMs === 0 ? {} : { CLOCK_OFFSET_MS: String(own.clockOffsetMs) }),
     ...(named.payments
       ? {}

@@ -1,4 +1,4 @@
-import { access, readFile, rm, writeFile } from 'node:fs/promises'
+import { readFile, rm, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 
 import mysql from 'mysql2/promise'
@@ -10,13 +10,6 @@ import { plainEnvironment } from './plain-environment.mjs'
 import { ROOT } from './project-root.mjs'
 
 export const DATABASE = 'tankward'
-
-/** @param {string} file */
-const exists = (file) =>
-  access(file).then(
-    () => true,
-    () => false,
-  )
 
 /** @param {import('./mariadb.mjs').Mariadb} server */
 async function emptyDatabase(server) {
@@ -39,34 +32,21 @@ async function migrate(crew, ownerUrl, stamp) {
 }
 
 /**
- * Our own MariaDB under `<dataDir>/mariadb`, migrated. A seed that was cut short is begun again from nothing.
+ * Our own MariaDB under `<dataDir>/mariadb`, migrated; `startOver`: emptied first.
  * @param {import('./crew.mjs').Crew} crew
  * @param {{ dataDir: string, durable: boolean, startOver?: boolean }} options
  */
 export async function startDatabase(crew, { dataDir, durable, startOver = false }) {
   const dir = path.join(dataDir, 'mariadb')
-  const begun = path.join(dir, 'seed-begun')
-  const done = path.join(dir, 'seed-done')
   const migrated = path.join(dir, 'migrated')
   const server = await crew.adopt(
     startMariadb({ dir, durable, bufferPoolMb: durable ? 256 : 128, databases: [DATABASE] }),
   )
-  if (startOver || ((await exists(begun)) && !(await exists(done)))) {
+  if (startOver) {
+    await rm(migrated, { force: true })
     await emptyDatabase(server)
-    await Promise.all([begun, done, migrated].map((mark) => rm(mark, { force: true })))
   }
   await migrate(crew, server.url(DATABASE, 'owner'), migrated)
   await narrowRights(server, DATABASE)
-  return {
-    pid: server.pid,
-    url: server.url(DATABASE),
-    ownerUrl: server.url(DATABASE, 'owner'),
-    isSeeded: () => exists(done),
-    /** @param {() => Promise<void>} seed */
-    seedOnce: async (seed) => {
-      await writeFile(begun, '')
-      await seed()
-      await writeFile(done, '')
-    },
-  }
+  return { pid: server.pid, url: server.url(DATABASE), ownerUrl: server.url(DATABASE, 'owner') }
 }

@@ -1,8 +1,6 @@
-import { existsSync } from 'node:fs'
 import path from 'node:path'
 
 import { plainEnvironment } from './plain-environment.mjs'
-import { ROOT } from './project-root.mjs'
 import { waitUntilUp } from './wait-until-up.mjs'
 
 const TSX = ['node', '--import', 'tsx']
@@ -34,7 +32,6 @@ export async function startMailCatcher(crew, { dataDir, ports }) {
 
 /** The practice payment processor; it keeps its books on disk. @param {import('./crew.mjs').Crew} crew @param {StandIns} given */
 export async function startPayments(crew, { dataDir, origin, clockOffsetMs, ports, secrets }) {
-  if (!existsSync(path.join(ROOT, 'payments/fake/main.ts'))) return null
   const url = `http://127.0.0.1:${ports.pay}`
   const member = crew.start({
     name: 'practice payment processor',
