@@ -72,7 +72,13 @@ const table = {
   'iwama-tautz-1981': { author: 'Iwama & Tautz', year: 1981, title: 'A simple growth model for salmonids in hatcheries, Can. J. Fish. Aquat. Sci. 38', where: null, reading: 'read in a reproduction' },
   'jobling-2003': { author: 'Jobling', year: 2003, title: 'The thermal growth coefficient model of fish growth: a cautionary note, Aquac. Res. 34:581-584', where: null, reading: 'read' },
   'dwyer-1981': { author: 'Dwyer et al.', year: 1981, title: 'Monthly temperature units of trout growth, as tabled', where: null, reading: 'read in a reproduction' },
+  // Transport
+  'mx392': { author: 'Swann', year: null, title: 'Transportation of fish in bags, University of Missouri Extension MX392', where: 'opening', reading: 'read in part' },
+  'dupree-huner-1984': { author: 'Dupree & Huner', year: 1984, title: 'Third report to the fish farmers, US Fish and Wildlife Service', where: 'bag loading table', reading: 'read in a reproduction' },
+  'froese-1998': { author: 'Froese', year: 1998, title: 'Insulating properties of styrofoam boxes used for transporting live fish, Aquaculture 159:283-292', where: null, reading: 'abstract read' },
+  'lsu-cocahoe': { author: 'LSU AgCenter', year: null, title: 'Cocahoe minnow manual', where: 'ch. 9', reading: 'read' },
   // Climate and places
+  'karney-2013': { author: 'Karney', year: 2013, title: 'Algorithms for geodesics, J. Geod. 87:43-55', where: 'inverse problem', reading: 'from memory' },
   'arguez-2012': { author: 'Arguez et al., NOAA NCEI', year: 2012, title: "NOAA's 1981-2010 US climate normals, Bull. Am. Meteorol. Soc., doi:10.1175/BAMS-D-11-00197.1", where: 'monthly normals', reading: 'read' },
   'census-zcta': { author: 'US Census Bureau', year: 2021, title: 'Gazetteer files: ZIP Code Tabulation Areas', where: 'internal points', reading: 'read' },
   'geonames': { author: 'GeoNames', year: null, title: 'Places with population, CC BY 4.0', where: null, reading: 'read' },
