@@ -58,8 +58,10 @@ function Asked({ email }: { email: string }) {
   const box = useRef<View>(null)
   useEffect(() => box.current?.focus(), [])
   return (
-    <View ref={box} tabIndex={-1} style={styles.frame}>
-      <Heading level={2}>Look into your mailbox</Heading>
+    <View style={styles.frame}>
+      <View ref={box} tabIndex={-1}>
+        <Heading level={2}>Look into your mailbox</Heading>
+      </View>
       <Text>
         If <Text face="strong">{email}</Text> has an account here, a mail with a link is on its way. The link
         works once, for ten minutes.

@@ -39,8 +39,10 @@ export function MailboxNotice({ email, why }: Props) {
   }
 
   return (
-    <View ref={box} tabIndex={-1} style={styles.frame}>
-      <Heading level={2}>Look into your mailbox</Heading>
+    <View style={styles.frame}>
+      <View ref={box} tabIndex={-1}>
+        <Heading level={2}>Look into your mailbox</Heading>
+      </View>
       <Text>{openings[why]}</Text>
       <Text>
         We wrote to <Text face="strong">{email}</Text>. If nothing comes within a few minutes, look into the

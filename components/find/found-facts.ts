@@ -44,7 +44,7 @@ export function foundFacts(found: FoundListing, asked: Asked): TagFacts {
     waterText: found.waterC === undefined ? undefined : printBothTemperatures(found.waterC, units),
     priceText: printCents(isTotal ? (found.totalCents ?? 0) : found.unitCents),
     priceUnitText: isTotal ? `for ${printCount(count)}` : found.category === 'fish' ? 'a fish' : 'each',
-    distanceText: state ? `${aboutDistance(found.distanceKm, units)} ${found.bearing}`.trim() : undefined,
+    distanceText: state ? distanceText(found, units) : undefined,
     placeText: found.placeText,
     dayText: found.nextPickup ? `Pickup ${pickupDay(found.nextPickup)}` : undefined,
     photoUrl: found.photo ? photoUrl(found.photo.photoId, 320) : undefined,
@@ -60,6 +60,12 @@ export function foundFacts(found: FoundListing, asked: Asked): TagFacts {
       },
     },
   }
+}
+
+// Both in one cell: there is no direction to tell.
+function distanceText({ distanceKm, bearing }: FoundListing, units: UnitSystem): string {
+  const about = aboutDistance(distanceKm, units)
+  return bearing === 'here' ? about : `${about} ${bearing}`
 }
 
 function sizeText({ sizeLoMm, sizeHiMm }: FoundListing, units: UnitSystem): string {

@@ -4,6 +4,7 @@ import { NoResults } from './no-results'
 import { ResultTag } from './result-tag'
 import type { Find } from './use-find'
 
+import { NoConnection } from '@/components/listings/no-connection'
 import { TagSkeleton } from '@/components/listings/tag-skeleton'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
@@ -20,15 +21,18 @@ interface Props {
 
 export function ResultList({ find, selectedPin, onHot }: Props) {
   const { search, found } = find
+  if (search.isPending && search.isPaused) {
+    return <NoConnection kept="Your filters are kept." onRetry={() => void search.refetch()} />
+  }
   if (search.isPending) return <TagSkeleton label="Loading listings" count={4} />
   if (search.isError && found.length === 0) {
-    const isOffline = search.error instanceof NoAnswer
+    const isSilent = search.error instanceof NoAnswer
     return (
       <ErrorState
-        title={isOffline ? 'No connection' : 'The search did not work'}
+        title={isSilent ? 'No answer' : 'The search did not work'}
         body={
-          isOffline
-            ? 'Your filters are kept. Go where there is a signal, and try again.'
+          isSilent
+            ? 'Your filters are kept. Try again in a moment.'
             : `${search.error.message}. Your filters are kept.`.replace('..', '.')
         }
         onRetry={() => void search.refetch()}
@@ -68,6 +72,13 @@ export function ResultList({ find, selectedPin, onHot }: Props) {
 }
 
 function ListEnd({ find: { search, found } }: { find: Find }) {
+  if (search.hasNextPage && search.isPaused) {
+    return (
+      <Banner isLive tone="caution" title="No connection">
+        More will load by itself as soon as there is a signal.
+      </Banner>
+    )
+  }
   if (search.hasNextPage) {
     return (
       <Button

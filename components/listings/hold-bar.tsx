@@ -1,15 +1,16 @@
 import type { Href } from 'expo-router'
 import { StyleSheet, View } from 'react-native'
 
-import { unitCentsAt } from './order-count'
-import { percent } from './percent'
-
 import { ButtonLink } from '@/components/ui/button-link'
 import { Text } from '@/components/ui/text'
 import { layout, space } from '@/constants/theme'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { quoteOrder } from '@/shared/domain/money/quote-order'
 import { printCount } from '@/shared/units/count'
 import { printCents } from '@/shared/units/money'
+
+// Collected at the place: no box, no freight; the fee is the seller's.
+const pickup = { boxCents: 0, freightCents: 0, taxCents: 0, feeBp: 0 } as const
 
 interface Props {
   listing: ShownListing
@@ -20,7 +21,13 @@ interface Props {
 /** The one thing to do on a listing, always in reach. */
 export function HoldBar({ listing, count, near }: Props) {
   const { listingId, body } = listing
-  const totalCents = unitCentsAt(body.tiers, count) * count
+  const depositBp = body.depositPct * 100
+  const { totalCents, depositCents } = quoteOrder({
+    ...pickup,
+    tiers: body.tiers,
+    quantity: count,
+    depositBp,
+  })
   const href = {
     pathname: '/listings/[listingId]/reserve',
     params: { listingId, count: String(count), ...(near ? { near } : {}) },
@@ -32,7 +39,7 @@ export function HoldBar({ listing, count, near }: Props) {
           {printCents(totalCents)} for {printCount(count)}
         </Text>
         <Text size="small" tint="muted">
-          {percent(body.depositPct)} deposit now, before sales tax
+          {printCents(depositCents)} deposit now, the rest before you collect
         </Text>
       </View>
       <ButtonLink icon="lock" href={href} label={`Hold ${printCount(count)} fish`} />

@@ -1,12 +1,11 @@
-import { useState } from 'react'
+import { lazy, useState } from 'react'
 
-import { HoldBar } from './hold-bar'
-import { ListingFault } from './listing-fault'
-import { ListingStory } from './listing-story'
+import { NoConnection } from './no-connection'
 import { countLimits, fitCount } from './order-count'
 import { whyNotHeld } from './selling-state'
 
 import { Page } from '@/components/layout/page'
+import { LazyPart } from '@/components/ui/lazy-part'
 import { SkeletonRows } from '@/components/ui/skeleton'
 import { useCurrentPlace } from '@/hooks/use-current-place'
 import { useListing } from '@/hooks/use-listings'
@@ -19,8 +18,12 @@ interface Props {
   linkedNear: string | undefined
 }
 
-const back = { label: 'Back to find', href: '/' } as const
+const loadGroup = () => import('@/components/listings/listing-group')
+const HoldBar = lazy(() => loadGroup().then((group) => ({ default: group.HoldBar })))
+const ListingFault = lazy(() => loadGroup().then((group) => ({ default: group.ListingFault })))
+const ListingStory = lazy(() => loadGroup().then((group) => ({ default: group.ListingStory })))
 
+/** One page from loading to loaded: the keyboard stays where it is while the parts arrive. */
 export function ListingScreen({ listingId, wantedCount, linkedNear }: Props) {
   const { place, isKnown } = useCurrentPlace()
   const [chosenNear, setChosenNear] = useState(linkedNear)
@@ -28,36 +31,48 @@ export function ListingScreen({ listingId, wantedCount, linkedNear }: Props) {
   const near = chosenNear ?? place?.near
   const query = useListing(listingId, near, isKnown || chosenNear !== undefined)
   const listing = query.data
-  if (!listing) {
-    return (
-      <Page title="Listing" isHeadingHidden back={back}>
-        {query.isError ? (
+  const isElsewhere = chosenNear !== undefined && chosenNear !== place?.near
+  const limits = listing ? countLimits(listing.body, listing.free) : null
+  const count = limits ? (fitCount(chosenCount ?? limits.least, limits) ?? limits.least) : 1
+  const refusal = listing ? whyNotHeld(listing) : null
+  const footer =
+    listing && !refusal ? (
+      <LazyPart label="Loading">
+        <HoldBar listing={listing} count={count} near={isElsewhere ? chosenNear : undefined} />
+      </LazyPart>
+    ) : undefined
+  return (
+    <Page
+      title={listing?.title ?? 'Listing'}
+      isHeadingHidden
+      back={{ label: 'Back to find', href: '/' }}
+      footer={footer}
+    >
+      <LazyPart label="Loading the listing" fallback={<Waiting />}>
+        {listing && limits ? (
+          <ListingStory
+            listing={listing}
+            count={count}
+            limits={limits}
+            refusal={refusal}
+            placeLabel={isElsewhere ? '' : (place?.label ?? '')}
+            onCount={setChosenCount}
+            onPlace={() => setChosenNear(undefined)}
+          />
+        ) : query.isError ? (
           <ListingFault
             error={query.error}
             onRetry={() => void query.refetch()}
             isRetrying={query.isFetching}
           />
+        ) : query.isPaused ? (
+          <NoConnection kept="Nothing is lost." onRetry={() => void query.refetch()} />
         ) : (
-          <SkeletonRows label="Loading the listing" rows={3} />
+          <Waiting />
         )}
-      </Page>
-    )
-  }
-  const limits = countLimits(listing.body, listing.free)
-  const count = fitCount(chosenCount ?? limits.least, limits) ?? limits.least
-  const refusal = whyNotHeld(listing)
-  const footer = refusal ? undefined : <HoldBar listing={listing} count={count} near={chosenNear} />
-  return (
-    <Page title={listing.title} isHeadingHidden back={back} footer={footer}>
-      <ListingStory
-        listing={listing}
-        count={count}
-        limits={limits}
-        refusal={refusal}
-        placeLabel={chosenNear && chosenNear !== place?.near ? '' : (place?.label ?? '')}
-        onCount={setChosenCount}
-        onPlace={() => setChosenNear(undefined)}
-      />
+      </LazyPart>
     </Page>
   )
 }
+
+const Waiting = () => <SkeletonRows label="Loading the listing" rows={3} />

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 
-import { fitCount, unitCentsAt } from './order-count'
+import { fitCount } from './order-count'
 
 const limits = { least: 25, step: 10, most: 62 }
 
@@ -17,16 +17,5 @@ describe('a count that may be ordered', () => {
 
   it('is none when the smallest order is not left', () => {
     expect(fitCount(25, { ...limits, most: 24 })).toBeNull()
-  })
-})
-
-describe('the price of one', () => {
-  const tiers = [
-    { fromCount: 25, unitCents: 100 },
-    { fromCount: 100, unitCents: 89 },
-  ]
-
-  it('falls where the next price begins', () => {
-    expect([10, 25, 99, 100, 500].map((count) => unitCentsAt(tiers, count))).toEqual([100, 100, 100, 89, 89])
   })
 })

@@ -18,11 +18,3 @@ export function fitCount(wanted: number, { least, step, most }: CountLimits): nu
   const stepped = least + Math.round((wanted - least) / step) * step
   return Math.min(highest, Math.max(least, stepped))
 }
-
-/** Cents for one at that count; the first price also covers counts below it. */
-export function unitCentsAt(tiers: ListingBody['tiers'], count: number): number {
-  return tiers.reduce(
-    (cents, tier, index) => (index === 0 || tier.fromCount <= count ? tier.unitCents : cents),
-    0,
-  )
-}

@@ -4,14 +4,13 @@ import type { TagFacts } from './tag-facts'
 
 import { legalWords } from '@/components/rules/legal-words'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { tierFor } from '@/shared/domain/money/tier-price'
 import { printCount } from '@/shared/units/count'
 import { aboutDistance } from '@/shared/units/distance'
 import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
 import { printBothTemperatures } from '@/shared/units/temperature'
 import type { UnitSystem } from '@/shared/units/unit-system'
-
-import { unitCentsAt } from './order-count'
 
 interface Asked {
   units: UnitSystem
@@ -28,7 +27,7 @@ export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFa
     stage: stageName(body.stage),
     countText: `${printCount(listing.free)} left`,
     waterText: printBothTemperatures(body.water.temperatureC, units),
-    priceText: printCents(unitCentsAt(body.tiers, count)),
+    priceText: printCents(tierFor(body.tiers, count)?.unitCents ?? 0),
     priceUnitText: `a fish, for ${printCount(count)}`,
     distanceText:
       distanceKm === undefined ? undefined : `${aboutDistance(distanceKm, units)} ${bearing ?? ''}`.trim(),

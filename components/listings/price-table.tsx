@@ -4,10 +4,9 @@ import type { Column } from '@/components/ui/data-table-types'
 import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
 import type { ListingBody } from '@/shared/contracts/listings'
+import { nextTier, tierFor } from '@/shared/domain/money/tier-price'
 import { printCount } from '@/shared/units/count'
 import { printCents } from '@/shared/units/money'
-
-import { unitCentsAt } from './order-count'
 
 type Tier = ListingBody['tiers'][number]
 
@@ -25,8 +24,8 @@ interface Props {
 export function PriceTable({ body, count }: Props) {
   // The first price may be written from a smaller count than anybody can order.
   const tiers = body.tiers.map((tier) => ({ ...tier, fromCount: Math.max(tier.fromCount, body.minOrder) }))
-  const unitCents = unitCentsAt(tiers, count)
-  const next = tiers.find((tier) => tier.fromCount > count)
+  const unitCents = tierFor(tiers, count)?.unitCents ?? 0
+  const next = nextTier(tiers, count)
   return (
     <Card>
       <Heading level={2} size="lead">
@@ -43,11 +42,11 @@ export function PriceTable({ body, count }: Props) {
         <Text face="strong" isFigures>
           {printCents(unitCents * count)}
         </Text>
-        , {printCents(unitCents)} each, before sales tax.
+        , {printCents(unitCents)} each.
       </Text>
       {next ? (
         <Text size="note" tint="muted">
-          From {printCount(next.fromCount)} on, each costs {printCents(next.unitCents)}.
+          {printCount(next.missing)} more, and each costs {printCents(next.unitCents)}.
         </Text>
       ) : null}
     </Card>

@@ -57,17 +57,20 @@ export function TagCells({ facts, size }: PartProps) {
     ...(size === 'page' && facts.dayText ? [{ caption: 'Next day', value: facts.dayText }] : []),
   ]
   return (
-    <View style={styles.cells}>
-      {cells.map(({ caption, value }, index) => (
-        <View key={caption} style={[styles.cell, index > 0 ? styles.laterCell : null]}>
-          <Text size="small" tint="muted">
-            {`${caption} `}
-          </Text>
-          <Text size={size === 'page' ? 'lead' : 'body'} face="strong">
-            {value}
-          </Text>
-        </View>
-      ))}
+    <View style={styles.clip}>
+      <View style={styles.cellsFrame}>
+      <View style={styles.cells}>
+        {cells.map(({ caption, value }) => (
+          <View key={caption} style={styles.cell}>
+            <Text size="small" tint="muted">
+              {`${caption} `}
+            </Text>
+            <Text size={size === 'page' ? 'lead' : 'body'} face="strong">
+              {value}
+            </Text>
+          </View>
+        ))}
+      </View>
     </View>
   )
 }
@@ -136,9 +139,16 @@ const styles = StyleSheet.create({
   title: { gap: 2 },
   italic: { fontStyle: 'italic' },
   sizeLine: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'baseline', columnGap: space.sm },
-  cells: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.md, rowGap: space.xs },
-  cell: {},
-  laterCell: { borderLeftWidth: 1, borderLeftColor: color.line, paddingLeft: space.md },
+  // The rule before the first cell of each line is cut off, wherever the lines break.
+  clip: { overflow: 'hidden' },
+  cells: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    columnGap: space.md,
+    rowGap: space.xs,
+    marginLeft: -(space.md + 1),
+  },
+  cell: { borderLeftWidth: 1, borderLeftColor: color.line, paddingLeft: space.md },
   badges: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.md, rowGap: 2 },
   noPhoto: {
     width: '100%',

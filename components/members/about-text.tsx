@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react'
 import { StyleSheet, View } from 'react-native'
 
+import { ButtonLink } from '@/components/ui/button-link'
 import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
@@ -48,6 +49,7 @@ export function AboutText() {
         </Text>
         <Text>{cautionTexts['G-1']}</Text>
       </Part>
+      <ButtonLink icon="find" href="/" label="Find growers near you" />
     </View>
   )
 }

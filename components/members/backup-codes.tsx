@@ -26,13 +26,15 @@ export function BackupCodes({ codes }: { codes: readonly string[] }) {
     }
   }
   return (
-    <View ref={box} tabIndex={-1} style={styles.frame}>
+    <View style={styles.frame}>
       <Banner tone="safe" icon="shield" title="Your second factor is on">
         From now on signing in asks for a code after the password.
       </Banner>
-      <Heading level={2} size="lead">
-        Keep these backup codes
-      </Heading>
+      <View ref={box} tabIndex={-1}>
+        <Heading level={2} size="lead">
+          Keep these backup codes
+        </Heading>
+      </View>
       <Text>
         Each opens your account once when your phone is lost. They are shown this one time only: write them
         down or print them.

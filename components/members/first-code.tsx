@@ -43,10 +43,12 @@ export function FirstCode({ enrolment, onProven }: Props) {
   }
 
   return (
-    <View ref={box} tabIndex={-1} style={styles.frame}>
-      <Heading level={2} size="lead">
-        1. Put this into your app
-      </Heading>
+    <View style={styles.frame}>
+      <View ref={box} tabIndex={-1}>
+        <Heading level={2} size="lead">
+          1. Put this into your app
+        </Heading>
+      </View>
       <Card>
         <LazyPart label="Drawing the code">
           <QrCode

@@ -8,6 +8,7 @@ import { SignOut } from './sign-out'
 import { ThemeSetting } from './theme-setting'
 import { UnitsSetting } from './units-setting'
 
+import { NoConnection } from '@/components/listings/no-connection'
 import { Card } from '@/components/ui/card'
 import { ErrorState } from '@/components/ui/error-state'
 import { Link } from '@/components/ui/link'
@@ -15,11 +16,14 @@ import { SkeletonRows } from '@/components/ui/skeleton'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import { useMe } from '@/hooks/use-me'
+import { useOnline } from '@/hooks/use-online'
 
 export function MemberHome() {
   const { me, error, refetch } = useMe()
+  const isOnline = useOnline()
   if (me === null) return <Invitation />
   if (!me) {
+    if (!isOnline) return <NoConnection kept="Nothing is lost." onRetry={() => void refetch()} />
     if (!error) return <SkeletonRows label="Loading your account" rows={4} />
     return (
       <ErrorState

@@ -23,6 +23,8 @@ export function LegalStatus({ gate }: Props) {
   const { icon, tone } = legalWords(status, buyerState)
   const tint =
     tone === 'safe' ? 'safe' : tone === 'danger' ? 'danger' : tone === 'caution' ? 'warm' : 'netting'
+  // Where our own policy says no, there is no rule to show.
+  const ownRule = gate.buy === 'no' ? gate.cautions[0]?.text : undefined
   const state = findState(buyerState)?.name ?? buyerState
   return (
     <Card>
@@ -51,7 +53,9 @@ export function LegalStatus({ gate }: Props) {
           ))}
         </View>
       ) : (
-        <Text tint="muted">We hold no reading of any rule about this species for these places.</Text>
+        <Text tint="muted">
+          {ownRule ?? 'We hold no reading of any rule about this species for these places.'}
+        </Text>
       )}
       {papersNeeded.length > 0 ? (
         <View>

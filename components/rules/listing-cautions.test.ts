@@ -17,4 +17,13 @@ describe('cautions beside a listing', () => {
     expect(ids({ cautions: said })).toEqual(['G-1', 'G-3', 'G-5', 'G-12', 'G-13'])
     expect(listingCautions({ cautions: said } as GateVerdict)[0]?.text).toBe('text of G-1')
   })
+
+  it('puts our own rule about a state before everything else', () => {
+    expect(ids({ cautions: [{ id: 'apart', text: 'Not to Alaska.' }] })).toEqual([
+      'apart',
+      'G-1',
+      'G-12',
+      'G-13',
+    ])
+  })
 })

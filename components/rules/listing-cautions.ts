@@ -10,6 +10,7 @@ const always: readonly CautionId[] = ['G-1', 'G-12', 'G-13']
 export function listingCautions(gate: GateVerdict | undefined): Caution[] {
   const told = new Map<string, string>(gate?.cautions.map(({ id, text }) => [id, text]))
   for (const id of always) if (!told.has(id)) told.set(id, cautionTexts[id])
-  const number = (id: string) => Number(id.slice(2))
+  // What has no number of its own (our rule for a state apart) comes first.
+  const number = (id: string) => Number(/^G-(\d+)$/.exec(id)?.[1] ?? 0)
   return Array.from(told, ([id, text]) => ({ id, text })).sort((a, b) => number(a.id) - number(b.id))
 }

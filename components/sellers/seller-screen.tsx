@@ -1,5 +1,6 @@
 import { lazy } from 'react'
 
+import { NoConnection } from '@/components/listings/no-connection'
 import { Page } from '@/components/layout/page'
 import { LazyPart } from '@/components/ui/lazy-part'
 import { SkeletonRows } from '@/components/ui/skeleton'
@@ -14,7 +15,7 @@ const SellerFault = lazy(() =>
 
 /** One page from loading to loaded, so that its heading is not announced twice. */
 export function SellerScreen({ sellerId }: { sellerId: string }) {
-  const { data: seller, isError, error, isFetching, refetch } = useSeller(sellerId)
+  const { data: seller, isError, isPaused, error, isFetching, refetch } = useSeller(sellerId)
   return (
     <Page
       title={seller?.farmName ?? 'Grower'}
@@ -30,7 +31,12 @@ export function SellerScreen({ sellerId }: { sellerId: string }) {
         {!seller && isError ? (
           <SellerFault error={error} onRetry={() => void refetch()} isRetrying={isFetching} />
         ) : null}
-        {!seller && !isError ? <SkeletonRows label="Loading the grower’s page" rows={2} /> : null}
+        {!seller && !isError && isPaused ? (
+          <NoConnection kept="Nothing is lost." onRetry={() => void refetch()} />
+        ) : null}
+        {!seller && !isError && !isPaused ? (
+          <SkeletonRows label="Loading the grower’s page" rows={2} />
+        ) : null}
       </LazyPart>
     </Page>
   )
