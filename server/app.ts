@@ -18,6 +18,7 @@ import { photoRoutes } from '@/server/photos/photo-routes'
 import { placeRoutes } from '@/server/places/place-routes'
 import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
+import { shareRoutes } from '@/server/share/share-routes'
 import { stripeEvents } from '@/server/stripe-events/stripe-events'
 
 export interface AppSettings {
@@ -56,6 +57,7 @@ export function buildApp(settings: AppSettings): Express {
   app.use(compression({ filter: (req, res) => req.path.startsWith('/api/') && compression.filter(req, res) }))
   app.use('/api/v1', api(settings.origins))
   app.use('/photos', photoFiles())
+  app.use(shareRoutes({ webDir: settings.webDir, origin: settings.origins[0] ?? '' }))
   app.use(webApp(settings.webDir))
   app.use(unknownPath)
   app.use(problemHandler)
