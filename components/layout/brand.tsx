@@ -20,5 +20,12 @@ export function Brand({ isMarkOnly = false }: { isMarkOnly?: boolean }) {
 }
 
 const styles = StyleSheet.create({
-  brand: { flexDirection: 'row', alignItems: 'center', gap: space.sm, minHeight: touchPx },
+  brand: {
+    flexDirection: 'row',
+    alignItems: 'center',
+    gap: space.sm,
+    minHeight: touchPx,
+    minWidth: touchPx,
+    justifyContent: 'center',
+  },
 })

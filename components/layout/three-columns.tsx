@@ -29,7 +29,11 @@ export function ThreeColumns({ filters, main, map }: Props) {
           <ScrollView contentContainerStyle={styles.pad}>{filters.content}</ScrollView>
         </View>
       ) : null}
-      <View role="region" aria-label={main.label} style={styles.main}>
+      <View
+        role="region"
+        aria-label={main.label}
+        style={[styles.main, breakpoint === 'middle' ? styles.roomyMain : null]}
+      >
         {main.content}
       </View>
       {breakpoint === 'phone' ? null : (
@@ -46,5 +50,6 @@ const styles = StyleSheet.create({
   filters: { width: layout.filtersPx, borderRightWidth: 1, borderRightColor: color.line },
   pad: { paddingRight: space.lg, paddingBottom: space.xxl, gap: space.lg },
   main: { flex: 1.1, minWidth: 0 },
+  roomyMain: { flex: 1.6 },
   map: { flex: 1, minWidth: 0 },
 })

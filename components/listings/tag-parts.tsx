@@ -58,7 +58,6 @@ export function TagCells({ facts, size }: PartProps) {
   ]
   return (
     <View style={styles.clip}>
-      <View style={styles.cellsFrame}>
       <View style={styles.cells}>
         {cells.map(({ caption, value }) => (
           <View key={caption} style={styles.cell}>

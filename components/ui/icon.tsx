@@ -13,7 +13,15 @@ interface Props {
 export function Icon({ name, sizePx = 24, tint = 'ink', isFilled = false }: Props) {
   const pen = color[tint]
   return (
-    <svg width={sizePx} height={sizePx} viewBox="0 0 24 24" aria-hidden focusable={false} data-icon={name}>
+    <svg
+      width={sizePx}
+      height={sizePx}
+      viewBox="0 0 24 24"
+      aria-hidden
+      focusable={false}
+      style={{ flexShrink: 0 }}
+      data-icon={name}
+    >
       {iconPaths[name].map((path) => (
         <path
           key={path}

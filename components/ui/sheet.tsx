@@ -13,16 +13,17 @@ interface Props {
   children: ReactNode
   /** The act of the sheet, always in reach at the bottom. */
   footer?: ReactNode
-  /** On wider screens: a panel at the side, or a dialog in the middle. On a phone both fill the screen. */
+  /** On wider screens: a panel at the side, or a dialog in the middle. On a phone the panel
+   *  fills the screen and the dialog stands at its foot. */
   shape?: 'panel' | 'dialog'
 }
 
 export function Sheet({ title, isOpen, onClose, children, footer, shape = 'panel' }: Props) {
   const isPhone = breakpointOf(useWindowDimensions().width) === 'phone'
-  const place = isPhone ? styles.full : shape === 'panel' ? styles.panel : styles.dialog
+  const place = isPhone ? (shape === 'panel' ? styles.full : styles.low) : styles[shape]
   return (
     <Modal visible={isOpen} transparent animationType="none" onRequestClose={onClose} aria-label={title}>
-      <View style={[styles.back, shape === 'dialog' && !isPhone ? styles.centre : null]}>
+      <View style={[styles.back, shape === 'dialog' ? (isPhone ? styles.atFoot : styles.centre) : null]}>
         <View
           style={[styles.sheet, place]}
           dataSet={{ enter: isPhone ? 'up' : shape === 'panel' ? 'side' : 'fade' }}
@@ -49,10 +50,12 @@ export function Sheet({ title, isOpen, onClose, children, footer, shape = 'panel
 
 const styles = StyleSheet.create({
   back: { flex: 1, flexDirection: 'row', justifyContent: 'flex-end' },
+  atFoot: { alignItems: 'flex-end' },
   centre: { justifyContent: 'center', alignItems: 'center' },
   scrim: { position: 'absolute', top: 0, right: 0, bottom: 0, left: 0, backgroundColor: color.scrim },
   sheet: { zIndex: 1, backgroundColor: color.mist, maxHeight: '100%' },
   full: { width: '100%', height: '100%' },
+  low: { width: '100%', maxHeight: '90%', borderTopWidth: 2, borderTopColor: color.ink },
   panel: { width: 440, height: '100%', borderLeftWidth: 1, borderLeftColor: color.edge },
   dialog: { width: 560, maxHeight: '90%', borderRadius: radius.tag, borderWidth: 1, borderColor: color.edge },
   head: {

@@ -15,7 +15,14 @@ const slants = ['M1 6L6 1', 'M1 11L11 1', 'M2 15L15 2', 'M7 15L15 7', 'M12 15L15
 export function Swatch({ pattern, tint, sizePx = 16 }: Props) {
   const pen = color[tint]
   return (
-    <svg width={sizePx} height={sizePx} viewBox="0 0 16 16" aria-hidden focusable={false}>
+    <svg
+      width={sizePx}
+      height={sizePx}
+      viewBox="0 0 16 16"
+      aria-hidden
+      focusable={false}
+      style={{ flexShrink: 0 }}
+    >
       <rect
         x={1}
         y={1}
