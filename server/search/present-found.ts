@@ -22,19 +22,27 @@ interface Around {
 interface Beside {
   windows: OpenWindow[]
   grounds: ReadonlyMap<string, string>
-  rules: SpeciesRule[]
+  legal: (facts: FoundFacts) => FoundListing['legal']
 }
 
-function legalOf(
-  { body, state }: FoundFacts,
+/** The gate for each kind of animal and state on the page, judged once: a page holds many of a few kinds. */
+function legalBook(
   rules: SpeciesRule[],
   { place, at }: Around,
-): FoundListing['legal'] {
-  const asked = { body, sellerState: state, buyerState: place.state, viewer: 'visitor' } as const
-  const taxa = taxaOf(body.taxonId)
-  const own = rules.filter((rule) => taxa.includes(rule.taxonId))
-  const { status, buy } = presentGate(askGate(asked, own, at.toISOString().slice(0, 10)), asked)
-  return { status, buy }
+): (facts: FoundFacts) => FoundListing['legal'] {
+  const today = at.toISOString().slice(0, 10)
+  const judged = new Map<string, FoundListing['legal']>()
+  return ({ body, state }) => {
+    const key = `${body.taxonId}|${state}|${/\d/.test(body.licenceNumbers)}`
+    const known = judged.get(key)
+    if (known) return known
+    const asked = { body, sellerState: state, buyerState: place.state, viewer: 'visitor' } as const
+    const taxa = taxaOf(body.taxonId)
+    const own = rules.filter((rule) => taxa.includes(rule.taxonId))
+    const { status, buy } = presentGate(askGate(asked, own, today), asked)
+    judged.set(key, { status, buy })
+    return { status, buy }
+  }
 }
 
 function presentOne(
@@ -69,7 +77,7 @@ function presentOne(
     bearing: bearingWords(around.place.centre, { lat, lng }) ?? 'here',
     ...(next ? { nextPickup: { startsAt: next.startsAt.toISOString(), zone: next.zone } } : {}),
     ...(rating ? { rating } : {}),
-    legal: legalOf(facts, beside.rules, around),
+    legal: beside.legal(facts),
   }
 }
 
@@ -86,8 +94,9 @@ export async function presentFound(hits: SearchHit[], around: Around): Promise<F
     }),
   ])
   const grounds = new Map(photos.map((photo) => [photo.id, photo.ground]))
+  const beside: Beside = { windows, grounds, legal: legalBook(rules, around) }
   return hits.flatMap((hit) => {
     const facts = found.get(hit.listingId)
-    return facts ? [presentOne(hit, facts, { around, beside: { windows, grounds, rules } })] : []
+    return facts ? [presentOne(hit, facts, { around, beside })] : []
   })
 }
