@@ -1,7 +1,7 @@
 import { useLocalSearchParams, useRouter } from 'expo-router'
 
-import { markHistory } from './mark-history'
 import { readFind, toFilters, writeFind, type FindState } from './find-params'
+import { useMarkedHistory } from './use-marked-history'
 
 import { useCurrentPlace } from '@/hooks/use-current-place'
 import type { KeptPlace } from '@/hooks/kept-place'
@@ -27,9 +27,11 @@ export function useFind() {
   const facets = useFacets(filters, isReady && search.isSuccess)
   const first = search.data?.pages[0]
 
+  const go = (next: FindState) => router.navigate({ pathname: '/', params: writeFind(next) })
+  const markHere = useMarkedHistory((params) => go(readFind(params)))
   function change(part: Partial<FindState>) {
-    markHistory()
-    router.navigate({ pathname: '/', params: writeFind({ ...state, ...part }) })
+    markHere()
+    go({ ...state, ...part })
   }
   function choosePlace(chosen: KeptPlace) {
     choose(chosen)
