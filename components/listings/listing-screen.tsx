@@ -6,7 +6,7 @@ import { whyNotHeld } from './selling-state'
 
 import { Page } from '@/components/layout/page'
 import { LazyPart } from '@/components/ui/lazy-part'
-import { SkeletonRows } from '@/components/ui/skeleton'
+import { SkeletonBlock, SkeletonRows } from '@/components/ui/skeleton'
 import { useCurrentPlace } from '@/hooks/use-current-place'
 import { useListing } from '@/hooks/use-listings'
 
@@ -37,7 +37,7 @@ export function ListingScreen({ listingId, wantedCount, linkedNear }: Props) {
   const refusal = listing ? whyNotHeld(listing) : null
   const footer =
     listing && !refusal ? (
-      <LazyPart label="Loading">
+      <LazyPart label="Loading" fallback={<SkeletonBlock heightPx={44} />}>
         <HoldBar listing={listing} count={count} near={isElsewhere ? chosenNear : undefined} />
       </LazyPart>
     ) : undefined
