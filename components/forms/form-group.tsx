@@ -60,7 +60,7 @@ const styles = StyleSheet.create({
     flexWrap: 'wrap',
     columnGap: space.lg,
     rowGap: space.lg,
-    alignItems: 'flex-end',
+    alignItems: 'flex-start',
   },
   cell: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
 })

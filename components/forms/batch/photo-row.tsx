@@ -1,4 +1,4 @@
-import { useFormState, useWatch } from 'react-hook-form'
+import { useFormContext, useFormState, useWatch } from 'react-hook-form'
 import { StyleSheet, View } from 'react-native'
 
 import { BoundCheck } from '@/components/forms/bound/bound-check'
@@ -23,6 +23,7 @@ export function PhotoRow({ at, onRemove }: Props) {
   const isPhone = useBreakpoint() === 'phone'
   const photo = useWatch<BatchTyping, `photos.${number}`>({ name: `photos.${at}` })
   const { errors } = useFormState<BatchTyping>({ name: `photos.${at}` })
+  const { trigger } = useFormContext<BatchTyping>()
   const fault = errors.photos?.[at]?.photoId?.message
   const pictureId = fieldIdOf(`photos.${at}.photoId`)
   return (
@@ -36,7 +37,11 @@ export function PhotoRow({ at, onRemove }: Props) {
       </View>
       <View style={styles.words}>
         {fault ? <FieldError id={`${pictureId}-error`} error={fault} /> : null}
-        <BoundCheck<BatchTyping> name={`photos.${at}.hasRuler`} label="A ruler lies beside the fish" />
+        <BoundCheck<BatchTyping>
+          name={`photos.${at}.hasRuler`}
+          label="A ruler lies beside the fish"
+          onChosen={() => void trigger('photos')}
+        />
         <BoundDay<BatchTyping> name={`photos.${at}.takenOn`} label="Taken on" />
         <BoundText<BatchTyping>
           name={`photos.${at}.caption`}

@@ -16,8 +16,8 @@ const remedies = [
   { value: 'replace', label: 'Replace them', hint: 'Only where the buyer agrees; otherwise a refund.' },
 ]
 const survival = [
-  { value: '0', label: 'No survival promise' },
-  ...[3, 4, 5, 6, 7].map((days) => ({ value: String(days), label: `Alive for ${days} days` })),
+  { value: '0', label: 'None' },
+  ...[3, 4, 5, 6, 7].map((days) => ({ value: String(days), label: `${days} days alive` })),
 ]
 
 export function PromiseGroup() {
@@ -52,7 +52,7 @@ export function PromiseGroup() {
         <FieldCell>
           <BoundText<BatchTyping>
             name="promise.windowHours"
-            label="Losses may be told for"
+            label="Time to tell losses"
             hint="After hand-over, 4 to 24."
             suffix="hours"
             isFigure
@@ -61,7 +61,7 @@ export function PromiseGroup() {
         <FieldCell>
           <BoundChoice<BatchTyping>
             name="promise.survivalDays"
-            label="Survival"
+            label="Survival promise"
             hint="Beyond that, if you like."
             choices={survival}
             isFolded

@@ -23,7 +23,9 @@ export function useBatchPhotos(form: UseFormReturn<BatchTyping>, today: string):
   const [refused, setRefused] = useState<string[]>([])
   const { sending, send, retry, drop } = usePhotoSending(({ photoId, takenOn }) => {
     const photo = { photoId, takenOn: takenOn ?? today, hasRuler: false, caption: '' }
-    form.setValue('photos', [...form.getValues('photos'), photo], { shouldDirty: true, shouldValidate: true })
+    // A complaint that stands there already is looked at again; none is made before the seller has gone on.
+    const shouldValidate = form.getFieldState('photos').invalid
+    form.setValue('photos', [...form.getValues('photos'), photo], { shouldDirty: true, shouldValidate })
   })
   function choose(files: readonly PickedFile[], room: number) {
     const faults = files.flatMap((file) => faultOf(file) ?? [])

@@ -87,7 +87,7 @@ export function WaterHealthGroup({ units, today }: Props) {
       </FieldRow>
       <BoundCheck<BatchTyping> name="feed.onPellets" label="They eat pellets" />
       <FieldRow>
-        <FieldCell>
+        <FieldCell minPx={240}>
           <BoundText<BatchTyping>
             name="feed.words"
             label={onPellets ? 'Which pellets' : 'What they eat'}

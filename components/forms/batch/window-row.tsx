@@ -46,8 +46,8 @@ export function WindowRow({ at, onRepeat, onRemove }: Props) {
         <Button
           kind="quiet"
           icon="calendar"
-          label="Same again next week"
-          spokenLabel={`Same again next week: ${named}`}
+          label="Same next week"
+          spokenLabel={`Same next week: ${named}`}
           onPress={onRepeat}
         />
         <Button kind="quiet" icon="trash" label="Remove" spokenLabel={`Remove ${named}`} onPress={onRemove} />

@@ -7,9 +7,11 @@ interface Props<T extends FieldValues> {
   name: FieldPathByValue<T, boolean>
   label: string
   hint?: string
+  /** Told after the form has taken the answer. */
+  onChosen?: () => void
 }
 
-export function BoundCheck<T extends FieldValues>({ name, ...words }: Props<T>) {
+export function BoundCheck<T extends FieldValues>({ name, onChosen, ...words }: Props<T>) {
   const { field, fieldState } = useController<T, FieldPathByValue<T, boolean>>({ name })
   return (
     <Checkbox
@@ -19,6 +21,7 @@ export function BoundCheck<T extends FieldValues>({ name, ...words }: Props<T>) 
       onChange={(isChecked) => {
         field.onChange(isChecked)
         field.onBlur()
+        onChosen?.()
       }}
       error={fieldState.error?.message}
     />
