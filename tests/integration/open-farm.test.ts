@@ -88,6 +88,14 @@ describe('opening a farm', () => {
     expect((await ann.get('/api/v1/sellers/mine').expect(200)).body).toEqual(body)
   })
 
+  it('opened on two devices at once is one farm', async () => {
+    await buildMember(server.db, { email: 'twice@example.org' })
+    const twice = await server.signedIn('twice@example.org')
+    const answers = await Promise.all([open(twice, farm), open(twice, farm), open(twice, farm)])
+    expect(answers.map((answer) => answer.status)).toEqual([201, 201, 201])
+    expect(new Set(answers.map((answer) => answer.body.sellerId)).size).toBe(1)
+  })
+
   it('opened again, perhaps after a lost answer, only changes what is told', async () => {
     const first = await ann.get('/api/v1/sellers/mine')
     const { body } = await open(ann, { ...farm, about: 'Perch.' }).expect(201)
