@@ -1,12 +1,19 @@
+import { eq } from 'drizzle-orm'
 import type TestAgent from 'supertest/lib/agent'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 
+import { listingSearch } from '@/db/schema/listing-search'
+import { seller } from '@/db/schema/sellers'
+import { inTransaction } from '@/db/transaction'
 import type { TestFake } from '@/payments/fake/fake-for-tests'
 import { configurePayments } from '@/payments/stripe'
+import { buildBatch } from '@/seed/build-batch'
 import { buildMember } from '@/seed/build-member'
 import { loadPlaces } from '@/seed/load-places'
+import { projectListings } from '@/server/search/project-listings'
+import { refreshPayouts } from '@/server/sellers/refresh-payouts'
 import { openPayments } from '@/tests/support/payments'
-import { keyed, openTestServer, type TestServer } from '@/tests/support/server'
+import { keyed, openTestServer, TEST_NOW, type TestServer } from '@/tests/support/server'
 
 const farm = {
   farmName: 'Mill Lane Fish',
@@ -170,6 +177,21 @@ describe('being paid', () => {
     const { next } = await fake.submit(again.body.url, { choice: 'finish' })
     expect(next).toBe('http://127.0.0.1:8080/sell/farm?payouts=back')
     expect(await payouts()).toBe('ready')
+  })
+
+  it('stopped by the processor, takes the farm’s batches out of search until it may go on', async () => {
+    const [ready] = await server.db.select().from(seller).where(eq(seller.farmName, farm.farmName)).limit(1)
+    if (!ready?.payoutAccountId) throw new Error('the farm has no account')
+    const batch = await buildBatch(server.db, { seller: ready, name: 'perch', at: new Date(TEST_NOW) })
+    const found = () => server.db.$count(listingSearch, eq(listingSearch.listingId, batch.id))
+    await inTransaction((tx) => projectListings(tx, [batch.id]))
+    expect(await found()).toBe(1)
+    await fake.control(`accounts/${ready.payoutAccountId}`, { chargesEnabled: false })
+    await refreshPayouts(ready.payoutAccountId)
+    expect([await payouts(), await found()]).toEqual(['unfinished', 0])
+    await fake.control(`accounts/${ready.payoutAccountId}`, { chargesEnabled: true })
+    expect([await payouts(), await found()]).toEqual(['ready', 1])
+    await refreshPayouts('acct_nobody_here')
   })
 
   it('says so when the processor does not answer, and shows the farm all the same', async () => {
