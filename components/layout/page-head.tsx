@@ -29,7 +29,10 @@ export function PageHead({ title, back, actions, isPhone }: Props) {
   const { top } = useSafeAreaInsets()
   if (!back && !isPhone && !actions) return null
   return (
-    <View style={[styles.head, { paddingTop: top }, isPhone && back ? styles.ruled : null]}>
+    <View
+      dataSet={{ screenOnly: '' }}
+      style={[styles.head, { paddingTop: top }, isPhone && back ? styles.ruled : null]}
+    >
       {back ? (
         <IconButton
           icon="back"

@@ -57,7 +57,11 @@ export function Page(props: Props) {
     >
       <PageHead title={heading} back={props.back} actions={props.actions} isPhone={isPhone} />
       {isScrolled ? <ScrollView style={styles.fill}>{body}</ScrollView> : body}
-      {footer ? <View style={[styles.foot, { paddingBottom: space.md + bottom }]}>{footer}</View> : null}
+      {footer ? (
+        <View dataSet={{ screenOnly: '' }} style={[styles.foot, { paddingBottom: space.md + bottom }]}>
+          {footer}
+        </View>
+      ) : null}
     </View>
   )
 }

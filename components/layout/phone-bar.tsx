@@ -11,7 +11,12 @@ export function PhoneBar() {
   const pathname = usePathname()
   const { bottom } = useSafeAreaInsets()
   return (
-    <View role="navigation" aria-label="Places" style={[styles.bar, { paddingBottom: bottom }]}>
+    <View
+      role="navigation"
+      aria-label="Places"
+      dataSet={{ screenOnly: '' }}
+      style={[styles.bar, { paddingBottom: bottom }]}
+    >
       {places.map((place) => (
         <PlaceLink key={place.label} {...place} isStacked isCurrent={isInPlace(pathname, place.href)} />
       ))}

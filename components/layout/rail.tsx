@@ -14,7 +14,7 @@ interface Props {
 export function Rail({ isNarrow }: Props) {
   const pathname = usePathname()
   return (
-    <View style={[styles.rail, isNarrow ? styles.narrow : styles.full]}>
+    <View dataSet={{ screenOnly: '' }} style={[styles.rail, isNarrow ? styles.narrow : styles.full]}>
       <View role="banner" style={isNarrow ? styles.centre : styles.brand}>
         <Brand isMarkOnly={isNarrow} />
       </View>

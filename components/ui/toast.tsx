@@ -36,7 +36,7 @@ export function ToastProvider({ children }: { children: ReactNode }) {
   return (
     <ToastContext value={show}>
       {children}
-      <View aria-live="polite" role="status" style={styles.stack}>
+      <View aria-live="polite" role="status" dataSet={{ screenOnly: '' }} style={styles.stack}>
         {shown.map((toast) => (
           <ToastLine key={toast.id} toast={toast} onClose={() => close(toast.id)} />
         ))}
