@@ -19,26 +19,42 @@ export function classSql({ categoryCode, speciesCode }: SearchQuery): { index: s
 }
 
 /** Text of one page inside a circle of the query's centre; for `nearest`, without what earlier pages hold. */
-export function circlePageSql(query: SearchQuery, radiusKm: number): string {
+export function circlePageSql(query: SearchQuery, radiusKm: number, also: readonly string[] = []): string {
   const beyondKm = query.sort === 'nearest' && query.after ? kmOfSquaredChord(query.after.dm2) : 0
   const ranges = circleCover({ centre: query.origin, radiusKm, beyondKm })
   const { index, where } = classSql(query)
-  const tests = [...where, ...circleSql(query, ranges, radiusKm), ...wishSql(query), ...afterSql(query)]
+  const tests = [
+    ...where,
+    ...circleSql(query, ranges, radiusKm),
+    ...wishSql(query),
+    ...also,
+    ...afterSql(query),
+  ]
   return `SELECT ${selectedSql(query)} FROM listing_search FORCE INDEX (${index}) WHERE ${tests.join(' AND ')} ORDER BY ${orderSql(query)} LIMIT ${whole(query.limit)}`
 }
 
-export async function findInCircle(query: SearchQuery, radiusKm: number): Promise<FoundRow[]> {
-  return readFoundRows(query, await readSearchRows(circlePageSql(query, radiusKm)))
+export async function findInCircle(
+  query: SearchQuery,
+  radiusKm: number,
+  also: readonly string[] = [],
+): Promise<FoundRow[]> {
+  return readFoundRows(query, await readSearchRows(circlePageSql(query, radiusKm, also)))
+}
+
+export interface Outwards {
+  firstKm: number
+  /** More conditions than the query's own. */
+  also?: readonly string[]
 }
 
 /** Reads growing circles. A full page inside a circle is the nearest page there is, so nothing needs remembering. */
 export async function findOutwards(
   query: SearchQuery,
-  firstKm: number,
+  { firstKm, also }: Outwards,
 ): Promise<{ rows: FoundRow[]; trips: number }> {
   let km = firstKm
   for (let trips = 1; ; trips++) {
-    const rows = await findInCircle(query, km)
+    const rows = await findInCircle(query, km, also)
     if (rows.length >= query.limit || km >= query.radiusKm) return { rows, trips }
     const growth = rows.length === 0 ? 8 : Math.max(2, Math.sqrt((query.limit * 1.5) / rows.length))
     km = Math.min(query.radiusKm, km * growth)

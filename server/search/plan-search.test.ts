@@ -7,6 +7,7 @@ import type { Overview } from '@/server/search/overview-store'
 import { planSearch } from '@/server/search/plan-search'
 import type { SearchQuery } from '@/server/search/search-query'
 import { UNRATED_RANK } from '@/server/search/search-row'
+import { Selectivity } from '@/server/search/selectivity'
 
 const centre = { lat: 39.125, lng: -84.525 }
 const cellOf = (lat: number, lng: number) =>
@@ -37,33 +38,36 @@ function country(perSquare: number): Overview {
 
 const query: SearchQuery = { origin: centre, radiusKm: 200, categoryCode: 1, sort: 'nearest', limit: 24 }
 
+const planIn = (overview: Overview, asked: SearchQuery) =>
+  planSearch(asked, { overview, selectivity: new Selectivity() })
+
 describe('planning a search', () => {
   it('reads a thin circle at once', () => {
-    expect(planSearch(query, { overview: country(0.3), selectivity: 1 })).toEqual({ kind: 'circle' })
+    expect(planIn(country(0.3), query)).toEqual({ kind: 'circle' })
   })
 
   it('starts small where listings stand close', () => {
-    const plan = planSearch(query, { overview: country(100), selectivity: 1 })
+    const plan = planIn(country(100), query)
     expect(plan.kind).toBe('grow')
     expect(plan.kind === 'grow' && plan.firstKm).toBeLessThan(40)
   })
 
   it('starts wider when few listings meet the wishes', () => {
-    const of = (selectivity: number) => {
-      const plan = planSearch(query, { overview: country(100), selectivity })
+    const firstKm = (wishes: Partial<SearchQuery>) => {
+      const plan = planIn(country(100), { ...query, ...wishes })
       return plan.kind === 'grow' ? plan.firstKm : NaN
     }
-    expect(of(0.1)).toBeGreaterThan(of(1) * 1.5)
+    expect(firstKm({ count: 50 })).toBeGreaterThan(firstKm({}) * 1.5)
   })
 
   it('walks up the prices when the circle is large, also for a species', () => {
     const wide = { ...query, sort: 'cheapest' as const, radiusKm: 1000 }
-    expect(planSearch(wide, { overview: country(20), selectivity: 1 })).toEqual({
+    expect(planIn(country(20), wide)).toEqual({
       kind: 'price-walk',
       categories: [1],
     })
     const { categoryCode: _category, ...named } = { ...wide, speciesCode: 3 }
-    expect(planSearch(named, { overview: country(20), selectivity: 1 })).toEqual({
+    expect(planIn(country(20), named)).toEqual({
       kind: 'price-walk',
       categories: [1],
     })
@@ -71,35 +75,39 @@ describe('planning a search', () => {
 
   it('does not walk for more than an everyday order: the index knows no such price', () => {
     const wide = { ...query, sort: 'cheapest' as const, radiusKm: 1000 }
-    expect(planSearch({ ...wide, count: 99 }, { overview: country(20), selectivity: 1 }).kind).toBe(
-      'price-walk',
-    )
-    expect(planSearch({ ...wide, count: 100 }, { overview: country(20), selectivity: 1 }).kind).toBe('circle')
+    expect(planIn(country(20), { ...wide, count: 99 }).kind).toBe('price-walk')
+    expect(planIn(country(20), { ...wide, count: 100 }).kind).toBe('circle')
   })
 
   it('climbs from the best rated when the circle is large, and no higher than a page needs', () => {
-    const plan = planSearch(
-      { ...query, sort: 'best-rated', radiusKm: 1000 },
-      { overview: country(20), selectivity: 1 },
-    )
+    const plan = planIn(country(20), { ...query, sort: 'best-rated', radiusKm: 1000 })
     expect(plan).toMatchObject({ kind: 'rank-walk', categories: [1] })
     expect(plan.kind === 'rank-walk' && plan.firstRung).toBeLessThan(3)
   })
 
-  it('reads the circle for soonest when the first day asked is late: most listings stand below it', () => {
-    const soonest = { ...query, sort: 'soonest' as const, radiusKm: 200 }
-    const from = (day: number) =>
-      planSearch(
-        { ...soonest, days: { from: day, until: day + 13 } },
-        { overview: country(20), selectivity: 1 },
-      ).kind
-    expect(from(2526)).toBe('rank-walk')
-    expect(from(2550)).toBe('circle')
+  it('reads day by day outwards when one day fills pages', () => {
+    const days = { from: 2540, until: 2553 }
+    const plan = planIn(country(20), { ...query, sort: 'soonest', days })
+    expect(plan).toMatchObject({ kind: 'day-grow', days })
+    expect(plan.kind === 'day-grow' && plan.firstKm).toBeLessThan(80)
+  })
+
+  it('climbs the days when none was asked', () => {
+    expect(planIn(country(20), { ...query, sort: 'soonest', radiusKm: 1000 })).toMatchObject({
+      kind: 'rank-walk',
+      firstRung: 2526,
+    })
+  })
+
+  it('reads the circle for soonest when days are thin and most listings could be had before', () => {
+    const rare = { ...query, count: 60, mostCents: 90, sizeMm: { from: 40, to: 45 } }
+    const days = { from: 2550, until: 2551 }
+    expect(planIn(country(1), { ...rare, sort: 'soonest', days })).toEqual({ kind: 'circle' })
   })
 
   it('reads the circle of a species nobody has counted yet', () => {
     const { categoryCode: _category, ...rest } = query
     const unknown = { ...rest, speciesCode: 9, sort: 'cheapest' as const, radiusKm: 4000 }
-    expect(planSearch(unknown, { overview: country(20), selectivity: 1 })).toEqual({ kind: 'circle' })
+    expect(planIn(country(20), unknown)).toEqual({ kind: 'circle' })
   })
 })

@@ -1,9 +1,11 @@
 import { kmOfSquaredChord } from '@/shared/domain/geo/earth-point'
+import { onDay } from '@/server/search/find-by-day'
 import { categoryCodes } from '@/server/search/category-codes'
 import type { DensityHistogram } from '@/server/search/density-histogram'
 import type { Overview } from '@/server/search/overview-store'
 import type { SearchQuery } from '@/server/search/search-query'
 import { UNRATED_RANK } from '@/server/search/search-row'
+import type { Selectivity } from '@/server/search/selectivity'
 import { everydayOrder } from '@/server/search/tier-columns'
 
 /** How a page is found. Whatever the plan, the page is the same; only the rows read on the way differ. */
@@ -14,6 +16,8 @@ export type SearchPlan =
   | { kind: 'circle' }
   /** Go up the prices in these categories until a page lies inside the circle. */
   | { kind: 'price-walk'; categories: readonly number[] }
+  /** Read outwards for the first day asked, then for the next. */
+  | { kind: 'day-grow'; days: NonNullable<SearchQuery['days']>; firstKm: number }
   /** Read the lowest rungs of the sort in these categories, up to `firstRung`, then more until there is a page. */
   | { kind: 'rank-walk'; categories: readonly number[]; firstRung: number }
 
@@ -26,11 +30,12 @@ const LEAST_KM = 4
 const COVER_SHARE = 1.4
 /** A rung's row inside the circle is looked up, which costs several rows of a covering index. */
 const LOOK_UP_ROWS = 5
+/** A day is read on its own when it holds so many pages. */
+const FULL_DAYS = 3
 
 export interface Outlook {
   overview: Overview
-  /** Share of candidates that meet the wishes. */
-  selectivity: number
+  selectivity: Selectivity
 }
 
 /** The smallest circle that likely holds `want` candidates more than the pages before. */
@@ -66,15 +71,24 @@ interface Walk {
   all: number
 }
 
-function planPriceWalk(
-  query: SearchQuery,
-  { categories, candidates, all }: Walk,
-  selectivity: number,
-): SearchPlan {
+function planPriceWalk(query: SearchQuery, { categories, candidates, all }: Walk, share: number): SearchPlan {
   if (categories.some((code) => (query.count ?? 0) > everydayOrder(code))) return { kind: 'circle' }
   // Every page starts at the bottom.
-  const passed = ((query.limit + (query.after?.seen ?? 0)) * all) / Math.max(candidates * selectivity, 0.1)
+  const passed = ((query.limit + (query.after?.seen ?? 0)) * all) / Math.max(candidates * share, 0.1)
   return passed < candidates * COVER_SHARE ? { kind: 'price-walk', categories } : { kind: 'circle' }
+}
+
+/** null: the first day would not fill a page, or no day was asked. */
+function planByDay(
+  query: SearchQuery,
+  candidates: number,
+  { overview, selectivity }: Outlook,
+): SearchPlan | null {
+  const { days, limit } = query
+  if (query.sort !== 'soonest' || !days) return null
+  const share = selectivity.estimate(onDay(query, query.after?.by ?? days.from))
+  if (candidates * share < limit * FULL_DAYS) return null
+  return { kind: 'day-grow', days, firstKm: guessRadiusKm(query, overview.density, (limit * ROOM) / share) }
 }
 
 function planRankWalk(query: SearchQuery, walk: Walk, { overview, selectivity }: Outlook): SearchPlan {
@@ -85,7 +99,7 @@ function planRankWalk(query: SearchQuery, walk: Walk, { overview, selectivity }:
   const start = query.after?.by ?? (soonest ? (query.days?.from ?? 0) : 0)
   // Whoever could be had earlier may still be had from `start` on, so the rungs below it are read too.
   const skipped = soonest ? 0 : ladder.upTo(categories, start - 1)
-  const want = skipped + (query.limit * ROOM) / Math.max(inCircle * selectivity, 1e-9)
+  const want = skipped + (query.limit * ROOM) / Math.max(inCircle * selectivity.estimate(query), 1e-9)
   const guess = ladder.reaching(categories, want)
   if (guess === null) return { kind: 'circle' }
   const firstRung = Math.max(guess, start)
@@ -99,20 +113,19 @@ function planRankWalk(query: SearchQuery, walk: Walk, { overview, selectivity }:
 
 /** The cheapest way to a page, judged by rows read. */
 export function planSearch(query: SearchQuery, outlook: Outlook): SearchPlan {
-  const { overview, selectivity } = outlook
-  const { density } = overview
+  const { density } = outlook.overview
   const candidates = density.within(query, query.origin, query.radiusKm)
   if (candidates <= SMALL_CIRCLE_ROWS) return { kind: 'circle' }
+  const share = outlook.selectivity.estimate(query)
   if (query.sort === 'nearest') {
-    if (candidates * selectivity <= SMALL_CIRCLE_HITS) return { kind: 'circle' }
-    const want = (query.limit * ROOM) / selectivity
-    return { kind: 'grow', firstKm: guessRadiusKm(query, density, want) }
+    if (candidates * share <= SMALL_CIRCLE_HITS) return { kind: 'circle' }
+    return { kind: 'grow', firstKm: guessRadiusKm(query, density, (query.limit * ROOM) / share) }
   }
+  const byDay = planByDay(query, candidates, outlook)
+  if (byDay) return byDay
   const categories = categoriesOf(query, density)
   if (!categories) return { kind: 'circle' }
   const all = categories.reduce((sum, categoryCode) => sum + density.total({ categoryCode }), 0)
   const walk = { categories, candidates, all }
-  return query.sort === 'cheapest'
-    ? planPriceWalk(query, walk, selectivity)
-    : planRankWalk(query, walk, outlook)
+  return query.sort === 'cheapest' ? planPriceWalk(query, walk, share) : planRankWalk(query, walk, outlook)
 }

@@ -1,11 +1,12 @@
 import { kmOfSquaredChord } from '@/shared/domain/geo/earth-point'
+import { findByDay, onDay } from '@/server/search/find-by-day'
 import { findInCircle, findOutwards } from '@/server/search/find-in-circle'
 import type { FoundRow } from '@/server/search/found-row'
 import type { ListingSearch } from '@/server/search/listing-search'
 import { findPins } from '@/server/search/map-pins'
 import { OverviewKeeper } from '@/server/search/overview-keeper'
 import type { Overview } from '@/server/search/overview-store'
-import { planSearch, type SearchPlan } from '@/server/search/plan-search'
+import { planSearch, type Outlook, type SearchPlan } from '@/server/search/plan-search'
 import { FacetCounter } from '@/server/search/search-facets'
 import type { SearchPage, SearchQuery } from '@/server/search/search-query'
 import { Selectivity } from '@/server/search/selectivity'
@@ -17,26 +18,42 @@ interface Found {
   trips: number
 }
 
-async function walk(
-  plan: SearchPlan & { kind: 'rank-walk' },
+/** What a shorter way found, or else the whole circle. */
+async function orCircle(
+  { rows, trips }: { rows: FoundRow[] | null; trips: number },
   query: SearchQuery,
-  overview: Overview,
 ): Promise<Found> {
-  const ladder = query.sort === 'soonest' ? overview.days : overview.ranks
-  const { rows, trips } = await walkRanks(query, plan, ladder)
   return rows ? { rows, trips } : { rows: await findInCircle(query, query.radiusKm), trips: trips + 1 }
 }
 
 async function follow(plan: SearchPlan, query: SearchQuery, overview: Overview): Promise<Found> {
   switch (plan.kind) {
     case 'grow':
-      return findOutwards(query, plan.firstKm)
+      return findOutwards(query, plan)
     case 'circle':
-      return { rows: await findInCircle(query, query.radiusKm), trips: 1 }
+      return orCircle({ rows: null, trips: 0 }, query)
     case 'price-walk':
       return walkPrices(query, plan.categories)
-    case 'rank-walk':
-      return walk(plan, query, overview)
+    case 'day-grow':
+      return orCircle(await findByDay({ ...query, days: plan.days }, plan.firstKm), query)
+    case 'rank-walk': {
+      const ladder = query.sort === 'soonest' ? overview.days : overview.ranks
+      return orCircle(await walkRanks(query, plan, ladder), query)
+    }
+  }
+}
+
+/** What share of the listings read through met the wishes, told to whoever guesses next time. */
+function learnFrom({ rows }: Found, query: SearchQuery, { overview, selectivity }: Outlook): void {
+  if (query.after) return
+  const last = rows[rows.length - 1]
+  const full = last !== undefined && rows.length >= query.limit
+  const km = full ? kmOfSquaredChord(last.dm2) : query.radiusKm
+  const candidates = () => overview.density.within(query, query.origin, km)
+  if (query.sort === 'nearest') selectivity.learn(query, candidates(), rows.length)
+  // A page that the first day fills is that day's nearest page.
+  if (query.sort === 'soonest' && full && query.days && last.sortBy === query.days.from) {
+    selectivity.learn(onDay(query, query.days.from), candidates(), rows.length)
   }
 }
 
@@ -68,14 +85,9 @@ export function openListingSearch(): ListingSearch & { refresh: () => Promise<vo
 
   async function search(query: SearchQuery): Promise<SearchPage> {
     const overview = await keeper.current()
-    const plan = planSearch(query, { overview, selectivity: selectivity.estimate(query) })
-    const found = await follow(plan, query, overview)
-    const last = found.rows[found.rows.length - 1]
-    if (query.sort === 'nearest' && !query.after) {
-      const full = last !== undefined && found.rows.length >= query.limit
-      const km = full ? kmOfSquaredChord(last.dm2) : query.radiusKm
-      selectivity.learn(query, overview.density.within(query, query.origin, km), found.rows.length)
-    }
+    const outlook = { overview, selectivity }
+    const found = await follow(planSearch(query, outlook), query, overview)
+    learnFrom(found, query, outlook)
     return pageOf(found, query)
   }
 

@@ -10,6 +10,7 @@ const COUNT_SHARES: readonly (readonly [from: number, share: number])[] = [
 const PRICE_SHARE = 0.6
 const SIZE_SHARE = 0.4
 const DAYS_SHARE = 0.7
+const ONE_DAY_SHARE = 0.2
 const PICKUP_SHARE = 0.7
 const SHIP_SHARE = 0.35
 const EITHER_SHARE = 0.8
@@ -40,7 +41,10 @@ function firstGuess(query: SearchQuery): { wishes: string; share: number } {
   if (query.count !== undefined) wish(`n${countStep(query.count).from}`, countStep(query.count).share)
   if (query.mostCents !== undefined) wish('cents', PRICE_SHARE)
   if (query.sizeMm) wish('mm', SIZE_SHARE)
-  if (query.days) wish('days', DAYS_SHARE)
+  if (query.days) {
+    const oneDay = query.days.from === query.days.until
+    wish(oneDay ? 'day' : 'days', oneDay ? ONE_DAY_SHARE : DAYS_SHARE)
+  }
   if (query.handover) wish(...handoverStep(query.handover))
   return { wishes: names.join(' '), share }
 }

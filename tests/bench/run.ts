@@ -37,6 +37,10 @@ async function bench(flags: BenchFlags): Promise<BenchReport> {
   const say = (text: string) => console.log(`${(performance.now() / 1000).toFixed(1)} s  ${text}`)
   const made = makeListings(flags.listings, flags.seed)
   const server = await openBenchServer(flags.listings)
+  // Ended from outside, the run still ends its server.
+  for (const signal of ['SIGINT', 'SIGTERM'] as const) {
+    process.once(signal, () => void server.close().finally(() => process.exit(1)))
+  }
   try {
     await loadListings(made, server.ownerUrl)
     say(`${made.count} listings loaded`)
