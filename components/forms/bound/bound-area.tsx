@@ -1,7 +1,8 @@
-import { useController, type FieldPathByValue, type FieldValues } from 'react-hook-form'
+import type { FieldPathByValue, FieldValues } from 'react-hook-form'
 import { StyleSheet, View } from 'react-native'
 
-import { fieldIdOf } from '@/components/forms/field-id'
+import { useBound } from './use-bound'
+
 import { QuickFill } from '@/components/forms/quick-fill'
 import { TextArea } from '@/components/ui/text-area'
 import { space } from '@/constants/theme'
@@ -19,23 +20,19 @@ interface Props<T extends FieldValues> {
 }
 
 export function BoundArea<T extends FieldValues>({ name, quickAnswer, ...words }: Props<T>) {
-  const { field, fieldState } = useController<T, FieldPathByValue<T, string>>({ name })
+  const { fieldId, value, error, change, leave } = useBound<T, string>(name)
   return (
     <View style={styles.field}>
       <TextArea
         {...words}
-        fieldId={fieldIdOf(name)}
-        value={field.value}
-        onChangeText={field.onChange}
-        onBlur={field.onBlur}
-        error={fieldState.error?.message}
+        fieldId={fieldId}
+        value={value}
+        onChangeText={change}
+        onBlur={() => leave()}
+        error={error}
       />
-      {quickAnswer && !field.value ? (
-        <QuickFill
-          answer={quickAnswer}
-          fieldLabel={words.label}
-          onPress={() => field.onChange(quickAnswer)}
-        />
+      {quickAnswer && !value ? (
+        <QuickFill answer={quickAnswer} fieldLabel={words.label} onPress={() => change(quickAnswer)} />
       ) : null}
     </View>
   )

@@ -1,7 +1,8 @@
-import { useController, type FieldPathByValue, type FieldValues } from 'react-hook-form'
+import type { FieldPathByValue, FieldValues } from 'react-hook-form'
 import { StyleSheet, View } from 'react-native'
 
-import { fieldIdOf } from '@/components/forms/field-id'
+import { useBound } from './use-bound'
+
 import { QuickFill } from '@/components/forms/quick-fill'
 import { DateField } from '@/components/ui/date-field'
 import { TimeField } from '@/components/ui/time-field'
@@ -19,23 +20,13 @@ interface Props<T extends FieldValues> {
 }
 
 export function BoundDay<T extends FieldValues>({ name, isTime, quickDay, ...words }: Props<T>) {
-  const { field, fieldState } = useController<T, FieldPathByValue<T, string>>({ name })
+  const { fieldId, value, error, change } = useBound<T, string>(name)
   const Control = isTime ? TimeField : DateField
   return (
     <View style={styles.field}>
-      <Control
-        {...words}
-        fieldId={fieldIdOf(name)}
-        value={field.value}
-        onChange={field.onChange}
-        error={fieldState.error?.message}
-      />
-      {quickDay && !field.value ? (
-        <QuickFill
-          answer={quickDay.answer}
-          fieldLabel={words.label}
-          onPress={() => field.onChange(quickDay.day)}
-        />
+      <Control {...words} fieldId={fieldId} value={value} onChange={change} error={error} />
+      {quickDay && !value ? (
+        <QuickFill answer={quickDay.answer} fieldLabel={words.label} onPress={() => change(quickDay.day)} />
       ) : null}
     </View>
   )

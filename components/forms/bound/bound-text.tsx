@@ -1,6 +1,7 @@
-import { useController, type FieldPathByValue, type FieldValues } from 'react-hook-form'
+import type { FieldPathByValue, FieldValues } from 'react-hook-form'
 
-import { fieldIdOf } from '@/components/forms/field-id'
+import { useBound } from './use-bound'
+
 import { Field, type FieldProps } from '@/components/ui/field'
 import { NumberField } from '@/components/ui/number-field'
 
@@ -15,19 +16,16 @@ interface Props<T extends FieldValues> extends Words {
 }
 
 export function BoundText<T extends FieldValues>({ name, isFigure, onLeave, ...words }: Props<T>) {
-  const { field, fieldState } = useController<T, FieldPathByValue<T, string>>({ name })
+  const { fieldId, value, error, change, leave } = useBound<T, string>(name)
   const Control = isFigure ? NumberField : Field
   return (
     <Control
       {...words}
-      fieldId={fieldIdOf(name)}
-      value={field.value}
-      onChangeText={field.onChange}
-      onBlur={() => {
-        field.onBlur()
-        onLeave?.()
-      }}
-      error={fieldState.error?.message}
+      fieldId={fieldId}
+      value={value}
+      onChangeText={change}
+      onBlur={() => leave(onLeave)}
+      error={error}
     />
   )
 }

@@ -2,6 +2,7 @@ import { useState } from 'react'
 import { FormProvider, useForm, type FieldPath } from 'react-hook-form'
 import { StyleSheet, View } from 'react-native'
 
+import { farmAsks } from './farm-asks'
 import { farmBody, farmIssues } from './farm-body'
 import { FarmGroups } from './farm-groups'
 import { farmTyping, type FarmTyping } from './farm-typing'
@@ -29,7 +30,7 @@ export function FarmForm({ farm, onSaved }: Props) {
   const [key, setKey] = useState(newRequestKey)
   const form = useForm<FarmTyping>({
     defaultValues: farmTyping(farm),
-    resolver: issueResolver<FarmTyping>(farmIssues, { lists: ['licences'] }),
+    resolver: issueResolver<FarmTyping>(farmIssues, { lists: ['licences'], asks: farmAsks }),
     mode: 'onTouched',
     shouldFocusError: false,
   })

@@ -32,7 +32,7 @@ export function FarmGroups() {
   }
   return (
     <>
-      <FormGroup groupId="farm" title="Your farm">
+      <FormGroup groupId="farm" title="Name and kind">
         <BoundText<FarmTyping> name="farmName" label="Name" placeholder="Millrace Hatchery" maxLength={80} />
         <BoundChoice<FarmTyping> name="kind" label="What are you?" choices={kinds} />
         <BoundArea<FarmTyping>
