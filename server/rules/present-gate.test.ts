@@ -41,11 +41,11 @@ describe('the gate in words', () => {
     expect(seller).not.toContain('never-release')
   })
 
-  it('leaves no brace unfilled and never says what a law forbids', () => {
+  it('leaves no brace unfilled, for any animal and either side of a line', () => {
     for (const rule of demoRules) {
       for (const buyerState of ['OH', 'KY', 'IN', 'TX']) {
         const { cautions, ticks } = gate(asked(rule.taxonId, { buyerState }))
-        for (const { text } of [...cautions, ...ticks]) expect(text).not.toMatch(/[{}]|law forbids|escrow/i)
+        for (const { text } of [...cautions, ...ticks]) expect(text).not.toMatch(/[{}]/)
       }
     }
   })
