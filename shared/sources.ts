@@ -73,6 +73,8 @@ const table = {
   'jobling-2003': { author: 'Jobling', year: 2003, title: 'The thermal growth coefficient model of fish growth: a cautionary note, Aquac. Res. 34:581-584', where: null, reading: 'read' },
   'dwyer-1981': { author: 'Dwyer et al.', year: 1981, title: 'Monthly temperature units of trout growth, as tabled', where: null, reading: 'read in a reproduction' },
   // Transport
+  'grundstein-2010': { author: 'Grundstein et al.', year: 2010, title: 'Heating of closed cars, Bull. Am. Meteorol. Soc.', where: null, reading: 'read' },
+  'mclaren-2005': { author: 'McLaren, Null & Quinn', year: 2005, title: 'Heat stress from enclosed vehicles, Pediatrics 116:e109', where: null, reading: 'read' },
   'mx392': { author: 'Swann', year: null, title: 'Transportation of fish in bags, University of Missouri Extension MX392', where: 'opening', reading: 'read in part' },
   'dupree-huner-1984': { author: 'Dupree & Huner', year: 1984, title: 'Third report to the fish farmers, US Fish and Wildlife Service', where: 'bag loading table', reading: 'read in a reproduction' },
   'froese-1998': { author: 'Froese', year: 1998, title: 'Insulating properties of styrofoam boxes used for transporting live fish, Aquaculture 159:283-292', where: null, reading: 'abstract read' },

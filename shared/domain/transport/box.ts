@@ -30,8 +30,9 @@ export function boxLossWPerK(box: Box): number | null {
 }
 
 function surfaceM2({ lengthCm, widthCm, heightCm }: Box, wallM: number): number {
-  const [length, width, height] = [lengthCm, widthCm, heightCm].map((cm) => cm / 100 + 2 * wallM)
-  return 2 * (length! * width! + length! * height! + width! * height!)
+  const outer = (cm: number) => cm / 100 + 2 * wallM
+  const [length, width, height] = [outer(lengthCm), outer(widthCm), outer(heightCm)]
+  return 2 * (length * width + length * height + width * height)
 }
 
 /** Hours in which the difference to the air falls to 37 %, by litres of water and W per K. */

@@ -1,0 +1,133 @@
+import { packedOxygenDemandMgPerKgHour } from '@/shared/domain/animals/packed-oxygen-demand'
+import { bagChemistry, type BagWater } from '@/shared/domain/transport/bag-chemistry'
+import { bagLoadGPerL } from '@/shared/domain/transport/bag-loading'
+import { bagTableHours, bagTableSource } from '@/shared/domain/transport/bag-loading.facts'
+import { judgeAmmonia } from '@/shared/domain/transport/judge-ammonia'
+import type { Animals, BaggedBoxes, SourceWater, TripStep } from '@/shared/domain/transport/trip'
+import type { Reason } from '@/shared/domain/transport/verdict'
+import type { WarmthStep } from '@/shared/domain/transport/water-way'
+import { fahrenheitFromC } from '@/shared/units/temperature'
+
+/** House rules: a bag that stands still counts half; these much CO2 burden, stun cold-water animals, stun all. */
+const STILL_FACTOR = 2
+const CO2_RAISED_MG_PER_L = 40
+const CO2_COLD_WATER_MG_PER_L = 100
+const CO2_ALL_MG_PER_L = 200
+const OXYGEN_LOW_SHARE = 2 / 3
+const NEARLY_FULL_SHARE = 0.9
+const LONGEST_TABLE_H = bagTableHours[bagTableHours.length - 1] ?? NaN
+
+interface Bag {
+  animals: Animals
+  water: SourceWater
+  bags: BaggedBoxes
+  /** g of animals in the fullest bag. */
+  massG: number
+}
+
+const bare = { oxygenMgPerL: null, co2MgPerL: null, tanMgPerL: null, nh3NMgPerL: null }
+
+/** Water in the fullest bag along the way and everything that speaks against it; the load table and the balance both. */
+export function judgeBag(bag: Bag, way: readonly WarmthStep[]): { steps: TripStep[]; reasons: Reason[] } {
+  const model = bag.animals.species.oxygenModel
+  const table = judgeLoad(bag, way)
+  if (model === null) {
+    const reason: Reason = {
+      code: 'no-oxygen-model',
+      verdict: 'unknown',
+      value: null,
+      limit: null,
+      atHour: null,
+      sourceKey: 'fb4-2017',
+    }
+    return { steps: way.map((step) => ({ ...step, ...bare })), reasons: [...table, reason] }
+  }
+  const fill = {
+    waterL: bag.bags.waterLPerBag,
+    oxygenL: bag.bags.oxygenLPerBag,
+    alkalinityMeqPerL: bag.water.alkalinityMeqPerL,
+  }
+  let [usedG, countedC, before] = [0, way[0]?.waterC ?? NaN, 0]
+  let worst: BagWater | null = null
+  const steps = way.map((step): TripStep => {
+    // Cooling on the way earns the animals nothing: chilled at once, they are stressed, not rested.
+    countedC = Math.max(countedC, step.waterC)
+    const demand = packedOxygenDemandMgPerKgHour({ model, massG: bag.animals.massG, waterC: countedC })
+    usedG = demand === null ? NaN : usedG + (demand * (bag.massG / 1000) * (step.hour - before)) / 1000
+    before = step.hour
+    const now = usedG > 0 ? bagChemistry(fill, usedG, step.waterC) : null
+    const warm = now && step.waterC < countedC ? bagChemistry(fill, usedG, countedC) : now
+    if (now && warm)
+      worst = {
+        ...now,
+        nh3NMgPerL: Math.max(worst?.nh3NMgPerL ?? 0, warm.nh3NMgPerL),
+        co2MgPerL: Math.max(worst?.co2MgPerL ?? 0, now.co2MgPerL),
+      }
+    return { ...step, ...(now ? figuresOf(now) : bare) }
+  })
+  return { steps, reasons: [...table, ...judgeBalance(bag, worst, usedG)] }
+}
+
+const figuresOf = ({ oxygenMgPerL, co2MgPerL, tanMgPerL, nh3NMgPerL }: BagWater) => ({
+  oxygenMgPerL,
+  co2MgPerL,
+  tanMgPerL,
+  nh3NMgPerL,
+})
+
+function judgeLoad({ animals, bags, massG }: Bag, way: readonly WarmthStep[]): Reason[] {
+  const hours = way.at(-1)?.hour ?? NaN
+  const warmestC = Math.max(...way.map(({ waterC }) => waterC))
+  const known = Math.min(LONGEST_TABLE_H, Math.max(1, hours))
+  const table = bagLoadGPerL({ stage: animals.stage, hours: known, waterF: fahrenheitFromC(warmestC) })
+  const beyond: Reason[] =
+    hours > LONGEST_TABLE_H
+      ? [
+          {
+            code: 'longer-than-table',
+            verdict: 'unknown',
+            value: hours,
+            limit: LONGEST_TABLE_H,
+            atHour: LONGEST_TABLE_H,
+            sourceKey: bagTableSource,
+          },
+        ]
+      : []
+  if (table === null) return beyond
+  const limit = table / (bags.standsStill ? STILL_FACTOR : 1)
+  const value = massG / bags.waterLPerBag
+  const common = { value, limit, atHour: null, sourceKey: bagTableSource }
+  if (value > limit) return [...beyond, { code: 'bag-too-full', verdict: 'unsafe', ...common }]
+  if (value > limit * NEARLY_FULL_SHARE)
+    return [...beyond, { code: 'bag-nearly-full', verdict: 'caution', ...common }]
+  return beyond
+}
+
+function judgeBalance({ animals, bags }: Bag, worst: BagWater | null, usedG: number): Reason[] {
+  if (worst === null || !Number.isFinite(usedG)) {
+    return [
+      {
+        code: 'too-small-for-model',
+        verdict: 'unknown',
+        value: animals.massG,
+        limit: null,
+        atHour: null,
+        sourceKey: 'fb4-2017',
+      },
+    ]
+  }
+  const had = worst.oxygenHadG / (bags.standsStill ? STILL_FACTOR : 1)
+  const oxygen = { value: usedG, limit: had, atHour: null, sourceKey: 'fb4-2017' } as const
+  const co2 = { value: worst.co2MgPerL, atHour: null, sourceKey: 'house-rule' } as const
+  const stuns = animals.species.thermalClass === 'cold' ? CO2_COLD_WATER_MG_PER_L : CO2_ALL_MG_PER_L
+  const reasons: Reason[] = judgeAmmonia(animals.species, worst.nh3NMgPerL)
+  if (usedG > had) reasons.push({ code: 'oxygen-runs-out', verdict: 'unsafe', ...oxygen })
+  else if (usedG > had * OXYGEN_LOW_SHARE)
+    reasons.push({ code: 'oxygen-runs-low', verdict: 'caution', ...oxygen })
+  if (worst.co2MgPerL > stuns)
+    reasons.push({ code: 'carbon-dioxide-high', verdict: 'unsafe', limit: stuns, ...co2 })
+  else if (worst.co2MgPerL > CO2_RAISED_MG_PER_L) {
+    reasons.push({ code: 'carbon-dioxide-raised', verdict: 'caution', limit: CO2_RAISED_MG_PER_L, ...co2 })
+  }
+  return reasons
+}
