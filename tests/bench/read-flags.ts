@@ -8,8 +8,11 @@ export interface BenchFlags {
   queries: number
   seed: number
   plantFault: boolean
-  peers: boolean
+  /** Names of those asked beside ours. */
+  peers: string[]
 }
+
+export const PEERS: readonly string[] = ['SELECT 1', 'plain scan', 'SPATIAL INDEX']
 
 const isShape = (text: string): text is Shape => Object.hasOwn(shapes, text)
 
@@ -23,7 +26,7 @@ export function readFlags(args: string[]): BenchFlags {
       queries: { type: 'string', default: '100' },
       seed: { type: 'string', default: '42' },
       'plant-fault': { type: 'boolean', default: false },
-      'no-peers': { type: 'boolean', default: false },
+      peers: { type: 'string', default: PEERS.join(',') },
     },
   })
   const number = (name: 'n' | 'queries' | 'seed') => {
@@ -36,12 +39,15 @@ export function readFlags(args: string[]): BenchFlags {
   const strange = asked.filter((shape) => !isShape(shape))
   if (strange.length > 0)
     throw new Error(`--shapes knows ${Object.keys(shapes).join(', ')}, not ${strange.join(', ')}`)
+  const unknown = values.peers.split(',').filter((name) => name !== 'none' && !PEERS.includes(name))
+  if (unknown.length > 0)
+    throw new Error(`--peers knows ${PEERS.join(', ')} and none, not ${unknown.join(', ')}`)
   return {
     listings: number('n'),
     shapes: asked.filter(isShape),
     queries: number('queries'),
     seed: number('seed'),
     plantFault: values['plant-fault'],
-    peers: !values['no-peers'],
+    peers: values.peers.split(',').filter((name) => name !== 'none'),
   }
 }

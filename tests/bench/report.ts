@@ -5,6 +5,7 @@ import path from 'node:path'
 
 import type { BenchFlags } from '@/tests/bench/read-flags'
 import type { ShapeResult } from '@/tests/bench/run-shape'
+import type { Times } from '@/tests/bench/times'
 
 const FOLDER = path.resolve('.data/reports')
 
@@ -17,6 +18,7 @@ export interface BenchReport {
   loadAverage: number
   commit: string
   results: ShapeResult[]
+  extras: Record<string, Times>
   skipped: string[]
   faults: string[]
 }
@@ -31,7 +33,7 @@ function commit(): string {
 
 /** Everything needed to judge a figure later: ratios are only ever taken inside one such run. */
 export function makeReport(
-  run: Pick<BenchReport, 'flags' | 'mariadb' | 'results' | 'skipped' | 'faults'>,
+  run: Pick<BenchReport, 'flags' | 'mariadb' | 'results' | 'extras' | 'skipped' | 'faults'>,
 ): BenchReport {
   return {
     ...run,
@@ -45,7 +47,7 @@ export function makeReport(
 
 const ms = (value: number) => value.toFixed(2).padStart(9)
 
-export function printReport({ results, flags, loadAverage, cores }: BenchReport): void {
+export function printReport({ results, extras, flags, loadAverage, cores }: BenchReport): void {
   console.log(
     `${flags.listings} listings, seed ${flags.seed}, ${cores} cores, load ${loadAverage.toFixed(1)}`,
   )
@@ -61,6 +63,10 @@ export function printReport({ results, flags, loadAverage, cores }: BenchReport)
         `  ${name.padEnd(16)}${ms(times.p50Ms)} / ${ms(times.p95Ms)}  (${times.samples})  ratio ${ratio}`,
       )
     }
+  }
+  console.log('')
+  for (const [name, times] of Object.entries(extras)) {
+    console.log(`  ${name.padEnd(32)}${ms(times.p50Ms)} / ${ms(times.p95Ms)}  (${times.samples})`)
   }
 }
 

@@ -5,6 +5,7 @@ import { openListingSearch } from '@/server/search/search-listings'
 import { openBenchServer } from '@/tests/bench/bench-server'
 import { pagingFaults } from '@/tests/bench/check-paging'
 import { planFaults } from '@/tests/bench/check-plans'
+import { measureExtras } from '@/tests/bench/measure-extras'
 import { loadListings } from '@/tests/bench/load-listings'
 import { makeListings } from '@/tests/bench/make-listings'
 import type { OpenPeer, Peer, PeerGround } from '@/tests/bench/peers/peer'
@@ -20,13 +21,21 @@ import { runShape, type ShapeResult } from '@/tests/bench/run-shape'
 const PAGING_WALKS = 60
 
 /** PostGIS joins here: one more file in peers/ that says why it is skipped where it is not installed. */
-const OPENERS: readonly OpenPeer[] = [openSelectOne, openPlainScan, openSpatialIndex]
+const OPENERS: Record<string, OpenPeer> = {
+  'SELECT 1': openSelectOne,
+  'plain scan': openPlainScan,
+  'SPATIAL INDEX': openSpatialIndex,
+}
 
-async function openPeers(ground: PeerGround): Promise<{ peers: Peer[]; skipped: string[] }> {
+async function openPeers(
+  names: readonly string[],
+  ground: PeerGround,
+): Promise<{ peers: Peer[]; skipped: string[] }> {
   const peers: Peer[] = []
   const skipped: string[] = []
-  for (const open of OPENERS) {
-    const peer = await open(ground)
+  for (const name of names) {
+    const peer = await OPENERS[name]?.(ground)
+    if (!peer) continue
     if ('skipped' in peer) skipped.push(peer.skipped)
     else peers.push(peer)
   }
@@ -45,9 +54,7 @@ async function bench(flags: BenchFlags): Promise<BenchReport> {
     await loadListings(made, server.ownerUrl)
     say(`${made.count} listings loaded`)
     const seldom = flags.listings > 200_000 ? 10 : flags.listings > 20_000 ? 4 : 1
-    const { peers, skipped } = flags.peers
-      ? await openPeers({ made, ownerUrl: server.ownerUrl, seldom })
-      : { peers: [], skipped: [] }
+    const { peers, skipped } = await openPeers(flags.peers, { made, ownerUrl: server.ownerUrl, seldom })
     if (flags.plantFault) await plantFault(server.ownerUrl)
     const search = openListingSearch()
     await search.refresh()
@@ -60,8 +67,18 @@ async function bench(flags: BenchFlags): Promise<BenchReport> {
     faults.push(...results.flatMap((result) => result.faults), ...rowFaults(flags.listings, results))
     faults.push(...(await pagingFaults(made, search, PAGING_WALKS)))
     for (const peer of peers) await peer.close()
+    const extras = await measureExtras(made, server.ownerUrl)
+    faults.push(...extras.faults)
+    say('facets, map, writes')
     const [version] = await rawPool().query<RowDataPacket[]>('SELECT VERSION() AS mariadb')
-    return makeReport({ flags, mariadb: String(version[0]?.mariadb), results, skipped, faults })
+    return makeReport({
+      flags,
+      mariadb: String(version[0]?.mariadb),
+      results,
+      extras: extras.times,
+      skipped,
+      faults,
+    })
   } finally {
     await server.close()
   }
