@@ -14,7 +14,14 @@ export async function seedOnce(crew, { dataDir, small, ownerUrl, settings }) {
     DEMO_PEOPLE_FILE: demoPeopleFile(dataDir),
   }
   const command = ['node', '--import', 'tsx', 'seed/run.ts', ...(small ? ['--small'] : [])]
-  await step('Places, rules and demo people', () =>
-    seedAndMark(dataDir, () => crew.run({ name: 'seed', command, environment })),
+  await step(
+    'Places, rules and demo people',
+    () => seedAndMark(dataDir, () => crew.run({ name: 'seed', command, environment })),
+    // Its lines begin with its own seconds.
+    async () =>
+      (await crew.wordsOf('seed'))
+        .split('\n')
+        .at(-1)
+        ?.replace(/^[\d. ]+s +/, '') ?? '',
   )
 }

@@ -14,17 +14,24 @@ export const secondsSince = (sinceMs) => ((performance.now() - sinceMs) / 1_000)
  * @template T
  * @param {string} what such as "Installing packages"
  * @param {() => Promise<T>} work
+ * @param {() => Promise<string>} [latest] how far the work is
  * @returns {Promise<T>}
  */
-export async function step(what, work) {
+export async function step(what, work, latest = async () => '') {
   const began = performance.now()
+  let isOver = false
   const first = setTimeout(() => tell(`${what} …`), QUIET_FOR_MS)
-  const beat = setInterval(() => tell(`${what} … ${secondsSince(began)} s`), HEARTBEAT_MS)
+  const beat = setInterval(async () => {
+    const words = await latest()
+    if (isOver) return
+    tell(`${what} … ${secondsSince(began)} s${words ? ` (${words})` : ''}`)
+  }, HEARTBEAT_MS)
   try {
     const made = await work()
     tell(`${what}: ${secondsSince(began)} s`)
     return made
   } finally {
+    isOver = true
     clearTimeout(first)
     clearInterval(beat)
   }
