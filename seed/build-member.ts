@@ -11,7 +11,7 @@ export interface BuiltMember {
   email: string
 }
 
-interface MemberWish {
+export interface MemberWish {
   email: string
   name?: string
   password?: string
@@ -34,34 +34,38 @@ function hashOnce(password: string): Promise<string> {
   return known
 }
 
-/** A member who can sign in with this password. The same e-mail always gets the same id. */
-export async function buildMember(db: Tx, wish: MemberWish): Promise<BuiltMember> {
-  const at = wish.at ?? BUILT_AT
-  const memberId = seededUuid(`member ${wish.email}`)
-  const name = wish.name ?? wish.email.split('@')[0] ?? 'Member'
-  await db.insert(user).values({
-    id: memberId,
-    name,
-    email: wish.email,
-    emailVerified: wish.emailVerified ?? true,
-    role: wish.role ?? 'member',
-    createdAt: at,
-    updatedAt: at,
-  })
-  await db.insert(account).values({
-    id: seededUuid(`account ${wish.email}`),
-    accountId: memberId,
-    providerId: 'credential',
-    userId: memberId,
+/** Members who can sign in with their passwords, in three statements however many. The same e-mail always gets the same id. */
+export async function buildMembers(db: Tx, wishes: readonly MemberWish[]): Promise<BuiltMember[]> {
+  if (wishes.length === 0) return []
+  const made = wishes.map((wish) => ({
+    ...{ wish, at: wish.at ?? BUILT_AT, memberId: seededUuid(`member ${wish.email}`) },
+    name: wish.name ?? wish.email.split('@')[0] ?? 'Member',
+  }))
+  await db.insert(user).values(
+    made.map(({ wish, at, memberId, name }) => ({
+      ...{ id: memberId, name, email: wish.email, createdAt: at, updatedAt: at },
+      emailVerified: wish.emailVerified ?? true,
+      role: wish.role ?? 'member',
+    })),
+  )
+  const accounts = made.map(async ({ wish, at, memberId }) => ({
+    ...{ id: seededUuid(`account ${wish.email}`), accountId: memberId, userId: memberId },
+    ...{ providerId: 'credential', createdAt: at, updatedAt: at },
     password: await hashOnce(wish.password ?? BUILT_PASSWORD),
-    createdAt: at,
-    updatedAt: at,
-  })
-  if (wish.place) {
-    const { label, cell, state } = wish.place
-    await db
-      .insert(memberProfile)
-      .values({ memberId, placeLabel: label, placeCell: cell, placeState: state, updatedAt: at })
-  }
-  return { memberId, name, email: wish.email }
+  }))
+  await db.insert(account).values(await Promise.all(accounts))
+  const profiles = made.flatMap(({ wish: { place }, at, memberId }) =>
+    place
+      ? [{ memberId, placeLabel: place.label, placeCell: place.cell, placeState: place.state, updatedAt: at }]
+      : [],
+  )
+  if (profiles.length > 0) await db.insert(memberProfile).values(profiles)
+  return made.map(({ wish, memberId, name }) => ({ memberId, name, email: wish.email }))
+}
+
+/** One of them. */
+export async function buildMember(db: Tx, wish: MemberWish): Promise<BuiltMember> {
+  const [made] = await buildMembers(db, [wish])
+  if (!made) throw new Error('the member was not built')
+  return made
 }

@@ -1,5 +1,7 @@
-import { sql } from 'drizzle-orm'
+import { getTableName, sql } from 'drizzle-orm'
+import { toSnakeCase } from 'drizzle-orm/casing'
 import type { MySqlTable } from 'drizzle-orm/mysql-core'
+import { escape } from 'mysql2'
 
 import type { Database } from '@/db/client'
 import { cellPopulation, cityPlace, zipPlace } from '@/db/schema/places'
@@ -46,11 +48,20 @@ function citiesOf(zips: Zip[], states: readonly string[] | undefined): City[] {
   return towns
 }
 
-async function fill<T extends MySqlTable>(db: Database, table: T, rows: T['$inferInsert'][]): Promise<void> {
+type Row = Record<string, string | number | undefined>
+
+/** Written out, as the query builder takes five times as long over 100,000 rows. */
+function insertText(table: MySqlTable, rows: readonly Row[]): string {
+  const columns = Object.keys(rows[0] ?? {}).map(toSnakeCase)
+  const values = rows.map((row) => `(${escape(Object.values(row))})`)
+  return `insert into ${getTableName(table)} (${columns.join(',')}) values ${values.join(',')}`
+}
+
+async function fill(db: Database, table: MySqlTable, rows: readonly Row[]): Promise<void> {
   if ((await db.$count(table)) === rows.length) return
   await db.execute(sql`delete from ${table}`)
   for (let from = 0; from < rows.length; from += ROWS_A_STATEMENT) {
-    await db.insert(table).values(rows.slice(from, from + ROWS_A_STATEMENT))
+    await db.execute(sql.raw(insertText(table, rows.slice(from, from + ROWS_A_STATEMENT))))
   }
 }
 

@@ -6,6 +6,7 @@ const FOLDER = path.join(path.dirname(fileURLToPath(import.meta.url)), '..', 'as
 const CELL = /(?:^|,)(?:"((?:[^"]|"")*)"|([^,]*))/g
 
 function cellsOf(line: string): string[] {
+  if (!line.includes('"')) return line.split(',')
   return [...line.matchAll(CELL)].map(([, quoted, plain]) => quoted?.replaceAll('""', '"') ?? plain ?? '')
 }
 

@@ -3,6 +3,9 @@ declare module 'subset-font' {
   export default function subsetFont(
     font: Buffer,
     text: string,
-    options?: { targetFormat?: 'woff2' | 'woff' | 'sfnt' | 'truetype'; variationAxes?: Record<string, unknown> },
+    options?: {
+      targetFormat?: 'woff2' | 'woff' | 'sfnt' | 'truetype'
+      variationAxes?: Record<string, unknown>
+    },
   ): Promise<Buffer>
 }

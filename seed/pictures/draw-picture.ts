@@ -127,6 +127,7 @@ function animalsOf(plan: PicturePlan, water: Water, chance: Chance): string {
 }
 
 function rulerOf(plan: PicturePlan, chance: Chance): string {
+  if (plan.ruler === null) return ''
   const inchPx = inchPxOf(plan)
   const isBox = plan.vessel === 'viewing-box'
   const inches = Math.floor((isBox ? 880 : 900) / inchPx)

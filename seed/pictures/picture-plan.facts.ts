@@ -13,7 +13,8 @@ export interface PicturePlan {
   count: number
   vessel: VesselKind
   ground: GroundKind
-  ruler: RulerKind
+  /** null: somebody forgot it, for the moderators to find. */
+  ruler: RulerKind | null
 }
 
 // prettier-ignore
@@ -25,6 +26,7 @@ export const picturePlans: readonly PicturePlan[] = [
   { name: 'hybrid-bluegill-tub', taxonId: 'hybrid_bluegill', sizeIn: [2, 3], count: 8, vessel: 'blue-tub', ground: 'concrete', ruler: 'wood' },
   { name: 'yellow-perch-box', taxonId: 'yellow_perch', sizeIn: [3, 4], count: 4, vessel: 'viewing-box', ground: 'concrete', ruler: 'steel' },
   { name: 'yellow-perch-pan', taxonId: 'yellow_perch', sizeIn: [2, 3], count: 8, vessel: 'white-pan', ground: 'gravel', ruler: 'wood' },
+  { name: 'yellow-perch-no-ruler', taxonId: 'yellow_perch', sizeIn: [3, 4], count: 3, vessel: 'viewing-box', ground: 'bench', ruler: null },
   { name: 'largemouth-box', taxonId: 'largemouth_bass', sizeIn: [3, 4], count: 3, vessel: 'viewing-box', ground: 'grass', ruler: 'white' },
   { name: 'largemouth-tray', taxonId: 'largemouth_bass', sizeIn: [2, 3], count: 8, vessel: 'black-tray', ground: 'concrete', ruler: 'white' },
   { name: 'channel-catfish-box', taxonId: 'channel_catfish', sizeIn: [4, 6], count: 3, vessel: 'viewing-box', ground: 'gravel', ruler: 'wood' },

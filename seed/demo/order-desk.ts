@@ -1,0 +1,138 @@
+import { doEffects } from '@/seed/demo/effects'
+import type { ListingDesk } from '@/seed/demo/listing-desk'
+import type { OrderPlan } from '@/seed/demo/plan-orders'
+import { pressButton } from '@/seed/demo/press-button'
+import { need, type Actor } from '@/seed/demo/stage'
+import { ringClocks } from '@/server/jobs/ring-clocks'
+import { readListing } from '@/server/listings/read-listing'
+import { listPayments } from '@/server/money/payment-store'
+import { refreshPayment } from '@/server/money/refresh-payment'
+import { acceptOrder } from '@/server/orders/accept-order'
+import { cancelOrder } from '@/server/orders/cancel-order'
+import { confirmGood } from '@/server/orders/confirm-good'
+import { contestNoShow } from '@/server/orders/contest-no-show'
+import { decideOrder } from '@/server/orders/decide-order'
+import { declineOrder } from '@/server/orders/decline-order'
+import { handOver } from '@/server/orders/hand-over'
+import { leaveReservation } from '@/server/orders/leave-reservation'
+import { markReady } from '@/server/orders/mark-ready'
+import { readOrder } from '@/server/orders/order-store'
+import { payBalance } from '@/server/orders/pay-balance'
+import { reportNoShow } from '@/server/orders/report-no-show'
+import { reserveBatch } from '@/server/orders/reserve-batch'
+import { showOrder } from '@/server/orders/show-order'
+import { stopOrder } from '@/server/orders/stop-order'
+import { withdrawRequest } from '@/server/orders/withdraw-request'
+import type { ShownOrder } from '@/shared/contracts/orders'
+
+/** A practice card that goes through. */
+const CARD = { cardNumber: '4242 4242 4242 4242', expiry: '12/40', cvc: '123' }
+
+/** The acts of one order, by the people who do them, through the product's own commands. */
+export interface OrderDesk {
+  reserve: () => Promise<void>
+  payDeposit: () => Promise<void>
+  payBalance: () => Promise<void>
+  accept: () => Promise<void>
+  decline: () => Promise<void>
+  leave: () => Promise<void>
+  withdraw: () => Promise<void>
+  markReady: () => Promise<void>
+  handOver: () => Promise<void>
+  /** Two fewer than ordered: both count, and see it. */
+  handOverShort: () => Promise<void>
+  confirm: () => Promise<void>
+  cancelAsBuyer: () => Promise<void>
+  cancelAsSeller: () => Promise<void>
+  reportBuyerAbsent: () => Promise<void>
+  reportSellerAbsent: () => Promise<void>
+  contest: () => Promise<void>
+  decide: () => Promise<void>
+  stop: () => Promise<void>
+  ring: () => Promise<void>
+}
+
+/** Pays an open page as a person does and comes back from it, which is when the product asks how it went. */
+async function payOn(order: ShownOrder, { caller }: Actor): Promise<void> {
+  await pressButton(need(order.payUrl, 'payment page'), { ...CARD, name: caller.name })
+  const { id } = need(await readOrder(order.orderId), order.orderId)
+  for (const payment of await listPayments(id)) await refreshPayment(payment)
+}
+
+export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator: Actor): OrderDesk {
+  const { buyer, batch, quantity, payMode, slot } = plan
+  const by = { buyer: buyer.caller, seller: batch.farm.owner.caller } as const
+  let placed: ShownOrder | undefined
+  const id = () => need(placed, `order ${plan.key}`).orderId
+  const act = (name: string, work: (commandId: string) => Promise<unknown>) => async () => {
+    await work(`demo ${plan.key} ${name}`)
+    await doEffects()
+  }
+  const handOverAll = async (commandId: string, count: number) => {
+    const { handOverCode } = await showOrder(by.buyer, id())
+    await handOver(by.seller, id(), { commandId, count, code: need(handOverCode, `code of ${plan.key}`) })
+  }
+  return {
+    reserve: act('reserve', async (commandId) => {
+      const listingId = listings.idOf(batch.key)
+      const shown = await readListing(by.buyer, listingId, buyer.zip)
+      const window = slot && shown.windows.find((one) => one.startsAt === slot.startsAt.toISOString())
+      placed = await reserveBatch(by.buyer, listingId, {
+        ...{ quantity, payMode, commandId, near: buyer.zip, version: shown.version },
+        ticked: shown.gate?.ticks.map((tick) => tick.id) ?? [],
+        ...(slot ? { windowId: need(window, `window of ${plan.key}`).windowId } : {}),
+      })
+    }),
+    payDeposit: act('pay', async () => payOn(need(placed, plan.key), buyer)),
+    payBalance: act('pay balance', async () => {
+      const before = await showOrder(by.buyer, id())
+      if (!before.balancePaid) await payOn(await payBalance(by.buyer, id()), buyer)
+    }),
+    accept: act('accept', (commandId) => acceptOrder(by.seller, id(), commandId)),
+    decline: act('decline', (commandId) =>
+      declineOrder(by.seller, id(), {
+        commandId,
+        reason: 'not-ready',
+        note: 'They need another week to grow.',
+      }),
+    ),
+    leave: act('leave', (commandId) => leaveReservation(by.buyer, id(), commandId)),
+    withdraw: act('withdraw', (commandId) => withdrawRequest(by.buyer, id(), commandId)),
+    markReady: act('ready', (commandId) => markReady(by.seller, id(), commandId)),
+    handOver: act('hand over', (commandId) => handOverAll(commandId, quantity)),
+    handOverShort: act('hand over', (commandId) => handOverAll(commandId, quantity - 2)),
+    confirm: act('confirm', (commandId) => confirmGood(by.buyer, id(), commandId)),
+    cancelAsBuyer: act('cancel', (commandId) => cancelOrder(by.buyer, id(), { commandId })),
+    cancelAsSeller: act('cancel', (commandId) =>
+      cancelOrder(by.seller, id(), { commandId, reason: 'die-off', note: 'A pump failed in the night.' }),
+    ),
+    reportBuyerAbsent: act('no show', (commandId) =>
+      reportNoShow(by.seller, id(), { commandId, note: 'Waited at the gate until the hour was over.' }),
+    ),
+    reportSellerAbsent: act('no show', (commandId) =>
+      reportNoShow(by.buyer, id(), { commandId, note: 'The gate was locked and nobody came.' }),
+    ),
+    contest: act('contest', (commandId) =>
+      contestNoShow(by.buyer, id(), {
+        commandId,
+        note: 'I was there with my pail at a quarter past, and have the fish at home.',
+      }),
+    ),
+    decide: act('decide', (commandId) =>
+      decideOrder(moderator.caller, id(), {
+        commandId,
+        outcome: 'handed-over',
+        note: 'Both describe the same pail and the same count.',
+      }),
+    ),
+    stop: act('stop', (commandId) =>
+      stopOrder(moderator.caller, id(), {
+        commandId,
+        cause: 'recall',
+        animals: 'frozen',
+        note: 'A lab result for this pond is still open.',
+      }),
+    ),
+    ring: act('ring', () => ringClocks()),
+  }
+}
