@@ -23,7 +23,7 @@ export function DecisionBar({ onDecide, hasKeys }: Props) {
       />
       <Button kind="secondary" label={label('Ask', 's')} onPress={() => onDecide('ask')} style={styles.one} />
       <Button
-        kind="danger"
+        kind="secondary"
         label={label('Reject', 'r')}
         onPress={() => onDecide('reject')}
         style={styles.one}

@@ -8,6 +8,7 @@ import {
   type DecisionKind,
   type ReviewReason,
 } from './decision-words'
+import { useSendKey } from './use-send-key'
 
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
@@ -49,11 +50,7 @@ export function DecisionSheet({ kind, title, isBusy, refusal, onSend, onClose }:
     const given = note.trim() ? { note: note.trim() } : {}
     onSend(isApproval || !reason ? { decision: 'approve' } : { decision: kind, reason, ...given })
   }
-  function press(key: string, isWithControl: boolean) {
-    if (key === 'Enter' && isWithControl) return send()
-    const chosen = reasonOfKey(key)
-    if (chosen) setReason(chosen)
-  }
+  useSendKey(send)
 
   return (
     <Sheet
@@ -84,9 +81,10 @@ export function DecisionSheet({ kind, title, isBusy, refusal, onSend, onClose }:
           <View
             nativeID="decision-keys"
             tabIndex={-1}
-            onKeyDown={(event) =>
-              press(event.nativeEvent.key, event.nativeEvent.ctrlKey || event.nativeEvent.metaKey)
-            }
+            onKeyDown={({ nativeEvent }) => {
+              const chosen = reasonOfKey(nativeEvent.key)
+              if (chosen) setReason(chosen)
+            }}
           >
             <RadioGroup
               label="Reason"
@@ -97,22 +95,16 @@ export function DecisionSheet({ kind, title, isBusy, refusal, onSend, onClose }:
               error={isTried ? reasonFault : undefined}
             />
           </View>
-          <View
-            onKeyDown={({ nativeEvent: { key, ctrlKey, metaKey } }) => {
-              if (key === 'Enter' && (ctrlKey || metaKey)) send()
-            }}
-          >
-            <TextArea
-              label="Words to the seller"
-              hint="What should they do? They read it as you write it."
-              isOptional={!needsNote}
-              value={note}
-              onChangeText={setNote}
-              rows={3}
-              maxLength={600}
-              error={isTried ? noteFault : undefined}
-            />
-          </View>
+          <TextArea
+            label="Words to the seller"
+            hint="What should they do? They read it as you write it."
+            isOptional={!needsNote}
+            value={note}
+            onChangeText={setNote}
+            rows={3}
+            maxLength={600}
+            error={isTried ? noteFault : undefined}
+          />
         </>
       )}
     </Sheet>

@@ -1,0 +1,1 @@
+export function useSendKey(_send: () => void) {}
