@@ -2,10 +2,11 @@ import { animalCommands } from '@/scripts/calc/animal-commands'
 import { climateCommands } from '@/scripts/calc/climate-commands'
 import { Refusal } from '@/scripts/calc/command'
 import { transportCommands } from '@/scripts/calc/transport-commands'
+import { tripCommands } from '@/scripts/calc/trip-commands'
 import { waterCommands } from '@/scripts/calc/water-commands'
 
 const commands = new Map(
-  [waterCommands, animalCommands, transportCommands, climateCommands].flatMap((group) =>
+  [waterCommands, animalCommands, transportCommands, climateCommands, tripCommands].flatMap((group) =>
     Object.entries(group),
   ),
 )

@@ -4,6 +4,7 @@ import { judgeBag } from '@/shared/domain/transport/judge-bag'
 import { judgeVessel } from '@/shared/domain/transport/judge-vessel'
 import { judgeWarmth, travelRangeC } from '@/shared/domain/transport/judge-warmth'
 import { makesSense } from '@/shared/domain/transport/makes-sense'
+import { stepOf } from '@/shared/domain/transport/step-of'
 import type { Container, Trip, TripAnswer, TripSide, TripStep } from '@/shared/domain/transport/trip'
 import { rankOf, strictest, type Reason } from '@/shared/domain/transport/verdict'
 import { waterOnTheWay, type WarmthStep } from '@/shared/domain/transport/water-way'
@@ -77,11 +78,10 @@ function sideOf(trip: Trip, side: 'cold' | 'hot', range: readonly [number, numbe
   })
   if (way === null || way.length === 0) return null
   const { steps, reasons } = judgeWater(trip, way)
-  const byWarmth = [...steps].sort((a, b) => a.waterC - b.waterC)
   return {
     steps,
-    coldest: byWarmth[0] ?? null,
-    warmest: byWarmth.at(-1) ?? null,
+    coldest: steps.reduce<TripStep | null>((a, b) => (a && a.waterC <= b.waterC ? a : b), null),
+    warmest: steps.reduce<TripStep | null>((a, b) => (a && a.waterC >= b.waterC ? a : b), null),
     reasons: [...judgeWarmth(way, range), ...reasons],
   }
 }
@@ -92,8 +92,7 @@ function judgeWater(
 ): { steps: TripStep[]; reasons: Reason[] } {
   if (container.kind === 'vessel') return judgeVessel({ animals, water, vessel: container }, way)
   if (container.kind === 'bedding') {
-    const none = { oxygenMgPerL: null, co2MgPerL: null, tanMgPerL: null, nh3NMgPerL: null }
-    return { steps: way.map((step) => ({ ...step, ...none })), reasons: [] }
+    return { steps: way.map((step) => stepOf(step)), reasons: [] }
   }
   const massG = inFullestBag(animals.count, container.boxes * container.bagsPerBox) * animals.massG
   return judgeBag({ animals, water, bags: container, massG }, way)

@@ -3,8 +3,10 @@ import { bagChemistry, type BagWater } from '@/shared/domain/transport/bag-chemi
 import { bagLoadGPerL } from '@/shared/domain/transport/bag-loading'
 import { bagTableHours, bagTableSource } from '@/shared/domain/transport/bag-loading.facts'
 import { judgeAmmonia } from '@/shared/domain/transport/judge-ammonia'
+import { stepOf } from '@/shared/domain/transport/step-of'
 import type { Animals, BaggedBoxes, SourceWater, TripStep } from '@/shared/domain/transport/trip'
 import type { Reason } from '@/shared/domain/transport/verdict'
+import type { OxygenModel } from '@/shared/domain/species/species-record'
 import type { WarmthStep } from '@/shared/domain/transport/water-way'
 import { fahrenheitFromC } from '@/shared/units/temperature'
 
@@ -25,8 +27,6 @@ interface Bag {
   massG: number
 }
 
-const bare = { oxygenMgPerL: null, co2MgPerL: null, tanMgPerL: null, nh3NMgPerL: null }
-
 /** Water in the fullest bag along the way and everything that speaks against it; the load table and the balance both. */
 export function judgeBag(bag: Bag, way: readonly WarmthStep[]): { steps: TripStep[]; reasons: Reason[] } {
   const model = bag.animals.species.oxygenModel
@@ -40,40 +40,43 @@ export function judgeBag(bag: Bag, way: readonly WarmthStep[]): { steps: TripSte
       atHour: null,
       sourceKey: 'fb4-2017',
     }
-    return { steps: way.map((step) => ({ ...step, ...bare })), reasons: [...table, reason] }
+    return { steps: way.map((step) => stepOf(step)), reasons: [...table, reason] }
   }
   const fill = {
     waterL: bag.bags.waterLPerBag,
     oxygenL: bag.bags.oxygenLPerBag,
     alkalinityMeqPerL: bag.water.alkalinityMeqPerL,
   }
-  let [usedG, countedC, before] = [0, way[0]?.waterC ?? NaN, 0]
-  let worst: BagWater | null = null
+  const use = oxygenUse(model, bag)
+  let [usedG, before, mostCo2] = [0, 0, 0]
   const steps = way.map((step): TripStep => {
-    // Cooling on the way earns the animals nothing: chilled at once, they are stressed, not rested.
-    countedC = Math.max(countedC, step.waterC)
-    const demand = packedOxygenDemandMgPerKgHour({ model, massG: bag.animals.massG, waterC: countedC })
-    usedG = demand === null ? NaN : usedG + (demand * (bag.massG / 1000) * (step.hour - before)) / 1000
+    usedG += use.gramsPerHour(step.waterC) * (step.hour - before)
     before = step.hour
     const now = usedG > 0 ? bagChemistry(fill, usedG, step.waterC) : null
-    const warm = now && step.waterC < countedC ? bagChemistry(fill, usedG, countedC) : now
-    if (now && warm)
-      worst = {
-        ...now,
-        nh3NMgPerL: Math.max(worst?.nh3NMgPerL ?? 0, warm.nh3NMgPerL),
-        co2MgPerL: Math.max(worst?.co2MgPerL ?? 0, now.co2MgPerL),
-      }
-    return { ...step, ...(now ? figuresOf(now) : bare) }
+    mostCo2 = Math.max(mostCo2, now?.co2MgPerL ?? 0)
+    return now ? stepOf(step, now) : stepOf(step)
   })
+  // Ammonia and CO2 only grow on the way, and warmth adds ammonia: the end at the warmest is the worst.
+  const end = bagChemistry(fill, usedG, use.countedC())
+  const worst = end && { ...end, co2MgPerL: mostCo2 }
   return { steps, reasons: [...table, ...judgeBalance(bag, worst, usedG)] }
 }
 
-const figuresOf = ({ oxygenMgPerL, co2MgPerL, tanMgPerL, nh3NMgPerL }: BagWater) => ({
-  oxygenMgPerL,
-  co2MgPerL,
-  tanMgPerL,
-  nh3NMgPerL,
-})
+/** Cooling on the way earns the animals nothing: chilled at once, they are stressed, not rested. NaN: beyond the model. */
+function oxygenUse(model: OxygenModel, { animals, massG }: Bag) {
+  let [countedC, gramsPerHour] = [-Infinity, NaN]
+  return {
+    countedC: () => countedC,
+    gramsPerHour: (waterC: number) => {
+      if (waterC > countedC) {
+        countedC = waterC
+        const demand = packedOxygenDemandMgPerKgHour({ model, massG: animals.massG, waterC })
+        gramsPerHour = demand === null ? NaN : (demand * massG) / 1e6
+      }
+      return gramsPerHour
+    },
+  }
+}
 
 function judgeLoad({ animals, bags, massG }: Bag, way: readonly WarmthStep[]): Reason[] {
   const hours = way.at(-1)?.hour ?? NaN

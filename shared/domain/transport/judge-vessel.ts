@@ -1,6 +1,7 @@
 import { packedOxygenDemandMgPerKgHour } from '@/shared/domain/animals/packed-oxygen-demand'
 import { CO2_PER_OXYGEN_G, TAN_PER_OXYGEN_G } from '@/shared/domain/transport/bag-equations.facts'
 import { judgeAmmonia } from '@/shared/domain/transport/judge-ammonia'
+import { stepOf } from '@/shared/domain/transport/step-of'
 import type { Animals, SourceWater, TripStep, Vessel } from '@/shared/domain/transport/trip'
 import type { Reason } from '@/shared/domain/transport/verdict'
 import { warmthOfLoad } from '@/shared/domain/transport/warmth-of-load'
@@ -46,13 +47,12 @@ export function judgeVessel(
     const nh3 = tan * (ammoniaFraction({ waterC: countedC, pH: water.pH }) ?? NaN)
     mostNh3 = Math.max(mostNh3, nh3)
     const isOpen = vessel.aeration === 'none'
-    return {
-      ...step,
+    return stepOf(step, {
       oxygenMgPerL: isOpen ? finite(Math.max(0, startOxygen - usedMgPerL)) : null,
       co2MgPerL: isOpen ? finite(usedMgPerL * CO2_PER_OXYGEN_G) : null,
       tanMgPerL: finite(tan),
       nh3NMgPerL: finite(nh3),
-    }
+    })
   })
   if (!Number.isFinite(usedMgPerL) || !Number.isFinite(mostNh3))
     return { steps, reasons: [unknownOf(animals)] }
