@@ -1,14 +1,4 @@
-import {
-  boolean,
-  date,
-  index,
-  int,
-  mysqlTable,
-  smallint,
-  text,
-  uniqueIndex,
-  varchar,
-} from 'drizzle-orm/mysql-core'
+import { boolean, date, index, int, mysqlTable, smallint, uniqueIndex, varchar } from 'drizzle-orm/mysql-core'
 
 import { instant, jsonOf, memberRef } from '@/db/schema/columns'
 import type { RuleEvidence } from '@/shared/contracts/rules'

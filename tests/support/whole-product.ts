@@ -39,8 +39,16 @@ async function sweep(): Promise<void> {
   }
 }
 
-/** Everything that `npm start` starts, once a run, on throw-away data and free ports. */
+/**
+ * Everything that `npm start` starts, once a run, on throw-away data and free ports. While writing a journey,
+ * RUNNING_PRODUCT (JSON of WholeProduct) names a product that runs already.
+ */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
+  const running = process.env.RUNNING_PRODUCT
+  if (running) {
+    project.provide('wholeProduct', JSON.parse(running) as WholeProduct)
+    return async () => undefined
+  }
   await sweep()
   const dataDir = path.join(PARENT, String(process.pid))
   const crew = makeCrew(path.join(dataDir, 'logs'))
