@@ -1,6 +1,8 @@
 import type { Href } from 'expo-router'
 import { StyleSheet, View } from 'react-native'
 
+import { animalWord } from './animal-words'
+
 import { ButtonLink } from '@/components/ui/button-link'
 import { Text } from '@/components/ui/text'
 import { layout, space } from '@/constants/theme'
@@ -42,7 +44,7 @@ export function HoldBar({ listing, count, near }: Props) {
           {printCents(depositCents)} deposit now, the rest before you collect
         </Text>
       </View>
-      <ButtonLink icon="lock" href={href} label={`Hold ${printCount(count)} fish`} />
+      <ButtonLink icon="lock" href={href} label={`Hold ${printCount(count)} ${animalWord(body.taxonId, count)}`} />
     </View>
   )
 }

@@ -16,7 +16,7 @@ export function MoneyTerms({ body }: { body: ListingBody }) {
       facts={[
         {
           term: 'Holding',
-          value: `Holding sets your fish aside for ${clocks.checkoutHold.minutes} minutes while you pay the deposit.`,
+          value: `Holding sets your animals aside for ${clocks.checkoutHold.minutes} minutes while you pay the deposit.`,
         },
         {
           term: 'Deposit',

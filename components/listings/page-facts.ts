@@ -1,3 +1,4 @@
+import { animalWord } from './animal-words'
 import { pickupDay } from './pickup-words'
 import { stageName } from './stage-words'
 import type { TagFacts } from './tag-facts'
@@ -28,7 +29,7 @@ export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFa
     countText: `${printCount(listing.free)} left`,
     waterText: printBothTemperatures(body.water.temperatureC, units),
     priceText: printCents(tierFor(body.tiers, count)?.unitCents ?? 0),
-    priceUnitText: `a fish, for ${printCount(count)}`,
+    priceUnitText: `a ${animalWord(body.taxonId, 1)}, for ${printCount(count)}`,
     distanceText:
       distanceKm === undefined ? undefined : `${aboutDistance(distanceKm, units)} ${bearing ?? ''}`.trim(),
     placeText: seller.placeText,

@@ -163,6 +163,10 @@ describe('planted faults', () => {
     expect(again.headers.get('idempotent-replayed')).toBe('true')
   })
 
+  it('has no control endpoint without the token', async () => {
+    expect((await call('/_control/clock', { method: 'POST', body: '{"offsetMs":0}' })).status).toBe(404)
+  })
+
   it('refuses connections for a while and comes back on the same port', async () => {
     const isOpen = () =>
       call('/v1/balance').then(
@@ -172,9 +176,5 @@ describe('planted faults', () => {
     await fake.control('refuse-connections', { ms: 700 })
     await expect.poll(isOpen, { timeout: 650 }).toBe(false)
     await expect.poll(isOpen, { timeout: 5000 }).toBe(true)
-  })
-
-  it('has no control endpoint without the token', async () => {
-    expect((await call('/_control/clock', { method: 'POST', body: '{"offsetMs":0}' })).status).toBe(404)
   })
 })
