@@ -6,13 +6,13 @@ import { after, DAY_MS } from '@/seed/demo/timeline'
 import { seededRandom } from '@/seed/seeded-random'
 import { dayOf } from '@/server/listings/day-of'
 
-const SMALL_SHARE = 0.14
+const SMALL_SHARE = 0.25
 const READY_IN_DAYS = 24
 
 /** What a farm has on sale: its kinds in turn, some listed weeks ago and some just now. */
 function batchesOf(stage: Stage, farm: OpenFarm): BatchPlan[] {
   const { key, keeps, batches } = farm.facts
-  const count = stage.isSmall ? Math.round(batches * SMALL_SHARE) : batches
+  const count = stage.isSmall ? Math.max(1, Math.round(batches * SMALL_SHARE)) : batches
   const chance = seededRandom(`batches of ${key}`)
   return Array.from({ length: count }, (_, at) =>
     planBatch(stage, {

@@ -81,13 +81,14 @@ export async function seedDemo(options: DemoOptions): Promise<void> {
     run: async () => void (lastOldEffect = await lastEffect()),
   }
   try {
-    await playTimeline([
+    const leftOut = await playTimeline([
       lastDay,
       ...batches.flatMap((plan) => listings.publish(plan)),
       ...stories.flatMap((story) => story.steps(listings)),
       ...pauseSteps(stage, batches, listings),
       ...orders.flatMap((plan) => orderSteps(plan, openOrderDesk(plan, listings, moderator), at)),
     ])
+    for (const step of leftOut) say(`left out: ${step}`)
   } finally {
     await photos.close()
   }
