@@ -49,7 +49,7 @@ async function spoil(dist) {
   const folder = path.join(copy, '_expo/static/js/web')
   const entry = (await readdir(folder)).find((name) => /^entry-.*\.js$/.test(name)) ?? ''
   await appendFile(path.join(folder, entry), `"ZodString";"${randomBytes(400 * KB).toString('base64')}"`)
-  await writeFile(path.join(folder, 'late.js'), randomBytes(90 * KB))
+  await writeFile(path.join(folder, 'late.js'), randomBytes(120 * KB))
   const page = path.join(copy, 'index.html')
   const html = await readFile(page, 'utf8')
   await writeFile(page, html.replace('</body>', '<script src="/global.css"></script></body>'))
