@@ -2,6 +2,7 @@ import { dropOldKeys } from '@/server/http/idempotency-store'
 import { dropOldCounts } from '@/server/http/call-limit-store'
 import type { Job } from '@/server/jobs/job-runner'
 import { ringClocks } from '@/server/jobs/ring-clocks'
+import { expireListings } from '@/server/listings/expire-listings'
 import { refreshQuietPayments } from '@/server/money/refresh-payment'
 import { runEffects } from '@/server/outbox/run-effects'
 
@@ -14,6 +15,7 @@ export function jobsOf(): Job[] {
   return [
     { name: 'effects', everyMs: 2 * SECOND, run: runEffects },
     { name: 'clocks', everyMs: 2 * SECOND, run: ringClocks },
+    { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
     { name: 'quiet-payments', everyMs: 10 * SECOND, run: refreshQuietPayments },
     {
       name: 'forget',
