@@ -44,7 +44,11 @@ export function foundFacts(found: FoundListing, asked: Asked): TagFacts {
     countText: `${printCount(found.free)} left`,
     waterText: found.waterC === undefined ? undefined : printBothTemperatures(found.waterC, units),
     priceText: printCents(isTotal ? (found.totalCents ?? 0) : found.unitCents),
-    priceUnitText: isTotal ? `for ${printCount(count)}` : found.category === 'fish' ? `a ${animalWord(found.speciesId, 1)}` : 'each',
+    priceUnitText: isTotal
+      ? `for ${printCount(count)}`
+      : found.category === 'fish'
+        ? `a ${animalWord(found.speciesId, 1)}`
+        : 'each',
     distanceText: state ? distanceText(found, units) : undefined,
     placeText: found.placeText,
     dayText: found.nextPickup ? `Pickup ${pickupDay(found.nextPickup)}` : undefined,

@@ -44,7 +44,11 @@ export function HoldBar({ listing, count, near }: Props) {
           {printCents(depositCents)} deposit now, the rest before you collect
         </Text>
       </View>
-      <ButtonLink icon="lock" href={href} label={`Hold ${printCount(count)} ${animalWord(body.taxonId, count)}`} />
+      <ButtonLink
+        icon="lock"
+        href={href}
+        label={`Hold ${printCount(count)} ${animalWord(body.taxonId, count)}`}
+      />
     </View>
   )
 }

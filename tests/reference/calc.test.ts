@@ -25,13 +25,21 @@ const bluegill = {
 const asked: readonly (readonly [name: string, input: object, reply: object])[] = [
   ['ammonia-fraction', { temperatureC: 24, pH: 8 }, { fraction: expect.closeTo(0.0502, 4) }],
   ['oxygen-saturation', { temperatureC: 20, elevationM: 1609 }, { mgPerL: expect.closeTo(7.45, 2) }],
-  ['oxygen-saturation', { temperatureC: 20, pressureMmHg: 760, salinityPpt: 5 }, { mgPerL: expect.closeTo(8.828, 3) }],
+  [
+    'oxygen-saturation',
+    { temperatureC: 20, pressureMmHg: 760, salinityPpt: 5 },
+    { mgPerL: expect.closeTo(8.828, 3) },
+  ],
   [
     'ammonia-criteria',
     { temperatureC: 20, pH: 7, trout: true },
     { acuteMgTanPerL: expect.closeTo(16.76, 2), chronicMgTanPerL: expect.closeTo(1.887, 3) },
   ],
-  ['oxygen-demand', { model: 'crayfish', massG: 1, temperatureC: 0 }, { mgPerKgHour: expect.closeTo(56.25, 2) }],
+  [
+    'oxygen-demand',
+    { model: 'crayfish', massG: 1, temperatureC: 0 },
+    { mgPerKgHour: expect.closeTo(56.25, 2) },
+  ],
   ['standard-weight', { species: 'nile_tilapia', lengthMm: 100 }, { massG: expect.closeTo(20.67, 2) }],
   ['bag-loading', { stage: 'swim-up-fry', hours: 36, temperatureF: 65 }, { gPerL: expect.closeTo(35.9, 0) }],
   [
@@ -40,7 +48,11 @@ const asked: readonly (readonly [name: string, input: object, reply: object])[] 
     { waterC: expect.closeTo(16.54, 2) },
   ],
   ['growth', { massG: 10, tgcX1000: 1.8, temperatureC: 12, days: 100 }, { massG: expect.closeTo(80.31, 2) }],
-  ['distance', { from: { lat: 0, lng: 0 }, to: { lat: 0, lng: 1 } }, { geodesicM: expect.closeTo(111_319.491, 3) }],
+  [
+    'distance',
+    { from: { lat: 0, lng: 0 }, to: { lat: 0, lng: 1 } },
+    { geodesicM: expect.closeTo(111_319.491, 3) },
+  ],
   ['climate', { lat: 44.984, lng: -93.27, date: '2027-07-15' }, { minC: expect.closeTo(18.3, 1) }],
   ['trip', bluegill, { verdict: 'safe', cold: { coldest: { waterC: expect.closeTo(11.76, 1) } } }],
 ]
@@ -66,7 +78,8 @@ describe('the calc command', () => {
       .map((line) => JSON.parse(line) as unknown)
     expect(replies).toHaveLength(lines.length)
     asked.forEach(([, , reply], at) => expect(replies[at]).toMatchObject(reply))
-    for (const reply of replies.slice(asked.length)) expect(reply).toEqual({ error: expect.stringMatching(/\.$/) })
+    for (const reply of replies.slice(asked.length))
+      expect(reply).toEqual({ error: expect.stringMatching(/\.$/) })
   }, 60_000)
 
   it('leaves with 2 and one sentence on bad input', () => {
