@@ -3,18 +3,10 @@
 import { parseArgs } from 'node:util'
 
 import { connect, db, disconnect } from '@/db/client'
-import { configurePayments } from '@/payments/stripe'
 import { findDemo } from '@/seed/demo/demo-mark'
-import { seedDemo } from '@/seed/demo/seed-demo'
-import { openWebhookDoor } from '@/seed/demo/webhook-door'
 import { writePeopleFile } from '@/seed/demo/write-people-file'
 import { loadPlaces } from '@/seed/load-places'
 import { loadRules } from '@/seed/load-rules'
-import { openAuth } from '@/server/auth/auth'
-import { readSettings } from '@/server/env'
-import { log } from '@/server/log'
-import { configureOrders } from '@/server/orders/order-settings'
-import { configurePhotos } from '@/server/photos/photo-files'
 
 const VALLEY = ['OH', 'KY', 'IN']
 
@@ -27,29 +19,6 @@ async function layGround(isDemo: boolean, isSmall: boolean): Promise<void> {
   say(isSmall ? `places of ${VALLEY.join(', ')}` : 'places of the whole country')
   await loadRules(db(), { demonstration: isDemo, at: new Date() })
   say(isDemo ? 'rules, with the demonstration ones' : 'rules')
-}
-
-async function playDemo(isSmall: boolean): Promise<void> {
-  const settings = readSettings()
-  log.level = 'warn'
-  const { PUBLIC_ORIGIN: origin, STRIPE_API_BASE: processor } = settings
-  if (!processor)
-    throw new Error('The demo pays with practice cards: STRIPE_API_BASE must name the practice processor.')
-  const { hostname: host, port, protocol } = new URL(processor)
-  openAuth({ secret: settings.AUTH_SECRET, origin, alsoTrusted: [] })
-  configureOrders({ origin, feeBp: settings.FEE_BP })
-  configurePhotos({ dir: settings.UPLOAD_DIR })
-  configurePayments({
-    secretKey: settings.STRIPE_SECRET_KEY,
-    webhookSecret: settings.STRIPE_WEBHOOK_SECRET,
-    ...{ host, port: Number(port), protocol: protocol === 'https:' ? 'https' : 'http' },
-  })
-  const door = await openWebhookDoor({ host: settings.HOST, port: settings.PORT })
-  try {
-    await seedDemo({ clockOffsetMs: settings.CLOCK_OFFSET_MS, isSmall, say })
-  } finally {
-    await door.close()
-  }
 }
 
 async function run(): Promise<void> {
@@ -68,8 +37,10 @@ async function run(): Promise<void> {
   }
   if (isDemo && peopleFile) await writePeopleFile(peopleFile)
   if (isDemo && found === 'whole') return say('the demo is there already: nothing to do')
+  // Half the product comes with it: it loads while the places do.
+  const demo = isDemo ? import('@/seed/demo/play-demo') : null
   await layGround(isDemo, isSmall)
-  if (isDemo) await playDemo(isSmall)
+  if (demo) await (await demo).playDemo({ isSmall, say })
   say('done')
 }
 

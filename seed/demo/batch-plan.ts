@@ -1,5 +1,5 @@
 import type { Slot } from '@/seed/demo/pickup-times'
-import type { OpenFarm } from '@/seed/demo/stage'
+import type { Farm } from '@/seed/demo/stage'
 import type { ListingBody } from '@/shared/contracts/listings'
 
 /** A photo to take: one of our pictures, framed anew. */
@@ -18,7 +18,7 @@ export interface Shot {
 /** A batch on its way to a listing: everything typed into the form but the photos, which are uploaded first. */
 export interface BatchPlan {
   key: string
-  farm: OpenFarm
+  farm: Farm
   submittedAt: Date
   decidedAt: Date
   body: Omit<ListingBody, 'photos' | 'windows'>

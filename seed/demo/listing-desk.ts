@@ -71,10 +71,11 @@ export function openListingDesk(stage: Stage, photos: PhotoDesk): ListingDesk {
   return {
     ...{ idOf, begin, submit, decide },
     publish: (plan) => [
-      { at: plan.submittedAt, what: `${plan.key} is submitted`, run: () => submit(plan) },
+      { at: plan.submittedAt, story: plan.key, what: 'submitted', run: () => submit(plan) },
       {
         at: plan.decidedAt,
-        what: `${plan.key} is approved`,
+        story: plan.key,
+        what: 'approved',
         run: () => decide(plan.key, { decision: 'approve' }),
       },
     ],

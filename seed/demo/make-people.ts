@@ -42,10 +42,11 @@ async function wishOf({ email, name, zip, staffRole }: Person, at: Date): Promis
 }
 
 function actorOf(
-  { email, name, zip, staffRole }: Person,
+  { key, email, name, zip, staffRole }: Person,
   { memberId, state }: { memberId: string; state: string },
 ): Actor {
-  const roles: Role[] = staffRole ? ['member', staffRole] : ['member']
+  const sells = farms.some((farm) => farm.key === key)
+  const roles: Role[] = ['member', ...(staffRole ? [staffRole] : []), ...(sells ? (['seller'] as const) : [])]
   const caller = { memberId, name, email, emailVerified: true, roles, hasSecondFactor: Boolean(staffRole) }
   return { caller, zip, state }
 }

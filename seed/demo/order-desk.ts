@@ -20,7 +20,6 @@ import { readOrder } from '@/server/orders/order-store'
 import { payBalance } from '@/server/orders/pay-balance'
 import { reportNoShow } from '@/server/orders/report-no-show'
 import { reserveBatch } from '@/server/orders/reserve-batch'
-import { showOrder } from '@/server/orders/show-order'
 import { stopOrder } from '@/server/orders/stop-order'
 import { withdrawRequest } from '@/server/orders/withdraw-request'
 import type { ShownOrder } from '@/shared/contracts/orders'
@@ -69,8 +68,8 @@ export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator:
     await doEffects()
   }
   const handOverAll = async (commandId: string, count: number) => {
-    const { handOverCode } = await showOrder(by.buyer, id())
-    await handOver(by.seller, id(), { commandId, count, code: need(handOverCode, `code of ${plan.key}`) })
+    const { handOverCode: code } = need(await readOrder(id()), plan.key)
+    await handOver(by.seller, id(), { commandId, count, code })
   }
   return {
     reserve: act('reserve', async (commandId) => {
@@ -85,8 +84,8 @@ export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator:
     }),
     payDeposit: act('pay', async () => payOn(need(placed, plan.key), buyer)),
     payBalance: act('pay balance', async () => {
-      const before = await showOrder(by.buyer, id())
-      if (!before.balancePaid) await payOn(await payBalance(by.buyer, id()), buyer)
+      const { balanceCents, balancePaidAt } = need(await readOrder(id()), plan.key)
+      if (balanceCents > 0 && balancePaidAt === null) await payOn(await payBalance(by.buyer, id()), buyer)
     }),
     accept: act('accept', (commandId) => acceptOrder(by.seller, id(), commandId)),
     decline: act('decline', (commandId) =>

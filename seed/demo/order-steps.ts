@@ -24,7 +24,7 @@ const agreed = (times: Times): Timed[] => [...bought(times), [after(times.reserv
 const readied = (times: Times): Timed[] => [
   ...agreed(times),
   [after(times.reserved, 8 * HOUR_MS), 'payBalance'],
-  [after(times.begins, -13 * HOUR_MS), 'markReady'],
+  [after(times.begins, -26 * HOUR_MS), 'markReady'],
 ]
 const handedOver = (times: Times, act: 'handOver' | 'handOverShort' = 'handOver'): Timed[] => [
   ...readied(times),
@@ -97,5 +97,5 @@ export function orderSteps(plan: OrderPlan, desk: OrderDesk, now: Date): Step[] 
   }
   return paths[path](times)
     .filter(([, act]) => act !== 'accept' || batch.body.accept === 'ask')
-    .map(([at, act]) => ({ at, what: `order ${key}: ${act}`, run: () => desk[act]() }))
+    .map(([at, act]) => ({ at, story: `order ${key}`, what: act, run: () => desk[act]() }))
 }

@@ -13,14 +13,13 @@ import { uploadPhoto } from '@/server/photos/upload-photo'
 
 const PICTURES = path.join(path.dirname(fileURLToPath(import.meta.url)), '..', '..', 'assets', 'demo')
 const LANES = 2
-const WIDTH_PX = 840
 
 /** Framed and lit a little differently each time, as photos of one pan are, so that no two look the same to a machine. */
 async function frame(shot: Shot, file: string): Promise<void> {
   const chance = seededRandom(`frame ${shot.framing}`)
   const source = sharp(path.join(PICTURES, `${shot.picture}.webp`))
   const { width, height } = await source.metadata()
-  const zoom = chance.between(0.86, 0.97)
+  const zoom = chance.between(0.88, 0.96)
   const [cut, cutHigh] = [Math.round(width * zoom), Math.round(height * zoom)]
   const light = chance.between(0.9, 1.08)
   const warmth = chance.between(-0.05, 0.05)
@@ -32,7 +31,6 @@ async function frame(shot: Shot, file: string): Promise<void> {
       width: cut,
       height: cutHigh,
     })
-    .resize({ width: WIDTH_PX })
     .linear([light * (1 + warmth), light, light * (1 - warmth)], [0, 0, 0])
   const dated = shot.cameraDay
     ? picture.withExif({ IFD0: { DateTime: `${shot.cameraDay.replaceAll('-', ':')} 10:15:00` } })

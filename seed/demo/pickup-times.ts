@@ -37,7 +37,8 @@ export function slotOn(typed: TypedWindow, zone: string): Slot {
 /** All windows of a rhythm between two moments. */
 export function slotsOf(rhythm: Rhythm, span: { after: Date; until: Date }, zone: string): Slot[] {
   const found: Slot[] = []
-  for (let day = dayOf(span.after, zone); day <= dayOf(span.until, zone); day = dayPlus(day, 1)) {
+  const last = dayOf(span.until, zone)
+  for (let day = dayOf(span.after, zone); day <= last; day = dayPlus(day, 1)) {
     if (!rhythm.weekdays.includes(new Date(`${day}T12:00:00Z`).getUTCDay())) continue
     const { from, until, capacity } = rhythm
     const slot = slotOn({ day, from, until, capacity }, zone)

@@ -9,7 +9,7 @@ import {
 } from '@/seed/demo/batch-words.facts'
 import type { BatchPlan, Shot } from '@/seed/demo/batch-plan'
 import { dayPlus, slotsOf, type Rhythm } from '@/seed/demo/pickup-times'
-import { need, type OpenFarm, type Stage } from '@/seed/demo/stage'
+import { need, type Farm, type Stage } from '@/seed/demo/stage'
 import { stockFacts, type StockFacts } from '@/seed/demo/stock.facts'
 import { after, DAY_MS, HOUR_MS } from '@/seed/demo/timeline'
 import { picturePlans, type PicturePlan } from '@/seed/pictures/picture-plan.facts'
@@ -31,7 +31,7 @@ const rhythms: readonly Rhythm[] = [
 
 export interface BatchWish {
   key: string
-  farm: OpenFarm
+  farm: Farm
   taxonId: TaxonId
   /** How many days before the demo's moment it was submitted. */
   daysAgo: number
@@ -69,7 +69,7 @@ function hatchDay(stock: StockFacts, day: string, leastAgeDays: number): string 
   return hatched
 }
 
-function licenceText({ facts }: OpenFarm): string {
+function licenceText({ facts }: Farm): string {
   if (facts.licence === 'have')
     return `${facts.state} aquaculture permit ${facts.state}-${facts.zip.slice(1)}`
   return facts.licence === 'unsure'

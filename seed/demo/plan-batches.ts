@@ -1,18 +1,24 @@
 import type { BatchPlan } from '@/seed/demo/batch-plan'
+import type { FarmFacts } from '@/seed/demo/farms.facts'
 import { planBatch } from '@/seed/demo/plan-batch'
 import { dayPlus } from '@/seed/demo/pickup-times'
-import { need, type OpenFarm, type Stage } from '@/seed/demo/stage'
+import { need, type Farm, type Stage } from '@/seed/demo/stage'
 import { after, DAY_MS } from '@/seed/demo/timeline'
 import { seededRandom } from '@/seed/seeded-random'
 import { dayOf } from '@/server/listings/day-of'
 
-const SMALL_SHARE = 0.25
 const READY_IN_DAYS = 24
 
+/** In the small demo: enough of the hatchery for the people that are printed, one of each larger farm. */
+function countOf({ isSmall }: Stage, { key, batches }: FarmFacts): number {
+  if (!isSmall) return batches
+  return key === 'hatchery' ? 3 : batches >= 4 ? 1 : 0
+}
+
 /** What a farm has on sale: its kinds in turn, some listed weeks ago and some just now. */
-function batchesOf(stage: Stage, farm: OpenFarm): BatchPlan[] {
-  const { key, keeps, batches } = farm.facts
-  const count = stage.isSmall ? Math.max(1, Math.round(batches * SMALL_SHARE)) : batches
+function batchesOf(stage: Stage, farm: Farm): BatchPlan[] {
+  const { key, keeps } = farm.facts
+  const count = countOf(stage, farm.facts)
   const chance = seededRandom(`batches of ${key}`)
   return Array.from({ length: count }, (_, at) =>
     planBatch(stage, {

@@ -101,15 +101,15 @@ interface Casting {
   load: Map<string, number>
 }
 
-function fits({ body, key, farm }: BatchPlan, facts: PathFacts): boolean {
+/** Whether the batch may carry such an order at all: the right one, the right farm, to be had now. */
+function isMeant({ body, key, farm }: BatchPlan, facts: PathFacts): boolean {
   if (facts.batch) return key === facts.batch
   if (key === 'last pail' || key === 'no more days' || body.readyOn) return false
-  return (
-    (!facts.farm || farm.facts.key === facts.farm) &&
-    (!facts.accept || body.accept === facts.accept) &&
-    (!facts.balanceDue || body.balanceDue === facts.balanceDue)
-  )
+  return !facts.farm || farm.facts.key === facts.farm
 }
+
+const hasTerms = ({ body }: BatchPlan, { accept, balanceDue }: PathFacts) =>
+  (!accept || body.accept === accept) && (!balanceDue || body.balanceDue === balanceDue)
 
 function buyerFor(
   batch: BatchPlan,
@@ -122,32 +122,40 @@ function buyerFor(
   return chance.pick(growers.filter((grower) => isOpen || grower.state === home))
 }
 
-function cast({ stage, batches, load }: Casting, facts: PathFacts, key: string): OrderPlan | null {
-  const chance = seededRandom(`order ${key}`)
-  const willing = batches
-    .filter((batch) => fits(batch, facts))
-    .map((batch) => ({ batch, rank: (load.get(batch.key) ?? 0) + chance.next() }))
+/**
+ * Batches for such an order, the best first: with the terms it needs and few orders so far. One without any order yet
+ * can still be listed under other terms, so that no story of the demo hangs on chance.
+ */
+function candidates({ batches, load }: Casting, facts: PathFacts, chance: Chance): BatchPlan[] {
+  const ordersOf = (batch: BatchPlan) => load.get(batch.key) ?? 0
+  return batches
+    .filter((batch) => isMeant(batch, facts) && (hasTerms(batch, facts) || ordersOf(batch) === 0))
+    .map((batch) => ({ batch, rank: (hasTerms(batch, facts) ? 0 : 100) + ordersOf(batch) + chance.next() }))
     .sort((one, other) => one.rank - other.rank)
-  for (const { batch } of willing) {
-    const chosen = choosers[facts.slot](batch, {
-      stage,
-      chance,
-      leadDays: facts.leadDays ?? [LEAD_DAYS, 6.5],
-    })
+    .map(({ batch }) => batch)
+}
+
+function cast(casting: Casting, facts: PathFacts, key: string): OrderPlan {
+  const { stage, load } = casting
+  const chance = seededRandom(`order ${key}`)
+  for (const batch of candidates(casting, facts, chance)) {
+    const leadDays = facts.leadDays ?? [LEAD_DAYS, 6.5]
+    const chosen = choosers[facts.slot](batch, { stage, chance, leadDays })
     if (!chosen) continue
+    const { accept, balanceDue } = { ...batch.body, ...facts }
+    batch.body = { ...batch.body, accept, balanceDue }
     load.set(batch.key, (load.get(batch.key) ?? 0) + 1)
     const { minOrder, orderStep } = batch.body
-    const quantity = facts.quantity ?? minOrder + orderStep * chance.whole(0, 3)
-    const isLate = facts.path === 'reserved'
+    const isNow = facts.path === 'reserved'
     return {
-      ...{ key, path: facts.path, batch, quantity, slot: chosen.slot },
+      ...{ key, path: facts.path, batch, slot: chosen.slot },
+      quantity: facts.quantity ?? minOrder + orderStep * chance.whole(0, 3),
       buyer: buyerFor(batch, stage, { facts, chance }),
       payMode: mayBePaidWhole.has(facts.path) && chance.happens(0.3) ? 'full' : 'deposit',
-      reservedAt: isLate ? after(stage.at, -chance.between(2, 6) * MINUTE_MS) : chosen.reservedAt,
+      reservedAt: isNow ? after(stage.at, -chance.between(2, 6) * MINUTE_MS) : chosen.reservedAt,
     }
   }
-  // On some dates a small demo has no batch for one of its stories: it goes without that one.
-  return null
+  throw new Error(`no batch of the demo suits an order that is "${facts.path}"`)
 }
 
 /** All orders of the demo. Some add a pickup window to their batch: plan them before the batches are published. */
@@ -156,6 +164,6 @@ export function planOrders(stage: Stage, batches: readonly BatchPlan[]): OrderPl
   return orderPaths.flatMap((facts, row) =>
     Array.from({ length: facts.times[stage.isSmall ? 0 : 1] }, (_, at) =>
       cast({ stage, batches, load }, facts, `${row}.${at} ${facts.path}`),
-    ).filter((plan) => plan !== null),
+    ),
   )
 }

@@ -30,7 +30,7 @@ function plan({ stage }: Telling, wish: Wish): BatchPlan {
 function waits(telling: Telling, wish: Wish, change: Change = {}): BatchPlan {
   const made = plan(telling, wish)
   const steps = (desk: ListingDesk): Step[] => [
-    { at: made.submittedAt, what: `${made.key} is submitted`, run: () => desk.submit(made, change) },
+    { at: made.submittedAt, story: made.key, what: 'submitted', run: () => desk.submit(made, change) },
   ]
   telling.told.push({ plan: made, steps })
   return made
@@ -44,7 +44,7 @@ function changed(telling: Telling, wish: Wish, change: Change): void {
     plan: made,
     steps: (desk) => [
       ...desk.publish(made),
-      { at, what: `${made.key} is changed`, run: () => desk.submit(made, change) },
+      { at, story: made.key, what: 'changed', run: () => desk.submit(made, change) },
     ],
   })
 }
@@ -54,8 +54,8 @@ function decided(telling: Telling, wish: Wish, given: Parameters<ListingDesk['de
   telling.told.push({
     plan: made,
     steps: (desk) => [
-      { at: made.submittedAt, what: `${made.key} is submitted`, run: () => desk.submit(made) },
-      { at: made.decidedAt, what: `${made.key} is answered`, run: () => desk.decide(made.key, given) },
+      { at: made.submittedAt, story: made.key, what: 'submitted', run: () => desk.submit(made) },
+      { at: made.decidedAt, story: made.key, what: 'answered', run: () => desk.decide(made.key, given) },
     ],
   })
 }
@@ -69,7 +69,7 @@ function drafted(telling: Telling, wish: Wish): void {
   telling.told.push({
     plan: made,
     steps: (desk) => [
-      { at: made.submittedAt, what: `${made.key} is begun`, run: () => desk.begin(made, typed) },
+      { at: made.submittedAt, story: made.key, what: 'begun', run: () => desk.begin(made, typed) },
     ],
   })
 }

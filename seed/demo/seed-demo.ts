@@ -3,7 +3,7 @@ import { lastEffect, passOverOldMail, settleEvents } from '@/seed/demo/effects'
 import { forgetDemoCalls, markDemo } from '@/seed/demo/demo-mark'
 import { openListingDesk, type ListingDesk } from '@/seed/demo/listing-desk'
 import { makePeople } from '@/seed/demo/make-people'
-import { openFarms } from '@/seed/demo/open-farms'
+import { openFarms, planFarms } from '@/seed/demo/open-farms'
 import { openOrderDesk } from '@/seed/demo/order-desk'
 import { orderSteps } from '@/seed/demo/order-steps'
 import { openPhotoDesk } from '@/seed/demo/photo-desk'
@@ -27,14 +27,17 @@ export interface DemoOptions {
   say: (line: string) => void
 }
 
-const PAUSED_EVERY = 29
+const PAUSED = 3
 
-function pauseSteps(stage: Stage, batches: readonly BatchPlan[], desk: ListingDesk): Step[] {
-  return batches
-    .filter((plan, at) => at % PAUSED_EVERY === 13 && plan.decidedAt < after(stage.at, -4 * DAY_MS))
+/** A few that nobody has ordered from take a break. */
+function pauseSteps({ at }: Stage, idle: readonly BatchPlan[], desk: ListingDesk): Step[] {
+  return idle
+    .filter((plan) => plan.decidedAt < after(at, -4 * DAY_MS))
+    .slice(0, PAUSED)
     .map((plan) => ({
-      at: after(stage.at, -3 * DAY_MS),
-      what: `${plan.key} is paused`,
+      at: after(at, -3 * DAY_MS),
+      story: plan.key,
+      what: 'paused',
       run: async () => void (await changeSelling(plan.farm.owner.caller, desk.idOf(plan.key), 'paused')),
     }))
 }
@@ -51,12 +54,8 @@ async function setStage({ isSmall, say }: DemoOptions, at: Date): Promise<Stage>
   turnClockTo(after(at, -80 * DAY_MS))
   const people = await makePeople(after(at, -80 * DAY_MS))
   say(`people: ${people.size}`)
-  turnClockTo(after(at, -75 * DAY_MS))
-  const farms = await openFarms(people)
-  const ready = [...farms.values()].filter((farm) => farm.facts.payouts === 'ready').length
-  say(`farms: ${farms.size}, ${ready} can be paid`)
   const growers = [...people].filter(([key]) => key.startsWith('grower ')).map(([, actor]) => actor)
-  return { at, isSmall, people, growers, farms, say }
+  return { at, isSmall, people, growers, farms: await planFarms(people) }
 }
 
 /** Plays the whole demo through the product's own commands and its practice processor, up to the given moment. */
@@ -68,27 +67,32 @@ export async function seedDemo(options: DemoOptions): Promise<void> {
   const batches = planBatches(stage)
   const stories = planQueueStories(stage)
   const orders = planOrders(stage, batches)
+  const isIdle = (plan: BatchPlan) => !orders.some((order) => order.batch === plan)
   const plans = [...batches, ...stories.map((story) => story.plan)]
   const photos = await openPhotoDesk(
     plans.toSorted((one, other) => one.submittedAt.getTime() - other.submittedAt.getTime()),
   )
+  turnClockTo(after(at, -75 * DAY_MS))
+  await openFarms(stage.farms.values())
+  say(`farms: ${stage.farms.size}`)
   const listings = openListingDesk(stage, photos)
   const moderator = need(stage.people.get('moderator'), 'moderator')
   let lastOldEffect = 0
   const lastDay: Step = {
     at: after(at, -DAY_MS),
-    what: 'the last day begins',
+    story: 'the last day',
+    what: 'begins',
     run: async () => void (lastOldEffect = await lastEffect()),
   }
   try {
-    const leftOut = await playTimeline([
+    const brokenOff = await playTimeline([
       lastDay,
       ...batches.flatMap((plan) => listings.publish(plan)),
       ...stories.flatMap((story) => story.steps(listings)),
-      ...pauseSteps(stage, batches, listings),
+      ...pauseSteps(stage, batches.filter(isIdle), listings),
       ...orders.flatMap((plan) => orderSteps(plan, openOrderDesk(plan, listings, moderator), at)),
     ])
-    for (const step of leftOut) say(`left out: ${step}`)
+    for (const story of brokenOff) say(`broke off: ${story}`)
   } finally {
     await photos.close()
   }

@@ -8,7 +8,7 @@ export interface Actor {
   state: string
 }
 
-export interface OpenFarm {
+export interface Farm {
   facts: FarmFacts
   owner: Actor
   zone: string
@@ -23,8 +23,7 @@ export interface Stage {
   people: ReadonlyMap<string, Actor>
   growers: readonly Actor[]
   /** By key. */
-  farms: ReadonlyMap<string, OpenFarm>
-  say: (line: string) => void
+  farms: ReadonlyMap<string, Farm>
 }
 
 /** Somebody or something that must be there by now. */

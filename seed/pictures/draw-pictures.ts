@@ -5,11 +5,15 @@ import sharp from 'sharp'
 import { drawPicture } from '@/seed/pictures/draw-picture'
 import { picturePlans } from '@/seed/pictures/picture-plan.facts'
 
+/** Wide enough for the largest place a photo is shown at on a phone, small enough to keep. */
+const WIDTH_PX = 800
+
 // Draws the demo's photos anew. Run: node --import tsx seed/pictures/draw-pictures.ts
 await mkdir('assets/demo', { recursive: true })
 for (const plan of picturePlans) {
   const file = `assets/demo/${plan.name}.webp`
   const { size } = await sharp(Buffer.from(drawPicture(plan)))
+    .resize({ width: WIDTH_PX })
     .webp({ quality: 82, effort: 6 })
     .toFile(file)
   console.log(`${file} ${Math.round(size / 1024)} kB`)
