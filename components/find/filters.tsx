@@ -36,7 +36,7 @@ export function Filters({ find }: { find: Find }) {
       <CommittedField
         label="How many do you want?"
         hint="Prices are then for that many."
-        placeholder="20"
+        placeholder="e.g. 20"
         shown={state.count === undefined ? '' : printCount(state.count)}
         read={(text) => positive(parseCount(text), 1_000_000)}
         unreadable="A whole number, like 20."
@@ -48,7 +48,7 @@ export function Filters({ find }: { find: Find }) {
       <CommittedField
         label="At most, for one"
         prefix="$"
-        placeholder="1.50"
+        placeholder="e.g. 1.50"
         shown={state.mostCents === undefined ? '' : printCents(state.mostCents).slice(1)}
         read={(text) => positive(parseDollars(text), 10_000_000)}
         unreadable="An amount, like 1.50."

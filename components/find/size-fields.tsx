@@ -33,7 +33,7 @@ export function SizeFields({ state, onChange }: Props) {
       <View style={styles.half}>
         <CommittedField
           label="Size from"
-          placeholder={units === 'us' ? '2 in' : '5 cm'}
+          placeholder={units === 'us' ? 'e.g. 2 in' : 'e.g. 5 cm'}
           shown={shown(state.sizeFromMm)}
           read={read}
           unreadable={unreadable}
@@ -43,7 +43,7 @@ export function SizeFields({ state, onChange }: Props) {
       <View style={styles.half}>
         <CommittedField
           label="Size to"
-          placeholder={units === 'us' ? '4 in' : '10 cm'}
+          placeholder={units === 'us' ? 'e.g. 4 in' : 'e.g. 10 cm'}
           shown={shown(state.sizeToMm)}
           read={read}
           unreadable={unreadable}

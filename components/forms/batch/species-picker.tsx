@@ -41,7 +41,7 @@ export function SpeciesPicker() {
           field.onBlur()
         }}
         emptyText={chosen?.commonName === text ? undefined : whyNotListed(text)}
-        placeholder="Bluegill"
+        placeholder="e.g. Bluegill"
       />
       {chosen ? <ChosenSpecies taxonId={chosen.id} /> : null}
     </View>

@@ -22,7 +22,9 @@ const bytesPerMb = 1024 * 1024
 export function useBatchPhotos(form: UseFormReturn<BatchTyping>, today: string): PhotoSending {
   const [refused, setRefused] = useState<string[]>([])
   const { sending, send, retry, drop } = usePhotoSending(({ photoId, takenOn }) => {
-    const photo = { photoId, takenOn: takenOn ?? today, hasRuler: false, caption: '' }
+    // A camera with a wrong clock dates a photo in the future: the seller could not publish it so.
+    const taken = takenOn && takenOn <= today ? takenOn : today
+    const photo = { photoId, takenOn: taken, hasRuler: false, caption: '' }
     // A complaint that stands there already is looked at again; none is made before the seller has gone on.
     const shouldValidate = form.getFieldState('photos').invalid
     form.setValue('photos', [...form.getValues('photos'), photo], { shouldDirty: true, shouldValidate })

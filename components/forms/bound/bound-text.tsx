@@ -15,12 +15,20 @@ interface Props<T extends FieldValues> extends Words {
   onLeave?: () => void
 }
 
-export function BoundText<T extends FieldValues>({ name, isFigure, onLeave, ...words }: Props<T>) {
+export function BoundText<T extends FieldValues>({
+  name,
+  isFigure,
+  onLeave,
+  placeholder,
+  ...words
+}: Props<T>) {
   const { fieldId, value, error, change, leave } = useBound<T, string>(name)
   const Control = isFigure ? NumberField : Field
   return (
     <Control
       {...words}
+      // Said as an example, so that nobody takes it for something already filled in.
+      placeholder={placeholder && `e.g. ${placeholder}`}
       fieldId={fieldId}
       value={value}
       onChangeText={change}
