@@ -4,23 +4,20 @@ import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest'
 import {
   expectNoAxeViolations,
   keepShot,
+  nameOf,
   openBrowser,
-  tabTo,
   type TestBrowser,
 } from '@/tests/support/browser'
-import { linkIn, waitForMail } from '@/tests/support/mailbox'
+import { pressOn, typeInto } from '@/tests/support/by-keyboard'
+import { waitForMail } from '@/tests/support/mailbox'
+import { confirmAddress, fillSignUp, NEW_PASSWORD } from '@/tests/support/new-member'
 
 const { origin, mailOrigin, payOrigin } = inject('wholeProduct')
-const PASSWORD = 'lantern gravel otter 9'
 let browser: TestBrowser
 beforeAll(async () => {
   browser = await openBrowser()
 })
 afterAll(() => browser.close())
-
-/** Pages behind the one in view stay mounted, hidden: only what is seen counts. */
-const field = (page: Page, label: string | RegExp, isExact = false) =>
-  page.getByLabel(label, { exact: isExact }).filter({ visible: true })
 
 const isPhone = (page: Page) => (page.viewportSize()?.width ?? 0) < 700
 
@@ -66,14 +63,10 @@ async function openBuyable(page: Page): Promise<string> {
 async function makeAccount(page: Page, email: string): Promise<void> {
   await page.getByRole('link', { name: 'Sign in' }).filter({ visible: true }).last().click()
   await page.getByRole('link', { name: 'Make an account' }).click()
-  await field(page, 'Your name').fill('Robin Newpond')
-  await field(page, 'E-mail address').fill(email)
-  await field(page, 'Password', true).fill(PASSWORD)
+  await fillSignUp(page, { name: 'Robin Newpond', email })
   await expectNoAxeViolations(page)
   await page.getByRole('button', { name: 'Make my account' }).filter({ visible: true }).click()
-  const mail = await waitForMail(mailOrigin, { to: email, subject: 'Confirm your e-mail address' })
-  await page.goto(linkIn(mail, /verify-email/))
-  await page.waitForLoadState('networkidle')
+  await confirmAddress(page, mailOrigin, email)
 }
 
 async function fillReservation(page: Page): Promise<void> {
@@ -130,24 +123,76 @@ describe.each([390, 1280])('a beginner at %i px', (width) => {
 })
 
 describe('with the keyboard alone', () => {
-  it('a visitor says where they are, opens a listing and reaches the hold', async () => {
+  const chooseFirst = async (page: Page) => {
+    await page.keyboard.press('ArrowDown')
+    await page.keyboard.press('Enter')
+  }
+
+  async function joinByKeyboard(page: Page, email: string): Promise<void> {
+    await page.goto('/sign-up')
+    await typeInto(page, 'Your name', 'Robin Newpond')
+    await typeInto(page, 'E-mail address', email)
+    await typeInto(page, 'Password', NEW_PASSWORD)
+    await page.keyboard.press('Enter')
+    await confirmAddress(page, mailOrigin, email)
+  }
+
+  async function payByKeyboard(page: Page): Promise<void> {
+    await page.waitForURL((url) => url.origin === payOrigin)
+    await typeInto(page, 'Card number', '4242424242424242')
+    await typeInto(page, /Expir/, '1234')
+    await typeInto(page, /^CVC|Security/, '123')
+    await typeInto(page, /Name/, 'Robin Newpond')
+    await page.keyboard.press('Enter')
+    await page.waitForURL((url) => url.origin === origin && url.pathname.startsWith('/orders/'))
+  }
+
+  it('a visitor finds a listing, joins, holds fish and pays', async () => {
+    const email = `robin-keys-${Date.now()}@example.org`
     const page = await browser.openPage({ width: 1280, origin, theme: 'dark' })
     await page.goto('/')
-    await tabTo(page, 'Where are you?')
-    await page.keyboard.type('45202')
+    await typeInto(page, 'Where are you?', '45202')
     await page
       .getByRole('option', { name: /Cincinnati/ })
       .first()
       .waitFor()
-    await page.keyboard.press('ArrowDown')
-    await page.keyboard.press('Enter')
+    await chooseFirst(page)
     const tags = page.getByRole('list', { name: 'Listings' }).getByRole('link')
     await tags.first().waitFor()
     await expectNoAxeViolations(page)
-    const name =
-      (await tags.first().getAttribute('aria-label')) ?? (await tags.first().innerText()).split('\n')[0] ?? ''
-    await tabTo(page, new RegExp(name.slice(0, 12).replace(/[.*+?^${}()|[\]\\]/g, '\\$&')))
-    await page.keyboard.press('Enter')
+    const address = await openBuyable(page)
+    await expectNoAxeViolations(page)
+    await joinByKeyboard(page, email)
+    await page.goto(address)
+    await page.getByRole('link', { name: /^Hold / }).waitFor()
+    await pressOn(page, /^Hold /)
+    await page.getByRole('heading', { name: 'What you pay' }).waitFor()
+    const window = page.getByRole('radiogroup', { name: 'Pickup time' }).getByRole('radio')
+    if (await window.count()) await pressOn(page, /(AM|PM) to /, 'Space')
+    for (const box of await page.getByRole('checkbox').all()) await pressOn(page, await nameOf(box), 'Space')
+    await expectNoAxeViolations(page)
+    await pressOn(page, /^Hold \d/)
+    await payByKeyboard(page)
+    await page
+      .getByText(/Day agreed|Waiting for the seller/)
+      .first()
+      .waitFor()
+    await expectNoAxeViolations(page)
+  })
+
+  it('opens a listing from the results', async () => {
+    const page = await browser.openPage({ width: 390, origin, theme: 'dark' })
+    await page.goto('/')
+    await typeInto(page, 'Where are you?', '45202')
+    await page
+      .getByRole('option', { name: /Cincinnati/ })
+      .first()
+      .waitFor()
+    await chooseFirst(page)
+    const tag = page.getByRole('list', { name: 'Listings' }).getByRole('link').first()
+    await tag.waitFor()
+    const title = await tag.getByRole('heading').innerText()
+    await pressOn(page, new RegExp(title.replace(/[.*+?^${}()|[\]\\]/g, '\\$&')))
     await page.waitForURL(/\/listings\//)
     await page.getByRole('heading', { level: 1 }).waitFor()
     await expectNoAxeViolations(page)

@@ -68,7 +68,10 @@ async function setUpPayouts(page: Page): Promise<void> {
 const parts: readonly ((page: Page) => Promise<void>)[] = [
   async function speciesAndSize(page) {
     await field(page, 'Species').fill('blueg')
-    await page.getByRole('option', { name: /^Bluegill/ }).first().click()
+    await page
+      .getByRole('option', { name: /^Bluegill/ })
+      .first()
+      .click()
     await field(page, 'Shortest').fill('2 1/4 in')
     await field(page, 'Longest').fill('3')
     await field(page, 'Stage').selectOption({ label: 'Fingerling' })
@@ -128,7 +131,11 @@ async function fillBatch(page: Page, shot: string): Promise<void> {
 }
 
 async function publish(page: Page, shot: string): Promise<string> {
-  await page.getByText(/^Saved/).filter({ visible: true }).first().waitFor()
+  await page
+    .getByText(/^Saved/)
+    .filter({ visible: true })
+    .first()
+    .waitFor()
   await expectNoAxeViolations(page)
   await keepShot(page, `${shot}-check`)
   await button(page, 'Publish this batch').click()
@@ -142,10 +149,16 @@ async function approve(farmName: string, isDark: boolean): Promise<void> {
   const desk = await browser.openPage({ width: 1280, origin, theme: isDark ? 'dark' : 'light' })
   await signInDemo(desk, { dataDir, role: 'admin' })
   await desk.goto('/moderate')
-  await desk.getByRole('row', { name: new RegExp(farmName) }).getByRole('link').click()
+  await desk
+    .getByRole('row', { name: new RegExp(farmName) })
+    .getByRole('link')
+    .click()
   await desk.getByRole('button', { name: /^Approve/ }).click()
   await desk.getByRole('button', { name: 'Approve it' }).click()
-  await desk.getByText(/^Approved/).first().waitFor()
+  await desk
+    .getByText(/^Approved/)
+    .first()
+    .waitFor()
   await desk.context().close()
 }
 
@@ -177,7 +190,10 @@ describe.each([390, 1280])('a small hatchery at %i px', (width) => {
     await waitForMail(mailOrigin, { to: email, subject: /live|on sale/i })
     await expectOnSale(listingId, farmName)
     await page.goto('/sell')
-    await page.getByRole('link', { name: /^Bluegill fingerlings/ }).first().waitFor()
+    await page
+      .getByRole('link', { name: /^Bluegill fingerlings/ })
+      .first()
+      .waitFor()
     await expectNoAxeViolations(page)
     await keepShot(page, `sell-${width}`)
   })
@@ -206,7 +222,10 @@ describe('with the keyboard alone', () => {
 
   async function fillByKeyboard(page: Page): Promise<void> {
     await typeInto(page, 'Species', 'blueg')
-    await page.getByRole('option', { name: /^Bluegill/ }).first().waitFor()
+    await page
+      .getByRole('option', { name: /^Bluegill/ })
+      .first()
+      .waitFor()
     await page.keyboard.press('ArrowDown')
     await page.keyboard.press('Enter')
     await typeInto(page, 'Shortest', '2 1/4 in')

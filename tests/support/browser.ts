@@ -3,7 +3,7 @@ import { mkdir } from 'node:fs/promises'
 import path from 'node:path'
 
 import { AxeBuilder } from '@axe-core/playwright'
-import { chromium, type Browser, type Page } from 'playwright-core'
+import { chromium, type Browser, type Locator, type Page } from 'playwright-core'
 import { expect } from 'vitest'
 
 import { findChromium } from '@/scripts/find-program.mjs'
@@ -78,12 +78,16 @@ export async function expectNoAxeViolations(page: Page): Promise<void> {
   expect(findings, `accessibility of ${page.url()}`).toEqual([])
 }
 
+/** The accessible name of a control; empty when it has none. */
+export async function nameOf(control: Locator): Promise<string> {
+  const snapshot = await control.ariaSnapshot()
+  return /^- \S+ "((?:[^"\\]|\\.)*)"/.exec(snapshot)?.[1]?.replaceAll('\\"', '"') ?? ''
+}
+
 /** The accessible name of what has the keyboard focus; empty when nothing has. */
 export async function focusedName(page: Page): Promise<string> {
   const focused = page.locator(':focus')
-  if ((await focused.count()) === 0) return ''
-  const snapshot = await focused.first().ariaSnapshot()
-  return /^- \S+ "((?:[^"\\]|\\.)*)"/.exec(snapshot)?.[1]?.replaceAll('\\"', '"') ?? ''
+  return (await focused.count()) === 0 ? '' : nameOf(focused.first())
 }
 
 /** Presses Tab until the control of that accessible name has the focus; fails when the keyboard cannot get there. */

@@ -30,7 +30,10 @@ async function freshCode(secret: string): Promise<string> {
 }
 
 /** Signs a demo person in on real pages, with the second factor where they have one. */
-export async function signInDemo(page: Page, { dataDir, role }: { dataDir: string; role: string }): Promise<void> {
+export async function signInDemo(
+  page: Page,
+  { dataDir, role }: { dataDir: string; role: string },
+): Promise<void> {
   const { email, password, totpSecret } = await personOf(dataDir, role)
   await page.goto('/sign-in')
   await page.getByLabel('E-mail address').fill(email)
