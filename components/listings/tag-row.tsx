@@ -61,7 +61,7 @@ const styles = StyleSheet.create({
   inside: { flexDirection: 'row', flexGrow: 1, minHeight: 132 },
   photo: { width: 80 },
   words: { flex: 1, minWidth: 0, padding: space.md, gap: 6 },
-  stub: { width: 104 },
+  stub: { width: 114 },
   stubInside: {
     flexGrow: 1,
     justifyContent: 'space-between',

@@ -1,14 +1,17 @@
 import { StyleSheet, View } from 'react-native'
 
+import { groupOrders } from '@/components/orders/group-orders'
 import { OrderRowCard } from '@/components/orders/order-row-card'
 import { Button } from '@/components/ui/button'
 import { ButtonLink } from '@/components/ui/button-link'
 import { EmptyState } from '@/components/ui/empty-state'
 import { ErrorState } from '@/components/ui/error-state'
+import { Heading } from '@/components/ui/heading'
 import { SkeletonRows } from '@/components/ui/skeleton'
-import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
+import { useBreakpoint } from '@/hooks/use-breakpoint'
 import { useOrders } from '@/hooks/use-orders'
+import type { OrderRow } from '@/shared/contracts/orders'
 
 /** The member's orders on one side of the counter: those that wait for them first, then the newest. */
 export function OrderList({ as }: { as: 'buyer' | 'seller' }) {
@@ -40,18 +43,12 @@ export function OrderList({ as }: { as: 'buyer' | 'seller' }) {
       />
     )
   }
-  const waiting = orders.filter((order) => order.may.length > 0)
-  const others = orders.filter((order) => order.may.length === 0)
+  const { yours, coming, past } = groupOrders(orders)
   return (
     <View style={styles.list}>
-      {waiting.length > 0 ? <Text face="strong">Waiting for you</Text> : null}
-      {waiting.map((order) => (
-        <OrderRowCard key={order.orderId} order={order} />
-      ))}
-      {others.length > 0 && waiting.length > 0 ? <Text face="strong">Others</Text> : null}
-      {others.map((order) => (
-        <OrderRowCard key={order.orderId} order={order} />
-      ))}
+      <OrderGroup title="Your move" orders={yours} />
+      <OrderGroup title="Coming up" orders={coming} />
+      <OrderGroup title="Past" orders={past} />
       {query.hasNextPage ? (
         <Button
           label="Show older orders"
@@ -64,4 +61,29 @@ export function OrderList({ as }: { as: 'buyer' | 'seller' }) {
   )
 }
 
-const styles = StyleSheet.create({ list: { gap: space.md } })
+function OrderGroup({ title, orders }: { title: string; orders: readonly OrderRow[] }) {
+  const isWide = useBreakpoint() === 'wide'
+  if (orders.length === 0) return null
+  return (
+    <View style={styles.group}>
+      <Heading level={2} size="lead">
+        {title}
+      </Heading>
+      <View role="list" aria-label={title} style={isWide ? styles.grid : styles.group}>
+        {orders.map((order) => (
+          <View key={order.orderId} role="listitem" style={isWide ? styles.half : null}>
+            <OrderRowCard order={order} />
+          </View>
+        ))}
+      </View>
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  list: { gap: space.xl },
+  group: { gap: space.md },
+  grid: { flexDirection: 'row', flexWrap: 'wrap', gap: space.md },
+  // Two beside each other, however long their words.
+  half: { flexBasis: '45%', flexGrow: 1, minWidth: 0 },
+})

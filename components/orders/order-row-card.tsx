@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
+import { isYourMove } from '@/components/orders/group-orders'
 import { stateWord } from '@/components/orders/state-words'
 import { Badge } from '@/components/ui/badge'
 import { Photo } from '@/components/ui/photo'
@@ -8,6 +9,7 @@ import { Text } from '@/components/ui/text'
 import { color, radius, space } from '@/constants/theme'
 import { photoUrl } from '@/hooks/api'
 import type { OrderRow } from '@/shared/contracts/orders'
+import { whoseMove } from '@/shared/domain/orders/whose-move'
 import { printSlot } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
 
@@ -16,6 +18,8 @@ const look = ({ pressed }: { pressed: boolean }) => [styles.card, pressed ? styl
 /** One order in the list: what, with whom, when, and what it waits for. */
 export function OrderRowCard({ order }: { order: OrderRow }) {
   const { word, tone } = stateWord(order.state)
+  const isYours = isYourMove(order)
+  const isOver = order.state === 'settled' || order.state === 'cancelled'
   return (
     <PressLink href={`/orders/${order.orderId}`} look={look}>
       {order.photo ? (
@@ -33,9 +37,9 @@ export function OrderRowCard({ order }: { order: OrderRow }) {
         <Text size="note" tint="muted">{`${order.otherParty.name} · ${printCents(order.totalCents)}`}</Text>
         {order.slot ? <Text size="note">{printSlot(order.slot)}</Text> : null}
         <View style={styles.badges}>
-          <Badge word={word} tone={tone} />
-          {order.may.length > 0 ? <Badge word="Your move" tone="today" /> : null}
+          <Badge word={isYours ? 'Your move' : word} tone={isYours ? 'today' : tone} />
         </View>
+        {isOver ? null : <Text size="note">{whoseMove(order).words}</Text>}
       </View>
     </PressLink>
   )

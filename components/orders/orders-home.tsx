@@ -1,3 +1,4 @@
+import type { Href } from 'expo-router'
 import { StyleSheet, View } from 'react-native'
 
 import { OrderList } from '@/components/orders/order-list'
@@ -5,7 +6,7 @@ import { ButtonLink } from '@/components/ui/button-link'
 import { EmptyState } from '@/components/ui/empty-state'
 import { Link } from '@/components/ui/link'
 import { SkeletonRows } from '@/components/ui/skeleton'
-import { space } from '@/constants/theme'
+import { color, radius, space, touchPx } from '@/constants/theme'
 import { useMe } from '@/hooks/use-me'
 
 /** Orders, seen from the side of the counter one stands on. */
@@ -25,12 +26,8 @@ export function OrdersHome({ as }: { as: 'buyer' | 'seller' }) {
     <View style={styles.home}>
       {me.roles.includes('seller') ? (
         <View role="navigation" aria-label="Side of the counter" style={styles.sides}>
-          <Link href="/orders" isCurrent={as === 'buyer'}>
-            I buy
-          </Link>
-          <Link href="/orders?as=seller" isCurrent={as === 'seller'}>
-            I sell
-          </Link>
+          <Side href="/orders" words="I buy" isHere={as === 'buyer'} />
+          <Side href="/orders?as=seller" words="I sell" isHere={as === 'seller'} />
         </View>
       ) : null}
       <OrderList as={as} />
@@ -38,7 +35,26 @@ export function OrdersHome({ as }: { as: 'buyer' | 'seller' }) {
   )
 }
 
+function Side({ href, words, isHere }: { href: Href; words: string; isHere: boolean }) {
+  return (
+    <Link href={href} isCurrent={isHere} style={[styles.side, isHere ? styles.here : null]}>
+      {words}
+    </Link>
+  )
+}
+
 const styles = StyleSheet.create({
   home: { gap: space.lg },
-  sides: { flexDirection: 'row', gap: space.xl },
+  sides: { flexDirection: 'row', gap: space.sm },
+  side: {
+    minWidth: 96,
+    paddingHorizontal: space.lg,
+    lineHeight: touchPx,
+    textAlign: 'center',
+    textDecorationLine: 'none',
+    borderRadius: radius.full,
+    borderWidth: 1,
+    borderColor: color.edge,
+  },
+  here: { backgroundColor: color.algae, color: color.onAlgae, borderColor: color.onAlgae },
 })

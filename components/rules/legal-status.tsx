@@ -1,7 +1,7 @@
 import { StyleSheet, View } from 'react-native'
 
 import { legalWords } from './legal-words'
-import { RuleReason } from './rule-reason'
+import { RuleReasons } from './rule-reasons'
 import { statusWords } from './rule-words'
 
 import { Banner } from '@/components/ui/banner'
@@ -9,7 +9,7 @@ import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import { Icon } from '@/components/ui/icon'
 import { Text } from '@/components/ui/text'
-import { color, space } from '@/constants/theme'
+import { space } from '@/constants/theme'
 import type { GateVerdict } from '@/shared/contracts/rules'
 import { findState } from '@/shared/domain/rules/find-state'
 
@@ -47,11 +47,7 @@ export function LegalStatus({ gate }: Props) {
         </Banner>
       ) : null}
       {reasons.length > 0 ? (
-        <View role="list" style={styles.reasons}>
-          {reasons.map((reason) => (
-            <RuleReason key={`${reason.ruleKey}-${reason.jurisdiction}-${reason.activity}`} reason={reason} />
-          ))}
-        </View>
+        <RuleReasons reasons={reasons} />
       ) : (
         <Text tint="muted">
           {ownRule ?? 'We hold no reading of any rule about this species for these places.'}
@@ -76,5 +72,4 @@ export function LegalStatus({ gate }: Props) {
 const styles = StyleSheet.create({
   verdict: { flexDirection: 'row', alignItems: 'center', gap: space.sm },
   words: { flex: 1, minWidth: 0 },
-  reasons: { borderTopWidth: 1, borderTopColor: color.line },
 })

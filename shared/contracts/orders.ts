@@ -135,6 +135,8 @@ export const orderRow = shownOrder
     slot: true,
     otherParty: true,
     clock: true,
+    handOver: true,
+    balanceDue: true,
     balancePaid: true,
     may: true,
   })
