@@ -11,6 +11,7 @@ export const queryClient = new QueryClient({
       retry: (tries, error) => !(error instanceof Problem && error.status < 500) && tries < 3,
       refetchOnWindowFocus: true,
     },
-    mutations: { retry: false },
+    // Without a connection an act fails with a sentence at once, instead of waiting unseen for the network.
+    mutations: { retry: false, networkMode: 'always' },
   },
 })

@@ -1,17 +1,13 @@
 export type ThemeChoice = 'system' | 'light' | 'dark'
 
-const key = 'theme'
+const yearS = 31_536_000
 const listeners = new Set<() => void>()
 let current = readChoice()
 showChoice(current)
 
 function readChoice(): ThemeChoice {
-  try {
-    const stored = localStorage.getItem(key)
-    return stored === 'light' || stored === 'dark' ? stored : 'system'
-  } catch {
-    return 'system' // storage refused (private window): the system's choice is right
-  }
+  const stored = /(?:^|;\s*)theme=(light|dark)(?:;|$)/.exec(document.cookie)?.[1]
+  return stored === 'light' || stored === 'dark' ? stored : 'system'
 }
 
 function showChoice(choice: ThemeChoice) {
@@ -27,12 +23,9 @@ export function themeChoice(): ThemeChoice {
 export function chooseTheme(choice: ThemeChoice) {
   current = choice
   showChoice(choice)
-  try {
-    if (choice === 'system') localStorage.removeItem(key)
-    else localStorage.setItem(key, choice)
-  } catch {
-    // Not kept: it holds until this page is closed.
-  }
+  // A cookie, so that the server's first paint is in it already.
+  const ageS = choice === 'system' ? 0 : yearS
+  document.cookie = `theme=${choice}; path=/; max-age=${ageS}; samesite=lax`
   listeners.forEach((tell) => tell())
 }
 

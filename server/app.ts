@@ -38,6 +38,11 @@ function api(origins: string[]): Router {
   return router
 }
 
+/** Scripts and styles are compressed when they are built, photos already are. */
+const isPackedHere: compression.CompressionFilter = (req, res) =>
+  (req.path.startsWith('/api/') || String(res.getHeader('content-type')).startsWith('text/html')) &&
+  compression.filter(req, res)
+
 /** Mounts everything in the order a request meets it. */
 export function buildApp(settings: AppSettings): Express {
   const app = express()
@@ -54,7 +59,7 @@ export function buildApp(settings: AppSettings): Express {
   app.all('/api/auth/*splat', toNodeHandler(theAuth()))
   // The webhook is signed over its raw bytes: it stands before every body parser and outside the origin check.
   app.use('/api/v1', stripeEvents())
-  app.use(compression({ filter: (req, res) => req.path.startsWith('/api/') && compression.filter(req, res) }))
+  app.use(compression({ filter: isPackedHere }))
   app.use('/api/v1', api(settings.origins))
   app.use('/photos', photoFiles())
   app.use(shareRoutes({ webDir: settings.webDir, origin: settings.origins[0] ?? '' }))

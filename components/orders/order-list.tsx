@@ -85,5 +85,5 @@ const styles = StyleSheet.create({
   group: { gap: space.md },
   grid: { flexDirection: 'row', flexWrap: 'wrap', gap: space.md },
   // Two beside each other, however long their words.
-  half: { flexBasis: '45%', flexGrow: 1, minWidth: 0 },
+  half: { flexBasis: '49%', minWidth: 0 },
 })

@@ -3,6 +3,8 @@ import path from 'node:path'
 
 import { Router, static as serveStatic, type Request, type Response } from 'express'
 
+import { appShell } from '@/server/http/app-shell'
+
 const YEAR_S = 31_536_000
 const HASHED = /^\/(_expo\/static|assets)\//
 
@@ -32,8 +34,10 @@ export function webApp(webDir: string): Router {
   const root = path.resolve(webDir)
   const shell = (req: Request, res: Response, next: () => void): void => {
     if (!['GET', 'HEAD'].includes(req.method) || path.extname(req.path) !== '') return next()
-    req.url = '/index.html'
-    next()
+    if (!existsSync(path.join(root, 'index.html'))) return next()
+    res.setHeader('cache-control', 'no-cache')
+    res.vary('Cookie')
+    res.type('html').send(appShell(root, req))
   }
   const keep = (res: Response, file: string): void => {
     const forAYear = HASHED.test(file.slice(root.length).replaceAll(path.sep, '/')) || /\.woff2$/.test(file)

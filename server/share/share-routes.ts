@@ -1,8 +1,6 @@
-import { readFile } from 'node:fs/promises'
-import path from 'node:path'
-
 import { Router } from 'express'
 
+import { appShell } from '@/server/http/app-shell'
 import { readListing } from '@/server/listings/read-listing'
 import { escapeHtml } from '@/server/mail/escape-html'
 import { listingHead } from '@/server/share/listing-head'
@@ -29,9 +27,9 @@ export function shareRoutes({ webDir, origin }: ShareSettings): Router {
     if (!publicIdText.safeParse(listingId).success) return next()
     const listing = await readListing(null, listingId, undefined).catch(() => null)
     if (!listing) return next()
-    const shell = await readFile(path.join(webDir, 'index.html'), 'utf8')
     res.setHeader('cache-control', 'no-cache')
-    res.type('html').send(dressed(shell, listingHead(listing, origin)))
+    res.vary('Cookie')
+    res.type('html').send(dressed(appShell(webDir, req, listing.title), listingHead(listing, origin)))
   })
   router.get('/sitemap.xml', async (_req, res) => {
     const pages = ['/', '/about'].map((page) => `<url><loc>${escapeHtml(origin + page)}</loc></url>`)
