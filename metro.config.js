@@ -10,9 +10,22 @@ config.resolver.blockList = [new RegExp(`^${root}/(${ours.join('|')})/.*`)]
 
 // zod carries 60 language files that no screen uses; English is imported on its own.
 const zodV4 = `${path.sep}zod${path.sep}v4${path.sep}`
-config.resolver.resolveRequest = (context, name, platform) => {
-  if (name === '../locales/index.js' && context.originModulePath.includes(zodV4)) return { type: 'empty' }
-  return context.resolveRequest(context, name, platform)
-}
+const isLanguageOfZod = (context, name) =>
+  name === '../locales/index.js' && context.originModulePath.includes(zodV4)
+
+// What the first load would carry on the web although no screen draws it: controls that have better twins in
+// components/ui, the colour arithmetic of a header we hide, the router's own list of routes.
+const undrawn =
+  /^\.\/exports\/(CheckBox|Clipboard|ImageBackground|InputAccessoryView|KeyboardAvoidingView|Picker|ProgressBar|SectionList|Share|TouchableHighlight|TouchableNativeFeedback|TouchableOpacity|Vibration|YellowBox)$/
+const webRoot = path.join('react-native-web', 'dist', 'index.js')
+const routerViews = path.join('expo-router', 'build')
+const isUndrawn = (context, name) =>
+  (undrawn.test(name) && context.originModulePath.endsWith(webRoot)) ||
+  (/^(color|\.{1,2}\/(views\/)?Sitemap)$/.test(name) && context.originModulePath.includes(routerViews))
+
+config.resolver.resolveRequest = (context, name, platform) =>
+  isLanguageOfZod(context, name) || (platform === 'web' && isUndrawn(context, name))
+    ? { type: 'empty' }
+    : context.resolveRequest(context, name, platform)
 
 module.exports = config
