@@ -2,7 +2,7 @@ import type { Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest'
 
 import { expectNoAxeViolations, keepShot, openBrowser, type TestBrowser } from '@/tests/support/browser'
-import { signInDemo } from '@/tests/support/demo-staff'
+import { signInDemo } from '@/tests/support/demo-people'
 
 const { origin, mailOrigin, dataDir } = inject('wholeProduct')
 let browser: TestBrowser

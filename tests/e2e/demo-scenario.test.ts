@@ -61,7 +61,7 @@ it('shows other law on each side of the river', async () => {
 it('is refused in production', async () => {
   const environment = {
     ...plainEnvironment(),
-    ...{ NODE_ENV: 'production', DEMO: 'on', DATABASE_URL: databaseUrl },
+    ...{ NODE_ENV: 'production' as const, DEMO: 'on', DATABASE_URL: databaseUrl },
   }
   const ended = run('node', ['--import', 'tsx', 'seed/run.ts'], { env: environment })
   await expect(ended).rejects.toMatchObject({ stderr: expect.stringContaining('refused in production') })

@@ -9,7 +9,7 @@ import {
   type TestBrowser,
 } from '@/tests/support/browser'
 import { pressOn, typeDay, typeInto } from '@/tests/support/by-keyboard'
-import { signInDemo } from '@/tests/support/demo-staff'
+import { signInDemo } from '@/tests/support/demo-people'
 import { waitForMail } from '@/tests/support/mailbox'
 import { confirmAddress, field, fillSignUp } from '@/tests/support/new-member'
 import { plainPhoto } from '@/tests/support/pictures'

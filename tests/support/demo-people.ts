@@ -29,12 +29,8 @@ async function freshCode(secret: string): Promise<string> {
   return timeCode(bytesOfBase32(secret), Date.now() / 1000)
 }
 
-/** Signs a demo person in on real pages, with the second factor where they have one. */
-export async function signInDemo(
-  page: Page,
-  { dataDir, role }: { dataDir: string; role: string },
-): Promise<void> {
-  const { email, password, totpSecret } = await personOf(dataDir, role)
+/** Signs somebody in on real pages, with the second factor where they have one. */
+async function signIn(page: Page, { email, password, totpSecret }: Omit<DemoPerson, 'role'>): Promise<void> {
   await page.goto('/sign-in')
   await page.getByLabel('E-mail address').fill(email)
   await page.getByLabel('Password', { exact: true }).fill(password)
@@ -45,4 +41,15 @@ export async function signInDemo(
     await page.keyboard.press('Enter')
   }
   await page.waitForURL((url) => !/sign-in|second-factor/.test(url.pathname))
+}
+
+/** One of the demo people that `npm start` prints. */
+export async function signInDemo(page: Page, wish: { dataDir: string; role: string }): Promise<void> {
+  await signIn(page, await personOf(wish.dataDir, wish.role))
+}
+
+/** One of the demo's other growers and farms: they share the password. */
+export async function signInNeighbour(page: Page, wish: { dataDir: string; email: string }): Promise<void> {
+  const { password } = await personOf(wish.dataDir, 'beginner')
+  await signIn(page, { email: wish.email, password })
 }
