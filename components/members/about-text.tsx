@@ -3,6 +3,7 @@ import { StyleSheet, View } from 'react-native'
 
 import { ButtonLink } from '@/components/ui/button-link'
 import { Heading } from '@/components/ui/heading'
+import { Link } from '@/components/ui/link'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import { cautionTexts } from '@/shared/domain/rules/caution-texts.facts'
@@ -48,6 +49,12 @@ export function AboutText() {
           pay.
         </Text>
         <Text>{cautionTexts['G-1']}</Text>
+      </Part>
+      <Part title="Where our figures come from">
+        <Text>
+          Every limit that can decide whether animals live names its publication.{' '}
+          <Link href="/about/sources">All sources</Link> · <Link href="/tools">Calculators</Link>
+        </Text>
       </Part>
       <ButtonLink icon="find" href="/" label="Find growers near you" />
     </View>

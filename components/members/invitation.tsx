@@ -29,6 +29,7 @@ export function Invitation() {
       <Card>
         <ThemeSetting />
       </Card>
+      <Link href="/tools">Calculators for water, fish and the way home</Link>
       <Link href="/about">What Tankward is, and how your money is held</Link>
     </View>
   )

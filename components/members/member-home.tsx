@@ -49,6 +49,7 @@ export function MemberHome() {
       </Card>
       <SecurityCard secondFactor={me.secondFactor} />
       <SignOut />
+      <Link href="/tools">Calculators for water, fish and the way home</Link>
       <Link href="/about">What Tankward is, and how your money is held</Link>
     </View>
   )

@@ -32,7 +32,9 @@ export function shareRoutes({ webDir, origin }: ShareSettings): Router {
     res.type('html').send(dressed(appShell(webDir, req, listing.title), listingHead(listing, origin)))
   })
   router.get('/sitemap.xml', async (_req, res) => {
-    const pages = ['/', '/about'].map((page) => `<url><loc>${escapeHtml(origin + page)}</loc></url>`)
+    const pages = ['/', '/about', '/about/sources', '/tools'].map(
+      (page) => `<url><loc>${escapeHtml(origin + page)}</loc></url>`,
+    )
     const listings = (await listPublicListings()).map(
       ({ publicId, updatedAt }) =>
         `<url><loc>${escapeHtml(`${origin}/listings/${publicId}`)}</loc><lastmod>${updatedAt.toISOString().slice(0, 10)}</lastmod></url>`,
