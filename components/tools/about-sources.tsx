@@ -2,6 +2,7 @@ import { StyleSheet, View } from 'react-native'
 
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
+import { Link } from '@/components/ui/link'
 import { Text } from '@/components/ui/text'
 import { color, space } from '@/constants/theme'
 import { openDataSources, printSource, sources, type SourceKey } from '@/shared/sources'
@@ -59,6 +60,7 @@ export function AboutSources() {
           Hyperlegible Next, under the SIL Open Font License.
         </Text>
       </Card>
+      <Link href="/tools">The calculators that use them</Link>
     </>
   )
 }
