@@ -19,6 +19,7 @@ import { placeRoutes } from '@/server/places/place-routes'
 import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
 import { shareRoutes } from '@/server/share/share-routes'
+import { tripRoutes } from '@/server/trips/trip-routes'
 import { stripeEvents } from '@/server/stripe-events/stripe-events'
 
 export interface AppSettings {
@@ -33,7 +34,7 @@ function api(origins: string[]): Router {
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
   router.use(placeRoutes(), memberRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
-  router.use(listingRoutes(), orderRoutes(), moderationRoutes())
+  router.use(listingRoutes(), tripRoutes(), orderRoutes(), moderationRoutes())
   router.use(unknownPath)
   return router
 }

@@ -42,6 +42,7 @@ export interface Endpoints {
   readOwnFarm: typeof import('@/shared/contracts/sellers').readOwnFarm
   readSeller: typeof import('@/shared/contracts/sellers').readSeller
   startPayouts: typeof import('@/shared/contracts/sellers').startPayouts
+  readWayHome: typeof import('@/shared/contracts/trips').readWayHome
 }
 
 export const routes: Record<keyof Endpoints, readonly [method: string, path: string, upload: boolean]> = {
@@ -87,4 +88,5 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   readOwnFarm: ['GET', '/sellers/mine', false],
   readSeller: ['GET', '/sellers/:sellerId', false],
   startPayouts: ['POST', '/sellers/mine/payout-onboarding', false],
+  readWayHome: ['GET', '/listings/:listingId/way-home', false],
 }
