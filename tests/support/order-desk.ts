@@ -21,6 +21,7 @@ import { now, setClockOffset } from '@/server/clock'
 import { ringClocks } from '@/server/jobs/ring-clocks'
 import { log } from '@/server/log'
 import type { Letter } from '@/server/mail/letter'
+import { configureUnsubscribe } from '@/server/mail/unsubscribe-token'
 import { configureOrders } from '@/server/orders/order-settings'
 import { registerDoers } from '@/server/outbox/doers'
 import { finishEffect } from '@/server/outbox/outbox-store'
@@ -87,6 +88,7 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
   setClockOffset(0)
   openAuth({ secret: 'test-secret-'.repeat(4), origin: ORIGIN, alsoTrusted: [] })
   configureOrders({ origin: ORIGIN, feeBp: 600 })
+  configureUnsubscribe({ origin: ORIGIN, secret: 'test-secret-'.repeat(4) })
   const letters: Letter[] = []
   registerDoers()
   registerDoer('mail', async (effect) => {
