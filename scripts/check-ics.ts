@@ -2,6 +2,7 @@
 import { parseArgs } from 'node:util'
 
 import * as fc from 'fast-check'
+import ICAL from 'ical.js'
 
 import { goodEvent } from './calendar/good-file'
 import { madeEvents, madeLives } from './calendar/made-events'
@@ -35,7 +36,7 @@ const plain = (text: string) =>
     .replace(/\r\n?|[\u0085\u2028\u2029]/gu, '\n')
     .replace(/[\u0000-\u0008\u000b-\u001f\u007f]/gu, '')
 
-/** What stands in the file against what was to be written. */
+/** What stands in the file against what was to be written, by our own reader. */
 function lost(event: CalendarEvent, bytes: Uint8Array): string[] {
   const { lines } = readLines(bytes)
   const valueOf = (name: string) => lines.find((line) => line.name === name)?.value ?? ''
@@ -46,6 +47,21 @@ function lost(event: CalendarEvent, bytes: Uint8Array): string[] {
     ...(realTime(valueOf('DTSTART'))?.ms === event.startsAt.getTime() ? [] : ['DTSTART']),
     ...(realTime(valueOf('DTEND'))?.ms === event.endsAt.getTime() ? [] : ['DTEND']),
   ].map((name) => `${name} was lost`)
+}
+
+/** The same by a reader that others wrote: it is lenient, so it tells only whether what it reads is what we meant. */
+function readOtherwise(event: CalendarEvent, bytes: Uint8Array): string[] {
+  const parsed: unknown = ICAL.parse(new TextDecoder().decode(bytes))
+  const inside = new ICAL.Component(parsed as unknown[]).getFirstSubcomponent('vevent')
+  if (!inside) return ['ical.js finds no event']
+  const read = new ICAL.Event(inside)
+  return [
+    ...(read.summary === plain(event.summary) ? [] : ['summary']),
+    ...(read.description === plain(event.description) ? [] : ['description']),
+    ...(read.sequence === event.sequence ? [] : ['sequence']),
+    ...(read.startDate.toJSDate().getTime() === event.startsAt.getTime() ? [] : ['start']),
+    ...(read.endDate.toJSDate().getTime() === event.endsAt.getTime() ? [] : ['end']),
+  ].map((name) => `ical.js reads another ${name}`)
 }
 
 /** The files of one order's life, each with the SEQUENCE that its events give. */
@@ -78,7 +94,7 @@ function countGood<T>(made: T[], faultsOf: (one: T) => string[]): number {
 async function run(): Promise<void> {
   const goodFiles = countGood(fc.sample(madeEvents, { numRuns: cases, seed: SEED }), (event) => {
     const bytes = fileOf(event)
-    return [...calendarFaults(bytes), ...lost(event, bytes)]
+    return [...calendarFaults(bytes), ...lost(event, bytes), ...readOtherwise(event, bytes)]
   })
   const lives = fc
     .sample(madeLives, { numRuns: cases, seed: SEED })

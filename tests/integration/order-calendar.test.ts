@@ -17,13 +17,8 @@ afterAll(() => desk.close())
 type Agent = Awaited<ReturnType<PickupDesk['signedIn']>>
 
 async function file(by: Agent, path: string): Promise<Buffer> {
-  const reply = await by.get(`${path}/calendar.ics`).buffer(true).parse(bytes).expect(200)
-  return reply.body as Buffer
-}
-const bytes = (res: NodeJS.ReadableStream, done: (error: Error | null, body: Buffer) => void) => {
-  const parts: Buffer[] = []
-  res.on('data', (part: Buffer) => parts.push(part))
-  res.on('end', () => done(null, Buffer.concat(parts)))
+  const reply = await by.get(`${path}/calendar.ics`).expect(200)
+  return Buffer.from(reply.text)
 }
 const valueOf = (ics: Buffer | string, name: string) =>
   new RegExp(`^${name}:(.*)\r$`, 'm').exec(ics.toString().replaceAll('\r\n ', ''))?.[1]
