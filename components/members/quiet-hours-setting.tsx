@@ -8,6 +8,7 @@ import { useToast } from '@/components/ui/toast'
 import { space } from '@/constants/theme'
 import { useChangeMe } from '@/hooks/use-me'
 import type { Me } from '@/shared/contracts/members'
+import { zoneWords } from '@/shared/times/zone-words'
 
 type Quiet = Me['mail']['quiet']
 
@@ -40,7 +41,7 @@ export function QuietHoursSetting({ quiet }: { quiet: Quiet }) {
     <View style={styles.frame}>
       <Switch
         label="Quiet hours"
-        hint={`Reminders wait until they end (${quiet?.zone ?? zone}). A pickup that is near still reminds you on time.`}
+        hint={`Reminders wait until they end (${zoneWords(quiet?.zone ?? zone)}). A pickup that is near still reminds you on time.`}
         isOn={quiet !== undefined}
         isDisabled={change.isPending}
         onChange={(isOn) => keep(isOn ? { ...(fault ? FIRST : typed), zone } : null)}
