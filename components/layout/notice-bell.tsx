@@ -1,13 +1,13 @@
 import { usePathname } from 'expo-router'
 import { StyleSheet, View } from 'react-native'
 
-import { unreadBadge } from '@/components/notices/notice-look'
+import { unreadBadge } from '@/components/notices/unread-badge'
 import { Icon } from '@/components/ui/icon'
 import { PressLink } from '@/components/ui/press-link'
 import { Text } from '@/components/ui/text'
 import { color, radius, space, touchPx } from '@/constants/theme'
 import { useMe } from '@/hooks/use-me'
-import { useUnread } from '@/hooks/use-notices'
+import { useUnread } from '@/hooks/use-unread'
 
 /** The way to the notices, with how many wait; with its word where there is room. Visitors have none. */
 export function NoticeBell({ hasWord = false }: { hasWord?: boolean }) {

@@ -10,8 +10,9 @@ import { ErrorState } from '@/components/ui/error-state'
 import { SkeletonRows } from '@/components/ui/skeleton'
 import { useToast } from '@/components/ui/toast'
 import { space } from '@/constants/theme'
-import { useNotices, useReadAllNotices, useUnread } from '@/hooks/use-notices'
+import { useNotices, useReadAllNotices } from '@/hooks/use-notices'
 import { useOnline } from '@/hooks/use-online'
+import { useUnread } from '@/hooks/use-unread'
 
 export function NoticeList() {
   const query = useNotices()

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 
-import { noticeHref, unreadBadge } from '@/components/notices/notice-look'
+import { noticeHref } from '@/components/notices/notice-look'
+import { unreadBadge } from '@/components/notices/unread-badge'
 
 describe('a notice on the screen', () => {
   it('leads to its order, or to the page of its listing that helps', () => {
