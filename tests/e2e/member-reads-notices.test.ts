@@ -1,12 +1,14 @@
 import { readFile } from 'node:fs/promises'
 import path from 'node:path'
 
+import mysql from 'mysql2/promise'
 import type { Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest'
 
 import { expectNoAxeViolations, keepShot, openBrowser, type TestBrowser } from '@/tests/support/browser'
 
-const { origin, dataDir } = inject('wholeProduct')
+const { origin, dataDir, databaseUrl } = inject('wholeProduct')
+const UNREAD = 3
 let browser: TestBrowser
 let people: { role: string; email: string; password: string }[]
 
@@ -16,9 +18,21 @@ beforeAll(async () => {
 })
 afterAll(() => browser.close())
 
+/** How many of a demo person's notices are new hangs on the day of the demo: here it is always the latest three. */
+async function forgetReading(email: string): Promise<void> {
+  const connection = await mysql.createConnection({ uri: databaseUrl })
+  const mine = 'member_id = (SELECT id FROM user WHERE email = ?)'
+  await connection.query(`UPDATE notice SET read_at = created_at WHERE ${mine}`, [email])
+  await connection.query(`UPDATE notice SET read_at = NULL WHERE ${mine} ORDER BY id DESC LIMIT ${UNREAD}`, [
+    email,
+  ])
+  await connection.end()
+}
+
 async function signIn(page: Page, role: string): Promise<void> {
   const member = people.find((person) => person.role === role)
   if (!member) throw new Error(`the demo has no ${role}`)
+  await forgetReading(member.email)
   await page.goto('/sign-in?returnTo=/me')
   await page.getByLabel('E-mail').fill(member.email)
   await page.getByLabel('Password', { exact: true }).fill(member.password)
@@ -36,10 +50,8 @@ describe.each([
   it('finds the bell, follows a notice, reads all, and chooses what comes by mail', async () => {
     const page = await browser.openPage({ width, theme, origin })
     await signIn(page, role)
-    const bell = page.getByRole('link', { name: /^Notices, \d+\+? unread$/ })
+    const bell = page.getByRole('link', { name: `Notices, ${UNREAD} unread` })
     await bell.waitFor()
-    const before = Number(/\d+/.exec((await bell.getAttribute('aria-label')) ?? '')?.[0])
-    expect(before).toBeGreaterThan(0)
     await keepShot(page, `me-${width}`)
     await expectNoAxeViolations(page)
     await bell.click()
@@ -53,14 +65,10 @@ describe.each([
 
     await rows.filter({ hasText: 'New' }).first().getByRole('link').click()
     await page.waitForURL(/\/(orders|listings|sell\/listings)\/[\w-]{22}$/)
-    const left = before - 1
     await page.goto('/notices')
-    await page.getByRole('listitem').first().waitFor()
-    await expect.poll(() => rows.filter({ hasText: 'New' }).count()).toBe(left)
-    if (left > 0) {
-      await page.getByRole('button', { name: 'Mark all read' }).click()
-      await expect.poll(() => rows.filter({ hasText: 'New' }).count()).toBe(0)
-    }
+    await expect.poll(() => rows.filter({ hasText: 'New' }).count()).toBe(UNREAD - 1)
+    await page.getByRole('button', { name: 'Mark all read' }).click()
+    await expect.poll(() => rows.filter({ hasText: 'New' }).count()).toBe(0)
     await page.getByRole('button', { name: 'Mark all read' }).waitFor({ state: 'detached' })
 
     await page.goto('/me')
