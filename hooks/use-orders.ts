@@ -68,6 +68,7 @@ function useKeepOrder() {
     void client.invalidateQueries({ queryKey: ['orders', 'list'] })
     void client.invalidateQueries({ queryKey: ['listings'] })
     void client.invalidateQueries({ queryKey: ['me'] })
+    void client.invalidateQueries({ queryKey: ['notices'] })
   }
 }
 

@@ -23,4 +23,11 @@ export const CHECKS = [
     faultCommand: ['node', 'scripts/check-native.mjs', '--plant-fault'],
     ci: false,
   },
+  {
+    name: 'ics',
+    command: ['node', '--import', 'tsx', 'scripts/check-ics.ts'],
+    sliceCommand: ['node', '--import', 'tsx', 'scripts/check-ics.ts', '--cases', '500'],
+    faultCommand: ['node', '--import', 'tsx', 'scripts/check-ics.ts', '--cases', '500', '--plant-fault'],
+    ci: true,
+  },
 ]

@@ -10,8 +10,11 @@ import { securityHeaders } from '@/server/http/security-headers'
 import { webApp } from '@/server/http/web-app'
 import { healthRoutes } from '@/server/health/health-routes'
 import { listingRoutes } from '@/server/listings/listing-routes'
+import { unsubscribeRoutes } from '@/server/mail/unsubscribe-routes'
 import { memberRoutes } from '@/server/members/member-routes'
 import { moderationRoutes } from '@/server/moderation/moderation-routes'
+import { noticeRoutes } from '@/server/notices/notice-routes'
+import { calendarRoutes } from '@/server/orders/calendar-routes'
 import { orderRoutes } from '@/server/orders/order-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
@@ -34,7 +37,8 @@ function api(origins: string[]): Router {
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
   router.use(placeRoutes(), memberRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
-  router.use(listingRoutes(), tripRoutes(), orderRoutes(), moderationRoutes())
+  router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
+  router.use(moderationRoutes(), noticeRoutes())
   router.use(unknownPath)
   return router
 }
@@ -63,6 +67,7 @@ export function buildApp(settings: AppSettings): Express {
   app.use(compression({ filter: isPackedHere }))
   app.use('/api/v1', api(settings.origins))
   app.use('/photos', photoFiles())
+  app.use(unsubscribeRoutes())
   app.use(shareRoutes({ webDir: settings.webDir, origin: settings.origins[0] ?? '' }))
   app.use(webApp(settings.webDir))
   app.use(unknownPath)

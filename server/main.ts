@@ -9,6 +9,7 @@ import { jobsOf } from '@/server/jobs/jobs'
 import { startJobs } from '@/server/jobs/job-runner'
 import { log } from '@/server/log'
 import { configureMail } from '@/server/mail/send-mail'
+import { configureUnsubscribe } from '@/server/mail/unsubscribe-token'
 import { configureOrders } from '@/server/orders/order-settings'
 import { registerDoers } from '@/server/outbox/doers'
 import { configurePhotos } from '@/server/photos/photo-files'
@@ -45,6 +46,7 @@ function main(): void {
   const alsoTrusted = loopbackNames(settings.PUBLIC_ORIGIN)
   openAuth({ secret: settings.AUTH_SECRET, origin: settings.PUBLIC_ORIGIN, alsoTrusted })
   configureMail({ smtpUrl: settings.SMTP_URL, from: settings.MAIL_FROM })
+  configureUnsubscribe({ origin: settings.PUBLIC_ORIGIN, secret: settings.AUTH_SECRET })
   configurePayments(paymentSettings(settings))
   configurePhotos({ dir: settings.UPLOAD_DIR })
   configureOrders({ origin: settings.PUBLIC_ORIGIN, feeBp: settings.FEE_BP })

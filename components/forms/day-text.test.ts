@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest'
 
-import { addDays, nextSaturday, printDay, printTime, zoneWords } from './day-text'
+import { addDays, nextSaturday, printDay, printTime } from './day-text'
+
+import { zoneWords } from '@/shared/times/zone-words'
 
 describe('days and times of a pickup', () => {
   it('counts days over the end of a month and of a year', () => {

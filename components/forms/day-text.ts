@@ -31,15 +31,6 @@ export function printTime(time: string): string {
   return at.toLocaleTimeString('en-US', { hour: 'numeric', minute: '2-digit', timeZone: 'UTC' })
 }
 
-/** "Eastern Time". */
-export function zoneWords(zone: string): string {
-  const parts = new Intl.DateTimeFormat('en-US', {
-    timeZone: zone,
-    timeZoneName: 'longGeneric',
-  }).formatToParts()
-  return parts.find((part) => part.type === 'timeZoneName')?.value ?? zone
-}
-
 /** "12:04" on the clock of whoever looks. */
 export function printClock(instant: string): string {
   return new Date(instant).toLocaleTimeString('en-US', { hour: 'numeric', minute: '2-digit' })

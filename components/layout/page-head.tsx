@@ -4,6 +4,7 @@ import { StyleSheet, View } from 'react-native'
 import { useSafeAreaInsets } from 'react-native-safe-area-context'
 
 import { Brand } from './brand'
+import { NoticeBell } from './notice-bell'
 
 import { IconButton } from '@/components/ui/icon-button'
 import { Text } from '@/components/ui/text'
@@ -53,6 +54,7 @@ export function PageHead({ title, back, actions, isPhone }: Props) {
         ) : null}
       </View>
       {actions}
+      {!back && isPhone ? <NoticeBell /> : null}
     </View>
   )
 }

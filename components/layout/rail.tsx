@@ -2,6 +2,7 @@ import { usePathname } from 'expo-router'
 import { StyleSheet, View } from 'react-native'
 
 import { Brand } from './brand'
+import { NoticeBell } from './notice-bell'
 import { PlaceLink } from './place-link'
 import { isInPlace, places } from './places'
 
@@ -24,6 +25,7 @@ export function Rail({ isNarrow }: Props) {
             <PlaceLink {...place} isStacked={isNarrow} isCurrent={isInPlace(pathname, place.href)} />
           </View>
         ))}
+        <NoticeBell hasWord={!isNarrow} />
       </View>
     </View>
   )

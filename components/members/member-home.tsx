@@ -1,6 +1,7 @@
 import { StyleSheet, View } from 'react-native'
 
 import { Invitation } from './invitation'
+import { MailSetting } from './mail-setting'
 import { PlaceSetting } from './place-setting'
 import { RoleLinks } from './role-links'
 import { SecurityCard } from './security-card'
@@ -47,6 +48,7 @@ export function MemberHome() {
         <UnitsSetting units={me.units} />
         <ThemeSetting />
       </Card>
+      <MailSetting mail={me.mail} />
       <SecurityCard secondFactor={me.secondFactor} />
       <SignOut />
       <Link href="/tools">Calculators for water, fish and the way home</Link>

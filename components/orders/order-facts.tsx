@@ -5,6 +5,7 @@ import { Heading } from '@/components/ui/heading'
 import { Link } from '@/components/ui/link'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
+import { calendarUrl } from '@/hooks/api'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { printSlot } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
@@ -51,6 +52,11 @@ export function OrderFacts({ order }: { order: ShownOrder }) {
         {meeting && party === 'buyer' ? (
           <Link href={mapLink(meeting) as `geo:${string}`} isExternal>
             Open in maps
+          </Link>
+        ) : null}
+        {slot && meeting ? (
+          <Link href={calendarUrl(order.orderId) as `https:${string}`} isExternal>
+            Add to calendar
           </Link>
         ) : null}
         <Link href={`/listings/${order.listingId}`}>See the listing</Link>

@@ -19,20 +19,22 @@ interface Props {
   label?: string
   isCurrent?: boolean
   nativeID?: string
+  /** Called as the link is followed. */
+  onFollow?: () => void
   /** Told when the pointer comes over the block and leaves it. */
   onHotChange?: (isHot: boolean) => void
 }
 
 /** A block that is one link: a tag, a row, a navigation place. */
-export function PressLink({ href, ...rest }: Props) {
+export function PressLink({ href, onFollow, ...rest }: Props) {
   return (
-    <RouterLink href={href} asChild>
+    <RouterLink href={href} onPress={onFollow} asChild>
       <Surface {...rest} />
     </RouterLink>
   )
 }
 
-interface SurfaceProps extends Omit<Props, 'href'> {
+interface SurfaceProps extends Omit<Props, 'href' | 'onFollow'> {
   onPress?: OnPress
   onClick?: OnPress
 }

@@ -85,6 +85,8 @@ export const order = mysqlTable(
     index('k_order_seller').on(t.sellerId, t.state, t.slotStartsAt),
     index('k_order_listing').on(t.listingId, t.state),
     index('k_order_clock').on(t.clockAt),
+    // Who is to be reminded: pickups of the next hours.
+    index('k_order_slot').on(t.state, t.slotStartsAt),
     check(
       'order_adds_up',
       sql`${t.totalCents} = ${t.goodsCents} + ${t.boxCents} + ${t.freightCents} + ${t.taxCents}`,

@@ -1,6 +1,7 @@
-import { and, asc, eq, inArray, isNull, lte, max, notInArray } from 'drizzle-orm'
+import { and, asc, eq, inArray, isNull, lt, lte, max, notInArray, sql } from 'drizzle-orm'
 
 import { db } from '@/db/client'
+import { notice } from '@/db/schema/notices'
 import { outbox } from '@/db/schema/outbox'
 import { payment, processorEvent } from '@/db/schema/payments'
 import { refreshPayment } from '@/server/money/refresh-payment'
@@ -80,4 +81,12 @@ export async function passOverOldMail(upTo: number): Promise<{ passedOver: numbe
     passedOver: done.affectedRows,
     kept: await db().$count(outbox, and(undone, eq(outbox.kind, 'mail'))),
   }
+}
+
+/** Nor weeks of unread notices: those from before that moment count as read when they were written. */
+export async function passOverOldNotices(before: Date): Promise<void> {
+  await db()
+    .update(notice)
+    .set({ readAt: sql`${notice.createdAt}` })
+    .where(lt(notice.createdAt, before))
 }

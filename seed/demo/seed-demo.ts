@@ -1,5 +1,5 @@
 import { inTransaction } from '@/db/transaction'
-import { lastEffect, passOverOldMail, settleEvents } from '@/seed/demo/effects'
+import { lastEffect, passOverOldMail, passOverOldNotices, settleEvents } from '@/seed/demo/effects'
 import { forgetDemoCalls, markDemo } from '@/seed/demo/demo-mark'
 import { openListingDesk, type ListingDesk } from '@/seed/demo/listing-desk'
 import { makePeople } from '@/seed/demo/make-people'
@@ -101,6 +101,7 @@ export async function seedDemo(options: DemoOptions): Promise<void> {
   await settleEvents()
   await projectAll(stage)
   await forgetDemoCalls()
+  await passOverOldNotices(after(at, -DAY_MS))
   const mails = await passOverOldMail(lastOldEffect)
   say(`mails: ${mails.kept} of the last day wait to be sent, ${mails.passedOver} older ones are marked done`)
   const admin = need(stage.people.get('admin'), 'admin')

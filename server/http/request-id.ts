@@ -5,6 +5,9 @@ import { pinoHttp } from 'pino-http'
 
 import { log } from '@/server/log'
 
+/** The token in the address of an unsubscribe link is a permission: no log keeps it. */
+const loggedPath = (url: string) => url.split('?')[0]?.replace(/^(\/unsubscribe\/).*/s, '$1…')
+
 /** Gives every request an id, and logs it as one line without query texts: places stand there. */
 export function requestLog(): RequestHandler[] {
   const name: RequestHandler = (_req, res, next) => {
@@ -20,7 +23,7 @@ export function requestLog(): RequestHandler[] {
       req: (req: { id: string; method: string; url: string }) => ({
         id: req.id,
         method: req.method,
-        path: req.url.split('?')[0],
+        path: loggedPath(req.url),
       }),
       res: (res: { statusCode: number }) => ({ status: res.statusCode }),
     },

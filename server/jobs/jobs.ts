@@ -4,6 +4,7 @@ import type { Job } from '@/server/jobs/job-runner'
 import { ringClocks } from '@/server/jobs/ring-clocks'
 import { expireListings } from '@/server/listings/expire-listings'
 import { refreshQuietPayments } from '@/server/money/refresh-payment'
+import { remindPickups } from '@/server/notices/remind-pickups'
 import { runEffects } from '@/server/outbox/run-effects'
 
 const SECOND = 1000
@@ -15,6 +16,7 @@ export function jobsOf(): Job[] {
   return [
     { name: 'effects', everyMs: 2 * SECOND, run: runEffects },
     { name: 'clocks', everyMs: 2 * SECOND, run: ringClocks },
+    { name: 'reminders', everyMs: 20 * SECOND, run: remindPickups },
     { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
     { name: 'quiet-payments', everyMs: 10 * SECOND, run: refreshQuietPayments },
     {

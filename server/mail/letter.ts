@@ -1,3 +1,5 @@
+import type { Leaving } from '@/server/mail/unsubscribe-token'
+
 /** One mail before it is sent: words only; the frame and the plain part are made from the same blocks. */
 export interface Letter {
   to: { name: string; email: string }
@@ -5,10 +7,10 @@ export interface Letter {
   /** First line of the mail and of its preview. */
   heading: string
   blocks: LetterBlock[]
-  /** Set on what a member may switch off; such mail carries one-click unsubscribe. */
-  optional?: string
+  /** Set on what a member may switch off: which list, and whose. Such mail carries one-click unsubscribe. */
+  optional?: Leaving
   /** Attached calendar file. */
-  calendar?: { fileName: string; method: 'PUBLISH' | 'REQUEST' | 'CANCEL'; text: string }
+  calendar?: { fileName: string; method: 'PUBLISH' | 'CANCEL'; text: string }
 }
 
 export type LetterBlock =

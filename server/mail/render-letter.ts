@@ -52,10 +52,17 @@ function blockText(block: LetterBlock): string {
   }
 }
 
-/** Both faces of a mail from the same blocks; the plain part is complete on its own. */
-export function renderLetter(letter: Letter): { html: string; text: string } {
+/**
+ * Both faces of a mail from the same blocks; the plain part is complete on its own. `leaveUrl` stands under what a
+ * member may switch off.
+ */
+export function renderLetter(letter: Letter, leaveUrl?: string): { html: string; text: string } {
+  const leaveHtml = leaveUrl
+    ? `<br><a href="${escapeHtml(leaveUrl)}" style="color:${MUTED}">Stop these reminders</a>`
+    : ''
+  const leaveText = leaveUrl ? `\nStop these reminders: ${leaveUrl}` : ''
   const foot = 'Tankward: fish, worms and greens from growers near you.'
-  const html = `<!doctype html><html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width,initial-scale=1"><title>${escapeHtml(letter.subject)}</title></head><body style="margin:0;padding:24px 16px;background:#F1F4F8"><main style="max-width:560px;margin:0 auto;padding:24px;background:#FFFFFF"><h1 style="margin:0 0 16px;${FONT};font-size:24px;line-height:1.25;color:${INK}">${escapeHtml(letter.heading)}</h1>${letter.blocks.map(blockHtml).join('')}<p style="margin:24px 0 0;${FONT};font-size:13px;color:${MUTED}">${foot}</p></main></body></html>`
-  const text = `${letter.heading}\n\n${letter.blocks.map(blockText).join('\n\n')}\n\n${foot}\n`
+  const html = `<!doctype html><html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width,initial-scale=1"><title>${escapeHtml(letter.subject)}</title></head><body style="margin:0;padding:24px 16px;background:#F1F4F8"><main style="max-width:560px;margin:0 auto;padding:24px;background:#FFFFFF"><h1 style="margin:0 0 16px;${FONT};font-size:24px;line-height:1.25;color:${INK}">${escapeHtml(letter.heading)}</h1>${letter.blocks.map(blockHtml).join('')}<p style="margin:24px 0 0;${FONT};font-size:13px;color:${MUTED}">${foot}${leaveHtml}</p></main></body></html>`
+  const text = `${letter.heading}\n\n${letter.blocks.map(blockText).join('\n\n')}\n\n${foot}${leaveText}\n`
   return { html, text }
 }

@@ -12,7 +12,15 @@ export interface MeChange {
   placeLabel?: string | undefined
   units?: Me['units'] | undefined
   theme?: Me['theme'] | undefined
+  reminders?: boolean | undefined
+  quiet?: Me['mail']['quiet'] | null
 }
+
+const quietColumns = (quiet: NonNullable<MeChange['quiet']> | null) => ({
+  quietFrom: quiet?.from ?? null,
+  quietUntil: quiet?.until ?? null,
+  quietZone: quiet?.zone ?? null,
+})
 
 export async function changeMe(caller: Caller, change: MeChange): Promise<Me> {
   const place = change.place === undefined ? undefined : await requirePlace(change.place, '#/place')
@@ -26,6 +34,8 @@ export async function changeMe(caller: Caller, change: MeChange): Promise<Me> {
           : {}),
         ...(change.units ? { units: change.units } : {}),
         ...(change.theme ? { theme: change.theme } : {}),
+        ...(change.reminders === undefined ? {} : { reminderMail: change.reminders }),
+        ...(change.quiet === undefined ? {} : quietColumns(change.quiet)),
         updatedAt: now(),
       },
       tx,

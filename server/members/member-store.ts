@@ -13,6 +13,10 @@ export interface ProfileRow {
   placeState: string | null
   units: string
   theme: string
+  reminderMail: boolean
+  quietFrom: string | null
+  quietUntil: string | null
+  quietZone: string | null
 }
 
 export interface MemberRow {
@@ -42,6 +46,10 @@ export async function findMember(memberId: string, tx: Tx = db()): Promise<Membe
   const ownSeller =
     sellerId !== null && sellerPublicId !== null ? { id: sellerId, publicId: sellerPublicId } : null
   return { name, email, emailVerified, profile, seller: ownSeller }
+}
+
+export async function isMember(memberId: string, tx: Tx): Promise<boolean> {
+  return (await tx.$count(user, eq(user.id, memberId))) === 1
 }
 
 export async function renameMember(memberId: string, name: string, tx: Tx): Promise<void> {

@@ -13,6 +13,9 @@ export function presentMe(caller: Caller, row: MemberRow, waiting: Me['waiting']
           state: profile.placeState,
         }
       : undefined
+  const { quietFrom, quietUntil, quietZone } = profile ?? {}
+  const quiet =
+    quietFrom && quietUntil && quietZone ? { from: quietFrom, until: quietUntil, zone: quietZone } : undefined
   return {
     name: row.name,
     email: row.email,
@@ -22,6 +25,7 @@ export function presentMe(caller: Caller, row: MemberRow, waiting: Me['waiting']
     ...(place ? { place } : {}),
     units: unitSystem.catch('us').parse(profile?.units),
     theme: themeChoice.catch('system').parse(profile?.theme),
+    mail: { reminders: profile?.reminderMail ?? true, ...(quiet ? { quiet } : {}) },
     ...(row.seller ? { sellerId: row.seller.publicId } : {}),
     waiting,
   }

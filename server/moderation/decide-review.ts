@@ -5,12 +5,12 @@ import { lockListing, setListing, type ListingRow } from '@/server/listings/list
 import { publishVersion } from '@/server/listings/publish-version'
 import { findVersionById, lockVersion, setVersion, type VersionRow } from '@/server/listings/version-store'
 import { reviewMail } from '@/server/mail/letters/review-decided'
-import { queueMail } from '@/server/mail/queue-mail'
 import { findMember } from '@/server/members/member-store'
 import { writeAudit } from '@/server/moderation/audit-store'
 import { readReview } from '@/server/moderation/read-review'
 import { requireImpartial } from '@/server/moderation/review-policy'
 import { listOwnCategories } from '@/server/moderation/review-store'
+import { tellMember } from '@/server/notices/tell-member'
 import { orderSettings } from '@/server/orders/order-settings'
 import { projectListings } from '@/server/search/project-listings'
 import { findSeller, type SellerRow } from '@/server/sellers/seller-store'
@@ -30,6 +30,7 @@ interface Deciding {
   at: Date
 }
 
+const NOTICES = { approve: 'listing-approved', ask: 'listing-asked', reject: 'listing-rejected' } as const
 const REVIEWS = { approve: 'approved', ask: 'asked', reject: 'rejected' } as const
 /** Said of the animals themselves: an approved earlier version does not stay on sale beside that. */
 const ENDS_ALL: Decision['reason'][] = ['species-blocked', 'wild-caught']
@@ -73,7 +74,14 @@ async function tellSeller({ given, version, listing, seller }: Deciding, tx: Tx)
     title: listingTitle(version.body),
     ...given,
   }
-  await queueMail(reviewMail(told), tx)
+  await tellMember(tx, {
+    memberId: seller.memberId,
+    kind: NOTICES[given.decision],
+    cause: `review:${version.id}`,
+    about: { listingId: listing.id },
+    title: told.title,
+    letter: reviewMail(told),
+  })
 }
 
 /**

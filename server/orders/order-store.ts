@@ -145,13 +145,9 @@ export async function writeEvent(tx: Tx, row: typeof orderEvent.$inferInsert): P
   await tx.insert(orderEvent).values(row)
 }
 
-export async function listEventsOf(orderIds: number[]): Promise<OrderEventRow[]> {
+export async function listEventsOf(orderIds: number[], tx: Tx = db()): Promise<OrderEventRow[]> {
   if (orderIds.length === 0) return []
-  return db()
-    .select()
-    .from(orderEvent)
-    .where(inArray(orderEvent.orderId, orderIds))
-    .orderBy(asc(orderEvent.id))
+  return tx.select().from(orderEvent).where(inArray(orderEvent.orderId, orderIds)).orderBy(asc(orderEvent.id))
 }
 
 export async function countUnpaidHolds(tx: Tx, buyerId: string): Promise<number> {

@@ -27,13 +27,13 @@ export async function readSellers(ids: number[]): Promise<Map<number, SellerRow>
 export async function readPeople(
   ids: string[],
   tx: Tx = db(),
-): Promise<Map<string, { name: string; email: string }>> {
+): Promise<Map<string, { memberId: string; name: string; email: string }>> {
   if (ids.length === 0) return new Map()
   const rows = await tx
     .select({ id: user.id, name: user.name, email: user.email })
     .from(user)
     .where(inArray(user.id, ids))
-  return new Map(rows.map((row) => [row.id, { name: row.name, email: row.email }]))
+  return new Map(rows.map(({ id, name, email }) => [id, { memberId: id, name, email }]))
 }
 
 export async function readListingRow(

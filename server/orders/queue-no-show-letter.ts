@@ -1,5 +1,6 @@
 import type { Tx } from '@/db/transaction'
-import { queueMail } from '@/server/mail/queue-mail'
+import { describeListing } from '@/server/listings/describe-listing'
+import { tellMember } from '@/server/notices/tell-member'
 import { loadLetterFacts } from '@/server/orders/letters/load-letter-facts'
 import { orderTag, orderUrl } from '@/server/orders/letters/letter-facts'
 import type { OrderRow } from '@/server/orders/order-store'
@@ -11,9 +12,15 @@ export async function queueNoShowLetter(tx: Tx, order: OrderRow): Promise<void> 
   if (!facts) return
   const isBySeller = order.noShowBy === 'seller'
   const until = order.clockAt ? printMoment(order.clockAt.toISOString(), order.zone) : 'tomorrow'
-  await queueMail(
-    {
-      to: isBySeller ? facts.buyer : facts.sellerPerson,
+  const to = isBySeller ? facts.buyer : facts.sellerPerson
+  await tellMember(tx, {
+    memberId: to.memberId,
+    kind: 'no-show',
+    cause: `no-show:${order.id}:${order.noShowAt?.getTime() ?? 0}`,
+    about: { orderId: order.id },
+    title: describeListing(facts.terms).title,
+    letter: {
+      to,
       subject: isBySeller ? 'The seller says you did not come' : 'The buyer says you were not there',
       heading: 'Was it so?',
       blocks: [
@@ -25,6 +32,5 @@ export async function queueNoShowLetter(tx: Tx, order: OrderRow): Promise<void> 
         { kind: 'button', label: 'Say what happened', url: orderUrl(facts) },
       ],
     },
-    tx,
-  )
+  })
 }

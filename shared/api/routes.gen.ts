@@ -14,6 +14,10 @@ export interface Endpoints {
   decideReview: typeof import('@/shared/contracts/moderation').decideReview
   listReviews: typeof import('@/shared/contracts/moderation').listReviews
   readReview: typeof import('@/shared/contracts/moderation').readReview
+  countUnreadNotices: typeof import('@/shared/contracts/notices').countUnreadNotices
+  listNotices: typeof import('@/shared/contracts/notices').listNotices
+  readAllNotices: typeof import('@/shared/contracts/notices').readAllNotices
+  readNotice: typeof import('@/shared/contracts/notices').readNotice
   acceptOrder: typeof import('@/shared/contracts/orders').acceptOrder
   cancelOrder: typeof import('@/shared/contracts/orders').cancelOrder
   chooseSlot: typeof import('@/shared/contracts/orders').chooseSlot
@@ -60,6 +64,10 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   decideReview: ['POST', '/moderation/listings/:versionId/decision', false],
   listReviews: ['GET', '/moderation/listings', false],
   readReview: ['GET', '/moderation/listings/:versionId', false],
+  countUnreadNotices: ['GET', '/notices/unread-count', false],
+  listNotices: ['GET', '/notices', false],
+  readAllNotices: ['POST', '/notices/readings', false],
+  readNotice: ['POST', '/notices/:noticeId/reading', false],
   acceptOrder: ['POST', '/orders/:orderId/acceptance', false],
   cancelOrder: ['POST', '/orders/:orderId/cancellation', false],
   chooseSlot: ['POST', '/orders/:orderId/slot', false],

@@ -1,9 +1,26 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
-import { cellIdText, line, publicIdText, stateCode, themeChoice, unitSystem } from '@/shared/contracts/values'
+import {
+  cellIdText,
+  knownZone,
+  line,
+  publicIdText,
+  stateCode,
+  themeChoice,
+  unitSystem,
+  wallTime,
+} from '@/shared/contracts/values'
 
 export const roles = ['member', 'seller', 'moderator', 'admin'] as const
+
+/** Hours on the wall clock of the member's own zone in which no reminder is mailed; they may go over midnight. */
+export const quietHours = z
+  .object({ from: wallTime, until: wallTime, zone: knownZone })
+  .refine(({ from, until }) => from !== until, {
+    message: 'The end must differ from the beginning.',
+    path: ['until'],
+  })
 
 export const me = z.object({
   name: z.string(),
@@ -14,6 +31,7 @@ export const me = z.object({
   place: z.object({ label: z.string(), cell: cellIdText, state: stateCode }).optional(),
   units: unitSystem,
   theme: themeChoice,
+  mail: z.object({ reminders: z.boolean(), quiet: quietHours.optional() }),
   sellerId: publicIdText.optional(),
   waiting: z.object({ orders: z.int(), reviews: z.int() }),
 })
@@ -32,7 +50,7 @@ export const changeMe = endpoint({
   method: 'PATCH',
   path: '/me',
   auth: 'member',
-  summary: 'Change name, place, units or theme',
+  summary: 'Change name, place, units, theme or mail wishes',
   body: z
     .object({
       name: line(80).min(1, 'Please give a name.').optional(),
@@ -40,6 +58,9 @@ export const changeMe = endpoint({
       placeLabel: line(120).optional(),
       units: unitSystem.optional(),
       theme: themeChoice.optional(),
+      reminders: z.boolean().optional(),
+      /** null: no quiet hours. */
+      quiet: quietHours.nullable().optional(),
     })
     .strict(),
   reply: me,

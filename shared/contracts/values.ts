@@ -9,6 +9,15 @@ export const stateCode = z.string().regex(/^[A-Z]{2}$/)
 export const zipCode = z.string().regex(/^\d{5}$/, 'Five digits, please.')
 export const cellIdText = z.string().regex(/^\d{2,3}\.\d{1,4}\.\d{1,4}$/)
 export const zoneName = z.string().min(3).max(40)
+/** A zone that this program can compute with. */
+export const knownZone = zoneName.refine((zone) => {
+  try {
+    return new Intl.DateTimeFormat('en-US', { timeZone: zone }).resolvedOptions().timeZone !== ''
+  } catch {
+    return false
+  }
+}, 'That time zone is not known here.')
+export const wallTime = z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/, 'A time such as 22:00, please.')
 export const photoId = z.string().regex(/^[0-9a-f]{32}$/)
 export const unitSystem = z.enum(['us', 'metric'])
 export const themeChoice = z.enum(['system', 'light', 'dark'])

@@ -32,6 +32,7 @@ describe('the member’s own page', () => {
       secondFactor: { enabled: false, required: false },
       units: 'us',
       theme: 'system',
+      mail: { reminders: true },
       waiting: { orders: 0, reviews: 0 },
     })
   })

@@ -21,6 +21,7 @@ import { now, setClockOffset } from '@/server/clock'
 import { ringClocks } from '@/server/jobs/ring-clocks'
 import { log } from '@/server/log'
 import type { Letter } from '@/server/mail/letter'
+import { configureUnsubscribe } from '@/server/mail/unsubscribe-token'
 import { configureOrders } from '@/server/orders/order-settings'
 import { registerDoers } from '@/server/outbox/doers'
 import { finishEffect } from '@/server/outbox/outbox-store'
@@ -87,6 +88,7 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
   setClockOffset(0)
   openAuth({ secret: 'test-secret-'.repeat(4), origin: ORIGIN, alsoTrusted: [] })
   configureOrders({ origin: ORIGIN, feeBp: 600 })
+  configureUnsubscribe({ origin: ORIGIN, secret: 'test-secret-'.repeat(4) })
   const letters: Letter[] = []
   registerDoers()
   registerDoer('mail', async (effect) => {
@@ -151,13 +153,14 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
     return agent
   }
   const waiting = async (): Promise<number> => {
-    const [rows] = await base.execute(
-      sql`select count(*) as n from outbox where done_at is null and dead_at is null and run_after <= utc_timestamp(3)`,
-    )
+    // The webhooks first: one that arrives between the two looks has then become a row of the outbox.
     const told = await fetch(`${fake.origin}/_control/state`, {
       headers: { 'x-control-token': 'control-for-tests' },
     })
     const state = (await told.json()) as { waitingWebhooks: number }
+    const [rows] = await base.execute(
+      sql`select count(*) as n from outbox where done_at is null and dead_at is null and run_after <= utc_timestamp(3)`,
+    )
     return Number((rows as unknown as { n: number }[])[0]?.n ?? 0) + state.waitingWebhooks
   }
   const quiet = async (): Promise<void> => {

@@ -13,6 +13,7 @@ import { buildApp } from '@/server/app'
 import { openAuth } from '@/server/auth/auth'
 import { setClockOffset } from '@/server/clock'
 import { log } from '@/server/log'
+import { configureUnsubscribe } from '@/server/mail/unsubscribe-token'
 import { configureOrders } from '@/server/orders/order-settings'
 import { configurePhotos } from '@/server/photos/photo-files'
 import { forgetPlaces } from '@/server/places/find-place'
@@ -53,6 +54,7 @@ export async function openTestServer(label: string): Promise<TestServer> {
   connect(database.url)
   openAuth({ secret: 'test-secret-'.repeat(4), origin: TEST_ORIGIN, alsoTrusted: [] })
   configureOrders({ origin: TEST_ORIGIN, feeBp: 600 })
+  configureUnsubscribe({ origin: TEST_ORIGIN, secret: 'test-secret-'.repeat(4) })
   const uploadDir = await mkdtemp(path.join(tmpdir(), 'tankward-test-photos-'))
   configurePhotos({ dir: uploadDir })
   forgetPlaces()

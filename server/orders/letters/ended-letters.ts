@@ -1,7 +1,6 @@
-import type { Letter } from '@/server/mail/letter'
-import { orderTag, orderUrl, type LetterFacts } from '@/server/orders/letters/letter-facts'
+import { orderTag, orderUrl, type LetterFacts, type OrderLetter } from '@/server/orders/letters/letter-facts'
 
-type Writer = (facts: LetterFacts) => Letter[]
+type Writer = (facts: LetterFacts) => OrderLetter[]
 
 interface Ending {
   subject: string
@@ -65,7 +64,11 @@ export const endings = {
     seller:
       'The buyer cancelled. The animals are free again; what the terms let you keep is shown with the order.',
   }),
-  sellerCancelled: ended({ subject: 'The seller cancelled your order', buyer: `We are sorry. ${ALL_BACK}` }),
+  sellerCancelled: ended({
+    subject: 'The seller cancelled the order',
+    buyer: `We are sorry. ${ALL_BACK}`,
+    seller: 'You cancelled the order. The buyer has read why and gets every cent back.',
+  }),
   neverScheduled: ended({
     subject: 'No day was agreed',
     buyer: `The time to agree on a day has passed. ${ALL_BACK}`,

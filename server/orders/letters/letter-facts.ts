@@ -1,5 +1,6 @@
-import type { LetterBlock } from '@/server/mail/letter'
+import type { Letter, LetterBlock } from '@/server/mail/letter'
 import { describeListing } from '@/server/listings/describe-listing'
+import type { Agreement } from '@/server/orders/slot-agreement'
 import type { OrderRow } from '@/server/orders/order-store'
 import type { SellerRow } from '@/server/orders/party-store'
 import type { ListingBody } from '@/shared/contracts/listings'
@@ -8,9 +9,13 @@ import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
 
 export interface Person {
+  memberId: string
   name: string
   email: string
 }
+
+/** A mail to a party of the order: it goes with a notice, so it names the member. */
+export type OrderLetter = Letter & { to: Person }
 
 /** Everything a mail about an order may speak of. */
 export interface LetterFacts {
@@ -20,6 +25,8 @@ export interface LetterFacts {
   buyer: Person
   sellerPerson: Person
   origin: string
+  /** The pickup time as it was agreed on; null while none was. */
+  agreement: Agreement | null
 }
 
 export function orderUrl({ origin, order }: LetterFacts): string {

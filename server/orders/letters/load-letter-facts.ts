@@ -1,8 +1,9 @@
 import type { Tx } from '@/db/transaction'
 import type { LetterFacts } from '@/server/orders/letters/letter-facts'
 import { orderSettings } from '@/server/orders/order-settings'
-import type { OrderRow } from '@/server/orders/order-store'
+import { listEventsOf, type OrderRow } from '@/server/orders/order-store'
 import { readPeople, readSellerById } from '@/server/orders/party-store'
+import { agreementOf } from '@/server/orders/slot-agreement'
 import { readTerms } from '@/server/orders/terms-store'
 
 /** Everything a mail about this order may say; null when a party has left. */
@@ -14,5 +15,6 @@ export async function loadLetterFacts(tx: Tx, order: OrderRow): Promise<LetterFa
   const sellerPerson = people.get(seller.memberId)
   if (!buyer || !sellerPerson) return null
   const terms = await readTerms(tx, order.listingVersionId)
-  return { order, terms, seller, buyer, sellerPerson, origin: orderSettings().origin }
+  const agreement = agreementOf(await listEventsOf([order.id], tx))
+  return { order, terms, seller, buyer, sellerPerson, origin: orderSettings().origin, agreement }
 }

@@ -1,21 +1,30 @@
 import type { Letter } from '@/server/mail/letter'
 import { endings } from '@/server/orders/letters/ended-letters'
-import { orderTag, orderUrl, slotText, type LetterFacts } from '@/server/orders/letters/letter-facts'
+import {
+  orderTag,
+  orderUrl,
+  slotText,
+  type LetterFacts,
+  type OrderLetter,
+} from '@/server/orders/letters/letter-facts'
 import { promiseWords } from '@/server/orders/promise-words'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 import { printMoment } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
 
-type Writer = (facts: LetterFacts) => Letter[]
+type Writer = (facts: LetterFacts) => OrderLetter[]
 
 const see = (facts: LetterFacts, label: string) => ({ kind: 'button' as const, label, url: orderUrl(facts) })
 const say = (text: string) => ({ kind: 'text' as const, text })
 const untilClock = ({ order }: LetterFacts) =>
   order.clockAt ? printMoment(order.clockAt.toISOString(), order.zone) : 'the clock ends'
 
-const toBuyer = (facts: LetterFacts, letter: Omit<Letter, 'to'>): Letter => ({ to: facts.buyer, ...letter })
-const toSeller = (facts: LetterFacts, letter: Omit<Letter, 'to'>): Letter => ({
+const toBuyer = (facts: LetterFacts, letter: Omit<Letter, 'to'>): OrderLetter => ({
+  to: facts.buyer,
+  ...letter,
+})
+const toSeller = (facts: LetterFacts, letter: Omit<Letter, 'to'>): OrderLetter => ({
   to: facts.sellerPerson,
   ...letter,
 })
@@ -72,10 +81,12 @@ const accepted: Writer = (facts) => [
   }),
 ]
 
+const isMoved = ({ agreement }: LetterFacts) => agreement !== null && agreement.sequence > 0
+
 const scheduled: Writer = (facts) => [
   toBuyer(facts, {
-    subject: `Pickup ${slotText(facts)}`,
-    heading: 'It is a date',
+    subject: `${isMoved(facts) ? 'Moved: pickup' : 'Pickup'} ${slotText(facts)}`,
+    heading: isMoved(facts) ? 'The day has moved' : 'It is a date',
     blocks: [
       orderTag(facts),
       {
@@ -99,7 +110,7 @@ const scheduled: Writer = (facts) => [
     ],
   }),
   toSeller(facts, {
-    subject: `Pickup ${slotText(facts)}: ${facts.order.quantity} animals`,
+    subject: `${isMoved(facts) ? 'Moved: pickup' : 'Pickup'} ${slotText(facts)}: ${facts.order.quantity} animals`,
     heading: `${facts.buyer.name} comes ${slotText(facts)}`,
     blocks: [
       orderTag(facts),

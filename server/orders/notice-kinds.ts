@@ -1,0 +1,20 @@
+import type { NoticeKind } from '@/shared/contracts/notices'
+import { edges, type EdgeId } from '@/shared/domain/orders/edges.facts'
+
+const kinds: Partial<Record<EdgeId, NoticeKind>> = {
+  E04: 'request',
+  E05: 'accepted',
+  E07: 'accepted',
+  E14: 'scheduled',
+  E22: 'ready',
+  E28: 'moved',
+  E30: 'handed-over',
+  E33: 'unclear',
+  E40: 'settled',
+  E41: 'settled',
+}
+
+/** What kind of news an edge is; whatever ends an order early is `ended`. */
+export function noticeKindOf(edge: EdgeId): NoticeKind {
+  return kinds[edge] ?? (edges[edge].to === 'cancelled' ? 'ended' : 'unclear')
+}

@@ -1,0 +1,60 @@
+import { now } from '@/server/clock'
+import type { Letter } from '@/server/mail/letter'
+import { mailSender } from '@/server/mail/mail-sender'
+import { describeListing } from '@/server/listings/describe-listing'
+import { orderUrl, type LetterFacts } from '@/server/orders/letters/letter-facts'
+import { mayMeet } from '@/server/orders/order-policy'
+import { writeCalendar } from '@/shared/calendar/write-calendar'
+import { printCents } from '@/shared/units/money'
+
+type CalendarFile = NonNullable<Letter['calendar']>
+
+/** The order's name in everybody's calendar: no move and no end changes it, nor does a new address of the site. */
+const uidOf = (publicId: string) => `pickup-${publicId}@tankward`
+
+function summaryOf(facts: LetterFacts, party: 'buyer' | 'seller'): string {
+  const what = `${facts.order.quantity} × ${describeListing(facts.terms).title}`
+  return party === 'buyer' ? `Pick up ${what}` : `${facts.buyer.name} picks up ${what}`
+}
+
+function descriptionOf(facts: LetterFacts, party: 'buyer' | 'seller'): string {
+  const { order, seller } = facts
+  if (order.state === 'cancelled') return 'This order has ended; nobody needs to come.'
+  const rest = order.balancePaidAt === null && order.balanceCents > 0 ? printCents(order.balanceCents) : null
+  const lines =
+    party === 'buyer'
+      ? [
+          mayMeet(order, party) ? `${seller.farmName}, ${seller.phone}` : seller.farmName,
+          'Bring a lidded bucket or cooler half full of your own tank water.',
+          rest ? `Still to pay: ${rest}` : 'Everything is paid.',
+        ]
+      : [
+          rest ? `The buyer still pays ${rest}.` : 'Everything is paid.',
+          'Count together; the code comes last.',
+        ]
+  return [...lines, orderUrl(facts)].join('\n')
+}
+
+/** The pickup as a calendar file for one party; null while no time was agreed. */
+export function orderCalendar(facts: LetterFacts, party: 'buyer' | 'seller'): CalendarFile | null {
+  const { order, agreement, seller } = facts
+  if (!agreement || !order.slotStartsAt || !order.slotEndsAt) return null
+  const isCancelled = order.state === 'cancelled'
+  const text = writeCalendar({
+    uid: uidOf(order.publicId),
+    sequence: agreement.sequence,
+    stampedAt: now(),
+    startsAt: order.slotStartsAt,
+    endsAt: order.slotEndsAt,
+    isCancelled,
+    summary: summaryOf(facts, party),
+    description: descriptionOf(facts, party),
+    // The true place follows the same rule as on the order's page.
+    ...(mayMeet(order, party)
+      ? { location: `${seller.street}, ${seller.city}, ${seller.state} ${seller.zip}` }
+      : {}),
+    url: orderUrl(facts),
+    organizerEmail: mailSender().address,
+  })
+  return { fileName: 'pickup.ics', method: isCancelled ? 'CANCEL' : 'PUBLISH', text }
+}
