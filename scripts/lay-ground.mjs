@@ -57,6 +57,6 @@ export async function layGround(crew, options) {
   ])
   const databaseUrl = environment.DATABASE_URL ?? database?.url ?? ''
   const settings = serverEnvironment({ ...given, port, databaseUrl }, environment)
-  if (database) await seedOnce(crew, { dataDir, small: !durable, ownerUrl: database.ownerUrl, settings })
+  if (database) await seedOnce(crew, { dataDir, ownerUrl: database.ownerUrl, settings })
   return { database, mail, payments, settings }
 }

@@ -4,16 +4,16 @@ import { step } from './tell.mjs'
 
 /**
  * @param {import('./crew.mjs').Crew} crew
- * @param {{ dataDir: string, small: boolean, ownerUrl: string, settings: Record<string, string | undefined> }} given
+ * @param {{ dataDir: string, ownerUrl: string, settings: Record<string, string | undefined> }} given
  */
-export async function seedOnce(crew, { dataDir, small, ownerUrl, settings }) {
+export async function seedOnce(crew, { dataDir, ownerUrl, settings }) {
   if (await isSeeded(dataDir)) return
   const environment = {
     ...settings,
     DATABASE_OWNER_URL: ownerUrl,
     DEMO_PEOPLE_FILE: demoPeopleFile(dataDir),
   }
-  const command = ['node', '--import', 'tsx', 'seed/run.ts', ...(small ? ['--small'] : [])]
+  const command = ['node', '--import', 'tsx', 'seed/run.ts']
   await step(
     'Places, rules and demo people',
     () => seedAndMark(dataDir, () => crew.run({ name: 'seed', command, environment })),

@@ -12,7 +12,7 @@ import { deathOf, waitUntilUp } from './wait-until-up.mjs'
  * @property {string} dataDir
  * @property {number} port 0: any free one
  * @property {number} clockOffsetMs
- * @property {boolean} durable false only for throw-away data, which gets the small demo
+ * @property {boolean} durable false only for throw-away data
  * @property {Record<string, string | undefined>} environment names in it win over what we make up
  * @property {(name: string, fault: Error) => void} onDeath a program stopped by itself
  *

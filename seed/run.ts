@@ -1,32 +1,27 @@
-// Fills a database: places and rules always, and the demo where DEMO is on. `--small`: the same people, fewer listings
-// and orders, for tests. Started by `npm start` and `npm run seed`; doing it again changes nothing.
-import { parseArgs } from 'node:util'
-
+// Fills a database: places and rules always, and the demo where DEMO is on. Started by `npm start` and `npm run seed`;
+// doing it again changes nothing.
 import { connect, db, disconnect } from '@/db/client'
 import { findDemo } from '@/seed/demo/demo-mark'
 import { writePeopleFile } from '@/seed/demo/write-people-file'
 import { loadPlaces } from '@/seed/load-places'
 import { loadRules } from '@/seed/load-rules'
 
-const VALLEY = ['OH', 'KY', 'IN']
-
 const began = performance.now()
 const say = (line: string) =>
   console.log(`${((performance.now() - began) / 1000).toFixed(1).padStart(5)} s  ${line}`)
 
-async function layGround(isDemo: boolean, isSmall: boolean): Promise<void> {
-  await loadPlaces(db(), isSmall ? { states: VALLEY } : undefined)
-  say(isSmall ? `places of ${VALLEY.join(', ')}` : 'places of the whole country')
+async function layGround(isDemo: boolean): Promise<void> {
+  await loadPlaces(db())
+  say('places')
   await loadRules(db(), { demonstration: isDemo, at: new Date() })
   say(isDemo ? 'rules, with the demonstration ones' : 'rules')
 }
 
 async function run(): Promise<void> {
-  const { small: isSmall } = parseArgs({ options: { small: { type: 'boolean', default: false } } }).values
   const databaseUrl = process.env.DATABASE_URL
   const peopleFile = process.env.DEMO_PEOPLE_FILE
   const isDemo = process.env.DEMO === 'on'
-  if (process.env.NODE_ENV === 'production' && (isDemo || isSmall)) {
+  if (process.env.NODE_ENV === 'production' && isDemo) {
     throw new Error('The demo is refused in production: its people, its law rows and its money are invented.')
   }
   if (!databaseUrl) throw new Error('DATABASE_URL is missing: which database?')
@@ -39,8 +34,8 @@ async function run(): Promise<void> {
   if (isDemo && found === 'whole') return say('the demo is there already: nothing to do')
   // Half the product comes with it: it loads while the places do.
   const demo = isDemo ? import('@/seed/demo/play-demo') : null
-  await layGround(isDemo, isSmall)
-  if (demo) await (await demo).playDemo({ isSmall, say })
+  await layGround(isDemo)
+  if (demo) await (await demo).playDemo({ say })
   say('done')
 }
 

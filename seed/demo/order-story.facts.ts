@@ -28,8 +28,8 @@ export type OrderPath =
 
 export interface PathFacts {
   path: OrderPath
-  /** How often in the small demo and in the whole one. */
-  times: readonly [small: number, whole: number]
+  /** How often. */
+  times: number
   /**
    * Which pickup window: one weeks ago, the last one that has begun, one of yesterday or the day before, the next to
    * come, one in the coming weeks, or any that lay some days after the order.
@@ -49,35 +49,35 @@ export interface PathFacts {
 
 // prettier-ignore
 export const orderPaths: readonly PathFacts[] = [
-  { path: 'confirmed', times: [1, 1], slot: 'past', farm: 'hatchery', buyer: 'beginner' },
-  { path: 'scheduled', times: [1, 1], slot: 'coming', farm: 'hatchery', buyer: 'beginner' },
-  { path: 'requested', times: [1, 2], slot: 'coming', accept: 'ask', farm: 'hatchery' },
-  { path: 'ready-paid', times: [0, 1], slot: 'next', balanceDue: 'at-handover', farm: 'hatchery' },
-  { path: 'confirmed', times: [1, 1], slot: 'past', batch: 'last pail', quantity: 20 },
-  { path: 'scheduled', times: [1, 1], slot: 'coming', batch: 'last pail', quantity: 20 },
-  { path: 'no-day-yet', times: [0, 1], slot: 'none', batch: 'no more days' },
-  { path: 'confirmed', times: [0, 8], slot: 'past' },
-  { path: 'closed-by-time', times: [1, 5], slot: 'past' },
-  { path: 'short', times: [1, 2], slot: 'past' },
-  { path: 'decided', times: [0, 1], slot: 'past' },
-  { path: 'handed-over', times: [1, 3], slot: 'just' },
-  { path: 'contested', times: [1, 1], slot: 'gone' },
-  { path: 'ready', times: [1, 3], slot: 'next', balanceDue: 'at-handover' },
-  { path: 'ready-paid', times: [0, 1], slot: 'next', balanceDue: 'at-handover' },
-  { path: 'scheduled', times: [0, 5], slot: 'coming', balanceDue: 'at-handover' },
-  { path: 'requested', times: [0, 3], slot: 'coming', accept: 'ask' },
-  { path: 'reserved', times: [1, 3], slot: 'coming' },
-  { path: 'hold-expired', times: [1, 3], slot: 'any' },
-  { path: 'left', times: [0, 2], slot: 'any' },
-  { path: 'declined', times: [1, 3], slot: 'any', accept: 'ask' },
-  { path: 'silent', times: [0, 2], slot: 'any', accept: 'ask' },
-  { path: 'withdrawn', times: [0, 2], slot: 'any', accept: 'ask' },
-  { path: 'buyer-cancelled', times: [0, 2], slot: 'past', balanceDue: 'at-handover', leadDays: [4.2, 6.5] },
-  { path: 'buyer-cancelled-late', times: [0, 1], slot: 'past', balanceDue: 'at-handover' },
-  { path: 'seller-cancelled', times: [1, 2], slot: 'past' },
-  { path: 'day-missed', times: [0, 1], slot: 'past', balanceDue: 'at-handover' },
-  { path: 'balance-unpaid', times: [0, 1], slot: 'past', balanceDue: 'before' },
-  { path: 'buyer-absent', times: [0, 2], slot: 'past' },
-  { path: 'seller-absent', times: [0, 1], slot: 'past' },
-  { path: 'stopped', times: [0, 1], slot: 'past' },
+  { path: 'confirmed', times: 1, slot: 'past', farm: 'hatchery', buyer: 'beginner' },
+  { path: 'scheduled', times: 1, slot: 'coming', farm: 'hatchery', buyer: 'beginner' },
+  { path: 'requested', times: 2, slot: 'coming', accept: 'ask', farm: 'hatchery' },
+  { path: 'ready-paid', times: 1, slot: 'next', balanceDue: 'at-handover', farm: 'hatchery' },
+  { path: 'confirmed', times: 1, slot: 'past', batch: 'last pail', quantity: 20 },
+  { path: 'scheduled', times: 1, slot: 'coming', batch: 'last pail', quantity: 20 },
+  { path: 'no-day-yet', times: 1, slot: 'none', batch: 'no more days' },
+  { path: 'confirmed', times: 8, slot: 'past' },
+  { path: 'closed-by-time', times: 5, slot: 'past' },
+  { path: 'short', times: 2, slot: 'past' },
+  { path: 'decided', times: 1, slot: 'past' },
+  { path: 'handed-over', times: 3, slot: 'just' },
+  { path: 'contested', times: 1, slot: 'gone' },
+  { path: 'ready', times: 3, slot: 'next', balanceDue: 'at-handover' },
+  { path: 'ready-paid', times: 1, slot: 'next', balanceDue: 'at-handover' },
+  { path: 'scheduled', times: 5, slot: 'coming', balanceDue: 'at-handover' },
+  { path: 'requested', times: 3, slot: 'coming', accept: 'ask' },
+  { path: 'reserved', times: 3, slot: 'coming' },
+  { path: 'hold-expired', times: 3, slot: 'any' },
+  { path: 'left', times: 2, slot: 'any' },
+  { path: 'declined', times: 3, slot: 'any', accept: 'ask' },
+  { path: 'silent', times: 2, slot: 'any', accept: 'ask' },
+  { path: 'withdrawn', times: 2, slot: 'any', accept: 'ask' },
+  { path: 'buyer-cancelled', times: 2, slot: 'past', balanceDue: 'at-handover', leadDays: [4.2, 6.5] },
+  { path: 'buyer-cancelled-late', times: 1, slot: 'past', balanceDue: 'at-handover' },
+  { path: 'seller-cancelled', times: 2, slot: 'past' },
+  { path: 'day-missed', times: 1, slot: 'past', balanceDue: 'at-handover' },
+  { path: 'balance-unpaid', times: 1, slot: 'past', balanceDue: 'before' },
+  { path: 'buyer-absent', times: 2, slot: 'past' },
+  { path: 'seller-absent', times: 1, slot: 'past' },
+  { path: 'stopped', times: 1, slot: 'past' },
 ]

@@ -1,5 +1,4 @@
 import type { BatchPlan } from '@/seed/demo/batch-plan'
-import type { FarmFacts } from '@/seed/demo/farms.facts'
 import { planBatch } from '@/seed/demo/plan-batch'
 import { dayPlus } from '@/seed/demo/pickup-times'
 import { need, type Farm, type Stage } from '@/seed/demo/stage'
@@ -9,16 +8,9 @@ import { dayOf } from '@/server/listings/day-of'
 
 const READY_IN_DAYS = 24
 
-/** In the small demo: enough of the hatchery for the people that are printed, one of each larger farm. */
-function countOf({ isSmall }: Stage, { key, batches }: FarmFacts): number {
-  if (!isSmall) return batches
-  return key === 'hatchery' ? 3 : batches >= 4 ? 1 : 0
-}
-
 /** What a farm has on sale: its kinds in turn, some listed weeks ago and some just now. */
 function batchesOf(stage: Stage, farm: Farm): BatchPlan[] {
-  const { key, keeps } = farm.facts
-  const count = countOf(stage, farm.facts)
+  const { key, keeps, batches: count } = farm.facts
   const chance = seededRandom(`batches of ${key}`)
   return Array.from({ length: count }, (_, at) =>
     planBatch(stage, {

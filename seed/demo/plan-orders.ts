@@ -162,7 +162,7 @@ function cast(casting: Casting, facts: PathFacts, key: string): OrderPlan {
 export function planOrders(stage: Stage, batches: readonly BatchPlan[]): OrderPlan[] {
   const load = new Map<string, number>()
   return orderPaths.flatMap((facts, row) =>
-    Array.from({ length: facts.times[stage.isSmall ? 0 : 1] }, (_, at) =>
+    Array.from({ length: facts.times }, (_, at) =>
       cast({ stage, batches, load }, facts, `${row}.${at} ${facts.path}`),
     ),
   )

@@ -8,7 +8,7 @@ import { configureOrders } from '@/server/orders/order-settings'
 import { configurePhotos } from '@/server/photos/photo-files'
 
 /** Sets the product up with the settings its server will have, and plays the demo in it. */
-export async function playDemo(options: { isSmall: boolean; say: (line: string) => void }): Promise<void> {
+export async function playDemo(options: { say: (line: string) => void }): Promise<void> {
   const settings = readSettings()
   log.level = 'warn'
   const { PUBLIC_ORIGIN: origin, STRIPE_API_BASE: processor } = settings

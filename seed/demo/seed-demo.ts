@@ -23,7 +23,6 @@ import { findSellerOf } from '@/server/sellers/seller-store'
 export interface DemoOptions {
   /** Domain time runs this far ahead of real time. */
   clockOffsetMs: number
-  isSmall: boolean
   say: (line: string) => void
 }
 
@@ -50,12 +49,12 @@ async function projectAll(stage: Stage): Promise<void> {
   }
 }
 
-async function setStage({ isSmall, say }: DemoOptions, at: Date): Promise<Stage> {
+async function setStage({ say }: DemoOptions, at: Date): Promise<Stage> {
   turnClockTo(after(at, -80 * DAY_MS))
   const people = await makePeople(after(at, -80 * DAY_MS))
   say(`people: ${people.size}`)
   const growers = [...people].filter(([key]) => key.startsWith('grower ')).map(([, actor]) => actor)
-  return { at, isSmall, people, growers, farms: await planFarms(people) }
+  return { at, people, growers, farms: await planFarms(people) }
 }
 
 /** Plays the whole demo through the product's own commands and its practice processor, up to the given moment. */

@@ -18,7 +18,6 @@ export interface Farm {
 export interface Stage {
   /** The moment the demo shows; everything else lies before it or is planned after it. */
   at: Date
-  isSmall: boolean
   /** By key: the named people. */
   people: ReadonlyMap<string, Actor>
   growers: readonly Actor[]
