@@ -27,7 +27,10 @@ const mapLink = ({ street, city, state, zip }: NonNullable<ShownOrder['meeting']
 /** When, where, who and how much: what the two parties agreed on. */
 export function OrderFacts({ order }: { order: ShownOrder }) {
   const { meeting, slot, party } = order
+  const isOver = order.state === 'cancelled' || order.state === 'settled'
   const where = meeting ? `${meeting.street}, ${meeting.city}, ${meeting.state} ${meeting.zip}` : null
+  const place =
+    party === 'seller' ? 'Your place' : (where ?? (isOver ? null : 'Shown once the day is agreed'))
   return (
     <Card labelledBy="order-facts">
       <Heading level={2} size="lead" nativeID="order-facts">
@@ -35,13 +38,7 @@ export function OrderFacts({ order }: { order: ShownOrder }) {
       </Heading>
       <Fact name="Animals">{`${order.quantity} at ${printCents(order.unitCents)} each`}</Fact>
       <Fact name="Pickup">{slot ? printSlot(slot) : 'No day agreed yet'}</Fact>
-      <Fact name="Place">
-        {where && party === 'buyer'
-          ? where
-          : party === 'buyer'
-            ? 'Shown once the day is agreed'
-            : 'Your place'}
-      </Fact>
+      {place ? <Fact name="Place">{place}</Fact> : null}
       {meeting && party === 'buyer' ? <Fact name="Phone">{meeting.phone}</Fact> : null}
       <Fact name={party === 'seller' ? 'Buyer' : 'Seller'}>{order.otherParty.name}</Fact>
       <Fact name="Arrival promise">{order.arrivalPromise}</Fact>

@@ -88,6 +88,8 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
       <Returned order={order} from={from} />
       <TwoColumns
         sideLabel="Money"
+        // Once it is over, what became of the money is what one comes to see.
+        isSideFirst={order.state === 'cancelled' || order.state === 'settled'}
         main={
           <View style={styles.column}>
             {order.state === 'reserved' ? <HoldCountdown order={order} /> : null}
@@ -106,9 +108,11 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
         side={
           <Card>
             <MoneyStrip order={order} />
-            <Text size="note" tint="muted">
-              Your money is held by our payment processor until you confirm, or until the time above.
-            </Text>
+            {order.state === 'cancelled' || order.state === 'settled' ? null : (
+              <Text size="note" tint="muted">
+                Your money is held by our payment processor until you confirm, or until the time above.
+              </Text>
+            )}
           </Card>
         }
       />

@@ -3,10 +3,12 @@ import { now } from '@/server/clock'
 import type { Caller } from '@/server/http/caller'
 import { applyEdge } from '@/server/orders/apply-edge'
 import { freeCancelUntil } from '@/server/orders/free-cancel-until'
+import { buyerCancelled } from '@/server/orders/letters/ended-letters'
 import { keepDeposit } from '@/server/orders/keep-deposit'
 import { mayAct } from '@/server/orders/order-policy'
 import type { OrderRow } from '@/server/orders/order-store'
 import { orderSeenBy } from '@/server/orders/party-of'
+import { queueLettersOf } from '@/server/orders/queue-order-letters'
 import { refundEverything } from '@/server/orders/refund-everything'
 import { showAgain } from '@/server/orders/show-order'
 import { readTerms } from '@/server/orders/terms-store'
@@ -21,12 +23,14 @@ type Asked = ParsedBody<Endpoints['cancelOrder']> & { commandId: string }
 const byBuyer: Record<string, EdgeId> = { deposit_paid: 'E15', scheduled: 'E24', ready: 'E56' }
 const bySeller: Record<string, EdgeId> = { deposit_paid: 'E16', scheduled: 'E25', ready: 'E55' }
 
-/** Inside the free time a buyer gets all back; after it, and once the animals are ready, the deposit may be kept. */
-async function settleBuyersCancel(tx: Tx, before: OrderRow, order: OrderRow): Promise<void> {
+/**
+ * Inside the free time a buyer gets all back; after it, and once the animals are ready, the deposit may be kept.
+ * Returns the cents that go back.
+ */
+async function settleBuyersCancel(tx: Tx, before: OrderRow, order: OrderRow): Promise<number> {
   const until = freeCancelUntil(before, await readTerms(tx, before.listingVersionId))
   const isFree = before.state !== 'ready' && (until === null || now() <= until)
-  if (isFree) await refundEverything(tx, order, 'buyer-cancelled')
-  else await keepDeposit(tx, order, 'buyer-cancelled')
+  return isFree ? refundEverything(tx, order, 'buyer-cancelled') : keepDeposit(tx, order, 'buyer-cancelled')
 }
 
 /** E15, E24, E56 by the buyer; E16, E25, E55 by the seller, who says why and never costs the buyer a cent. */
@@ -54,8 +58,11 @@ export async function cancelOrder(caller: Caller, orderId: string, asked: Asked)
       facts: asked.reason ? { why: asked.reason } : {},
     })
     if (!applied) return
-    if (isBuyer) await settleBuyersCancel(tx, seen.order, order)
-    else await refundEverything(tx, order, 'seller-cancelled')
+    if (isBuyer) {
+      const backCents = await settleBuyersCancel(tx, seen.order, order)
+      await queueLettersOf(tx, { edge, order, write: buyerCancelled(backCents) })
+    }
+    if (!isBuyer) await refundEverything(tx, order, 'seller-cancelled')
   })
   return showAgain(seen)
 }

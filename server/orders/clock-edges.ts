@@ -11,7 +11,7 @@ import { refundEverything } from '@/server/orders/refund-everything'
 import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 
 type ClockEdge = (order: OrderRow) => Promise<void>
-type Aftermath = (tx: Tx, order: OrderRow) => Promise<void>
+type Aftermath = (tx: Tx, order: OrderRow) => Promise<unknown>
 
 /** A timer's command id: the same ring twice changes nothing. */
 const ringOf = (edge: string, order: OrderRow) => `clock:${edge}:${order.clockAt?.getTime() ?? 0}`

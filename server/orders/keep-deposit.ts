@@ -10,9 +10,9 @@ import { noShowSplit } from '@/shared/domain/money/no-show-split'
 
 /**
  * A forfeited order: at most the listing's deposit is kept, even when everything was paid; the rest goes back. The
- * seller gets what is kept less the fee on it.
+ * seller gets what is kept less the fee on it. Returns the cents that go back to the card.
  */
-export async function keepDeposit(tx: Tx, order: OrderRow, why: string): Promise<void> {
+export async function keepDeposit(tx: Tx, order: OrderRow, why: string): Promise<number> {
   await letMoneyGo(tx, order)
   const captured = (await listPayments(order.id, tx)).filter((payment) => payment.status === 'captured')
   const chargedCents = captured.reduce((sum, payment) => sum + payment.amountCents - payment.refundedCents, 0)
@@ -20,7 +20,7 @@ export async function keepDeposit(tx: Tx, order: OrderRow, why: string): Promise
   if (split.refundCents > 0) await refundOrder(tx, order, { amountCents: split.refundCents, why })
   const fresh = await lockOrder(tx, order.id)
   if (fresh) await changeOrder(tx, fresh, { feeCents: split.feeCents, updatedAt: now() })
-  if (split.keptCents === 0) return
+  if (split.keptCents === 0) return split.refundCents
   const of = { orderId: order.id, sellerId: order.sellerId, at: now() }
   await book(tx, {
     ...of,
@@ -33,7 +33,8 @@ export async function keepDeposit(tx: Tx, order: OrderRow, why: string): Promise
       ['platform_fee', split.feeCents],
     ],
   })
-  if (split.sellerCents === 0) return
+  if (split.sellerCents === 0) return split.refundCents
   await insertTransfer(tx, { orderId: order.id, amountCents: split.sellerCents, at: now() })
   await queueEffect({ kind: 'transfer', ref: order.id, body: {} }, tx)
+  return split.refundCents
 }

@@ -2,6 +2,7 @@ import type { Tx } from '@/db/transaction'
 import { describeListing } from '@/server/listings/describe-listing'
 import { tellMember } from '@/server/notices/tell-member'
 import { loadLetterFacts } from '@/server/orders/letters/load-letter-facts'
+import type { LetterFacts, OrderLetter } from '@/server/orders/letters/letter-facts'
 import { orderLetters } from '@/server/orders/letters/order-letters'
 import { noticeKindOf } from '@/server/orders/notice-kinds'
 import { orderCalendar } from '@/server/orders/order-calendar'
@@ -18,6 +19,17 @@ const CHANGES_CALENDAR = new Set(['scheduled', 'cancelled'])
 export async function queueOrderLetters(tx: Tx, edge: EdgeId, order: OrderRow): Promise<void> {
   const write = orderLetters[edge]
   if (!write || (DATE_FOLLOWS.has(edge) && order.windowId !== null)) return
+  await queueLettersOf(tx, { edge, order, write })
+}
+
+interface Told {
+  edge: EdgeId
+  order: OrderRow
+  write: (facts: LetterFacts) => OrderLetter[]
+}
+
+/** The same for letters that need more than the order itself to be written. */
+export async function queueLettersOf(tx: Tx, { edge, order, write }: Told): Promise<void> {
   const facts = await loadLetterFacts(tx, order)
   if (!facts) return
   const { title } = describeListing(facts.terms)

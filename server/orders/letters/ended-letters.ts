@@ -1,4 +1,5 @@
 import { orderTag, orderUrl, type LetterFacts, type OrderLetter } from '@/server/orders/letters/letter-facts'
+import { printCents } from '@/shared/units/money'
 
 type Writer = (facts: LetterFacts) => OrderLetter[]
 
@@ -58,12 +59,6 @@ export const endings = {
     seller:
       'The time to answer passed, so the request has ended and the animals are free again. It counts in your response record.',
   }),
-  buyerCancelled: ended({
-    subject: 'The order was cancelled',
-    buyer: 'You cancelled the order. The order page shows what goes back to your card.',
-    seller:
-      'The buyer cancelled. The animals are free again; what the terms let you keep is shown with the order.',
-  }),
   sellerCancelled: ended({
     subject: 'The seller cancelled the order',
     buyer: `We are sorry. ${ALL_BACK}`,
@@ -117,3 +112,25 @@ export const endings = {
     seller: 'A moderator has decided; the reason and what goes where stand with the order.',
   }),
 } satisfies Record<string, Writer>
+
+/** A buyer has cancelled: what goes back and what is kept, to the cent. */
+export function buyerCancelled(backCents: number): Writer {
+  return (facts) => {
+    const { order } = facts
+    const paidCents =
+      order.firstChargeCents + (order.balancePaidAt && order.payMode === 'deposit' ? order.balanceCents : 0)
+    const kept = paidCents - backCents
+    const back = `${printCents(backCents)} of the ${printCents(paidCents)} you paid goes back to your card. ${BANK}`
+    return ended({
+      subject: 'The order was cancelled',
+      buyer:
+        kept === 0
+          ? `You cancelled the order. ${back}`
+          : `You cancelled the order after its free time. ${back} ${printCents(kept)} of the deposit is kept by the terms you agreed to.`,
+      seller:
+        kept === 0
+          ? 'The buyer cancelled in the free time and gets everything back. The animals are free again.'
+          : `The buyer cancelled late. ${printCents(kept)} of the deposit is yours, less our fee on it. The animals are free again.`,
+    })(facts)
+  }
+}

@@ -209,7 +209,7 @@ const withdrawn: Writer = (facts) => [
   }),
 ]
 
-/** The mails of each edge; an edge without a row sends none. */
+/** The mails of each edge; an edge without a row sends none, or (E15, E24, E56) once its money is decided. */
 export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E02: endings.holdOver,
   E04: requested,
@@ -219,12 +219,10 @@ export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E09: endings.silent,
   E10: withdrawn,
   E14: scheduled,
-  E15: endings.buyerCancelled,
   E16: endings.sellerCancelled,
   E17: endings.neverScheduled,
   E22: ready,
   E23: endings.balanceUnpaid,
-  E24: endings.buyerCancelled,
   E25: endings.sellerCancelled,
   E26: endings.dayMissed,
   E28: scheduled,
@@ -239,5 +237,4 @@ export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E46: endings.stopped,
   E48: endings.stopped,
   E55: endings.sellerCancelled,
-  E56: endings.buyerCancelled,
 }

@@ -93,4 +93,13 @@ describe('the order path', () => {
       expect(whose('buyer') === 'you').toBe(whose('seller') === 'other')
     }
   })
+
+  it('says "You" to the one who ended it', () => {
+    const end = (party: 'buyer' | 'seller' | 'staff', reason: 'buyer_cancelled' | 'seller_no_show') =>
+      orderPath(pickup({ state: 'cancelled', reason, party, clock: null })).move.words
+    expect(end('buyer', 'buyer_cancelled')).toBe('You cancelled.')
+    expect(end('seller', 'buyer_cancelled')).toBe('The buyer cancelled.')
+    expect(end('staff', 'buyer_cancelled')).toBe('The buyer cancelled.')
+    expect(end('seller', 'seller_no_show')).toBe('You were not there. Everything paid went back.')
+  })
 })

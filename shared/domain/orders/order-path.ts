@@ -38,10 +38,16 @@ export function orderPath(facts: PathFacts): OrderPath {
       words: stepWords[step],
       mark: markOf(at, here, facts.state === 'settled'),
     })),
-    move: end === null ? whoseMove(facts) : { whose: 'nobody', words: end },
+    move: end === null ? whoseMove(facts) : { whose: 'nobody', words: asRead(end, facts.party) },
     untilMs: isOver ? null : (facts.clock?.atMs ?? null),
     ifNobodyMoves: isOver ? '' : (silenceWords[(facts.clock?.edge ?? '') as EdgeId] ?? ''),
   }
+}
+
+/** The one who did it reads "You". */
+function asRead(words: string, party: PathFacts['party']): string {
+  if (party === 'staff') return words
+  return words.replace(new RegExp(`^The ${party}\\b`), 'You').replace(/^You was\b/, 'You were')
 }
 
 function stepsOf({ handOver, needsAcceptance, isPooled }: PathFacts): PathStep[] {
