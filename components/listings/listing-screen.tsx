@@ -56,6 +56,7 @@ export function ListingScreen({ listingId, wantedCount, linkedNear }: Props) {
             limits={limits}
             refusal={refusal}
             placeLabel={isElsewhere ? '' : (place?.label ?? '')}
+            near={near}
             onCount={setChosenCount}
             onPlace={() => setChosenNear(undefined)}
           />

@@ -1,3 +1,5 @@
+import { lazy } from 'react'
+
 import { ArrivalPromise } from './arrival-promise'
 import { BatchFacts } from './batch-facts'
 import { CountPicker } from './count-picker'
@@ -19,6 +21,7 @@ import { SellerSummary } from '@/components/sellers/seller-summary'
 import { Banner } from '@/components/ui/banner'
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
+import { LazyPart } from '@/components/ui/lazy-part'
 import { Text } from '@/components/ui/text'
 import { useBreakpoint } from '@/hooks/use-breakpoint'
 import { useCurrentPlace } from '@/hooks/use-current-place'
@@ -31,12 +34,19 @@ interface Props {
   limits: CountLimits
   refusal: Refusal | null
   placeLabel: string
+  /** ZIP or cell that distance and law are shown for. */
+  near: string | undefined
   onCount: (count: number) => void
   /** The reader has chosen a place of their own. */
   onPlace: () => void
 }
 
-export function ListingStory({ listing, count, limits, refusal, placeLabel, onCount, onPlace }: Props) {
+const TripCheck = lazy(() =>
+  import('@/components/tools/tools-group').then((group) => ({ default: group.TripCheck })),
+)
+
+export function ListingStory(props: Props) {
+  const { listing, count, limits, refusal, placeLabel, near, onCount, onPlace } = props
   const units = useUnits()
   const { choose } = useCurrentPlace()
   const { body, gate } = listing
@@ -68,6 +78,11 @@ export function ListingStory({ listing, count, limits, refusal, placeLabel, onCo
                 </Heading>
                 <Text>{body.words}</Text>
               </Card>
+            ) : null}
+            {canBuy ? (
+              <LazyPart label="Loading the trip check">
+                <TripCheck listing={listing} count={count} near={near} />
+              </LazyPart>
             ) : null}
             <BatchFacts body={body} />
             <MoneyTerms body={body} />

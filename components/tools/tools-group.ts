@@ -1,4 +1,5 @@
-// The lazily loaded group of the calculators: the one kind of module that may re-export.
+// The calculators and the trip check as one lazily loaded group: they share the trip engine.
 export { ToolScreen } from './tool-screen'
 export { ToolsHome } from './tools-home'
 export { AboutSources } from './about-sources'
+export { TripCheck } from '@/components/trips/trip-check'
