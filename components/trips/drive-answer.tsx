@@ -101,8 +101,8 @@ function Answered({ drive, answer }: { drive: DriveHome; answer: TripAnswer }) {
         </>
       ) : null}
       <Text size="note" tint="muted">
-        Usual weather, not a forecast. It holds for healthy animals with a day without food; count on less
-        than that. Not veterinary advice.
+        Usual weather, not a forecast. For healthy animals that were not fed before the trip. Not veterinary
+        advice.
       </Text>
     </>
   )

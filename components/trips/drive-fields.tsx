@@ -78,7 +78,7 @@ export function DriveFields({ listing, distanceKm, typed, onTyped }: Props) {
       />
       <NumberField
         label="Hours on the way"
-        hint={`${aboutDistance(distanceKm, units)} as the crow flies; we reckon a quarter more, at 45 mph.`}
+        hint={`It is ${aboutDistance(distanceKm, units)} as the crow flies; we reckon a quarter more, at 45 mph.`}
         suffix="h"
         value={typed.hours ?? String(hours)}
         onChangeText={(text) => put({ hours: text })}

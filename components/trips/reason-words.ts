@@ -18,12 +18,16 @@ function figureWords(value: number, unit: string, units: UnitSystem): string {
   return unit === '' || unit === 'ratio' ? printFigure(value) : `${printFigure(value)} ${unit}`
 }
 
-/** "reaches 3.1 mg/L, the limit is 4 mg/L, after 1.5 h"; '' for a reason without figures. */
+const isLeast = (code: Reason['code']) => code === 'not-fasted' || code === 'fasting-unsaid'
+
+/** "here 3.1 mg/L, the limit is 4 mg/L, after 1.5 h"; '' for a reason without figures. */
 export function reasonFigures({ code, value, limit, atHour }: Reason, units: UnitSystem): string {
   const { unit } = reasonTexts[code]
   const parts = [
     value === null ? '' : `here ${figureWords(value, unit, units)}`,
-    limit === null ? '' : `the limit is ${figureWords(limit, unit, units)}`,
+    limit === null
+      ? ''
+      : `${isLeast(code) ? 'it should be at least' : 'the limit is'} ${figureWords(limit, unit, units)}`,
     atHour === null || atHour === 0 ? '' : `after ${printFigure(atHour, 2)} h`,
   ].filter(Boolean)
   return parts.join(', ')

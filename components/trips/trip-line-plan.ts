@@ -11,7 +11,8 @@ export interface LinePlan {
   degreeMarks: { y: number; degreesC: number }[]
 }
 
-export const LINE_VIEW = { width: 640, height: 220, left: 48, right: 12, top: 12, bottom: 28 } as const
+/** Drawn to the pixels it gets, so that its words keep their size: `widthPx` beside these. */
+export const LINE_VIEW = { height: 220, left: 48, right: 16, top: 12, bottom: 28 } as const
 const NIGHT_FROM = 21
 const NIGHT_UNTIL = 6
 const ROOM_C = 2
@@ -22,18 +23,19 @@ interface Asked {
   rangeC: readonly [number, number]
   /** Hour of the day at the beginning, 0-24. */
   departHour: number
+  widthPx: number
 }
 
 /** Where everything of a trip line is drawn. null: nothing to draw. */
-export function planTripLine({ steps, rangeC, departHour }: Asked): LinePlan | null {
+export function planTripLine({ steps, rangeC, departHour, widthPx }: Asked): LinePlan | null {
   const [first, last] = [steps[0], steps.at(-1)]
   if (!first || !last || last.hour <= 0) return null
   const temperatures = steps.map(({ waterC }) => waterC)
   const [low, high] = rangeC
   const bottomC = Math.floor(Math.min(low, ...temperatures) - ROOM_C)
   const topC = Math.ceil(Math.max(high, ...temperatures) + ROOM_C)
-  const { width, height, left, right, top, bottom } = LINE_VIEW
-  const x = (hour: number) => left + (hour / last.hour) * (width - left - right)
+  const { height, left, right, top, bottom } = LINE_VIEW
+  const x = (hour: number) => left + (hour / last.hour) * (widthPx - left - right)
   const y = (degreesC: number) => top + ((topC - degreesC) / (topC - bottomC)) * (height - top - bottom)
   const middle = (low + high) / 2
   const worst = steps.reduce((found, step) =>

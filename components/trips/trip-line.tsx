@@ -1,4 +1,7 @@
-import { LINE_VIEW, planTripLine } from './trip-line-plan'
+import { useState } from 'react'
+import { StyleSheet, View, type LayoutChangeEvent } from 'react-native'
+
+import { LINE_VIEW, planTripLine, type LinePlan } from './trip-line-plan'
 
 import { color, font } from '@/constants/theme'
 import type { TripStep } from '@/shared/domain/transport/trip'
@@ -16,18 +19,27 @@ export interface TripLineProps {
 
 /** The water's temperature along the way inside the animal's band; nights shaded, the worst moment named. */
 export function TripLine({ steps, rangeC, departHour, units, label }: TripLineProps) {
-  const plan = planTripLine({ steps, rangeC, departHour })
-  if (!plan) return null
-  const { width, height, left, right, top, bottom } = LINE_VIEW
+  const [width, setWidth] = useState(0)
+  const plan = width > 0 ? planTripLine({ steps, rangeC, departHour, widthPx: width }) : null
+  const measure = ({ nativeEvent }: LayoutChangeEvent) => setWidth(Math.round(nativeEvent.layout.width))
+  return (
+    <View style={styles.frame} onLayout={measure}>
+      {plan ? <Drawn plan={plan} width={width} units={units} label={label} /> : null}
+    </View>
+  )
+}
+
+interface DrawnProps extends Pick<TripLineProps, 'units' | 'label'> {
+  plan: LinePlan
+  width: number
+}
+
+function Drawn({ plan, width, units, label }: DrawnProps) {
+  const { height, left, right, top, bottom } = LINE_VIEW
   const { worst } = plan
   const isLate = worst.x > width / 2
   return (
-    <svg
-      viewBox={`0 0 ${width} ${height}`}
-      role="img"
-      aria-label={label}
-      style={{ width: '100%', ...font.body }}
-    >
+    <svg width={width} height={height} role="img" aria-label={label} style={font.body}>
       {plan.nights.map((night) => (
         <rect key={night.x} {...night} y={top} height={height - top - bottom} fill={color.sunk} />
       ))}
@@ -46,7 +58,14 @@ export function TripLine({ steps, rangeC, departHour, units, label }: TripLinePr
         </text>
       ))}
       {plan.hourMarks.map(({ x, hour }) => (
-        <text key={hour} x={x} y={height - 8} textAnchor="middle" fontSize={14} fill={color.muted}>
+        <text
+          key={hour}
+          x={x}
+          y={height - 8}
+          textAnchor={x > width - 2 * right ? 'end' : 'middle'}
+          fontSize={14}
+          fill={color.muted}
+        >
           {`${hour} h`}
         </text>
       ))}
@@ -65,3 +84,5 @@ export function TripLine({ steps, rangeC, departHour, units, label }: TripLinePr
     </svg>
   )
 }
+
+const styles = StyleSheet.create({ frame: { minHeight: LINE_VIEW.height } })

@@ -1,0 +1,64 @@
+import type { Page } from 'playwright-core'
+import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest'
+
+import { expectNoAxeViolations, keepShot, openBrowser, type TestBrowser } from '@/tests/support/browser'
+import { pressOn } from '@/tests/support/by-keyboard'
+
+const { origin } = inject('wholeProduct')
+let browser: TestBrowser
+beforeAll(async () => {
+  browser = await openBrowser()
+})
+afterAll(() => browser.close())
+
+async function firstFish(): Promise<{ listingId: string; minOrder: number }> {
+  const answer = await fetch(`${origin}/api/v1/listings?near=45202&within=100&species=bluegill&limit=1`)
+  const { items } = (await answer.json()) as { items: { listingId: string; minOrder: number }[] }
+  const [first] = items
+  if (!first) throw new Error('no bluegill are on sale near Cincinnati')
+  return first
+}
+
+const check = (page: Page) => page.getByRole('region', { name: 'The drive home' })
+
+describe.each([390, 1280])('a beginner at %i px', (width) => {
+  it('sees whether the fish survive the drive, and what changes it', async () => {
+    const { listingId, minOrder } = await firstFish()
+    const page = await browser.openPage({ width, origin, theme: width === 390 ? 'light' : 'dark' })
+    await page.goto(`/listings/${listingId}?near=45202&count=${minOrder}`)
+    await check(page).getByRole('button', { name: 'Check the drive' }).click()
+    const verdict = check(page).getByRole('status')
+    await verdict.getByText('They should arrive well').waitFor()
+    await check(page)
+      .getByRole('img', { name: /^On the (coldest|hottest) day of ten/ })
+      .waitFor()
+    await expectNoAxeViolations(page)
+
+    // Twelve hours in a pail without air: the oxygen is gone long before.
+    await check(page).getByLabel('Hours on the way').fill('12')
+    await verdict.getByText('Not like this').waitFor()
+    await check(page).getByText('The water falls below the least oxygen this animal stands.').waitFor()
+    await check(page).getByRole('button', { name: 'Show the figures' }).click()
+    const table = check(page).getByRole('table', { name: 'The way, hour by hour' })
+    expect(await table.getByRole('row').count()).toBeGreaterThan(5)
+    await expectNoAxeViolations(page)
+    await keepShot(page, `drive-${width}`)
+
+    await check(page).getByLabel('Hours on the way').fill('a while')
+    await check(page).getByText('A figure, like 0.75.').waitFor()
+  })
+})
+
+it('a calculator answers with the keyboard alone, and says where from', async () => {
+  const page = await browser.openPage({ width: 390, origin })
+  await page.goto('/tools')
+  await page.getByRole('list', { name: 'Calculators' }).waitFor()
+  await expectNoAxeViolations(page)
+  await pressOn(page, /^Ammonia: how much of it harms/)
+  await page.getByText('Share of the total').waitFor()
+  await pressOn(page, 'Yes', 'Space')
+  await page.getByLabel('pH').fill('8.0')
+  await page.getByText('5.37 %').waitFor()
+  await page.getByText(/Emerson/).waitFor()
+  await expectNoAxeViolations(page)
+})
