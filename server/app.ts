@@ -19,6 +19,7 @@ import { orderRoutes } from '@/server/orders/order-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
 import { placeRoutes } from '@/server/places/place-routes'
+import { ratingRoutes } from '@/server/ratings/rating-routes'
 import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
 import { shareRoutes } from '@/server/share/share-routes'
@@ -38,7 +39,7 @@ function api(origins: string[]): Router {
   router.use(express.json({ limit: '256kb', strict: true }))
   router.use(placeRoutes(), memberRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
   router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
-  router.use(moderationRoutes(), noticeRoutes())
+  router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
   router.use(unknownPath)
   return router
 }

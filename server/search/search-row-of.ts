@@ -2,6 +2,7 @@ import { dayOf } from '@/server/listings/day-of'
 import { categoryCode } from '@/server/search/category-codes'
 import { dayNumber, packOpenDays } from '@/server/search/open-days'
 import type { ListingFacts, OpenWindow } from '@/server/search/projection-store'
+import { meanRating } from '@/server/ratings/mean-rating'
 import { ratingRank } from '@/server/search/rating-rank'
 import { NO_LANE, type SearchRow, type SearchTier } from '@/server/search/search-row'
 import { findSpecies } from '@/shared/domain/species/find-species'
@@ -30,7 +31,7 @@ export function searchRowOf(facts: ListingFacts, around: Around): SearchRow | nu
   const { body, free } = facts
   const days = packOpenDays(around.windows.map(({ startsAt, zone }) => dayNumber(dayOf(startsAt, zone))))
   if (!days || free < body.minOrder) return null
-  const mean = facts.ratingCount > 0 ? facts.ratingSum / facts.ratingCount : 0
+  const mean = meanRating(facts)
   return {
     listingId: facts.listingId,
     sellerId: facts.sellerId,

@@ -38,6 +38,12 @@ export interface Endpoints {
   withdrawRequest: typeof import('@/shared/contracts/orders').withdrawRequest
   uploadPhoto: typeof import('@/shared/contracts/photos').uploadPhoto
   findPlaces: typeof import('@/shared/contracts/places').findPlaces
+  answerSurvival: typeof import('@/shared/contracts/ratings').answerSurvival
+  changeRating: typeof import('@/shared/contracts/ratings').changeRating
+  hideRatingWords: typeof import('@/shared/contracts/ratings').hideRatingWords
+  listRatings: typeof import('@/shared/contracts/ratings').listRatings
+  rateOrder: typeof import('@/shared/contracts/ratings').rateOrder
+  replyToRating: typeof import('@/shared/contracts/ratings').replyToRating
   countFacets: typeof import('@/shared/contracts/search').countFacets
   findPins: typeof import('@/shared/contracts/search').findPins
   searchListings: typeof import('@/shared/contracts/search').searchListings
@@ -88,6 +94,12 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   withdrawRequest: ['POST', '/orders/:orderId/withdrawal', false],
   uploadPhoto: ['POST', '/photos', true],
   findPlaces: ['GET', '/places', false],
+  answerSurvival: ['POST', '/orders/:orderId/survival', false],
+  changeRating: ['PATCH', '/orders/:orderId/rating', false],
+  hideRatingWords: ['POST', '/moderation/ratings/:ratingId/hiding', false],
+  listRatings: ['GET', '/sellers/:sellerId/ratings', false],
+  rateOrder: ['POST', '/orders/:orderId/rating', false],
+  replyToRating: ['POST', '/orders/:orderId/rating/reply', false],
   countFacets: ['GET', '/listing-facets', false],
   findPins: ['GET', '/listing-pins', false],
   searchListings: ['GET', '/listings', false],

@@ -1,6 +1,7 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
+import { survivalRecord } from '@/shared/contracts/ratings'
 import { line, publicIdText, stateCode, words, zipCode, zoneName } from '@/shared/contracts/values'
 
 export const sellerKinds = ['hatchery', 'grower'] as const
@@ -62,6 +63,7 @@ export const sellerCard = z.object({
   placeText: z.string(),
   state: stateCode,
   rating: z.object({ mean: z.number(), count: z.int() }).optional(),
+  survival: survivalRecord.optional(),
   answerRate: z.object({ inTime: z.int(), asked: z.int() }).optional(),
   since: z.string(),
 })
@@ -113,6 +115,8 @@ export const readSeller = endpoint({
   params: z.object({ sellerId: publicIdText }),
   reply: sellerCard.extend({
     about: z.string(),
+    /** Mean of each mark; absent before the first rating. */
+    marks: z.object({ fish: z.number(), count: z.number(), contact: z.number() }).optional(),
     licences: z.array(z.object({ state: stateCode, answer: z.string() })),
   }),
 })

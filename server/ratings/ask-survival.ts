@@ -1,0 +1,34 @@
+import { inTransaction } from '@/db/transaction'
+import { now } from '@/server/clock'
+import { queueMail } from '@/server/mail/queue-mail'
+import { loadLetterFacts } from '@/server/orders/letters/load-letter-facts'
+import { readOrderById } from '@/server/orders/order-store'
+import { lockSeller } from '@/server/ratings/rating-store'
+import { survivalLetter } from '@/server/ratings/survival-letter'
+import {
+  listDueSurvival,
+  markAsked,
+  recountSurvival,
+  type SurvivalRow,
+} from '@/server/ratings/survival-store'
+
+const MOST_AT_A_TIME = 100
+
+/** Marks the question asked and queues its mail in one transaction: never twice, and never lost. */
+async function ask({ orderId, sellerId, handedOver }: SurvivalRow): Promise<void> {
+  await inTransaction(async (tx) => {
+    await lockSeller(tx, sellerId)
+    if (!(await markAsked(tx, orderId, now()))) return
+    await recountSurvival(tx, sellerId)
+    const order = await readOrderById(orderId, tx)
+    const facts = order ? await loadLetterFacts(tx, order) : null
+    if (facts) await queueMail(survivalLetter(facts, handedOver), tx)
+  })
+}
+
+/** Asks the buyers whose day 7 has come. Returns how many there were. */
+export async function askSurvival(): Promise<number> {
+  const due = await listDueSurvival(now(), MOST_AT_A_TIME)
+  for (const row of due) await ask(row)
+  return due.length
+}
