@@ -7,6 +7,7 @@ import { refreshQuietPayments } from '@/server/money/refresh-payment'
 import { remindPickups } from '@/server/notices/remind-pickups'
 import { askSurvival } from '@/server/ratings/ask-survival'
 import { runEffects } from '@/server/outbox/run-effects'
+import { refreshSiteMean } from '@/server/search/refresh-site-mean'
 
 const SECOND = 1000
 const HOUR = 3600 * SECOND
@@ -20,6 +21,7 @@ export function jobsOf(): Job[] {
     { name: 'reminders', everyMs: 20 * SECOND, run: remindPickups },
     { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
     { name: 'survival-questions', everyMs: 60 * SECOND, run: askSurvival },
+    { name: 'site-mean', everyMs: HOUR, run: refreshSiteMean },
     { name: 'quiet-payments', everyMs: 10 * SECOND, run: refreshQuietPayments },
     {
       name: 'forget',

@@ -2,6 +2,7 @@ import { eq } from 'drizzle-orm'
 import type TestAgent from 'supertest/lib/agent'
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
+import { listingSearch } from '@/db/schema/listing-search'
 import { auditLog } from '@/db/schema/moderation'
 import { rating as ratingTable } from '@/db/schema/ratings'
 import { inTransaction } from '@/db/transaction'
@@ -11,6 +12,7 @@ import { buildSeller } from '@/seed/build-seller'
 import { now } from '@/server/clock'
 import { askSurvival } from '@/server/ratings/ask-survival'
 import { projectListings } from '@/server/search/project-listings'
+import { refreshSiteMean } from '@/server/search/refresh-site-mean'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import type { ShownRating } from '@/shared/contracts/ratings'
 import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
@@ -345,5 +347,20 @@ describe('search by "best rated"', () => {
     expect(high).toBeGreaterThanOrEqual(0)
     expect(high).toBeLessThan(rivalsNow)
     expect(lastNow).toBeGreaterThan(rivalsNow)
+  })
+
+  it('ranks anew when the mean of the whole site has moved', async () => {
+    const rankOf = async (id: number) =>
+      (await desk.db.select().from(listingSearch).where(eq(listingSearch.listingId, id)))[0]?.ratingRank
+    const member = await buildMember(desk.db, { email: 'few@example.org' })
+    const seller = await buildSeller(desk.db, { member, rating: { count: 1, sum: 5 } })
+    const built = await buildBatch(desk.db, { seller, name: 'few-ratings', at: now() })
+    await inTransaction((tx) => projectListings(tx, [built.id]))
+    const before = (await rankOf(built.id)) ?? -1
+    const many = await buildMember(desk.db, { email: 'many@example.org' })
+    await buildSeller(desk.db, { member: many, rating: { count: 1000, sum: 2000 } })
+    expect(await refreshSiteMean()).toBeGreaterThan(0)
+    expect(await rankOf(built.id)).toBeGreaterThan(before)
+    expect(await refreshSiteMean()).toBe(0)
   })
 })
