@@ -22,6 +22,7 @@ import { placeRoutes } from '@/server/places/place-routes'
 import { ratingRoutes } from '@/server/ratings/rating-routes'
 import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
+import { sessionRoutes } from '@/server/sessions/session-routes'
 import { shareRoutes } from '@/server/share/share-routes'
 import { tripRoutes } from '@/server/trips/trip-routes'
 import { stripeEvents } from '@/server/stripe-events/stripe-events'
@@ -37,7 +38,7 @@ function api(origins: string[]): Router {
   const router = Router()
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
-  router.use(placeRoutes(), memberRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
+  router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
   router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
   router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
   router.use(unknownPath)

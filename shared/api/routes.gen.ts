@@ -52,6 +52,9 @@ export interface Endpoints {
   readOwnFarm: typeof import('@/shared/contracts/sellers').readOwnFarm
   readSeller: typeof import('@/shared/contracts/sellers').readSeller
   startPayouts: typeof import('@/shared/contracts/sellers').startPayouts
+  endOtherSessions: typeof import('@/shared/contracts/sessions').endOtherSessions
+  endSession: typeof import('@/shared/contracts/sessions').endSession
+  listSessions: typeof import('@/shared/contracts/sessions').listSessions
   readWayHome: typeof import('@/shared/contracts/trips').readWayHome
 }
 
@@ -108,5 +111,8 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   readOwnFarm: ['GET', '/sellers/mine', false],
   readSeller: ['GET', '/sellers/:sellerId', false],
   startPayouts: ['POST', '/sellers/mine/payout-onboarding', false],
+  endOtherSessions: ['DELETE', '/me/sessions', false],
+  endSession: ['DELETE', '/me/sessions/:sessionId', false],
+  listSessions: ['GET', '/me/sessions', false],
   readWayHome: ['GET', '/listings/:listingId/way-home', false],
 }
