@@ -11,6 +11,7 @@ import {
   recountSurvival,
   type SurvivalRow,
 } from '@/server/ratings/survival-store'
+import { ratingTimes } from '@/shared/domain/ratings/rating-times.facts'
 
 const MOST_AT_A_TIME = 100
 
@@ -26,9 +27,11 @@ async function ask({ orderId, sellerId, handedOver }: SurvivalRow): Promise<void
   })
 }
 
-/** Asks the buyers whose day 7 has come. Returns how many there were. */
+/** Asks the buyers whose day 7 has come, while an answer can still be given. Returns how many there were. */
 export async function askSurvival(): Promise<number> {
-  const due = await listDueSurvival(now(), MOST_AT_A_TIME)
+  const at = now()
+  const from = new Date(at.getTime() - ratingTimes.survivalOpenMs)
+  const due = await listDueSurvival({ from, at }, MOST_AT_A_TIME)
   for (const row of due) await ask(row)
   return due.length
 }

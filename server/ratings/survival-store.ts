@@ -1,4 +1,4 @@
-import { and, asc, eq, inArray, isNotNull, isNull, lte, sql } from 'drizzle-orm'
+import { and, asc, eq, gt, inArray, isNotNull, isNull, lte, sql } from 'drizzle-orm'
 
 import { db, type Tx } from '@/db/client'
 import { order } from '@/db/schema/orders'
@@ -25,13 +25,23 @@ export async function setSurvival(tx: Tx, orderId: number, change: Partial<Survi
   await tx.update(survival).set(change).where(eq(survival.orderId, orderId))
 }
 
-/** Orders whose day 7 has come and whose buyer was not asked. A frozen order waits. */
-export async function listDueSurvival(at: Date, most: number): Promise<SurvivalRow[]> {
+/** Orders whose day 7 came since `from` and whose buyer was not asked. A frozen order waits. */
+export async function listDueSurvival(
+  { from, at }: { from: Date; at: Date },
+  most: number,
+): Promise<SurvivalRow[]> {
   const rows = await db()
     .select({ survival })
     .from(survival)
     .innerJoin(order, eq(order.id, survival.orderId))
-    .where(and(isNull(survival.askedAt), lte(survival.dueAt, at), eq(order.freeze, 'none')))
+    .where(
+      and(
+        isNull(survival.askedAt),
+        gt(survival.dueAt, from),
+        lte(survival.dueAt, at),
+        eq(order.freeze, 'none'),
+      ),
+    )
     .orderBy(asc(survival.dueAt))
     .limit(most)
   return rows.map((row) => row.survival)

@@ -303,9 +303,13 @@ describe('the seventh day', () => {
     expect((await seen()).survival?.alive).toBe(0)
   })
 
-  it('is not answered for weeks later', async () => {
-    const { answer } = await handedOver()
+  it('is neither asked nor answered for weeks later', async () => {
+    const { answer, seen } = await handedOver()
     await inDays(7 + 14.1)
+    const before = asked()
+    await run()
+    expect(asked()).toBe(before)
+    expect((await seen()).may).not.toContain('answer-survival')
     expect((await answer(25)).body.type).toBe('/problems/rating-closed')
   })
 })
