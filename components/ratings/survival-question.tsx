@@ -39,7 +39,7 @@ export function SurvivalQuestion({ orderId, survival, mayAnswer, zone }: Props) 
         <>
           <ActFailed error={answer.error} />
           <NumberField
-            label={`How many of the ${printCount(handedOver)} are alive now?`}
+            label={`How many of the ${printCount(handedOver)} ${told ? 'were alive after 7 days' : 'are alive now'}?`}
             hint={`Roughly is fine, and so is 0. ${told ? 'You can correct it' : 'You can answer'} until ${printDay(openUntil, zone)}.`}
             value={typed}
             onChangeText={setTyped}
