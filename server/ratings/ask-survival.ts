@@ -1,8 +1,5 @@
 import { inTransaction } from '@/db/transaction'
 import { now } from '@/server/clock'
-import { queueMail } from '@/server/mail/queue-mail'
-import { loadLetterFacts } from '@/server/orders/letters/load-letter-facts'
-import { readOrderById } from '@/server/orders/order-store'
 import { lockSeller } from '@/server/ratings/rating-store'
 import { survivalLetter } from '@/server/ratings/survival-letter'
 import {
@@ -11,19 +8,18 @@ import {
   recountSurvival,
   type SurvivalRow,
 } from '@/server/ratings/survival-store'
+import { tellParty } from '@/server/ratings/tell-party'
 import { ratingTimes } from '@/shared/domain/ratings/rating-times.facts'
 
 const MOST_AT_A_TIME = 100
 
-/** Marks the question asked and queues its mail in one transaction: never twice, and never lost. */
+/** Marks the question asked and queues its notice and mail in one transaction: never twice, and never lost. */
 async function ask({ orderId, sellerId, handedOver }: SurvivalRow): Promise<void> {
   await inTransaction(async (tx) => {
     await lockSeller(tx, sellerId)
     if (!(await markAsked(tx, orderId, now()))) return
     await recountSurvival(tx, sellerId)
-    const order = await readOrderById(orderId, tx)
-    const facts = order ? await loadLetterFacts(tx, order) : null
-    if (facts) await queueMail(survivalLetter(facts, handedOver), tx)
+    await tellParty(tx, { kind: 'day-seven', orderId }, (facts) => survivalLetter(facts, handedOver))
   })
 }
 

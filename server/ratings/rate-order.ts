@@ -12,7 +12,9 @@ import {
   setRating,
   type RatingRow,
 } from '@/server/ratings/rating-store'
+import { ratedLetter } from '@/server/ratings/rating-letters'
 import { recountSeller } from '@/server/ratings/recount-seller'
+import { tellParty } from '@/server/ratings/tell-party'
 import type { ParsedBody } from '@/shared/api/endpoint'
 import { Problem } from '@/shared/api/problem'
 import type { Endpoints } from '@/shared/api/routes.gen'
@@ -60,6 +62,7 @@ export async function rateOrder(caller: Caller, orderId: string, asked: Asked): 
       buyerId: caller.memberId,
       createdAt: now(),
     })
+    await tellParty(tx, { kind: 'rated', orderId: order.id }, ratedLetter)
   })
 }
 

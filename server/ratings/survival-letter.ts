@@ -2,8 +2,8 @@ import type { Letter } from '@/server/mail/letter'
 import { orderTag, orderUrl, type LetterFacts } from '@/server/orders/letters/letter-facts'
 import { printCount } from '@/shared/units/count'
 
-/** The question of day 7, to the buyer alone. */
-export function survivalLetter(facts: LetterFacts, handedOver: number): Letter {
+/** The question of day 7, to the buyer alone. A reminder like the others: who takes none finds it among the notices. */
+export function survivalLetter(facts: LetterFacts, handedOver: number) {
   return {
     to: facts.buyer,
     subject: `How many of your ${printCount(handedOver)} are alive?`,
@@ -20,5 +20,6 @@ export function survivalLetter(facts: LetterFacts, handedOver: number): Letter {
         text: 'All answers are added up on the seller’s page, good and bad. This is the only time we ask.',
       },
     ],
-  }
+    optional: { list: 'reminders', memberId: facts.buyer.memberId },
+  } satisfies Letter
 }

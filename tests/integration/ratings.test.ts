@@ -13,6 +13,7 @@ import { now } from '@/server/clock'
 import { askSurvival } from '@/server/ratings/ask-survival'
 import { projectListings } from '@/server/search/project-listings'
 import { refreshSiteMean } from '@/server/search/refresh-site-mean'
+import type { ShownNotice } from '@/shared/contracts/notices'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import type { ShownRating } from '@/shared/contracts/ratings'
 import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
@@ -173,6 +174,13 @@ describe('rating an order', () => {
     expect([second.status, second.body.type]).toEqual([409, '/problems/rating-closed'])
     expect((await ratings()).items[0]?.reply?.words).toBe('Thank you, Bea.')
     expect((await seen()).rating?.reply?.words).toBe('Thank you, Bea.')
+    await desk.quiet()
+    const told = async (by: TestAgent, kind: string) =>
+      ((await by.get('/api/v1/notices').expect(200)).body.items as ShownNotice[]).filter(
+        (notice) => notice.kind === kind && path.endsWith(notice.about.id),
+      )
+    expect(await told(hatchery, 'rated')).toHaveLength(1)
+    expect(await told(bea, 'rating-reply')).toHaveLength(1)
   })
 
   it('keeps scripts and tags as the text they are', async () => {
