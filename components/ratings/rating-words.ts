@@ -1,4 +1,5 @@
-import type { HidingReason, Marks, SurvivalRecord } from '@/shared/contracts/ratings'
+import type { HidingReason, Marks } from '@/shared/contracts/ratings'
+import type { SurvivalRecord } from '@/shared/contracts/sellers'
 import { printCount } from '@/shared/units/count'
 
 export const markNames: Record<keyof Marks, string> = {

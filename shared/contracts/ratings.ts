@@ -39,15 +39,6 @@ export const shownSurvival = z.object({
 })
 export type ShownSurvival = z.output<typeof shownSurvival>
 
-/** What all of a seller's day-7 answers say. */
-export const survivalRecord = z.object({
-  alive: z.int(),
-  handedOver: z.int(),
-  answered: z.int(),
-  asked: z.int(),
-})
-export type SurvivalRecord = z.output<typeof survivalRecord>
-
 const orderParams = z.object({ orderId: publicIdText })
 const ratingBody = z.object({ marks, words: words(MOST_WORDS).default('') }).strict()
 

@@ -1,7 +1,6 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
-import { survivalRecord } from '@/shared/contracts/ratings'
 import { line, publicIdText, stateCode, words, zipCode, zoneName } from '@/shared/contracts/values'
 
 export const sellerKinds = ['hatchery', 'grower'] as const
@@ -54,6 +53,15 @@ export const ownSeller = z.object({
   payouts: z.enum(['not-started', 'unfinished', 'ready']),
 })
 export type OwnSeller = z.output<typeof ownSeller>
+
+/** What all of a seller's day-7 answers say. */
+export const survivalRecord = z.object({
+  alive: z.int(),
+  handedOver: z.int(),
+  answered: z.int(),
+  asked: z.int(),
+})
+export type SurvivalRecord = z.output<typeof survivalRecord>
 
 /** The public face: no street, no phone, the place as a cell. */
 export const sellerCard = z.object({
