@@ -27,7 +27,9 @@ export async function answerSurvival(caller: Caller, orderId: string, alive: num
       throw new Problem('fields-invalid', detail, { errors: [{ pointer: '#/alive', detail }] })
     }
     const at = now()
-    const change = survival.answeredAt ? { alive, correctedAt: at } : { alive, answeredAt: at }
+    // Who answers before the runner has asked needs no mail any more, and counts as asked.
+    const first = { alive, answeredAt: at, askedAt: survival.askedAt ?? at }
+    const change = survival.answeredAt ? { alive, correctedAt: at } : first
     await setSurvival(tx, order.id, change)
     await recountSurvival(tx, order.sellerId)
     return presentSurvival({ ...survival, ...change })

@@ -311,6 +311,18 @@ describe('the seventh day', () => {
     expect((await seen()).survival?.alive).toBe(0)
   })
 
+  it('is not mailed any more to a buyer who answered before the runner came round', async () => {
+    const { answer } = await handedOver()
+    await inDays(7.1)
+    const before = { mails: asked(), record: (await record()).survival }
+    expect((await answer(25)).status).toBe(200)
+    await run()
+    const { survival } = await record()
+    expect(survival.asked - before.record.asked).toBe(1)
+    expect(survival.answered - before.record.answered).toBe(1)
+    expect(asked()).toBe(before.mails)
+  })
+
   it('is neither asked nor answered for weeks later', async () => {
     const { answer, seen } = await handedOver()
     await inDays(7 + 14.1)
