@@ -40,7 +40,7 @@ export interface SignedIn {
 
 interface AuthActs {
   signUp: { input: { name: string; email: string; password: string; callbackURL: string }; reply: object }
-  signIn: { input: { email: string; password: string }; reply: SignedIn }
+  signIn: { input: { email: string; password: string; callbackURL: string }; reply: SignedIn }
   signOut: { input: object; reply: object }
   askReset: { input: { email: string; redirectTo: string }; reply: object }
   reset: { input: { newPassword: string; token: string }; reply: object }
@@ -49,6 +49,11 @@ interface AuthActs {
   verifyCode: { input: { code: string }; reply: object }
   verifyBackupCode: { input: { code: string }; reply: object }
   stopSecondFactor: { input: { password: string }; reply: object }
+  changeEmail: { input: { newEmail: string; currentPassword: string; callbackURL: string }; reply: object }
+  changePassword: {
+    input: { currentPassword: string; newPassword: string; revokeOtherSessions: true }
+    reply: object
+  }
 }
 
 const PATHS: Record<keyof AuthActs, string> = {
@@ -62,9 +67,11 @@ const PATHS: Record<keyof AuthActs, string> = {
   verifyCode: '/two-factor/verify-totp',
   verifyBackupCode: '/two-factor/verify-backup-code',
   stopSecondFactor: '/two-factor/disable',
+  changeEmail: '/change-email',
+  changePassword: '/change-password',
 }
 
-// Plain calls instead of better-auth's browser client: it would put 25 kB into the first load for ten requests.
+// Plain calls instead of better-auth's browser client: it would put 25 kB into the first load for twelve requests.
 /** One act of signing in or out; afterwards everything known about the member before is forgotten. */
 export function useAuthAct<A extends keyof AuthActs>(act: A) {
   const client = useQueryClient()

@@ -77,7 +77,11 @@ export async function buildSeller(db: Tx, wish: SellerWish): Promise<BuiltSeller
       licences: wish.licences ?? [{ state: zip.state, answer: 'have', number: `${zip.state}-A 1142` }],
       ...payoutColumns(wish),
       ratingCount: wish.rating?.count ?? 0,
-      ratingSum: wish.rating?.sum ?? 0,
+      // Three equal marks a rating.
+      ratingSum: 3 * (wish.rating?.sum ?? 0),
+      fishMarkSum: wish.rating?.sum ?? 0,
+      countMarkSum: wish.rating?.sum ?? 0,
+      contactMarkSum: wish.rating?.sum ?? 0,
       createdAt: at,
       updatedAt: at,
     })

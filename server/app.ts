@@ -19,8 +19,10 @@ import { orderRoutes } from '@/server/orders/order-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
 import { placeRoutes } from '@/server/places/place-routes'
+import { ratingRoutes } from '@/server/ratings/rating-routes'
 import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
+import { sessionRoutes } from '@/server/sessions/session-routes'
 import { shareRoutes } from '@/server/share/share-routes'
 import { tripRoutes } from '@/server/trips/trip-routes'
 import { stripeEvents } from '@/server/stripe-events/stripe-events'
@@ -36,9 +38,9 @@ function api(origins: string[]): Router {
   const router = Router()
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
-  router.use(placeRoutes(), memberRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
+  router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
   router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
-  router.use(moderationRoutes(), noticeRoutes())
+  router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
   router.use(unknownPath)
   return router
 }

@@ -1,4 +1,5 @@
 // The lazily loaded group of signing in and of Me: one chunk, imported only through lazy().
+export { AccountHome } from './account-home'
 export { AskResetForm } from './ask-reset-form'
 export { EmailLanding } from './email-landing'
 export { ResetForm } from './reset-form'

@@ -29,7 +29,12 @@ export function SignInForm({ returnTo }: Props) {
     const missing = values.password === '' ? 'Please give your password.' : undefined
     if (refuse({ email: emailFault(values.email), password: missing })) return
     try {
-      const reply = await signIn.mutateAsync({ email: values.email.trim(), password: values.password })
+      const reply = await signIn.mutateAsync({
+        email: values.email.trim(),
+        password: values.password,
+        // Where the link of a confirming mail ends, should the address not be confirmed yet.
+        callbackURL: '/verify-email',
+      })
       const next = { pathname: '/second-factor', params: { returnTo: String(returnTo) } } as const
       router.replace(reply.twoFactorRedirect ? next : returnTo)
     } catch (error) {

@@ -28,10 +28,12 @@ export function useTypedForm<Name extends string>(first: Record<Name, string>) {
     if (isRefused) setAttempt((before) => before + 1)
     return isRefused
   }
+  /** Empties the fields after the act: passwords do not stay on the screen. */
+  const clear = () => setValues(first)
   const summary: FormError[] = names.flatMap((name) => {
     const message = errors[name]
     return message ? [{ fieldId: `${id}-${name}`, message }] : []
   })
   if (errors.form) summary.push({ message: errors.form })
-  return { values, field, refuse, summary, attempt }
+  return { values, field, refuse, summary, attempt, clear }
 }

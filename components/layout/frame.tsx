@@ -7,12 +7,14 @@ import { Rail } from './rail'
 import { SkipLink } from './skip-link'
 
 import { color } from '@/constants/theme'
+import { useAccountTheme } from '@/hooks/use-account-theme'
 import { useBreakpoint } from '@/hooks/use-breakpoint'
 
 /** The rail stands beside every page; the phone's bar only under the places themselves. */
 export function Frame({ children }: { children: ReactNode }) {
   const breakpoint = useBreakpoint()
   useNotedFirstPage()
+  useAccountTheme()
   const isAtPlace = useSegments()[0] === '(tabs)'
   return (
     <View style={[styles.frame, breakpoint === 'phone' ? styles.column : styles.row]}>

@@ -6,10 +6,9 @@ import { PlaceSetting } from './place-setting'
 import { RoleLinks } from './role-links'
 import { SecurityCard } from './security-card'
 import { SignOut } from './sign-out'
-import { ThemeSetting } from './theme-setting'
-import { UnitsSetting } from './units-setting'
 
 import { NoConnection } from '@/components/listings/no-connection'
+import { ButtonLink } from '@/components/ui/button-link'
 import { Card } from '@/components/ui/card'
 import { ErrorState } from '@/components/ui/error-state'
 import { Link } from '@/components/ui/link'
@@ -45,8 +44,12 @@ export function MemberHome() {
       <RoleLinks me={me} />
       <Card>
         <PlaceSetting place={me.place} />
-        <UnitsSetting units={me.units} />
-        <ThemeSetting />
+        <ButtonLink
+          kind="secondary"
+          icon="lock"
+          href="/account"
+          label="Account: password, e-mail, sign-ins, units"
+        />
       </Card>
       <MailSetting mail={me.mail} />
       <SecurityCard secondFactor={me.secondFactor} />

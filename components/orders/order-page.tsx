@@ -8,6 +8,7 @@ import { OrderFacts } from '@/components/orders/order-facts'
 import { OrderHistory } from '@/components/orders/order-history'
 import { OrderPathLine } from '@/components/orders/order-path-line'
 import { stateWord } from '@/components/orders/state-words'
+import { AfterHandOver } from '@/components/ratings/after-hand-over'
 import { Page } from '@/components/layout/page'
 import { TwoColumns } from '@/components/layout/two-columns'
 import { Badge } from '@/components/ui/badge'
@@ -100,6 +101,7 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
             ) : null}
             {order.handOverCode ? <HandOverCode code={order.handOverCode} /> : null}
             <OrderActs order={order} />
+            <AfterHandOver order={order} />
             <AfterCare order={order} />
             <OrderFacts order={order} />
             <OrderHistory order={order} />

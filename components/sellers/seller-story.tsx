@@ -3,6 +3,8 @@ import { StyleSheet, View } from 'react-native'
 import { answerWords, licenceWords, ratingWords, sinceWords } from './seller-words'
 
 import { FactRows } from '@/components/listings/fact-rows'
+import { markKeys, markNames, survivalWords } from '@/components/ratings/rating-words'
+import { SellerRatings } from '@/components/ratings/seller-ratings'
 import { Banner } from '@/components/ui/banner'
 import { ButtonLink } from '@/components/ui/button-link'
 import { Card } from '@/components/ui/card'
@@ -11,11 +13,21 @@ import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import { useMe } from '@/hooks/use-me'
 import type { ShownSeller } from '@/hooks/use-sellers'
+import { printCount } from '@/shared/units/count'
 import { findState } from '@/shared/domain/rules/find-state'
+
+function markFacts({ marks, rating }: ShownSeller) {
+  if (!marks || !rating) return []
+  return markKeys.map((key) => ({
+    term: markNames[key],
+    value: `${marks[key].toFixed(1)} of 5 (${printCount(rating.count)})`,
+  }))
+}
 
 export function SellerStory({ seller }: { seller: ShownSeller }) {
   const { me } = useMe()
   const answers = answerWords(seller)
+  const survival = survivalWords(seller.survival)
   return (
     <>
       {me?.sellerId === seller.sellerId ? (
@@ -38,6 +50,8 @@ export function SellerStory({ seller }: { seller: ShownSeller }) {
             term: 'Ratings',
             value: `${ratingWords(seller)}. Only buyers who were handed their animals can rate.`,
           },
+          ...markFacts(seller),
+          { term: 'Day 7', value: survival ? `${survival}.` : undefined },
           { term: 'Answers', value: answers ? `${answers}.` : 'No requests yet.' },
           { term: 'On Tankward', value: `${sinceWords(seller)}.` },
         ]}
@@ -49,6 +63,7 @@ export function SellerStory({ seller }: { seller: ShownSeller }) {
           value: licenceWords(answer),
         }))}
       />
+      <SellerRatings sellerId={seller.sellerId} />
       <View style={styles.acts}>
         <ButtonLink kind="secondary" icon="find" href="/" label="Find listings near you" />
       </View>

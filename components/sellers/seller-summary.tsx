@@ -2,6 +2,7 @@ import { StyleSheet, View } from 'react-native'
 
 import { answerWords, ratingWords, sinceWords } from './seller-words'
 
+import { survivalWords } from '@/components/ratings/rating-words'
 import { Badge } from '@/components/ui/badge'
 import { ButtonLink } from '@/components/ui/button-link'
 import { Card } from '@/components/ui/card'
@@ -13,6 +14,7 @@ import type { SellerCard } from '@/shared/contracts/sellers'
 /** Who sells, on a listing: the record, and the way to the whole page. */
 export function SellerSummary({ seller }: { seller: SellerCard }) {
   const answers = answerWords(seller)
+  const survival = survivalWords(seller.survival)
   return (
     <Card>
       <Heading level={2} size="lead">
@@ -23,6 +25,7 @@ export function SellerSummary({ seller }: { seller: SellerCard }) {
       </Text>
       <View style={styles.badges}>
         <Badge word={ratingWords(seller)} tone="neutral" icon="star" />
+        {survival ? <Badge word={survival} tone="neutral" icon="fish" /> : null}
         {answers ? <Badge word={answers} tone="neutral" icon="clock" /> : null}
         <Badge word={sinceWords(seller)} tone="neutral" icon="calendar" />
       </View>

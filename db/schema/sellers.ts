@@ -34,7 +34,16 @@ export const seller = mysqlTable(
     chargesEnabled: boolean().notNull().default(false),
     payoutsEnabled: boolean().notNull().default(false),
     ratingCount: int({ unsigned: true }).notNull().default(0),
+    /** All marks added up, three a rating. */
     ratingSum: int({ unsigned: true }).notNull().default(0),
+    fishMarkSum: int({ unsigned: true }).notNull().default(0),
+    countMarkSum: int({ unsigned: true }).notNull().default(0),
+    contactMarkSum: int({ unsigned: true }).notNull().default(0),
+    // Day 7: orders asked and answered; animals handed over and alive in the answered ones.
+    survivalAsked: int({ unsigned: true }).notNull().default(0),
+    survivalAnswered: int({ unsigned: true }).notNull().default(0),
+    survivalHandedOver: int({ unsigned: true }).notNull().default(0),
+    survivalAlive: int({ unsigned: true }).notNull().default(0),
     answeredInTime: int({ unsigned: true }).notNull().default(0),
     answersMissed: int({ unsigned: true }).notNull().default(0),
     /** Days promised and missed without a die-off to show for it. */

@@ -47,7 +47,15 @@ function actorOf(
 ): Actor {
   const sells = farms.some((farm) => farm.key === key)
   const roles: Role[] = ['member', ...(staffRole ? [staffRole] : []), ...(sells ? (['seller'] as const) : [])]
-  const caller = { memberId, name, email, emailVerified: true, roles, hasSecondFactor: Boolean(staffRole) }
+  const caller = {
+    memberId,
+    name,
+    email,
+    emailVerified: true,
+    roles,
+    hasSecondFactor: Boolean(staffRole),
+    sessionId: '',
+  }
   return { caller, zip, state }
 }
 

@@ -2,6 +2,7 @@ import { doEffects } from '@/seed/demo/effects'
 import type { ListingDesk } from '@/seed/demo/listing-desk'
 import type { OrderPlan } from '@/seed/demo/plan-orders'
 import { pressButton } from '@/seed/demo/press-button'
+import { planRating } from '@/seed/demo/rating-plan'
 import { need, type Actor } from '@/seed/demo/stage'
 import { ringClocks } from '@/server/jobs/ring-clocks'
 import { readListing } from '@/server/listings/read-listing'
@@ -22,6 +23,10 @@ import { reportNoShow } from '@/server/orders/report-no-show'
 import { reserveBatch } from '@/server/orders/reserve-batch'
 import { stopOrder } from '@/server/orders/stop-order'
 import { withdrawRequest } from '@/server/orders/withdraw-request'
+import { answerSurvival } from '@/server/ratings/answer-survival'
+import { askSurvival } from '@/server/ratings/ask-survival'
+import { rateOrder } from '@/server/ratings/rate-order'
+import { replyToRating } from '@/server/ratings/reply-to-rating'
 import type { ShownOrder } from '@/shared/contracts/orders'
 
 /** A practice card that goes through. */
@@ -41,6 +46,11 @@ export interface OrderDesk {
   /** Two fewer than ordered: both count, and see it. */
   handOverShort: () => Promise<void>
   confirm: () => Promise<void>
+  rate: () => Promise<void>
+  reply: () => Promise<void>
+  /** Day 7: the runner asks, the buyer counts. */
+  askSurvival: () => Promise<void>
+  answerSurvival: () => Promise<void>
   cancelAsBuyer: () => Promise<void>
   cancelAsSeller: () => Promise<void>
   reportBuyerAbsent: () => Promise<void>
@@ -61,6 +71,7 @@ async function payOn(order: ShownOrder, { caller }: Actor): Promise<void> {
 export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator: Actor): OrderDesk {
   const { buyer, batch, quantity, payMode, slot } = plan
   const by = { buyer: buyer.caller, seller: batch.farm.owner.caller } as const
+  const told = planRating(plan.key)
   let placed: ShownOrder | undefined
   const id = () => need(placed, `order ${plan.key}`).orderId
   const act = (name: string, work: (commandId: string) => Promise<unknown>) => async () => {
@@ -101,6 +112,18 @@ export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator:
     handOver: act('hand over', (commandId) => handOverAll(commandId, quantity)),
     handOverShort: act('hand over', (commandId) => handOverAll(commandId, quantity - 2)),
     confirm: act('confirm', (commandId) => confirmGood(by.buyer, id(), commandId)),
+    rate: act('rate', async () => {
+      if (told.rating) await rateOrder(by.buyer, id(), told.rating)
+    }),
+    reply: act('reply', async () => {
+      if (told.rating?.reply) await replyToRating(by.seller, id(), told.rating.reply)
+    }),
+    askSurvival: act('ask survival', () => askSurvival()),
+    answerSurvival: act('answer survival', async () => {
+      const { countHandedOver } = need(await readOrder(id()), plan.key)
+      const alive = Math.round((countHandedOver ?? quantity) * (told.aliveShare ?? 0))
+      if (told.aliveShare !== null) await answerSurvival(by.buyer, id(), alive)
+    }),
     cancelAsBuyer: act('cancel', (commandId) => cancelOrder(by.buyer, id(), { commandId })),
     cancelAsSeller: act('cancel', (commandId) =>
       cancelOrder(by.seller, id(), { commandId, reason: 'die-off', note: 'A pump failed in the night.' }),

@@ -30,6 +30,17 @@ const handedOver = (times: Times, act: 'handOver' | 'handOverShort' = 'handOver'
   ...readied(times),
   [after(times.begins, 14 * MINUTE_MS), act],
 ]
+/** What follows a hand-over, as far as the demo's day has come. */
+const afterwards = ({ begins, now }: Times): Timed[] =>
+  (
+    [
+      [after(begins, 2 * DAY_MS + 3 * HOUR_MS), 'rate'],
+      [after(begins, 3 * DAY_MS + 9 * HOUR_MS), 'reply'],
+      [after(begins, 7 * DAY_MS + 15 * MINUTE_MS), 'askSurvival'],
+      [after(begins, 7 * DAY_MS + 9 * HOUR_MS), 'answerSurvival'],
+    ] satisfies Timed[]
+  ).filter(([at]) => at < now)
+
 const missed = (times: Times, by: 'buyer' | 'seller'): Timed[] => {
   const reported = by === 'buyer' ? after(times.begins, 25 * MINUTE_MS) : after(times.ends, 62 * MINUTE_MS)
   return [...readied(times), [reported, by === 'buyer' ? 'reportSellerAbsent' : 'reportBuyerAbsent']]
@@ -40,10 +51,15 @@ const cancelled = (times: Times, by: 'buyer' | 'seller', at: Date): Timed[] => [
 ]
 
 const paths: Record<OrderPath, (times: Times) => Timed[]> = {
-  confirmed: (times) => [...handedOver(times), [after(times.begins, 5 * HOUR_MS), 'confirm']],
+  confirmed: (times) => [
+    ...handedOver(times),
+    [after(times.begins, 5 * HOUR_MS), 'confirm'],
+    ...afterwards(times),
+  ],
   'closed-by-time': (times) => [
     ...handedOver(times),
     [after(times.begins, times.claimHours * HOUR_MS + 16 * MINUTE_MS), 'ring'],
+    ...afterwards(times),
   ],
   short: (times) => [
     ...handedOver(times, 'handOverShort'),

@@ -1,11 +1,13 @@
 import { betterAuth } from 'better-auth'
 import { drizzleAdapter } from 'better-auth/adapters/drizzle'
-import { APIError, createAuthMiddleware } from 'better-auth/api'
 import { twoFactor } from 'better-auth/plugins'
 
 import { db } from '@/db/client'
 import * as tables from '@/db/schema/auth'
-import { MOST_PASSWORD, LEAST_PASSWORD, passwordFault } from '@/server/auth/password-fault'
+import { guardAccount, tellAccount } from '@/server/auth/guard-account'
+import { isEmailChange } from '@/server/auth/is-email-change'
+import { MOST_PASSWORD, LEAST_PASSWORD } from '@/server/auth/password-fault'
+import { confirmNewEmailMail } from '@/server/mail/letters/confirm-new-email'
 import { queueMail } from '@/server/mail/queue-mail'
 import { resetPasswordMail } from '@/server/mail/letters/reset-password'
 import { signUpAgainMail } from '@/server/mail/letters/sign-up-again'
@@ -18,7 +20,6 @@ export interface AuthSettings {
   alsoTrusted: string[]
 }
 
-const PASSWORD_PATHS = ['/sign-up/email', '/reset-password', '/change-password']
 const MINUTE = 60
 
 function build(settings: AuthSettings) {
@@ -46,16 +47,24 @@ function build(settings: AuthSettings) {
       sendOnSignIn: true,
       autoSignInAfterVerification: true,
       expiresIn: 60 * MINUTE,
-      sendVerificationEmail: async ({ user, url }) => queueMail(verifyEmailMail({ to: user, url })),
+      sendVerificationEmail: async ({ user, url, token }) =>
+        queueMail(
+          isEmailChange(token) ? confirmNewEmailMail({ to: user, url }) : verifyEmailMail({ to: user, url }),
+        ),
     },
     user: {
+      // Without a confirmation from the old address: who lost that mailbox could never leave it. It is told instead.
+      changeEmail: { enabled: true },
       additionalFields: { role: { type: 'string', required: false, input: false, defaultValue: 'member' } },
     },
     session: {
       expiresIn: 7 * 24 * 60 * MINUTE,
-      updateAge: 24 * 60 * MINUTE,
+      // Also how finely the account page can say when a device was last used.
+      updateAge: 60 * MINUTE,
       cookieCache: { enabled: false },
     },
+    // They would hand session tokens to scripts; server/sessions lists and ends sign-ins by their ids.
+    disabledPaths: ['/list-sessions', '/revoke-session', '/revoke-sessions', '/revoke-other-sessions'],
     rateLimit: {
       enabled: true,
       storage: 'database',
@@ -68,6 +77,9 @@ function build(settings: AuthSettings) {
         '/send-verification-email': { window: 10 * MINUTE, max: 3 },
         '/two-factor/verify-totp': { window: MINUTE, max: 5 },
         '/two-factor/verify-backup-code': { window: MINUTE, max: 5 },
+        '/change-email': { window: 15 * MINUTE, max: 6 },
+        '/change-password': { window: 15 * MINUTE, max: 10 },
+        '/verify-password': { window: 15 * MINUTE, max: 10 },
         '/get-session': false,
       },
     },
@@ -79,18 +91,7 @@ function build(settings: AuthSettings) {
       ipAddress: { ipAddressHeaders: ['x-tankward-ip'] },
     },
     plugins: [twoFactor({ issuer: 'Tankward', skipVerificationOnEnable: false })],
-    hooks: {
-      before: createAuthMiddleware(async (ctx) => {
-        if (!PASSWORD_PATHS.includes(ctx.path)) return
-        const body: unknown = ctx.body
-        if (typeof body !== 'object' || body === null) return
-        const given =
-          'newPassword' in body ? body.newPassword : 'password' in body ? body.password : undefined
-        const email = 'email' in body && typeof body.email === 'string' ? body.email : ''
-        const fault = typeof given === 'string' ? passwordFault(given, email) : null
-        if (fault) throw new APIError('UNPROCESSABLE_ENTITY', { code: 'PASSWORD_TOO_COMMON', message: fault })
-      }),
-    },
+    hooks: { before: guardAccount, after: tellAccount(settings.origin) },
   })
 }
 

@@ -17,7 +17,7 @@ export async function readCaller(req: Request): Promise<Caller | null> {
   if (!req.headers.cookie) return null
   const found = await theAuth().api.getSession({ headers: fromNodeHeaders(req.headers) })
   if (!found) return null
-  const { user } = found
+  const { user, session } = found
   return {
     memberId: user.id,
     name: user.name,
@@ -25,5 +25,6 @@ export async function readCaller(req: Request): Promise<Caller | null> {
     emailVerified: user.emailVerified,
     roles: rolesOf(user.role),
     hasSecondFactor: user.twoFactorEnabled === true,
+    sessionId: session.id,
   }
 }

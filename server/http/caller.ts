@@ -9,6 +9,8 @@ export interface Caller {
   emailVerified: boolean
   roles: Role[]
   hasSecondFactor: boolean
+  /** The sign-in behind this request. */
+  sessionId: string
 }
 
 const STAFF: Role[] = ['moderator', 'admin']

@@ -5,7 +5,9 @@ import { ringClocks } from '@/server/jobs/ring-clocks'
 import { expireListings } from '@/server/listings/expire-listings'
 import { refreshQuietPayments } from '@/server/money/refresh-payment'
 import { remindPickups } from '@/server/notices/remind-pickups'
+import { askSurvival } from '@/server/ratings/ask-survival'
 import { runEffects } from '@/server/outbox/run-effects'
+import { refreshSiteMean } from '@/server/search/refresh-site-mean'
 
 const SECOND = 1000
 const HOUR = 3600 * SECOND
@@ -18,6 +20,8 @@ export function jobsOf(): Job[] {
     { name: 'clocks', everyMs: 2 * SECOND, run: ringClocks },
     { name: 'reminders', everyMs: 20 * SECOND, run: remindPickups },
     { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
+    { name: 'survival-questions', everyMs: 60 * SECOND, run: askSurvival },
+    { name: 'site-mean', everyMs: HOUR, run: refreshSiteMean },
     { name: 'quiet-payments', everyMs: 10 * SECOND, run: refreshQuietPayments },
     {
       name: 'forget',

@@ -24,7 +24,7 @@ async function splitOf(tx: Tx, order: OrderRow): Promise<Settlement> {
 /** E40 (E38): all is good or the window has ended. Splits what is held and queues the one transfer to the seller; null when it was done before. */
 export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<OrderRow | null> {
   const at = now()
-  const { order, applied } = await applyEdge(tx, { ...command, change: { settledAt: at } })
+  const { order, applied } = await applyEdge(tx, { ...command, change: { ...command.change, settledAt: at } })
   if (!applied) return null
   const { transferCents, feeCents, taxCents } = await splitOf(tx, order)
   await changeOrder(tx, order, { feeCents, updatedAt: at })

@@ -11,6 +11,7 @@ import { refundEverything } from '@/server/orders/refund-everything'
 import { showAgain } from '@/server/orders/show-order'
 import { moveStock } from '@/server/orders/stock-store'
 import { now } from '@/server/clock'
+import { openSurvival } from '@/server/ratings/open-survival'
 import { projectListings } from '@/server/search/project-listings'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
@@ -43,10 +44,15 @@ async function moveAnimals(tx: Tx, { order, by, to }: Move): Promise<void> {
   await projectListings(tx, [order.listingId])
 }
 
+/** A hand-over that was decided counts from the end of its window. */
+const handedOverAt = (order: OrderRow) => order.slotEndsAt ?? now()
+
 async function carryOut(tx: Tx, command: EdgeCommand, outcome: Outcome): Promise<void> {
   if (outcome === 'handed-over') {
     const order = await settleOrder(tx, command)
-    if (order) await moveAnimals(tx, { order, by: command.actorId ?? null, to: 'delivered' })
+    if (!order) return
+    await moveAnimals(tx, { order, by: command.actorId ?? null, to: 'delivered' })
+    await openSurvival(tx, order)
     return
   }
   const { order, applied } = await applyEdge(tx, command)
@@ -72,6 +78,7 @@ export async function decideOrder(caller: Caller, orderId: string, asked: Asked)
       actorId: caller.memberId,
       note: asked.note,
       facts: { outcome: asked.outcome },
+      ...(asked.outcome === 'handed-over' ? { change: { handedOverAt: handedOverAt(seen.order) } } : {}),
     }
     await carryOut(tx, command, asked.outcome)
     await writeAudit(

@@ -10,6 +10,7 @@ import { changeOrder, lockOrder, type OrderRow } from '@/server/orders/order-sto
 import { orderSeenBy } from '@/server/orders/party-of'
 import { showAgain } from '@/server/orders/show-order'
 import { moveStock } from '@/server/orders/stock-store'
+import { openSurvival } from '@/server/ratings/open-survival'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
@@ -89,6 +90,7 @@ export async function handOver(caller: Caller, orderId: string, asked: Asked): P
       change: { countHandedOver: asked.count, handedOverAt: now() },
       quantity: Math.min(asked.count, seen.order.quantity),
     })
+    if (applied) await openSurvival(tx, order)
     if (applied && asked.count < order.quantity) await refundShort(tx, order, asked.count)
   })
   return showAgain(seen)

@@ -1,10 +1,11 @@
 import { now } from '@/server/clock'
 import type { OrderRow } from '@/server/orders/order-store'
+import { ratingActsOf, type AfterHandOver, type RatingAct } from '@/server/ratings/rating-policy'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { clockMs } from '@/shared/domain/orders/clocks.facts'
 
 export type Party = ShownOrder['party']
-type OrderAct = ShownOrder['may'][number]
+type OrderAct = Exclude<ShownOrder['may'][number], RatingAct>
 
 const isRunning = (order: OrderRow) => order.freeze === 'none'
 const isBalancePaid = (order: OrderRow) => order.balanceCents === 0 || order.balancePaidAt !== null
@@ -55,8 +56,10 @@ export function mayAct(act: OrderAct, order: OrderRow, party: Party): boolean {
   return isRunning(order) && abilities[act](order, party)
 }
 
-export function actsOf(order: OrderRow, party: Party): OrderAct[] {
-  return (Object.keys(abilities) as OrderAct[]).filter((act) => mayAct(act, order, party))
+/** Every act open to this party now, those after the hand-over included. */
+export function actsOf(order: OrderRow, party: Party, after: AfterHandOver): ShownOrder['may'] {
+  const acts = (Object.keys(abilities) as OrderAct[]).filter((act) => mayAct(act, order, party))
+  return [...acts, ...ratingActsOf({ order, party, ...after })]
 }
 
 /** The true place and phone: for the two parties alone, from `scheduled` until the order is over. */

@@ -13,6 +13,10 @@ import {
   readSellers,
   type SellerRow,
 } from '@/server/orders/party-store'
+import { presentRating, presentSurvival } from '@/server/ratings/present-rating'
+import type { AfterHandOver } from '@/server/ratings/rating-policy'
+import { listRatingsOf } from '@/server/ratings/rating-store'
+import { listSurvivalOf } from '@/server/ratings/survival-store'
 import { promiseWords } from '@/server/orders/promise-words'
 import { readTermsOf } from '@/server/orders/terms-store'
 import type { ListingBody } from '@/shared/contracts/listings'
@@ -28,6 +32,7 @@ interface OrderFacts {
   payments: PaymentRow[]
   balances: Partial<Record<LedgerAccount, number>>
   gate?: GateVerdict
+  after: AfterHandOver
   placeKind?: string
 }
 
@@ -77,6 +82,13 @@ function freedom(order: OrderRow, terms: ListingBody): Pick<ShownOrder, 'freeCan
   return until ? { freeCancelUntil: until.toISOString() } : {}
 }
 
+function afterwards({ after, buyerName }: OrderFacts): Pick<ShownOrder, 'rating' | 'survival'> {
+  return {
+    ...(after.rating ? { rating: presentRating(after.rating, buyerName) } : {}),
+    ...(after.survival ? { survival: presentSurvival(after.survival) } : {}),
+  }
+}
+
 function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrder {
   const { terms, seller } = facts
   const described = describeListing(terms)
@@ -104,6 +116,7 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
     ...(mayMeet(order, party) ? { meeting: { street, city, state, zip, phone } } : {}),
     ...(maySeeCode(order, party) ? { handOverCode: order.handOverCode } : {}),
     ...(order.countHandedOver === null ? {} : { countHandedOver: order.countHandedOver }),
+    ...afterwards(facts),
     arrivalPromise: promiseWords(terms.promise),
     ...(order.clockAt && order.clockEdge
       ? { clock: { at: order.clockAt.toISOString(), edge: order.clockEdge } }
@@ -126,7 +139,7 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
     gate: facts.gate,
     payUrl: payUrlOf(order, party, facts.payments),
     asOf: now().toISOString(),
-    may: actsOf(order, party),
+    may: actsOf(order, party, facts.after),
   }
 }
 
@@ -134,18 +147,31 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
 export async function presentOrders(seen: OrderSeen[]): Promise<ShownOrder[]> {
   const rows = seen.map(({ order }) => order)
   const ids = rows.map((order) => order.id)
-  const [terms, sellers, people, listings, events, payments, balances, evidence, placeKinds] =
-    await Promise.all([
-      readTermsOf(idsOf(rows.map((order) => order.listingVersionId))),
-      readSellers(idsOf(rows.map((order) => order.sellerId))),
-      readPeople(idsOf(rows.map((order) => order.buyerId))),
-      readListingIds(idsOf(rows.map((order) => order.listingId))),
-      listEventsOf(ids),
-      listPaymentsOf(ids),
-      balancesOf(ids),
-      readEvidence(ids),
-      readPlaceKinds(idsOf(rows.map((order) => order.windowId))),
-    ])
+  const [
+    terms,
+    sellers,
+    people,
+    listings,
+    events,
+    payments,
+    balances,
+    evidence,
+    placeKinds,
+    ratings,
+    survivals,
+  ] = await Promise.all([
+    readTermsOf(idsOf(rows.map((order) => order.listingVersionId))),
+    readSellers(idsOf(rows.map((order) => order.sellerId))),
+    readPeople(idsOf(rows.map((order) => order.buyerId))),
+    readListingIds(idsOf(rows.map((order) => order.listingId))),
+    listEventsOf(ids),
+    listPaymentsOf(ids),
+    balancesOf(ids),
+    readEvidence(ids),
+    readPlaceKinds(idsOf(rows.map((order) => order.windowId))),
+    listRatingsOf(ids),
+    listSurvivalOf(ids),
+  ])
   return seen.flatMap((one) => {
     const { order } = one
     const body = terms.get(order.listingVersionId)
@@ -161,6 +187,10 @@ export async function presentOrders(seen: OrderSeen[]): Promise<ShownOrder[]> {
         payments: payments.filter((payment) => payment.orderId === order.id),
         balances: balances.get(order.id) ?? {},
         gate: evidence.find((row) => row.orderId === order.id && row.party === 'buyer')?.shown.verdict,
+        after: {
+          rating: ratings.find((row) => row.orderId === order.id),
+          survival: survivals.find((row) => row.orderId === order.id),
+        },
         placeKind: order.windowId === null ? undefined : placeKinds.get(order.windowId),
       }),
     ]

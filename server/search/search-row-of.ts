@@ -2,8 +2,10 @@ import { dayOf } from '@/server/listings/day-of'
 import { categoryCode } from '@/server/search/category-codes'
 import { dayNumber, packOpenDays } from '@/server/search/open-days'
 import type { ListingFacts, OpenWindow } from '@/server/search/projection-store'
+import { meanRating } from '@/server/ratings/mean-rating'
 import { ratingRank } from '@/server/search/rating-rank'
 import { NO_LANE, type SearchRow, type SearchTier } from '@/server/search/search-row'
+import { siteMean } from '@/server/search/site-mean'
 import { findSpecies } from '@/shared/domain/species/find-species'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 
@@ -30,7 +32,6 @@ export function searchRowOf(facts: ListingFacts, around: Around): SearchRow | nu
   const { body, free } = facts
   const days = packOpenDays(around.windows.map(({ startsAt, zone }) => dayNumber(dayOf(startsAt, zone))))
   if (!days || free < body.minOrder) return null
-  const mean = facts.ratingCount > 0 ? facts.ratingSum / facts.ratingCount : 0
   return {
     listingId: facts.listingId,
     sellerId: facts.sellerId,
@@ -46,7 +47,7 @@ export function searchRowOf(facts: ListingFacts, around: Around): SearchRow | nu
     pickup: true,
     lane: NO_LANE,
     hiddenStates: around.hiddenStates,
-    ratingRank: ratingRank(mean, facts.ratingCount),
+    ratingRank: ratingRank({ mean: meanRating(facts), count: facts.ratingCount }, siteMean()),
     rev: around.rev,
   }
 }

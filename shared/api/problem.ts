@@ -35,6 +35,7 @@ export const problems = {
   'order-moved': { status: 409, title: 'The order has moved on' },
   'code-wrong': { status: 409, title: 'That code does not match' },
   'balance-unpaid': { status: 409, title: 'The balance is not paid yet' },
+  'rating-closed': { status: 409, title: 'This is not open for a rating' },
   'listing-incomplete': { status: 422, title: 'The listing is not complete yet' },
   'version-stale': { status: 409, title: 'It was changed meanwhile' },
   'seller-unready': { status: 409, title: 'The seller is finishing paperwork' },

@@ -38,6 +38,12 @@ export interface Endpoints {
   withdrawRequest: typeof import('@/shared/contracts/orders').withdrawRequest
   uploadPhoto: typeof import('@/shared/contracts/photos').uploadPhoto
   findPlaces: typeof import('@/shared/contracts/places').findPlaces
+  answerSurvival: typeof import('@/shared/contracts/ratings').answerSurvival
+  changeRating: typeof import('@/shared/contracts/ratings').changeRating
+  hideRatingWords: typeof import('@/shared/contracts/ratings').hideRatingWords
+  listRatings: typeof import('@/shared/contracts/ratings').listRatings
+  rateOrder: typeof import('@/shared/contracts/ratings').rateOrder
+  replyToRating: typeof import('@/shared/contracts/ratings').replyToRating
   countFacets: typeof import('@/shared/contracts/search').countFacets
   findPins: typeof import('@/shared/contracts/search').findPins
   searchListings: typeof import('@/shared/contracts/search').searchListings
@@ -46,6 +52,9 @@ export interface Endpoints {
   readOwnFarm: typeof import('@/shared/contracts/sellers').readOwnFarm
   readSeller: typeof import('@/shared/contracts/sellers').readSeller
   startPayouts: typeof import('@/shared/contracts/sellers').startPayouts
+  endOtherSessions: typeof import('@/shared/contracts/sessions').endOtherSessions
+  endSession: typeof import('@/shared/contracts/sessions').endSession
+  listSessions: typeof import('@/shared/contracts/sessions').listSessions
   readWayHome: typeof import('@/shared/contracts/trips').readWayHome
 }
 
@@ -88,6 +97,12 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   withdrawRequest: ['POST', '/orders/:orderId/withdrawal', false],
   uploadPhoto: ['POST', '/photos', true],
   findPlaces: ['GET', '/places', false],
+  answerSurvival: ['POST', '/orders/:orderId/survival', false],
+  changeRating: ['PATCH', '/orders/:orderId/rating', false],
+  hideRatingWords: ['POST', '/moderation/ratings/:ratingId/hiding', false],
+  listRatings: ['GET', '/sellers/:sellerId/ratings', false],
+  rateOrder: ['POST', '/orders/:orderId/rating', false],
+  replyToRating: ['POST', '/orders/:orderId/rating/reply', false],
   countFacets: ['GET', '/listing-facets', false],
   findPins: ['GET', '/listing-pins', false],
   searchListings: ['GET', '/listings', false],
@@ -96,5 +111,8 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   readOwnFarm: ['GET', '/sellers/mine', false],
   readSeller: ['GET', '/sellers/:sellerId', false],
   startPayouts: ['POST', '/sellers/mine/payout-onboarding', false],
+  endOtherSessions: ['DELETE', '/me/sessions', false],
+  endSession: ['DELETE', '/me/sessions/:sessionId', false],
+  listSessions: ['GET', '/me/sessions', false],
   readWayHome: ['GET', '/listings/:listingId/way-home', false],
 }

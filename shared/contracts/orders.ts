@@ -1,6 +1,7 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
+import { shownRating, shownSurvival } from '@/shared/contracts/ratings'
 import { gateVerdict } from '@/shared/contracts/rules'
 import { cents, instantText, line, pageOf, publicIdText } from '@/shared/contracts/values'
 import { cancelReasons, orderStates } from '@/shared/domain/orders/states.facts'
@@ -21,6 +22,10 @@ export const orderActs = [
   'contest',
   'stop',
   'decide',
+  'rate',
+  'change-rating',
+  'reply-to-rating',
+  'answer-survival',
 ] as const
 
 const orderParams = z.object({ orderId: publicIdText })
@@ -74,6 +79,8 @@ export const shownOrder = z.object({
   /** The buyer's code: shown once nothing is left to pay. */
   handOverCode: z.string().optional(),
   countHandedOver: z.int().optional(),
+  rating: shownRating.optional(),
+  survival: shownSurvival.optional(),
   arrivalPromise: z.string(),
   clock: z.object({ at: instantText, edge: z.string() }).optional(),
   /** Until when the buyer may cancel and get everything back; absent where that is always so. */

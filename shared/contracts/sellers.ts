@@ -54,6 +54,15 @@ export const ownSeller = z.object({
 })
 export type OwnSeller = z.output<typeof ownSeller>
 
+/** What all of a seller's day-7 answers say. */
+export const survivalRecord = z.object({
+  alive: z.int(),
+  handedOver: z.int(),
+  answered: z.int(),
+  asked: z.int(),
+})
+export type SurvivalRecord = z.output<typeof survivalRecord>
+
 /** The public face: no street, no phone, the place as a cell. */
 export const sellerCard = z.object({
   sellerId: publicIdText,
@@ -62,6 +71,7 @@ export const sellerCard = z.object({
   placeText: z.string(),
   state: stateCode,
   rating: z.object({ mean: z.number(), count: z.int() }).optional(),
+  survival: survivalRecord.optional(),
   answerRate: z.object({ inTime: z.int(), asked: z.int() }).optional(),
   since: z.string(),
 })
@@ -113,6 +123,8 @@ export const readSeller = endpoint({
   params: z.object({ sellerId: publicIdText }),
   reply: sellerCard.extend({
     about: z.string(),
+    /** Mean of each mark; absent before the first rating. */
+    marks: z.object({ fish: z.number(), count: z.number(), contact: z.number() }).optional(),
     licences: z.array(z.object({ state: stateCode, answer: z.string() })),
   }),
 })

@@ -37,6 +37,12 @@ describe('the database as the start command hands it to the product', () => {
     },
   )
 
+  it.each(['rating', 'survival'])('lets no row of %s be removed', async (table) => {
+    await expect(product.query(`SELECT COUNT(*) FROM ${table}`)).resolves.toBeDefined()
+    await expect(product.query(`UPDATE ${table} SET order_id = order_id`)).resolves.toBeDefined()
+    await expect(product.query(`DELETE FROM ${table}`)).rejects.toThrow(/denied/)
+  })
+
   it('lets rows of every other table be changed', async () => {
     await expect(product.query('UPDATE outbox SET seq = seq')).resolves.toBeDefined()
     await expect(product.query('DELETE FROM outbox')).resolves.toBeDefined()

@@ -177,6 +177,8 @@ describe('clocks that nobody beats', () => {
     await desk.quiet()
     expect(await seen()).toMatchObject({ state: 'settled', money: { strip: { releasedCents: 2350 } } })
     expect(await stock()).toMatchObject({ sold: 0, delivered: 25 })
+    expect((await seen()).may).toContain('rate')
+    expect((await seen()).survival?.handedOver).toBe(25)
   })
 })
 
