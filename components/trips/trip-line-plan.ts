@@ -16,6 +16,7 @@ export const LINE_VIEW = { height: 220, left: 48, right: 16, top: 12, bottom: 28
 const NIGHT_FROM = 21
 const NIGHT_UNTIL = 6
 const ROOM_C = 2
+const MARK_PX = 64
 
 interface Asked {
   steps: readonly TripStep[]
@@ -51,7 +52,7 @@ export function planTripLine({ steps, rangeC, departHour, widthPx }: Asked): Lin
       width: x(until) - x(from),
     })),
     worst: { x: x(worst.hour), y: y(worst.waterC), hour: worst.hour, waterC: worst.waterC },
-    hourMarks: marksUpTo(last.hour).map((hour) => ({ x: x(hour), hour })),
+    hourMarks: marksUpTo(last.hour, widthPx).map((hour) => ({ x: x(hour), hour })),
     degreeMarks: [low, high].map((degreesC) => ({ y: y(degreesC), degreesC })),
   }
 }
@@ -66,8 +67,8 @@ function nightsOf(departHour: number, hours: number): [number, number][] {
   return nights
 }
 
-/** Four to eight marks, at whole or quarter hours. */
-function marksUpTo(hours: number): number[] {
-  const step = [0.25, 0.5, 1, 2, 4, 6, 12].find((one) => hours / one <= 8) ?? 24
+/** As many marks as there is room for their words, at whole or quarter hours. */
+function marksUpTo(hours: number, widthPx: number): number[] {
+  const step = [0.25, 0.5, 1, 2, 4, 6, 12].find((one) => hours / one <= widthPx / MARK_PX) ?? 24
   return Array.from({ length: Math.floor(hours / step) + 1 }, (_, at) => at * step)
 }

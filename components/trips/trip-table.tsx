@@ -37,12 +37,14 @@ export function TripTable({ steps, units }: { steps: readonly TripStep[]; units:
         {
           key: 'air',
           title: 'Air',
+          minWidthPx: 76,
           cell: ({ airC }) => <Text isFigures>{printTemperature(airC, units)}</Text>,
           isNumeric: true,
         },
         {
           key: 'water',
           title: 'Water',
+          minWidthPx: 76,
           cell: ({ waterC }) => <Text isFigures>{printTemperature(waterC, units)}</Text>,
           isNumeric: true,
         },
