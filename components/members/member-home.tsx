@@ -11,6 +11,7 @@ import { NoConnection } from '@/components/listings/no-connection'
 import { ButtonLink } from '@/components/ui/button-link'
 import { Card } from '@/components/ui/card'
 import { ErrorState } from '@/components/ui/error-state'
+import { Heading } from '@/components/ui/heading'
 import { Link } from '@/components/ui/link'
 import { SkeletonRows } from '@/components/ui/skeleton'
 import { Text } from '@/components/ui/text'
@@ -44,12 +45,13 @@ export function MemberHome() {
       <RoleLinks me={me} />
       <Card>
         <PlaceSetting place={me.place} />
-        <ButtonLink
-          kind="secondary"
-          icon="lock"
-          href="/account"
-          label="Account: password, e-mail, sign-ins, units"
-        />
+      </Card>
+      <Card>
+        <Heading level={2} size="lead">
+          Account
+        </Heading>
+        <Text tint="muted">Password, e-mail address, where you are signed in, units, light or dark.</Text>
+        <ButtonLink kind="secondary" icon="me" href="/account" label="Open your account" />
       </Card>
       <MailSetting mail={me.mail} />
       <SecurityCard secondFactor={me.secondFactor} />
