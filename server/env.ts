@@ -25,6 +25,8 @@ const shape = z.object({
   FEE_BP: z.coerce.number().int().min(0).max(3000).default(600),
   CLOCK_OFFSET_MS: z.coerce.number().int().default(0),
   DEMO: flag.default('off'),
+  /** Where the crash proof lets the process die (server/outbox/fail-point.ts). */
+  FAIL_POINT: z.string().optional(),
 })
 
 export type Settings = z.output<typeof shape>
@@ -40,6 +42,7 @@ function productionFaults(settings: Settings): string[] {
   if (!settings.PUBLIC_ORIGIN.startsWith('https://')) faults.push('PUBLIC_ORIGIN must start with https://')
   if (settings.STRIPE_API_BASE) faults.push('STRIPE_API_BASE is for local work only')
   if (settings.CLOCK_OFFSET_MS !== 0) faults.push('CLOCK_OFFSET_MS is for local work only')
+  if (settings.FAIL_POINT !== undefined) faults.push('FAIL_POINT is for local work only')
   if (settings.DEMO === 'on') faults.push('DEMO must be off')
   return faults
 }

@@ -12,6 +12,7 @@ import { configureMail } from '@/server/mail/send-mail'
 import { configureUnsubscribe } from '@/server/mail/unsubscribe-token'
 import { configureOrders } from '@/server/orders/order-settings'
 import { registerDoers } from '@/server/outbox/doers'
+import { armFailPoint } from '@/server/outbox/fail-point'
 import { configurePhotos } from '@/server/photos/photo-files'
 import { configurePayments } from '@/payments/stripe'
 
@@ -50,6 +51,7 @@ function main(): void {
   configurePayments(paymentSettings(settings))
   configurePhotos({ dir: settings.UPLOAD_DIR })
   configureOrders({ origin: settings.PUBLIC_ORIGIN, feeBp: settings.FEE_BP })
+  armFailPoint(settings.FAIL_POINT)
   registerDoers()
 
   const app = buildApp({

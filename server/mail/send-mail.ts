@@ -5,6 +5,7 @@ import { mailSender, setMailSender } from '@/server/mail/mail-sender'
 import { readMailWishes } from '@/server/mail/mail-wishes-store'
 import { renderLetter } from '@/server/mail/render-letter'
 import { unsubscribeUrl } from '@/server/mail/unsubscribe-token'
+import { failPoint } from '@/server/outbox/fail-point'
 import { finishEffect, type Effect } from '@/server/outbox/outbox-store'
 import { GiveUp } from '@/server/outbox/run-effects'
 
@@ -58,5 +59,6 @@ export async function sendMail(effect: Effect): Promise<void> {
         }
       : {}),
   })
+  failPoint('mail:called')
   await finishEffect(effect.seq)
 }

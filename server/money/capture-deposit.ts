@@ -1,5 +1,6 @@
 import { applyCharge } from '@/server/money/apply-charge'
 import { readPaymentRow } from '@/server/money/payment-store'
+import { failPoint } from '@/server/outbox/fail-point'
 import { finishEffect, type Effect } from '@/server/outbox/outbox-store'
 import { GiveUp } from '@/server/outbox/run-effects'
 import { capture } from '@/payments/capture'
@@ -19,6 +20,7 @@ export async function captureDeposit(effect: Effect): Promise<void> {
       throw error
     }
   }
+  failPoint('capture-deposit:called')
   const facts = await readPayment(payment.intentId)
   await applyCharge({ paymentId: payment.id, orderId: payment.orderId }, { kind: 'known', facts })
   await finishEffect(effect.seq)

@@ -3,6 +3,7 @@ import { now } from '@/server/clock'
 import { book } from '@/server/money/ledger-store'
 import { finishRefund, readPaymentRow, readRefund } from '@/server/money/payment-store'
 import { readOrderById } from '@/server/orders/order-store'
+import { failPoint } from '@/server/outbox/fail-point'
 import { finishEffect, type Effect } from '@/server/outbox/outbox-store'
 import { GiveUp } from '@/server/outbox/run-effects'
 import { refund as refundCharge } from '@/payments/refund'
@@ -19,6 +20,7 @@ export async function sendRefund(effect: Effect): Promise<void> {
     amountCents: wanted.amountCents,
     idempotencyKey: `effect:${effect.seq}`,
   })
+  failPoint('refund:called')
   await inTransaction(async (tx) => {
     await finishRefund(tx, wanted.id, { processorId: sent.refundId, at: now() })
     await book(tx, {

@@ -9,6 +9,7 @@ import {
 } from '@/server/money/payment-store'
 import { readOrderById, type OrderRow } from '@/server/orders/order-store'
 import { readSellerById } from '@/server/orders/party-store'
+import { failPoint } from '@/server/outbox/fail-point'
 import { finishEffect, type Effect } from '@/server/outbox/outbox-store'
 import { GiveUp } from '@/server/outbox/run-effects'
 import { PaymentFailure } from '@/payments/payment-failure'
@@ -39,6 +40,7 @@ export async function sendTransfer(effect: Effect): Promise<void> {
   if (!wanted || !order || !seller?.payoutAccountId) throw new GiveUp('the transfer has no seller account')
   if (!seller.payoutsEnabled) throw new Error('the seller is finishing paperwork: the transfer waits')
   const sent = await send(order, seller.payoutAccountId, wanted)
+  failPoint('transfer:called')
   await inTransaction(async (tx) => {
     await finishTransfer(tx, order.id, { processorId: sent.transferId, at: now() })
     await book(tx, {

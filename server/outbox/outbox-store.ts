@@ -1,8 +1,9 @@
-import { and, asc, eq, isNotNull, isNull, lte, sql } from 'drizzle-orm'
+import { and, asc, eq, inArray, isNotNull, isNull, lte, sql } from 'drizzle-orm'
 
 import { db, type Tx } from '@/db/client'
 import { outbox } from '@/db/schema/outbox'
 import { inTransaction } from '@/db/transaction'
+import { failPoint } from '@/server/outbox/fail-point'
 import { wakeOutbox } from '@/server/outbox/wake'
 
 export const effectKinds = [
@@ -24,8 +25,11 @@ export interface Effect {
   attempts: number
 }
 
-/** A claimed row is left alone by other workers for this long; a worker that died frees it by time. */
-const CLAIM_MS = 60_000
+/**
+ * A claimed row is left alone by other workers for this long; a worker that died frees it by time. Short, so that a
+ * restart carries on at once: a worker that lives renews its claims (run-effects).
+ */
+const CLAIM_MS = 6_000
 
 /** Writes an effect beside the change that causes it; returns its number, the effect's idempotency key. */
 export async function queueEffect(
@@ -58,6 +62,7 @@ export async function claimEffects(most: number, only?: { seq: number }): Promis
         .update(outbox)
         .set({ attempts: sql`${outbox.attempts} + 1`, runAfter: new Date(Date.now() + CLAIM_MS) })
         .where(eq(outbox.seq, row.seq))
+      failPoint(`${row.kind}:claiming`)
     }
     return rows.map((row) => ({
       seq: row.seq,
@@ -67,6 +72,15 @@ export async function claimEffects(most: number, only?: { seq: number }): Promis
       attempts: row.attempts + 1,
     }))
   })
+}
+
+/** Holds rows that are still being worked on a little longer. */
+export async function renewClaims(seqs: number[]): Promise<void> {
+  if (seqs.length === 0) return
+  await db()
+    .update(outbox)
+    .set({ runAfter: new Date(Date.now() + CLAIM_MS) })
+    .where(and(inArray(outbox.seq, seqs), isNull(outbox.doneAt), isNull(outbox.deadAt)))
 }
 
 export async function finishEffect(seq: number, tx: Tx = db()): Promise<void> {

@@ -1,7 +1,9 @@
 import { log } from '@/server/log'
+import { failPoint } from '@/server/outbox/fail-point'
 import {
   claimEffects,
   giveUpEffect,
+  renewClaims,
   retryEffect,
   type Effect,
   type EffectKind,
@@ -14,6 +16,7 @@ export type Doer = (effect: Effect) => Promise<void>
 export class GiveUp extends Error {}
 
 const MOST_TRIES = 60
+const RENEW_EVERY_MS = 2_000
 const LONGEST_WAIT_MS = 60 * 60_000
 
 const doers = new Map<EffectKind, Doer>()
@@ -30,13 +33,32 @@ function waitMs(attempts: number): number {
 async function runOne(effect: Effect): Promise<void> {
   const doer = doers.get(effect.kind)
   if (!doer) throw new Error(`nobody does ${effect.kind}`)
+  failPoint(`${effect.kind}:claimed`)
   try {
     await doer(effect)
+    failPoint(`${effect.kind}:done`)
   } catch (error) {
     const told = error instanceof Error ? error.message : String(error)
     log.warn({ seq: effect.seq, kind: effect.kind, attempts: effect.attempts, told }, 'effect failed')
     if (error instanceof GiveUp || effect.attempts >= MOST_TRIES) await giveUpEffect(effect.seq, told)
     else await retryEffect(effect.seq, waitMs(effect.attempts), told)
+  }
+}
+
+/** Does claimed effects one after the other; those that still wait their turn stay claimed meanwhile. */
+async function runClaimed(effects: Effect[]): Promise<void> {
+  const waiting = new Set(effects.map((effect) => effect.seq))
+  const renewal = setInterval(() => {
+    // A renewal that fails only lets another worker take over; the key keeps the effect single.
+    renewClaims([...waiting]).catch((error: unknown) => log.warn({ err: error }, 'claims not renewed'))
+  }, RENEW_EVERY_MS)
+  try {
+    for (const effect of effects) {
+      await runOne(effect)
+      waiting.delete(effect.seq)
+    }
+  } finally {
+    clearInterval(renewal)
   }
 }
 
@@ -46,13 +68,12 @@ export async function runEffects(): Promise<number> {
   for (;;) {
     const effects = await claimEffects(8)
     if (effects.length === 0) return tried
-    for (const effect of effects) await runOne(effect)
+    await runClaimed(effects)
     tried += effects.length
   }
 }
 
 /** Runs one effect right after its commit, so that the person who caused it sees the outcome; errors stay queued. */
 export async function runEffectNow(seq: number): Promise<void> {
-  const [effect] = await claimEffects(1, { seq })
-  if (effect) await runOne(effect)
+  await runClaimed(await claimEffects(1, { seq }))
 }

@@ -7,7 +7,8 @@ import { buildMember } from '@/seed/build-member'
 import { now } from '@/server/clock'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { brokenInvariants } from '@/tests/support/money-invariants'
-import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
+import { reserveBody } from '@/tests/support/desk-ground'
+import { keyed, openOrderDesk, type OrderDesk } from '@/tests/support/order-desk'
 
 const HOUR = 3600_000
 let desk: OrderDesk

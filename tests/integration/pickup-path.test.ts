@@ -5,7 +5,8 @@ import { listing } from '@/db/schema/listings'
 import { processorEvent } from '@/db/schema/payments'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { brokenInvariants } from '@/tests/support/money-invariants'
-import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
+import { reserveBody } from '@/tests/support/desk-ground'
+import { keyed, openOrderDesk, type OrderDesk } from '@/tests/support/order-desk'
 
 let desk: OrderDesk
 beforeAll(async () => {

@@ -4,7 +4,8 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { listing } from '@/db/schema/listings'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { brokenInvariants } from '@/tests/support/money-invariants'
-import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
+import { reserveBody } from '@/tests/support/desk-ground'
+import { keyed, openOrderDesk, type OrderDesk } from '@/tests/support/order-desk'
 
 let desk: OrderDesk
 beforeAll(async () => {

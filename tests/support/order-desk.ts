@@ -8,16 +8,12 @@ import type TestAgent from 'supertest/lib/agent'
 
 import { connect, db, disconnect, type Database } from '@/db/client'
 import { configurePayments } from '@/payments/stripe'
-import { openSellerAccount } from '@/payments/open-seller-account'
 import { startTestFake, type TestFake } from '@/payments/fake/fake-for-tests'
-import { buildBatch, type BuiltBatch } from '@/seed/build-batch'
 import { BUILT_PASSWORD, buildMember, type BuiltMember } from '@/seed/build-member'
-import { buildSeller, type BuiltSeller } from '@/seed/build-seller'
-import { loadPlaces } from '@/seed/load-places'
-import { loadRules } from '@/seed/load-rules'
+import type { BuiltSeller } from '@/seed/build-seller'
 import { buildApp } from '@/server/app'
 import { openAuth } from '@/server/auth/auth'
-import { now, setClockOffset } from '@/server/clock'
+import { setClockOffset } from '@/server/clock'
 import { ringClocks } from '@/server/jobs/ring-clocks'
 import { log } from '@/server/log'
 import type { Letter } from '@/server/mail/letter'
@@ -26,21 +22,21 @@ import { configureOrders } from '@/server/orders/order-settings'
 import { registerDoers } from '@/server/outbox/doers'
 import { finishEffect } from '@/server/outbox/outbox-store'
 import { registerDoer, runEffects } from '@/server/outbox/run-effects'
-import { projectListings } from '@/server/search/project-listings'
-import { inTransaction } from '@/db/transaction'
-import type { ListingBody, ShownListing } from '@/shared/contracts/listings'
 import type { ShownOrder } from '@/shared/contracts/orders'
+import {
+  HATCHERY_EMAIL,
+  layGround,
+  openBatch,
+  openHatchery,
+  type BatchWish,
+  type DeskBatch,
+} from '@/tests/support/desk-ground'
 import { totpOf } from '@/tests/support/totp'
 import { freshDatabase } from '@/tests/support/test-database'
 
 const ORIGIN = 'http://127.0.0.1:8080'
 const WEBHOOK_SECRET = 'whsec_order_desk_tests'
 const PASSES = 80
-
-/** A live batch and the statements its buyers in Ohio have to tick. */
-export interface DeskBatch extends BuiltBatch {
-  ticks: string[]
-}
 
 export interface OrderDesk {
   db: Database
@@ -49,7 +45,7 @@ export interface OrderDesk {
   hatchery: BuiltSeller
   hatcheryEmail: string
   /** A live batch of the hatchery. */
-  batch: (name: string, wish?: { free?: number; body?: Partial<ListingBody> }) => Promise<DeskBatch>
+  batch: (name: string, wish?: BatchWish) => Promise<DeskBatch>
   member: (email: string) => Promise<BuiltMember>
   signedIn: (email: string) => Promise<TestAgent>
   visitor: () => TestAgent
@@ -64,18 +60,6 @@ export interface OrderDesk {
   /** Pays an open payment page as a person does. */
   pay: (order: ShownOrder, card?: string) => Promise<void>
   close: () => Promise<void>
-}
-
-/** Every hold of a batch as a body that the contract takes. */
-export function reserveBody(batch: DeskBatch, change: Record<string, unknown> = {}) {
-  return {
-    quantity: 25,
-    windowId: batch.windows[0]?.publicId,
-    near: '45202',
-    version: 1,
-    ticked: batch.ticks,
-    ...change,
-  }
 }
 
 export const keyed = (key: string = randomUUID()) => ({ 'idempotency-key': key })
@@ -115,18 +99,9 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
   })
 
   const base = db()
-  await loadPlaces(base, { states: ['OH', 'KY', 'IN', 'IL'] })
-  await loadRules(base, { demonstration: true, at: new Date() })
-  const hatcheryEmail = 'hatchery@example.org'
-  const owner = await buildMember(base, { email: hatcheryEmail, name: 'Ada Marsh' })
-  const account = await openSellerAccount({
-    sellerId: 'desk',
-    email: hatcheryEmail,
-    displayName: 'Marsh Hatchery',
-    idempotencyKey: `desk-${randomUUID()}`,
-  })
-  await fake.control(`onboarding/${account.accountId}`)
-  const hatchery = await buildSeller(base, { member: owner, payoutAccountId: account.accountId })
+  await layGround(base)
+  const hatcheryEmail = HATCHERY_EMAIL
+  const hatchery = await openHatchery(base, fake)
 
   const visitor = (): TestAgent => {
     const from = `10.${randomInt(256)}.${randomInt(256)}.${randomInt(1, 255)}`
@@ -177,19 +152,7 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
     letters,
     hatchery,
     hatcheryEmail,
-    batch: async (name, wish = {}) => {
-      const built = await buildBatch(base, {
-        seller: hatchery,
-        name,
-        at: now(),
-        free: wish.free,
-        body: wish.body,
-      })
-      await inTransaction((tx) => projectListings(tx, [built.id]))
-      const shown = await visitor().get(`/api/v1/listings/${built.publicId}?near=45202`).expect(200)
-      const { gate } = shown.body as ShownListing
-      return { ...built, ticks: gate?.ticks.map((tick) => tick.id) ?? [] }
-    },
+    batch: (name, wish = {}) => openBatch(base, { seller: hatchery, name, ...wish }),
     member: (email) => buildMember(base, { email }),
     visitor,
     signedIn,
