@@ -34,12 +34,20 @@ function failureOf(error: unknown): PaymentFailure {
   })
 }
 
-/** Runs one call of the SDK; whatever it throws comes out as a PaymentFailure. */
+/**
+ * Runs one call of the SDK; whatever it throws comes out as a PaymentFailure. After five calls in a row without any
+ * answer the processor is left alone for a while: `away` at once.
+ */
 export async function askProcessor<R>(call: (stripe: Stripe) => Promise<R>): Promise<R> {
-  const { client } = configuredPayments()
+  const { client, circuit } = configuredPayments()
+  if (!circuit.mayAsk()) throw new PaymentFailure('away', 'the processor has not answered for a while')
   try {
-    return await call(client)
+    const answer = await call(client)
+    circuit.answered()
+    return answer
   } catch (error) {
+    if (error instanceof errors.StripeConnectionError) circuit.unanswered()
+    else circuit.answered()
     throw failureOf(error)
   }
 }

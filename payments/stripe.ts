@@ -1,4 +1,5 @@
 import Stripe from 'stripe'
+import { makeCircuit, type Circuit } from './circuit'
 
 export interface PaymentsConfig {
   secretKey: string
@@ -7,11 +8,14 @@ export interface PaymentsConfig {
   host?: string
   port?: number
   protocol?: 'http' | 'https'
+  /** How long a processor that does not answer is left alone; 15 s unless said. */
+  restMs?: number
 }
 
 interface Configured {
   client: Stripe
   webhookSecret: string
+  circuit: Circuit
 }
 
 /** Longer than the processor usually takes, shorter than a buyer waits. */
@@ -20,7 +24,7 @@ const ANSWER_WITHIN_MS = 4000
 let configured: Configured | null = null
 
 /** Once, at the start of the process, before any act of payment; a second call replaces the first. */
-export function configurePayments({ secretKey, webhookSecret, ...address }: PaymentsConfig): void {
+export function configurePayments({ secretKey, webhookSecret, restMs, ...address }: PaymentsConfig): void {
   // No retries here: the outbox repeats an act with its own key. Beware: the SDK itself still repeats once after a
   // connection reset, with the same key.
   const client = new Stripe(secretKey, {
@@ -29,7 +33,7 @@ export function configurePayments({ secretKey, webhookSecret, ...address }: Paym
     maxNetworkRetries: 0,
     telemetry: false,
   })
-  configured = { client, webhookSecret }
+  configured = { client, webhookSecret, circuit: makeCircuit(restMs) }
 }
 
 /** The configured SDK and webhook secret; throws before `configurePayments`. */
