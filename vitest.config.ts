@@ -28,6 +28,19 @@ export default defineConfig({
           maxWorkers: 2,
         },
       },
+      // The measured bars (scripts/run-proof.mjs): not part of a plain vitest run, each is started by its name.
+      {
+        ...shared,
+        test: {
+          ...node,
+          name: 'checks',
+          include: ['tests/checks/**/*.check.ts'],
+          globalSetup: ['tests/support/database-server.ts'],
+          hookTimeout: 120_000,
+          testTimeout: 900_000,
+          fileParallelism: false,
+        },
+      },
       {
         ...shared,
         test: {

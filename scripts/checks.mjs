@@ -7,6 +7,17 @@
  * @property {boolean} ci whether .ci/run runs the whole check after the tests
  */
 
+/**
+ * A file of tests/checks. Its planted faults are its own: it fails when it does not find them.
+ * @param {string} name @returns {Check}
+ */
+const proof = (name) => ({
+  name,
+  command: ['node', 'scripts/run-proof.mjs', name],
+  sliceCommand: ['node', 'scripts/run-proof.mjs', name, '--slice'],
+  ci: false,
+})
+
 /** @type {Check[]} */
 export const CHECKS = [
   {
@@ -30,4 +41,5 @@ export const CHECKS = [
     faultCommand: ['node', '--import', 'tsx', 'scripts/check-ics.ts', '--cases', '500', '--plant-fault'],
     ci: true,
   },
+  proof('matrix'),
 ]

@@ -1,5 +1,6 @@
 import { now } from '@/server/clock'
 import type { Caller } from '@/server/http/caller'
+import { isPublic } from '@/server/listings/listing-policy'
 import { readListingRow, readSellerById, type SellerRow } from '@/server/orders/party-store'
 import { readLiveTerms } from '@/server/orders/terms-store'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
@@ -34,7 +35,7 @@ export async function checkReservation(
   asked: ReserveAsked,
 ): Promise<CheckedReservation> {
   const listing = await readListingRow(listingId)
-  if (!listing || listing.liveVersion === null) throw new Problem('not-found')
+  if (!listing || listing.liveVersion === null || !isPublic(listing)) throw new Problem('not-found')
   const seller = await readSellerById(listing.sellerId)
   if (!seller) throw new Problem('not-found')
   if (seller.memberId === caller.memberId) throw new Problem('own-batch', 'You cannot buy from yourself.')

@@ -52,6 +52,7 @@ export async function chooseSlot(
   asked: { windowId: string; commandId: string },
 ): Promise<ShownOrder> {
   const seen = await orderSeenBy(caller, orderId)
+  if (seen.party === 'staff') throw new Problem('not-allowed', 'The parties move the day between them.')
   await inTransaction((tx) => move(tx, seen.order.id, { caller, party: seen.party, ...asked }))
   return showAgain(seen)
 }

@@ -14,6 +14,7 @@ export async function contestNoShow(
   asked: { note: string; commandId: string },
 ): Promise<ShownOrder> {
   const seen = await orderSeenBy(caller, orderId)
+  if (seen.party === 'staff') throw new Problem('not-allowed', 'Staff decide; the parties object.')
   if (seen.order.state === 'ready' && !mayAct('contest', seen.order, seen.party)) {
     throw new Problem('order-moved', 'There is nothing to object to.')
   }

@@ -1,28 +1,10 @@
-import { readdirSync } from 'node:fs'
-import path from 'node:path'
-
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 
 import { buildMember } from '@/seed/build-member'
 import type { Endpoint } from '@/shared/api/endpoint'
 import { problems, type ProblemDocument } from '@/shared/api/problem'
+import { everyEndpoint } from '@/tests/support/every-endpoint'
 import { keyed, openTestServer, type TestServer } from '@/tests/support/server'
-
-const folder = path.resolve(import.meta.dirname, '../../shared/contracts')
-
-async function everyEndpoint(): Promise<[name: string, endpoint: Endpoint][]> {
-  const found: [string, Endpoint][] = []
-  for (const file of readdirSync(folder)) {
-    if (!file.endsWith('.ts') || file.endsWith('.test.ts')) continue
-    const contract = (await import(path.join(folder, file))) as Record<string, unknown>
-    for (const [name, value] of Object.entries(contract)) {
-      if (typeof value === 'object' && value !== null && 'kind' in value && value.kind === 'endpoint') {
-        found.push([name, value as Endpoint])
-      }
-    }
-  }
-  return found
-}
 
 const NOWHERE = 'A'.repeat(22)
 const address = (endpoint: Endpoint) =>

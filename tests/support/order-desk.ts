@@ -3,6 +3,7 @@ import type { Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 
 import { sql } from 'drizzle-orm'
+import type { Express } from 'express'
 import request from 'supertest'
 import type TestAgent from 'supertest/lib/agent'
 
@@ -59,13 +60,15 @@ export interface OrderDesk {
   travelToWithoutRest: (at: Date) => Promise<void>
   /** Pays an open payment page as a person does. */
   pay: (order: ShownOrder, card?: string) => Promise<void>
+  /** The mounted application itself, to see what it answers to. */
+  app: Express
   close: () => Promise<void>
 }
 
 export const keyed = (key: string = randomUUID()) => ({ 'idempotency-key': key })
 
 /** The whole server in this process on its own database, with the practice processor beside it over real HTTP. */
-export async function openOrderDesk(label: string): Promise<OrderDesk> {
+export async function openOrderDesk(label: string, webDir = 'nowhere'): Promise<OrderDesk> {
   log.level = 'silent'
   const database = await freshDatabase(label)
   connect(database.url)
@@ -79,7 +82,7 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
     letters.push(effect.body.letter as Letter)
     await finishEffect(effect.seq)
   })
-  const app = buildApp({ origins: [ORIGIN], https: false, webDir: 'nowhere', trustProxyHops: 1 })
+  const app = buildApp({ origins: [ORIGIN], https: false, webDir, trustProxyHops: 1 })
   const server = await new Promise<Server>((done, fail) => {
     const listening = app.listen(0, '127.0.0.1', (error) => (error ? fail(error) : done(listening)))
   })
@@ -114,9 +117,10 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
     await agent.post('/api/auth/sign-in/email').send({ email, password: BUILT_PASSWORD }).expect(200)
     return agent
   }
-  let staffAgent: TestAgent | undefined
+  const staffAgents = new Map<string, TestAgent>()
   const staff = async (email: string): Promise<TestAgent> => {
-    if (staffAgent) return staffAgent
+    const known = staffAgents.get(email)
+    if (known) return known
     const agent = await signedIn(email)
     const begun = await agent
       .post('/api/auth/two-factor/enable')
@@ -124,7 +128,7 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
       .expect(200)
     const code = await totpOf((begun.body as { totpURI: string }).totpURI)
     await agent.post('/api/auth/two-factor/verify-totp').send({ code }).expect(200)
-    staffAgent = agent
+    staffAgents.set(email, agent)
     return agent
   }
   const waiting = async (): Promise<number> => {
@@ -148,6 +152,7 @@ export async function openOrderDesk(label: string): Promise<OrderDesk> {
   }
   return {
     db: base,
+    app,
     fake,
     letters,
     hatchery,

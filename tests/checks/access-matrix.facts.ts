@@ -1,0 +1,175 @@
+/** Who asks, in the order of the columns below. `plain` staff have not set up their second factor. */
+export const ROLES = [
+  'anonymous',
+  'member',
+  'seller',
+  'other-seller',
+  'moderator',
+  'admin',
+  'plain-moderator',
+  'plain-admin',
+] as const
+export type Role = (typeof ROLES)[number]
+
+/**
+ * `own`: of the member and the seller, `foreign`: of another member and the other seller. Orders are ended and
+ * listings live (foreign ones hidden), so that a caller who gets past the guards meets a harmless 409.
+ */
+export type ObjectKind = 'none' | 'order' | 'own-listing' | 'public-listing' | 'version' | 'seller'
+
+export interface AccessRow {
+  /** The contract's name, or method and path of a route outside the contracts. */
+  route: string
+  object: ObjectKind
+  send?: object
+  query?: string
+  /** Expected statuses, a column a role; `missing` is an object that never was. */
+  own: string
+  foreign?: string
+  missing?: string
+}
+
+const NOTE = 'The gate was locked and nobody came.'
+const WINDOW = 'A'.repeat(22)
+const unknownZip = {
+  farmName: 'Nowhere Farm',
+  about: '',
+  kind: 'hatchery',
+  street: '1 Mill Lane',
+  city: 'Nowhere',
+  state: 'OH',
+  zip: '00000',
+  phone: '(513) 555-0142',
+  licences: [{ state: 'OH', answer: 'not-needed' }],
+}
+
+//               anon mem  sell oth  mod  adm  mod- adm-
+const everybody = '200 200 200 200 200 200 200 200'
+const signedIn = '401 200 200 200 200 200 200 200'
+const nobody = '404 404 404 404 404 404 404 404'
+const nobodySignedIn = '401 404 404 404 404 404 404 404'
+const notForSellers = '401 403 404 404 403 403 403 403'
+const staffOn = (ok: string, party = '403') => `401 403 403 403 ${ok} ${ok} ${party} ${party}`
+
+/** An act of the buyer alone on an order that has ended; staff with a second factor read orders but are no party. */
+const buyersAct = {
+  object: 'order',
+  own: '401 409 404 404 404 404 404 404',
+  foreign: nobodySignedIn,
+  missing: nobodySignedIn,
+} as const
+const sellersAct = {
+  object: 'order',
+  own: '401 404 409 404 404 404 404 404',
+  foreign: '401 404 404 409 404 404 404 404',
+  missing: nobodySignedIn,
+} as const
+/** An act of either party; staff are told that it is not theirs. */
+const partysAct = {
+  object: 'order',
+  own: '401 409 409 404 403 403 404 404',
+  foreign: '401 404 404 409 403 403 404 404',
+  missing: nobodySignedIn,
+} as const
+const staffsAct = {
+  object: 'order',
+  own: staffOn('409'),
+  foreign: staffOn('409'),
+  missing: staffOn('404'),
+} as const
+const ownersAct = (ok: string) => ({
+  object: 'own-listing' as const,
+  own: `401 403 ${ok} 404 403 403 403 403`,
+  foreign: `401 403 404 ${ok} 403 403 403 403`,
+  missing: notForSellers,
+})
+const open = { object: 'none', own: everybody } as const
+
+export const accessMatrix: AccessRow[] = [
+  { route: 'readMe', ...open },
+  { route: 'changeMe', object: 'none', send: {}, own: signedIn },
+  { route: 'findPlaces', ...open, query: 'q=Cin' },
+  { route: 'searchListings', ...open, query: 'near=45202' },
+  { route: 'countFacets', ...open, query: 'near=45202' },
+  { route: 'findPins', ...open, query: 'south=38&north=40&west=-86&east=-83&zoom=8' },
+  { route: 'readListing', object: 'public-listing', own: everybody, foreign: nobody, missing: nobody },
+  { route: 'readSeller', object: 'seller', own: everybody, missing: nobody },
+
+  { route: 'openFarm', object: 'none', send: unknownZip, own: '401 422 422 422 422 422 422 422' },
+  { route: 'readOwnFarm', object: 'none', own: '401 403 200 200 403 403 403 403' },
+  { route: 'changeFarm', object: 'none', send: unknownZip, own: '401 403 422 422 403 403 403 403' },
+  { route: 'startPayouts', object: 'none', own: '401 403 201 201 403 403 403 403' },
+  { route: 'uploadPhoto', object: 'none', send: {}, own: '401 422 422 422 422 422 422 422' },
+
+  { route: 'listOwnListings', object: 'none', own: '401 403 200 200 403 403 403 403' },
+  { route: 'beginListing', object: 'none', send: {}, own: '401 403 201 201 403 403 403 403' },
+  { route: 'readOwnListing', ...ownersAct('200') },
+  { route: 'saveDraft', send: { draft: {}, draftRevision: 999 }, ...ownersAct('409') },
+  { route: 'submitListing', send: { draftRevision: 999 }, ...ownersAct('409') },
+  { route: 'changeSelling', send: { selling: 'live' }, ...ownersAct('200') },
+  { route: 'discardDraft', ...ownersAct('409') },
+  {
+    route: 'adjustStock',
+    send: { change: -1_000_000, reason: 'recount' },
+    ...ownersAct('409'),
+  },
+
+  {
+    route: 'reserveBatch',
+    object: 'public-listing',
+    send: { quantity: 1, near: '45202', version: 1, ticked: [] },
+    own: '401 409 409 409 409 409 409 409',
+    foreign: nobodySignedIn,
+    missing: nobodySignedIn,
+  },
+  { route: 'listOrders', object: 'none', query: 'as=seller', own: signedIn },
+  {
+    route: 'readOrder',
+    object: 'order',
+    own: '401 200 200 404 200 200 404 404',
+    foreign: '401 404 404 200 200 200 404 404',
+    missing: nobodySignedIn,
+  },
+  { route: 'payDeposit', ...buyersAct },
+  { route: 'payBalance', ...buyersAct },
+  { route: 'leaveReservation', ...buyersAct },
+  { route: 'withdrawRequest', ...buyersAct },
+  { route: 'confirmGood', ...buyersAct },
+  { route: 'acceptOrder', ...sellersAct },
+  { route: 'declineOrder', send: { reason: 'sick' }, ...sellersAct },
+  { route: 'markReady', ...sellersAct },
+  { route: 'handOver', send: { code: '000000', count: 25 }, ...sellersAct },
+  { route: 'cancelOrder', send: { reason: 'die-off' }, ...partysAct },
+  { route: 'chooseSlot', send: { windowId: WINDOW }, ...partysAct },
+  { route: 'reportNoShow', send: { note: NOTE }, ...partysAct },
+  { route: 'contestNoShow', send: { note: NOTE }, ...partysAct },
+  { route: 'stopOrder', send: { cause: 'fraud', animals: 'free', note: NOTE }, ...staffsAct },
+  { route: 'decideOrder', send: { outcome: 'handed-over', note: NOTE }, ...staffsAct },
+
+  { route: 'listReviews', object: 'none', own: staffOn('200') },
+  { route: 'readReview', object: 'version', own: staffOn('200'), missing: staffOn('404') },
+  {
+    route: 'decideReview',
+    object: 'version',
+    send: { decision: 'approve' },
+    own: staffOn('409'),
+    missing: staffOn('404'),
+  },
+
+  { route: 'GET /healthz', ...open },
+  { route: 'GET /readyz', ...open },
+  { route: 'GET /sitemap.xml', ...open },
+  // The shell stands in for what is hidden or never was: nothing of the listing is in it.
+  {
+    route: 'GET /listings/:listingId',
+    object: 'public-listing',
+    own: everybody,
+    foreign: everybody,
+    missing: everybody,
+  },
+  { route: 'GET /photos/:file', object: 'none', own: nobody },
+  // Signed by the processor, not by a session: without the signature nobody gets in.
+  { route: 'POST /api/v1/stripe-events', object: 'none', send: {}, own: '400 400 400 400 400 400 400 400' },
+  // better-auth's own router guards itself (auth tests); this asks for the session of the cookie.
+  { route: 'ALL /api/auth/*splat', object: 'none', own: everybody },
+]
