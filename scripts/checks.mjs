@@ -42,4 +42,5 @@ export const CHECKS = [
     ci: true,
   },
   proof('matrix'),
+  proof('headers'),
 ]

@@ -29,7 +29,7 @@ export function photoFiles(): Router {
     const headers = {
       'content-type': 'image/webp',
       'content-disposition': `inline; filename="${file}"`,
-      'content-security-policy': "sandbox; default-src 'none'",
+      'content-security-policy': "sandbox; default-src 'none'; frame-ancestors 'none'",
       'x-content-type-options': 'nosniff',
       'cache-control': `public, max-age=${YEAR_S}, immutable`,
     }

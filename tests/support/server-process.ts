@@ -21,7 +21,8 @@ export interface ServerProcess {
 }
 
 export interface ServerWish {
-  environment: Record<string, string>
+  /** What is undefined is left out of the environment. */
+  environment: Record<string, string | undefined>
   /** The same port again after a restart; left out: a free one. */
   port?: number
   /** False: do not wait until it answers, because it may die at once. */

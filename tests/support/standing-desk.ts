@@ -47,6 +47,8 @@ export interface StandingDesk {
   /** One more server process on the same database; the processor's events go to the first port. */
   start: (more?: Partial<ServerWish>) => Promise<ServerProcess>
   port: number
+  /** Where the servers keep their photos. */
+  uploadDir: string
   close: () => Promise<void>
 }
 
@@ -83,6 +85,7 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
   await layGround(db())
   const hatchery = await openHatchery(db(), fake)
   const running: ServerProcess[] = []
+  const uploadDir = path.join(folder, 'uploads')
   const environment = {
     NODE_ENV: 'development',
     PUBLIC_ORIGIN: origin,
@@ -92,7 +95,7 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
     STRIPE_WEBHOOK_SECRET: WEBHOOK_SECRET,
     STRIPE_API_BASE: fake.origin,
     SMTP_URL: `smtp://127.0.0.1:${smtpPort}`,
-    UPLOAD_DIR: path.join(folder, 'uploads'),
+    UPLOAD_DIR: uploadDir,
     WEB_DIR: path.resolve('dist'),
     TRUST_PROXY_HOPS: '1',
   }
@@ -103,6 +106,7 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
     mails,
     hatchery,
     port,
+    uploadDir,
     batch: (name, wish = {}) => openBatch(db(), { seller: hatchery, name, ...wish }),
     cookies: async (emails) => {
       const members = await buildMembers(
