@@ -43,4 +43,5 @@ export const CHECKS = [
   },
   proof('matrix'),
   proof('headers'),
+  proof('privacy'),
 ]

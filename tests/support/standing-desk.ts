@@ -47,6 +47,9 @@ export interface StandingDesk {
   /** One more server process on the same database; the processor's events go to the first port. */
   start: (more?: Partial<ServerWish>) => Promise<ServerProcess>
   port: number
+  /** What the servers sign sessions with. */
+  authSecret: string
+  origin: string
   /** Where the servers keep their photos. */
   uploadDir: string
   close: () => Promise<void>
@@ -106,6 +109,8 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
     mails,
     hatchery,
     port,
+    origin,
+    authSecret: AUTH_SECRET,
     uploadDir,
     batch: (name, wish = {}) => openBatch(db(), { seller: hatchery, name, ...wish }),
     cookies: async (emails) => {
