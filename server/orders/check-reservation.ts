@@ -2,6 +2,7 @@ import { now } from '@/server/clock'
 import type { Caller } from '@/server/http/caller'
 import { isPublic } from '@/server/listings/listing-policy'
 import { readListingRow, readSellerById, type SellerRow } from '@/server/orders/party-store'
+import { shortOf } from '@/server/orders/short-of'
 import { readLiveTerms } from '@/server/orders/terms-store'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
 import { Problem } from '@/shared/api/problem'
@@ -58,5 +59,7 @@ export async function checkReservation(
     throw new Problem('listing-closed', 'This batch has no promised ready date yet.')
   }
   checkQuantity(live.terms, asked.quantity)
+  // Most losers of a rush are told here, without queueing for the row that the winners write.
+  if (listing.free < asked.quantity) throw shortOf(listing.free)
   return { listing, seller, versionId: live.versionId, terms: live.terms }
 }

@@ -19,6 +19,7 @@ import {
   writeEvidence,
 } from '@/server/orders/order-store'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
+import { shortOf } from '@/server/orders/short-of'
 import { noteStock } from '@/server/orders/stock-store'
 import type { FoundPlace } from '@/server/places/find-place'
 import { projectListings } from '@/server/search/project-listings'
@@ -60,8 +61,13 @@ async function takeSlot(tx: Tx, placing: Placing): Promise<Slot | null> {
   return window
 }
 
+/**
+ * The fish first: the update waits for the batch's row before this transaction has looked at anything. Had it read
+ * before, each wait would end in a snapshot conflict, and a rush would run its transactions over and over.
+ */
 async function takeFish(tx: Tx, placing: Placing): Promise<void> {
   const { listing, asked, caller, terms } = placing
+  const held = await holdFish(tx, listing.id, asked.quantity)
   if ((await countUnpaidHolds(tx, caller.memberId)) >= MOST_UNPAID_HOLDS) {
     throw new Problem(
       'holds-too-many',
@@ -77,9 +83,7 @@ async function takeFish(tx: Tx, placing: Placing): Promise<void> {
       )
     }
   }
-  if (await holdFish(tx, listing.id, asked.quantity)) return
-  const left = await readFree(listing.id, tx)
-  throw new Problem('batch-short', `Just taken: ${left} left.`, { facts: { left } })
+  if (!held) throw shortOf(await readFree(listing.id, tx))
 }
 
 function priced(placing: Placing, slot: Slot | null) {
