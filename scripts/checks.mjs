@@ -44,4 +44,6 @@ export const CHECKS = [
   proof('matrix'),
   proof('headers'),
   proof('privacy'),
+  proof('oversell'),
+  proof('crash'),
 ]

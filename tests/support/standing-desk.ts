@@ -50,6 +50,7 @@ export interface StandingDesk {
   /** What the servers sign sessions with. */
   authSecret: string
   origin: string
+  smtpUrl: string
   /** Where the servers keep their photos. */
   uploadDir: string
   close: () => Promise<void>
@@ -70,7 +71,7 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
   const smtp = receiveMail(mails)
   smtp.on('error', () => undefined)
   await once(smtp.listen(0, '127.0.0.1'), 'listening')
-  const smtpPort = (smtp.server.address() as AddressInfo).port
+  const smtpUrl = `smtp://127.0.0.1:${(smtp.server.address() as AddressInfo).port}`
   const fake = await startTestFake({
     webhookUrl: `${origin}/api/v1/stripe-events`,
     webhookSecret: WEBHOOK_SECRET,
@@ -97,7 +98,7 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
     STRIPE_SECRET_KEY: key,
     STRIPE_WEBHOOK_SECRET: WEBHOOK_SECRET,
     STRIPE_API_BASE: fake.origin,
-    SMTP_URL: `smtp://127.0.0.1:${smtpPort}`,
+    SMTP_URL: smtpUrl,
     UPLOAD_DIR: uploadDir,
     WEB_DIR: path.resolve('dist'),
     TRUST_PROXY_HOPS: '1',
@@ -110,6 +111,7 @@ export async function openStandingDesk(database: TestDatabase): Promise<Standing
     hatchery,
     port,
     origin,
+    smtpUrl,
     authSecret: AUTH_SECRET,
     uploadDir,
     batch: (name, wish = {}) => openBatch(db(), { seller: hatchery, name, ...wish }),
