@@ -15,6 +15,7 @@ import { memberRoutes } from '@/server/members/member-routes'
 import { moderationRoutes } from '@/server/moderation/moderation-routes'
 import { noticeRoutes } from '@/server/notices/notice-routes'
 import { calendarRoutes } from '@/server/orders/calendar-routes'
+import { openapiRoutes } from '@/server/openapi/openapi-routes'
 import { orderRoutes } from '@/server/orders/order-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
@@ -41,6 +42,7 @@ function api(origins: string[]): Router {
   router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
   router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
   router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
+  router.use(openapiRoutes())
   router.use(unknownPath)
   return router
 }

@@ -5,6 +5,7 @@ import { readCaller } from '@/server/auth/read-caller'
 import { admit, type Caller } from '@/server/http/caller'
 import { withIdempotency } from '@/server/http/idempotency'
 import { fieldProblems } from '@/server/http/field-problems'
+import { noteMounted } from '@/server/http/mounted-endpoints'
 import { uploadedFile, type UploadedFile } from '@/server/http/uploaded-file'
 import type { Endpoint, ParsedBody, ParsedParams, ParsedQuery, ReplyOf } from '@/shared/api/endpoint'
 import { Problem, type FieldProblem } from '@/shared/api/problem'
@@ -43,6 +44,7 @@ function readKey(req: Request, endpoint: Endpoint): string {
  * reply parsed through its contract, so that no column leaves by accident.
  */
 export function on<E extends Endpoint>(router: Router, endpoint: E) {
+  noteMounted(endpoint)
   const method = endpoint.method.toLowerCase() as 'get' | 'post' | 'patch' | 'delete'
   return (handler: Handler<E>): void => {
     router[method](endpoint.path, async (req: Request, res: Response) => {

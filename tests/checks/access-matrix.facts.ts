@@ -159,6 +159,7 @@ export const accessMatrix: AccessRow[] = [
   { route: 'GET /healthz', ...open },
   { route: 'GET /readyz', ...open },
   { route: 'GET /sitemap.xml', ...open },
+  { route: 'GET /api/v1/openapi.json', ...open },
   // The shell stands in for what is hidden or never was: nothing of the listing is in it.
   {
     route: 'GET /listings/:listingId',
