@@ -5,6 +5,7 @@ import { buildApp } from '@/server/app'
 import { openAuth } from '@/server/auth/auth'
 import { setClockOffset } from '@/server/clock'
 import { readSettings, type Settings } from '@/server/env'
+import { isStopping, noteStopping } from '@/server/health/stopping'
 import { jobsOf } from '@/server/jobs/jobs'
 import { startJobs } from '@/server/jobs/job-runner'
 import { log } from '@/server/log'
@@ -65,6 +66,10 @@ function main(): void {
     app,
   )
   server.maxConnections = 1024
+  // On the way out a kept connection ends with its answer, so that the client takes its next request elsewhere.
+  server.prependListener('request', (_req, res) => {
+    if (isStopping()) res.setHeader('connection', 'close')
+  })
   server.on('error', (error: NodeJS.ErrnoException) => {
     log.fatal(
       { err: error },
@@ -81,6 +86,7 @@ function main(): void {
   const stop = async (signal: string): Promise<void> => {
     if (stopping) return
     stopping = true
+    noteStopping()
     log.info({ signal }, 'stopping')
     setTimeout(() => process.exit(1), STOP_WITHIN_MS).unref()
     server.closeIdleConnections()

@@ -8,6 +8,8 @@ import { guardAccount, tellAccount } from '@/server/auth/guard-account'
 import { isEmailChange } from '@/server/auth/is-email-change'
 import { MOST_PASSWORD, LEAST_PASSWORD } from '@/server/auth/password-fault'
 import { confirmNewEmailMail } from '@/server/mail/letters/confirm-new-email'
+import { log } from '@/server/log'
+import { MOST_PASSWORD, LEAST_PASSWORD, passwordFault } from '@/server/auth/password-fault'
 import { queueMail } from '@/server/mail/queue-mail'
 import { resetPasswordMail } from '@/server/mail/letters/reset-password'
 import { signUpAgainMail } from '@/server/mail/letters/sign-up-again'
@@ -28,6 +30,8 @@ function build(settings: AuthSettings) {
     baseURL: settings.origin,
     basePath: '/api/auth',
     secret: settings.secret,
+    // Its own lines would stand among ours unstructured; what it adds to a message may be anything.
+    logger: { log: (level, message) => log[level](`auth: ${message}`) },
     trustedOrigins: [settings.origin, ...settings.alsoTrusted],
     database: drizzleAdapter(db(), { provider: 'mysql', schema: tables, transaction: true }),
     emailAndPassword: {

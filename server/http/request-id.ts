@@ -3,10 +3,14 @@ import { randomUUID } from 'node:crypto'
 import type { RequestHandler } from 'express'
 import { pinoHttp } from 'pino-http'
 
+import { describeError } from '@/server/describe-error'
 import { log } from '@/server/log'
 
 /** The token in the address of an unsubscribe link is a permission: no log keeps it. */
 const loggedPath = (url: string) => url.split('?')[0]?.replace(/^(\/unsubscribe\/).*/s, '$1…')
+/** A mail's link to a new password carries its token in the path. */
+const loggedPath = (url: string) =>
+  (url.split('?')[0] ?? '').replace(/^(\/api\/auth\/reset-password\/).+/, '$1[cut]')
 
 /** Gives every request an id, and logs it as one line without query texts: places stand there. */
 export function requestLog(): RequestHandler[] {
@@ -26,6 +30,7 @@ export function requestLog(): RequestHandler[] {
         path: loggedPath(req.url),
       }),
       res: (res: { statusCode: number }) => ({ status: res.statusCode }),
+      err: describeError,
     },
   })
   return [name, write as RequestHandler]

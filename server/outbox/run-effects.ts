@@ -1,3 +1,4 @@
+import { describeError } from '@/server/describe-error'
 import { log } from '@/server/log'
 import { failPoint } from '@/server/outbox/fail-point'
 import {
@@ -38,7 +39,7 @@ async function runOne(effect: Effect): Promise<void> {
     await doer(effect)
     failPoint(`${effect.kind}:done`)
   } catch (error) {
-    const told = error instanceof Error ? error.message : String(error)
+    const told = describeError(error).message
     log.warn({ seq: effect.seq, kind: effect.kind, attempts: effect.attempts, told }, 'effect failed')
     if (error instanceof GiveUp || effect.attempts >= MOST_TRIES) await giveUpEffect(effect.seq, told)
     else await retryEffect(effect.seq, waitMs(effect.attempts), told)

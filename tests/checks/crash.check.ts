@@ -153,16 +153,18 @@ describe('a server that is killed in the middle of an effect', () => {
     const mails = await mailCount()
     const broken = await brokenInvariants(desk.db)
     const dead = await desk.db.$count(outbox, sql`dead_at is not null`)
-    const report = (id: string, figure: number, bar: number | string, pass: boolean) =>
-      reportFigure({ id: `MON-5-${id}`, figure, bar, pass })
-    await report('points', flows.size - unreached.length, POINTS.length, unreached.length === 0)
-    await report('converged-ms', slowestMs, CONVERGED_WITHIN_MS, slow.length === 0)
-    await report('money-faults', money.length, 0, money.length === 0)
-    await report('mails-doubled', mails.doubled, 0, mails.doubled === 0)
-    await report('mails-lost', mails.lost, 0, mails.lost === 0)
-    await report('mails-delivered-again-under-the-same-name', mails.deliveredAgain, 'for the record', true)
-    await report('invariants', broken.length, 0, broken.length === 0)
-    await report('effects-given-up', dead, 0, dead === 0)
+    const figures: [id: string, figure: number, bar: number | string, pass: boolean][] = [
+      ['points', flows.size - unreached.length, POINTS.length, unreached.length === 0],
+      ['converged-ms', slowestMs, CONVERGED_WITHIN_MS, slow.length === 0],
+      ['money-faults', money.length, 0, money.length === 0],
+      ['mails-doubled', mails.doubled, 0, mails.doubled === 0],
+      ['mails-lost', mails.lost, 0, mails.lost === 0],
+      ['mails-delivered-again-under-the-same-name', mails.deliveredAgain, 'for the record', true],
+      ['invariants', broken.length, 0, broken.length === 0],
+      ['effects-given-up', dead, 0, dead === 0],
+    ]
+    for (const [id, figure, bar, pass] of figures)
+      await reportFigure({ id: `MON-5-${id}`, figure, bar, pass })
     expect({ unreached, slow, money, broken, dead }).toEqual({
       unreached: [],
       slow: [],
