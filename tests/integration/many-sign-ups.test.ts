@@ -18,7 +18,11 @@ it('lets a crowd sign up at once, and writes to each of them', async () => {
       server
         .visitor()
         .post('/api/auth/sign-up/email')
-        .send({ name: `Newcomer ${n}`, email: `newcomer${n}@example.org`, password: 'heron-lattice-paddle-31' }),
+        .send({
+          name: `Newcomer ${n}`,
+          email: `newcomer${n}@example.org`,
+          password: 'heron-lattice-paddle-31',
+        }),
     ),
   )
   expect(replies.map((reply) => reply.status)).toEqual(replies.map(() => 200))
