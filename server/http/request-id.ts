@@ -6,11 +6,9 @@ import { pinoHttp } from 'pino-http'
 import { describeError } from '@/server/describe-error'
 import { log } from '@/server/log'
 
-/** The token in the address of an unsubscribe link is a permission: no log keeps it. */
-const loggedPath = (url: string) => url.split('?')[0]?.replace(/^(\/unsubscribe\/).*/s, '$1…')
-/** A mail's link to a new password carries its token in the path. */
+/** Links to leave a list or to a new password carry their permission in the path: no log keeps it. */
 const loggedPath = (url: string) =>
-  (url.split('?')[0] ?? '').replace(/^(\/api\/auth\/reset-password\/).+/, '$1[cut]')
+  (url.split('?')[0] ?? '').replace(/^(\/unsubscribe\/|\/api\/auth\/reset-password\/).*/s, '$1…')
 
 /** Gives every request an id, and logs it as one line without query texts: places stand there. */
 export function requestLog(): RequestHandler[] {

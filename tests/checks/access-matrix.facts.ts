@@ -15,7 +15,8 @@ export type Role = (typeof ROLES)[number]
  * `own`: of the member and the seller, `foreign`: of another member and the other seller. Orders are ended and
  * listings live (foreign ones hidden), so that a caller who gets past the guards meets a harmless 409.
  */
-export type ObjectKind = 'none' | 'order' | 'own-listing' | 'public-listing' | 'version' | 'seller'
+export type ObjectKind =
+  'none' | 'notice' | 'order' | 'agreed-order' | 'own-listing' | 'public-listing' | 'version' | 'seller'
 
 export interface AccessRow {
   /** The contract's name, or method and path of a route outside the contracts. */
@@ -93,6 +94,14 @@ export const accessMatrix: AccessRow[] = [
   { route: 'countFacets', ...open, query: 'near=45202' },
   { route: 'findPins', ...open, query: 'south=38&north=40&west=-86&east=-83&zoom=8' },
   { route: 'readListing', object: 'public-listing', own: everybody, foreign: nobody, missing: nobody },
+  {
+    route: 'readWayHome',
+    object: 'public-listing',
+    query: 'near=45202&day=2027-01-20',
+    own: everybody,
+    foreign: nobody,
+    missing: nobody,
+  },
   { route: 'readSeller', object: 'seller', own: everybody, missing: nobody },
 
   { route: 'openFarm', object: 'none', send: unknownZip, own: '401 422 422 422 422 422 422 422' },
@@ -146,6 +155,17 @@ export const accessMatrix: AccessRow[] = [
   { route: 'stopOrder', send: { cause: 'fraud', animals: 'free', note: NOTE }, ...staffsAct },
   { route: 'decideOrder', send: { outcome: 'handed-over', note: NOTE }, ...staffsAct },
 
+  { route: 'listNotices', object: 'none', own: signedIn },
+  { route: 'countUnreadNotices', object: 'none', own: signedIn },
+  { route: 'readAllNotices', object: 'none', own: signedIn },
+  {
+    route: 'readNotice',
+    object: 'notice',
+    own: '401 200 404 404 404 404 404 404',
+    foreign: nobodySignedIn,
+    missing: nobodySignedIn,
+  },
+
   { route: 'listReviews', object: 'none', own: staffOn('200') },
   { route: 'readReview', object: 'version', own: staffOn('200'), missing: staffOn('404') },
   {
@@ -168,6 +188,17 @@ export const accessMatrix: AccessRow[] = [
     foreign: everybody,
     missing: everybody,
   },
+  // The file is for the two parties, once they have agreed on a time.
+  {
+    route: 'GET /api/v1/orders/:orderId/calendar.ics',
+    object: 'agreed-order',
+    own: '401 200 200 404 404 404 404 404',
+    foreign: '401 404 404 200 404 404 404 404',
+    missing: nobodySignedIn,
+  },
+  // The signed token in the address is the whole permission (RFC 8058); here it is a forged one.
+  { route: 'GET /unsubscribe/:token', object: 'none', own: nobody },
+  { route: 'POST /unsubscribe/:token', object: 'none', send: {}, own: nobody },
   { route: 'GET /photos/:file', object: 'none', own: nobody },
   // Signed by the processor, not by a session: without the signature nobody gets in.
   { route: 'POST /api/v1/stripe-events', object: 'none', send: {}, own: '400 400 400 400 400 400 400 400' },

@@ -110,6 +110,7 @@ function everyKind(): Call[] {
     ['webhook unsigned', '/api/v1/stripe-events', json('{}'), 400],
     ['photo', `/photos/${PHOTO}`, {}, 200],
     ['photo that is not there', `/photos/${'b'.repeat(32)}-320.webp`, {}, 404],
+    ['leaving a list, forged', '/unsubscribe/forged', {}, 404],
     ['alive', '/healthz', {}, 200],
     ['ready', '/readyz', {}, 200],
   ]

@@ -8,7 +8,9 @@ import type { Express } from 'express'
 import type TestAgent from 'supertest/lib/agent'
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest'
 
+import { user } from '@/db/schema/auth'
 import { listing } from '@/db/schema/listings'
+import { notice } from '@/db/schema/notices'
 import type { TestFake } from '@/payments/fake/fake-for-tests'
 import { openSellerAccount } from '@/payments/open-seller-account'
 import { buildBatch } from '@/seed/build-batch'
@@ -16,6 +18,7 @@ import { buildMember } from '@/seed/build-member'
 import { buildSeller } from '@/seed/build-seller'
 import { buildApp } from '@/server/app'
 import type { Caller } from '@/server/http/caller'
+import { newPublicId } from '@/server/new-public-id'
 import { configurePhotos } from '@/server/photos/photo-files'
 import type { Access, Endpoint } from '@/shared/api/endpoint'
 import type { ShownOrder } from '@/shared/contracts/orders'
@@ -125,16 +128,17 @@ let webDir = ''
 const calls = new Map<string, { method: string; address: string }>()
 let endpoints: [name: string, endpoint: Endpoint][] = []
 
-async function endedOrder(batch: DeskBatch, buyer: TestAgent): Promise<string> {
+async function orderOf(batch: DeskBatch, buyer: TestAgent, ending: 'left' | 'agreed'): Promise<string> {
   const reply = await buyer
     .post(`/api/v1/listings/${batch.publicId}/orders`)
     .set(keyed())
     .send(reserveBody(batch))
   expect(reply.status, JSON.stringify(reply.body)).toBe(201)
-  const { orderId } = reply.body as ShownOrder
-  await buyer.post(`/api/v1/orders/${orderId}/departure`).set(keyed()).send({}).expect(200)
+  const order = reply.body as ShownOrder
+  if (ending === 'agreed') await desk.pay(order)
+  else await buyer.post(`/api/v1/orders/${order.orderId}/departure`).set(keyed()).send({}).expect(200)
   await desk.quiet()
-  return orderId
+  return order.orderId
 }
 
 async function payoutsOf(fake: TestFake, email: string): Promise<string> {
@@ -176,11 +180,35 @@ beforeAll(async () => {
   const theirs = await openBatch(db, { seller: other, name: 'matrix' })
   const hidden = await buildBatch(db, { seller: other, name: 'hidden', at: new Date() })
   await db.update(listing).set({ state: 'taken_down' }).where(eq(listing.id, hidden.id))
-  const own = await endedOrder(mine, agents.member)
-  const foreign = await endedOrder(theirs, await desk.signedIn(mail('other-member')))
+  const otherMember = await desk.signedIn(mail('other-member'))
+  const own = await orderOf(mine, agents.member, 'left')
+  const foreign = await orderOf(theirs, otherMember, 'left')
+  const agreed = await orderOf(mine, agents.member, 'agreed')
+  const foreignAgreed = await orderOf(theirs, otherMember, 'agreed')
+  const notices = await Promise.all(
+    ['member', 'other-member'].map(async (name) => {
+      const [row] = await db
+        .select()
+        .from(user)
+        .where(eq(user.email, mail(name)))
+      const told = {
+        publicId: newPublicId(),
+        memberId: row?.id ?? '',
+        kind: 'ready',
+        cause: `matrix:${name}`,
+        listingId: mine.id,
+      }
+      await db
+        .insert(notice)
+        .values({ ...told, facts: { subject: 'Ready', title: 'Bluegill' }, createdAt: new Date() })
+      return told.publicId
+    }),
+  )
   ids = {
+    notice: { own: notices[0], foreign: notices[1], missing: NEVER },
     none: { own: '' },
     order: { own, foreign, missing: NEVER },
+    'agreed-order': { own: agreed, foreign: foreignAgreed, missing: NEVER },
     'own-listing': { own: mine.publicId, foreign: theirs.publicId, missing: NEVER },
     'public-listing': { own: mine.publicId, foreign: hidden.publicId, missing: NEVER },
     version: { own: String(mine.versionId), missing: '4000000000' },
@@ -222,6 +250,7 @@ async function ask(row: AccessRow, role: Role, id: string) {
   if (!call) throw new Error(`nothing is called ${row.route}`)
   const address = call.address
     .replace('*splat', 'get-session')
+    .replace(':token', 'forged')
     .replace(':file', `${'0'.repeat(32)}-320.webp`)
     .replace(/:\w+/, id)
   const verb =
@@ -235,7 +264,9 @@ function anonymised(
   reply: { status: number; headers: Record<string, string>; text: string },
   id: string,
 ): string {
-  const { 'x-request-id': requestId = '-', date: _date, etag: _etag, ...headers } = reply.headers
+  const requestId = reply.headers['x-request-id']
+  const ofTheRequest = /^(x-request-id|date|etag|ratelimit.*)$/
+  const headers = Object.entries(reply.headers).filter(([name]) => !ofTheRequest.test(name))
   const said = `${reply.text}${JSON.stringify(headers)}`
   return `${reply.status} ${said.replaceAll(requestId ?? '-', '').replaceAll(id || 'none', '')}`
 }

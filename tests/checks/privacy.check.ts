@@ -135,6 +135,7 @@ function publicPaths(): string[] {
         `/api/v1/listings/${id}?near=45202`,
         `/api/v1/listings/${id}?near=43215`,
         `/listings/${id}`,
+        `/api/v1/listings/${id}/way-home?near=45202&day=2027-01-20`,
       )
   }
   return paths

@@ -3,7 +3,8 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { buildMember } from '@/seed/build-member'
 import { calendarFaults } from '@/shared/calendar/calendar-faults'
 import { seriesFaults } from '@/shared/calendar/series-faults'
-import { reserveBody, keyed } from '@/tests/support/order-desk'
+import { reserveBody } from '@/tests/support/desk-ground'
+import { keyed } from '@/tests/support/order-desk'
 import { openPickupDesk, type PickupDesk } from '@/tests/support/pickup-desk'
 
 let desk: PickupDesk

@@ -2,7 +2,8 @@ import { expect } from 'vitest'
 
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { ShownOrder } from '@/shared/contracts/orders'
-import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
+import { reserveBody } from '@/tests/support/desk-ground'
+import { keyed, openOrderDesk, type OrderDesk } from '@/tests/support/order-desk'
 
 const DAY_MS = 86_400_000
 
