@@ -6,7 +6,7 @@ const STYLE =
   ':root{color-scheme:light dark}body{margin:0;padding:24px 16px;font:17px/1.5 system-ui,sans-serif}main{max-width:34rem;margin:0 auto}button{min-height:48px;padding:0 20px;font:inherit;font-weight:600;background:#2A3579;color:#fff;border:0;border-radius:4px}a{display:inline-block;min-height:44px;padding:10px 0;color:inherit}:focus-visible{outline:3px solid #2A3579;outline-offset:2px}'
 
 /** Stricter than the app's own policy: no script at all, and this one style. */
-export const PAGE_POLICY = `default-src 'none'; style-src 'sha256-${createHash('sha256').update(STYLE).digest('base64')}'; form-action 'self'; base-uri 'none'; frame-ancestors 'none'`
+export const PAGE_POLICY = `default-src 'none'; style-src 'sha256-${createHash('sha256').update(STYLE).digest('base64')}'; form-action 'self'; base-uri 'none'; object-src 'none'; frame-ancestors 'none'`
 
 interface Told {
   heading: string
