@@ -16,7 +16,16 @@ export type Role = (typeof ROLES)[number]
  * listings live (foreign ones hidden), so that a caller who gets past the guards meets a harmless 409.
  */
 export type ObjectKind =
-  'none' | 'notice' | 'order' | 'agreed-order' | 'own-listing' | 'public-listing' | 'version' | 'seller'
+  | 'none'
+  | 'notice'
+  | 'order'
+  | 'agreed-order'
+  | 'own-listing'
+  | 'public-listing'
+  | 'version'
+  | 'seller'
+  | 'rating'
+  | 'session'
 
 export interface AccessRow {
   /** The contract's name, or method and path of a route outside the contracts. */
@@ -25,7 +34,7 @@ export interface AccessRow {
   send?: object
   query?: string
   /** Expected statuses, a column a role; `missing` is an object that never was. */
-  own: string
+  own?: string
   foreign?: string
   missing?: string
 }
@@ -154,6 +163,35 @@ export const accessMatrix: AccessRow[] = [
   { route: 'contestNoShow', send: { note: NOTE }, ...partysAct },
   { route: 'stopOrder', send: { cause: 'fraud', animals: 'free', note: NOTE }, ...staffsAct },
   { route: 'decideOrder', send: { outcome: 'handed-over', note: NOTE }, ...staffsAct },
+
+  { route: 'rateOrder', send: { marks: { fish: 5, count: 5, contact: 5 } }, ...buyersAct },
+  // Nobody has rated these orders: there is nothing to change or to reply to.
+  {
+    route: 'changeRating',
+    send: { marks: { fish: 5, count: 5, contact: 5 } },
+    object: 'order',
+    own: nobodySignedIn,
+    missing: nobodySignedIn,
+  },
+  {
+    route: 'replyToRating',
+    send: { words: 'Thanks' },
+    object: 'order',
+    own: nobodySignedIn,
+    missing: nobodySignedIn,
+  },
+  { route: 'answerSurvival', send: { alive: 20 }, ...buyersAct },
+  { route: 'listRatings', object: 'seller', own: everybody, missing: nobody },
+  {
+    route: 'hideRatingWords',
+    send: { part: 'words', reason: 'threats' },
+    object: 'rating',
+    missing: staffOn('404'),
+  },
+
+  { route: 'listSessions', object: 'none', own: signedIn },
+  { route: 'endSession', object: 'session', missing: nobodySignedIn },
+  { route: 'endOtherSessions', object: 'none', own: '401 204 204 204 204 204 204 204' },
 
   { route: 'listNotices', object: 'none', own: signedIn },
   { route: 'countUnreadNotices', object: 'none', own: signedIn },

@@ -42,7 +42,7 @@ vi.mock('@/server/http/caller', async (original) => {
   const real = await original<typeof import('@/server/http/caller')>()
   const nobody: Caller = {
     ...{ memberId: '', name: '', email: '', emailVerified: true },
-    ...{ roles: ['member'], hasSecondFactor: false },
+    ...{ roles: ['member'], hasSecondFactor: false, sessionId: '' },
   }
   return {
     ...real,
@@ -213,6 +213,8 @@ beforeAll(async () => {
     'public-listing': { own: mine.publicId, foreign: hidden.publicId, missing: NEVER },
     version: { own: String(mine.versionId), missing: '4000000000' },
     seller: { own: desk.hatchery.publicId, missing: NEVER },
+    rating: { missing: NEVER },
+    session: { missing: randomUUID() },
   }
   endpoints = await everyEndpoint()
   for (const [name, endpoint] of endpoints)

@@ -16,7 +16,8 @@ import { refreshSiteMean } from '@/server/search/refresh-site-mean'
 import type { ShownNotice } from '@/shared/contracts/notices'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import type { ShownRating } from '@/shared/contracts/ratings'
-import { keyed, openOrderDesk, reserveBody, type OrderDesk } from '@/tests/support/order-desk'
+import { reserveBody } from '@/tests/support/desk-ground'
+import { keyed, openOrderDesk, type OrderDesk } from '@/tests/support/order-desk'
 
 const DAY = 24 * 3600_000
 const GOOD = { marks: { fish: 5, count: 4, contact: 5 }, words: 'Lively fish, honest count.' }
