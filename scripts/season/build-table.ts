@@ -1,0 +1,59 @@
+import { CELL_DEG } from '@/shared/domain/season/cell-size'
+import { seasonPacks } from '@/shared/domain/season/season-classes.facts'
+import { encodeFigures } from '@/shared/domain/season/season-code'
+import { animalClassIds, packingClassIds } from '@/shared/domain/season/season-lane'
+import { levelOfDay, type Side } from '@/shared/domain/season/season-scale'
+import { cellClimates, type CellClimate } from '@/scripts/season/cell-climate'
+import { BANDS, bandsOf, bandWeeks } from '@/scripts/season/climate-bands'
+import { isAnswered, limitsOf } from '@/scripts/season/season-limits'
+
+const sides: readonly Side[] = ['cold', 'hot']
+type Row = [row: number, column: number, codes: string]
+
+/** Runs of neighbouring cells, south to north and west to east. */
+function rowsOf(cells: readonly CellClimate[], bands: readonly number[]): Row[] {
+  const sorted = cells
+    .map(({ row, column }, at) => ({ row, column, band: bands[at] ?? 0 }))
+    .sort((a, b) => a.row - b.row || a.column - b.column)
+  const rows: Row[] = []
+  for (const { row, column, band } of sorted) {
+    const last = rows.at(-1)
+    if (last && last[0] === row && last[1] + last[2].length === column) last[2] += encodeFigures([band])
+    else rows.push([row, column, encodeFigures([band])])
+  }
+  return rows
+}
+
+/** The whole season table as the text of its module. */
+export function tableText(): string {
+  const cells = cellClimates()
+  const bands = bandsOf(cells)
+  const air = bandWeeks(cells, bands)
+  const weeks = (side: Side, nights: number) =>
+    air.map((band) => encodeFigures((band[nights - 1] ?? []).map((week) => levelOfDay(side, week[side]))))
+  const limits = animalClassIds.flatMap((animals) =>
+    packingClassIds.flatMap((packing) => {
+      if (!isAnswered({ animals, packing, packs: 'none' })) return []
+      const of = (side: Side) => (packs: (typeof seasonPacks)[number]) =>
+        encodeFigures(limitsOf({ animals, packing, packs }, side))
+      const byPacks = seasonPacks.map((packs) => [packs, { cold: of('cold')(packs), hot: of('hot')(packs) }])
+      return [[`${animals} ${packing}`, Object.fromEntries(byPacks) as object] as const]
+    }),
+  )
+  const table = {
+    bands: BANDS,
+    weeks: Object.fromEntries(
+      sides.map((side) => [side, { 1: weeks(side, 1), 2: weeks(side, 2) }]),
+    ) as object,
+    limits: Object.fromEntries(limits) as object,
+  }
+  return `// Written by \`npm run season:build\` with the trip engine, from assets/data/climate-grid.csv (NOAA NCEI normals) and the
+// classes of season-classes.facts.ts; do not edit. Figures are letters of season-code.ts, levels those of season-scale.ts.
+import type { SeasonTable } from '@/shared/domain/season/season-table'
+
+/** Climate bands of cells of ${CELL_DEG} degrees: row and column of the first cell, then a letter a cell eastwards. */
+export const bandRows: readonly (readonly [row: number, column: number, bands: string])[] = ${JSON.stringify(rowsOf(cells, bands))}
+
+export const seasonTable: SeasonTable = ${JSON.stringify(table)}
+`
+}
