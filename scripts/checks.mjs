@@ -23,4 +23,11 @@ export const CHECKS = [
     faultCommand: ['node', 'scripts/check-native.mjs', '--plant-fault'],
     ci: false,
   },
+  {
+    name: 'season',
+    command: ['node', '--import', 'tsx', 'scripts/check-season.ts'],
+    sliceCommand: ['node', '--import', 'tsx', 'scripts/check-season.ts', '--slice'],
+    faultCommand: ['node', '--import', 'tsx', 'scripts/check-season.ts', '--plant-fault'],
+    ci: true,
+  },
 ]

@@ -1,13 +1,13 @@
 import { CELL_DEG } from '@/shared/domain/season/cell-size'
-import { seasonPacks } from '@/shared/domain/season/season-classes.facts'
+import { seasonOptionIds } from '@/shared/domain/season/season-classes.facts'
 import { encodeFigures } from '@/shared/domain/season/season-code'
 import { animalClassIds, packingClassIds } from '@/shared/domain/season/season-lane'
-import { levelOfDay, type Side } from '@/shared/domain/season/season-scale'
+import { levelOfDay } from '@/shared/domain/season/season-scale'
+import { mayServe, scaleOf, weekDays, type WeekDay } from '@/shared/domain/season/season-table'
 import { cellClimates, type CellClimate } from '@/scripts/season/cell-climate'
 import { BANDS, bandsOf, bandWeeks } from '@/scripts/season/climate-bands'
 import { isAnswered, limitsOf } from '@/scripts/season/season-limits'
 
-const sides: readonly Side[] = ['cold', 'hot']
 type Row = [row: number, column: number, codes: string]
 
 /** Runs of neighbouring cells, south to north and west to east. */
@@ -29,22 +29,24 @@ export function tableText(): string {
   const cells = cellClimates()
   const bands = bandsOf(cells)
   const air = bandWeeks(cells, bands)
-  const weeks = (side: Side, nights: number) =>
-    air.map((band) => encodeFigures((band[nights - 1] ?? []).map((week) => levelOfDay(side, week[side]))))
+  const weeks = (day: WeekDay, nights: number) =>
+    air.map((band) =>
+      encodeFigures((band[nights - 1] ?? []).map((week) => levelOfDay(scaleOf[day], week[day]))),
+    )
   const limits = animalClassIds.flatMap((animals) =>
     packingClassIds.flatMap((packing) => {
-      if (!isAnswered({ animals, packing, packs: 'none' })) return []
-      const of = (side: Side) => (packs: (typeof seasonPacks)[number]) =>
-        encodeFigures(limitsOf({ animals, packing, packs }, side))
-      const byPacks = seasonPacks.map((packs) => [packs, { cold: of('cold')(packs), hot: of('hot')(packs) }])
-      return [[`${animals} ${packing}`, Object.fromEntries(byPacks) as object] as const]
+      if (!isAnswered({ animals, packing, option: 'none-middle' })) return []
+      const byOption = seasonOptionIds.map((option) => {
+        const served = weekDays.filter((day) => mayServe(option, day))
+        const byDay = served.map((day) => [day, encodeFigures(limitsOf({ animals, packing, option }, day))])
+        return [option, Object.fromEntries(byDay) as object]
+      })
+      return [[`${animals} ${packing}`, Object.fromEntries(byOption) as object] as const]
     }),
   )
   const table = {
     bands: BANDS,
-    weeks: Object.fromEntries(
-      sides.map((side) => [side, { 1: weeks(side, 1), 2: weeks(side, 2) }]),
-    ) as object,
+    weeks: Object.fromEntries(weekDays.map((day) => [day, { 1: weeks(day, 1), 2: weeks(day, 2) }])) as object,
     limits: Object.fromEntries(limits) as object,
   }
   return `// Written by \`npm run season:build\` with the trip engine, from assets/data/climate-grid.csv (NOAA NCEI normals) and the

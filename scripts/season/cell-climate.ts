@@ -7,10 +7,16 @@ import { readClimateCsv } from '@/shared/domain/climate/read-climate-csv'
 import { SEASON_CONFIDENCE } from '@/shared/domain/season/season-classes.facts'
 import { CELL_DEG } from '@/shared/domain/season/cell-size'
 
-/** The harshest cold and hot day that any point of a cell can have in a week. */
+/** The days that any point of a cell can have in a week: its cold and hot design days, each at both of its ends. */
 export interface WeekAir {
+  /** The coldest cold day. */
   cold: AirDay
+  /** The hottest hot day. */
   hot: AirDay
+  /** The warmest cold day. */
+  mildCold: AirDay
+  /** The coolest hot day. */
+  mildHot: AirDay
 }
 
 export interface CellClimate {
@@ -23,6 +29,8 @@ export interface CellClimate {
   weeks: readonly (readonly WeekAir[])[]
 }
 
+/** A node's spread counts as 1 °C at least; the smallest in the table is 0.7 °C, and nights count 1.6 of it at most. */
+const SPREAD_SLACK_C = 0.5
 const YEAR = 365
 export const WEEKS = 52
 
@@ -39,19 +47,25 @@ function designDay(day: NormalDay, nights: number): WeekAir {
   const apart = designWeather(steep, nights, SEASON_CONFIDENCE)
   if (!apart) throw new Error('The season has no confidence.')
   const [below, above] = [apart.cold.minC + 1000, apart.hot.maxC - 1000]
-  return {
-    cold: { minC: day.minC + below, maxC: day.maxC - above },
-    hot: { minC: day.minC - below, maxC: day.maxC + above },
-  }
+  const cold = { minC: day.minC + below, maxC: day.maxC - above }
+  const hot = { minC: day.minC - below, maxC: day.maxC + above }
+  // In its mildest form minimum and maximum count in order; between nodes the spread may be as small as nature has it.
+  const mildCold = { minC: cold.minC + SPREAD_SLACK_C, maxC: Math.max(cold.minC, cold.maxC) + SPREAD_SLACK_C }
+  const mildHot = { minC: Math.min(hot.minC, hot.maxC) - SPREAD_SLACK_C, maxC: hot.maxC - SPREAD_SLACK_C }
+  return { cold, hot, mildCold, mildHot }
 }
 
-const harsher = (a: WeekAir, b: WeekAir): WeekAir => ({
-  cold: { minC: Math.min(a.cold.minC, b.cold.minC), maxC: Math.min(a.cold.maxC, b.cold.maxC) },
-  hot: { minC: Math.max(a.hot.minC, b.hot.minC), maxC: Math.max(a.hot.maxC, b.hot.maxC) },
-})
+const least = (a: AirDay, b: AirDay) => ({ minC: Math.min(a.minC, b.minC), maxC: Math.min(a.maxC, b.maxC) })
+const most = (a: AirDay, b: AirDay) => ({ minC: Math.max(a.minC, b.minC), maxC: Math.max(a.maxC, b.maxC) })
 
-export const harshest = (all: readonly WeekAir[]): WeekAir =>
-  all.reduce((worst, one) => harsher(worst, one))
+/** Both ends of all of them. */
+export const widest = (all: readonly WeekAir[]): WeekAir =>
+  all.reduce((a, b) => ({
+    cold: least(a.cold, b.cold),
+    hot: most(a.hot, b.hot),
+    mildCold: most(a.mildCold, b.mildCold),
+    mildHot: least(a.mildHot, b.mildHot),
+  }))
 
 /** Every half-degree cell with at least one node of the climate table at its corners. */
 export function cellClimates(): CellClimate[] {
@@ -62,7 +76,7 @@ export function cellClimates(): CellClimate[] {
     const weeks = [1, 2].map((nights) => {
       const days = year.map((day) => designDay(day, nights))
       return Array.from({ length: WEEKS }, (_, week) =>
-        harshest(daysOfWeek(week + 1).flatMap((day) => days[day] ?? [])),
+        widest(daysOfWeek(week + 1).flatMap((day) => days[day] ?? [])),
       )
     })
     nodes.set(`${Math.round(lat / CELL_DEG)} ${Math.round(lng / CELL_DEG)}`, weeks)
@@ -73,7 +87,7 @@ export function cellClimates(): CellClimate[] {
     const [row = 0, column = 0] = key.split(' ').map(Number)
     const found = cornersOf(nodes, row, column)
     const weeks = [0, 1].map((nights) =>
-      Array.from({ length: WEEKS }, (_, week) => harshest(found.flatMap((node) => node[nights]?.[week] ?? []))),
+      Array.from({ length: WEEKS }, (_, week) => widest(found.flatMap((node) => node[nights]?.[week] ?? []))),
     )
     return { row, column, weight: 1 + (weights.get(key) ?? 0), weeks }
   })

@@ -1,4 +1,4 @@
-import { harshest, type CellClimate, type WeekAir } from '@/scripts/season/cell-climate'
+import { widest, type CellClimate, type WeekAir } from '@/scripts/season/cell-climate'
 
 /** As many classes of weekly low and high as a listing's `lane` has room for. */
 export const BANDS = 48
@@ -31,7 +31,12 @@ export function bandsOf(cells: readonly CellClimate[]): number[] {
     const best = groups.reduce((a, b) => ((b.split?.gain ?? 0) > (a.split?.gain ?? 0) ? b : a))
     if (!best.split) break
     const [left, right] = best.split.halves
-    groups.splice(groups.indexOf(best), 1, { points: left, split: bestSplit(left) }, { points: right, split: bestSplit(right) })
+    groups.splice(
+      groups.indexOf(best),
+      1,
+      { points: left, split: bestSplit(left) },
+      { points: right, split: bestSplit(right) },
+    )
   }
   const bands = cells.map(() => 0)
   groups.forEach(({ points }, band) => points.forEach(({ cell }) => (bands[cell] = band)))
@@ -44,7 +49,9 @@ function bestSplit(points: readonly Point[]): Split | null {
   let best: Split | null = null
   const whole = lossesUpTo(points).at(-1) ?? 0
   for (let feature = 0; feature < count; feature++) {
-    const sorted = [...points].sort((a, b) => (a.features[feature] ?? 0) - (b.features[feature] ?? 0) || a.cell - b.cell)
+    const sorted = [...points].sort(
+      (a, b) => (a.features[feature] ?? 0) - (b.features[feature] ?? 0) || a.cell - b.cell,
+    )
     const [low, high] = [lossesUpTo(sorted), lossesUpTo([...sorted].reverse())]
     for (let cut = 1; cut < sorted.length; cut++) {
       const gain = whole - (low[cut - 1] ?? 0) - (high[sorted.length - cut - 1] ?? 0)
@@ -70,14 +77,14 @@ function lossesUpTo(points: readonly Point[]): number[] {
   })
 }
 
-/** The harshest days of any cell of each band, by nights (1, 2) and week. */
+/** The days of all cells of each band, by nights (1, 2) and week. */
 export function bandWeeks(cells: readonly CellClimate[], bands: readonly number[]): WeekAir[][][] {
   return Array.from({ length: BANDS }, (_, band) => {
     const members = cells.filter((_cell, at) => bands[at] === band)
     if (members.length === 0) return []
     return [0, 1].map((nights) =>
       (members[0]?.weeks[nights] ?? []).map((_day, week) =>
-        harshest(members.flatMap(({ weeks }) => weeks[nights]?.[week] ?? [])),
+        widest(members.flatMap(({ weeks }) => weeks[nights]?.[week] ?? [])),
       ),
     )
   })

@@ -1,7 +1,8 @@
 import type { DesignWeather } from '@/shared/domain/climate/design-weather'
-import { animalClasses, type SeasonPacks } from '@/shared/domain/season/season-classes.facts'
-import { dayOfLevel, LEVELS, type Side } from '@/shared/domain/season/season-scale'
-import { seasonTrip, type SeasonPacking } from '@/shared/domain/season/season-trip'
+import { animalClasses } from '@/shared/domain/season/season-classes.facts'
+import { dayOfLevel, LEVELS } from '@/shared/domain/season/season-scale'
+import { scaleOf, type WeekDay } from '@/shared/domain/season/season-table'
+import { packedC, seasonTrip, type SeasonPacking } from '@/shared/domain/season/season-trip'
 import { findSpecies } from '@/shared/domain/species/find-species'
 import { checkTrip } from '@/shared/domain/transport/check-trip'
 import type { Reason } from '@/shared/domain/transport/verdict'
@@ -9,8 +10,8 @@ import type { Reason } from '@/shared/domain/transport/verdict'
 const coldCodes: readonly Reason['code'][] = ['too-cold', 'nearly-too-cold', 'freezes', 'air-too-cold']
 
 /** A change of temperature speaks against the cold when the water fell, against the heat when it rose. */
-function isOfCold({ code, value }: Reason, packedC: number): boolean {
-  return code === 'changes-too-far' ? (value ?? 0) < packedC : coldCodes.includes(code)
+function isOfCold({ code, value }: Reason, startC: number): boolean {
+  return code === 'changes-too-far' ? (value ?? 0) < startC : coldCodes.includes(code)
 }
 
 function membersOf({ animals }: SeasonPacking) {
@@ -23,8 +24,7 @@ function membersOf({ animals }: SeasonPacking) {
 
 /** Whether a class can be answered for at all: in weather of its own warmth nothing about it is unknown. */
 export function isAnswered(packing: SeasonPacking): boolean {
-  const { packedC } = animalClasses[packing.animals]
-  const mild = { minC: packedC - 4, maxC: packedC - 2 }
+  const mild = { minC: packedC(packing) - 4, maxC: packedC(packing) - 2 }
   const weather: DesignWeather = { cold: mild, hot: mild }
   return membersOf(packing).every((species) =>
     checkTrip(seasonTrip(species, packing, { origin: weather, destination: weather })).reasons.every(
@@ -33,32 +33,30 @@ export function isAnswered(packing: SeasonPacking): boolean {
   )
 }
 
-/** Whether the cold (or hot) days of these levels leave every member safe. */
-function bears(packing: SeasonPacking, side: Side, [from, to]: readonly [number, number]): boolean {
-  const { packedC } = animalClasses[packing.animals]
-  const [here, there] = [dayOfLevel(side, from), dayOfLevel(side, to)]
+/** Whether days of these levels leave every member safe: cold days at their harshest and at their mildest, and hot days. */
+export function bears(packing: SeasonPacking, day: WeekDay, [from, to]: readonly [number, number]): boolean {
+  const scale = scaleOf[day]
+  const side = day === 'cold' || day === 'mildCold' ? 'cold' : 'hot'
+  const [here, there] = [dayOfLevel(scale, from), dayOfLevel(scale, to)]
   const weather = { origin: { cold: here, hot: here }, destination: { cold: there, hot: there } }
-  return membersOf(packing).every((species) => {
-    const judged = checkTrip(seasonTrip(species, packing, weather))[side]
-    return judged?.reasons.every(
-      (reason) => reason.verdict === 'safe' || isOfCold(reason, packedC) !== (side === 'cold'),
-    )
-  })
+  return membersOf(packing).every((species) =>
+    checkTrip(seasonTrip(species, packing, weather))[side]?.reasons.every(
+      (reason) => reason.verdict === 'safe' || isOfCold(reason, packedC(packing)) !== (scale === 'cold'),
+    ),
+  )
 }
 
 /**
  * For each level at the origin the harshest level at the destination that leaves all members safe; null: none does. Milder
  * air never makes it worse, so the limit is followed downwards from the mildest origin.
  */
-export function limitsOf(packing: SeasonPacking, side: Side): (number | null)[] {
+export function limitsOf(packing: SeasonPacking, day: WeekDay): (number | null)[] {
   const limits: (number | null)[] = Array.from({ length: LEVELS }, () => null)
   let least = 0
   for (let from = LEVELS - 1; from >= 0; from--) {
-    while (least < LEVELS && !bears(packing, side, [from, least])) least++
+    while (least < LEVELS && !bears(packing, day, [from, least])) least++
     if (least === LEVELS) break
     limits[from] = least
   }
   return limits
 }
-
-export type Limits = Record<SeasonPacks, Record<Side, string>>

@@ -1,15 +1,15 @@
 import {
   packingClasses,
-  seasonPacks,
+  seasonOptionIds,
+  seasonOptions,
   type AnimalClassId,
   type PackingClassId,
-  type SeasonPacks,
+  type SeasonOption,
 } from '@/shared/domain/season/season-classes.facts'
 import { valueOf } from '@/shared/domain/season/season-code'
 import { animalClassIds, laneOf, packingClassIds } from '@/shared/domain/season/season-lane'
-import type { SeasonTable } from '@/shared/domain/season/season-table'
+import type { SeasonTable, WeekDay } from '@/shared/domain/season/season-table'
 import { seasonTable } from '@/shared/domain/season/season-table.gen'
-import type { Side } from '@/shared/domain/season/season-scale'
 
 export type SeasonVerdict = 'safe' | 'safe-with-packs' | 'too-cold' | 'too-hot' | 'unknown'
 
@@ -23,34 +23,49 @@ export interface Shipment {
 
 export interface Season {
   verdict: SeasonVerdict
-  /** What to put into the box; `none` unless the verdict is `safe-with-packs`. */
-  packs: SeasonPacks
+  /**
+   * Rows of `seasonOptions`: packs in each box and warmth at packing, for when cold and for when warm days are forecast.
+   * null unless safe.
+   */
+  forCold: SeasonOption | null
+  forHeat: SeasonOption | null
 }
 
 export const WEEKS_A_YEAR = 52
 
-const unknown: Season = { verdict: 'unknown', packs: 'none' }
+const none = { forCold: null, forHeat: null }
+const unknown: Season = { verdict: 'unknown', ...none }
 
 /**
  * Whether animals of a class, packed so, usually survive being shipped in this ISO week (1-52; 53 counts as 52), by
- * long-term weather: safe in nine of ten such trips. Stricter than the trip check, never milder.
+ * long-term weather: safe in nine of ten such trips on the cold and on the hot side, each day packed as its forecast asks:
+ * `safe` needs no packs for that, `safe-with-packs` does. Stricter than the trip check on either day, never milder.
  */
 export function seasonAt(shipment: Shipment, week: number, table: SeasonTable = seasonTable): Season {
   const { origin, destination, animals, packing } = shipment
-  const rows = table.limits[`${animals} ${packing}`]
-  if (origin === null || destination === null || !rows || !Number.isInteger(week) || week < 1 || week > 53) return unknown
-  const at = Math.min(week, WEEKS_A_YEAR) - 1
+  const limits = table.limits[`${animals} ${packing}`]
+  if (origin === null || destination === null || !limits || !isWeek(week)) return unknown
   const { nights } = packingClasses[packing]
-  const bears = (packs: SeasonPacks, side: Side) => {
-    const weeks = table.weeks[side][nights]
+  const at = Math.min(week, WEEKS_A_YEAR) - 1
+  const bears = (option: SeasonOption, day: WeekDay) => {
+    const weeks = table.weeks[day][nights]
     const [from, to] = [valueOf(weeks[origin] ?? '', at), valueOf(weeks[destination] ?? '', at)]
-    const least = from === null ? null : valueOf(rows[packs][side], from)
+    const least = from === null ? null : valueOf(limits[option][day] ?? '', from)
     return to !== null && least !== null && to >= least
   }
-  const packs = seasonPacks.find((choice) => bears(choice, 'cold') && bears(choice, 'hot'))
-  if (packs !== undefined) return { verdict: packs === 'none' ? 'safe' : 'safe-with-packs', packs }
-  return { verdict: bears('none', 'cold') ? 'too-hot' : 'too-cold', packs: 'none' }
+  const forCold = seasonOptionIds.find((one) => bears(one, 'cold') && bears(one, 'mildCold'))
+  const forHeat = seasonOptionIds.find((one) => bears(one, 'hot') && bears(one, 'mildHot'))
+  if (forCold && forHeat) {
+    const isBare = [forCold, forHeat].every((option) => seasonOptions[option].kind === 'none')
+    return { verdict: isBare ? 'safe' : 'safe-with-packs', forCold, forHeat }
+  }
+  // What hurts a box without packs, made as warm or as cool as it may be, gives the season its name.
+  const [coldHurts, heatHurts] = [!bears('none-warm', 'cold'), !bears('none-cool', 'hot')]
+  const isHot = coldHurts === heatHurts ? forCold !== undefined : heatHurts
+  return { verdict: isHot ? 'too-hot' : 'too-cold', ...none }
 }
+
+const isWeek = (week: number) => Number.isInteger(week) && week >= 1 && week <= WEEKS_A_YEAR + 1
 
 /** All 52 weeks, first ISO week first. */
 export function seasonStrip(shipment: Shipment): Season[] {

@@ -1,6 +1,5 @@
 // Figures 0 to 88 as one plain character each, none of which a string literal has to escape. The last means "none".
-const alphabet =
-  '0123456789ABCDEFGHIJKLMNOPQRSTUVWXYZabcdefghijklmnopqrstuvwxyz!#%&()*+,-./:;<=>?@[]^_{|}~ '
+const alphabet = '0123456789ABCDEFGHIJKLMNOPQRSTUVWXYZabcdefghijklmnopqrstuvwxyz!#%&()*+,-./:;<=>?@[]^_{|}~ '
 
 /** Figures of the season table as text. null: none. */
 export function encodeFigures(figures: readonly (number | null)[]): string {

@@ -376,6 +376,108 @@ export const seasonTable: SeasonTable = {
         'QQQQQRSTUWXYabdeghjlmoprtuuvvwvvusrpnljhgedcaYXVTRRQ',
       ],
     },
+    mildCold: {
+      '1': [
+        '=?@@?><;/-+(%zwusqnmkiggfffeeefgghiklmnprtvy#&*+-/:<',
+        '!#%##!zzyxwutrqonmlkjigfeedcccddeeghijkmnpqsuvxyyyyz',
+        'wxyxxwwvvvusrqonmlkjigffedbaaaaaaaceghjklmoprtuvvvvv',
+        'rssrrrrqqpponmlkjjihgfeddccbbbbbbbcdefghijklnopqqrrr',
+        ')***)(%!ywvtrpnmkjhfecbaZYXXXXXXXXZbcefhjlnprsuwy#&(',
+        '&)*)((%#zxvusponljigfdcbZYWVVVVVWWYabdfiklnpqrsuwy!%',
+        '%&())(&#!zxvtrpomljihfdccbaZZZZZZZbcefgiklnoqrsuwxz!',
+        '+,,++*(%#zxvtrpnmkjhgedcbaZYYYXXXXacegikmoqrtuvx!%(*',
+        'wvvvvvutsqponmlkjigfdcaZXWUSSSTTTTVXZbdegikmprstuvxw',
+        'yxxxxwvusrponmlkihfecaZXWVUTTTTUUUWYabdfhjlnprsuvwyy',
+        'ttssssrrqpponmlkjhgfdcaZYYXWWWVVVVXZacdgijlmnopqrsst',
+        '!#%%##!zxwusrpnmljigfdcbaZYXXXXXXYZbcdfhiklnopqsuvxz',
+        'nmmmllkkjihgedcaZYXVUSRQPONMMMMNNNPQRSUVXZbcegijkmnn',
+        'hgggggfeedcbaYXWVTSRQPONMLLKKKLLLLMNOOQRTVWYaceffghh',
+        'WWWWWWWWWVVVVVVUUUUTTSSRQPONNNNOOOPQRRSSSSTTTUUUVVWW',
+        'fffffffeeeddddccbaZYXWVUTSQQQQQQQRRSTUVXYZabccdeffgg',
+        'ccccbbaaaZYYXWWVUTSRQPONNNNNNNNNNNNOOOPQQRSTVWXYZabb',
+        'VVVVVVVVUUUUUTTSRQQPONNMMMMMMMMMMMMMNNNOPPQRSSSTTUUV',
+        'efeeeddccbaZYXWVUTSRQPOONNNNNNNNNNOOPQRTUVWXYZabcdde',
+        'jkkjjiigfedcbZYXWUTSRQPOOOONNNNNNNOPQRSTVWYZbdefghij',
+        'ihhhggfeedcbaYXWVTSRQONMLKJIIIJJJJLMNOPRTVWYabdeghii',
+        'opoonnlkjihgfedcaZYXWUTSSRQQQQQQQQRSTUVXZbcefgijklmn',
+        'qqqpoonmkjihgedcbaYXWVUTTSRRRRRQQQSTVWXZacdfghjkmnop',
+        'qqqpponmlkjhgfedcbaZYWVUTSRRRRRSSSTUVWYabdeghijkmnop',
+        'mnmmllkjhgfedcbaZYXWUTSRRQQPPPPQQQRSTUVXYZacefhijklm',
+        'kkkjjihhgfedcbaZYXWVUTRRQQQPPPPPPPQRSSUWXYabcdefgijj',
+        '&&&&%#!yxvtrpnlkjhgedbZYYXWWWWWWXXYabcegikmnprsvxz#%',
+        'xwwwwvutsqponmkjihfecaYXWVUTTTTTUUWYZacegiklnoqstvxx',
+        'zz!zzyxwutrpnmkjhgfdcaZYXWWVVVVWWWYZabdegikmnpqsuvxy',
+        'yzzzyxwutrqomkjigfdcaZYXWVUTTTUUUUWXZacefhjlnoprtvwy',
+        'z!#!!zyxwutrpnmkjigedbZYYXWVVVVWWWXZacdfhjkmnoprtvwy',
+        'z!#!!zyxwvtrqomlkihgedbaZZYXXXXYYYZbcdfgiklnopqrtvwx',
+        'xyzyyxwvutrpomkjihfedbaZYXWWWWWWXXYZbcdfhjklmnpqstvw',
+        'vwxxxwvutrqonlkihgedbaYXWVUUUUUUUUVXYZbdegijklmoqrtu',
+        'oonnmllkkjjihgfecbZYWVTSRQPOOOPPPPRSTUWYabdfgiklmnno',
+        'uuuuttsqponlkjhgfedcaZXWWVUUUUUUUUWXYZbceghjkmnoqrtu',
+        'rrrqqpponmkjihgedcaZXWUUTSRQQRRRSSTVWYZbdeghjlmopqsr',
+        'ttttttsrqponmlkjihfecaZXWVTSSSSTTTVXZacegiklmoprrstt',
+        'poooooonmmllkkjihgfedcaZXWUSSSTTTTVXYabdeghjklmnnopp',
+        'vxyxxwvutrqomkjihgfdcaZYXWVVVVVVVWXYZbcdfhijlmnpqrtu',
+        'jjjjjjjiiiihggfdcbaYXWVUTSRQQQQRRRSTUVWYZbceghiijjkj',
+        'iiiihhhhhggggffecbaZYXWVUTSRRRRRSSTUUVWYZbceffghhiii',
+        'lkkkkkkkjjjjiiihhgffedccbbaZZZZYYYZabbcefgghiijkklll',
+        'sstsrrqonmlkihgedbaYXWUTTSSRRRRSSSTVWXYaceghiklmopqr',
+        'qppooonmlkjihgfecbaYXVUTSRPPPPPPQQRSUVWYacdfhjkmnoqq',
+        'uuutssrqonmkjhgfedcbZYXWVUTTTTTUUUVWXYZbdegijlmoprst',
+        'vvwvvvutsrpnmkihgfecbZYWWVUTTUUUUUVXYZbdegijklmoqrtu',
+        'tuvuutssrqonljihfedbZYWVUTTSSSSTTTUVXYacdfhijlmnpqst',
+      ],
+      '2': [
+        '?@@@@@><;/,*(#ywtrpnlkihggffffgghijlmnoqtvxz%)+-/;<>',
+        '%&(&%##!!zxwusqponmkjihgfedddddeefgijklnoqrtvxzzz!!#',
+        'yz!zyyxxwwvusrponmljihgffecbbbbbbbdfhijlmnprtuwwwwwx',
+        'ttttsssrrqqponmlkjihggfeddcccccccccdefghjklmopqrrsss',
+        '+,,++*(%!ywusqpnmkihfdcbaZYXXYYYYYacdfgikmoqsuwy!%)*',
+        ')*++*)(%#zxvtrpomljigedcaZXWWWWWXXZbdfhjlmoqstuwy!%&',
+        '()*++*)&%!ywusqpomljigeddcbaaaaaaacdfgijlnoqrstvxz#%',
+        '-.--,+*(%!ywusqpnmkihfedcbaZZYYYYYbdfhjlnprtuvxz#&*,',
+        'xxxxwwvutsqqonmlkjigfdbaYXVTTTUUUUWYaceghjloqstuwxyx',
+        'zzzzzyxvusrqpnmlkihfdcaYXWVUUUUUVVXZbcegikmoqsuvwyzz',
+        'uuutttssrqpponmlkjhgedbaZZYXXWWWWWYabdfhjklnopqrstuu',
+        '%&((&&%!zxwusqonmkjhgedcbaZYYYYYYYabdfgiklnopqstvxz#',
+        'onnnnmmlkkihgedcaZYWVTRRQPONNNNOOOQRSTUWYacdfhjklnoo',
+        'hhhhhhhgfedcbZYXWVTSRQPONMMLLLLLMMNOPPRSUWXZbdffghih',
+        'XXXXXXXWWWWWWVVVVUUUTTSSRQPOOOOOPPQRSSSSTTTTUUUVVWWX',
+        'gggggggffeeeeeddcbaZYXWVUSRQQQRRRRSTUVWYZabbcdefgghg',
+        'cdddccbbbaZZYXXWVUTSQPOOOOOOOONNNNOOPPPQRSTUWXYZabcc',
+        'WWWWWWWVVVVUUUTTSRQPPONNMMMMMMMMMMNNNNOPPQRSSTTTUUVV',
+        'fffffeeddcbaZYXWVUTSRQPOOONNNNNNNNOPQRSTVWXYZabcddef',
+        'kllkkjjihgedcbZYXVUTRQPPOOOOOOOOOOPQRRTUWXZbcefghijk',
+        'jiiiihhgfedcbZYXWVTSRQONMLKJJJJKKKMNOPQSUWXZbdeghijj',
+        'qqqpoonmljihgfedbaZYWVUTSSRRRQQQQQSTUVWYacdfghjkmnop',
+        'rrrqqponmljihgedcbZYXWVUTTSRRRRRRRTUWXYabdeghjklnoqq',
+        'rrrrqqonmlkjhgfedcbaZXVUUTSSSSSSSTUVWXZbceghijkmnoqq',
+        'ooonnmlkjihfedcbaZYWVUTSRRQQQQQQQQRSTUWYZabdfgijklnn',
+        'lllkkjjihgfedcbaZYXWUTSRRQQQQQQQQQRSSTVXYZacdefgijkl',
+        '())((&%!ywusqonlkihfecaZZYXWWXXXXYZbcefhjlnprsuwy#&(',
+        'yyyxxwvutrqponmkjihfdbZYXWVUUUUUUVXZaceghjlmoqrtvwyy',
+        '!#%#!!yxwutrpnlkjhgedbaZYXWWWWWWXXZabceghjlnpqsuvxyz',
+        '!##!!zywutrpomkjhgedbaYXXWVUUUVVVVXYabdfhikmoqrtvwyz',
+        '!%&%##!yxwusqonmkjhgecaZZYXWWWWWXXYabdegikmnoqrtuwyz',
+        '!#&%##!yxwutrpnmljihfdcbaZZYYYYYYZabdeghjlnopqrtuwyz',
+        'z!!!zzywvusrpnmkjihfecbaZYXWWWXXXYZacdegiklmopqrtvwx',
+        'xyzzyyxvutrqomljihfecbZYXWVUUVVVVVWXZaceghjkmnoprtuw',
+        'ppoonnmllkkjihgfecbZYWUTSRQPPPPQQQSTUVXZbceghjlmnopp',
+        'vwwvvutsrponlkihgfedbaYXWWVUUUVVVVXYZabdfhjklnoqrtuv',
+        'ssssrrqponmljihgedbaYXVVUTSRRRSSSTUWXZacefhjkmnpqrts',
+        'uuuuuutsrqponmlkjihfdbaYXWUTTTTTUUWYacdfhjlmoprsttuu',
+        'qqqqppponnmmlkkjihgfedbaYXVTTTUUUUWYZbdefhjklmnoppqq',
+        'xyzzyxxvutrpomkjihgedbaZYXWVVVWWWWYZabdfgijkmnoqrtuw',
+        'kkkkkkjjjjjihhgedcbaZYWVUTSRRRRRSSTUVWXZacdfhijjkklk',
+        'jjjjiiiihhhhgggfecbaZYXWVUSSSSSSSTUUVWXZacdfgghiijjj',
+        'mllllllkkkkjjjjihhggfedccbbaaaZZZZabccdfgghijjkkllmm',
+        'tuuttsrqpnmljihfecbZYWVUTTSSSSSSTTUVWXZbdfhiklmopqst',
+        'rqqqpponmllkjigfecbZYXVUTRQPPQQQQRSTVWXZbdfgikmnoqrr',
+        'vvvuutsrqonmkjhgfedcaZXWWVUUUUUUUUWXYZaceghjkmnprsuu',
+        'wxyxxwvutsqpnlkjhgfdcaYXWWVUUUUVVVWXZaceghjkmnoprtuv',
+        'vwwwvvutsrqomljihfecaZXWVUTTTTTTTUVWYZbdfgijlmnpqstu',
+      ],
+    },
     hot: {
       '1': [
         'vvwwwwvvtsqnljhfdcaYXWUUUUUUUUVWXYZbbcdeghiklnoprsuv',
@@ -478,1062 +580,2268 @@ export const seasonTable: SeasonTable = {
         'bcccccbbaZYXWUTTSRQQPONMMLLLLLLLLLMMMNOPRSTUVWXYZZab',
       ],
     },
+    mildHot: {
+      '1': [
+        'KKJJIHHHHGGGIKNPRTVXZbdfhiijkjjihgfedbZWUTRPNMMMMLLK',
+        'ONNOPQSTUUUUVWXYacegijlmooppppoonmlkigedbZXUSRQQPPOO',
+        'WWWWWXXYZZZabcdeghjlmnooppqqqqqqponmlkigecaZXXXXWWWW',
+        'cbbbaaaaaaaaabbbcdeffgghhhijjkkklkkkjihhgfedcccccccc',
+        'ZZZZabbcefgiknopqrtuvwxz!!##%%##!!zyxvusrqnljhfdbaZZ',
+        'ZZZZZabbdefgijlmnoqrstuwxxyyzyyyxxvutsrponljhfecaZZZ',
+        'YYYYZaabcdefghjkmnpqrstuvwwxxyyxxwwvusrpomljhfecaZZY',
+        'VUUVVWXYZacdfhjlmnpqrstuuvwxxyxxxvutsrqonlkifdbZXWWV',
+        'WWWWXYYYZbcdefghijkllmnoopqqrqqqpoonmmlkjigfedbaYYYW',
+        'aaaabbccefghjjklmnoppqrstuuvvwvvutssrqonmlkigfecbZZa',
+        'abbcccddefghjkmmnoppqrrsttuuuuuuttsrqqponljhedcbaZZa',
+        'bbbbbbbcdefgijlmopqstuvwxxyyzzyyyxwvutsqpomljigedbbb',
+        'hhhhhiijjjkkllmnoopqqrstuvwxyyyyxwwvutrqponmkkjihggg',
+        'kkkklllmmnnnooppqrsttuuvvvwwwwwwwwwvvuutsrponnmlkkkk',
+        'mmmmmmmmmmmmmnnnnnoooopppppppppppppooooooonnnmmmmmmm',
+        'nnnnoppqqqqrrrrsssstttuuuuuuuuuuvvvwwwwvvutsrqponnnn',
+        'wwwwwxxxyyzz!!###%%&&&(())))))))))((&&&&%%##!zzyxxxw',
+        'vvvvvvvvvvwwwwwwwwwwxxxxxxxxxxyyyyyyyyyyyxxxwwwwwwvv',
+        'ttttuuvvwwxxyyz!!##%%&(())))))))))(((&&%##!zzyxwvuut',
+        'sssstttuvvwxxyyz!!#%%&&((())))))))((&&%#!!zyyxvuttss',
+        'llmmmnnopqrrsstuvwxyz!#%&()))))(((&&%!zxwvusrponmlll',
+        'nnnnooppqrrstuvwxxyzz!#%%&&&((((&&%%#!!yxwvvutsrpooo',
+        'llllmnnopqrstuuvwyyz!#%%&()))))))(&&%#!yxwvtsqponmml',
+        'mmmmnnnopqrrstuvwxyz!#%%&&((((((&&%%#!zywvutssqpnnmm',
+        'pppppqrrstuvwwxyyz!#%&(()))))))))((&&%#!zyxwvusrqppp',
+        'rqqrrsstuvvwxxyyz!#%&&(())))))))))))(&%#zzyxwvutsrrr',
+        'ccccdeefhikmopqrsuvwyz!#%&&&(&&&%#!zyxwutrqpnljheddc',
+        'bbccdeffhijklmmnnoppqrrsttuuvvuuttsrqqponmmjhfecaaaa',
+        'ddddeeffhjlmoprstuvwxyz#%%%&&%%%##!!zxwutsrpnljhfeed',
+        'gffgghhiklnpqrstuvwyz!#%&&&((((&&%##!yxvutrqpnmkiggg',
+        'ccccddeeghjkmnoqrstuvxyz!!##%###!!zzywvusrpomkigeddc',
+        'ddddddeefghijlnopqrstuwxyyzzzzzzyyxxwutsrponmkihfedd',
+        'eeeeeffghijkmnopqrsuvvwxyyyyzzzzyyxwvutsrqpomljhgffe',
+        'eeeefffghijklmnoprstuvwxyz!!####!zyyxwutsrqpnmkigffe',
+        'fffgghhhijkkklllmnnopqqrssttutttssrqqponmmmljihhgfff',
+        'hhhhiiijklmnoqrsttuvwxyz!!!###!!!zyyxwvussrqpnmkjiih',
+        'ccccdefgghiijjkklmnoopqrrsttutttssrqponmlkjjihgfeddc',
+        'ccccddddfghijjkkklmmnnoopqqrrrrrqpoonmlkkjjihffedccc',
+        'bbcddefghhijjkkkklmmnnoopqqrssssrrqqponmllkigfdcbaaa',
+        'hggghhhhiijjklmnoqrstuvwxxyz!!!!zyyxwvutsrqponmkihhh',
+        'iijjkkllmmnnoopppqqrssssttttttttttuuuttsrqpnlkjihhhh',
+        'llmmmnnnoopppqqrrsstttuuuuuuuuuuvvvvwwvvusrqonmmlkkk',
+        'gghhhhiiijkllmnooppqrrrrrssssssssttttsqpnmlkjihhgffg',
+        'kjjjkkllmnoqrsttuvwxyz!##%%%&&&&%%##!zxwvutsrqonlkkk',
+        'iiiijjkklmopqqrstvwxyz!#%&&(((((&%%#!yxwutrqonmkjiii',
+        'jjjjjkklmnopqrrstuvwxyz!#########!!zzxwvtsrqppnmkjjj',
+        'gggghhhhijkkmnopqrtuvwxyzz!######!zyxwvutsrqpnmkihhg',
+        'hhhhhijjlmopqrstuvwxyz!#%%%&&&&&%%#!zyxvutsrqonljhhh',
+      ],
+      '2': [
+        'MMLKKJJJIHHHJMOQSUWYaceghjjklkkjihgfecaXVUTRPOOONNNM',
+        'QQQQRSTVVVVVWXYZbdfhjkmnppqqqqpponmkjhfecaYWTSSRRRQQ',
+        'YXXYYYZZaabbcdefhiklnoppqqqrrrrrqponmljhfdcaYYYYYYYY',
+        'ddccbbbbbbbbbbccdeffghhhiijjkklllllkkjihhgfedddddddd',
+        'bbbbccdefhijmoqrstuvwxy!#%%%&%%%##!zywvusrpnkigecbbb',
+        'aaaabccdeghijlmnoprstuvxyyzzzzzzyywvutsrpomljhfdcbaa',
+        'aaaabbccdefghjkmnpqrstuvwxxyyzyyyxxwvtsqpnmkihfdcbba',
+        'XWWXXYZabcdfgikmopqrstuvwwxxyyyyxxvutsrqonljhfdbZYXX',
+        'YXXYYZZZbcdfgghijklmmnoppqqrrrrrqpponnmlkjigfedbaZZY',
+        'bbbbcddefhijkllmnopqqrstuuvwwwwwvuttsrqpomlkhgfecbbb',
+        'bccddeeefghjkmnnoppqrrsttuuvvvvvuttsrqqpomkifedcbaab',
+        'cccccdddefgijkmnpqstuvwxyyzz!zzzyyxwvutsqpnmljigeddc',
+        'iiiijjjkklllmnnoppqrrstuvwxyzzzyyxwwvusrqponmlkjiiii',
+        'lllmmmnnnoooppqrrstuuvvvwwwxxxxxxwwwwvvutsrqponmllll',
+        'mnnmmmmmmmnnnnnnnoooppppppppppppppppppppooonnnmmmmmm',
+        'ooooppqqrrrrssssttttuuuvvvvvvvvvvvwwxxwwvvutsrqponno',
+        'xxxxxyyyzz!!###%%%&&((()))))))**)))(((&&&%%##!!zyyyx',
+        'wwwwwvvvwwwwwwwwwwxxxxxxxyyyyyyyyyyyyyyyyyxxxxwwwwww',
+        'vvvvvwwxxxyyzz!##%%&&(()))*******)))((&&%%#!!zyxwvvv',
+        'ttttuuvvwxxyyzz!##%&&((()))))****))((&&%##!zzyxwuuut',
+        'mmnnnoppqrssttuvwxyz!#%&()))))))))((&#!yxwvusrponmmm',
+        'pppppqqqrsttuvwxyyz!!#%%&&((()))((&&%#!!yyxwvutsqqpp',
+        'nnnnooppqrstuvwxyzz!#%&&())*****))((&%#zyxwvtsrponnn',
+        'ooooopppqrstuvwxxyz!#%%&((()))))((&%%#!zyxwvutrqpooo',
+        'qqqqrrstuvwwxyyz!!#%&(()*********))((&%#!zyxxvutrqqq',
+        'ssssttuuvwxxyyz!!#%&(())**********)))(&%#!zyxxwutsss',
+        'eeeeffggikmoprstuvwyz!#%&(((((((&%##!yxwutrqomkigfee',
+        'ccdeefghijkmmnnooppqrrsttuuvvvvvuttsrqqponnkigfdbbbb',
+        'fffffgghjlmoprstuvwxyz!%&&&&&&&&%%##!yxwuusrpnljhfff',
+        'hhhhiijjlnoqrstuvwyz!#%&(((())(((&%%#zyxvutrqpnljiih',
+        'eeeeeffghjklnoqrstuwxyz!##%%%%%%##!!zxwvtsqpnmkigeee',
+        'eeeeffffghijlnopqrstuvxyzzz!!!!!zzyyxwutsrponlkigffe',
+        'ffffgghhiklmnopqrsuvwwxyzzzzz!!zzyyxwvutsrqpnmkjhggf',
+        'gggggghhjkllmnpqrstuvwxyz!##%%%##!zzywvutsrqpnlkihgg',
+        'hhhhiiijjklllmmmnoopqrrssttuuuuttssrrqponnnmkjihhggh',
+        'jjjjjjkklmnpqrstuvwwxyz!!###%####!zzyxwvutsrqpnmkjjj',
+        'eddeefghiijjklllmnoppqrssttuuuuttssrqponmllkjihggffe',
+        'eeeeeeefghikkklllmmnooppqqrssssrrqpoonmllkkkhggfeddd',
+        'cddeffghiijkkklllmnnooppqqrstttssrrqqponmmljhgedcbbb',
+        'iiiiiiiijjklmnopqrstuvwxyyz!###!!zzyxwvutsrqponljiii',
+        'jjjkllmmnnoopppqqrrstttttuuuuuuuuuuvvuutsrpolkkjiiii',
+        'lmmnnnoooppqqrrrssttuuuvvvvvvvvvvvwwwwwvutsqponmllll',
+        'hhiiiiiijklmmnoopqqrrssssttttttttttuusrqonmkjiihhggg',
+        'lllllmmmnpqrstuvvwxyz!!#%%&&&&&&&&%%#!yxwvuutsqomlll',
+        'kkkkkllmnopqrstuuwxyz!#%&&(())))(&&%#!yxwutrqonmkjjj',
+        'kkkkllmmoopqrstuvvwxyz!##%%%%%%%%##!!zxwuutsrqpnmlkk',
+        'iiiiiiijjklmnopqrtuvwxyz!!#%%%%%##!zyxwvutsrqpnljiii',
+        'iiiijkklmopqrstuvwxyz!#%%&&&(((&&%%#!zyxvuutsqomkjji',
+      ],
+    },
   },
   limits: {
     'tilapia carton-overnight': {
-      none: {
-        cold: '                                                             ((&&&&%%%%%#######!!',
-        hot: '                                   RRQQQQPPPPOOOONNNNNNMMMMM000000000000000000000',
+      'none-middle': {
+        cold: '                                                            ((&&&%%%####!!!!zzzzy',
+        mildCold: '                            KJJJIIIIHHHHGGGGFFFFEEEEDDDCC000000000000000000000000',
+        hot: '                                  QQQPPPOOONNNMMMLLLLKKKKJJJII0000000000000000000',
+        mildHot: '                                                       xxxxwwwwvvvvuuuutttssssrrr',
+      },
+      'none-warm': {
+        cold: '                                                            (&&&%%%%####!!!!zzzyy',
+        mildCold: '                             JJJJIIIHHHHGGGGFFFFEEEEDDDDC000000000000000000000000',
+        hot: '                                   QQQPPOOONNNMMMLLLLKKKKJJJJI0000000000000000000',
+        mildHot: '                                                       xxxxwwwwvvvvuuuttttssssrrr',
+      },
+      'none-cool': {
+        cold: '                                                            ((&&&%%%####!!!!zzzzy',
+        mildCold: '                           KJJJJIIIIHHHHGGGGFFFEEEEDDDDCC000000000000000000000000',
+        hot: '                                 RQQQPPPOOONNNMMMLLLLKKKJJJJII0000000000000000000',
+        mildHot: '                                                       xxxxwwwwvvvvuuuuttttsssrrr',
       },
       'heat-2': {
-        cold: '                                                          #!!!!zzzzzyyyyyyxxxxxxx',
-        hot: '                                      UUUTTTTSSSSRRRRRQQQQQQPPP000000000000000000',
+        cold: '                                                         #!!!zzzyyyyxxxxwwwwvvvuu',
+        mildCold: '                               NNMMMLLLLKKKKJJJJIIIIHHHHGGGF000000000000000000000',
       },
       'heat-4': {
-        cold: '                                                      yxxxxwwwwvvvvvvuuuuuuuttttt',
-        hot: '                                         XXXXWWWWVVVVVUUUUTTTTTTTSS00000000000000',
+        cold: '                                                      xxxwwwvvvvuuuutttssssrrrrqq',
+        mildCold: '                                  QQQPPPOOOONNNNMMMMLLLLKKKKJJJ000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                                      xxxwwwvvvvuuuttttssssrrrrqq',
+        mildCold: '                                   QQPPPPOOONNNNMMMMLLLLKKKKJJJJ00000000000000000',
       },
       'cold-2': {
-        cold: '                                                                  &&%%%%%######!!',
-        hot: '                               SRRRRQQQQPPPPOOOOONNNNNMMMMM0000000000000000000000',
+        hot: '                             SRRRQQQPPOOONNNMMMLLLLKKKKJJJJI000000000000000000000',
+        mildHot: '                                                             wwwwvvvvuuuttttssssr',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                             SSRRRRQQQQPPPPOOOONNNNNNMMMM000000000000000000000000',
+        hot: '                           SRRRQQQPPPOONNNMMMLLLLKKKKJJJII00000000000000000000000',
+        mildHot: '                                                                           tttsss',
       },
     },
     'tilapia foam-25-overnight': {
-      none: {
-        cold: '                                                          (&%%##!!zzyyxxwwwvvuutt',
-        hot: '                                RQPPONNMMLLKKJJIIHHHGGFFEEDDCCBBAAA90000000000000',
+      'none-middle': {
+        cold: '                                                         (&%%#!!zyyxwwvuutssrqppo',
+        mildCold: '                         KJIIHGGFEEDCCBAA9887655433211000000000000000000000000000',
+        hot: '                              RQQPONMLLKJJIHHGFFEDDCBBA99877655433211000000000000',
+        mildHot: '                                                    xwwvuutssrqqpoonmmlkkjiihggfe',
+      },
+      'none-warm': {
+        cold: '                                                        (&%%#!!zyyxwwvuutsrrqppon',
+        mildCold: '                           JIIHGGFEEDCCBAA988766544321100000000000000000000000000',
+        hot: '                                 QPONMLLKJJIHHGFFEDDCBBA9987765543321100000000000',
+        mildHot: '                                                   xwwvuutssrqqpoonmmlkkjiihggfee',
+      },
+      'none-cool': {
+        cold: '                                                           &%%#!!zyyxwwvuutssrqqp',
+        mildCold: '                        KJIIHGGFEEDCCBA998776554332110000000000000000000000000000',
+        hot: '                             RQQPONMLLKJJIHHGFFEDDCBBA998776554332110000000000000',
+        mildHot: '                                                     xwwvuutssrqqpoonmmlkkjiihggf',
       },
       'heat-2': {
-        cold: '                                                   xwvvuuttssrrqqpppoonnmmllkkjji',
-        hot: '                                       YXWWVUUTTSSRRQQPPOOONNMMLLKKJJIIHHHG000000',
+        cold: '                                                   wvvuttsrrqpponnmllkjjihhgfeedc',
+        mildCold: '                                RQPPONNMLLKJJIHGGFEEDCCBAA98876654432210000000000',
       },
       'heat-4': {
-        cold: '                                             poonnmmllkkjjiiihhggffeeddccbbbaaZZY',
-        hot: '                                              feddcbbaaZZYYXXWWVVVUUTTSSRRQQPPOOO',
+        cold: '                                            poonmmlkkjiihggfeedccbaaZYYXWWVUTTSRR',
+        mildCold: '                                       YXWWVUUTSSRQPPONNMLLKJJIHHGFFEDDCBBA998776',
+      },
+      'heat-4-warm': {
+        cold: '                                           poonmmlkkjiihggfeedccbaaZYXXWVVUTTSRRQ',
+        mildCold: '                                         XWWVUUTSSRQQPONNMLLKJJIHHGFFEDDCBBA99877',
       },
       'cold-2': {
-        cold: '                                                                               vv',
-        hot: '                          SRQQPONNMMLLKKJJJIIHHGGFFEEDDCCCBBAA9000000000000000000',
+        hot: '                      SRQPPONMLLKJJIHHGFFEDDCBBA988776544332110000000000000000000',
+        mildHot: '                                                                           mmlkkj',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                     SRQQPONNMMMLKKJJJIIHHGGFFEEDDCCBBAA9800000000000000000000000',
+        hot: '                SRQPPONMLKKJJIHGGFEEDCCBAA988765543321100000000000000000000000000',
+        mildHot: '                                                                                 ',
       },
     },
     'tilapia foam-38-overnight': {
-      none: {
-        cold: '                                                         (&%##!!zyyxxwvvuutssrrqp',
-        hot: '                               RQPONNMLLKKJIIHHGGFEEDDCBBAA9887765544332000000000',
+      'none-middle': {
+        cold: '                                                     &%#!zywvutsrqponmlkjihgedcba',
+        mildCold: '                     JIHGFEDCBA98765431000000000000000000000000000000000000000000',
+        hot: '                          RQPNMLKJIHGFEDBA987654321000000000000000000000000000000',
+        mildHot: '                                                wvutsrqpomlkjihgfedcbaZYXWUTSRQPO',
+      },
+      'none-warm': {
+        cold: '                                                  &%#zyxwvutsrqponmlkjhgfedcbaZYX',
+        mildCold: '                        KJIGFEDCBA98765432100000000000000000000000000000000000000',
+        hot: '                             RQPOMLKJIHGFEDCBA87654321000000000000000000000000000',
+        mildHot: '                                            xwvutsrponmlkjihgfedcbaZXWVUTSRQPONML',
+      },
+      'none-cool': {
+        cold: '                                                        &%#!zyxwvtsrqponmlkjihgfe',
+        mildCold: '                  JIHGFEDCBA98764321000000000000000000000000000000000000000000000',
+        hot: '                       RQONMLKJIHGEDCBA987654321000000000000000000000000000000000',
+        mildHot: '                                                   wvutsrqponmljihgfedcbaZYXWVUTR',
       },
       'heat-2': {
-        cold: '                                                 uttsrrqqpoonnmllkkjiihhggfeeddcb',
-        hot: '                                        aZYXWVVUUTSSRRQPPOONNMLLKKJIIHHGFFEEDCCBB',
+        cold: '                                                yxwvtsrqponmlkjihgfedbaZYXWVUTSRQ',
+        mildCold: '                          POMLKJIHGFEDCBA9876432100000000000000000000000000000000',
       },
       'heat-4': {
-        cold: '                                        mlkjjihhggfeeddcbbaaZYYXXWWVUUTTSRRQQPOON',
-        hot: '                                                jiihgfeedccbbaZZYYXXWVVUUTSSRRQPP',
+        cold: '                                           tsqponmlkjihgfedcbaZXWVUTSRQPONMLKJIHF',
+        mildCold: '                               UTSQPONMLKJIHGFEDCBA876543210000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                        trqponmlkjihgfedcaZYXWVUTSRQPONMLKIHGFEDC',
+        mildCold: '                                  UTSRQPNMLKJIHGFEDCBA987543210000000000000000000',
       },
       'cold-2': {
-        cold: '                                                                                 ',
-        hot: '                        RQPOONMMLLKJJIHHGGFEEDDCCBAA99877665443320000000000000000',
+        hot: '                 RQPNMLKJIHGFEDCBA98754321000000000000000000000000000000000000000',
+        mildHot: '                                                           utsqponmlkjihgfedcbaZX',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                SRQQPONMMLLKJJIIHGGFEEDDCBBAA988766554332100000000000000000000000',
+        hot: '           TRQONMLKJIGFEDCBA98765432100000000000000000000000000000000000000000000',
+        mildHot: '                                                                                 ',
       },
     },
     'tilapia carton-two-days': {
-      none: {
-        cold: '                                                                 &&&&&&&&&&&&&&&&',
-        hot: '                                  !ccccbbbbbbbbbbbbbbbb00000000000000000000000000',
+      'none-middle': {
+        cold: '                                                                &%%%%%%%%%%%%%%%%',
+        mildCold: '                            TTTTTTTTSSSSSSSSSSSSSSR000000000000000000000000000000',
+        hot: '                                  bbbaaaaaaaZZZZZZZZZYYY0000000000000000000000000',
+        mildHot: '                                                           xxxxxxxxxxxxxxxxxxxxxx',
+      },
+      'none-warm': {
+        cold: '                                                                %%%%%%%%%%%%%%%%%',
+        mildCold: '                             TTTTTTTSSSSSSSSSSSSSSR000000000000000000000000000000',
+        hot: '                                   bbaaaaaaaZZZZZZZZZYYY0000000000000000000000000',
+        mildHot: '                                                           xxxxxxxxxxxxxxxxxxxxxx',
+      },
+      'none-cool': {
+        cold: '                                                                 %%%%%%%%%%%%%%%%',
+        mildCold: '                           TTTTTTTTTSSSSSSSSSSSSSSR000000000000000000000000000000',
+        hot: '                                 bbbbaaaaaaaZZZZZZZZZYYY0000000000000000000000000',
+        mildHot: '                                                            xxxxxxxxxxxxxxxxxxxxx',
       },
       'heat-2': {
-        cold: '                                                              !!!!!!!!!!!!!!!!!!!',
-        hot: '                                     .fffffffffeeeeeeeeeee00000000000000000000000',
+        cold: '                                                             zzzzzzzzzzzzzzzzzzzz',
+        mildCold: '                               WWWWWWWWWWWVVVVVVVVVVVV000000000000000000000000000',
       },
       'heat-4': {
-        cold: '                                                           xxxxxxxxwwwwwwwwwwwwww',
-        hot: '                                         iiiiiiiiiiiiihhhhhhhh0000000000000000000',
+        cold: '                                                          wwwwwwwwwwwwwwwwwwwwwww',
+        mildCold: '                                  aaZZZZZZZZZZZZYYYYYYYYYY00000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                                          wwwwwwwwwwwwwwwwwwwwwww',
+        mildCold: '                                   aZZZZZZZZZZZZYYYYYYYYYY00000000000000000000000',
       },
       'cold-2': {
-        cold: '                                                                  &&&&&&&&&&&&&&&',
-        hot: '                               ccccccccbbbbbbbbbbbbbbbb00000000000000000000000000',
+        hot: '                             bbbbbbbaaaaaaaaZZZZZZZZYYYY0000000000000000000000000',
+        mildHot: '                                                             xxxxxxxxxxxxxxxxxxxx',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                             ccccccccccbbbbbbbbbbbbbbbb00000000000000000000000000',
+        hot: '                           cbbbbbbbbaaaaaaaZZZZZZZZZYYY00000000000000000000000000',
+        mildHot: '                                                                           xxxxxx',
       },
     },
     'tilapia foam-25-two-days': {
-      none: {
-        cold: '                                                               ################!!',
-        hot: '                                aaaZZZYYYYXXXXWWWWWVVVVVUUUU000000000000000000000',
+      'none-middle': {
+        cold: '                                                              ###!!!!!!!!!!!!!zzz',
+        mildCold: '                         SSRRRQQQQPPPPOOOONNNNNMMMMMMLLLLL00000000000000000000000',
+        hot: '                              ZZZYYXXXWWWVVVVUUUUTTTTSSSSSRRRRR000000000000000000',
+        mildHot: '                                                         vvvvuuuuuuuuuuuuuttttttt',
+      },
+      'none-warm': {
+        cold: '                                                              ###!!!!!!!!!!!!zzzz',
+        mildCold: '                           RRRRQQQPPPPOOOOONNNNNMMMMMLLLLL00000000000000000000000',
+        hot: '                                 YYYXXWWWWVVVUUUUTTTTTSSSSSRRRR000000000000000000',
+        mildHot: '                                                         vvvuuuuuuuuuuuuutttttttt',
+      },
+      'none-cool': {
+        cold: '                                                               ##!!!!!!!!!!!!!zzz',
+        mildCold: '                        SSRRRRQQQPPPPOOOOONNNNNMMMMMLLLLL000000000000000000000000',
+        hot: '                             aZZYYYXXXWWWVVVUUUUUTTTTSSSSSRRRR0000000000000000000',
+        mildHot: '                                                          vvvuuuuuuuuuuuuuttttttt',
       },
       'heat-2': {
-        cold: '                                                        uuuuuuuuuuuuuuutttttttttt',
-        hot: '                                       hhhggggfffeeeedddddcccccbbbb00000000000000',
+        cold: '                                                       uutttttttttttttsssssssssss',
+        mildCold: '                                ZZYYYXXXXWWWWVVVVVUUUUUTTTTTSSSSS0000000000000000',
       },
       'heat-4': {
-        cold: '                                                 nnnnnnnnnnnnnmmmmmmmmmmmmmmmmmmm',
-        hot: '                                              ooonnnnmmmmllllkkkkjjjjjjiii0000000',
+        cold: '                                                nnmmmmmmmmmmmmlllllllllllllkkkkkk',
+        mildCold: '                                       ggfffeeeeddddcccccbbbbbaaaaaZZZZZ000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                                nmmmmmmmmmmmmmlllllllllllllkkkkkk',
+        mildCold: '                                         gfffeeeeddddccccbbbbbaaaaaaZZZZ000000000',
       },
       'cold-2': {
-        cold: '                                                                               ##',
-        hot: '                          bbbaaaaZZZYYYYXXXXWWWWWVVVVVUUUU00000000000000000000000',
+        hot: '                        baaZZYYYXXXWWWVVVVUUUUTTTTSSSSSRRRRR000000000000000000000',
+        mildHot: '                                                                           uutttt',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                       cbbbaaaaZZZZYYYXXXXWWWWWVVVVVUUU00000000000000000000000000',
+        hot: '                     baaZZYYYXXXWWWVVVVUUUUTTTTSSSSSRRRRR000000000000000000000000',
+        mildHot: '                                                                                 ',
       },
     },
     'tilapia foam-38-two-days': {
-      none: {
-        cold: '                                                              ###!!!!!!!!!!!!!zzz',
-        hot: '                               aZZZYYYXXWWWWVVVUUUUTTTTSSSSSRR0000000000000000000',
+      'none-middle': {
+        cold: '                                                           zzzzyyyyxxxwwwwvvvvuuu',
+        mildCold: '                     SRRQPPOONNMMLLLKKKJJJJIIIIHHHHGGGGFFFFEEEDDDDCCCCBBBBA000000',
+        hot: '                          aZYXWWVVUTTSSRRRQQQQPPPPOOONNNNMMMMLLLKKKKJJJJIIIIHHHH0',
+        mildHot: '                                                     utttssssrrrrqqqqpppoooonnnnm',
+      },
+      'none-warm': {
+        cold: '                                                         zzzzyyyyxxxxwwwwvvvuuuut',
+        mildCold: '                        RRQPPOONNMMLLLKKKJJJJIIIIHHHHGGGGFFFEEEEDDDDCCCCBBBBA0000',
+        hot: '                             ZYXWWVUUTTSSRRRQQQQPPPOOOONNNNMMMLLLLKKKKJJJJIIIIHHH',
+        mildHot: '                                                    tttssssrrrrqqqqppppooonnnnmmm',
+      },
+      'none-cool': {
+        cold: '                                                            !zzzzyyyxxxxwwwwvvvvu',
+        mildCold: '                   SRRQQPOONNMMMLLKKKKJJJIIIIHHHHGGGGFFFFEEEEDDDDCCCBBBBA00000000',
+        hot: '                        aZYXXWVVUUTTSSRRRQQQPPPPOOOONNNMMMMLLLLKKKKJJJIIIIHHHH000',
+        mildHot: '                                                       ttttssssrrrqqqqppppoooonnn',
       },
       'heat-2': {
-        cold: '                                                     ssssrrrrrrrrrrrrrqqqqqqqqqqq',
-        hot: '                                        jiiihhgggfffeeeeddddccccbbbbbaa0000000000',
+        cold: '                                                     yuuuttttssssrrrrqqqqpppoooon',
+        mildCold: '                          XXWVVUUTSSSRRQQPPPPOOOONNNNMMMLLLLKKKKJJJJIIIIHHHHGGGG0',
       },
       'heat-4': {
-        cold: '                                            jjjjiiiiiiiiiiiiiihhhhhhhhhhhhhgggggg',
-        hot: '                                                ssrrqqqpppooonnnmmmmlllllkkkkjjj0',
+        cold: '                                                spppooonnnnmmmmllllkkkkjjjjiiiihh',
+        mildCold: '                               ccbaaZZYYXXWWVVVUUUUTTTSSSSRRRRQQQQPPPPOOOONNNMMMM',
+      },
+      'heat-4-warm': {
+        cold: '                                               pppoooonnnnmmmllllkkkkjjjjiiiihhhh',
+        mildCold: '                                  cbaaZZYYXXWWVVUUUUTTTTSSSSRRRRQQQQPPPPOOONNNNMM',
       },
       'cold-2': {
-        cold: '                                                                                 ',
-        hot: '                        bbaaaZZZYYXXXWWWVVVVUUUUTTTTSSSSSRR0000000000000000000000',
+        hot: '                    baZYXXWVVUUTSSSRRRQQQPPPPOOONNNNMMMMLLLLKKKJJJJIIIIHHHH000000',
+        mildHot: '                                                           tttssssrrrrqqqppppoooo',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                     bbaaaZZYYYXXXWWWVVVVUUUUTTTTSSSSRRR0000000000000000000000000',
+        hot: '                  aZYXWWVUUTTSSRRRQQQQPPPPOOONNNNMMMMLLLKKKKJJJJIIIIHHHH000000000',
+        mildHot: '                                                                                 ',
       },
     },
-    'pond-fish carton-overnight': {
-      none: {
-        cold: '                                                   uuttttsssssrrrrrrqqqqqqqqppppp',
-        hot: '                                        XXWWWWVVVVUUUUTTTTTS000000000000000000000',
+    'sunfish-and-bass carton-overnight': {
+      'none-middle': {
+        cold: '                                                srrrqqqqpppoooonnnnmmmmllllkkkkjj',
+        mildCold: '                                 QPPPPOOOONNNNMMMMLLLKKK0000000000000000000000000',
+        hot: '                                       XWWWVVVUUUTTTSSSRRRRQQ00000000000000000000',
+        mildHot: '                                           llllkkkjjjjiiiihhhhggggffffeeeddddcccc',
+      },
+      'none-warm': {
+        cold: '                                                 tsssrrrqqqqppppoooonmmlllkkkkjjj',
+        mildCold: '                                   PPPOOOONNNNMMMMLLLLKK0000000000000000000000000',
+        hot: '                                        XWWVVVUUUTTTSSSRRRRQQQ0000000000000000000',
+        mildHot: '                                           nmmmllllkkkkjjjjiiiihgffffeeeeddddcccc',
+      },
+      'none-cool': {
+        cold: '                                                srrrqqqqppppoooonnnmmmmllllkkkkjj',
+        mildCold: '                                QQPPPPOOOONNNNMMMLLLLKKK0000000000000000000000000',
+        hot: '                                      XXWWWVVVUUUTTSSSRRRRQQQ00000000000000000000',
+        mildHot: '                                           llllkkkkjjjjiiihhhhggggffffeeeeddddccc',
       },
       'heat-2': {
-        cold: '                                                rqqqqpppppoooooonnnnnnnmmmmmmmmll',
-        hot: '                                           aaaZZZZYYYYXXXXXWWWW000000000000000000',
+        cold: '                                             ooonnnnmmmllllkkkkjjjjiiiihhhhgggfff',
+        mildCold: '                                    TTSSSSRRRRQQQQPPPPOOOON0000000000000000000000',
       },
       'heat-4': {
-        cold: '                                            onnnnmmmmllllllkkkkkkkjjjjjjjjiiiiiii',
-        hot: '                                              ddddccccbbbbbaaaaZZZ000000000000000',
+        cold: '                                         mllkkkkjjjiiiihhhhggggffffeeeedddccccbbb',
+        mildCold: '                                       WWWVVVVUUUUTTTTSSSSRRRRQ000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                          nmmlllkkkkjjjjiiiihhhfffeeeeddddccccbbb',
+        mildCold: '                                         WWVVVVUUUTTTTSSSSRRRRQ000000000000000000',
       },
       'cold-2': {
-        cold: '                                                    uuttttsssssrrrrrrqqqqqqqqpppp',
-        hot: '                                    YXXXXWWWWVVVVUUUUTTTTS00000000000000000000000',
+        hot: '                                  YXXXWWWVVVUUUTTSSSRRRRQQP0000000000000000000000',
+        mildHot: '                                             llllkkkkjjjiiiihhhhggggffffeeeddddcc',
       },
       'cold-4': {
-        cold: '                                                            ssssrrrrrrqqqqqqqqppp',
-        hot: '                                  YYXXXXWWWWVVVUUUUTTTSSR000000000000000000000000',
+        hot: '                                YXXXWWWVVUUUTTTSSRRRQQPPON00000000000000000000000',
+        mildHot: '                                                   kkkkjjjiiiihhhhggggfffeeeedddd',
       },
     },
-    'pond-fish foam-25-overnight': {
-      none: {
-        cold: '                                                ttsrrqqpppoonnmmllkkjjiiihhggffee',
-        hot: '                                     XWVUUTSSSRRQQPPOONNMMLLLKKJJ0000000000000000',
+    'sunfish-and-bass foam-25-overnight': {
+      'none-middle': {
+        cold: '                                           srqqpoonmmlkjjihhgffeddcbbaZZYXXWVVUTT',
+        mildCold: '                              QPOONMMLKKJIIHGFFEDDCBBA998776554300000000000000000',
+        hot: '                                   XWWVUTSRRQPPONNMLLKJJIHHGFFEDDCBBA000000000000',
+        mildHot: '                                      lkkjiihggfeedccbaaZYYXWWVUUTSRRQPPONNMLLKJJ',
+      },
+      'none-warm': {
+        cold: '                                           tsrrqpoonmmlkkjiihggfeedccbaaZYWVUUTSS',
+        mildCold: '                                PPONNMLLKJJIHHGFFEDDCBAA9887665443000000000000000',
+        hot: '                                     XWVUUTSRQQPOONMMLKKJIIHGGFEEDCCBAA0000000000',
+        mildHot: '                                      mllkjjihhgffeddcbbaZZYXXWVUUTSSPOONMMLKKJII',
+      },
+      'none-cool': {
+        cold: '                                             rrqpponnmllkjjihhgfeedccbaaZYYXWWVUU',
+        mildCold: '                            QPPONNMLLKJIIHGGFEEDCCBAA9887665443000000000000000000',
+        hot: '                                 YXWVUTTSRQQPOONMMLKKJIIHGGFEEDCCBAA0000000000000',
+        mildHot: '                                        lkjjihhgffeddcbbaZZYXXWVVUTTSRRQPPONMMLKK',
       },
       'heat-2': {
-        cold: '                                         mmlkkjjiiihhggffeeddccbbbaaZZYYXXWWVVUUU',
-        hot: '                                           eedcbbaZZZYYXXWWVVUUTTSSSRRQQ000000000',
+        cold: '                                     kjjihhgffeddcbbaZYYXWWVUUTSSRQQPOONMMLKKJIIH',
+        mildCold: '                                    XXWVVUTTSRRQPOONMMLKKJIIHGGFEEDCCBA0000000000',
       },
       'heat-4': {
-        cold: '                                  ffeddccbbaaaZZYYXXWWVVUUUTTSSRRQQPPOONNNMMLLKKJ',
-        hot: '                                                  llkjjihgggffeeddccbbaaaZZYYXX00',
+        cold: '                              dccbaaZYYXWWVUUTSSRQPPONNMLLKJJIHHGFFEDDCBBA9987765',
+        mildCold: '                                           eedccbaZZYXXWVVUTTSRRQPPONNMLLKJJIH000',
+      },
+      'heat-4-warm': {
+        cold: '                              eddcbbaZZYXXWVVUTSSRQQPOONMMLKIHGGFEEDCCBAA98876654',
+        mildCold: '                                              ddcbbaZZYXXWVUUTSSRQQPOONMMLKKJIIH0',
       },
       'cold-2': {
-        cold: '                                                         rqqppooonnmmllkkjjiihhhg',
-        hot: '                               XXWVUUTSSSRRQQPPOONNMMLLKKJJI000000000000000000000',
+        hot: '                          ZXWVVUTSRQQPPONMMLKKJIIHGGFEEDCBA9980000000000000000000',
+        mildHot: '                                                 jiihggfeedccbaaZYYXWWVUUTSSRQQPO',
       },
       'cold-4': {
-        cold: '                                                                           lkkkji',
-        hot: '                         YXWVVUTTSSRRQQPPOONMMLLKKJIHGFEEC00000000000000000000000',
+        hot: '                    XWWVUTSRRQPOONMLLKJJIHGGFEDCCBA976543210000000000000000000000',
+        mildHot: '                                                                eddcbaZZYYXWWVUTT',
       },
     },
-    'pond-fish foam-38-overnight': {
-      none: {
-        cold: '                                               tssrqqpoonnmllkkjiihhggfeeddcbbaaZ',
-        hot: '                                   XXWVUTSSRRQPPOONMMLLKJJIIHHGFFEED0000000000000',
+    'sunfish-and-bass foam-38-overnight': {
+      'none-middle': {
+        cold: '                                  srponmlkjihgfedcbaYXWVUTSRQPONMLKJIGFEDCBA98765',
+        mildCold: '                        PONMLKJIHGFEDCA987654321000000000000000000000000000000000',
+        hot: '                             XWUTSRQPONMKJIHGFEDCBA987654210000000000000000000000',
+        mildHot: '                             lkjigfedcbaZYXWVUTSRQPNMLKJIHGFEDCBA9875432100000000',
+      },
+      'none-warm': {
+        cold: '                                trqponmlkjihgfecbaZYXWVUTSRQPONMLJIHGFEDCBA987654',
+        mildCold: '                            QPONMLKJIHFEDCBA9876543210000000000000000000000000000',
+        hot: '                                 YXVUTSRPONMLKJIHGFEDCBA9765432100000000000000000',
+        mildHot: '                           mkjihgfedcbaZYXWVUTRQPONMLKJIHGFEDCB987654321000000000',
+      },
+      'none-cool': {
+        cold: '                                       rqponmlkjihgfdcbaZYXWVUTSRQPONMKJIHGFEDCBA',
+        mildCold: '                   QPNMLKJIHGFEDCBA9875432100000000000000000000000000000000000000',
+        hot: '                        XWVUSRQPONMLKJIHFEDCBA98765432100000000000000000000000000',
+        mildHot: '                                  kjihgfedcbaZYXWVUSRQPONMLKJIHGFEDCA987654321000',
       },
       'heat-2': {
-        cold: '                                      kkjihhggfeeddcbbaaZZYXXWWVUUTTSRRQQPOONNMML',
-        hot: '                                            gfeedcbbaZZYYXWWVVUTTSSRQQPPOONMM0000',
+        cold: '                             nlkjihgfedcbaZYXWUTSRQPONMLKJIHGFECBA987654321000000',
+        mildCold: '                            WUTSRQPONMLKJIHGFDCBA98765432100000000000000000000000',
       },
       'heat-4': {
-        cold: '                             cbaZZYXXWWVUUTTSRRQQPPONNMMLKKJJIHHGGFEEDDCCBAA99877',
-        hot: '                                                     ponmlkkjjiihggffeddccbaaZZYX',
+        cold: '                        igfedcbaZYXWVUTRQPONMLKJIHGFEDCB9876543210000000000000000',
+        mildCold: '                                 bZYXWVUTSRQPONMLKJIGFEDCBA9876543210000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                      ihgfedcbaZYXVUTSRQPONMLKJIHGFDCBA98765432100000000000000000',
+        mildCold: '                                      aZYXWVUTSRQPONLKJIHGFEDCBA98765321000000000',
       },
       'cold-2': {
-        cold: '                                                            pponnmllkkjiihhggfeed',
-        hot: '                            XXWVUTSSRQQPPONNMMLKKJJIHHGFFEEDC00000000000000000000',
+        hot: '                  YWVUSRQPONMLKJIHGFECBA98765432100000000000000000000000000000000',
+        mildHot: '                                        kjihgfedcbaZYWVUTSRQPONMLKJIHGFDCBA987654',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                    YXWVUTSSRQQPPONNMLLKKJIIHGFFEDCBA9876400000000000000000000000',
+        hot: '             XVUTRQPONNLKJIHGFDCCBA9765432100000000000000000000000000000000000000',
+        mildHot: '                                              kjihgfedcbaZXWVUTSRQPONMLJIHGFEDCBA',
       },
     },
-    'pond-fish carton-two-days': {
-      none: {
-        cold: '                                                       tttttttttttttttttttttttttt',
-        hot: '                                        iihhhhhhhhhhhhh00000000000000000000000000',
-      },
-      'heat-2': {
+    'sunfish-and-bass carton-two-days': {
+      'none-middle': {
         cold: '                                                    qqqqqqqqqqqqqqqqqqqqqqqqqqqqq',
-        hot: '                                           lllllllkkkkkkkk00000000000000000000000',
+        mildCold: '                                 ZZZZZZZZZYYYYYYYYY000000000000000000000000000000',
+        hot: '                                       hhhhgggggggffffff0000000000000000000000000',
+        mildHot: '                                               llllllllllllllllllllllllllllllllll',
       },
-      'heat-4': {
-        cold: '                                                 nnnnnnnnmmmmmmmmmmmmmmmmmmmmmmmm',
-        hot: '                                              ooooooooooonnnnn0000000000000000000',
-      },
-      'cold-2': {
-        cold: '                                                       tttttttttttttttttttttttttt',
-        hot: '                                    iiiiiihhhhhhhhhhhhh00000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                            ttttttttttttttttttttt',
-        hot: '                                  iiiiiiiihhhhhhhhhhhh000000000000000000000000000',
-      },
-    },
-    'pond-fish foam-25-two-days': {
-      none: {
+      'none-warm': {
         cold: '                                                     rrrrrrrrrrrrrrrrqqqqqqqqqqqq',
-        hot: '                                     gggfffeeeeddddcccccbbb0000000000000000000000',
+        mildCold: '                                   ZZZZZZZYYYYYYYYY000000000000000000000000000000',
+        hot: '                                        hhhgggggggffffff0000000000000000000000000',
+        mildHot: '                                                mmmmmmmmmmmmmmmmlllllllllllllllll',
+      },
+      'none-cool': {
+        cold: '                                                    qqqqqqqqqqqqqqqqqqqqqqqqqqqqq',
+        mildCold: '                                ZZZZZZZZZZYYYYYYYYY000000000000000000000000000000',
+        hot: '                                      hhhhhgggggggffffff0000000000000000000000000',
+        mildHot: '                                               llllllllllllllllllllllllllllllllll',
       },
       'heat-2': {
-        cold: '                                              kkkkkkkkkkkkkkjjjjjjjjjjjjjjjjjjjjj',
-        hot: '                                           nnnnmmmmlllkkkkjjjjjiii000000000000000',
+        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                    ccccccccccccbbbbbb000000000000000000000000000',
       },
       'heat-4': {
-        cold: '                                       dddddddddddddcccccccccccccccccccccccccbbbb',
-        hot: '                                                  uuuuttttssssrrrrqqqqppp00000000',
+        cold: '                                              kkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkk',
+        mildCold: '                                       gggffffffffffffeee000000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                               llllllllllllllllkkkkkkkkkkkkkkkkkk',
+        mildCold: '                                         gffffffffffffeee000000000000000000000000',
       },
       'cold-2': {
-        cold: '                                                         rrrrrrrrrrrrrrqqqqqqqqqq',
-        hot: '                               hhhggggfffeeeeddddcccccbb0000000000000000000000000',
+        hot: '                                  hhhhhhhhggggggggfffff00000000000000000000000000',
+        mildHot: '                                                lllllllllllllllllllllllllllllllll',
       },
       'cold-4': {
-        cold: '                                                                           qqqqqq',
-        hot: '                            hhhhgggffffeeeddddccccbbba000000000000000000000000000',
+        hot: '                                iihhhhhhhggggggggfffff000000000000000000000000000',
+        mildHot: '                                                   llllllllllllllllllllllllllllll',
       },
     },
-    'pond-fish foam-38-two-days': {
-      none: {
-        cold: '                                                    rrqqqqqqqqqqqqqqppppppppppppp',
-        hot: '                                   ggfffeeeddcccbbbbaaaaZZZZY00000000000000000000',
+    'sunfish-and-bass foam-25-two-days': {
+      'none-middle': {
+        cold: '                                                 pppooooooooooooonnnnnnnnnnnnnmmm',
+        mildCold: '                              YYXXXXWWWVVVVUUUUUTTTTTSSS0000000000000000000000000',
+        hot: '                                   gffeeedddcccbbbaaaaaZZZZYY00000000000000000000',
+        mildHot: '                                            jjjjiiiiiiiiiiiiihhhhhhhhhhhhhggggggg',
+      },
+      'none-warm': {
+        cold: '                                                  qqqppppppppppppooooooooonnnmmmm',
+        mildCold: '                                YXXXWWWWVVVVUUUUUTTTTTSSS000000000000000000000000',
+        hot: '                                     ffeedddccccbbbaaaaZZZZZYY0000000000000000000',
+        mildHot: '                                             kkkjjjjjjjjjjjjjiiiiiiiihhhhgggggggg',
+      },
+      'none-cool': {
+        cold: '                                                  pppooooooooooooonnnnnnnnnnnnnmm',
+        mildCold: '                            ZYYYXXXWWWWVVVVUUUUTTTTTSSS00000000000000000000000000',
+        hot: '                                 ggffeeedddcccbbbbaaaaZZZZYY000000000000000000000',
+        mildHot: '                                             jjjjiiiiiiiiiiiiihhhhhhhhhhhhggggggg',
       },
       'heat-2': {
-        cold: '                                           iiihhhhhhhhhhhhhggggggggggggggffffffff',
-        hot: '                                            ppooonnmmmlllkkkkjjjiiiiih00000000000',
+        cold: '                                          iihhhhhhhhhhhhhgggggggggggggfffffffffff',
+        mildCold: '                                    gfffeeedddcccccbbbbaaaaaZZZ000000000000000000',
       },
       'heat-4': {
-        cold: '                                  ZZZZYYYYYYYYYYYYYXXXXXXXXXXXXXXWWWWWWWWWWWWWWVV',
-        hot: '                                                     yyxxwwwvvvuuutttssssrrrrq000',
+        cold: '                                   bbaaaaaaaaaaaaaZZZZZZZZZZZZYYYYYYYYYYYYYXXXXXX',
+        mildCold: '                                           nmmmlllkkkkjjjjiiiihhhhhggg00000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                    cbbbbbbbbbbbbbaaaaaaaaaaZZYYYYYYYYYYYYYXXXXXX',
+        mildCold: '                                              mllllkkkjjjjiiiiihhhhhggg0000000000',
       },
       'cold-2': {
-        cold: '                                                            qqqqqqqqqqqpppppppppp',
-        hot: '                              hgggffeeedddcccbbbbaaaZZZZZ000000000000000000000000',
+        hot: '                             hggffeeedddcccbbbbaaaaZZZZYY000000000000000000000000',
+        mildHot: '                                                 jjjiiiiiiiiiiiiihhhhhhhhhhhhgggg',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                          hhggfffeedddcccbbbaaaaZZZYYX000000000000000000000000000',
+        hot: '                          hggffeedddcccbbbbaaaaZZZZYYX000000000000000000000000000',
+        mildHot: '                                                                iiiihhhhhhhhhhhhh',
+      },
+    },
+    'sunfish-and-bass foam-38-two-days': {
+      'none-middle': {
+        cold: '                                           nnnnmmmmllllkkkkjjjjiiiihhhggggffffeee',
+        mildCold: '                         YXXWWVUUTTSSSRRQQQQPPPOOOONNNNMMMMLLLLKKKKJ0000000000000',
+        hot: '                              gfeddcbbaaZZYYXXXWWWVVVVUUUUTTTSSSSRRRRQQQQ00000000',
+        mildHot: '                                      hhhggggffffeeeeddddccccbbbbaaaZZZZYYYYXXXXW',
+      },
+      'none-warm': {
+        cold: '                                          pooonnnnmmmmllllkkkkjjjjiiiihhhggggfffd',
+        mildCold: '                            YXXWVVUUTTSSRRRQQQPPPPOOOONNNNMMMMLLLKKKKJJ0000000000',
+        hot: '                                 gfedccbbaZZYYXXXWWWWVVVVUUUTTTTSSSRRRRQQQQP00000',
+        mildHot: '                                     iiiihhhhgggffffeeeeddddccccbbbbaaaaZZZXXWWWW',
+      },
+      'none-cool': {
+        cold: '                                              nnnnmmmmllllkkkjjjjiiiihhhhggggffff',
+        mildCold: '                      YYXWWVVUUTTSSRRQQQQPPPPOOOONNNMMMMLLLLKKKKJ0000000000000000',
+        hot: '                           gfeedccbaaZZYYXXXWWWWVVVUUUUTTTTSSSRRRRQQQQ00000000000',
+        mildHot: '                                         hhhggggffffeeeedddccccbbbbaaaaZZZZYYYYXX',
+      },
+      'heat-2': {
+        cold: '                                      iiiihhhggggffffeeeeddddccccbbbbaaaZZZZYYYYX',
+        mildCold: '                              ddcbbaaZZYYXXWWVVVVUUUUTTTTSSSSRRRRQQQPPPPO00000000',
+      },
+      'heat-4': {
+        cold: '                                 dddccccbbbbaaaaZZZYYYYXXXXWWWWVVVVUUUUTTTTSSSRRR',
+        mildCold: '                                   jihhgffeeddccbbbaaaaZZZZYYYXXXXWWWWVVVVUUUU000',
+      },
+      'heat-4-warm': {
+        cold: '                                eeeddddccccbbbbaaaaZZZZYYYXXXXWWWWVVVVTTSSSSRRRRQ',
+        mildCold: '                                      iihggffeeddccbbbaaaZZZZYYYYXXXXWWWWVVVVUUUU',
+      },
+      'cold-2': {
+        hot: '                        gfeedcbbaaZZYYXXXWWWVVVVUUUUTTTSSSSRRRRQQQQ00000000000000',
+        mildHot: '                                            hhhggggffffeeeeddddccccbbbaaaaZZZZYYY',
+      },
+      'cold-4': {
+        hot: '                     gfeddcbbaZZYYYXXXWWWVVVVUUUTTTTSSSSRRRQQQQP00000000000000000',
+        mildHot: '                                               hhhhgggffffeeeeddddccccbbbbaaaaZZZ',
+      },
+    },
+    'catfish-and-koi carton-overnight': {
+      'none-middle': {
+        cold: '                                                  utttssssrrrrqqqqpppoooonnnnmmmm',
+        mildCold: '                                 QPPPPOOOONNNNMMMMLLLKKK0000000000000000000000000',
+        hot: '                                       XWWWVVVUUUTTTSSSRRRRQQ00000000000000000000',
+        mildHot: '                                             nnnnmmmmllllkkkjjjjiiiihhhhggggfffee',
+      },
+      'none-warm': {
+        cold: '                                                  utttssssrrrqqqqppppoooonnnnmmml',
+        mildCold: '                                   PPPOOOONNNNMMMMLLLLKK0000000000000000000000000',
+        hot: '                                        XWWVVVUUUTTTSSSRRRRQQQ0000000000000000000',
+        mildHot: '                                             nnnnmmmllllkkkkjjjjiiiihhhhgggffffee',
+      },
+      'none-cool': {
+        cold: '                                                  uutttsssrrrrqqqqppppooonnnnmmmm',
+        mildCold: '                                 QPPPPOOOONNNNMMMLLLLKKK0000000000000000000000000',
+        hot: '                                      XXWWWVVVUUUTTTSSSRRRQQQ00000000000000000000',
+        mildHot: '                                             nnnnmmmmllllkkkkjjjiiiihhhhggggffffe',
+      },
+      'heat-2': {
+        cold: '                                               rqqppppoooonnnmmmmllllkkkkjjjjiiii',
+        mildCold: '                                    TTSSSSRRRRQQQQPPPPOOOON0000000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                            nnnmmmllllkkkjjjjiiiihhhhggggffffeeed',
+        mildCold: '                                       WWWVVVVUUUUTTTTSSSSRRRRQ000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                           onnmmmmlllkkkkjjjjiiiihhhhgggffffeeeed',
+        mildCold: '                                         WWVVVVUUUTTTTSSSSRRRRQ000000000000000000',
+      },
+      'cold-2': {
+        hot: '                                  YXXXWWWVVVUUUTTTSSRRRRQQP0000000000000000000000',
+        mildHot: '                                               nnnnmmmmllllkkkjjjjiiiihhhhgggffff',
+      },
+      'cold-4': {
+        hot: '                                YXXXWWWVVVUUTTTSSSRRQQPPON00000000000000000000000',
+        mildHot: '                                                       mmlllkkkkjjjjiiiihhhggggff',
+      },
+    },
+    'catfish-and-koi foam-25-overnight': {
+      'none-middle': {
+        cold: '                                              utssrqqpoonmmlkkjihhgffeddcbbaZZYXX',
+        mildCold: '                              QPOONMMLKKJIIHGFFEDDCBBA998776554300000000000000000',
+        hot: '                                   XWWVUTSRRQPPONNMLLKJJIHHGFFEDDCBBA000000000000',
+        mildHot: '                                         nmmlkkjiihggfeedccbaaZYYXWWVUUTSSRQPPONN',
+      },
+      'none-warm': {
+        cold: '                                             ttsrrqpponmmlkkjiihggfeedccbaaZYYXWW',
+        mildCold: '                                PPONNMLLKJJIHHGFFEDDCBAA9887665443000000000000000',
+        hot: '                                     XWVUUTSRQQPOONMMLKKJIIHGGFEEDCCBAA0000000000',
+        mildHot: '                                        nmllkjjihhgffeddcbbaZZYXXWVUUTSSRQQPOONMM',
+      },
+      'none-cool': {
+        cold: '                                               utssrqqpoonmmlkkjiihgffeddcbbaZZYX',
+        mildCold: '                            QQPOONMMLKKJIHHGFFEDDCBBA9987765543000000000000000000',
+        hot: '                                 YXWVVUTSRRQPPONNMLLKJJIHHGFFEDDCBBA0000000000000',
+        mildHot: '                                          nmmlkkjiihggfeedccbaaZYYXWWVUUTSSRQQPOO',
+      },
+      'heat-2': {
+        cold: '                                        mllkjjihhgffeddcbbaZYYXWWVUUTSSRQQPOONMML',
+        mildCold: '                                    XXWVVUTTSRRQPOONMMLKKJIIHGGFEEDCCBA0000000000',
+      },
+      'heat-4': {
+        cold: '                                 feedccbaaZYYXWWVUUTSSRQQPONNMLLKJJIHHGFFEDDCBBA9',
+        mildCold: '                                           eedccbaZZYXXWVVUTTSRRQPPONNMLLKJJIH000',
+      },
+      'heat-4-warm': {
+        cold: '                               gfeddcbbaZZYXXWVVUTSSRQQPOONMMLKKJIIHGGFEEDCCBAA98',
+        mildCold: '                                              ddcbbaZZYXXWVUUTSSRQQPOONMMLKKJIIH0',
+      },
+      'cold-2': {
+        hot: '                           YXWVUTTSRQQPOONMMLKKJIHHGFFEDDCBA990000000000000000000',
+        mildHot: '                                                     kkjihhgffeddcbbaZZYXXWVUUTTS',
+      },
+      'cold-4': {
+        hot: '                    YXWVUUTSRQQPOONMLLKJIIHGGFEDCBB997654320000000000000000000000',
+        mildHot: '                                                                      dccbaaZZYXW',
+      },
+    },
+    'catfish-and-koi foam-38-overnight': {
+      'none-middle': {
+        cold: '                                        tsrponmlkjihgfedcbaZXWVUTSRQPONMLKJIHFEDC',
+        mildCold: '                        PONMLKJIHGFEDCA987654321000000000000000000000000000000000',
+        hot: '                             XWUTSRQPONMKJIHGFEDCBA987654210000000000000000000000',
+        mildHot: '                                  nmlkjihfedcbaZYXWVUTSRQPNMLKJIHGFEDCBA987643210',
+      },
+      'none-warm': {
+        cold: '                                   tsrqponmkjihgfedcbaZYXWVUSRQPONMLKJIHGFEDCA987',
+        mildCold: '                            QPONMLKJIHFEDCBA9876543210000000000000000000000000000',
+        hot: '                                 YXVUTSRPONMLKJIHGFEDCBA9765432100000000000000000',
+        mildHot: '                              mlkjihgfedcaZYXWVUTSRQPONMLKIHGFEDCBA98765432000000',
+      },
+      'none-cool': {
+        cold: '                                           tsrqpomlkjihgfedcbaZYXWUTSRQPONMLKJIHG',
+        mildCold: '                    QPONMLKJIHGFDCBA987654321000000000000000000000000000000000000',
+        hot: '                         ZXVUTSRQPNMLKJIHGFEDCBA987543210000000000000000000000000',
+        mildHot: '                                      mlkjihgfecbaZYXWVUTSRQPONMKJIHGFEDCBA987654',
+      },
+      'heat-2': {
+        cold: '                                   omlkjihgfedcbaZYXWUTSRQPONMLKJIHGFEDBA98765432',
+        mildCold: '                            WUTSRQPONMLKJIHGFDCBA98765432100000000000000000000000',
+      },
+      'heat-4': {
+        cold: '                              jhgfedcbaZYXWVUTSQPONMLKJIHGFEDCBA87654321000000000',
+        mildCold: '                                 bZYXWVUTSRQPONMLKJIGFEDCBA9876543210000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                         jihgedcbaZYXWVUTSRQPONLKJIHGFEDCBA9876532100000000000000',
+        mildCold: '                                      aZYXWVUTSRQPONLKJIHGFEDCBA98765321000000000',
+      },
+      'cold-2': {
+        hot: '                    XWVTSRQPOMLKJIHGFEDCBA987654210000000000000000000000000000000',
+        mildHot: '                                           nmlkjhgfedcbaZYXWVUTSRPONMLKJIHGFEDCBA',
+      },
+      'cold-4': {
+        hot: '              XWVTSRQPONMLKJIHGEDCBA987654320000000000000000000000000000000000000',
+        mildHot: '                                                     ihhfedcbaZYXWVUTSRPONMLKJIHG',
+      },
+    },
+    'catfish-and-koi carton-two-days': {
+      'none-middle': {
+        cold: '                                                      sssssssssssssssssssssssssss',
+        mildCold: '                                 ZZZZZZZZZYYYYYYYYY000000000000000000000000000000',
+        hot: '                                       hhhhgggggggffffff0000000000000000000000000',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-warm': {
+        cold: '                                                      sssssssssssssssssssssssssss',
+        mildCold: '                                   ZZZZZZZYYYYYYYYY000000000000000000000000000000',
+        hot: '                                        hhhgggggggffffff0000000000000000000000000',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-cool': {
+        cold: '                                                      tssssssssssssssssssssssssss',
+        mildCold: '                                 ZZZZZZZZZYYYYYYYYY000000000000000000000000000000',
+        hot: '                                      hhhhhgggggggffffff0000000000000000000000000',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'heat-2': {
+        cold: '                                                   pppppppppppppppppppppppppppppp',
+        mildCold: '                                    ccccccccccccbbbbbb000000000000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                                mmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmm',
+        mildCold: '                                       gggffffffffffffeee000000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                                mmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmm',
+        mildCold: '                                         gffffffffffffeee000000000000000000000000',
+      },
+      'cold-2': {
+        hot: '                                  hhhhhhhhggggggggfffff00000000000000000000000000',
+        mildHot: '                                                  nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'cold-4': {
+        hot: '                                iihhhhhhhhgggggggfffff000000000000000000000000000',
+        mildHot: '                                                       nnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+    },
+    'catfish-and-koi foam-25-two-days': {
+      'none-middle': {
+        cold: '                                                    rrrqqqqqqqqqqqqpppppppppppppo',
+        mildCold: '                              YYXXXXWWWVVVVUUUUUTTTTTSSS0000000000000000000000000',
+        hot: '                                   gffeeedddcccbbbaaaaaZZZZYY00000000000000000000',
+        mildHot: '                                               lllkkkkkkkkkkkkkjjjjjjjjjjjjjiiiii',
+      },
+      'none-warm': {
+        cold: '                                                   rrrqqqqqqqqqqqqqpppppppppppppo',
+        mildCold: '                                YXXXWWWWVVVVUUUUUTTTTTSSS000000000000000000000000',
+        hot: '                                     ffeedddccccbbbaaaaZZZZZYY0000000000000000000',
+        mildHot: '                                              llllkkkkkkkkkkkkkjjjjjjjjjjjjjiiiii',
+      },
+      'none-cool': {
+        cold: '                                                    rrrqqqqqqqqqqqqqppppppppppppp',
+        mildCold: '                            ZYYYXXXWWWWVVVVUUUUTTTTTSSS00000000000000000000000000',
+        hot: '                                 ggfffeedddcccbbbbaaaaZZZZZYY00000000000000000000',
+        mildHot: '                                               llllkkkkkkkkkkkkkjjjjjjjjjjjjjiiii',
+      },
+      'heat-2': {
+        cold: '                                             kkjjjjjjjjjjjjjiiiiiiiiiiiiihhhhhhhh',
+        mildCold: '                                    gfffeeedddcccccbbbbaaaaaZZZ000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                      dcccccccccccccbbbbbbbbbbbbbaaaaaaaaaaaaaZZZ',
+        mildCold: '                                           nmmmlllkkkkjjjjiiiihhhhhggg00000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                     dcccccccccccccbbbbbbbbbbbbbaaaaaaaaaaaaaZZZZ',
+        mildCold: '                                              mllllkkkjjjjiiiiihhhhhggg0000000000',
+      },
+      'cold-2': {
+        hot: '                             hggfffeedddcccbbbbaaaaZZZZYY000000000000000000000000',
+        mildHot: '                                                     lkkkkkkkkkkkkkjjjjjjjjjjjjji',
+      },
+      'cold-4': {
+        hot: '                          hggffeeedddcccbbbaaaaZZZZYYY000000000000000000000000000',
+        mildHot: '                                                                      jjjjjjjjjjj',
+      },
+    },
+    'catfish-and-koi foam-38-two-days': {
+      'none-middle': {
+        cold: '                                               ppppoooonnnnmmmmlllkkkkjjjjiiiihhh',
+        mildCold: '                         YXXWWVUUTTSSSRRQQQQPPPOOOONNNNMMMMLLLLKKKKJ0000000000000',
+        hot: '                              gfeddcbbaaZZYYXXXWWWVVVVUUUUTTTSSSSRRRRQQQQ00000000',
+        mildHot: '                                          jjjiiiihhhhggggffffeeeddddccccbbbbaaaaZ',
+      },
+      'none-warm': {
+        cold: '                                            ppppoooonnnnmmmmllllkkkkjjjiiiihhhhgg',
+        mildCold: '                            YXXWVVUUTTSSRRRQQQPPPPOOOONNNNMMMMLLLKKKKJJ0000000000',
+        hot: '                                 gfedccbbaZZYYXXXWWWWVVVVUUUTTTTSSSRRRRQQQQP00000',
+        mildHot: '                                       jjjjiiihhhhggggffffeeeeddddccccbbbaaaaZZZZ',
+      },
+      'none-cool': {
+        cold: '                                                 ppppoooonnnmmmmllllkkkkjjjjiiiih',
+        mildCold: '                       YYXWWVVUUTTSSRRQQQQPPPPOOOONNNMMMMLLLLKKKKJ000000000000000',
+        hot: '                            gfeedcbbaaZZYYXXXWWWWVVVUUUUTTTSSSSRRRRQQQQ0000000000',
+        mildHot: '                                           kjjjiiiihhhhggggfffeeeeddddccccbbbbaaa',
+      },
+      'heat-2': {
+        cold: '                                          kkkjjjjiiiihhhhggggffffeeeedddccccbbbba',
+        mildCold: '                              ddcbbaaZZYYXXWWVVVVUUUUTTTTSSSSRRRRQQQPPPPO00000000',
+      },
+      'heat-4': {
+        cold: '                                     fffeeeeddddcccbbbbaaaaZZZZYYYYXXXXWWWWVVVUUU',
+        mildCold: '                                   jihhgffeeddccbbbaaaaZZZZYYYXXXXWWWWVVVVUUUU000',
+      },
+      'heat-4-warm': {
+        cold: '                                  fffeeeeddddccccbbbbaaaZZZZYYYYXXXXWWWWVVVVUUUUT',
+        mildCold: '                                      iihggffeeddccbbbaaaZZZZYYYYXXXXWWWWVVVVUUUU',
+      },
+      'cold-2': {
+        hot: '                         gfeddcbbaaZZYYXXXWWWVVVVUUUTTTTSSSSRRRRQQQQ0000000000000',
+        mildHot: '                                               jjjiiiihhhhggggfffeeeeddddccccbbbb',
+      },
+      'cold-4': {
+        hot: '                      gfedccbbaZZYYXXXWWWWVVVVUUUTTTTSSSRRRRQQQQP0000000000000000',
+        mildHot: '                                                     iiiihhhhggggffffeeeeddddcccc',
       },
     },
     'cool-water-fish carton-overnight': {
-      none: {
-        cold: '                                                 ssrrrrqqqqqppppppoooooooonnnnnnn',
-        hot: '                                            bbaaaaZZZZYYYYYX000000000000000000000',
+      'none-middle': {
+        cold: '                                                srrrqqqqppppoooonnnmmmmllllkkkkjj',
+        mildCold: '                                      TTTTSSSSRRRRQQQQPP0000000000000000000000000',
+        hot: '                                           baaaZZZYYYXXXWWWVV00000000000000000000',
+        mildHot: '                                           llllkkkkjjjjiiihhhhggggffffeeeeddddccc',
+      },
+      'none-warm': {
+        cold: '                                                srrrqqqqpppoooonnnnmmmmllllkkkkjj',
+        mildCold: '                                       TTTTSSSRRRRQQQQPP0000000000000000000000000',
+        hot: '                                             aaaZZYYYXXXWWWVV00000000000000000000',
+        mildHot: '                                           llllkkkjjjjiiiihhhhggggffffeeeddddcccc',
+      },
+      'none-cool': {
+        cold: '                                                ssrrrqqqppppoooonnnnmmmmlllkkkkjj',
+        mildCold: '                                     UTTTTSSSSRRRRQQQPPP0000000000000000000000000',
+        hot: '                                          bbaaaZZZYYYXXXWWWVV00000000000000000000',
+        mildHot: '                                           llllkkkkjjjjiiiihhhhgggffffeeeeddddccc',
       },
       'heat-2': {
-        cold: '                                              poooonnnnnmmmmmmlllllllkkkkkkkkjjjj',
-        hot: '                                               eeeddddccccbbbbb000000000000000000',
+        cold: '                                             pooonnnmmmmllllkkkjjjjiiiihhhhggggff',
+        mildCold: '                                         XWWWWVVVVUUUUTTTTS0000000000000000000000',
       },
       'heat-4': {
-        cold: '                                          mllllkkkkjjjjjjiiiiiiihhhhhhhhgggggggff',
-        hot: '                                                  hhhhggggfffffeee000000000000000',
+        cold: '                                          lllkkkjjjjiiiihhhggggffffeeeeddddccccbb',
+        mildCold: '                                            aaaZZZYYYYXXXXWWWW0000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                         mllkkkkjjjiiiihhhhggggffffeeeedddccccbbb',
+        mildCold: '                                             aaZZZZYYYXXXXWWWWV000000000000000000',
       },
       'cold-2': {
-        cold: '                                                  ssrrrrqqqqqpppppppooooooonnnnnn',
-        hot: '                                        cbbbbaaaaZZZZYYYXX00000000000000000000000',
+        hot: '                                      cbbbaaaZZYYYXXXWWVVUU0000000000000000000000',
+        mildHot: '                                              lllkkkkjjjjiiiihhhggggffffeeeeddddc',
       },
       'cold-4': {
-        cold: '                                                        rrqqqqqppppppooooooonnnnn',
-        hot: '                                      cbbbbaaaaZZZYYXXWWV000000000000000000000000',
+        hot: '                                    cbbbaaZZZYYXXWWVVUTTSR00000000000000000000000',
+        mildHot: '                                                    kkkjjjjiiiihhhggggffffeeeeddd',
       },
     },
     'cool-water-fish foam-25-overnight': {
-      none: {
-        cold: '                                              srqqppoonnmmllkkjjiiihhggffeeddccbb',
-        hot: '                                         baZZYXXWWVVUUTTSSRRRQQPP0000000000000000',
+      'none-middle': {
+        cold: '                                             rrqpponnmllkjjihhgfeedccbaaZYYXWWVUU',
+        mildCold: '                                  UTTSRRQPPONNMLLKJJIHGGFEEDCCB000000000000000000',
+        hot: '                                        baZYXXWVUUTSSRQQPOONMMLKKJII0000000000000',
+        mildHot: '                                        lkjjihhgffeddcbbaZZYXXWVVUTTSRRQPPONMMLKK',
+      },
+      'none-warm': {
+        cold: '                                           srqqpoonmmlkjjihhgffeddcbbaZZYXXWVVUTT',
+        mildCold: '                                     TSSRQQPOONMMLKKJIIHGGFEEDCB00000000000000000',
+        hot: '                                           aZYXWVVUTTSRRQPPONNMLLKJJI000000000000',
+        mildHot: '                                      lkkjiihggfeedccbaaZYYXWWVUUTSRRQPPONNMLLKJJ',
+      },
+      'none-cool': {
+        cold: '                                               rqqpoonmmlkkjiihggfeedccbaZZYXXWVV',
+        mildCold: '                                UUTSSRQQPOONMLLKJJIHHGFFEDDCB00000000000000000000',
+        hot: '                                     cbaZZYXWVVUTTSRRQPPONNMLLKJJI000000000000000',
+        mildHot: '                                         lkkjiihggfeedccbaaZYYXWWVUUTSSRQQPOONMML',
       },
       'heat-2': {
-        cold: '                                       lkjjiihhggffeeddccbbbaaZZYYXXWWVVUUUTTSSRR',
-        hot: '                                                ihggfeeddccbbaaZZYYYXXW0000000000',
+        cold: '                                      lkjiihggfeedccbaaZYYXWWVUTTSRRQPPONNMLLKJJI',
+        mildCold: '                                         baaZYYXWWVUUTSRRQPPONNMLLKJJI00000000000',
       },
       'heat-4': {
-        cold: '                                edccbbaaZZYYXXWWVVUUUTTSSRRQQPPOONNNMMLLKKJJIIHHG',
-        hot: '                                                       ponnmllkkjjiihhgggffeed000',
+        cold: '                               edcbbaZZYXXWVVUTTSRRQPPONNMLKKJIIHGGFEEDCCBAA98876',
+        mildCold: '                                                ihhgffedccbaaZYYXWWVUUTSSRQQ00000',
+      },
+      'heat-4-warm': {
+        cold: '                              dccbaaZYYXWWVUUTSSRQPPONNMLLKJJIHHGFFEDDCBBA9987765',
+        mildCold: '                                                   hggfeedccbaaZYXXWVVUTTSRRQP000',
       },
       'cold-2': {
-        cold: '                                                       ppoonnmmllkkjjjiihhggffeed',
-        hot: '                                   bbaZYYXWWVVUUTTSSRRQQPOON000000000000000000000',
+        hot: '                              dbaaZYXWVVUTTSRRQPOONMLLKJIHGFE00000000000000000000',
+        mildHot: '                                                    jihggfeedccbaZZYYXWVVUTTSRRQP',
       },
       'cold-4': {
-        cold: '                                                                     llkkjjiihhgg',
-        hot: '                             bbaZYYXWWVVUUTSSRRQPONMMLJJIH00000000000000000000000',
+        hot: '                       cbaZYYXVVUUTSRQQPONNMLKJIHGFEDCA98650000000000000000000000',
+        mildHot: '                                                                 eeddcbbZZYXXWWVU',
       },
     },
     'cool-water-fish foam-38-overnight': {
-      none: {
-        cold: '                                             srqpoonnmllkkjjihhggfeeddcbbaaZYYXXW',
-        hot: '                                        baZYXXWVVUUTSSRRQQPOONNMLLK00000000000000',
+      'none-middle': {
+        cold: '                                       rqponmlkjihgfdcbaZYXWVUTSRQPONMKJIHGFEDCBA',
+        mildCold: '                             UTSRQPONLKJIHGFEDCBA98765321000000000000000000000000',
+        hot: '                                  caZYXVUTSRQPONMLKJIHGEDCBA987654321000000000000',
+        mildHot: '                                  kjihgfedcbaZYXWVUSRQPONMLKJIHGFEDCA987654321000',
+      },
+      'none-warm': {
+        cold: '                                  srponmlkjihgfedcbaYXWVUTSRQPONMLKJIGFEDCBA98765',
+        mildCold: '                                  UTSQPONMLKJIHGFEDCBA876543210000000000000000000',
+        hot: '                                       baZYWVUTSRQPONMLKIHGFEDCBA9876543200000000',
+        mildHot: '                             lkjigfedcbaZYXWVUTSRQPNMLKJIHGFEDCBA9875432100000000',
+      },
+      'none-cool': {
+        cold: '                                            rqponmlkjhgfedcbaZYXWVUTSRPONMLKJIHGF',
+        mildCold: '                        UTSRQPONMLKJHGFEDCBA9876543210000000000000000000000000000',
+        hot: '                             dbZYXWVUTRQPONMLKJIHGFEDCB98765432100000000000000000',
+        mildHot: '                                       kjihgfedcbaZXWVUTSRQPONMLKJIHFEDCBA9876543',
       },
       'heat-2': {
-        cold: '                                    jihggfeeddccbaaZZYXXWWVUUTTSRRQQPPONNMMLKKJJI',
-        hot: '                                                 kjihgffeedccbbaZZYYXXWVVUUT00000',
+        cold: '                                  mlkjihgfedcbZYXWVUTSRQPONMLKJHGFEDCBA9876543210',
+        mildCold: '                                  ZYXWVUTSRPONMLKJIHGFEDCBA9765432100000000000000',
       },
       'heat-4': {
-        cold: '                            ZYYXWWVUUTTSSRQQPPONNMMLKKJJIHHGGFFEDDCCBAA9987766544',
-        hot: '                                                         tssrqpoonmmllkjjiihggffe',
+        cold: '                             hgfedcbaZYWVUTSRQPONMLKJIHGEDCBA98765432100000000000',
+        mildCold: '                                       edcbaZYXWVUSRQPONMLKJIHGFEDCA9876543210000',
+      },
+      'heat-4-warm': {
+        cold: '                        igfedcbaZYXWVUTRQPONMLKJIHGFEDCB9876543210000000000000000',
+        mildCold: '                                            edcbaZXWVUTSRQPONMLKJIHFEDCBA98765432',
       },
       'cold-2': {
-        cold: '                                                         oonmmllkjjihhggfeeddccba',
-        hot: '                                cbaZYXWWVUUTTSRRQQPOONMMLKJI000000000000000000000',
+        hot: '                        baYXWVUTRQPONMLKJIHGFEDCAA9765432100000000000000000000000',
+        mildHot: '                                             kjihgfedcbaZXWVUTSRQPONMLKJIHGEDCBA9',
       },
       'cold-4': {
-        cold: '                                                                            hhggf',
-        hot: '                        caaZYXWVVUUTSSRQPPONMLLKIIHFEDCBA800000000000000000000000',
+        hot: '                  baYXWVUSRRQPNMLKJIHGFECCB98765432100000000000000000000000000000',
+        mildHot: '                                                      hgfedcaZYYWVUTSRQPONLKJIIHG',
       },
     },
     'cool-water-fish carton-two-days': {
-      none: {
-        cold: '                                                     rrrrrrrrrrrrrrrrrrrrrrrrrrrr',
-        hot: '                                            mmlllllllll00000000000000000000000000',
+      'none-middle': {
+        cold: '                                                    qqqqqqqqqqqqqqqqqqqqqqqqqqqqq',
+        mildCold: '                                      ddddddddccccc000000000000000000000000000000',
+        hot: '                                           llllkkkkkkkjj0000000000000000000000000',
+        mildHot: '                                               llllllllllllllllllllllllllllllllll',
+      },
+      'none-warm': {
+        cold: '                                                    qqqqqqqqqqqqqqqqqqqqqqqqqqqqq',
+        mildCold: '                                       dddddddccccc000000000000000000000000000000',
+        hot: '                                             llkkkkkkkjj0000000000000000000000000',
+        mildHot: '                                               llllllllllllllllllllllllllllllllll',
+      },
+      'none-cool': {
+        cold: '                                                     qqqqqqqqqqqqqqqqqqqqqqqqqqqq',
+        mildCold: '                                     dddddddddccccc000000000000000000000000000000',
+        hot: '                                          lllllkkkkkkkjj0000000000000000000000000',
+        mildHot: '                                                lllllllllllllllllllllllllllllllll',
       },
       'heat-2': {
-        cold: '                                                  ooooooooooooooooooooooooooooooo',
-        hot: '                                               pppppppoooo00000000000000000000000',
+        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                         gggggggggggff000000000000000000000000000',
       },
       'heat-4': {
-        cold: '                                               llllllllkkkkkkkkkkkkkkkkkkkkkkkkkk',
-        hot: '                                                  sssssssssssr0000000000000000000',
+        cold: '                                              kkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkk',
+        mildCold: '                                            kkjjjjjjjjjjj000000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                              kkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkk',
+        mildCold: '                                             kjjjjjjjjjjj000000000000000000000000',
       },
       'cold-2': {
-        cold: '                                                     rrrrrrrrrrrrrrrrrrrrrrrrrrrr',
-        hot: '                                        mmmmmmlllllllll00000000000000000000000000',
+        hot: '                                      llllllllkkkkkkkkj00000000000000000000000000',
+        mildHot: '                                                lllllllllllllllllllllllllllllllll',
       },
       'cold-4': {
-        cold: '                                                        rrrrrrrrrrrrrrrrrrrrrrrrr',
-        hot: '                                      mmmmmmmmllllllll000000000000000000000000000',
+        hot: '                                    mmlllllllkkkkkkkjj000000000000000000000000000',
+        mildHot: '                                                    lllllllllllllllllllllllllllll',
       },
     },
     'cool-water-fish foam-25-two-days': {
-      none: {
-        cold: '                                                   ppppppppppppppppoooooooooooooo',
-        hot: '                                         kkkjjjjiiihhhhggg00000000000000000000000',
+      'none-middle': {
+        cold: '                                                  pppooooooooooooonnnnnnnnnnnnnmm',
+        mildCold: '                                  cccbbbaaaaZZZZYYYYXXX00000000000000000000000000',
+        hot: '                                        jjiiihhhgggffffeeeed000000000000000000000',
+        mildHot: '                                             jjjjiiiiiiiiiiiiihhhhhhhhhhhhggggggg',
+      },
+      'none-warm': {
+        cold: '                                                 pppooooooooooooonnnnnnnnnnnnnmmm',
+        mildCold: '                                     bbbbaaaZZZZYYYYYXXX0000000000000000000000000',
+        hot: '                                           iiihhggggfffeeeedd00000000000000000000',
+        mildHot: '                                            jjjjiiiiiiiiiiiiihhhhhhhhhhhhhggggggg',
+      },
+      'none-cool': {
+        cold: '                                                   ppooooooooooooonnnnnnnnnnnnnmm',
+        mildCold: '                                dcccbbbaaaaZZZZYYYYXXXX00000000000000000000000000',
+        hot: '                                     kkjjjiihhhgggffffeeeedd000000000000000000000',
+        mildHot: '                                              jjjiiiiiiiiiiiiihhhhhhhhhhhhhgggggg',
       },
       'heat-2': {
-        cold: '                                            iiiiiiiiiiiiiiihhhhhhhhhhhhhhhhhhhhhh',
-        hot: '                                                rrrqqqqppppoooonn0000000000000000',
+        cold: '                                           iihhhhhhhhhhhhhgggggggggggggffffffffff',
+        mildCold: '                                         jjjiiihhhhggggffffeee0000000000000000000',
       },
       'heat-4': {
-        cold: '                                     bbbbbbbbbbbbbaaaaaaaaaaaaaaaaaaaaaaaaaZZZZZZ',
-        hot: '                                                       yyyxxxxwwwwvvvvuu000000000',
+        cold: '                                    baaaaaaaaaaaaaZZZZZZZZZZZZZYYYYYYYYYYYYYXXXXX',
+        mildCold: '                                                qqqpppoooonnnnmmmmmll000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                   bbaaaaaaaaaaaaaZZZZZZZZZZZZYYYYYYYYYYYYYXXXXXX',
+        mildCold: '                                                   qpppoooonnnnmmmmlll00000000000',
       },
       'cold-2': {
-        cold: '                                                       ppppppppppppppoooooooooooo',
-        hot: '                                   lllkkkkjjjiiiihhhhggg0000000000000000000000000',
+        hot: '                                 lkkjjiiihhhgggffffeeedd0000000000000000000000000',
+        mildHot: '                                                    jiiiiiiiiiiiihhhhhhhhhhhhhggg',
       },
       'cold-4': {
-        cold: '                                                                     ppoooooooooo',
-        hot: '                                lllkkkkjjjiiiihhhggffe000000000000000000000000000',
+        hot: '                              lkkjjiihhhgggfffeeeddccc000000000000000000000000000',
+        mildHot: '                                                                 iiiihhhhhhhhhhhh',
       },
     },
     'cool-water-fish foam-38-two-days': {
-      none: {
-        cold: '                                                  pppooooooooooooonnnnnnnnnnnnnmm',
-        hot: '                                        kjjjiiihhhgggfffeeee000000000000000000000',
+      'none-middle': {
+        cold: '                                              nnnnmmmmllllkkkjjjjiiiihhhhggggffff',
+        mildCold: '                              cbbaaZYYXXWWWVVUUUTTTTSSSSRRRRQQQQP0000000000000000',
+        hot: '                                   kjihhgffeedcccbbbaaaZZZZYYYXXXXWWWW00000000000',
+        mildHot: '                                         hhhggggffffeeeedddccccbbbbaaaaZZZZYYYYXX',
+      },
+      'none-warm': {
+        cold: '                                           nnnnmmmmllllkkkkjjjjiiiihhhggggffffeee',
+        mildCold: '                                  bbaZZYYXXWWVVVUUUTTTTSSSSRRRRQQQQP0000000000000',
+        hot: '                                       jihggfeeddccbbbaaaaZZZYYYYXXXXWWWV00000000',
+        mildHot: '                                      hhhggggffffeeeeddddccccbbbbaaaZZZZYYYYXXXXW',
+      },
+      'none-cool': {
+        cold: '                                                onnnnmmmllllkkkkjjjjiiiihhhhggggf',
+        mildCold: '                           ccbaaZZYYXXWWVVUUUUTTTTSSSSRRRQQQQPP000000000000000000',
+        hot: '                                kjiihgffeeddccbbbaaaaZZZYYYYXXXWWWWV0000000000000',
+        mildHot: '                                           hhhhggggfffeeeeddddccccbbbbaaaaZZZZYYY',
       },
       'heat-2': {
-        cold: '                                         gggffffffffffffffeeeeeeeeeeeeedddddddddd',
-        hot: '                                                 tsssrrqqqpppoooonnnn000000000000',
+        cold: '                                         iiihhhhggggffffeeeeddddcccbbbbaaaaZZZZYY',
+        mildCold: '                                   hhgffeeddccbbaaZZZZYYYYXXXXWWWWVVVU00000000000',
       },
       'heat-4': {
-        cold: '                                XXXXWWWWWWWWWWWWWWVVVVVVVVVVVVVUUUUUUUUUUUUUUTTTT',
-        hot: '                                                         %%###!!zzzyyyxxxwwwwv000',
+        cold: '                                    dddccccbbbaaaaZZZZYYYYXXXXWWWWVVVVUUUTTTTSSSS',
+        mildCold: '                                        mmlkkjjiihhggfffeeeedddccccbbbbaaaa000000',
+      },
+      'heat-4-warm': {
+        cold: '                                 dddccccbbbbaaaaZZZYYYYXXXXWWWWVVVVUUUUTTTTSSSRRR',
+        mildCold: '                                            mlkkjjiihhggffeeeeddddccccbbbbaaaa000',
       },
       'cold-2': {
-        cold: '                                                         oooooooooooonnnnnnnnnnnn',
-        hot: '                                  lkkkjjiiihhhgggfffeeee0000000000000000000000000',
+        hot: '                             kjihhgffeeddccbbbaaaZZZZYYYXXXXWWWW00000000000000000',
+        mildHot: '                                               hhhggggffffeeeedddccccbbbbaaaaZZZZ',
       },
       'cold-4': {
-        cold: '                                                                            nnnnn',
-        hot: '                              lkkkjjiiihhgggfffeeedccb000000000000000000000000000',
+        hot: '                         kjjihggffeddccbbbaaaaZZZYYYYXXXXWWWV00000000000000000000',
+        mildHot: '                                                      gggffffeeeeddddccccbbbaaaaZ',
       },
     },
     'perch carton-overnight': {
-      none: {
-        cold: '                                               qqppppooooonnnnnnmmmmmmmmllllllllk',
-        hot: '                                              ddccccbbbbaaaa000000000000000000000',
+      'none-middle': {
+        cold: '                                              qpppoooonnnnmmmmlllkkkkjjjjiiiihhhh',
+        mildCold: '                                        VVVVUUUUTTTTSSSS0000000000000000000000000',
+        hot: '                                             dcccbbbaaaZZZYYY00000000000000000000',
+        mildHot: '                                         jjjjiiiihhhhgggffffeeeeddddccccbbbbaaaZZ',
+      },
+      'none-warm': {
+        cold: '                                              qpppoooonnnmmmmllllkkkkjjjjiiiihhhg',
+        mildCold: '                                         VVVVUUUTTTTSSSS0000000000000000000000000',
+        hot: '                                               cccbbaaaZZZYYY00000000000000000000',
+        mildHot: '                                         jjjjiiihhhhggggffffeeeeddddcccbbbbaaaaZZ',
+      },
+      'none-cool': {
+        cold: '                                              qqpppooonnnnmmmmllllkkkkjjjiiiihhhh',
+        mildCold: '                                       WVVVVUUUUTTTTSSS00000000000000000000000000',
+        hot: '                                            ddcccbbbaaaZZZYY000000000000000000000',
+        mildHot: '                                         jjjjiiiihhhhggggffffeeeddddccccbbbbaaaaZ',
       },
       'heat-2': {
-        cold: '                                            nmmmmlllllkkkkkkjjjjjjjiiiiiiiihhhhhh',
-        hot: '                                                 gggffffeeeeddd000000000000000000',
+        cold: '                                           nmmmlllkkkkjjjjiiihhhhggggffffeeeedddd',
+        mildCold: '                                           ZYYYYXXXXWWWWVVV0000000000000000000000',
       },
       'heat-4': {
-        cold: '                                        kjjjjiiiihhhhhhgggggggffffffffeeeeeeedddd',
-        hot: '                                                    jjjjiiiihhhhhg000000000000000',
+        cold: '                                        jjjiiihhhhggggfffeeeeddddccccbbbbaaaaZZZY',
+        mildCold: '                                              cccbbbaaaaZZZZYY0000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                       kjjiiiihhhggggffffeeeeddddccccbbbaaaaZZZZY',
+        mildCold: '                                               ccbbbbaaaZZZZYY0000000000000000000',
       },
       'cold-2': {
-        cold: '                                                qqppppooooonnnnnnnmmmmmmmllllllll',
-        hot: '                                          eddddccccbbbaaaZ00000000000000000000000',
+        hot: '                                        edddccbbbaaaZZYYXWW0000000000000000000000',
+        mildHot: '                                            jjjjiiihhhhggggffffeeeddddccccbbbbaaa',
       },
       'cold-4': {
-        cold: '                                                     pppooooonnnnnnmmmmmmmlllllll',
-        hot: '                                       eeddddcccbbbaaZYYX000000000000000000000000',
+        hot: '                                     edddcccbbaaZZYXXWVVTT00000000000000000000000',
+        mildHot: '                                                 jjiiihhhggggffffeeeddddccccbbbba',
       },
     },
     'perch foam-25-overnight': {
-      none: {
-        cold: '                                            qpoonnmmllkkjjiihhgggffeeddccbbaaZZZY',
-        hot: '                                           dcbbaZZYYXXWWVVUUTTTS00000000000000000',
+      'none-middle': {
+        cold: '                                           pponnmllkjjihhgffedccbaaZYYXWWVUUTSSRQ',
+        mildCold: '                                    WVVUTTSRRQPPONNMLLKJIIHGGF0000000000000000000',
+        hot: '                                          dcbaZZYXWWVUUTSSRQQPOONMM00000000000000',
+        mildHot: '                                      jihhgffeddcbbaZZYXXWVVUTTSRRQPPONNMLKKJIIHG',
+      },
+      'none-warm': {
+        cold: '                                         qpoonmmlkkjihhgffeddcbbaZZYXXWVVUTTSRRQP',
+        mildCold: '                                       VUUTSSRQQPOONMMLKKJIIHGG000000000000000000',
+        hot: '                                             cbaZYXXWVVUTTSRRQPPONNM0000000000000',
+        mildHot: '                                    jiihggfeedccbaaZYYXWWVUUTSSRQPPONNMLLKJJIHHGF',
+      },
+      'none-cool': {
+        cold: '                                             poonmmlkkjiihggfeedccbaaZYXXWVVUTTSR',
+        mildCold: '                                  WWVUUTSSRQQPONNMLLKJJIHHGF000000000000000000000',
+        hot: '                                       edcbbaZYXXWVVUTTSRRQPPONNM0000000000000000',
+        mildHot: '                                       jiihggfeedccbaaZYYXWWVUUTSSRQQPOONMMLKKJII',
       },
       'heat-2': {
-        cold: '                                     jihhggffeeddccbbaaZZZYYXXWWVVUUTTSSSRRQQPPOO',
-        hot: '                                                  kjiihggffeeddccbbaaaZ0000000000',
+        cold: '                                    jihggfeedccbaaZYYXWWVUUTSRRQPPONNMLLKJJIHHGFF',
+        mildCold: '                                           dccbaaZYYXWWVUTTSRRQPPONNM000000000000',
       },
       'heat-4': {
-        cold: '                              cbaaZZYYXXWWVVUUTTSSSRRQQPPOONNMMLLLKKJJIIHHGGFFEEE',
-        hot: '                                                         rqpponnmmllkkjjiiihhg000',
+        cold: '                             cbaZZYXXWVVUTTSRRQPPONNMLLKJIIHGGFEEDCCBAA9887665443',
+        mildCold: '                                                  kjjihhgfeedccbaaZYYXWWVUU000000',
+      },
+      'heat-4-warm': {
+        cold: '                            baaZYYXWWVUUTSSRQQPONNMLLKJJIHHGFFEDDCBBA998776554332',
+        mildCold: '                                                     jiihggfeedccbaZZYXXWVVUT0000',
       },
       'cold-2': {
-        cold: '                                                    onnmmllkkjjiiihhggffeeddccbbb',
-        hot: '                                    fddcbaZZYYXXWWVVUUTSSRQP000000000000000000000',
+        hot: '                                edcbaaZYXWWVUUTSRRQPONMMLJJHG00000000000000000000',
+        mildHot: '                                                ihhgffeddcbbaZYYXWWVUUTSRRQQPOONM',
       },
       'cold-4': {
-        cold: '                                                               mllkjjiihhggfffeed',
-        hot: '                              edccbaZYYXXWWVUUTSRQPPNMMKJI00000000000000000000000',
+        hot: '                        edccaaZYXWWVUTTSRQPONMLKJIHGEDCA9870000000000000000000000',
+        mildHot: '                                                            ffedccbaaZYYXWVUUTSSR',
       },
     },
     'perch foam-38-overnight': {
-      none: {
-        cold: '                                           qponmmllkjjiihhgffeedccbbaZZYYXWWVVUUT',
-        hot: '                                          dcbaZZYXXWWVUUTTSSRQQPPO000000000000000',
+      'none-middle': {
+        cold: '                                     ponmlkjihgfedbaZYXWVUTSRQPONMLKIHGFEDCBA9876',
+        mildCold: '                               WVUTSRQPNMLKJIHGFEDCBA9875432100000000000000000000',
+        hot: '                                    ecbaZXWVUTSRQPONMLKJIGFEDCBA98765432100000000',
+        mildHot: '                                ihgfedcbaZYXWVUTSQPONMLKJIHGFEDCBA876543210000000',
+      },
+      'none-warm': {
+        cold: '                                qpnmlkjihgfedcbaZYWVUTSRQPONMLKJIHGEDCBA987654321',
+        mildCold: '                                    WVUSRQPONMLKJIHGFEDCA987654321000000000000000',
+        hot: '                                         dcbaYXWVUTSRQPONMKJIHGFEDCBA987654210000',
+        mildHot: '                           jihgedcbaZYXWVUTSRQPONLKJIHGFEDCBA98765321000000000000',
+      },
+      'none-cool': {
+        cold: '                                          ponmlkjihfedcbaZYXWVUTSRQPNMLKJIHGFEDCB',
+        mildCold: '                          WVUTSRQPONMLJIHGFEDCBA987654310000000000000000000000000',
+        hot: '                               fdbaZYXWVTSRQPONMLKJIHGFEDBA9876543210000000000000',
+        mildHot: '                                     ihgfedcbaZYXVUTSRQPONMLKJIHGFDCBA98765432100',
       },
       'heat-2': {
-        cold: '                                  hgfeedccbbaaZYYXXWVVUUTSSRRQPPOONNMLLKKJIIHHGFF',
-        hot: '                                                   mlkjihhggfeeddcbbaaZZYXX000000',
+        cold: '                                kjihgfedcbaZXWVUTSRQPONMLKJIHFEDCBA98765432100000',
+        mildCold: '                                    baZYXWVUTRQPONMLKJIHGFEDCB9876543210000000000',
       },
       'heat-4': {
-        cold: '                          XWWVUUTSSRRQQPOONNMLLKKJIIHHGFFEEDDCBBAA988776554432211',
-        hot: '                                                           vuutsrqqpoonnmllkkjiih',
+        cold: '                           fedcbaZYXWUTSRQPONMLKJIHGFECBA987654321000000000000000',
+        mildCold: '                                         gfedcbaZYXWUTSRQPONMLKJIHGFECBA987654321',
+      },
+      'heat-4-warm': {
+        cold: '                      gedcbaZYXWVUTSRPONMLKJIHGFEDCBA9765432100000000000000000000',
+        mildCold: '                                              gfedcbZYXWVUTSRQPONMLKJHGFEDCBA9876',
       },
       'cold-2': {
-        cold: '                                                      nnmllkjjihhggfeeddccbaaZZYX',
-        hot: '                                  dcbaaZYXXWWVUUTSSRQQPONMLK000000000000000000000',
+        hot: '                         fdbaZYXVUTSRQPONMLKJIHGEDCBA9876543200000000000000000000',
+        mildHot: '                                           ihgfedcbaZYXVUTSRQPONMLKJIHGFDCBA98765',
       },
       'cold-4': {
-        cold: '                                                                     jiihggffeddc',
-        hot: '                         edcbaZYXXWWVUTTSRQQPONMKKJHGFDCCA00000000000000000000000',
+        hot: '                   fdbaZYWVUUSRQPONMLKJHHFEDCBA9876432100000000000000000000000000',
+        mildHot: '                                                   gfedcbaZYXWUTTRQPONMLKJIHGEDCB',
       },
     },
     'perch carton-two-days': {
-      none: {
-        cold: '                                                   pppppppppppppppppppppppppppppp',
-        hot: '                                              oonnnnnnn00000000000000000000000000',
+      'none-middle': {
+        cold: '                                                  ooooooooooooooooooooooooooooooo',
+        mildCold: '                                        ffffffffeee000000000000000000000000000000',
+        hot: '                                             nnnnmmmmmmm0000000000000000000000000',
+        mildHot: '                                             jjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjj',
+      },
+      'none-warm': {
+        cold: '                                                  ooooooooooooooooooooooooooooooo',
+        mildCold: '                                         fffffffeee000000000000000000000000000000',
+        hot: '                                               nnmmmmmmm0000000000000000000000000',
+        mildHot: '                                             jjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjj',
+      },
+      'none-cool': {
+        cold: '                                                   oooooooooooooooooooooooooooooo',
+        mildCold: '                                       fffffffffeee000000000000000000000000000000',
+        hot: '                                            nnnnnmmmmmmm0000000000000000000000000',
+        mildHot: '                                              jjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjj',
       },
       'heat-2': {
-        cold: '                                                mmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmm',
-        hot: '                                                 rrrrrrrqq00000000000000000000000',
+        cold: '                                               llllllllllllllllllllllllllllllllll',
+        mildCold: '                                           iiiiiiiiiii000000000000000000000000000',
       },
       'heat-4': {
-        cold: '                                             jjjjjjjjiiiiiiiiiiiiiiiiiiiiiiiiiiii',
-        hot: '                                                    uuuuuuuuuu0000000000000000000',
+        cold: '                                            iiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiii',
+        mildCold: '                                              mmlllllllll000000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                            iiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiii',
+        mildCold: '                                               mlllllllll000000000000000000000000',
       },
       'cold-2': {
-        cold: '                                                   pppppppppppppppppppppppppppppp',
-        hot: '                                          oooooonnnnnnn00000000000000000000000000',
+        hot: '                                        nnnnnnnnmmmmmmm00000000000000000000000000',
+        mildHot: '                                              jjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjj',
       },
       'cold-4': {
-        cold: '                                                     pppppppppppppppppppppppppppp',
-        hot: '                                       oooooooonnnnnnn000000000000000000000000000',
+        hot: '                                     ooonnnnnnnmmmmmll000000000000000000000000000',
+        mildHot: '                                                 jjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjj',
       },
     },
     'perch foam-25-two-days': {
-      none: {
-        cold: '                                                 nnnnnnnnnnnnnnnnmmmmmmmmmmmmmmmm',
-        hot: '                                           mmmllllkkkjjjji00000000000000000000000',
+      'none-middle': {
+        cold: '                                                nnnmmmmmmmmmmmmmlllllllllllllkkkk',
+        mildCold: '                                    eeedddccccbbbbaaaaZ00000000000000000000000000',
+        hot: '                                          llkkkjjjiiihhhhggg000000000000000000000',
+        mildHot: '                                           hhhhgggggggggggggffffffffffffeeeeeeeee',
+      },
+      'none-warm': {
+        cold: '                                               nnnmmmmmmmmmmmmmlllllllllllllkkkkk',
+        mildCold: '                                       ddddcccbbbbaaaaa00000000000000000000000000',
+        hot: '                                             kkkjjiiiihhhgggg00000000000000000000',
+        mildHot: '                                          hhhhgggggggggggggfffffffffffffeeeeeeeee',
+      },
+      'none-cool': {
+        cold: '                                                 nnmmmmmmmmmmmmmlllllllllllllkkkk',
+        mildCold: '                                  feeedddccccbbbbaaaaZ000000000000000000000000000',
+        hot: '                                       mmlllkkjjjiiihhhhggg0000000000000000000000',
+        mildHot: '                                            hhhgggggggggggggfffffffffffffeeeeeeee',
       },
       'heat-2': {
-        cold: '                                          gggggggggggggggffffffffffffffffffffffff',
-        hot: '                                                  tttssssrrrrqqqq0000000000000000',
+        cold: '                                         ggfffffffffffffeeeeeeeeeeeeedddddddddddd',
+        mildCold: '                                           lllkkkjjjjiiiihhhhg0000000000000000000',
       },
       'heat-4': {
-        cold: '                                   ZZZZZZZZZZZZZYYYYYYYYYYYYYYYYYYYYYYYYYXXXXXXXX',
-        hot: '                                                         !!!zzzzyyyyxxxx000000000',
+        cold: '                                  ZYYYYYYYYYYYYYXXXXXXXXXXXXXWWWWWWWWWWWWWVVVVVVV',
+        mildCold: '                                                  sssrrrqqqqppppooooo000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                 ZZYYYYYYYYYYYYYXXXXXXXXXXXXWWWWWWWWWWWWWVVVVVVVV',
+        mildCold: '                                                     srrrqqqqppppoooo000000000000',
       },
       'cold-2': {
-        cold: '                                                    nnnnnnnnnnnnnnnmmmmmmmmmmmmmm',
-        hot: '                                     nnnmmmmlllkkkkjjji00000000000000000000000000',
+        hot: '                                   nmmllkkkjjjiiihhhgggf0000000000000000000000000',
+        mildHot: '                                                hhhggggggggggggfffffffffffffeeeee',
       },
       'cold-4': {
-        cold: '                                                               nnnnnnnmmmmmmmmmmm',
-        hot: '                                  nnnmmmmlllkkkjjiihhg000000000000000000000000000',
+        hot: '                               nmmllkkkjjiiihhhggffeed000000000000000000000000000',
+        mildHot: '                                                            gggggggfffffffffffffe',
       },
     },
     'perch foam-38-two-days': {
-      none: {
-        cold: '                                                nnnmmmmmmmmmmmmmlllllllllllllkkkk',
-        hot: '                                          mlllkkkjjjiiihhhgg000000000000000000000',
+      'none-middle': {
+        cold: '                                            llllkkkkjjjjiiihhhhggggffffeeeeddddcc',
+        mildCold: '                                eddccbaaZZYYYXXWWWVVVVUUUUTTTTSS00000000000000000',
+        hot: '                                     mlkjjihhggfeeedddcccbbbbaaaZZZZY000000000000',
+        mildHot: '                                       fffeeeeddddccccbbbaaaaZZZZYYYYXXXXWWWWVVVV',
+      },
+      'none-warm': {
+        cold: '                                         llllkkkkjjjjiiiihhhhggggfffeeeeddddccccb',
+        mildCold: '                                    ddcbbaaZZYYXXXWWWVVVVUUUUTTTTS000000000000000',
+        hot: '                                         lkjiihggffeedddccccbbbaaaaZZZZ0000000000',
+        mildHot: '                                    fffeeeeddddccccbbbbaaaaZZZZYYYXXXXWWWWVVVVUUU',
+      },
+      'none-cool': {
+        cold: '                                              mllllkkkjjjjiiiihhhhggggffffeeeeddd',
+        mildCold: '                             eedccbbaaZZYYXXWWWWVVVVUUUUTTTSS00000000000000000000',
+        hot: '                                  mlkkjihhggffeedddccccbbbaaaaZZZY000000000000000',
+        mildHot: '                                         ffffeeeedddccccbbbbaaaaZZZZYYYYXXXXWWWVV',
       },
       'heat-2': {
-        cold: '                                       eeeddddddddddddddcccccccccccccbbbbbbbbbbbb',
-        hot: '                                                   vuuuttsssrrrqqqqpp000000000000',
+        cold: '                                       gggffffeeeeddddccccbbbbaaaZZZZYYYYXXXXWWWW',
+        mildCold: '                                     jjihhggffeeddccbbbbaaaaZZZZYYYYX000000000000',
       },
       'heat-4': {
-        cold: '                              VVVVUUUUUUUUUUUUUUTTTTTTTTTTTTTSSSSSSSSSSSSSSRRRRRR',
-        hot: '                                                           ((&&&%%###!!!zzzyy0000',
+        cold: '                                  bbbaaaaZZZYYYYXXXXWWWWVVVVUUUUTTTTSSSRRRRQQQQPP',
+        mildCold: '                                          oonmmllkkjjiihhhggggfffeeeeddddc0000000',
+      },
+      'heat-4-warm': {
+        cold: '                               bbbaaaaZZZZYYYYXXXWWWWVVVVUUUUTTTTSSSSRRRRQQQPPPPO',
+        mildCold: '                                              onmmllkkjjiihhggggffffeeeedddd00000',
       },
       'cold-2': {
-        cold: '                                                      mmmmmmmmmmmmmllllllllllllll',
-        hot: '                                   nnmmmllkkkjjjiiihhhg00000000000000000000000000',
+        hot: '                               mlkjjihhggfeeddddcccbbbbaaaZZZZ0000000000000000000',
+        mildHot: '                                             fffeeeeddddccccbbbaaaaZZZZYYYYXXXXWW',
       },
       'cold-4': {
-        cold: '                                                                     mmllllllllll',
-        hot: '                               nnmmmllkkjjjiihhhgffeed000000000000000000000000000',
+        hot: '                           mmkkjiihggffeedddccccbbbaaaaZZZY0000000000000000000000',
+        mildHot: '                                                   feeeddddccccbbbbaaaaZZZZYYYXXX',
       },
     },
     'trout carton-overnight': {
-      none: {
-        cold: '                                             oonnnnmmmmmlllllllkkkkkkkjjjjjjjjiii',
-        hot: '                                                     jjiiii0000000000000000000000',
+      'none-middle': {
+        cold: '                                            oonnnmmmllllkkkkjjjjiiihhhhggggffffee',
+        mildCold: '                                               bbbaaaaZ00000000000000000000000000',
+        hot: '                                                    jiihhhgg000000000000000000000',
+        mildHot: '                                       hhhhggggffffeeeeddddcccbbbbaaaaZZZZYYYYXXX',
+      },
+      'none-warm': {
+        cold: '                                            onnnmmmmllllkkkkjjjiiiihhhhggggffffee',
+        mildCold: '                                                bbbaaaa00000000000000000000000000',
+        hot: '                                                      iihhhgg00000000000000000000',
+        mildHot: '                                       hhhhggggffffeeeddddccccbbbbaaaaZZZZYYYXXXX',
+      },
+      'none-cool': {
+        cold: '                                             onnnmmmllllkkkkjjjjiiiihhhhgggffffee',
+        mildCold: '                                              bbbbaaaaZ00000000000000000000000000',
+        hot: '                                                   jiiihhhgg000000000000000000000',
+        mildHot: '                                       ihhhggggffffeeeeddddccccbbbaaaaZZZZYYYYXXX',
       },
       'heat-2': {
-        cold: '                                          lkkkkjjjjjiiiiiihhhhhhhggggggggffffffff',
-        hot: '                                                        mmmllll000000000000000000',
+        cold: '                                         lkkkjjjiiiihhhhggggfffeeeeddddccccbbbbaa',
+        mildCold: '                                                 ffeeedddd00000000000000000000000',
       },
       'heat-4': {
-        cold: '                                      ihhhhgggggfffffeeeeeeeddddddddccccccccbbbbb',
-        hot: '                                                           ppppooo000000000000000',
+        cold: '                                      hhhgggffffeeeeddddccccbbbaaaaZZZZYYYYXXXXWW',
+        mildCold: '                                                    iiihhhggg00000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                      hhhgggffffeeeedddccccbbbbaaaaZZZZYYYYXXXWWW',
+        mildCold: '                                                      ihhhhggg0000000000000000000',
       },
       'cold-2': {
-        cold: '                                               oonnnnmmmmmllllllkkkkkkkjjjjjjjjii',
-        hot: '                                               kkjjjiiihgf00000000000000000000000',
+        hot: '                                             kkjjiiihggfedc0000000000000000000000',
+        mildHot: '                                           hhhggggfffeeeeddddcccbbbbaaaaZZZZYYYYX',
       },
       'cold-4': {
-        cold: '                                                   nnnnmmmmllllllkkkkkkkjjjjjjjji',
-        hot: '                                            kkjjjiihgfedd000000000000000000000000',
+        hot: '                                          kjjjiihgffddcaaY00000000000000000000000',
+        mildHot: '                                               hhhgggfffeeeedddccccbbbaaaaZZZZYYY',
       },
     },
     'trout foam-25-overnight': {
-      none: {
-        cold: '                                           nnmllkkjjiiihhggffeeddccbbbaaZZYYXXWWV',
-        hot: '                                                   ihhgffeeddcc000000000000000000',
+      'none-middle': {
+        cold: '                                          onmllkjjihhgffeddcbbaZZYXWWVUUTSSRQQPOO',
+        mildCold: '                                            bbaZZYXXWVVUTTSR000000000000000000000',
+        hot: '                                                 jihggfedccbaaZYY0000000000000000',
+        mildHot: '                                     hgffeddcbbaZZYXXWVVUTTSRRQPPONNMLLKJJIHHGFEE',
+      },
+      'none-warm': {
+        cold: '                                         nnmllkjjihhgffeddcbaaZYYXWWVUUTSSRQQPOON',
+        mildCold: '                                               aZZYXXWVVUTTSR00000000000000000000',
+        hot: '                                                    hggfeddcbaaZYY000000000000000',
+        mildHot: '                                    hgffeddcbbaZZYXXWVVUTTSRRQPPONNMLLKJIIHGGFEED',
+      },
+      'none-cool': {
+        cold: '                                           onmllkjjihhgffeddcbbaZZYXXWVUUTSSRQQPO',
+        mildCold: '                                          cbbaZZYXXWVVUTTSR0000000000000000000000',
+        hot: '                                                jihgffedccbaaZYY00000000000000000',
+        mildHot: '                                      hgffeddcbbaZZYXXWVVUTTSRRQPPONNMLLKJJIHHGFF',
       },
       'heat-2': {
-        cold: '                                    ggffeddcccbbaaZZYYXXWWVVVUUTTSSRRQQPPOOONNMML',
-        hot: '                                                         qpoonmmllkkjj00000000000',
+        cold: '                                   hgfeedccbaaZYYXWWVUUTSSRQQPOONMMLKKJIIHGGFEEDC',
+        mildCold: '                                                   ihhgffeddcbbaZZ000000000000000',
       },
       'heat-4': {
-        cold: '                             aZYYXWWWVVUUTTSSRRQQPPPOONNMMLLKKJJIIIHHGGFFEEDDCCBB',
-        hot: '                                                                xwvvuttssrrq00000',
+        cold: '                             ZYYXWWVUUTSSRQQPOONMLLKJJIHHGFFEDDCBBA99877655433211',
+        mildCold: '                                                         qpoonmmlkkjiihgg00000000',
+      },
+      'heat-4-warm': {
+        cold: '                           aZYXXWVVUTTSRRQPPONNMLLKJJIHGGFEEDCCBAA988766544322100',
+        mildCold: '                                                            ponnmllkjjihhg0000000',
       },
       'cold-2': {
-        cold: '                                                  nnmllkkjjiihhggffeeddccbbaaZZZY',
-        hot: '                                          kjiihgfeedccbaZYX0000000000000000000000',
+        hot: '                                       kjihgfeddcbaZYXWVUTSQ000000000000000000000',
+        mildHot: '                                               hgfeedcbbaZZYXWWVUUTSSRQPPONNMLLKJ',
       },
       'cold-4': {
-        cold: '                                                           mllkkjiiihggffeeddccbb',
-        hot: '                                   kjihgffedcbaZYXWVUTSQPO00000000000000000000000',
+        hot: '                              ljihgfeddcbaYXXVUTSRPONLKIHFF0000000000000000000000',
+        mildHot: '                                                       mhgfeddcbaZZYXXWVUUTSRRQPP',
       },
     },
     'trout foam-38-overnight': {
-      none: {
-        cold: '                                          nnmlkkjjihhggfeeddccbaaZZYXXWWVUUTTSRRQ',
-        hot: '                                                  iihgfeedccbbaa00000000000000000',
+      'none-middle': {
+        cold: '                                      omlkjihgfedcbaZYWVUTSRQPONMLKJIHGFDCBA98765',
+        mildCold: '                                        cbaZYXWVUTRQPONMLKJIHGFEDCBA8000000000000',
+        hot: '                                             kjhgfedbaZYXWVUTSRQPONMLJIHGF0000000',
+        mildHot: '                                 hgedcbaZYXWVUTSRQPONLKJIHGFEDCBA9876532100000000',
+      },
+      'none-warm': {
+        cold: '                                   nmlkjihgfedcbZYXWVUTSRQPONMLKJIGFEDCBA98765432',
+        mildCold: '                                             aZYXWVUTSRQONMLKJIHGFEDCBA9000000000',
+        hot: '                                                  igfedcbaYXWVUTSRQPONMLKJIGF0000',
+        mildHot: '                              gfedcbaZYXWVUTSRQONMLKJIHGFEDCBA9865432100000000000',
+      },
+      'none-cool': {
+        cold: '                                         onlkjihgfedcbaZYXWVTSRQPONMLKJIHGFEDBA98',
+        mildCold: '                                     cbaZYXWVTSRQPONMLKJIHGFEDBA90000000000000000',
+        hot: '                                          kihgfdcbaZYXWVUTSRQPOMLKJIHGF0000000000',
+        mildHot: '                                    hgfedbaZYXWVUTSRQPONMLKIHGFEDCBA9876543200000',
       },
       'heat-2': {
-        cold: '                                 fedccbbaZZYYXWWVVUTTSSRRQPPOONMMLLKJJIIHGGFFEDDC',
-        hot: '                                                          srqpoonmmllkjji00000000',
+        cold: '                                  igfedcbaZYXWVUTSRPONMLKJIHGFEDCBA97654321000000',
+        mildCold: '                                             hgfedcbaZXWVUTSRQPONMLKJIHFE00000000',
       },
       'heat-4': {
-        cold: '                         WVUTTSRRQQPOONNMLLKKJIIHHGFFEEDDCBBAA9887765544322110000',
-        hot: '                                                                  #!zzyxwwvuuttsr',
+        cold: '                             dcaZYXWVUTSRQPONMLKIHGFEDCBA987654320000000000000000',
+        mildCold: '                                                  mlkjihgedcbaZYXWVUTSRQPOMLKJ000',
+      },
+      'heat-4-warm': {
+        cold: '                         dcbaZYXWVUSRQPONMLKJIHGFEDCA9876543210000000000000000000',
+        mildCold: '                                                      lkjihgfedcbaZYXWUTSRQPONMLK',
       },
       'cold-2': {
-        cold: '                                                    nmlkkjiihggffeedccbaaZYYXXWWV',
-        hot: '                                        jihhgfeddcbaZYXWVUTS000000000000000000000',
+        hot: '                                    jihfedcbaZYXVUTSRQPOMLKJIHFEDCBA0000000000000',
+        mildHot: '                                          jgfedcbaZYXWUTSRQPONMLKJIGGFDCBA9876543',
       },
       'cold-4': {
-        cold: '                                                               mlkjjihhgffeddcbba',
-        hot: '                              ljihgfedccaaZYWWUTSRQONLKJIG00000000000000000000000',
+        hot: '                             kjhgfddbaZYXWVUSRQPONMKJIGFEDCA986540000000000000000',
+        mildHot: '                                                ohgfedbaZYXWVUTSRPPNMLKJIHGEEDCA9',
       },
     },
     'trout carton-two-days': {
-      none: {
-        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                                     uu00000000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                              kkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkk',
-        hot: '                                                        xx00000000000000000000000',
-      },
-      'heat-4': {
-        cold: '                                           hhhhhhhhgggggggggggggggggggggggggggggg',
-        hot: '                                                          ,!!00000000000000000000',
-      },
-      'cold-2': {
-        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                               uuuuuuu000000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                   nnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                            uuuuuuuutt000000000000000000000000000',
-      },
-    },
-    'trout foam-25-two-days': {
-      none: {
-        cold: '                                               llllllllllllllllkkkkkkkkkkkkkkkkkk',
-        hot: '                                                   ssrrrrq00000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                        eeeeeeeeeeeeeeedddddddddddddddddddddddddc',
-        hot: '                                                         zzzyyyyx0000000000000000',
-      },
-      'heat-4': {
-        cold: '                                 XXXXXXXXXXXXXXWWWWWWWWWWWWWWWWWWWWWWWWVVVVVVVVVV',
-        hot: '                                                                ***))))(000000000',
-      },
-      'cold-2': {
-        cold: '                                                  llllllllllllllllkkkkkkkkkkkkkkk',
-        hot: '                                           tttssssrrrqp00000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                           llllllllllkkkkkkkkkkkk',
-        hot: '                                       uttsssrrqqponnm000000000000000000000000000',
-      },
-    },
-    'trout foam-38-two-days': {
-      none: {
-        cold: '                                              lllkkkkkkkkkkkkkjjjjjjjjjjjjjjiiiii',
-        hot: '                                                  rrrqqqppp0000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                     dcccbbbbbbbbbbbbbaaaaaaaaaaaaaaZZZZZZZZZZZZZ',
-        hot: '                                                          #!!!zzyyyx0000000000000',
-      },
-      'heat-4': {
-        cold: '                             TTTTSSSSSSSSSSSSSRRRRRRRRRRRRRRQQQQQQQQQQQQQPPPPPPPP',
-        hot: '                                                                  ..--,,,+++00000',
-      },
-      'cold-2': {
-        cold: '                                                    lkkkkkkkkkkkkkjjjjjjjjjjjjjji',
-        hot: '                                         tttssrrrqqppon00000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                               kkkkkkkjjjjjjjjjjj',
-        hot: '                                    ttsssrrqpponnmlkkj000000000000000000000000000',
-      },
-    },
-    'redclaw carton-overnight': {
-      none: {
-        cold: '                                                          !!!!!!!!!!zzzzzzzzzzzzz',
-        hot: '                                          YYYXXXXXXXXXXXXX00000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                                       xxxxxxwwwwwwwwwwwwwwwwwwwv',
-        hot: '                                             bbbbbbbaaaaaaaaa00000000000000000000',
-      },
-      'heat-4': {
-        cold: '                                                    uuutttttttttttttttttsssssssss',
-        hot: '                                                 eeeeeeeeeeedddd00000000000000000',
-      },
-      'cold-2': {
-        cold: '                                                              !!!!!!zzzzzzzzzzzzz',
-        hot: '                                      YYYYYYXXXXXXXXXXXXX000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                         zzzzzzzz',
-        hot: '                                    YYYYYYYYXXXXXXXXXWWV0000000000000000000000000',
-      },
-    },
-    'redclaw foam-25-overnight': {
-      none: {
-        cold: '                                                        !!zzzyyyyxxxxxwwwwwvvvvvu',
-        hot: '                                        XWWWVVVUUUTTTTSSSSSSR00000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                                 ttsssrrrrqqqqppppppooooonnnnnnmm',
-        hot: '                                               edddcccbbbbaaaZZZZZZY0000000000000',
-      },
-      'heat-4': {
-        cold: '                                          mmlllkkkkjjjjiiiiihhhhhhgggggffffffeeee',
-        hot: '                                                      lkkkjjjjiiihhhhgggggf000000',
-      },
-      'cold-2': {
-        cold: '                                                                          wwwvvvv',
-        hot: '                                 YYXXXWWWVVVUUUTTTSSSSSRR000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                             ZYXXXWWVVVUUTTTSSRRQQPOONMLK000000000000000000000000',
-      },
-    },
-    'redclaw foam-38-overnight': {
-      none: {
-        cold: '                                                        !zzyyyxxxwwwvvvvuuuutttss',
-        hot: '                                        WWVVUUTTTSSSRRRRQQQQPP0000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                               rqqpppooonnnnmmmllllkkkkjjjiiiihhh',
-        hot: '                                                fffeeddccbbbbaaaaZZZYYY0000000000',
-      },
-      'heat-4': {
-        cold: '                                      ihhhggffffeeeddddcccbbbbaaaaZZZYYYYXXXXWWWV',
-        hot: '                                                         oonnnmmllkkkkjjjiiiihhh0',
-      },
-      'cold-2': {
-        cold: '                                                                                t',
-        hot: '                                YXXWWVVUUTTTSSSRRRQQQPPOON00000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                          YXWWWVUUTTSSSRRQQPPONNLLKJIHGFD000000000000000000000000',
-      },
-    },
-    'crawfish carton-overnight': {
-      none: {
-        cold: '                                                qqqqqqqqqqppppppppppppppppppppooo',
-        hot: '                                              cccbbbbbbbbb00000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                             nnnnnnmmmmmmmmmmmmmmmmmmmlllllllllll',
-        hot: '                                                 fffffffeeeee00000000000000000000',
-      },
-      'heat-4': {
-        cold: '                                          kkkjjjjjjjjjjjjjjjjjiiiiiiiiiiiiiiiiiii',
-        hot: '                                                    iiiiiiiiiiii00000000000000000',
-      },
-      'cold-2': {
-        cold: '                                                 qqqqqqqqqppppppppppppppppppppooo',
-        hot: '                                         cccccccbbbbbbbba000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                      qqqqqpppppppppppppppppppooo',
-        hot: '                                       ccccccccbbbbbaaZY0000000000000000000000000',
-      },
-    },
-    'crawfish foam-25-overnight': {
-      none: {
-        cold: '                                              qqpppoooonnnnmmmmmmlllllkkkkkkjjjjj',
-        hot: '                                           bbaaaZZZYYYXXXXWW000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                       jjiiihhhhggggfffffeeeeeeddddddcccccbbbbbba',
-        hot: '                                                  iihhhgggfffeeeedd00000000000000',
-      },
-      'heat-4': {
-        cold: '                                cbbbbaaaZZZZZYYYYYXXXXXXWWWWWVVVVVVUUUUUTTTTTTSSS',
-        hot: '                                                         ppooonnnmmmmlllkk0000000',
-      },
-      'cold-2': {
-        cold: '                                                     ppooonnnnnmmmmmlllllkkkkkkjj',
-        hot: '                                     cbbbaaaZZZYYXXWWWVVU000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                 nnmmmmmlllllkkkk',
-        hot: '                                cbbaaaZZYYXWWVVUTSSQQPOML000000000000000000000000',
-      },
-    },
-    'crawfish foam-38-overnight': {
-      none: {
-        cold: '                                             qpppoonnnmmmmllllkkkjjjjiiihhhhggggf',
-        hot: '                                          baaaZZYYXXWWWWVVVVU00000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                     hggfffeeedddccccbbbbaaaZZZZYYYXXXXWWWWVVVUUU',
-        hot: '                                                   kjjiiihhggffffeeedd00000000000',
-      },
-      'heat-4': {
-        cold: '                            YXXWWWVVVUUUUTTTSSSSRRRRQQQPPPPOOOONNNMMMMLLLKKKKJJJJ',
-        hot: '                                                            tssrrqqpppooonnnnmm00',
-      },
-      'cold-2': {
-        cold: '                                                        onnnmmmllllkkkjjjjiiiihhh',
-        hot: '                                   cbbaaZZYYXXWWWVVUTTSRRP00000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                      mlllkkkjjji',
-        hot: '                           cbbaaZYYXWWVVUUTSRRQOONMKJIHGE000000000000000000000000',
-      },
-    },
-    'worms-and-larvae carton-overnight': {
-      none: {
-        cold: '                                                    uuuuuuuuuuttttttttttttttttttt',
-        hot: '                                       XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-      'heat-2': {
-        cold: '                                                 rrrrrrqqqqqqqqqqqqqqqqqqqppppppp',
-        hot: '                                          YYYYYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-      'heat-4': {
-        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                             bbbbbbbbbbbbaaaaaaaXXXXXXXXXXXXXXXXX',
-      },
-      'cold-2': {
-        cold: '                                                     uuuuuuuuuttttttttttttttttttt',
-        hot: '                                   XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-      'cold-4': {
-        cold: '                                                            uuutttttttttttttttttt',
-        hot: '                                 XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-    },
-    'worms-and-larvae foam-25-overnight': {
-      none: {
-        cold: '                                                  uutttssssrrrrqqqqqqpppppoooooon',
-        hot: '                                    UUTTTSSSRRRQQQQPPPPPOOOOO00000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                           nnmmmllllkkkkjjjjjiiiiiihhhhhggggggfff',
-        hot: '                                          bbbaaaZZZYYYXXXXWWWWWWVVVV0000000000000',
-      },
-      'heat-4': {
-        cold: '                                    gfffeeeedddddcccccbbbbbbaaaaaZZZZZZYYYYYXXXXX',
-        hot: '                                                 iiihhhgggfffeeeeddddddcccc000000',
-      },
-      'cold-2': {
-        cold: '                                                            ssrrrrqqqqqppppppoooo',
-        hot: '                              VVUUUTTTSSSRRRQQQPPPPPOOONN000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                             pppo',
-        hot: '                          VVUUUTTSSSRRQQQPPPOONNMMLKKJIHG000000000000000000000000',
-      },
-    },
-    'worms-and-larvae foam-38-overnight': {
-      none: {
-        cold: '                                                 utttssrrrqqqqpppoooonnnnmmmllllk',
-        hot: '                                   UTTSSSRRQQPPPPOOONNNNMMMMLL0000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                        llkkjjjiiihhhggggfffeeeeddddcccbbbbaaaaZZ',
-        hot: '                                           ddccbbaaZZZYYYXXXXWWWWVVVUUU0000000000',
-      },
-      'heat-4': {
-        cold: '                                cbbaaaZZZYYYXXXXWWWWVVVUUUUTTTTSSSRRRRQQQQPPPOOOO',
-        hot: '                                                    mmllkkjjiihhhhggggfffeeeeddd0',
-      },
-      'cold-2': {
-        cold: '                                                                qqppppoooonnnmmmm',
-        hot: '                            VUUTTTSSRRQQPPPOOOONNNMMMLKKJJ00000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                      VUUTTSSRQQQPPOOONNMMLLKJIIHGFEDCBA9000000000000000000000000',
-      },
-    },
-    'worms-and-larvae carton-two-days': {
-      none: {
-        cold: '                                                        uuuuuuuuuuuuuuuuuuuuuuuuu',
-        hot: '                                       gggggggggggggggXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-      'heat-2': {
-        cold: '                                                     rrrrrrrrrrrrrrrrrrrrrrrrrrrr',
-        hot: '                                          jjjjjjjjjjjjjjjXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-      'heat-4': {
-        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                             mmmmmmmmmmmmmmmmXXXXXXXXXXXXXXXXXXXX',
-      },
-      'cold-2': {
-        cold: '                                                        uuuuuuuuuuuuuuuuuuuuuuuuu',
-        hot: '                                   gggggggggggggggggggXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-      'cold-4': {
-        cold: '                                                            uuuuuuuuuuuuuuuuuuuuu',
-        hot: '                                 ggggggggggggggggggggfXXXXXXXXXXXXXXXXXXXXXXXXXXX',
-      },
-    },
-    'worms-and-larvae foam-25-two-days': {
-      none: {
-        cold: '                                                       tttttttttttttttttttttttttt',
-        hot: '                                    eeeeeeeeeeeddddddddd0000000000000000000000000',
-      },
-      'heat-2': {
-        cold: '                                                mmmmmmmmmmmmmmmmmllllllllllllllll',
-        hot: '                                          lllllllllllllkkkkkkkk000000000000000000',
-      },
-      'heat-4': {
-        cold: '                                        fffeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeee',
-        hot: '                                                 tsssssssssssssrrrrrrr00000000000',
-      },
-      'cold-2': {
-        cold: '                                                            ttttttttttttttttttttt',
-        hot: '                              fffeeeeeeeeeeeeedddddddd000000000000000000000000000',
-      },
-      'cold-4': {
-        cold: '                                                                             tttt',
-        hot: '                            ffffeeeeeeeeeeeeddddddccbb000000000000000000000000000',
-      },
-    },
-    'worms-and-larvae foam-38-two-days': {
-      none: {
-        cold: '                                                      sssssssssssssssssssssssssss',
-        hot: '                                   eeeddddddddccccccccbbb000000000000000000000000',
+      'none-middle': {
+        cold: '                                                 mmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmm',
+        mildCold: '                                               llll000000000000000000000000000000',
+        hot: '                                                    ttts0000000000000000000000000',
+        mildHot: '                                           hhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhh',
+      },
+      'none-warm': {
+        cold: '                                                mmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmm',
+        mildCold: '                                                lll000000000000000000000000000000',
+        hot: '                                                      ts0000000000000000000000000',
+        mildHot: '                                           hhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhh',
+      },
+      'none-cool': {
+        cold: '                                                 mmmmmmmmmmmmmmmmmmmmmmmmmmmmmmmm',
+        mildCold: '                                              lllll000000000000000000000000000000',
+        hot: '                                                   tttts0000000000000000000000000',
+        mildHot: '                                            hhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhh',
       },
       'heat-2': {
         cold: '                                             jjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjjj',
-        hot: '                                           nnnnmmmmmmmmllllllllkk0000000000000000',
+        mildCold: '                                                 ooooo000000000000000000000000000',
       },
       'heat-4': {
-        cold: '                                    aaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaaa',
-        hot: '                                                    wwwvvvvvvvvuuuuuuuuttt0000000',
+        cold: '                                          ggggggggggggggggggggggggggggggggggggggg',
+        mildCold: '                                                    ssrrr000000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                          ggggggggggggggggggggggggggggggggggggggg',
+        mildCold: '                                                      rrr000000000000000000000000',
       },
       'cold-2': {
-        cold: '                                                                sssssssssssssssss',
-        hot: '                            feeeeeeeeddddddddcccccccbb000000000000000000000000000',
+        hot: '                                             utttttttss00000000000000000000000000',
+        mildHot: '                                            hhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhh',
       },
       'cold-4': {
-        cold: '                                                                                 ',
-        hot: '                          feeeeeeedddddddcccccbbaaZZYY000000000000000000000000000',
+        hot: '                                           uuttttttssr000000000000000000000000000',
+        mildHot: '                                               hhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhhh',
+      },
+    },
+    'trout foam-25-two-days': {
+      'none-middle': {
+        cold: '                                              lllkkkkkkkkkkkkkjjjjjjjjjjjjjiiiiii',
+        mildCold: '                                            kjjjiiiihh000000000000000000000000000',
+        hot: '                                                 rrqqpppooo0000000000000000000000',
+        mildHot: '                                         ffffeeeeeeeeeeeeedddddddddddddcccccccccc',
+      },
+      'none-warm': {
+        cold: '                                              lllkkkkkkkkkkkkkjjjjjjjjjjjjjiiiiii',
+        mildCold: '                                               jjiiihh000000000000000000000000000',
+        hot: '                                                    qqpppoo0000000000000000000000',
+        mildHot: '                                         ffffeeeeeeeeeeeeeddddddddddddccccccccccc',
+      },
+      'none-cool': {
+        cold: '                                               lllkkkkkkkkkkkkkjjjjjjjjjjjjjiiiii',
+        mildCold: '                                          kkkjjjiiiih0000000000000000000000000000',
+        hot: '                                                rrqqqpppoo00000000000000000000000',
+        mildHot: '                                          ffffeeeeeeeeeeeedddddddddddddcccccccccc',
+      },
+      'heat-2': {
+        cold: '                                       feedddddddddddddccccccccccccbbbbbbbbbbbbba',
+        mildCold: '                                                   rqqqppppoo00000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                 XWWWWWWWWWWWWWVVVVVVVVVVVVVUUUUUUUUUUUUUTTTTTTTT',
+        mildCold: '                                                         yyxxxxwwwvv0000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                XWWWWWWWWWWWWWVVVVVVVVVVVVVUUUUUUUUUUUUUTTTTTTTTT',
+        mildCold: '                                                            xxxwwwwv0000000000000',
+      },
+      'cold-2': {
+        hot: '                                         tssrrqqqppoonn00000000000000000000000000',
+        mildHot: '                                               ffeeeeeeeeeeeeedddddddddddddcccccc',
+      },
+      'cold-4': {
+        hot: '                                     tssrrqqpponnmllkk000000000000000000000000000',
+        mildHot: '                                                       eeeeeeeeeeeddddddddddddccc',
+      },
+    },
+    'trout foam-38-two-days': {
+      'none-middle': {
+        cold: '                                           ljjjjiiihhhhggggffffeeeeddddccccbbbaaa',
+        mildCold: '                                        kjjihhggffeedddcccbb000000000000000000000',
+        hot: '                                             srqpoonnmllkkjjjiiii0000000000000000',
+        mildHot: '                                      ddddccccbbbbaaaZZZZYYYYXXXXWWWWVVVVUUUUTTTS',
+      },
+      'none-warm': {
+        cold: '                                          jjjjiiiihhhhgggffffeeeeddddccccbbbbaaaa',
+        mildCold: '                                             ihhggffeeddccccbb0000000000000000000',
+        hot: '                                                  poonmmllkkjjjiiii00000000000000',
+        mildHot: '                                     dddccccbbbbaaaaZZZYYYYXXXXWWWWVVVVUUUUTTTTSS',
+      },
+      'none-cool': {
+        cold: '                                             kjjjiiiihhhhggggffffeeeeddddcccbbbba',
+        mildCold: '                                      kjjiihggffeeeddcccbb00000000000000000000000',
+        hot: '                                           srqpponnmmlkkkjjjiii000000000000000000',
+        mildHot: '                                        ddddcccbbbbaaaaZZZZYYYYXXXXWWWWVVVUUUUTTT',
+      },
+      'heat-2': {
+        cold: '                                      heeeddddccccbbbbaaaaZZZYYYYXXXXWWWWVVVVUUUU',
+        mildCold: '                                             poonmmllkkjjjiihhhhg0000000000000000',
+      },
+      'heat-4': {
+        cold: '                                  ZZZYYYYXXXWWWWVVVVUUUUTTTTSSSSRRRRQQQPPPPOOOONN',
+        mildCold: '                                                  uttssrqqpppoonnmmmml00000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                ZZZYYYYXXXWWWWVVVVUUUUTTTTSSSSRRRRQQQPPPPOOOONNNN',
+        mildCold: '                                                      tssrqqpppoonnmmmml000000000',
+      },
+      'cold-2': {
+        hot: '                                       srqqpoonmmllkkjjjiiih000000000000000000000',
+        mildHot: '                                            dddccccbbbbaaaaZZZZYYYXXXXWWWWVVVVUUU',
+      },
+      'cold-4': {
+        hot: '                                   tsrqpoonmmllkkjjjiiihhg00000000000000000000000',
+        mildHot: '                                                 ddccccbbbaaaaZZZZYYYYXXXXWWWWVVV',
+      },
+    },
+    'redclaw carton-overnight': {
+      'none-middle': {
+        cold: '                                                          !!!!!!!!!!zzzzzzzzzzzzz',
+        mildCold: '                                    RQQQQQQQQQQQQQQQQ0000000000000000000000000000',
+        hot: '                                           YYXXXXXXXXXXXXX00000000000000000000000',
+        mildHot: '                                                     vuuuuuuuuuuuuuuuuuuuuuuuuuuu',
+      },
+      'none-warm': {
+        cold: '                                                          !!!!!!!!!!zzzzzzzzzzzzz',
+        mildCold: '                                     QQQQQQQQQQQQQQQQ0000000000000000000000000000',
+        hot: '                                           YYXXXXXXXXXXXXX00000000000000000000000',
+        mildHot: '                                                     vuuuuuuuuuuuuuuuuuuuuuuuuuuu',
+      },
+      'none-cool': {
+        cold: '                                                          !!!!!!!!!!zzzzzzzzzzzzz',
+        mildCold: '                                    RQQQQQQQQQQQQQQQQ0000000000000000000000000000',
+        hot: '                                          YYYXXXXXXXXXXXXX00000000000000000000000',
+        mildHot: '                                                     vuuuuuuuuuuuuuuuuuuuuuuuuuuu',
+      },
+      'heat-2': {
+        cold: '                                                       xxxxxxxwwwwwwwwwwwwwwwwwwv',
+        mildCold: '                                       UUUUUUUUTTTTTTTTT0000000000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                                    uuutttttttttttttttttsssssssss',
+        mildCold: '                                          XXXXXXXXXXXXXXXWW0000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                                    uuutttttttttttttttttsssssssss',
+        mildCold: '                                           XXXXXXXXXXXXXXWW0000000000000000000000',
+      },
+      'cold-2': {
+        hot: '                                     YYYYYYYXXXXXXXXXXXXW000000000000000000000000',
+        mildHot: '                                                            uuuuuuuuuuuuuuuuuuuuu',
+      },
+      'cold-4': {
+        hot: '                                   YYYYYYYYXXXXXXXXXWWVV0000000000000000000000000',
+        mildHot: '                                                                        uuuuuuuuu',
+      },
+    },
+    'redclaw foam-25-overnight': {
+      'none-middle': {
+        cold: '                                                        !!zzzyyyyxxxxxwwwwvvvvuuu',
+        mildCold: '                                   PPPPOOOOONNNNMMMMLLLL0000000000000000000000000',
+        hot: '                                        XWWWVVVUUUUTTTSSSRRRR00000000000000000000',
+        mildHot: '                                                   uttttssssrrrrrqqqqppppooooonnn',
+      },
+      'none-warm': {
+        cold: '                                                        !!zzzyyyyxxxxwwwwwvvvvuuu',
+        mildCold: '                                    PPPPOOOONNNNMMMMLLLL0000000000000000000000000',
+        hot: '                                          WWVVVVUUUTTTSSSRRRR00000000000000000000',
+        mildHot: '                                                   uttttssssrrrrrqqqqppppoooonnnn',
+      },
+      'none-cool': {
+        cold: '                                                         !zzzyyyyxxxxxwwwwvvvvuuu',
+        mildCold: '                                  QPPPPOOOOONNNNMMMMLLLL0000000000000000000000000',
+        hot: '                                       XXWWWVVVUUUTTTTSSSRRRR00000000000000000000',
+        mildHot: '                                                    ttttsssssrrrrqqqqppppooooonnn',
+      },
+      'heat-2': {
+        cold: '                                                 ttsssrrrrqqqqpppppoooonnnnmmmmml',
+        mildCold: '                                         XWWWWWVVVVUUUUTTTTTSSS000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                           mlllkkkkjjjjiiiihhhhhggggffffeeeeedddd',
+        mildCold: '                                                eeddddccccbbbbaaaaaZZZ00000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                          mmlllkkkkjjjjiiiihhhhhggggffffeeeeddddd',
+        mildCold: '                                                 eddddccccbbbbbaaaaZZZ00000000000',
+      },
+      'cold-2': {
+        hot: '                                YYXXXWWWVVVUUUTTTSSSRRQQP000000000000000000000000',
+        mildHot: '                                                                       qqppppoooo',
+      },
+      'cold-4': {
+        hot: '                            YXXXWWVVVUUTTSSRRQPPONMLKJIHF000000000000000000000000',
+        mildHot: '                                                                                 ',
+      },
+    },
+    'redclaw foam-38-overnight': {
+      'none-middle': {
+        cold: '                                                      !zyyxwwvuutssrrqpponnmmlkkj',
+        mildCold: '                                PPOONMMLKKJIIHHGFFEDDCBBAA98876650000000000000000',
+        hot: '                                      WVVUTSSRQQPOONMMLLKJJIHHGFFEEDCC00000000000',
+        mildHot: '                                                 tssrqqpoonnmllkjjiihggfeedccbbaZ',
+      },
+      'none-warm': {
+        cold: '                                                     !zyyxwwvuuttsrrqpponnmmlkkji',
+        mildCold: '                                   ONNMMLKKJIIHHGFFEDDCBBAA9887665000000000000000',
+        hot: '                                        VVUTSRRQQPOONMMLLKJJIHHGFFEEDCC0000000000',
+        mildHot: '                                                tssrqqpponnmllkjjiihggfeedccbbaZZ',
+      },
+      'none-cool': {
+        cold: '                                                       !zyyxwwvuutssrrqpponnmllkk',
+        mildCold: '                               PPOONMMLKKJIIHHGFFEDDCCBAA988766500000000000000000',
+        hot: '                                    XWVVUTSSRQQPOONMMLLKJJIHHGGFEEDCC000000000000',
+        mildHot: '                                                  tssrqqpoonnmllkjjihhggfeedccbba',
+      },
+      'heat-2': {
+        cold: '                                                 vutssrrqpponnmllkkjiihggfeeddcbb',
+        mildCold: '                                     VUTTSRRQPPOONMMLKKJJIHHGFFEDDCCBA00000000000',
+      },
+      'heat-4': {
+        cold: '                                            pponnmllkjjiihggfeedccbbaZZYXXWWVUUTS',
+        mildCold: '                                          aZYYXXWVVUTTSRRQQPOONMMLLKJJIHHGF000000',
+      },
+      'heat-4-warm': {
+        cold: '                                           qponnmllkjjiihggfeeddcbbaZZYXXWWVUUTSS',
+        mildCold: '                                            ZYYXXWVVUTTSRRQQPOONMMLKKJJIHHGF00000',
+      },
+      'cold-2': {
+        hot: '                               YXWVUUTSRRQPPONNMLLKKJIIHGGFEEDDC00000000000000000',
+        mildHot: '                                                              onnmmlkkjiihggffedd',
+      },
+      'cold-4': {
+        hot: '                          YXWVVUTSSRQQPOONMMLKKJIIHGGFEEDCBA000000000000000000000',
+        mildHot: '                                                                                f',
+      },
+    },
+    'crawfish carton-overnight': {
+      'none-middle': {
+        cold: '                                                qqqqqqqqqqppppppppppppppppppppooo',
+        mildCold: '                                        VUUUUUUUUUUUU0000000000000000000000000000',
+        hot: '                                              cccbbbbbbbbb00000000000000000000000',
+        mildHot: '                                           lkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkjjjj',
+      },
+      'none-warm': {
+        cold: '                                                qqqqqqqqqqppppppppppppppppppppooo',
+        mildCold: '                                        VUUUUUUUUUUUU0000000000000000000000000000',
+        hot: '                                               ccbbbbbbbbb00000000000000000000000',
+        mildHot: '                                           lkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkjjjj',
+      },
+      'none-cool': {
+        cold: '                                                qqqqqqqqqqppppppppppppppppppppooo',
+        mildCold: '                                       VVUUUUUUUUUUUU0000000000000000000000000000',
+        hot: '                                             ccccbbbbbbbbb00000000000000000000000',
+        mildHot: '                                           lkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkjjjj',
+      },
+      'heat-2': {
+        cold: '                                             nnnnnnmmmmmmmmmmmmmmmmmmmlllllllllll',
+        mildCold: '                                           YYYYYYYYXXXXX0000000000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                          kkkjjjjjjjjjjjjjjjjjiiiiiiiiiiiiiiiiiii',
+        mildCold: '                                              bbbbbbbbbbbbb0000000000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                          kkkjjjjjjjjjjjjjjjjjiiiiiiiiiiiiiiiiiii',
+        mildCold: '                                              bbbbbbbbbbbbb0000000000000000000000',
+      },
+      'cold-2': {
+        hot: '                                        ccccccccbbbbbbbaa000000000000000000000000',
+        mildHot: '                                             kkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkkjjjj',
+      },
+      'cold-4': {
+        hot: '                                      cccccccbbbbbbaaZYX0000000000000000000000000',
+        mildHot: '                                                  kkkkkkkkkkkkkkkkkkkkkkkkkkkkjjj',
+      },
+    },
+    'crawfish foam-25-overnight': {
+      'none-middle': {
+        cold: '                                              qqpppoooonnnnmmmmmllllkkkkjjjjiiiii',
+        mildCold: '                                      UTTTTSSSSRRRRRQQQ00000000000000000000000000',
+        hot: '                                           bbaaaZZZYYYXXXWWW000000000000000000000',
+        mildHot: '                                         kjjjjiiiihhhhgggggffffeeeedddddccccbbbba',
+      },
+      'none-warm': {
+        cold: '                                              qppppoooonnnnmmmmlllllkkkkjjjjiiiih',
+        mildCold: '                                       TTTTSSSSSRRRRQQQQ0000000000000000000000000',
+        hot: '                                             aaaZZZYYYYXXXWWW00000000000000000000',
+        mildHot: '                                         jjjjiiiiihhhhggggfffffeeeeddddcccccbbbba',
+      },
+      'none-cool': {
+        cold: '                                               qpppoooonnnnnmmmmllllkkkkkjjjjiiii',
+        mildCold: '                                    UUTTTTTSSSSRRRRQQQQ00000000000000000000000000',
+        hot: '                                          bbaaaaZZZYYYXXXWWW000000000000000000000',
+        mildHot: '                                         kjjjjiiiihhhhhggggffffeeeeeddddccccbbbbb',
+      },
+      'heat-2': {
+        cold: '                                       jjiiihhhhggggffffeeeeeddddccccbbbbbaaaaZZZ',
+        mildCold: '                                            bbaaaaZZZZZYYYYXXX0000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                cbbbbaaaaZZZZYYYYXXXXWWWWWVVVVUUUUTTTTTSSSSRRRRQQ',
+        mildCold: '                                                   iihhhhhggggffffeee000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                cbbbaaaaZZZZZYYYYXXXXWWWWVVVVVUUUUTTTTSSSSSRRRRQQ',
+        mildCold: '                                                     ihhhhggggfffffeee00000000000',
+      },
+      'cold-2': {
+        hot: '                                   cbbbaaaZZZYYXXWVVUUTSR000000000000000000000000',
+        mildHot: '                                                  jjiiiihhhggggffffeeeeeddddccccb',
+      },
+      'cold-4': {
+        hot: '                            dcbbbaZZYYXXWVVUTSRQQPNMLJJHF000000000000000000000000',
+        mildHot: '                                                             ihhhhgggffffeeeddddd',
+      },
+    },
+    'crawfish foam-38-overnight': {
+      'none-middle': {
+        cold: '                                           pponnmllkkjiihggfeeddcbbaZZYXXWWVUUTSS',
+        mildCold: '                                  UTTSRRQPPONNMMLKKJIIHGGFFED00000000000000000000',
+        hot: '                                       bbaZYYXWVVUTTSRRQQPOONMMLKKJ00000000000000',
+        mildHot: '                                      jihhggfeedccbaaZZYXXWVVUTTSSRQQPOONMMLLKJJI',
+      },
+      'none-warm': {
+        cold: '                                         qponnmllkkjiihggffeddcbbaZZYYXWWVUUTSSRR',
+        mildCold: '                                      SSRRQPPONNMLLKKJIIHGGFFED000000000000000000',
+        hot: '                                           aZYXXWVVUTTSRRQPPOONMMLKK0000000000000',
+        mildHot: '                                    jihhggfeedccbbaZZYXXWVVUUTSSRQQPOONNMLLKJJIIH',
+      },
+      'none-cool': {
+        cold: '                                             pponnmllkjjiihggfeedccbbaZZYXXWVVUUT',
+        mildCold: '                                UTTSRRQPPOONMMLKKJIIHHGFFEDD000000000000000000000',
+        hot: '                                     cbaZYYXWVVUTTSSRQQPOONMMLLKJ0000000000000000',
+        mildHot: '                                        jihhgffeedccbaaZYYXXWVVUTTSRRQQPOONMMLLKJ',
+      },
+      'heat-2': {
+        cold: '                                      kjjiihggfeedccbbaZZYXXWVVUUTSSRQQPPONNMLLKJ',
+        mildCold: '                                       ZYYXWWVVUTTSRRQPPOONMMLKKJI000000000000000',
+      },
+      'heat-4': {
+        cold: '                                 feedccbaaZZYXXWVVUUTSSRQQPOONNMLLKJJIHHGGFEEDCCB',
+        mildCold: '                                            eddccbaaZYYXXWVVUTTSRRQQPOO0000000000',
+      },
+      'heat-4-warm': {
+        cold: '                               feedccbbaZZYXXWVVUUTSSRQQPPONNMLLKJJIIHGGFEEDCCBBA',
+        mildCold: '                                               ddcbbaaZYYXWWVVUTTSRRQPPOO00000000',
+      },
+      'cold-2': {
+        hot: '                                cbaZYYXWVVUTTSRRQPPONMMLKJIHH00000000000000000000',
+        mildHot: '                                              iihggfeedccbaaZYYXXWVVUTTSRRQPPOONM',
+      },
+      'cold-4': {
+        hot: '                           baaZYXWWVUUTSRRQPPONMLKJIIGFEDCB0000000000000000000000',
+        mildHot: '                                                      hgffeddcbbaZZYXXWVVUUTSSRQP',
+      },
+    },
+    'worms-and-larvae carton-overnight': {
+      'none-middle': {
+        cold: '                                                    uuuuuuuuuuttttttttttttttttttt',
+        mildCold: '                                 XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                      XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 oooooooooooooooooooooooooooooooo',
+      },
+      'none-warm': {
+        cold: '                                                     vvvvvvvvvvuuuuuttttttttttttt',
+        mildCold: '                                 XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                       XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 pppppppppppppooooooooooooooooooo',
+      },
+      'none-cool': {
+        cold: '                                                    uuuuuuuuuuttttttttttttttttttt',
+        mildCold: '                                  XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                        XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 oooooooooooooooooooooooooooooooo',
+      },
+      'heat-2': {
+        cold: '                                                 rrrrrrqqqqqqqqqqqqqqqqqqqppppppp',
+        mildCold: '                                   XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'heat-4': {
+        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                      XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'heat-4-warm': {
+        cold: '                                                 poooooooooooonnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                       XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'cold-2': {
+        hot: '                                   XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 oooooooooooooooooooooooooooooooo',
+      },
+      'cold-4': {
+        hot: '                                 XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                         oooooooooooooooooooooooo',
+      },
+    },
+    'worms-and-larvae foam-25-overnight': {
+      'none-middle': {
+        cold: '                                                  uutttssssrrrrqqqqqppppoooonnnnm',
+        mildCold: '                              NNMMMMLLLLKKKKKJJJJIIIIHHH0000000000000000000000000',
+        hot: '                                   UUUTTTSSSRRRQQQPPPPOOOONNN00000000000000000000',
+        mildHot: '                                             nnnnnmmmmllllkkkkkjjjjiiiihhhhhggggf',
+      },
+      'none-warm': {
+        cold: '                                                   vuuuuttttssssrrrrqqqooooonnnnm',
+        mildCold: '                               NMMMMLLLLLKKKKJJJJIIIIHHH0000000000000000000000000',
+        hot: '                                     UTTTSSSRRRQQQQPPPOOOONNN00000000000000000000',
+        mildHot: '                                              oooonnnnnmmmmllllkkjjiiiihhhhggggff',
+      },
+      'none-cool': {
+        cold: '                                                  uutttssssrrrrrqqqqppppoooonnnnn',
+        mildCold: '                               PPOOOOONNNNMMMMLLLLLIIHH00000000000000000000000000',
+        hot: '                                     WWVVVVUUUTTTSSSRRRROONNN00000000000000000000',
+        mildHot: '                                             onnnnmmmmlllllkkkkjjjjiiiiihhhhggggf',
+      },
+      'heat-2': {
+        cold: '                                           nnmmmllllkkkkjjjjiiiiihhhhggggffffeeee',
+        mildCold: '                                     UUTTTTSSSSRRRRRQQQQPPPPOOO000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                    gffffeeedddddccccbbbbaaaaaZZZZYYYYXXXXXWWWWVV',
+        mildCold: '                                           bbbaaaaZZZZZYYYYXXXXWWWWWVV00000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                     hgggffffeeeeeddddcccaaaaZZZZZYYYYXXXXWWWWWVV',
+        mildCold: '                                             baaaaaZZZZYYYYXXXXXWWWWVV00000000000',
+      },
+      'cold-2': {
+        hot: '                               XWWWVVVUUUTTTSSSRROONNMLLK000000000000000000000000',
+        mildHot: '                                                         mlllllkkkkjjjjiiiihhhhgg',
+      },
+      'cold-4': {
+        hot: '                          XWWVVVUUUTTSSRRONMMLKKJIHGFDDCA000000000000000000000000',
+        mildHot: '                                                                         jjjiiihh',
+      },
+    },
+    'worms-and-larvae foam-38-overnight': {
+      'none-middle': {
+        cold: '                                              utssrqqpoonnmllkjjiihggfeedccbbaZZY',
+        mildCold: '                          NMMLKKJIIHHGFFEDDCBBAA988766544332110000000000000000000',
+        hot: '                               UUTSRRQPOONMMLLKJJIHHGFFEEDCCBAA988776000000000000',
+        mildHot: '                                         nmmlkkjjihhgffeedccbaaZYYXXWVVUTTSRRQQPO',
+      },
+      'none-warm': {
+        cold: '                                              vutssrqqpponnmllkkjiihggfeeddaZZYXX',
+        mildCold: '                             MLLKKJIIHGGFFEDDCBBA99887665443221100000000000000000',
+        hot: '                                  UTSRQQPOONMMLKKJJIHHGFFEDDCCBAA9887660000000000',
+        mildHot: '                                         onmmllkjjihhggfeedccbaaZZYXXWTTSSRQQPOON',
+      },
+      'none-cool': {
+        cold: '                                                utssrqqpoonmmllkjjihhggfeedccbaaZ',
+        mildCold: '                           POONMMLKKJJIHHGFFEDDCCBAA98873211000000000000000000000',
+        hot: '                                XWVUTTSRQQPOONNMLLKJJIHHGGFEE99877600000000000000',
+        mildHot: '                                           nmmlkkjiihhgffeddccbaaZYYXWWVVUTTSRRQP',
+      },
+      'heat-2': {
+        cold: '                                         ponmmllkjjihhggfeedccbaaZZYXXWVVUTTSSRQQ',
+        mildCold: '                               SRRQPPOONMMLKKJIIHHGFFEDDCCBAA98876655000000000000',
+      },
+      'heat-4': {
+        cold: '                                    kjihhgffeedccbaaZYYXXWVVUTTSSRQQPOONMMLLKJJIH',
+        mildCold: '                                    XXWVVUTTSRRQQPOONMMLKKJJIHHGFFEEDCCBAA0000000',
+      },
+      'heat-4-warm': {
+        cold: '                                    kjjihhggfeedccbaaZZYXXWVVUUTSQPOONNMLLKJJIHHG',
+        mildCold: '                                      XWWVVUTTSRRQPPOONMMLKKJIIHHGFFEDDCCBAA00000',
+      },
+      'cold-2': {
+        hot: '                           XWVUUTSRRQPPONNMLLKJJIIHGGFEE9887660000000000000000000',
+        mildHot: '                                                  mlkkjiihggfeeddcbbaZZYXXWWVUUTS',
+      },
+      'cold-4': {
+        hot: '                       WVVUTSSRQPPONNMLLKJJIHHGFFE9987654321000000000000000000000',
+        mildHot: '                                                              hggfeedccbaaZZYXXWV',
+      },
+    },
+    'worms-and-larvae carton-two-days': {
+      'none-middle': {
+        cold: '                                                        uuuuuuuuuuuuuuuuuuuuuuuuu',
+        mildCold: '                                 YYYYYYYYYYYYYYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                      ggggggggggggggggXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                   pppppppppppppppppppppppppppppp',
+      },
+      'none-warm': {
+        cold: '                                                         vvvvvvvvvvvuuuuuuuuuuuuu',
+        mildCold: '                                 YYYYYYYYYYYYYYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                       gggggggggggggggXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                    qqqqqqqqqqppppppppppppppppppp',
+      },
+      'none-cool': {
+        cold: '                                                        uuuuuuuuuuuuuuuuuuuuuuuuu',
+        mildCold: '                                  aaaaaaaaaaaYYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                        iiiiiiiiiiggggXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                   pppppppppppppppppppppppppppppp',
+      },
+      'heat-2': {
+        cold: '                                                     rrrrrrrrrrrrrrrrrrrrrrrrrrrr',
+        mildCold: '                                   bbbbbbbbbbbbbbbbbXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'heat-4': {
+        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                      eeeeeeeeeeeeeeeeeeXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'heat-4-warm': {
+        cold: '                                                  oooooooooooonnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                       eeeeeeeeeeeeeeeeeXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'cold-2': {
+        hot: '                                   iiiiiiiiiiiiiiiggggXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                   pppppppppppppppppppppppppppppp',
+      },
+      'cold-4': {
+        hot: '                                 iiiiiiiiiiiiiiiggggffXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                         pppppppppppppppppppppppp',
+      },
+    },
+    'worms-and-larvae foam-25-two-days': {
+      'none-middle': {
+        cold: '                                                       tttttttttttttttttttttttttt',
+        mildCold: '                              WWWWWWWWWWWWVVVVVVVVV000000000000000000000000000000',
+        hot: '                                   eeeeeeedddddddddccccc0000000000000000000000000',
+        mildHot: '                                                  nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-warm': {
+        cold: '                                                        uuuuuuuuuuuuuuutttttttttt',
+        mildCold: '                               WWWWWWWWWWWVVVVVVVVV000000000000000000000000000000',
+        hot: '                                     eeeeedddddddddccccc0000000000000000000000000',
+        mildHot: '                                                  ooooooooooooooonnnnnnnnnnnnnnnn',
+      },
+      'none-cool': {
+        cold: '                                                       tttttttttttttttttttttttttt',
+        mildCold: '                               YYYYYYYYYYYYYXXVVVVV000000000000000000000000000000',
+        hot: '                                     gggggggffffffffcccc0000000000000000000000000',
+        mildHot: '                                                  nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'heat-2': {
+        cold: '                                                mmmmmmmmmmmmmmmmmllllllllllllllll',
+        mildCold: '                                     dddddddddddddcccccccc00000000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                         ffeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeee',
+        mildCold: '                                           llkkkkkkkkkkkkkjjjjjjj0000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                         gggfffffffffffffeeeeeeeeeeeeeeeeeeeeeeee',
+        mildCold: '                                             kkkkkkkkkkkkkjjjjjjj0000000000000000',
+      },
+      'cold-2': {
+        hot: '                               hhhgggggggggffffffccccc000000000000000000000000000',
+        mildHot: '                                                         nnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'cold-4': {
+        hot: '                             hhhhggggggggddddcccbbbaZZ000000000000000000000000000',
+        mildHot: '                                                                         nnnnnnnn',
+      },
+    },
+    'worms-and-larvae foam-38-two-days': {
+      'none-middle': {
+        cold: '                                                    rrrrrqqqqqqqqqqqqqqqppppppppp',
+        mildCold: '                          VVVVUUUTTTTSSSSSRRRRRQQQQQPPPP0000000000000000000000000',
+        hot: '                               ddccbbbaaaZZZZYYYYXXXXXWWWWWVV00000000000000000000',
+        mildHot: '                                               lllllllkkkkkkkkkkkkkkkjjjjjjjjjjjj',
+      },
+      'none-warm': {
+        cold: '                                                    ssssssrrrrrrrrrrrrrrrqqpppppp',
+        mildCold: '                             VUUUUTTTTSSSSSRRRRRQQQQQPPP0000000000000000000000000',
+        hot: '                                  ccbbbaaaZZZZYYYYXXXXWWWWWVV00000000000000000000',
+        mildHot: '                                               mmmmmmmlllllllllllllllkjjjjjjjjjjj',
+      },
+      'none-cool': {
+        cold: '                                                     rrrrrqqqqqqqqqqqqqqqpppppppp',
+        mildCold: '                           YXXXWWWWVVVVUUUUTTTTTSSQQPPP00000000000000000000000000',
+        hot: '                                fffeedddcccbbbbaaaaZZZZWWWVV000000000000000000000',
+        mildHot: '                                                lllllllkkkkkkkkkkkkkkkjjjjjjjjjjj',
+      },
+      'heat-2': {
+        cold: '                                               mmmlllllllllllllllkkkkkkkkkkkkkkkj',
+        mildCold: '                               baaaZZZZYYYYXXXXXWWWWWVVVVVUUU00000000000000000000',
+      },
+      'heat-4': {
+        cold: '                                          hgggggggggggggggfffffffffffffffeeeeeeee',
+        mildCold: '                                    gffffeeeeddddccccbbbbbbaaaaaZZ000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                          ihhhhhhhhhhhhhhhgggggggfffffffeeeeeeeee',
+        mildCold: '                                      ffffeeedddddccccbbbbbaaaaaaZ000000000000000',
+      },
+      'cold-2': {
+        hot: '                             gfffeedddcccbbbaaaaZZZZZWWVV000000000000000000000000',
+        mildHot: '                                                  lllllllkkkkkkkkkkkkkkkjjjjjjjjj',
+      },
+      'cold-4': {
+        hot: '                           gffeeeddccccbbbaaaaZZZZWWWVV00000000000000000000000000',
+        mildHot: '                                                              kkkkkkkkkkkkjjjjjjj',
       },
     },
     'nightcrawlers carton-overnight': {
-      none: {
+      'none-middle': {
         cold: '                                                 ppppppppoooooooooooooooooooonnnn',
+        mildCold: '                                   XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
         hot: '                                         YYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-warm': {
+        cold: '                                                  ssssssssssrrrrroooooooooooonnnn',
+        mildCold: '                                    XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                          YYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-cool': {
+        cold: '                                                 ppppppppoooooooooooooooooooonnnn',
+        mildCold: '                                       XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                             ccccbbbbbbbbbXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
       },
       'heat-2': {
         cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                             bbbbbbbaaaaaaaaaXXXXXXXXXXXXXXXXXXXX',
+        mildCold: '                                      XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
       },
       'heat-4': {
         cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                                eeeeeeeeeeeeddddXXXXXXXXXXXXXXXXX',
+        mildCold: '                                         XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'heat-4-warm': {
+        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                          XXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
       },
       'cold-2': {
-        cold: '                                                 ppppppppoooooooooooooooooooonnnn',
-        hot: '                                     YYYYYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                        ccccccccbbbbbbbaaXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
       },
       'cold-4': {
-        cold: '                                                    ppppppooooooooooooooooooonnnn',
-        hot: '                                   YYYYYYYYXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                      cccccccbbbbbbaaZYXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
       },
     },
     'nightcrawlers foam-25-overnight': {
-      none: {
-        cold: '                                             ppooonnnnmmmmllllllkkkkkjjjjjjiiiiih',
-        hot: '                                      XXXWWWVVVUUUTTTTSSSSSR000000000000000000000',
+      'none-middle': {
+        cold: '                                             ppooonnnnmmmmllllkkkkkjjjjiiiihhhhhg',
+        mildCold: '                                 QQPPPPOOOONNNNMMMMMLLL00000000000000000000000000',
+        hot: '                                      XXWWWWVVVUUUTTTSSSSRRRR00000000000000000000',
+        mildHot: '                                        iiiiihhhhggggfffffeeeeddddccccbbbbbaaaaZZ',
+      },
+      'none-warm': {
+        cold: '                                                srrrrqqqqppppoooonnnjjjiiiihhhhgg',
+        mildCold: '                                  QPPPPOOOOONNNNMMMMLLLL0000000000000000000000000',
+        hot: '                                        XWWWVVVUUUTTTTSSSRRRR00000000000000000000',
+        mildHot: '                                           llllkkkkkjjjjiiiihhddddccccbbbbaaaaaZZ',
+      },
+      'none-cool': {
+        cold: '                                             ppooonnnnmmmmmllllkkkkjjjjiiiiihhhhg',
+        mildCold: '                                    UUTTTTTSSSSRRRRQQQQ00000000000000000000000000',
+        hot: '                                          bbaaaaZZZYYYXXXWWW000000000000000000000',
+        mildHot: '                                        jiiiihhhhgggggffffeeeedddddccccbbbbaaaaZZ',
       },
       'heat-2': {
-        cold: '                                      ihhhhgggfffffeeeeeddddddcccccbbbbbbaaaaaaZZ',
-        hot: '                                             eeedddcccbbbaaaaZZZZZY00000000000000',
+        cold: '                                      ihhhhggggffffeeeeddddcccccbbbbaaaaZZZZZYYYY',
+        mildCold: '                                       XXXWWWWVVVVUUUUUTTTTSSS0000000000000000000',
       },
       'heat-4': {
-        cold: '                               baaaZZZZYYYYYXXXXXWWWWWVVVVVVUUUUUUTTTTTSSSSSSRRRR',
-        hot: '                                                    lllkkkjjjiiihhhhgggggg0000000',
+        cold: '                               baaaZZZZYYYYYXXXXWWWWVVVVVUUUUTTTTSSSSRRRRRQQQQPPP',
+        mildCold: '                                              eeeddddcccccbbbbaaaaZZZ000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                  edddccccbbbbbaaaaZZZVVUUUUTTTTTSSSSRRRRQQQQQPPP',
+        mildCold: '                                                edddddccccbbbbaaaaaZZZ00000000000',
       },
       'cold-2': {
-        cold: '                                                    oonnnmmmmllllllkkkkkjjjjjiiii',
-        hot: '                                 YXXXWWWVVVUUUTTTSSSRRQQP000000000000000000000000',
+        hot: '                                   cbbbaaaZZZYYXXWVVUUTSR000000000000000000000000',
+        mildHot: '                                                 iihhhggggffffeeeedddddccccbbbbaa',
       },
       'cold-4': {
-        cold: '                                                              nmmmlllllkkkkkjjjjj',
-        hot: '                            YYXXWWWVVUUTTTSSRRQQPOOMLLKIH000000000000000000000000',
+        hot: '                            dcbbbaZZYYXXWVVUTSRQQPNMLJJHF000000000000000000000000',
+        mildHot: '                                                           hhgggffffeeeeddddcccbb',
       },
     },
     'nightcrawlers foam-38-overnight': {
-      none: {
-        cold: '                                            poonnnmmmllllkkkjjjjiiiihhhggggffffee',
-        hot: '                                     XXWWVVUUUTTSSSSRRRQQQQPPP0000000000000000000',
+      'none-middle': {
+        cold: '                                         oonmmlkkjjihhgffeddccbaaZYYXXWVVUTTSRRQQ',
+        mildCold: '                            QQPOONMMLKKJJIHHGFFEEDCCBAA98877650000000000000000000',
+        hot: '                                 YXWWVUTSSRQQPOONNMLLKJJIIHGGFEEDCC00000000000000',
+        mildHot: '                                    ihggffeddcbbaZZYYXWWVUUTTSRRQPPONNMMLKKJIIHGG',
+      },
+      'none-warm': {
+        cold: '                                           srqpponnmmlkkjiihhgffeddcbbaaTTSRRQPPO',
+        mildCold: '                                POONNMLLKJJIIHGGFEEDCCBBA998776500000000000000000',
+        hot: '                                     XWVUTTSRRQPPONNMMLKKJIIHGGFFEDDC000000000000',
+        mildHot: '                                      lkjjiihggfeeddcbbaZZYXXWWVUUTNMLLKJJIIHGGFE',
+      },
+      'none-cool': {
+        cold: '                                           ponnmllkjjihhggfeedccbbaZZYXXWVVUUTSSR',
+        mildCold: '                                UTTSRRQPPOONMMLKKJIIHHGFFEDD000000000000000000000',
+        hot: '                                     cbaZYYXWVVUTTSSRQQPOONMMLLKJ0000000000000000',
+        mildHot: '                                      ihhgffeddccbaaZYYXXWVVUTTSRRQQPOONMMLKKJJIH',
       },
       'heat-2': {
-        cold: '                                   gfffeeddddcccbbbbaaaZZZZYYYYXXXWWWWVVVVUUUTTTT',
-        hot: '                                              ggffeeddcccbbbaaaaZZZZYY00000000000',
+        cold: '                                    jjihhgffeddccbaaZYYXWWVVUTTSRRQPPOONMMLKKJIIH',
+        mildCold: '                                 VVUTTSSRQQPOONMMLLKJJIHHGGFEEDCCBA00000000000000',
       },
       'heat-4': {
-        cold: '                          XXWWVVVUUUTTTSSSSRRRRQQQPPPPOOOONNNMMMMLLLLKKKJJJJIIIIH',
-        hot: '                                                       pooonnmmllkkkkjjjjiiihhh00',
+        cold: '                               eddcbbaaZYYXWWVUUTTSRRQPPONNMMLKKJIIHHGFFEDDCBBAA9',
+        mildCold: '                                      aaZZYXXWVVUUTSSRQQPOONNMLLKJJIHHGG000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                 hggfeeddcbbaZZYXXWWVUUTSSRRQPJIIHGGFEEDDCBBA9987',
+        mildCold: '                                         aZZYYXWWVUUTSSRRQPPONNMLLKKJIIHGG0000000',
       },
       'cold-2': {
-        cold: '                                                      nnmmmlllkkkjjjjiiihhhhggggf',
-        hot: '                              YYXXWWVVUUTTSSSRRRQQQPPONMML00000000000000000000000',
+        hot: '                                cbaZYYXWVVUTTSRRQPPONMMLKJIHH00000000000000000000',
+        mildHot: '                                            ihggfeedccbaaZYYXXWVVUTTSRRQQPONNMMLK',
       },
       'cold-4': {
-        cold: '                                                                  mllkkkkjjjiiihh',
-        hot: '                        YXXWVVUUTTSSRRQQPPONNMLKJIHGFDDCA000000000000000000000000',
+        hot: '                           baaZYXWWVUUTSRRQPPONMLKJIIGFEDCB0000000000000000000000',
+        mildHot: '                                                   hggfeddcbbaZZYXXWWVUTTSSRQQPOO',
       },
     },
     'nightcrawlers carton-two-days': {
-      none: {
+      'none-middle': {
         cold: '                                                   pppppppppppppppppppppppppppppp',
+        mildCold: '                                   bbbbbbbbbbbbbbXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
         hot: '                                         jjjjjjjjjjjjjXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-warm': {
+        cold: '                                                      ssssssssssspppppppppppppppp',
+        mildCold: '                                    bbbbbbbbbbbbbXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                          jjjjjjjjjjjjXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+      },
+      'none-cool': {
+        cold: '                                                   pppppppppppppppppppppppppppppp',
+        mildCold: '                                       ffffffffffXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                             nnnnnnnnnXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
       },
       'heat-2': {
         cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                             mmmmmmmmmmmmXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildCold: '                                      eeeeeeeeeeeeeeXXXXXXXXXXXXXXXXXXXXXXXXXXXXX',
       },
       'heat-4': {
         cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                                pppppppppppppXXXXXXXXXXXXXXXXXXXX',
+        mildCold: '                                         hhhhhhhhhhhhhhhXXXXXXXXXXXXXXXXXXXXXXXXX',
+      },
+      'heat-4-warm': {
+        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
+        mildCold: '                                          hhhhhhhhhhhhhhXXXXXXXXXXXXXXXXXXXXXXXXX',
       },
       'cold-2': {
-        cold: '                                                   pppppppppppppppppppppppppppppp',
-        hot: '                                     jjjjjjjjjjjjjjjjjXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                        nnnnnnnnnnnnnnXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
       },
       'cold-4': {
-        cold: '                                                    ppppppppppppppppppppppppppppp',
-        hot: '                                   jjjjjjjjjjjjjjjjjjiXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        hot: '                                      nnnnnnnnnnnnnnmmXXXXXXXXXXXXXXXXXXXXXXXXXXX',
+        mildHot: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
       },
     },
     'nightcrawlers foam-25-two-days': {
-      none: {
+      'none-middle': {
         cold: '                                                  ooooooooooooooooooooooooooooooo',
-        hot: '                                      hhhhhhhhhhhhgggggg0000000000000000000000000',
+        mildCold: '                                 ZZZZZZZZZZZZYYYYYY000000000000000000000000000000',
+        hot: '                                      hhhhhhhgggggggggff0000000000000000000000000',
+        mildHot: '                                             iiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiii',
+      },
+      'none-warm': {
+        cold: '                                                     rrrrrrrrrrrrrrrooooooooooooo',
+        mildCold: '                                  ZZZZZZZZZZZYYYYYY000000000000000000000000000000',
+        hot: '                                        hhhhhgggggggggff0000000000000000000000000',
+        mildHot: '                                               llllllllllllllliiiiiiiiiiiiiiiiiii',
+      },
+      'none-cool': {
+        cold: '                                                  ooooooooooooooooooooooooooooooo',
+        mildCold: '                                    dddddddddddddc0000000000000000000000000000000',
+        hot: '                                          lllllllkkkkkk00000000000000000000000000',
+        mildHot: '                                             iiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiiii',
       },
       'heat-2': {
         cold: '                                           hhhhhhhhhhhhhhhhhggggggggggggggggggggg',
-        hot: '                                             ooooooooooooonnnnn000000000000000000',
+        mildCold: '                                       hgggggggggggggfffff00000000000000000000000',
       },
       'heat-4': {
         cold: '                                   aaaZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZZ',
-        hot: '                                                    wvvvvvvvvvvvvvuuuu00000000000',
+        mildCold: '                                              onnnnnnnnnnnnnnmmmm0000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                      dddcccccccccccccZZZZZZZZZZZZZZZZZZZZZZZZZZZ',
+        mildCold: '                                                nnnnnnnnnnnnnmmmm0000000000000000',
       },
       'cold-2': {
-        cold: '                                                    ooooooooooooooooooooooooooooo',
-        hot: '                                 iiihhhhhhhhhhhhhggggg000000000000000000000000000',
+        hot: '                                   mmmmllllllllkkkkkjj000000000000000000000000000',
+        mildHot: '                                                 iiiiiiiiiiiiiiiiiiiiiiiiiiiiiiii',
       },
       'cold-4': {
-        cold: '                                                              ooooooooooooooooooo',
-        hot: '                              iiiiihhhhhhhhhhhggggffed000000000000000000000000000',
+        hot: '                                 mmmmllllllkkkjjiihggf000000000000000000000000000',
+        mildHot: '                                                           iiiiiiiiiiiiiiiiiiiiii',
       },
     },
     'nightcrawlers foam-38-two-days': {
-      none: {
-        cold: '                                                 nnnnnnnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                                     hhhhggggggggfffffff0000000000000000000000000',
+      'none-middle': {
+        cold: '                                               mmmmmlllllllllllllllkkkkkkkkkkkkkk',
+        mildCold: '                            ZYYYXXXXWWWWVVVVVUUUUUTTTTT00000000000000000000000000',
+        hot: '                                 hggffeeedddccccbbbbaaaaZZZZ000000000000000000000',
+        mildHot: '                                         ggggggggfffffffffffffffeeeeeeeeeeeeeeedd',
+      },
+      'none-warm': {
+        cold: '                                                 ppppppooooooooooooooonnkkkkkkkkk',
+        mildCold: '                                YXXXXWWWWVVVVVUUUUUTTTTT0000000000000000000000000',
+        hot: '                                     ffeeedddccccbbbbaaaaZZZZ00000000000000000000',
+        mildHot: '                                            jjjjjjjiiiiiiiiiiiiiiiheeeeeeeeeeeddd',
+      },
+      'none-cool': {
+        cold: '                                                mmmmmlllllllllllllllkkkkkkkkkkkkk',
+        mildCold: '                                dcccbbbbaaaaZZZZYYYYYX000000000000000000000000000',
+        hot: '                                     kkkjjiiihhhggggffffeee0000000000000000000000',
+        mildHot: '                                           gggggggfffffffffffffffeeeeeeeeeeeeeeed',
       },
       'heat-2': {
-        cold: '                                        eeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeeee',
-        hot: '                                              qqqqppppppppooooooo0000000000000000',
+        cold: '                                         ihhhgggggggggggggggfffffffffffffffeeeeee',
+        mildCold: '                                 eedddccccbbbbaaaaZZZZZYYYYY000000000000000000000',
       },
       'heat-4': {
-        cold: '                               VVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVVV',
-        hot: '                                                       zzzyyyyyyyyxxxxxxxx0000000',
+        cold: '                                    ccbbbbbbbbbbbbbbbaaaaaaaaaaaaaaaZZZZZZZZZZZZZ',
+        mildCold: '                                      jjiiiihhhgggggffffeeeeedddd0000000000000000',
+      },
+      'heat-4-warm': {
+        cold: '                                       feeeeeeeeeeeeeeedddddddaaaaaZZZZZZZZZZZZZZ',
+        mildCold: '                                         iiiihhhgggggffffeeeeedddd000000000000000',
       },
       'cold-2': {
-        cold: '                                                      nnnnnnnnnnnnnnnnnnnnnnnnnnn',
-        hot: '                               ihhhhhhhggggggggffffffe000000000000000000000000000',
+        hot: '                                  lkkjjjiihhhhgggffffeee0000000000000000000000000',
+        mildHot: '                                             gggggggfffffffffffffffeeeeeeeeeeeeee',
       },
       'cold-4': {
-        cold: '                                                                  nnnnnnnnnnnnnnn',
-        hot: '                            iihhhhhhggggggffffeedccbba000000000000000000000000000',
+        hot: '                               llkkjjiiihhhgggffffeeddc00000000000000000000000000',
+        mildHot: '                                                   ggggffffffffffffffeeeeeeeeeeee',
       },
     },
   },

@@ -7,7 +7,11 @@ export const BEDDING_AIR_C = [4, 27] as const
 const INSULATED_M2_K_PER_W = 0.3
 
 /** Animals in bedding have no bag to reckon: what the outside air of the cold or the hot day speaks against. */
-export function judgeBedding({ animals, legs, weather }: Trip, bedding: Bedding, side: 'cold' | 'hot'): Reason[] {
+export function judgeBedding(
+  { animals, legs, weather }: Trip,
+  bedding: Bedding,
+  side: 'cold' | 'hot',
+): Reason[] {
   const { wallMm, conductivityWPerMK } = bedding.box
   if (animals.species.travels !== 'in-bedding') return []
   if (wallMm / 1000 / conductivityWPerMK >= INSULATED_M2_K_PER_W) return []
