@@ -13,6 +13,7 @@ import { listingRoutes } from '@/server/listings/listing-routes'
 import { memberRoutes } from '@/server/members/member-routes'
 import { moderationRoutes } from '@/server/moderation/moderation-routes'
 import { orderRoutes } from '@/server/orders/order-routes'
+import { packingRoutes } from '@/server/packing/packing-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
 import { placeRoutes } from '@/server/places/place-routes'
@@ -33,7 +34,7 @@ function api(origins: string[]): Router {
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
   router.use(placeRoutes(), memberRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
-  router.use(listingRoutes(), orderRoutes(), moderationRoutes())
+  router.use(listingRoutes(), orderRoutes(), moderationRoutes(), packingRoutes())
   router.use(unknownPath)
   return router
 }
