@@ -44,18 +44,34 @@ export function tableText(): string {
       return [[`${animals} ${packing}`, Object.fromEntries(byOption) as object] as const]
     }),
   )
-  const table = {
-    bands: BANDS,
-    weeks: Object.fromEntries(weekDays.map((day) => [day, { 1: weeks(day, 1), 2: weeks(day, 2) }])) as object,
-    limits: Object.fromEntries(limits) as object,
-  }
+  const lines = (entries: readonly (readonly [name: string, value: object])[]) =>
+    entries.map(([name, value]) => `    ${JSON.stringify(name)}: ${JSON.stringify(value)},`).join('\n')
   return `// Written by \`npm run season:build\` with the trip engine, from assets/data/climate-grid.csv (NOAA NCEI normals) and the
 // classes of season-classes.facts.ts; do not edit. Figures are letters of season-code.ts, levels those of season-scale.ts.
 import type { SeasonTable } from '@/shared/domain/season/season-table'
 
 /** Climate bands of cells of ${CELL_DEG} degrees: row and column of the first cell, then a letter a cell eastwards. */
-export const bandRows: readonly (readonly [row: number, column: number, bands: string])[] = ${JSON.stringify(rowsOf(cells, bands))}
+// prettier-ignore
+export const bandRows: readonly (readonly [row: number, column: number, bands: string])[] = [
+${inTens(rowsOf(cells, bands))}
+]
 
-export const seasonTable: SeasonTable = ${JSON.stringify(table)}
+// prettier-ignore
+export const seasonTable: SeasonTable = {
+  bands: ${BANDS},
+  weeks: {
+${lines(weekDays.map((day) => [day, { 1: weeks(day, 1), 2: weeks(day, 2) }]))}
+  },
+  limits: {
+${lines(limits)}
+  },
+}
 `
+}
+
+function inTens(rows: readonly Row[]): string {
+  const tens = Array.from({ length: Math.ceil(rows.length / 10) }, (_, at) =>
+    rows.slice(at * 10, at * 10 + 10),
+  )
+  return tens.map((ten) => `  ${ten.map((row) => JSON.stringify(row)).join(', ')},`).join('\n')
 }

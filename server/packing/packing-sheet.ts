@@ -1,4 +1,4 @@
-import PDFDocument from 'pdfkit'
+import PdfPage from 'pdfkit'
 
 import type { PackingSheet } from '@/shared/domain/transport/packing-sheet'
 
@@ -11,7 +11,7 @@ export function renderPackingSheet({
   sections,
   label,
 }: PackingSheet): Promise<Uint8Array<ArrayBuffer>> {
-  const page = new PDFDocument({
+  const page = new PdfPage({
     size: 'LETTER',
     margin: MARGIN_PT,
     info: { Title: title, Creator: 'Tankward' },
@@ -29,7 +29,7 @@ export function renderPackingSheet({
 }
 
 /** To be cut out and stuck on the box. */
-function drawLabel(page: PDFDocument, label: readonly string[]) {
+function drawLabel(page: PdfPage, label: readonly string[]) {
   const width = page.page.width - 2 * MARGIN_PT
   page.moveDown(0.8).font('Helvetica-Bold').fontSize(11).text('Label for each box: cut out')
   page.moveDown(0.3).fontSize(12)
@@ -41,7 +41,7 @@ function drawLabel(page: PDFDocument, label: readonly string[]) {
   page.text(text, MARGIN_PT + LABEL_PAD_PT, top + LABEL_PAD_PT, { width: width - 2 * LABEL_PAD_PT })
 }
 
-function bytesOf(page: PDFDocument): Promise<Uint8Array<ArrayBuffer>> {
+function bytesOf(page: PdfPage): Promise<Uint8Array<ArrayBuffer>> {
   return new Promise((resolve, reject) => {
     const chunks: Buffer[] = []
     page

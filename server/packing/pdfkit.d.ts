@@ -14,7 +14,7 @@ declare module 'pdfkit' {
     compress?: boolean
     bufferPages?: boolean
   }
-  export default class PDFDocument {
+  export default class PdfPage {
     constructor(options: DocumentOptions)
     readonly page: { width: number; height: number; margins: { left: number; right: number; bottom: number } }
     x: number
