@@ -10,7 +10,7 @@ interface Advice {
 /** What to do at either end of the way. Each says who published it, or that it is ours. */
 export const advice = {
   fast: {
-    text: 'Keep the animals without food before packing: full guts foul the water of the bag.',
+    text: 'Full guts foul the water of the bag.',
     sourceKeys: ['piper-1982'],
   },
   temper: {
@@ -26,7 +26,7 @@ export const advice = {
     sourceKeys: ['emerson-1975', 'house-rule'],
   },
   count: {
-    text: 'Count the dead before anything else and take a picture of the closed bag.',
+    text: 'Take a picture of the closed bag, then count the dead before anything else.',
     sourceKeys: ['house-rule'],
   },
   salt: {
