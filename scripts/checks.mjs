@@ -46,4 +46,11 @@ export const CHECKS = [
   proof('privacy'),
   proof('oversell'),
   proof('crash'),
+  {
+    name: 'season',
+    command: ['node', '--import', 'tsx', 'scripts/check-season.ts'],
+    sliceCommand: ['node', '--import', 'tsx', 'scripts/check-season.ts', '--slice'],
+    faultCommand: ['node', '--import', 'tsx', 'scripts/check-season.ts', '--plant-fault'],
+    ci: true,
+  },
 ]

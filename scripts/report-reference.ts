@@ -4,6 +4,7 @@ import { errorOf, type Check } from '@/tests/reference/checks/check'
 import { climateChecks } from '@/tests/reference/checks/climate-checks'
 import { distanceChecks } from '@/tests/reference/checks/distance-checks'
 import { growthChecks } from '@/tests/reference/checks/growth-checks'
+import { normalsChecks } from '@/tests/reference/checks/normals-checks'
 import { transportChecks } from '@/tests/reference/checks/transport-checks'
 import { waterChecks } from '@/tests/reference/checks/water-checks'
 
@@ -14,6 +15,7 @@ const subjects: Readonly<Record<string, readonly Check[]>> = {
   growth: growthChecks,
   distance: distanceChecks,
   climate: climateChecks,
+  normals: normalsChecks,
 }
 
 /** Errors as a share of what each figure is allowed: subjects of different units stand side by side. */

@@ -17,6 +17,7 @@ import { noticeRoutes } from '@/server/notices/notice-routes'
 import { calendarRoutes } from '@/server/orders/calendar-routes'
 import { openapiRoutes } from '@/server/openapi/openapi-routes'
 import { orderRoutes } from '@/server/orders/order-routes'
+import { packingRoutes } from '@/server/packing/packing-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
 import { placeRoutes } from '@/server/places/place-routes'
@@ -42,7 +43,7 @@ function api(origins: string[]): Router {
   router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
   router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
   router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
-  router.use(openapiRoutes())
+  router.use(packingRoutes(), openapiRoutes())
   router.use(unknownPath)
   return router
 }

@@ -3,7 +3,7 @@ import { z } from 'zod'
 import { bagLoadGPerL } from '@/shared/domain/transport/bag-loading'
 import { boxEquation, boxLossWPerK, boxStepC, boxTimeConstantH } from '@/shared/domain/transport/box'
 import { froeseBoxEquation, froeseWaterC } from '@/shared/domain/transport/froese-box'
-import { geodesicEquation, geodesicM, sphereM } from '@/shared/domain/transport/geodesic'
+import { geodesicEquation, geodesicM, sphereM } from '@/shared/domain/geo/geodesic'
 import { command, named, type Command } from '@/scripts/calc/command'
 
 const point = z.strictObject({ lat: z.number(), lng: z.number() })

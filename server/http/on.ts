@@ -71,6 +71,7 @@ export function on<E extends Endpoint>(router: Router, endpoint: E) {
           : await run()
       res.setHeader('cache-control', caller || endpoint.method !== 'GET' ? 'no-store' : 'no-cache')
       if (reply === undefined) res.status(204).end()
+      else if (endpoint.replyMedia) res.type(endpoint.replyMedia).send(Buffer.from(reply as Uint8Array))
       else res.status(endpoint.status ?? 200).json(reply)
     })
   }

@@ -43,6 +43,13 @@ async function readProblem(response: Response): Promise<Problem> {
   }
 }
 
+/** JSON as what it says; anything else (a PDF) as its bytes. */
+async function readReply(response: Response): Promise<unknown> {
+  if (response.status === 204) return undefined
+  const isJson = response.headers.get('content-type')?.includes('json') ?? true
+  return isJson ? response.json() : new Uint8Array(await response.arrayBuffer())
+}
+
 /** Makes the one typed API client. `base` is '' on the web (same origin), an address in the native app. */
 export function createCall(base: string) {
   return async function call<N extends CallName>(
@@ -72,6 +79,6 @@ export function createCall(base: string) {
       throw new NoAnswer()
     }
     if (!response.ok) throw await readProblem(response)
-    return (response.status === 204 ? undefined : await response.json()) as ReplyOf<Endpoints[N]>
+    return (await readReply(response)) as ReplyOf<Endpoints[N]>
   }
 }

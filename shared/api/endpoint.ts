@@ -27,6 +27,8 @@ export interface EndpointSpec<
   body?: B
   /** Absent: 204, nothing to say. */
   reply?: R
+  /** The reply is bytes of this kind instead of JSON. */
+  replyMedia?: 'application/pdf'
   /** 200 unless said otherwise; 201 for things created. */
   status?: 200 | 201 | 204
   summary: string

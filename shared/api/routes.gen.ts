@@ -36,6 +36,7 @@ export interface Endpoints {
   reserveBatch: typeof import('@/shared/contracts/orders').reserveBatch
   stopOrder: typeof import('@/shared/contracts/orders').stopOrder
   withdrawRequest: typeof import('@/shared/contracts/orders').withdrawRequest
+  makePackingSheet: typeof import('@/shared/contracts/packing').makePackingSheet
   uploadPhoto: typeof import('@/shared/contracts/photos').uploadPhoto
   findPlaces: typeof import('@/shared/contracts/places').findPlaces
   answerSurvival: typeof import('@/shared/contracts/ratings').answerSurvival
@@ -95,6 +96,7 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   reserveBatch: ['POST', '/listings/:listingId/orders', false],
   stopOrder: ['POST', '/moderation/orders/:orderId/stop', false],
   withdrawRequest: ['POST', '/orders/:orderId/withdrawal', false],
+  makePackingSheet: ['POST', '/packing-sheet', false],
   uploadPhoto: ['POST', '/photos', true],
   findPlaces: ['GET', '/places', false],
   answerSurvival: ['POST', '/orders/:orderId/survival', false],

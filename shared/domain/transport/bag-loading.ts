@@ -1,6 +1,6 @@
 import { bagTable, bagTableHours, type BagStage } from '@/shared/domain/transport/bag-loading.facts'
 import { warmthOfLoad } from '@/shared/domain/transport/warmth-of-load'
-import { gPerLFromPoundsPerGal } from '@/shared/domain/transport/load-units'
+import { gPerLFromPoundsPerGal } from '@/shared/units/load'
 
 interface BagTrip {
   stage: BagStage

@@ -1,6 +1,7 @@
 import { boxLossWPerK } from '@/shared/domain/transport/box'
 import { judgeAnimals } from '@/shared/domain/transport/judge-animals'
 import { judgeBag } from '@/shared/domain/transport/judge-bag'
+import { judgeBedding } from '@/shared/domain/transport/judge-bedding'
 import { judgeVessel } from '@/shared/domain/transport/judge-vessel'
 import { judgeWarmth, travelRangeC } from '@/shared/domain/transport/judge-warmth'
 import { makesSense } from '@/shared/domain/transport/makes-sense'
@@ -77,7 +78,7 @@ function sideOf(trip: Trip, side: 'cold' | 'hot', range: readonly [number, numbe
     side,
   })
   if (way === null || way.length === 0) return null
-  const { steps, reasons } = judgeWater(trip, way)
+  const { steps, reasons } = judgeWater(trip, way, side)
   return {
     steps,
     coldest: steps.reduce<TripStep | null>((a, b) => (a && a.waterC <= b.waterC ? a : b), null),
@@ -87,12 +88,14 @@ function sideOf(trip: Trip, side: 'cold' | 'hot', range: readonly [number, numbe
 }
 
 function judgeWater(
-  { animals, water, container }: Trip,
+  trip: Trip,
   way: readonly WarmthStep[],
+  side: 'cold' | 'hot',
 ): { steps: TripStep[]; reasons: Reason[] } {
+  const { animals, water, container } = trip
   if (container.kind === 'vessel') return judgeVessel({ animals, water, vessel: container }, way)
   if (container.kind === 'bedding') {
-    return { steps: way.map((step) => stepOf(step)), reasons: [] }
+    return { steps: way.map((step) => stepOf(step)), reasons: judgeBedding(trip, container, side) }
   }
   const massG = inFullestBag(animals.count, container.boxes * container.bagsPerBox) * animals.massG
   return judgeBag({ animals, water, bags: container, massG }, way)

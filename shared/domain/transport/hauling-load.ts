@@ -1,4 +1,4 @@
-import { gPerLFromPoundsPerGal } from '@/shared/domain/transport/load-units'
+import { gPerLFromPoundsPerGal } from '@/shared/units/load'
 import { piperCatfishFactor, piperLinearFactor } from '@/shared/domain/transport/warmth-of-load'
 import type { SourceKey } from '@/shared/sources'
 

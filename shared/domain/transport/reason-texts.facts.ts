@@ -46,6 +46,14 @@ export const reasonTexts = {
   'change-water': { unit: 'h', text: 'A trip this long needs a full change of water on the way.' },
   'needs-water': { unit: '', text: 'This animal travels in water.' },
   'needs-damp': { unit: '', text: 'This animal travels damp and out of standing water, not in a bag of it.' },
+  'air-too-cold': {
+    unit: '°C',
+    text: 'The air outside gets too cold for worms and larvae in a box without insulation.',
+  },
+  'air-too-warm': {
+    unit: '°C',
+    text: 'The air outside gets too warm for worms and larvae in a box without insulation.',
+  },
   'damp-for-long': { unit: 'h', text: 'Damp animals out of water for longer than is known to go well.' },
   'pack-without-air': { unit: '', text: 'A heat pack needs air: a box without holes puts it out.' },
   'spines-puncture': { unit: 'mm', text: 'Catfish of this length puncture bags with their spines.' },

@@ -2,7 +2,7 @@ import { assert, double, integer, nat, property, record, type Arbitrary } from '
 import { describe, expect, it } from 'vitest'
 
 import { checkTrip } from '@/shared/domain/transport/check-trip'
-import { gPerLFromPoundsPerGal, poundsPerGalFromGPerL } from '@/shared/domain/transport/load-units'
+import { gPerLFromPoundsPerGal, poundsPerGalFromGPerL } from '@/shared/units/load'
 import type { Trip, TripAnswer } from '@/shared/domain/transport/trip'
 import { animals, bags, foamBox, tripOf } from '@/shared/domain/transport/trips-for-tests'
 import { rankOf } from '@/shared/domain/transport/verdict'

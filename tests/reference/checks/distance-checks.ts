@@ -1,4 +1,4 @@
-import { geodesicM, sphereM } from '@/shared/domain/transport/geodesic'
+import { geodesicM, sphereM } from '@/shared/domain/geo/geodesic'
 import { geodesicTestLines } from './geodesic-test-lines'
 import { checksOf, type Check } from './check'
 
@@ -115,7 +115,7 @@ export const distanceChecks: readonly Check[] = [
     published,
     ours: () => geodesic([from, to]),
     within: 1e-5,
-    because: 'micrometres printed, ten of them allowed for rounding in bisection',
+    because: 'micrometres printed, ten of them allowed for rounding',
     from: 'GeographicLib geodesic test set',
   })),
   ...checksOf(

@@ -8,7 +8,7 @@ import { bagChemistry, type BagWater } from '@/shared/domain/transport/bag-chemi
 import { bagLoadGPerL } from '@/shared/domain/transport/bag-loading'
 import { oxygenGasGPerL } from '@/shared/domain/transport/gas-density'
 import { catfishHaulGPerL, haulAtF } from '@/shared/domain/transport/hauling-load'
-import { poundsPerGalFromGPerL } from '@/shared/domain/transport/load-units'
+import { poundsPerGalFromGPerL } from '@/shared/units/load'
 import {
   doublingFactor,
   piperCatfishFactor,

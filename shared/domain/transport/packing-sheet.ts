@@ -1,0 +1,110 @@
+import { advice, saltGPerL } from '@/shared/domain/transport/advice.facts'
+import type { PackingPlan, PackingTask } from '@/shared/domain/transport/plan-packing'
+import { heatPacks } from '@/shared/domain/transport/packs.facts'
+import { reasonTexts } from '@/shared/domain/transport/reason-texts.facts'
+
+export interface SheetSection {
+  heading: string
+  lines: readonly string[]
+}
+
+export interface PackingSheet {
+  title: string
+  sections: readonly SheetSection[]
+  /** The same on every box. */
+  label: readonly string[]
+}
+
+const plain = (value: number, digits = 1) => String(Number(value.toFixed(digits)))
+const some = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`
+
+/** Everything a person at the packing table has to know, in words; figures in L, g, cm, °C and hours. */
+export function packingSheet(task: PackingTask, plan: PackingPlan): PackingSheet {
+  const { animals, water } = task
+  const name = animals.species.commonName
+  return {
+    title: `Packing sheet: ${animals.count} ${name}`,
+    sections: [
+      { heading: 'What goes into each bag', lines: bagLines(task, plan) },
+      { heading: 'What goes into each box', lines: boxLines(plan) },
+      { heading: 'Before packing', lines: beforeLines(task) },
+      { heading: 'On the way', lines: wayLines(plan) },
+      {
+        heading: 'For whoever receives them',
+        lines: [advice.count.text, advice.temper.text, advice.pH.text, advice.open.text],
+      },
+      { heading: 'Cautions', lines: cautionLines(plan) },
+    ],
+    label: [
+      'LIVE ANIMALS',
+      `${name}, ${some(plan.bagsPerBox, 'bag', 'bags')} in this box`,
+      'This side up. Keep out of sun and frost.',
+      `Packed at ${plain(water.startC)} °C. Open within ${plain(plan.answer.hours)} hours.`,
+    ],
+  }
+}
+
+function bagLines(
+  { animals }: PackingTask,
+  { bag, animalsPerBag, boxes, bagsPerBox }: PackingPlan,
+): string[] {
+  const massG = animalsPerBag * animals.massG
+  return [
+    `${animals.count} animals in all, ${plain(animals.massG, 2)} g each, in ${some(boxes * bagsPerBox, 'bag', 'bags')}`,
+    `At most ${animalsPerBag} animals a bag: ${plain(massG)} g, ${plain(massG / bag.waterL)} g in each litre`,
+    `${plain(bag.waterL)} L of water and ${plain(bag.oxygenL)} L of oxygen; two bags, one inside the other`,
+    'Press the air out, fill with oxygen, twist, fold and band the neck twice.',
+  ]
+}
+
+function boxLines({ box: { box }, boxes, bagsPerBox, packs, priceCents }: PackingPlan): string[] {
+  const { lengthCm, widthCm, heightCm, wallMm } = box
+  return [
+    `${some(boxes, 'box', 'boxes')}, inside ${plain(lengthCm)} × ${plain(widthCm)} × ${plain(heightCm)} cm, walls of ${plain(wallMm)} mm foam`,
+    `${some(bagsPerBox, 'bag', 'bags')} in each box, lying close, with no room to slide`,
+    ...(packs.heat
+      ? [
+          `${some(packs.heat.count, 'heat pack', 'heat packs')} of ${heatPacks[packs.heat.id].ratedHours} hours in each box, under the lid`,
+          advice.heat.text,
+        ]
+      : []),
+    ...(packs.cold
+      ? [
+          `${some(packs.cold.count, 'cold pack', 'cold packs')} of 0.45 kg in each box, on top of the bags`,
+          advice.ice.text,
+        ]
+      : []),
+    ...(packs.heat || packs.cold ? [] : ['No heat packs and no cold packs.']),
+    `Material about $${(priceCents / 100).toFixed(2)}, at the prices of the list.`,
+  ]
+}
+
+function beforeLines({ animals: { species }, water }: PackingTask): string[] {
+  const salt = saltGPerL(species)
+  return [
+    ...(species.fastHours === null ? [] : [`No food for ${species.fastHours} hours. ${advice.fast.text}`]),
+    `Bring the packing water to ${plain(water.startC)} °C.`,
+    ...(salt ? [`Salt, if used: ${salt[0]} to ${salt[1]} g per litre, plain, without additives.`] : []),
+  ]
+}
+
+function wayLines({ answer: { hours, cold, hot } }: PackingPlan): string[] {
+  const coldest = cold?.coldest
+  const warmest = hot?.warmest
+  return [
+    `Reckoned for ${plain(hours)} hours from packing to release.`,
+    ...(coldest ? [`On the cold day the water falls to ${plain(coldest.waterC)} °C at the coldest.`] : []),
+    ...(warmest ? [`On the hot day it rises to ${plain(warmest.waterC)} °C at the warmest.`] : []),
+    'Long-term weather is no forecast: look at the forecast on the day.',
+  ]
+}
+
+function cautionLines({ answer: { reasons } }: PackingPlan): string[] {
+  const said = reasons.map(({ code, value, limit }) => {
+    const { text, unit } = reasonTexts[code]
+    const figures =
+      value === null || limit === null ? '' : ` (${plain(value)} against ${plain(limit)} ${unit})`
+    return `${text}${figures}`
+  })
+  return [...said, 'Reckoned from published figures and house rules; it does not replace your own judgement.']
+}
