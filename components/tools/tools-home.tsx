@@ -7,11 +7,17 @@ import { PressLink } from '@/components/ui/press-link'
 import { Text } from '@/components/ui/text'
 import { color, radius, space } from '@/constants/theme'
 
+const season = {
+  id: 'season',
+  title: 'When they can be shipped',
+  lead: 'The year between two places, week by week: safe, with packs, too cold or too hot.',
+}
+
 /** Every calculator, each with the sentence that says what it is for. */
 export function ToolsHome() {
   return (
     <View role="list" aria-label="Calculators" style={styles.list}>
-      {toolList.map(({ id, title, lead }) => (
+      {[season, ...toolList].map(({ id, title, lead }) => (
         <View key={id} role="listitem">
           <PressLink
             href={`/tools/${id}`}

@@ -56,6 +56,7 @@ export interface Endpoints {
   endOtherSessions: typeof import('@/shared/contracts/sessions').endOtherSessions
   endSession: typeof import('@/shared/contracts/sessions').endSession
   listSessions: typeof import('@/shared/contracts/sessions').listSessions
+  readSeason: typeof import('@/shared/contracts/trips').readSeason
   readWayHome: typeof import('@/shared/contracts/trips').readWayHome
 }
 
@@ -116,5 +117,6 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   endOtherSessions: ['DELETE', '/me/sessions', false],
   endSession: ['DELETE', '/me/sessions/:sessionId', false],
   listSessions: ['GET', '/me/sessions', false],
+  readSeason: ['GET', '/season', false],
   readWayHome: ['GET', '/listings/:listingId/way-home', false],
 }

@@ -25,3 +25,34 @@ export const readWayHome = endpoint({
   query: z.object({ near: z.string().max(24), day: dayText }),
   reply: wayHome,
 })
+
+const seasonVerdict = z.enum(['safe', 'safe-with-packs', 'too-cold', 'too-hot', 'unknown'])
+
+export const readSeason = endpoint({
+  method: 'GET',
+  path: '/season',
+  auth: 'public',
+  summary: 'In which weeks of the year an animal usually survives being shipped from one place to another',
+  query: z.object({
+    from: z.string().max(24),
+    to: z.string().max(24),
+    species: z.string().max(60),
+    packing: z.string().max(40),
+  }),
+  reply: z.object({
+    /** The year and ISO week of the product's clock. */
+    year: z.int(),
+    week: z.int(),
+    /** 52 of them, the first ISO week first. */
+    weeks: z.array(
+      z.object({
+        verdict: seasonVerdict,
+        /** Packs in each box for a cold and for a warm day; absent unless safe. */
+        forCold: z.string().optional(),
+        forHeat: z.string().optional(),
+      }),
+    ),
+    /** From this week on; absent: none. */
+    nextSafeWeek: z.int().optional(),
+  }),
+})

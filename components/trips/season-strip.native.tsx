@@ -1,0 +1,10 @@
+import { seasonSummary } from './season-words'
+
+import { Text } from '@/components/ui/text'
+
+import type { SeasonStripProps } from './season-strip'
+
+/** On the phone app the words stand for the picture. */
+export function SeasonStrip({ weeks, year }: SeasonStripProps) {
+  return <Text>{seasonSummary(weeks, year)}</Text>
+}

@@ -1,0 +1,27 @@
+import { expect, it } from 'vitest'
+
+import { seasonRuns, seasonSummary, weekWords } from './season-words'
+
+import type { SeasonVerdict } from '@/shared/domain/season/season-at'
+
+const year: SeasonVerdict[] = [
+  ...Array<SeasonVerdict>(12).fill('too-cold'),
+  'safe-with-packs',
+  ...Array<SeasonVerdict>(39).fill('safe'),
+]
+
+it('gathers weeks with one verdict, none left out', () => {
+  expect(seasonRuns(year)).toEqual([
+    { verdict: 'too-cold', from: 1, to: 12 },
+    { verdict: 'safe-with-packs', from: 13, to: 13 },
+    { verdict: 'safe', from: 14, to: 52 },
+  ])
+  expect(seasonRuns([])).toEqual([])
+})
+
+it('says the year in words, by the Mondays of ISO weeks', () => {
+  expect(weekWords(2027, 1)).toBe('Jan 4')
+  expect(seasonSummary(year, 2027)).toBe(
+    'Too cold: weeks of Jan 4 to Mar 22. Safe with packs: week of Mar 29. Safe: weeks of Apr 5 to Dec 27.',
+  )
+})
