@@ -8,7 +8,7 @@ import {
   tabTo,
   type TestBrowser,
 } from '@/tests/support/browser'
-import { pressOn } from '@/tests/support/by-keyboard'
+import { pressOn, typeInto } from '@/tests/support/by-keyboard'
 
 const { origin } = inject('wholeProduct')
 let browser: TestBrowser
@@ -66,5 +66,31 @@ it('a calculator answers with the keyboard alone, and says where from', async ()
   await page.getByLabel('pH').fill('8.0')
   await page.getByText('5.37 %').waitFor()
   await page.getByText(/Emerson/).waitFor()
+  await expectNoAxeViolations(page)
+})
+
+it('the season of a parcel is read week by week with the keyboard', async () => {
+  const page = await browser.openPage({ width: 390, origin, theme: 'dark' })
+  await page.goto('/tools/season')
+  for (const [label, zip, town] of [
+    ['Shipped from', '45202', /Cincinnati/],
+    ['Shipped to', '40202', /Louisville/],
+  ] as const) {
+    await typeInto(page, label, zip)
+    await page.getByRole('option', { name: town }).first().waitFor()
+    await page.keyboard.press('ArrowDown')
+    await page.keyboard.press('Enter')
+  }
+  const strip = page.getByRole('slider', { name: 'Week of the year' })
+  await strip.waitFor()
+  await expectNoAxeViolations(page)
+  await keepShot(page, 'season-390')
+  await tabTo(page, 'Week of the year')
+  await page.keyboard.press('Home')
+  expect(await strip.getAttribute('aria-valuetext')).toMatch(/^Week of (Dec|Jan) \d+: too cold$/)
+  await page.keyboard.press('End')
+  expect(await strip.getAttribute('aria-valuenow')).toBe('52')
+  await pressOn(page, 'Show all weeks as a table')
+  expect(await page.getByRole('table', { name: 'All weeks of the year' }).getByRole('row').count()).toBe(53)
   await expectNoAxeViolations(page)
 })

@@ -61,7 +61,7 @@ describe('uploading a photo', () => {
     expect(headers).toMatchObject({
       'content-type': 'image/webp',
       'x-content-type-options': 'nosniff',
-      'content-security-policy': "sandbox; default-src 'none'",
+      'content-security-policy': "sandbox; default-src 'none'; frame-ancestors 'none'",
       'cache-control': 'public, max-age=31536000, immutable',
       'content-disposition': `inline; filename="${name}"`,
     })
