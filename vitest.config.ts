@@ -38,7 +38,8 @@ export default defineConfig({
           globalSetup: ['tests/support/database-server.ts'],
           hookTimeout: 120_000,
           testTimeout: 900_000,
-          fileParallelism: false,
+          // One product for all of them: each journey brings its own people, or takes its own from the demo.
+          maxWorkers: 2,
         },
       },
       {
@@ -50,7 +51,8 @@ export default defineConfig({
           globalSetup: ['tests/support/whole-product.ts'],
           hookTimeout: 120_000,
           testTimeout: 120_000,
-          fileParallelism: false,
+          // One product for all of them: each journey brings its own people, or takes its own from the demo.
+          maxWorkers: 2,
         },
       },
     ],
