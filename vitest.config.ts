@@ -38,8 +38,7 @@ export default defineConfig({
           globalSetup: ['tests/support/database-server.ts'],
           hookTimeout: 120_000,
           testTimeout: 900_000,
-          // One product for all of them: each journey brings its own people, or takes its own from the demo.
-          maxWorkers: 2,
+          fileParallelism: false,
         },
       },
       {
