@@ -63,6 +63,11 @@ function requestBodyOf(endpoint: Endpoint, ref: string) {
   return { requestBody: { required: true, content: { 'application/json': { schema: { $ref: ref } } } } }
 }
 
+function replyContent({ replyMedia }: Endpoint, ref: string) {
+  if (!replyMedia) return { 'application/json': { schema: { $ref: ref } } }
+  return { [replyMedia]: { schema: { type: 'string', contentMediaType: replyMedia } } }
+}
+
 /** One call as an OpenAPI operation, with the schemas it names. */
 export function describeEndpoint(name: string, endpoint: Endpoint): Described {
   const { auth, body, reply, idempotent, summary } = endpoint
@@ -70,7 +75,7 @@ export function describeEndpoint(name: string, endpoint: Endpoint): Described {
   const refusals = refusalsOf(endpoint).map((status) => [status, { $ref: '#/components/responses/Problem' }])
   const success = {
     description: summary,
-    ...(reply ? { content: { 'application/json': { schema: { $ref: ref('Reply') } } } } : {}),
+    ...(reply ? { content: replyContent(endpoint, ref('Reply')) } : {}),
   }
   return {
     operation: {
@@ -87,7 +92,7 @@ export function describeEndpoint(name: string, endpoint: Endpoint): Described {
     },
     schemas: {
       ...(body && !endpoint.upload ? { [`${name}Body`]: jsonSchemaOf(body, 'input') } : {}),
-      ...(reply ? { [`${name}Reply`]: jsonSchemaOf(reply, 'output') } : {}),
+      ...(reply && !endpoint.replyMedia ? { [`${name}Reply`]: jsonSchemaOf(reply, 'output') } : {}),
     },
   }
 }

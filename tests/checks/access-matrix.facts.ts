@@ -53,6 +53,8 @@ const unknownZip = {
   licences: [{ state: 'OH', answer: 'not-needed' }],
 }
 
+const packing = { species: 'bluegill', count: 20, massG: 2, startC: 18, legs: [{ hours: 12, airC: 18 }] }
+
 //               anon mem  sell oth  mod  adm  mod- adm-
 const everybody = '200 200 200 200 200 200 200 200'
 const signedIn = '401 200 200 200 200 200 200 200'
@@ -99,6 +101,7 @@ export const accessMatrix: AccessRow[] = [
   { route: 'readMe', ...open },
   { route: 'changeMe', object: 'none', send: {}, own: signedIn },
   { route: 'findPlaces', ...open, query: 'q=Cin' },
+  { route: 'makePackingSheet', ...open, send: packing },
   { route: 'searchListings', ...open, query: 'near=45202' },
   { route: 'countFacets', ...open, query: 'near=45202' },
   { route: 'findPins', ...open, query: 'south=38&north=40&west=-86&east=-83&zoom=8' },

@@ -46,7 +46,8 @@ function unsaid(told: OpenapiDocument, name: string, endpoint: Endpoint): string
   const success = operation.responses[endpoint.status ?? 200]
   expectTo(Boolean(success), 'no success')
   const reply = success?.content?.['application/json']?.schema.$ref
-  if (endpoint.reply)
+  if (endpoint.replyMedia) expectTo(Boolean(success?.content?.[endpoint.replyMedia]), 'no bytes')
+  else if (endpoint.reply)
     expectTo(reply === `#/components/schemas/${name}Reply` && Boolean(schema('Reply')), 'no reply')
   for (const [, word] of endpoint.path.matchAll(/:(\w+)/g))
     expectTo(

@@ -1,4 +1,5 @@
 import { spawnSync } from 'node:child_process'
+import { readFileSync } from 'node:fs'
 import { describe, expect, it } from 'vitest'
 
 const box = { lengthCm: 40, widthCm: 30, heightCm: 25, wallMm: 38, conductivityWPerMK: 0.036 }
@@ -80,6 +81,13 @@ describe('the calc command', () => {
     asked.forEach(([, , reply], at) => expect(replies[at]).toMatchObject(reply))
     for (const reply of replies.slice(asked.length))
       expect(reply).toEqual({ error: expect.stringMatching(/\.$/) })
+  }, 60_000)
+
+  it('answers the example of DEVELOPERS.md', () => {
+    const [, example] = /calc -- trip '({.*})'/.exec(readFileSync('DEVELOPERS.md', 'utf8')) ?? []
+    const { status, stdout } = calc(['trip', example ?? ''])
+    expect(status).toBe(0)
+    expect(JSON.parse(stdout)).toMatchObject({ hours: 18, cold: { coldest: {} }, hot: { warmest: {} } })
   }, 60_000)
 
   it('leaves with 2 and one sentence on bad input', () => {

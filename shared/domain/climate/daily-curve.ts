@@ -25,13 +25,17 @@ function meanOfMonth(days: readonly number[], month: number): number {
   return days.slice(start, start + length).reduce((sum, value) => sum + value, 0) / length
 }
 
+/** For each day the middles of months it lies between, and how far along. */
+const places = Array.from({ length: YEAR }, (_, day) => {
+  const after = middles.findIndex((middle) => middle >= day)
+  const [to, from] = [after === -1 ? 0 : after, after === -1 ? 11 : (after + 11) % 12]
+  const [start, end] = [middles[from] ?? NaN, middles[to] ?? NaN]
+  const span = (end - start + YEAR) % YEAR
+  return { from, to, share: ((day - start + YEAR) % YEAR) / span }
+})
+
 function straightLines(anchors: Months): number[] {
-  return Array.from({ length: YEAR }, (_, day) => {
-    const after = middles.findIndex((middle) => middle >= day)
-    const [to, from] = [after === -1 ? 0 : after, after === -1 ? 11 : (after + 11) % 12]
-    const [start, end] = [middles[from] ?? NaN, middles[to] ?? NaN]
-    const span = (end - start + YEAR) % YEAR
-    const share = ((day - start + YEAR) % YEAR) / span
-    return (anchors[from] ?? NaN) + share * ((anchors[to] ?? NaN) - (anchors[from] ?? NaN))
-  })
+  return places.map(
+    ({ from, to, share }) => (anchors[from] ?? NaN) + share * ((anchors[to] ?? NaN) - (anchors[from] ?? NaN)),
+  )
 }

@@ -1,3 +1,4 @@
+import type { DesignWeather } from '@/shared/domain/climate/design-weather'
 import type { Container, Trip } from '@/shared/domain/transport/trip'
 
 const within = (value: number, from: number, to: number) => value >= from && value <= to
@@ -5,6 +6,9 @@ const isCount = (value: number) => Number.isInteger(value) && within(value, 1, 1
 
 /** Hours past which no trip of live animals is reckoned. */
 const LONGEST_H = 96
+
+const isWeather = ({ cold, hot }: DesignWeather) =>
+  [cold, hot].every(({ minC, maxC }) => minC <= maxC && within(minC, -80, 60) && within(maxC, -80, 70))
 
 /** Whether every figure of a trip is one a trip can have; anything else is not answered, never bent into shape. */
 export function makesSense({ animals, water, container, legs, departHour, weather }: Trip): boolean {
@@ -23,6 +27,7 @@ export function makesSense({ animals, water, container, legs, departHour, weathe
     legs.every((leg) => leg.hours > 0 && (!('airC' in leg) || within(leg.airC, -50, 60))) &&
     within(departHour, 0, 24) &&
     (!needsWeather || weather !== null) &&
+    (weather === null || [weather.origin, weather.destination].every(isWeather)) &&
     holdsSomething(container)
   )
 }

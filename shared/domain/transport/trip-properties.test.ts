@@ -7,7 +7,11 @@ import type { Trip, TripAnswer } from '@/shared/domain/transport/trip'
 import { animals, bags, foamBox, tripOf } from '@/shared/domain/transport/trips-for-tests'
 import { rankOf } from '@/shared/domain/transport/verdict'
 import { speciesFacts } from '@/shared/domain/species/species.facts'
+import { kmFromMiles, milesFromKm } from '@/shared/units/distance'
+import { cmFromInches, inchesFromCm } from '@/shared/units/length'
+import { gramsFromPounds, poundsFromG } from '@/shared/units/mass'
 import { celsiusFromF, fahrenheitFromC } from '@/shared/units/temperature'
+import { gallonsFromL, litresFromGallons } from '@/shared/units/volume'
 
 const inWater = speciesFacts.filter(({ travels }) => travels === 'in-water')
 
@@ -109,6 +113,10 @@ describe('the figures', () => {
           slack,
         )
         expect(Math.abs(celsiusFromF(fahrenheitFromC(value)) - value)).toBeLessThanOrEqual(slack)
+        expect(Math.abs(gramsFromPounds(poundsFromG(value)) - value)).toBeLessThanOrEqual(slack)
+        expect(Math.abs(litresFromGallons(gallonsFromL(value)) - value)).toBeLessThanOrEqual(slack)
+        expect(Math.abs(cmFromInches(inchesFromCm(value)) - value)).toBeLessThanOrEqual(slack)
+        expect(Math.abs(kmFromMiles(milesFromKm(value)) - value)).toBeLessThanOrEqual(slack)
       }),
     )
   })
