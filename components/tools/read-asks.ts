@@ -11,7 +11,7 @@ interface Reading {
 }
 
 /** Reads every field of a calculator; figures that cannot be read are left out and named. */
-export function readAsks(tool: Tool, typed: Typed, units: UnitSystem): Reading {
+export function readAsks(tool: Pick<Tool, 'asks' | 'choosing'>, typed: Typed, units: UnitSystem): Reading {
   const figures: Record<string, number> = {}
   const faults: Record<string, string> = {}
   for (const { id, start, read } of tool.asks) {

@@ -13,11 +13,17 @@ const season = {
   lead: 'The year between two places, week by week: safe, with packs, too cold or too hot.',
 }
 
+const parcel = {
+  id: 'parcel',
+  title: 'A parcel: will they survive, and how to pack',
+  lead: 'The trip check for a box with bags: what happens in the water hour by hour, the plan, and a sheet to print.',
+}
+
 /** Every calculator, each with the sentence that says what it is for. */
 export function ToolsHome() {
   return (
     <View role="list" aria-label="Calculators" style={styles.list}>
-      {[season, ...toolList].map(({ id, title, lead }) => (
+      {[parcel, season, ...toolList].map(({ id, title, lead }) => (
         <View key={id} role="listitem">
           <PressLink
             href={`/tools/${id}`}
