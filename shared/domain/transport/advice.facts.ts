@@ -14,7 +14,7 @@ export const advice = {
     sourceKeys: ['piper-1982'],
   },
   temper: {
-    text: 'A difference of up to 2 °C needs nothing. Up to 5 °C: float the closed bag for 20 minutes. More: bring the animals over by at most 5 °C an hour, 10 °C in all.',
+    text: 'A difference of up to 2 °C (4 °F) needs nothing. Up to 5 °C (9 °F): float the closed bag for 20 minutes. More: bring the animals over by at most 5 °C (9 °F) an hour, 10 °C (18 °F) in all.',
     sourceKeys: ['lsu-cocahoe', 'house-rule'],
   },
   pH: {

@@ -2,6 +2,7 @@ import { advice, saltGPerL } from '@/shared/domain/transport/advice.facts'
 import type { PackingPlan, PackingTask } from '@/shared/domain/transport/plan-packing'
 import { heatPacks } from '@/shared/domain/transport/packs.facts'
 import { reasonTexts } from '@/shared/domain/transport/reason-texts.facts'
+import { fahrenheitFromC } from '@/shared/units/temperature'
 
 export interface SheetSection {
   heading: string
@@ -16,6 +17,8 @@ export interface PackingSheet {
 }
 
 const plain = (value: number, digits = 1) => String(Number(value.toFixed(digits)))
+/** Both scales: these figures decide whether animals live. */
+const degrees = (degreesC: number) => `${plain(degreesC)} °C (${plain(fahrenheitFromC(degreesC), 0)} °F)`
 const some = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`
 
 /** Everything a person at the packing table has to know, in words; figures in L, g, cm, °C and hours. */
@@ -39,7 +42,7 @@ export function packingSheet(task: PackingTask, plan: PackingPlan): PackingSheet
       'LIVE ANIMALS',
       `${name}, ${some(plan.bagsPerBox, 'bag', 'bags')} in this box`,
       'This side up. Keep out of sun and frost.',
-      `Packed at ${plain(water.startC)} °C. Open within ${plain(plan.answer.hours)} hours.`,
+      `Packed at ${degrees(water.startC)}. Open within ${plain(plan.answer.hours)} hours.`,
     ],
   }
 }
@@ -83,7 +86,7 @@ function beforeLines({ animals: { species }, water }: PackingTask): string[] {
   const salt = saltGPerL(species)
   return [
     ...(species.fastHours === null ? [] : [`No food for ${species.fastHours} hours. ${advice.fast.text}`]),
-    `Bring the packing water to ${plain(water.startC)} °C.`,
+    `Bring the packing water to ${degrees(water.startC)}.`,
     ...(salt ? [`Salt, if used: ${salt[0]} to ${salt[1]} g per litre, plain, without additives.`] : []),
   ]
 }
@@ -93,8 +96,8 @@ function wayLines({ answer: { hours, cold, hot } }: PackingPlan): string[] {
   const warmest = hot?.warmest
   return [
     `Reckoned for ${plain(hours)} hours from packing to release.`,
-    ...(coldest ? [`On the cold day the water falls to ${plain(coldest.waterC)} °C at the coldest.`] : []),
-    ...(warmest ? [`On the hot day it rises to ${plain(warmest.waterC)} °C at the warmest.`] : []),
+    ...(coldest ? [`On the cold day the water falls to ${degrees(coldest.waterC)} at the coldest.`] : []),
+    ...(warmest ? [`On the hot day it rises to ${degrees(warmest.waterC)} at the warmest.`] : []),
     'Long-term weather is no forecast: look at the forecast on the day.',
   ]
 }
