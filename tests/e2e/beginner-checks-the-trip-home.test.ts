@@ -1,3 +1,5 @@
+import { readFile } from 'node:fs/promises'
+
 import type { Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest'
 
@@ -92,5 +94,20 @@ it('the season of a parcel is read week by week with the keyboard', async () => 
   expect(await strip.getAttribute('aria-valuenow')).toBe('52')
   await pressOn(page, 'Show all weeks as a table')
   expect(await page.getByRole('table', { name: 'All weeks of the year' }).getByRole('row').count()).toBe(53)
+  await expectNoAxeViolations(page)
+})
+
+it('a parcel gets a packing that is safe, and a sheet to print', async () => {
+  const page = await browser.openPage({ width: 390, origin })
+  await page.goto('/tools/parcel')
+  await page.getByText('They should arrive well').waitFor()
+  await expectNoAxeViolations(page)
+  const download = page.waitForEvent('download')
+  await page.getByRole('button', { name: 'Packing sheet to print (PDF)' }).click()
+  const file = await (await download).path()
+  expect((await readFile(file)).subarray(0, 5).toString()).toBe('%PDF-')
+  // A hard frost: no packing of the list is safe, and the page says why.
+  await page.getByLabel('Coldest air on the way').fill('-40')
+  await page.getByText('Not like this').waitFor()
   await expectNoAxeViolations(page)
 })
