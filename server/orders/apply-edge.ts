@@ -39,12 +39,18 @@ export interface EdgeOutcome {
 }
 
 const MONEY_STATES = new Set(['settled', 'cancelled', 'deposit_paid'])
+const GOODS_STATES = new Set(['ready', 'dispatched', 'handed_over', 'settled'])
 
-/** Overlays stop edges: a freeze stops all, an open payment dispute whatever would move money. */
+/**
+ * Overlays stop edges: a freeze stops all, an open payment dispute whatever would move money, an open recall whatever
+ * would give the goods out or pay for them. A recalled order can still be cancelled.
+ */
 function checkOverlays(order: OrderRow, to: string): void {
   if (order.freeze !== 'none')
     throw new Problem('order-moved', 'This order is frozen while staff look into it.')
   if (order.paymentDispute === 'open' && MONEY_STATES.has(to)) throw new Problem('dispute-open')
+  if (order.recall === 'open' && GOODS_STATES.has(to))
+    throw new Problem('order-moved', 'This batch is being recalled: nothing of it may be handed over now.')
 }
 
 /** A slot whose time has passed stays counted: it was used, if only by waiting. */

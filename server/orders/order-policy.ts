@@ -8,6 +8,8 @@ export type Party = ShownOrder['party']
 type OrderAct = Exclude<ShownOrder['may'][number], RatingAct>
 
 const isRunning = (order: OrderRow) => order.freeze === 'none'
+const GIVES_OUT = new Set<OrderAct>(['mark-ready', 'hand-over', 'confirm-good'])
+const isHeldBack = (act: OrderAct, order: OrderRow) => order.recall === 'open' && GIVES_OUT.has(act)
 const isBalancePaid = (order: OrderRow) => order.balanceCents === 0 || order.balancePaidAt !== null
 
 const CANCELLABLE = ['deposit_paid', 'scheduled', 'ready']
@@ -53,7 +55,7 @@ const abilities: Record<OrderAct, (order: OrderRow, party: Party) => boolean> = 
 }
 
 export function mayAct(act: OrderAct, order: OrderRow, party: Party): boolean {
-  return isRunning(order) && abilities[act](order, party)
+  return isRunning(order) && !isHeldBack(act, order) && abilities[act](order, party)
 }
 
 /** Every act open to this party now, those after the hand-over included. */
