@@ -18,24 +18,24 @@ export interface Endpoints {
   listNotices: typeof import('@/shared/contracts/notices').listNotices
   readAllNotices: typeof import('@/shared/contracts/notices').readAllNotices
   readNotice: typeof import('@/shared/contracts/notices').readNotice
-  acceptOrder: typeof import('@/shared/contracts/orders').acceptOrder
-  cancelOrder: typeof import('@/shared/contracts/orders').cancelOrder
-  chooseSlot: typeof import('@/shared/contracts/orders').chooseSlot
-  confirmGood: typeof import('@/shared/contracts/orders').confirmGood
-  contestNoShow: typeof import('@/shared/contracts/orders').contestNoShow
-  decideOrder: typeof import('@/shared/contracts/orders').decideOrder
-  declineOrder: typeof import('@/shared/contracts/orders').declineOrder
-  handOver: typeof import('@/shared/contracts/orders').handOver
-  leaveReservation: typeof import('@/shared/contracts/orders').leaveReservation
+  acceptOrder: typeof import('@/shared/contracts/order-acts').acceptOrder
+  cancelOrder: typeof import('@/shared/contracts/order-acts').cancelOrder
+  chooseSlot: typeof import('@/shared/contracts/order-acts').chooseSlot
+  confirmGood: typeof import('@/shared/contracts/order-acts').confirmGood
+  contestNoShow: typeof import('@/shared/contracts/order-acts').contestNoShow
+  decideOrder: typeof import('@/shared/contracts/order-acts').decideOrder
+  declineOrder: typeof import('@/shared/contracts/order-acts').declineOrder
+  handOver: typeof import('@/shared/contracts/order-acts').handOver
+  leaveReservation: typeof import('@/shared/contracts/order-acts').leaveReservation
+  markReady: typeof import('@/shared/contracts/order-acts').markReady
+  payBalance: typeof import('@/shared/contracts/order-acts').payBalance
+  payDeposit: typeof import('@/shared/contracts/order-acts').payDeposit
+  reportNoShow: typeof import('@/shared/contracts/order-acts').reportNoShow
+  stopOrder: typeof import('@/shared/contracts/order-acts').stopOrder
+  withdrawRequest: typeof import('@/shared/contracts/order-acts').withdrawRequest
   listOrders: typeof import('@/shared/contracts/orders').listOrders
-  markReady: typeof import('@/shared/contracts/orders').markReady
-  payBalance: typeof import('@/shared/contracts/orders').payBalance
-  payDeposit: typeof import('@/shared/contracts/orders').payDeposit
   readOrder: typeof import('@/shared/contracts/orders').readOrder
-  reportNoShow: typeof import('@/shared/contracts/orders').reportNoShow
   reserveBatch: typeof import('@/shared/contracts/orders').reserveBatch
-  stopOrder: typeof import('@/shared/contracts/orders').stopOrder
-  withdrawRequest: typeof import('@/shared/contracts/orders').withdrawRequest
   makePackingSheet: typeof import('@/shared/contracts/packing').makePackingSheet
   uploadPhoto: typeof import('@/shared/contracts/photos').uploadPhoto
   findPlaces: typeof import('@/shared/contracts/places').findPlaces
@@ -88,15 +88,15 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   declineOrder: ['POST', '/orders/:orderId/refusal', false],
   handOver: ['POST', '/orders/:orderId/hand-over', false],
   leaveReservation: ['POST', '/orders/:orderId/departure', false],
-  listOrders: ['GET', '/orders', false],
   markReady: ['POST', '/orders/:orderId/readiness', false],
   payBalance: ['POST', '/orders/:orderId/balance-payment', false],
   payDeposit: ['POST', '/orders/:orderId/deposit-payment', false],
-  readOrder: ['GET', '/orders/:orderId', false],
   reportNoShow: ['POST', '/orders/:orderId/no-show', false],
-  reserveBatch: ['POST', '/listings/:listingId/orders', false],
   stopOrder: ['POST', '/moderation/orders/:orderId/stop', false],
   withdrawRequest: ['POST', '/orders/:orderId/withdrawal', false],
+  listOrders: ['GET', '/orders', false],
+  readOrder: ['GET', '/orders/:orderId', false],
+  reserveBatch: ['POST', '/listings/:listingId/orders', false],
   makePackingSheet: ['POST', '/packing-sheet', false],
   uploadPhoto: ['POST', '/photos', true],
   findPlaces: ['GET', '/places', false],
