@@ -19,6 +19,7 @@ import { showOrder } from '@/server/orders/show-order'
 import { reserveBatch } from '@/server/orders/reserve-batch'
 import { stopOrder } from '@/server/orders/stop-order'
 import { withdrawRequest } from '@/server/orders/withdraw-request'
+import * as acts from '@/shared/contracts/order-acts'
 import * as orders from '@/shared/contracts/orders'
 
 export function orderRoutes(): Router {
@@ -29,50 +30,47 @@ export function orderRoutes(): Router {
   )(({ caller, params, body, key }) => reserveBatch(caller, params.listingId, { ...body, commandId: key }))
   on(router, orders.listOrders)(({ caller, query }) => listOrders(caller, query))
   on(router, orders.readOrder)(({ caller, params }) => showOrder(caller, params.orderId))
-  on(router, orders.payDeposit)(({ caller, params }) => payDeposit(caller, params.orderId))
+  on(router, acts.payDeposit)(({ caller, params }) => payDeposit(caller, params.orderId))
   on(
     router,
-    orders.leaveReservation,
+    acts.leaveReservation,
   )(({ caller, params, key }) => leaveReservation(caller, params.orderId, key))
+  on(router, acts.withdrawRequest)(({ caller, params, key }) => withdrawRequest(caller, params.orderId, key))
+  on(router, acts.acceptOrder)(({ caller, params, key }) => acceptOrder(caller, params.orderId, key))
   on(
     router,
-    orders.withdrawRequest,
-  )(({ caller, params, key }) => withdrawRequest(caller, params.orderId, key))
-  on(router, orders.acceptOrder)(({ caller, params, key }) => acceptOrder(caller, params.orderId, key))
-  on(
-    router,
-    orders.declineOrder,
+    acts.declineOrder,
   )(({ caller, params, body, key }) => declineOrder(caller, params.orderId, { ...body, commandId: key }))
-  on(router, orders.markReady)(({ caller, params, key }) => markReady(caller, params.orderId, key))
-  on(router, orders.payBalance)(({ caller, params }) => payBalance(caller, params.orderId))
+  on(router, acts.markReady)(({ caller, params, key }) => markReady(caller, params.orderId, key))
+  on(router, acts.payBalance)(({ caller, params }) => payBalance(caller, params.orderId))
   on(
     router,
-    orders.handOver,
+    acts.handOver,
   )(({ caller, params, body, key }) => handOver(caller, params.orderId, { ...body, commandId: key }))
-  on(router, orders.confirmGood)(({ caller, params, key }) => confirmGood(caller, params.orderId, key))
+  on(router, acts.confirmGood)(({ caller, params, key }) => confirmGood(caller, params.orderId, key))
   on(
     router,
-    orders.cancelOrder,
+    acts.cancelOrder,
   )(({ caller, params, body, key }) => cancelOrder(caller, params.orderId, { ...body, commandId: key }))
   on(
     router,
-    orders.chooseSlot,
+    acts.chooseSlot,
   )(({ caller, params, body, key }) => chooseSlot(caller, params.orderId, { ...body, commandId: key }))
   on(
     router,
-    orders.reportNoShow,
+    acts.reportNoShow,
   )(({ caller, params, body, key }) => reportNoShow(caller, params.orderId, { ...body, commandId: key }))
   on(
     router,
-    orders.contestNoShow,
+    acts.contestNoShow,
   )(({ caller, params, body, key }) => contestNoShow(caller, params.orderId, { ...body, commandId: key }))
   on(
     router,
-    orders.stopOrder,
+    acts.stopOrder,
   )(({ caller, params, body, key }) => stopOrder(caller, params.orderId, { ...body, commandId: key }))
   on(
     router,
-    orders.decideOrder,
+    acts.decideOrder,
   )(({ caller, params, body, key }) => decideOrder(caller, params.orderId, { ...body, commandId: key }))
   return router
 }
