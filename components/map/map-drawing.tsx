@@ -2,6 +2,7 @@ import { geoCircle } from 'd3-geo'
 
 import { borderPath, landPath, landScale, stateNames } from './map-land'
 import { earthRadiusKm, toScreen, toWorld, type MapView, type Size } from './map-view'
+import { placeNames } from './place-names'
 
 import { color, font } from '@/constants/theme'
 
@@ -73,27 +74,30 @@ interface NamesProps {
   isState?: boolean
 }
 
+const letterings = {
+  state: { fontPx: 15, letterSpacingPx: 2 },
+  town: { fontPx: 13, letterSpacingPx: 0 },
+} as const
+
 function Names({ places, view, size, isState }: NamesProps) {
-  return places.map((place) => {
-    const { x, y } = toScreen(view, size, place)
-    if (x < 0 || y < 0 || x > size.widthPx || y > size.heightPx) return null
-    return (
-      <g key={place.name} transform={`translate(${x.toFixed(1)} ${y.toFixed(1)})`}>
-        {isState ? null : <circle r={2.5} fill={color.muted} />}
-        <text
-          y={isState ? 0 : -7}
-          textAnchor="middle"
-          fontFamily={font.body.fontFamily}
-          fontSize={isState ? 15 : 13}
-          letterSpacing={isState ? 2 : 0}
-          fill={color.muted}
-          stroke={color.card}
-          strokeWidth={3}
-          paintOrder="stroke"
-        >
-          {place.name}
-        </text>
-      </g>
-    )
-  })
+  const lettering = letterings[isState ? 'state' : 'town']
+  const seen = places.map(({ name, ...place }) => ({ name, ...toScreen(view, size, place) }))
+  return placeNames(seen, size, lettering).map(({ name, x, y }) => (
+    <g key={name} transform={`translate(${x.toFixed(1)} ${y.toFixed(1)})`}>
+      {isState ? null : <circle r={2.5} fill={color.muted} />}
+      <text
+        y={isState ? 0 : -7}
+        textAnchor="middle"
+        fontFamily={font.body.fontFamily}
+        fontSize={lettering.fontPx}
+        letterSpacing={lettering.letterSpacingPx}
+        fill={color.muted}
+        stroke={color.card}
+        strokeWidth={3}
+        paintOrder="stroke"
+      >
+        {name}
+      </text>
+    </g>
+  ))
 }
