@@ -20,6 +20,7 @@ const icons: Record<NoticeKind, IconName> = {
   'listing-approved': 'check',
   'listing-asked': 'question',
   'listing-rejected': 'stop',
+  'listing-taken-down': 'stop',
 }
 
 export const noticeIcon = (kind: NoticeKind): IconName => icons[kind]

@@ -72,7 +72,7 @@ export async function setVersion(id: number, change: Partial<NewVersion>, tx: Tx
   await tx.update(listingVersion).set(change).where(eq(listingVersion.id, id))
 }
 
-/** A newer submission takes the place of one that still waits. */
+/** A newer submission takes the place of one that still waits; a listing taken off sale takes it along. */
 export async function supersedeWaiting(listingId: number, at: Date, tx: Tx): Promise<void> {
   await tx
     .update(listingVersion)

@@ -8,6 +8,7 @@ import { reviewMail } from '@/server/mail/letters/review-decided'
 import { findMember } from '@/server/members/member-store'
 import { writeAudit } from '@/server/moderation/audit-store'
 import { readReview } from '@/server/moderation/read-review'
+import { closeReports } from '@/server/moderation/report-store'
 import { requireImpartial } from '@/server/moderation/review-policy'
 import { listOwnCategories } from '@/server/moderation/review-store'
 import { tellMember } from '@/server/notices/tell-member'
@@ -60,7 +61,17 @@ async function apply(deciding: Deciding, tx: Tx): Promise<void> {
     await publishVersion({ listing, version, zone: seller.zone, by: caller.memberId, at }, tx)
     return
   }
-  await setListing(listing.id, { state: stateAfter(deciding), updatedAt: at }, tx)
+  const state = stateAfter(deciding)
+  await setListing(listing.id, { state, updatedAt: at }, tx)
+  if (state === 'taken_down') {
+    // What was reported of it is answered with it: the desk does not ask a second time.
+    const closing = {
+      outcome: 'taken-down',
+      closingReason: given.reason ?? null,
+      note: given.note ?? null,
+    } as const
+    await closeReports(listing.id, { ...closing, closedBy: caller.memberId, closedAt: at }, tx)
+  }
   await projectListings(tx, [listing.id])
 }
 

@@ -1,5 +1,9 @@
 // Written by scripts/write-routes.mjs from shared/contracts; the contract test fails when it is out of step.
 export interface Endpoints {
+  dismissReports: typeof import('@/shared/contracts/listing-reports').dismissReports
+  listReportedListings: typeof import('@/shared/contracts/listing-reports').listReportedListings
+  reportListing: typeof import('@/shared/contracts/listing-reports').reportListing
+  takeDownListing: typeof import('@/shared/contracts/listing-reports').takeDownListing
   adjustStock: typeof import('@/shared/contracts/listings').adjustStock
   beginListing: typeof import('@/shared/contracts/listings').beginListing
   changeSelling: typeof import('@/shared/contracts/listings').changeSelling
@@ -61,6 +65,10 @@ export interface Endpoints {
 }
 
 export const routes: Record<keyof Endpoints, readonly [method: string, path: string, upload: boolean]> = {
+  dismissReports: ['POST', '/moderation/reported-listings/:listingId/dismissal', false],
+  listReportedListings: ['GET', '/moderation/reported-listings', false],
+  reportListing: ['POST', '/listings/:listingId/reports', false],
+  takeDownListing: ['POST', '/moderation/reported-listings/:listingId/take-down', false],
   adjustStock: ['POST', '/sellers/mine/listings/:listingId/stock-movements', false],
   beginListing: ['POST', '/sellers/mine/listings', false],
   changeSelling: ['POST', '/sellers/mine/listings/:listingId/selling', false],

@@ -22,6 +22,7 @@ export const noticeKinds = [
   'listing-approved',
   'listing-asked',
   'listing-rejected',
+  'listing-taken-down',
 ] as const
 export type NoticeKind = (typeof noticeKinds)[number]
 
