@@ -10,7 +10,9 @@ import { readListing } from '@/server/listings/read-listing'
 import { readOwnListing } from '@/server/listings/read-own-listing'
 import { saveDraft } from '@/server/listings/save-draft'
 import { submitListing } from '@/server/listings/submit-listing'
+import { listSellerListings } from '@/server/search/list-seller-listings'
 import * as calls from '@/shared/contracts/listings'
+import { listSellerListings as listSellerListingsCall } from '@/shared/contracts/search'
 
 export function listingRoutes(): Router {
   const router = Router()
@@ -19,6 +21,8 @@ export function listingRoutes(): Router {
     calls.readListing,
   )(async ({ caller, params, query }) => readListing(caller, params.listingId, query.near))
   on(router, calls.listOwnListings)(async ({ caller, query }) => listOwnListings(caller, query))
+  // After the seller's own list: `mine` is no seller's name.
+  on(router, listSellerListingsCall)(async ({ params, query }) => listSellerListings(params.sellerId, query))
   on(router, calls.beginListing)(async ({ caller, body }) => beginListing(caller, body.copyOf))
   on(router, calls.readOwnListing)(async ({ caller, params }) => readOwnListing(caller, params.listingId))
   on(router, calls.saveDraft)(async ({ caller, params, body }) => saveDraft(caller, params.listingId, body))

@@ -20,6 +20,7 @@ export interface ListingPage {
   photos: PhotoRow[]
   place: FoundPlace | null
   gate: GateVerdict | null
+  alsoOnSale: number
   may: ShownListing['may']
 }
 
@@ -52,6 +53,7 @@ export function presentListing(page: ListingPage): ShownListing {
     windows: page.windows.map(presentWindow),
     ...(page.gate ? { gate: page.gate } : {}),
     photos: presentPhotos(version.body, page.photos),
+    alsoOnSale: page.alsoOnSale,
     may: page.may,
   }
 }

@@ -4,6 +4,8 @@ import { countOpenOrders, type ListingRow } from '@/server/listings/listing-stor
 import { presentWindow } from '@/server/listings/present-window'
 import { listLatestReviews } from '@/server/listings/version-store'
 import { listOpenWindows } from '@/server/listings/window-store'
+import { presentTakenDown } from '@/server/moderation/present-report'
+import { listTakenDown } from '@/server/moderation/report-store'
 import type { ListingDraft, OwnListing } from '@/shared/contracts/listings'
 import { listingTitle } from '@/shared/domain/listings/listing-title'
 
@@ -20,13 +22,15 @@ function draftTitle(draft: ListingDraft): string {
 /** A seller's listings with drafts, stock and what may be done; one query a table however many there are. */
 export async function presentOwnListings(rows: ListingRow[]): Promise<OwnListing[]> {
   const ids = rows.map((row) => row.id)
-  const [reviews, windows, openOrders] = await Promise.all([
+  const [reviews, windows, openOrders, down] = await Promise.all([
     listLatestReviews(ids),
     listOpenWindows(ids, now()),
     countOpenOrders(ids),
+    listTakenDown(rows.filter((row) => row.state === 'taken_down').map((row) => row.id)),
   ])
   return rows.map((row) => {
     const review = reviews.get(row.id)
+    const takenDown = presentTakenDown(down.get(row.id))
     const { free, held, pledged, sold, shipped, delivered } = row
     return {
       listingId: row.publicId,
@@ -45,6 +49,7 @@ export async function presentOwnListings(rows: ListingRow[]): Promise<OwnListing
             },
           }
         : {}),
+      ...(takenDown ? { takenDown } : {}),
       stock: { free, held, pledged, sold, shipped, delivered },
       windows: windows.filter((window) => window.listingId === row.id).map(presentWindow),
       openOrders: openOrders.get(row.id) ?? 0,

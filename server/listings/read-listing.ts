@@ -8,6 +8,7 @@ import { listOpenWindows } from '@/server/listings/window-store'
 import { findPhotos } from '@/server/photos/photo-store'
 import { requirePlace } from '@/server/places/find-place'
 import { judgeListing } from '@/server/rules/judge-listing'
+import { countOnSale } from '@/server/search/on-sale-store'
 import { findSeller, type SellerRow } from '@/server/sellers/seller-store'
 import { Problem } from '@/shared/api/problem'
 import type { ShownListing } from '@/shared/contracts/listings'
@@ -22,7 +23,8 @@ function actsOn(
   const isRefused = gate !== null && (gate.buy === 'no' || gate.buy === 'ask-moderators')
   return [
     ...(!isOwn && isOpen && !isRefused ? (['reserve'] as const) : []),
-    ...(isOwn ? (['edit'] as const) : []),
+    // A visitor is shown the way as well: they sign in first.
+    ...(isOwn ? (['edit'] as const) : (['report'] as const)),
     ...(caller && isStaff(caller) ? (['review'] as const) : []),
   ]
 }
@@ -46,11 +48,12 @@ export async function readListing(
   if (!version || !seller) throw new Problem('not-found')
   const { body } = version
   const viewer = caller?.memberId === seller.memberId ? 'seller' : caller ? 'buyer' : 'visitor'
-  const [windows, photos, gate] = await Promise.all([
+  const [windows, photos, gate, alsoOnSale] = await Promise.all([
     listOpenWindows([listing.id], now()),
     findPhotos(body.photos.map((photo) => photo.photoId)),
     place && judgeListing({ body, sellerState: seller.state, buyerState: place.state, viewer }),
+    countOnSale(seller.id, { buyerState: place?.state, exceptId: listing.id }),
   ])
   const may = actsOn({ listing, seller, gate }, caller)
-  return presentListing({ listing, version, seller, windows, photos, place, gate, may })
+  return presentListing({ listing, version, seller, windows, photos, place, gate, alsoOnSale, may })
 }

@@ -1,5 +1,6 @@
 import type { ReportRow } from '@/server/moderation/report-store'
 import { reportReasons, type MadeReport } from '@/shared/contracts/listing-reports'
+import { takeDownReasons, type OwnListing } from '@/shared/contracts/listings'
 
 const isReason = (text: string): text is MadeReport['reason'] =>
   (reportReasons as readonly string[]).includes(text)
@@ -11,4 +12,12 @@ export function presentReport(row: Pick<ReportRow, 'reason' | 'words' | 'created
     ...(row.words ? { words: row.words } : {}),
     reportedAt: row.createdAt.toISOString(),
   }
+}
+
+/** Why a listing went off sale; nothing where a reviewer's refusal says it already. */
+export function presentTakenDown(
+  found: { reason: string; note: string | null } | undefined,
+): OwnListing['takenDown'] {
+  const reason = takeDownReasons.find((one) => one === found?.reason)
+  return reason && { reason, ...(found?.note ? { note: found.note } : {}) }
 }

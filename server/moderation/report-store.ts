@@ -142,3 +142,20 @@ export async function listNewestReports(
     .where(lte(ranked.place, MOST_SHOWN))
     .orderBy(desc(ranked.id))
 }
+
+/** Why listings went off sale, by listing. */
+export async function listTakenDown(
+  listingIds: number[],
+): Promise<Map<number, { reason: string; note: string | null }>> {
+  if (listingIds.length === 0) return new Map()
+  const rows = await db()
+    .select({
+      listingId: listingReport.listingId,
+      reason: listingReport.closingReason,
+      note: listingReport.note,
+    })
+    .from(listingReport)
+    .where(and(inArray(listingReport.listingId, listingIds), eq(listingReport.outcome, 'taken-down')))
+    .orderBy(asc(listingReport.id))
+  return new Map(rows.map(({ listingId, reason, note }) => [listingId, { reason: reason ?? '', note }]))
+}

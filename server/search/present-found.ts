@@ -22,8 +22,10 @@ interface Around {
 interface Beside {
   windows: OpenWindow[]
   grounds: ReadonlyMap<string, string>
-  legal: (facts: FoundFacts) => FoundListing['legal']
 }
+
+/** What a tag says wherever its reader is. */
+type PlacelessTag = Omit<FoundListing, 'distanceKm' | 'bearing' | 'legal'>
 
 /** The gate for each kind of animal and state on the page, judged once: a page holds many of a few kinds. */
 function legalBook(
@@ -45,11 +47,26 @@ function legalBook(
   }
 }
 
-function presentOne(
-  hit: SearchHit,
+async function readLegalBook(all: FoundFacts[], around: Around) {
+  const rules = await loadRules({
+    taxonIds: [...new Set(all.flatMap(({ body }) => taxaOf(body.taxonId)))],
+    jurisdictions: [...new Set(['US', around.place.state, ...all.map(({ state }) => state)])],
+  })
+  return legalBook(rules, around)
+}
+
+async function readGrounds(all: FoundFacts[]): Promise<Map<string, string>> {
+  const photos = await findPhotos(
+    all.flatMap(({ body }) => body.photos.slice(0, 1).map((photo) => photo.photoId)),
+  )
+  return new Map(photos.map((photo) => [photo.id, photo.ground]))
+}
+
+function presentTag(
+  hit: Pick<SearchHit, 'listingId' | 'unitCents'>,
   facts: FoundFacts,
-  { around, beside }: { around: Around; beside: Beside },
-): FoundListing {
+  { beside, count }: { beside: Beside; count?: number | undefined },
+): PlacelessTag {
   const { body, cellLat: lat, cellLng: lng } = facts
   const taxon = findTaxon(body.taxonId)
   const next = beside.windows.find((window) => window.listingId === facts.listingId)
@@ -66,18 +83,15 @@ function presentOne(
     free: facts.free,
     minOrder: body.minOrder,
     unitCents: hit.unitCents,
-    ...(around.count === undefined ? {} : { totalCents: hit.unitCents * around.count }),
+    ...(count === undefined ? {} : { totalCents: hit.unitCents * count }),
     waterC: body.water.temperatureC,
     farmName: facts.farmName,
     placeText: `${facts.city}, ${facts.state}`,
     state: facts.state,
     lat,
     lng,
-    distanceKm: hit.distanceKm,
-    bearing: bearingWords(around.place.centre, { lat, lng }) ?? 'here',
     ...(next ? { nextPickup: { startsAt: next.startsAt.toISOString(), zone: next.zone } } : {}),
     ...(rating ? { rating } : {}),
-    legal: beside.legal(facts),
   }
 }
 
@@ -86,17 +100,33 @@ export async function presentFound(hits: SearchHit[], around: Around): Promise<F
   const ids = hits.map((hit) => hit.listingId)
   const [found, windows] = await Promise.all([readFound(ids), readWindowsWithRoom(ids, around.at)])
   const all = [...found.values()]
-  const [photos, rules] = await Promise.all([
-    findPhotos(all.flatMap(({ body }) => body.photos.slice(0, 1).map((photo) => photo.photoId))),
-    loadRules({
-      taxonIds: [...new Set(all.flatMap(({ body }) => taxaOf(body.taxonId)))],
-      jurisdictions: [...new Set(['US', around.place.state, ...all.map(({ state }) => state)])],
-    }),
-  ])
-  const grounds = new Map(photos.map((photo) => [photo.id, photo.ground]))
-  const beside: Beside = { windows, grounds, legal: legalBook(rules, around) }
+  const [grounds, legal] = await Promise.all([readGrounds(all), readLegalBook(all, around)])
+  const beside = { windows, grounds }
   return hits.flatMap((hit) => {
     const facts = found.get(hit.listingId)
-    return facts ? [presentOne(hit, facts, { around, beside })] : []
+    if (!facts) return []
+    const here = { lat: facts.cellLat, lng: facts.cellLng }
+    return [
+      {
+        ...presentTag(hit, facts, { beside, count: around.count }),
+        distanceKm: hit.distanceKm,
+        bearing: bearingWords(around.place.centre, here) ?? 'here',
+        legal: legal(facts),
+      },
+    ]
+  })
+}
+
+/** The same for a reader whose place is not known: without distance and law. */
+export async function presentPlaceless(
+  hits: Pick<SearchHit, 'listingId' | 'unitCents'>[],
+  at: Date,
+): Promise<PlacelessTag[]> {
+  const ids = hits.map((hit) => hit.listingId)
+  const [found, windows] = await Promise.all([readFound(ids), readWindowsWithRoom(ids, at)])
+  const beside = { windows, grounds: await readGrounds([...found.values()]) }
+  return hits.flatMap((hit) => {
+    const facts = found.get(hit.listingId)
+    return facts ? [presentTag(hit, facts, { beside })] : []
   })
 }

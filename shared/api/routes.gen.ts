@@ -51,6 +51,7 @@ export interface Endpoints {
   replyToRating: typeof import('@/shared/contracts/ratings').replyToRating
   countFacets: typeof import('@/shared/contracts/search').countFacets
   findPins: typeof import('@/shared/contracts/search').findPins
+  listSellerListings: typeof import('@/shared/contracts/search').listSellerListings
   searchListings: typeof import('@/shared/contracts/search').searchListings
   changeFarm: typeof import('@/shared/contracts/sellers').changeFarm
   openFarm: typeof import('@/shared/contracts/sellers').openFarm
@@ -116,6 +117,7 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   replyToRating: ['POST', '/orders/:orderId/rating/reply', false],
   countFacets: ['GET', '/listing-facets', false],
   findPins: ['GET', '/listing-pins', false],
+  listSellerListings: ['GET', '/sellers/:sellerId/listings', false],
   searchListings: ['GET', '/listings', false],
   changeFarm: ['PATCH', '/sellers/mine', false],
   openFarm: ['POST', '/sellers', false],

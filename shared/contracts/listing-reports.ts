@@ -1,7 +1,7 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
-import { listingStates } from '@/shared/contracts/listings'
+import { listingStates, takeDownReasons } from '@/shared/contracts/listings'
 import { instantText, pageOf, publicIdText, words } from '@/shared/contracts/values'
 
 const MOST_WORDS = 600
@@ -16,18 +16,6 @@ export const reportReasons = [
   'other',
 ] as const
 export type ReportReason = (typeof reportReasons)[number]
-
-/** Why a moderator takes a listing off sale, as the seller is told; `other` needs words of its own. */
-export const takeDownReasons = [
-  'species-blocked',
-  'not-as-told',
-  'bad-state',
-  'unlawful',
-  'contact-details',
-  'wild-caught',
-  'other',
-] as const
-export type TakeDownReason = (typeof takeDownReasons)[number]
 
 const listingParams = z.object({ listingId: publicIdText })
 

@@ -16,6 +16,18 @@ export const listingStates = [
   'taken_down',
 ] as const
 
+/** Why a moderator takes a listing off sale, as the seller is told; `other` needs words of its own. */
+export const takeDownReasons = [
+  'species-blocked',
+  'not-as-told',
+  'bad-state',
+  'unlawful',
+  'contact-details',
+  'wild-caught',
+  'other',
+] as const
+export type TakeDownReason = (typeof takeDownReasons)[number]
+
 /** What a seller has typed so far: any part may be missing or not valid yet; the size is all that is checked. */
 export const listingDraft = z
   .record(z.string().max(40), z.unknown())
@@ -61,7 +73,9 @@ export const shownListing = z.object({
       alt: z.string(),
     }),
   ),
-  may: z.array(z.enum(['reserve', 'edit', 'review'])),
+  /** How many other listings this seller has on sale. */
+  alsoOnSale: z.int(),
+  may: z.array(z.enum(['reserve', 'edit', 'report', 'review'])),
 })
 export type ShownListing = z.output<typeof shownListing>
 
@@ -90,6 +104,7 @@ export const ownListing = z.object({
       reasonText: z.string().optional(),
     })
     .optional(),
+  takenDown: z.object({ reason: z.enum(takeDownReasons), note: z.string().optional() }).optional(),
   stock: z.object({
     free: z.int(),
     held: z.int(),

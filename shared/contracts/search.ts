@@ -1,7 +1,7 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
-import { cents, dayText, publicIdText, stateCode } from '@/shared/contracts/values'
+import { cents, dayText, pageOf, publicIdText, stateCode } from '@/shared/contracts/values'
 
 export const categories = ['fish', 'worms', 'media', 'produce'] as const
 export const searchSorts = ['nearest', 'cheapest', 'soonest', 'best-rated'] as const
@@ -60,6 +60,24 @@ export const foundListing = z.object({
   legal: z.object({ status: z.string(), buy: z.string() }),
 })
 export type FoundListing = z.output<typeof foundListing>
+
+/** A tag on a seller's page: without a place of the reader there is neither distance nor law to tell. */
+export const sellerListing = foundListing.partial({ distanceKm: true, bearing: true, legal: true })
+export type SellerListing = z.output<typeof sellerListing>
+
+export const listSellerListings = endpoint({
+  method: 'GET',
+  path: '/sellers/:sellerId/listings',
+  auth: 'public',
+  summary: 'What a seller has on sale now, the newest first; distance and legal status for the place given',
+  params: z.object({ sellerId: publicIdText }),
+  query: z.object({
+    near: searchFilters.shape.near.optional(),
+    limit: wholeNumber(1, 50).default(12),
+    cursor: z.string().max(400).optional(),
+  }),
+  reply: pageOf(sellerListing),
+})
 
 export const searchListings = endpoint({
   method: 'GET',

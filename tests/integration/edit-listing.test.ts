@@ -164,7 +164,7 @@ describe('pausing', () => {
     const paused = await selling('paused').expect(200)
     expect(paused.body).toMatchObject({ state: 'paused', may: ['edit', 'submit', 'resume'] })
     expect(await isFound(live)).toBe(false)
-    expect(await shown()).toMatchObject({ state: 'paused', may: [] })
+    expect(await shown()).toMatchObject({ state: 'paused', may: ['report'] })
     await selling('paused').expect(200)
     const again = await selling('live').expect(200)
     expect(again.body.state).toBe('live')

@@ -229,7 +229,7 @@ describe('the page of a batch', () => {
 
   it('offers nothing across a line where nobody has checked', async () => {
     const unsure = await page('blues', '47250').expect(200)
-    expect(unsure.body).toMatchObject({ may: [], gate: { buy: 'ask-moderators' } })
+    expect(unsure.body).toMatchObject({ may: ['report'], gate: { buy: 'ask-moderators' } })
   })
 
   it('says no to a place that does not exist, and knows nothing of other addresses', async () => {

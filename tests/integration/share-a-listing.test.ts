@@ -25,6 +25,7 @@ const listing: ShownListing = {
   photos: [
     { photoId: '0'.repeat(32), widthPx: 800, heightPx: 600, ground: '#112233', alt: 'Fish beside a ruler' },
   ],
+  alsoOnSale: 0,
   may: [],
 }
 

@@ -1,5 +1,5 @@
 import type { Letter, LetterBlock } from '@/server/mail/letter'
-import type { TakeDownReason } from '@/shared/contracts/listing-reports'
+import type { TakeDownReason } from '@/shared/contracts/listings'
 
 interface Told {
   to: { name: string; email: string }
