@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest'
 import {
   celsiusFromF,
   parseTemperatureC,
+  printBothSpans,
   printBothTemperatures,
   printTemperature,
 } from '@/shared/units/temperature'
@@ -30,5 +31,11 @@ describe('temperatures', () => {
     expect(printTemperature(-10, 'us')).toBe('14 °F')
     expect(printBothTemperatures(20, 'us')).toBe('68 °F (20 °C)')
     expect(printBothTemperatures(celsiusFromF(50), 'metric')).toBe('10 °C (50 °F)')
+  })
+
+  it('are told apart in both scales, without the 32 of a reading', () => {
+    expect(printBothSpans(5, 'us')).toBe('9 °F (5 °C)')
+    expect(printBothSpans(-2.8, 'metric')).toBe('3 °C (5 °F)')
+    expect(printBothSpans(0, 'us')).toBe('0 °F (0 °C)')
   })
 })

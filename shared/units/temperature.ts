@@ -20,6 +20,13 @@ export function printBothTemperatures(degreesC: number, units: UnitSystem): stri
   return `${printTemperature(degreesC, units)} (${printTemperature(degreesC, other)})`
 }
 
+/** How far two temperatures lie apart, in both scales: '9 °F (5 °C)'. The sign is the caller's to say. */
+export function printBothSpans(spanC: number, units: UnitSystem): string {
+  const apart = Math.abs(spanC)
+  const [us, metric] = [`${roundTo(apart * 1.8, 1)} °F`, `${roundTo(apart, 0.5)} °C`]
+  return units === 'us' ? `${us} (${metric})` : `${metric} (${us})`
+}
+
 /** '68', '68 F', '20 °C' → °C; a bare number is read in `units`. null: not readable or outside −60…100 °C. */
 export function parseTemperatureC(text: string, units: UnitSystem): number | null {
   const parts = shape.exec(text.trim().toLowerCase())

@@ -203,7 +203,7 @@ describe('the page of a batch', () => {
 
   it('shows facts without a way to buy where it may not be sold, with rule, source and date', async () => {
     const { body } = await page('mozambique', '47250').expect(200)
-    expect(body.may).toEqual([])
+    expect(body.may).toEqual(['report'])
     expect(body.gate).toMatchObject({
       status: 'prohibited',
       buy: 'no',
