@@ -4,7 +4,7 @@ import { pickupDay } from '@/components/listings/pickup-words'
 import { stageName } from '@/components/listings/stage-words'
 import { legalWords } from '@/components/rules/legal-words'
 import { photoUrl } from '@/hooks/api'
-import type { FoundListing } from '@/shared/contracts/search'
+import type { SellerListing } from '@/shared/contracts/search'
 import { printCount } from '@/shared/units/count'
 import { aboutDistance } from '@/shared/units/distance'
 import { printLengthRange } from '@/shared/units/length'
@@ -32,8 +32,8 @@ export const categoryIcons: Record<Category, IconName> = {
   produce: 'leaf',
 }
 
-/** A found listing as its tag reads. */
-export function foundFacts(found: FoundListing, asked: Asked): TagFacts {
+/** A found listing as its tag reads; on a seller's page the reader's place may not be known. */
+export function foundFacts(found: SellerListing, asked: Asked): TagFacts {
   const { units, count, state, near } = asked
   const isTotal = count !== undefined && found.totalCents !== undefined
   return {
@@ -68,19 +68,20 @@ export function foundFacts(found: FoundListing, asked: Asked): TagFacts {
 }
 
 // Both in one cell: there is no direction to tell.
-function distanceText({ distanceKm, bearing }: FoundListing, units: UnitSystem): string {
+function distanceText({ distanceKm, bearing }: SellerListing, units: UnitSystem): string | undefined {
+  if (distanceKm === undefined) return undefined
   const about = aboutDistance(distanceKm, units)
-  return bearing === 'here' ? about : `${about} ${bearing}`
+  return bearing === undefined || bearing === 'here' ? about : `${about} ${bearing}`
 }
 
-function sizeText({ sizeLoMm, sizeHiMm }: FoundListing, units: UnitSystem): string {
+function sizeText({ sizeLoMm, sizeHiMm }: SellerListing, units: UnitSystem): string {
   if (sizeLoMm === undefined || sizeHiMm === undefined) return ''
   return printLengthRange({ minCm: sizeLoMm / 10, maxCm: sizeHiMm / 10 }, units)
 }
 
-function badges(found: FoundListing, { count, state }: Asked): TagBadge[] {
+function badges(found: SellerListing, { count, state }: Asked): TagBadge[] {
   const told: TagBadge[] = []
-  if (state) told.push(legalWords(found.legal.status, state))
+  if (state && found.legal) told.push(legalWords(found.legal.status, state))
   if (found.rating) {
     const { mean, count: ratings } = found.rating
     told.push({ word: `${mean.toFixed(1)} of 5 (${printCount(ratings)})`, tone: 'neutral', icon: 'star' })

@@ -9,6 +9,7 @@ import { pageFacts } from './page-facts'
 import { PhotoStrip } from './photo-strip'
 import { PickupWindows } from './pickup-windows'
 import { PriceTable } from './price-table'
+import { ReportListing } from './report-listing'
 import type { Refusal } from './selling-state'
 import { Tag } from './tag'
 
@@ -43,6 +44,10 @@ interface Props {
 
 const TripCheck = lazy(() =>
   import('@/components/tools/tools-group').then((group) => ({ default: group.TripCheck })),
+)
+
+const YourWater = lazy(() =>
+  import('@/components/tools/tools-group').then((group) => ({ default: group.YourWater })),
 )
 
 export function ListingStory(props: Props) {
@@ -85,6 +90,9 @@ export function ListingStory(props: Props) {
               </LazyPart>
             ) : null}
             <BatchFacts body={body} />
+            <LazyPart label="Loading the waters">
+              <YourWater water={body.water} />
+            </LazyPart>
             <MoneyTerms body={body} />
             <ArrivalPromise promise={body.promise} />
             <CautionList cautions={listingCautions(gate)} />
@@ -114,7 +122,8 @@ export function ListingStory(props: Props) {
               />
             </Card>
             {isLawful ? legal : null}
-            <SellerSummary seller={listing.seller} />
+            <SellerSummary seller={listing.seller} alsoOnSale={listing.alsoOnSale} />
+            <ReportListing listing={listing} />
           </>
         }
       />

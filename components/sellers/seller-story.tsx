@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
+import { OnSaleNow } from './on-sale-now'
 import { answerWords, licenceWords, ratingWords, sinceWords } from './seller-words'
 
 import { FactRows } from '@/components/listings/fact-rows'
@@ -43,6 +44,7 @@ export function SellerStory({ seller }: { seller: ShownSeller }) {
           <Text>{seller.about}</Text>
         </Card>
       ) : null}
+      <OnSaleNow sellerId={seller.sellerId} />
       <FactRows
         title="Record"
         facts={[

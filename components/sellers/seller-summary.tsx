@@ -10,11 +10,19 @@ import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import type { SellerCard } from '@/shared/contracts/sellers'
+import { printCount } from '@/shared/units/count'
+
+interface Props {
+  seller: SellerCard
+  /** How many other listings of theirs can be found now. */
+  alsoOnSale: number
+}
 
 /** Who sells, on a listing: the record, and the way to the whole page. */
-export function SellerSummary({ seller }: { seller: SellerCard }) {
+export function SellerSummary({ seller, alsoOnSale }: Props) {
   const answers = answerWords(seller)
   const survival = survivalWords(seller.survival)
+  const more = alsoOnSale > 0 ? `${printCount(alsoOnSale)} more from this farm` : 'More about this farm'
   return (
     <Card>
       <Heading level={2} size="lead">
@@ -33,8 +41,8 @@ export function SellerSummary({ seller }: { seller: SellerCard }) {
         kind="quiet"
         icon="forward"
         href={{ pathname: '/sellers/[sellerId]', params: { sellerId: seller.sellerId } }}
-        label="More about this farm"
-        spokenLabel={`More about this farm: ${seller.farmName}`}
+        label={more}
+        spokenLabel={`${more}: ${seller.farmName}`}
       />
     </Card>
   )
