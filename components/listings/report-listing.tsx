@@ -27,9 +27,7 @@ export function ReportListing({ listing }: { listing: ShownListing }) {
   const signIn: Href = { pathname: '/sign-in', params: { returnTo: `/listings/${listingId}` } }
   return (
     <View>
-      {me ? (
-        <Button kind="quiet" icon="warn" label="Report this listing" onPress={() => setIsOpen(true)} />
-      ) : (
+      {me === null ? (
         <ButtonLink
           kind="quiet"
           icon="warn"
@@ -37,6 +35,8 @@ export function ReportListing({ listing }: { listing: ShownListing }) {
           spokenLabel="Report this listing: sign in first"
           href={signIn}
         />
+      ) : (
+        <Button kind="quiet" icon="warn" label="Report this listing" onPress={() => setIsOpen(true)} />
       )}
       {isOpen ? (
         <ReportSheet

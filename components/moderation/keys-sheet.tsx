@@ -16,10 +16,12 @@ const keys: readonly [string, string][] = [
   ['a', 'Approve; Enter confirms'],
   ['s', 'Ask the seller'],
   ['r', 'Reject'],
-  ['1 to 9, 0', 'Choose the reason while asking or rejecting'],
+  ['1 to 9, 0', 'Choose the reason while you decide'],
   ['Ctrl Enter', 'Send the decision while you write'],
   ['d', 'Jump to what changed'],
   ['u', 'Back up to the queue'],
+  ['w', 'Nothing wrong, on a reported listing'],
+  ['t', 'Take off sale, on a reported listing'],
   ['?', 'These keys'],
 ]
 

@@ -1,3 +1,3 @@
 // The lazily loaded group of the moderation desk: one chunk, imported only through lazy().
-export { ReviewQueue } from './review-queue'
+export { ModerationHome } from './moderation-home'
 export { ReviewScreen } from './review-screen'

@@ -61,7 +61,7 @@ function RowLink({ row }: { row: ReviewRow }) {
   return (
     <PressLink
       href={{ pathname: '/moderate/listings/[versionId]', params: { versionId: row.versionId } }}
-      nativeID={`review-${row.versionId}`}
+      nativeID={`desk-row-${row.versionId}`}
       look={() => styles.link}
     >
       <View>

@@ -24,7 +24,7 @@ export function QueueTag({ row, nowMs }: Props) {
     <View role="listitem">
       <PressLink
         href={{ pathname: '/moderate/listings/[versionId]', params: { versionId: row.versionId } }}
-        nativeID={`review-${row.versionId}`}
+        nativeID={`desk-row-${row.versionId}`}
         look={() => styles.link}
         onHotChange={setIsHot}
       >

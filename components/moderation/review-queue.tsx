@@ -1,12 +1,8 @@
-import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 
 import { DeskFault } from './desk-fault'
-import { KeysSheet } from './keys-sheet'
 import { QueueTable } from './queue-table'
 import { QueueTag } from './queue-tag'
-import { stepThrough } from './step-through'
-import { useDeskKeys } from './use-desk-keys'
 
 import { TagSkeleton } from '@/components/listings/tag-skeleton'
 import { Button } from '@/components/ui/button'
@@ -16,16 +12,15 @@ import { space } from '@/constants/theme'
 import { useBreakpoint } from '@/hooks/use-breakpoint'
 import { useReviewQueue } from '@/hooks/use-moderation'
 
+interface Props {
+  nowMs: number
+  onKeys: () => void
+}
+
 /** What waits for a decision, the riskiest first. */
-export function ReviewQueue() {
+export function ReviewQueue({ nowMs, onKeys }: Props) {
   const query = useReviewQueue()
   const isPhone = useBreakpoint() === 'phone'
-  const [hasKeys, setHasKeys] = useState(false)
-  // Read once a drawing: ages are to the minute, and the queue is asked again when the page comes into view.
-  const [nowMs] = useState(() => Date.now())
-  const down = () => stepThrough('review-', 1)
-  const up = () => stepThrough('review-', -1)
-  useDeskKeys({ j: down, n: down, k: up, p: up, '?': () => setHasKeys(true) }, !hasKeys)
   if (query.isPending) return <TagSkeleton label="Loading the queue" count={4} />
   if (!query.data) {
     return (
@@ -55,9 +50,9 @@ export function ReviewQueue() {
           <QueueTable rows={rows} nowMs={nowMs} />
           <View style={styles.foot}>
             <Text size="small" tint="muted">
-              j and k move through the queue, Enter opens.
+              j and k move through both lists, Enter opens.
             </Text>
-            <Button kind="quiet" label="All keys (?)" onPress={() => setHasKeys(true)} />
+            <Button kind="quiet" label="All keys (?)" onPress={onKeys} />
           </View>
         </>
       )}
@@ -70,7 +65,6 @@ export function ReviewQueue() {
           onPress={() => void query.fetchNextPage()}
         />
       ) : null}
-      <KeysSheet isOpen={hasKeys} onClose={() => setHasKeys(false)} />
     </View>
   )
 }

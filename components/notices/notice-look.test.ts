@@ -12,6 +12,9 @@ describe('a notice on the screen', () => {
     expect(noticeHref({ kind: 'listing-asked', about: { noun: 'listing', id: 'l1' } })).toBe(
       '/sell/listings/l1',
     )
+    expect(noticeHref({ kind: 'listing-taken-down', about: { noun: 'listing', id: 'l1' } })).toBe(
+      '/sell/listings/l1/manage',
+    )
   })
 
   it('counts on the bell in at most two digits', () => {

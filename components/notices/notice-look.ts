@@ -28,6 +28,8 @@ export const noticeIcon = (kind: NoticeKind): IconName => icons[kind]
 /** Where a notice leads: its order, the listing as everybody sees it, or the listing on the seller's own desk. */
 export function noticeHref({ about, kind }: Pick<ShownNotice, 'about' | 'kind'>) {
   if (about.noun === 'order') return `/orders/${about.id}` as const
+  // A listing off sale has no form any more: its desk says why.
+  if (kind === 'listing-taken-down') return `/sell/listings/${about.id}/manage` as const
   return kind === 'listing-approved'
     ? (`/listings/${about.id}` as const)
     : (`/sell/listings/${about.id}` as const)

@@ -6,6 +6,7 @@ import { ReviewOutcome } from './review-outcome'
 import { SellerGate } from './seller-gate'
 import { SellingActs } from './selling-acts'
 import { StockCard } from './stock-card'
+import { TakenDown } from './taken-down'
 import { WindowsCard } from './windows-card'
 
 import { Tag } from '@/components/listings/tag'
@@ -29,6 +30,7 @@ function Desk({ own }: { own: OwnListing }) {
     <View style={styles.frame}>
       <Tag size="row" level={2} facts={{ ...ownFacts(own, units), href: undefined }} />
       <ReviewOutcome own={own} />
+      <TakenDown own={own} />
       <TwoColumns
         sideLabel="What you can do"
         isSideFirst

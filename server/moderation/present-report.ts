@@ -1,6 +1,7 @@
 import type { ReportRow } from '@/server/moderation/report-store'
 import { reportReasons, type MadeReport } from '@/shared/contracts/listing-reports'
-import { takeDownReasons, type OwnListing } from '@/shared/contracts/listings'
+import type { OwnListing } from '@/shared/contracts/listings'
+import { takeDownReasons } from '@/shared/domain/listings/take-down-words'
 
 const isReason = (text: string): text is MadeReport['reason'] =>
   (reportReasons as readonly string[]).includes(text)

@@ -1,8 +1,9 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
-import { listingStates, takeDownReasons } from '@/shared/contracts/listings'
+import { listingStates } from '@/shared/contracts/listings'
 import { instantText, pageOf, publicIdText, words } from '@/shared/contracts/values'
+import { takeDownReasons } from '@/shared/domain/listings/take-down-words'
 
 const MOST_WORDS = 600
 

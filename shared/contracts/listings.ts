@@ -5,6 +5,7 @@ import { fishBody } from '@/shared/contracts/fish-batch'
 import { gateVerdict } from '@/shared/contracts/rules'
 import { sellerCard } from '@/shared/contracts/sellers'
 import { instantText, line, pageOf, publicIdText } from '@/shared/contracts/values'
+import { takeDownReasons } from '@/shared/domain/listings/take-down-words'
 
 export const listingStates = [
   'draft',
@@ -15,18 +16,6 @@ export const listingStates = [
   'expired',
   'taken_down',
 ] as const
-
-/** Why a moderator takes a listing off sale, as the seller is told; `other` needs words of its own. */
-export const takeDownReasons = [
-  'species-blocked',
-  'not-as-told',
-  'bad-state',
-  'unlawful',
-  'contact-details',
-  'wild-caught',
-  'other',
-] as const
-export type TakeDownReason = (typeof takeDownReasons)[number]
 
 /** What a seller has typed so far: any part may be missing or not valid yet; the size is all that is checked. */
 export const listingDraft = z

@@ -46,8 +46,8 @@ beforeEach(async () => {
 afterAll(() => desk.close())
 
 const live = () => liveListing(ann, mo)
-const report = (agent: TestAgent, listingId: string, body: object = notAsTold, key?: string) =>
-  agent.post(`/api/v1/listings/${listingId}/reports`).set(keyed(key)).send(body)
+const report = (agent: TestAgent, listingId: string, body: object = notAsTold) =>
+  agent.post(`/api/v1/listings/${listingId}/reports`).set(keyed()).send(body)
 const reported = async (agent = mo): Promise<ReportedListing[]> =>
   (await agent.get(desks).query({ limit: 50 }).expect(200)).body.items
 const rowOf = async (listingId: string, agent = mo) =>

@@ -1,5 +1,5 @@
 import type { Letter, LetterBlock } from '@/server/mail/letter'
-import type { TakeDownReason } from '@/shared/contracts/listings'
+import { takeDownWords, type TakeDownReason } from '@/shared/domain/listings/take-down-words'
 
 interface Told {
   to: { name: string; email: string }
@@ -8,16 +8,6 @@ interface Told {
   reason: TakeDownReason
   note?: string | undefined
   openOrders: number
-}
-
-const reasonWords: Record<TakeDownReason, string> = {
-  'species-blocked': 'We do not list this species. That is our policy for everyone.',
-  'not-as-told': 'What is offered is not what the listing says.',
-  'bad-state': 'The animals seem to be in a bad state.',
-  unlawful: 'The offer is not lawful, or not safe for people or animals.',
-  'contact-details': 'The listing leads buyers around this site.',
-  'wild-caught': 'Wild-caught animals are not listed here.',
-  other: '',
 }
 
 function ordersWords(openOrders: number): string {
@@ -29,7 +19,7 @@ function ordersWords(openOrders: number): string {
 
 /** Tells the seller that a moderator took a listing off sale, why, and what becomes of its orders. */
 export function takenDownMail(told: Told): Letter {
-  const why = reasonWords[told.reason]
+  const why = takeDownWords[told.reason]
   const rows: [string, string][] = [
     ['Listing', told.title],
     ...(why ? [['Why', why] as [string, string]] : []),
