@@ -15,7 +15,7 @@ import { useToast } from '@/components/ui/toast'
 import { useDismissReports, useReportedListings, useTakeDownListing } from '@/hooks/use-reported-listings'
 import { Problem } from '@/shared/api/problem'
 import type { ReportedListing } from '@/shared/contracts/listing-reports'
-import type { TakeDownReason } from '@/shared/domain/listings/take-down-words'
+import type { TakeDownReason } from '@/shared/domain/listings/take-down-reasons'
 
 export type ReportAct = 'dismiss' | 'take-down'
 

@@ -1,6 +1,6 @@
 import type { Choice } from '@/components/ui/choice'
 import type { ReportReason } from '@/shared/contracts/listing-reports'
-import type { TakeDownReason } from '@/shared/domain/listings/take-down-words'
+import type { TakeDownReason } from '@/shared/domain/listings/take-down-reasons'
 
 /** What a member says is wrong, as the desk reads it. */
 export const reportLabels: Record<ReportReason, string> = {

@@ -1,18 +1,24 @@
 import { StyleSheet, View } from 'react-native'
 
-import { adviceWords, differenceWords, figureNames, printFigure, verdictWords } from './water-words'
+import {
+  adviceWords,
+  differenceWords,
+  figureNames,
+  groundsWords,
+  printFigure,
+  verdictWords,
+} from './water-words'
 
 import { Badge } from '@/components/ui/badge'
 import { Text } from '@/components/ui/text'
 import { color, space } from '@/constants/theme'
 import { useUnits } from '@/hooks/use-units'
 import type { FigureMatch } from '@/shared/domain/water/compare-waters'
-import { printSource } from '@/shared/sources'
 
 /** One figure: theirs, yours, how far apart, the verdict as a word, what to do, and by whose limit. */
 export function FigureRow({ match }: { match: FigureMatch }) {
   const units = useUnits()
-  const { figure, theirs, yours, verdict, sourceKeys } = match
+  const { figure, theirs, yours, verdict } = match
   const { word, tone } = verdictWords[verdict]
   return (
     <View role="listitem" style={styles.row}>
@@ -25,7 +31,7 @@ export function FigureRow({ match }: { match: FigureMatch }) {
       </Text>
       <Text>{adviceWords(match, units)}</Text>
       <Text size="small" tint="muted">
-        {sourceKeys.map(printSource).join('; ')}
+        {groundsWords(match)}
       </Text>
     </View>
   )

@@ -1,6 +1,13 @@
 import { describe, expect, it } from 'vitest'
 
-import { adviceWords, differenceWords, printFigure, readFigure, typedFigure } from './water-words'
+import {
+  adviceWords,
+  differenceWords,
+  groundsWords,
+  printFigure,
+  readFigure,
+  typedFigure,
+} from './water-words'
 
 import { compareWaters } from '@/shared/domain/water/compare-waters'
 
@@ -8,7 +15,11 @@ const theirs = { waterC: 20, pH: 7, khPpm: 100 }
 const told = (yours: object) => {
   const [row] = compareWaters(theirs, yours)
   if (!row) throw new Error('nothing was compared')
-  return { difference: differenceWords(row, 'us'), advice: adviceWords(row, 'us') }
+  return {
+    difference: differenceWords(row, 'us'),
+    advice: adviceWords(row, 'us'),
+    grounds: groundsWords(row),
+  }
 }
 
 describe('two waters in words', () => {
@@ -27,10 +38,16 @@ describe('two waters in words', () => {
       'Take at least 1 h 30 min: no faster than 9 °F (5 °C) an hour.',
     )
     expect(told({ waterC: 31 }).advice).toMatch(/^More than 18 °F \(10 °C\)/)
-    expect(told({ pH: 7.8 }).advice).toMatch(/^Take at least 45 minutes: 0.3 in a quarter/)
+    expect(told({ pH: 7.8 }).advice).toMatch(/^Take at least 45 minutes: 0.3 in 15 minutes/)
     expect(told({ pH: 9 }).advice).toMatch(/^Do not let them go/)
     expect(told({ khPpm: 40 }).advice).toMatch(/^Below 60 ppm/)
     expect(told({ khPpm: 400 }).advice).toMatch(/^Add a little/)
+  })
+
+  it('tell what is published from what is our own judgement', () => {
+    expect(told({ waterC: 22 }).grounds).toBe('House rule: our own cautious judgement')
+    expect(told({ waterC: 30 }).grounds).toMatch(/^That it matters: LSU AgCenter.* fast: House rule/)
+    expect(told({ pH: 9 }).grounds).toMatch(/^House rule/)
   })
 
   it('read what is typed in the reader’s units, and nothing that is no water', () => {

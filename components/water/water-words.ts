@@ -5,6 +5,8 @@ import {
   type MatchVerdict,
   type WaterFigure,
 } from '@/shared/domain/water/compare-waters'
+import { waterMatch } from '@/shared/domain/water/water-match.facts'
+import { printSource } from '@/shared/sources'
 import { printCount } from '@/shared/units/count'
 import { parseHardnessPpm } from '@/shared/units/hardness'
 import { readNumber } from '@/shared/units/read-number'
@@ -57,6 +59,7 @@ function timeWords(minutes: number | null): string {
 
 /** What to do about one figure, in a sentence or two. */
 export function adviceWords({ figure, verdict, minutes, limit }: FigureMatch, units: UnitSystem): string {
+  const { stepPH, stepMinutes } = waterMatch
   const time = timeWords(minutes)
   if (verdict === 'match') return 'Nothing to do for this one.'
   if (verdict === 'too-soft') {
@@ -65,16 +68,24 @@ export function adviceWords({ figure, verdict, minutes, limit }: FigureMatch, un
   if (figure === 'waterC') {
     if (verdict === 'float') return `Float the closed bag in your tank for ${time}.`
     if (verdict === 'slowly') {
-      return `Take at least ${time}: no faster than ${printBothSpans(5, units)} an hour.`
+      return `Take at least ${time}: no faster than ${printBothSpans(waterMatch.ratePerHourC.value, units)} an hour.`
     }
     return `More than ${printBothSpans(limit, units)} is too much in one day. Bring your tank nearer before you collect.`
   }
   if (figure === 'pH') {
     return verdict === 'slowly'
-      ? `Take at least ${time}: 0.3 in a quarter of an hour, by adding a little of your water at a time.`
+      ? `Take at least ${time}: ${stepPH.value} in ${stepMinutes.value} minutes, by adding a little of your water at a time.`
       : 'Do not let them go into it. Bring your tank nearer some days before you collect, or ask the grower.'
   }
   return 'Add a little of your water at a time. Nobody has published how fast is right.'
+}
+
+/** By whose word: what is published, and what is our own judgement. */
+export function groundsWords({ sourceKey, needSourceKey }: FigureMatch): string {
+  const pace = printSource(sourceKey)
+  return needSourceKey
+    ? `That it matters: ${printSource(needSourceKey)}. How far and how fast: ${pace}`
+    : pace
 }
 
 /** A figure as typed, in the fixed unit. null: not readable, or no such water. */

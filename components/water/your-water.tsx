@@ -15,9 +15,7 @@ import { useUnits } from '@/hooks/use-units'
 import type { ListingBody } from '@/shared/contracts/listings'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import { compareWaters, type WaterFigure } from '@/shared/domain/water/compare-waters'
-
-/** Hours in a closed bag beyond which slow mixing does harm (house rule, between sellers who disagree). */
-const SEALED_HOURS = '6'
+import { waterMatch } from '@/shared/domain/water/water-match.facts'
 
 const asked: Record<WaterFigure, { label: string; us: string; metric: string; error: string }> = {
   waterC: {
@@ -67,7 +65,7 @@ export function YourWater({ water }: { water: ListingBody['water'] }) {
               <FigureRow key={match.figure} match={match} />
             ))}
           </View>
-          <Text size="note">{fillCaution('G-8', { hours: SEALED_HOURS })}</Text>
+          <Text size="note">{fillCaution('G-8', { hours: String(waterMatch.sealedHours.value) })}</Text>
           <View style={styles.acts}>
             <Button kind="quiet" label="Forget my figures" onPress={forget} />
           </View>

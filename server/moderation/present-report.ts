@@ -1,7 +1,7 @@
 import type { ReportRow } from '@/server/moderation/report-store'
 import { reportReasons, type MadeReport } from '@/shared/contracts/listing-reports'
 import type { OwnListing } from '@/shared/contracts/listings'
-import { takeDownReasons } from '@/shared/domain/listings/take-down-words'
+import { takeDownReasons } from '@/shared/domain/listings/take-down-reasons'
 
 const isReason = (text: string): text is MadeReport['reason'] =>
   (reportReasons as readonly string[]).includes(text)

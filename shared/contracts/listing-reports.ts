@@ -3,7 +3,7 @@ import { z } from 'zod'
 import { endpoint } from '@/shared/api/endpoint'
 import { listingStates } from '@/shared/contracts/listings'
 import { instantText, pageOf, publicIdText, words } from '@/shared/contracts/values'
-import { takeDownReasons } from '@/shared/domain/listings/take-down-words'
+import { takeDownReasons } from '@/shared/domain/listings/take-down-reasons'
 
 const MOST_WORDS = 600
 

@@ -5,7 +5,7 @@ import { fishBody } from '@/shared/contracts/fish-batch'
 import { gateVerdict } from '@/shared/contracts/rules'
 import { sellerCard } from '@/shared/contracts/sellers'
 import { instantText, line, pageOf, publicIdText } from '@/shared/contracts/values'
-import { takeDownReasons } from '@/shared/domain/listings/take-down-words'
+import { takeDownReasons } from '@/shared/domain/listings/take-down-reasons'
 
 export const listingStates = [
   'draft',

@@ -1,5 +1,6 @@
 import type { Letter, LetterBlock } from '@/server/mail/letter'
-import { takeDownWords, type TakeDownReason } from '@/shared/domain/listings/take-down-words'
+import type { TakeDownReason } from '@/shared/domain/listings/take-down-reasons'
+import { takeDownWords } from '@/shared/domain/listings/take-down-words'
 
 interface Told {
   to: { name: string; email: string }

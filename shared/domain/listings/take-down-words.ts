@@ -1,14 +1,4 @@
-/** Why a moderator takes a listing off sale; `other` needs words of its own. */
-export const takeDownReasons = [
-  'species-blocked',
-  'not-as-told',
-  'bad-state',
-  'unlawful',
-  'contact-details',
-  'wild-caught',
-  'other',
-] as const
-export type TakeDownReason = (typeof takeDownReasons)[number]
+import type { TakeDownReason } from '@/shared/domain/listings/take-down-reasons'
 
 /** As the seller is told, by mail and on the desk. '' where the moderator's own words say it. */
 export const takeDownWords: Readonly<Record<TakeDownReason, string>> = {

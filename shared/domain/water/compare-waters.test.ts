@@ -33,8 +33,9 @@ describe('temperatures held against each other', () => {
   })
 
   it('names the published limit from 5 °F on, and the house rule alone below', () => {
-    expect(one({ waterC: 22.8 })?.sourceKeys).toEqual(['house-rule'])
-    expect(one({ waterC: 22.81 })?.sourceKeys).toEqual(['lsu-cocahoe', 'house-rule'])
+    expect(one({ waterC: 22.8 })).toMatchObject({ sourceKey: 'house-rule', needSourceKey: null })
+    expect(one({ waterC: 22.81 })).toMatchObject({ sourceKey: 'house-rule', needSourceKey: 'lsu-cocahoe' })
+    expect(one({ pH: 9 })?.needSourceKey).toBeNull()
     // 5 °F is 2.78 °C: the limit is that figure to a tenth, and ours stands below it.
     expect(waterMatch.temperFromC.value).toBeCloseTo(5 / 1.8, 1)
     expect(waterMatch.releaseC.value).toBeLessThan(waterMatch.temperFromC.value)
@@ -93,6 +94,6 @@ describe('waters', () => {
   it('rest on limits that each have a source', () => {
     for (const { sourceKey } of Object.values(waterMatch)) expect(sources).toHaveProperty(sourceKey)
     const all = compareWaters(theirs, { waterC: 26, pH: 8, khPpm: 40 })
-    for (const { sourceKeys } of all) expect(sourceKeys.length).toBeGreaterThan(0)
+    expect(all.map(({ sourceKey }) => Object.hasOwn(sources, sourceKey))).toEqual([true, true, true])
   })
 })

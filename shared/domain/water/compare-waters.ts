@@ -24,55 +24,43 @@ export interface FigureMatch {
   minutes: number | null
   /** What the figure was held against. */
   limit: number
-  sourceKeys: readonly SourceKey[]
+  /** Where limit and pace come from. */
+  sourceKey: SourceKey
+  /** Who has published that animals must get used to so great a difference; null: nobody that we have read. */
+  needSourceKey: SourceKey | null
 }
 
-type Judged = Pick<FigureMatch, 'verdict' | 'minutes' | 'limit' | 'sourceKeys'>
+type Judged = Pick<FigureMatch, 'verdict' | 'minutes' | 'limit' | 'sourceKey'>
 
 /** Figures are typed in °F and °C: the last bits of a conversion decide nothing. */
 const EXACT = 0.001
 const MINUTES_AN_HOUR = 60
 
-const by = (...limits: { sourceKey: SourceKey }[]): SourceKey[] => [
-  ...new Set(limits.map(({ sourceKey }) => sourceKey)),
-]
+const judged = (
+  verdict: MatchVerdict,
+  { value: limit, sourceKey }: { value: number; sourceKey: SourceKey },
+  minutes: number | null = null,
+): Judged => ({ verdict, minutes, limit, sourceKey })
 
 function judgeTemperature(apart: number): Judged {
-  const { releaseC, temperFromC, floatC, floatMinutes, ratePerHourC, mostC } = waterMatch
-  const published = apart > temperFromC.value ? [temperFromC] : []
-  if (apart <= releaseC.value) {
-    return { verdict: 'match', minutes: null, limit: releaseC.value, sourceKeys: by(releaseC) }
-  }
-  if (apart <= floatC.value) {
-    const sourceKeys = by(...published, floatC, floatMinutes)
-    return { verdict: 'float', minutes: floatMinutes.value, limit: releaseC.value, sourceKeys }
-  }
-  if (apart <= mostC.value) {
-    const minutes = Math.ceil(roundTo((apart / ratePerHourC.value) * MINUTES_AN_HOUR, EXACT))
-    return { verdict: 'slowly', minutes, limit: floatC.value, sourceKeys: by(...published, ratePerHourC) }
-  }
-  return { verdict: 'too-far', minutes: null, limit: mostC.value, sourceKeys: by(...published, mostC) }
+  const { releaseC, floatC, floatMinutes, ratePerHourC, mostC } = waterMatch
+  if (apart <= releaseC.value) return judged('match', releaseC)
+  if (apart <= floatC.value) return judged('float', releaseC, floatMinutes.value)
+  if (apart > mostC.value) return judged('too-far', mostC)
+  return judged('slowly', floatC, Math.ceil(roundTo((apart / ratePerHourC.value) * MINUTES_AN_HOUR, EXACT)))
 }
 
 function judgePH(apart: number): Judged {
   const { releasePH, stepPH, stepMinutes, mostPH } = waterMatch
-  if (apart <= releasePH.value) {
-    return { verdict: 'match', minutes: null, limit: releasePH.value, sourceKeys: by(releasePH) }
-  }
-  if (apart <= mostPH.value) {
-    const minutes = Math.ceil(roundTo(apart / stepPH.value, EXACT)) * stepMinutes.value
-    return { verdict: 'slowly', minutes, limit: releasePH.value, sourceKeys: by(releasePH, stepPH) }
-  }
-  return { verdict: 'too-far', minutes: null, limit: mostPH.value, sourceKeys: by(mostPH) }
+  if (apart <= releasePH.value) return judged('match', releasePH)
+  if (apart > mostPH.value) return judged('too-far', mostPH)
+  return judged('slowly', releasePH, Math.ceil(roundTo(apart / stepPH.value, EXACT)) * stepMinutes.value)
 }
 
 function judgeHardness(apart: number, yours: number): Judged {
   const { leastKhPpm, releaseKhPpm } = waterMatch
-  if (yours < leastKhPpm.value) {
-    return { verdict: 'too-soft', minutes: null, limit: leastKhPpm.value, sourceKeys: by(leastKhPpm) }
-  }
-  const verdict = apart <= releaseKhPpm.value ? 'match' : 'slowly'
-  return { verdict, minutes: null, limit: releaseKhPpm.value, sourceKeys: by(releaseKhPpm) }
+  if (yours < leastKhPpm.value) return judged('too-soft', leastKhPpm)
+  return judged(apart <= releaseKhPpm.value ? 'match' : 'slowly', releaseKhPpm)
 }
 
 /** Whether a figure can be one of fresh water that animals live in: 0-45 °C, pH 3-11, 0-1,000 ppm. */
@@ -92,12 +80,13 @@ export function compareWaters(theirs: Water, yours: Partial<Water>): FigureMatch
     if (to === undefined || !isWaterFigure(figure, from) || !isWaterFigure(figure, to)) return []
     const difference = roundTo(to - from, EXACT)
     const apart = Math.abs(difference)
-    const judged =
-      figure === 'waterC'
-        ? judgeTemperature(apart)
-        : figure === 'pH'
-          ? judgePH(apart)
-          : judgeHardness(apart, to)
-    return [{ figure, theirs: from, yours: to, difference, ...judged }]
+    const judgement = {
+      waterC: () => judgeTemperature(apart),
+      pH: () => judgePH(apart),
+      khPpm: () => judgeHardness(apart, to),
+    }[figure]()
+    const { value, sourceKey } = waterMatch.temperFromC
+    const needSourceKey = figure === 'waterC' && apart > value ? sourceKey : null
+    return [{ figure, theirs: from, yours: to, difference, needSourceKey, ...judgement }]
   })
 }

@@ -23,6 +23,8 @@ export const waterMatch = {
   ratePerHourC: limit(5, 'house-rule'),
   /** °C apart beyond which one's own water is brought nearer first. */
   mostC: limit(10, 'house-rule'),
+  /** Hours in a closed bag beyond which slow mixing does harm: sellers disagree, this is ours. */
+  sealedHours: limit(6, 'house-rule'),
   /** pH apart up to which they may be let go. */
   releasePH: limit(0.5, 'house-rule'),
   /** pH in a quarter of an hour beyond that. */
