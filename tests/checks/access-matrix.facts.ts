@@ -122,6 +122,15 @@ export const accessMatrix: AccessRow[] = [
   // An empty task is refused field by field, whoever sends it.
   { route: 'makePackingSheet', object: 'none', send: {}, own: '422 422 422 422 422 422 422 422' },
   { route: 'readSeller', object: 'seller', own: everybody, missing: nobody },
+  { route: 'listSellerListings', object: 'seller', query: 'near=45202', own: everybody, missing: nobody },
+  {
+    route: 'reportListing',
+    object: 'public-listing',
+    send: { reason: 'unlawful' },
+    own: '401 201 409 201 201 201 201 201',
+    foreign: nobodySignedIn,
+    missing: nobodySignedIn,
+  },
 
   { route: 'openFarm', object: 'none', send: unknownZip, own: '401 422 422 422 422 422 422 422' },
   { route: 'readOwnFarm', object: 'none', own: '401 403 200 200 403 403 403 403' },
@@ -221,6 +230,24 @@ export const accessMatrix: AccessRow[] = [
     object: 'version',
     send: { decision: 'approve' },
     own: staffOn('409'),
+    missing: staffOn('404'),
+  },
+  { route: 'listReportedListings', object: 'none', own: staffOn('200') },
+  // Read up to long ago: what was reported since is not decided.
+  {
+    route: 'dismissReports',
+    object: 'public-listing',
+    send: { seenUntil: '2020-01-01T00:00:00.000Z' },
+    own: staffOn('409'),
+    foreign: staffOn('409'),
+    missing: staffOn('404'),
+  },
+  // Asked of the hidden listing alone, which nobody has reported.
+  {
+    route: 'takeDownListing',
+    object: 'public-listing',
+    send: { reason: 'unlawful' },
+    foreign: staffOn('409'),
     missing: staffOn('404'),
   },
 

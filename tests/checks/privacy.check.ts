@@ -128,7 +128,8 @@ function publicPaths(): string[] {
   for (const zoom of [3, 6, 9, 12, 16])
     paths.push(`/api/v1/listing-pins?south=37&north=42&west=-88&east=-80&zoom=${zoom}`)
   for (const { seller, listingIds } of farms) {
-    paths.push(`/api/v1/sellers/${seller.publicId}`, `/api/v1/sellers/${seller.publicId}/ratings`)
+    const farm = `/api/v1/sellers/${seller.publicId}`
+    paths.push(farm, `${farm}/ratings`, `${farm}/listings?limit=2`, `${farm}/listings?near=45202&limit=1`)
     for (const id of listingIds)
       paths.push(
         `/api/v1/listings/${id}`,
