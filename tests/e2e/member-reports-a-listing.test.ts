@@ -20,6 +20,13 @@ async function onSale(page: Page): Promise<FoundListing[]> {
   return ((await answer.json()) as { items: FoundListing[] }).items
 }
 
+/** The one furthest away: journeys that run meanwhile buy what is near. */
+async function farAway(page: Page): Promise<FoundListing> {
+  const listing = (await onSale(page)).at(-1)
+  if (!listing) throw new Error('nothing is on sale around Cincinnati')
+  return listing
+}
+
 /** A page by its address, once its heading stands there. */
 async function open(page: Page, listing: FoundListing): Promise<void> {
   await page.goto(`/listings/${listing.listingId}`)
@@ -74,8 +81,7 @@ async function isMailed(subject: string, since: Date): Promise<boolean> {
 describe('a member at 390 px', () => {
   it('reports a listing, a moderator takes it off sale, and it is nowhere any more', async () => {
     const page = await browser.openPage({ width: 390, origin })
-    const listing = (await onSale(page))[0]
-    if (!listing) throw new Error('nothing is on sale near Cincinnati')
+    const listing = await farAway(page)
     await open(page, listing)
     // A visitor is led to sign in, and back.
     await main(page).getByRole('link', { name: 'Report this listing: sign in first' }).click()
@@ -111,8 +117,7 @@ describe('with the keyboard alone', () => {
   it('a moderator steps to a reported listing and closes its reports', async () => {
     const page = await browser.openPage({ width: 1280, origin, theme: 'dark' })
     await signInDemo(page, { dataDir, role: 'beginner' })
-    const listing = (await onSale(page))[0]
-    if (!listing) throw new Error('nothing is on sale near Cincinnati')
+    const listing = await farAway(page)
     await open(page, listing)
     await sendReport(page)
     await page.context().close()
