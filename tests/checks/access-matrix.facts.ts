@@ -119,8 +119,6 @@ export const accessMatrix: AccessRow[] = [
     ...open,
     query: 'from=45202&to=40202&species=bluegill&packing=carton-overnight',
   },
-  // An empty task is refused field by field, whoever sends it.
-  { route: 'makePackingSheet', object: 'none', send: {}, own: '422 422 422 422 422 422 422 422' },
   { route: 'readSeller', object: 'seller', own: everybody, missing: nobody },
   { route: 'listSellerListings', object: 'seller', query: 'near=45202', own: everybody, missing: nobody },
   {
