@@ -18,7 +18,8 @@ async function runTier(crew, tier) {
 }
 
 /**
- * Runs them one after the other, all of them even when one fails. The last line is always `N passed, N failed`.
+ * Runs them one after the other (some beside those that follow), all of them even when one fails. The last line is
+ * always `N passed, N failed`.
  * @param {import('./tiers.mjs').Tier[]} tiers
  */
 export async function runTiers(tiers) {
@@ -26,8 +27,13 @@ export async function runTiers(tiers) {
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.once(signal, () => void crew.stopAll().finally(() => process.exit(130)))
   }
-  const done = []
-  for (const tier of tiers) done.push(await runTier(crew, tier))
+  const running = []
+  for (const tier of tiers) {
+    const run = runTier(crew, tier)
+    running.push(run)
+    if (!tier.isBeside) await run
+  }
+  const done = await Promise.all(running)
   tell('')
   for (const { name, passed, failed, seconds } of done) {
     tell(

@@ -10,7 +10,8 @@ import { tell } from './tell.mjs'
 
 /**
  * @typedef {{ passed: number, failed: number }} Count
- * @typedef {{ name: string, run: (crew: import('./crew.mjs').Crew) => Promise<Count> }} Tier
+ * @typedef {{ name: string, run: (crew: import('./crew.mjs').Crew) => Promise<Count>, isBeside?: boolean }} Tier
+ *   isBeside: it keeps one core busy for long, so the tiers after it begin while it runs
  */
 
 /** A program that either succeeds or fails: one passed or one failed. @param {string} name @param {string[]} command @returns {Tier} */
@@ -89,7 +90,10 @@ const slices = ({ name, sliceCommand, faultCommand }) => {
 export const QUICK_TIERS = [
   types,
   single('routes', ['node', 'scripts/write-routes.mjs', '--check']),
-  single('lint', ['node', 'node_modules/eslint/bin/eslint.js', '.', '--max-warnings', '0']),
+  {
+    ...single('lint', ['node', 'node_modules/eslint/bin/eslint.js', '.', '--max-warnings', '0']),
+    isBeside: true,
+  },
   vitest('unit'),
   vitest('reference'),
 ]
