@@ -1,23 +1,26 @@
 import { useEffect, useState } from 'react'
 
+import { holdLeftS } from '@/components/orders/hold-left'
 import { Banner } from '@/components/ui/banner'
 import { Text } from '@/components/ui/text'
 import type { ShownOrder } from '@/shared/contracts/orders'
 
-/** Milliseconds the server's clock is ahead of this device's; the hold ends by the server's. */
-const aheadMs = (order: ShownOrder, loadedAt: number) => Date.parse(order.asOf) - loadedAt
+interface Props {
+  order: ShownOrder
+  /** When the answer came that the order was read from, by this device's clock. */
+  receivedAtMs: number
+}
 
 /** Counts the minutes left of an unpaid hold, by the server's clock. */
-export function HoldCountdown({ order }: { order: ShownOrder }) {
-  const [loadedAt] = useState(() => Date.now())
-  const [at, setAt] = useState(loadedAt)
+export function HoldCountdown({ order, receivedAtMs }: Props) {
+  const [at, setAt] = useState(() => Date.now())
   useEffect(() => {
     const timer = setInterval(() => setAt(Date.now()), 1000)
     return () => clearInterval(timer)
   }, [])
-  const endsAt = order.clock ? Date.parse(order.clock.at) : null
-  if (endsAt === null) return null
-  const leftS = Math.max(0, Math.round((endsAt - (at + aheadMs(order, loadedAt))) / 1000))
+  if (!order.clock) return null
+  const hold = { endsAtMs: Date.parse(order.clock.at), asOfMs: Date.parse(order.asOf), receivedAtMs }
+  const leftS = holdLeftS(hold, Math.max(at, receivedAtMs))
   const clock = `${Math.floor(leftS / 60)}:${String(leftS % 60).padStart(2, '0')}`
   return (
     <Banner

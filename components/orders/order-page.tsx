@@ -57,7 +57,7 @@ function AfterCare({ order }: { order: ShownOrder }) {
 
 /** One order, for whichever party looks at it. */
 export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: string; left?: string } }) {
-  const { data: order, error, isPending, refetch, isRefetching } = useOrder(orderId)
+  const { data: order, error, isPending, refetch, isRefetching, dataUpdatedAt } = useOrder(orderId)
   if (isPending) {
     return (
       <Page title="Order" back={back}>
@@ -93,7 +93,7 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
         isSideFirst={order.state === 'cancelled' || order.state === 'settled'}
         main={
           <View style={styles.column}>
-            {order.state === 'reserved' ? <HoldCountdown order={order} /> : null}
+            {order.state === 'reserved' ? <HoldCountdown order={order} receivedAtMs={dataUpdatedAt} /> : null}
             {order.accepting ? (
               <Banner tone="info" title="Accepted: the deposit is being taken" isLive>
                 <Text>This takes a few seconds, longer when the payment service is busy.</Text>
