@@ -15,10 +15,15 @@ import { RadioGroup } from '@/components/ui/radio-group'
 import { newRequestKey } from '@/hooks/request-key'
 import { useCurrentPlace } from '@/hooks/use-current-place'
 import { useReserveBatch } from '@/hooks/use-orders'
+import { Problem } from '@/shared/api/problem'
 import type { ShownListing } from '@/shared/contracts/listings'
 import { mayPayInFull } from '@/shared/domain/orders/pay-in-full'
 import { printSlot } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
+
+/** The answer was lost, or the first press is still being worked on: it may hold animals already. */
+const isOutcomeUnknown = (error: Error) =>
+  !(error instanceof Problem) || error.status >= 500 || error.slug === 'key-running'
 
 interface Props {
   listing: ShownListing
@@ -73,11 +78,12 @@ export function ReserveBatchForm({ listing, count }: Props) {
       },
       {
         onSuccess: (order) => {
+          // The way back from the payment page leads to the hold, not to this form, which would hold once more.
+          router.replace(`/orders/${order.orderId}`)
           if (order.payUrl) goToPayment(order.payUrl)
-          else router.replace(`/orders/${order.orderId}`)
         },
-        // Another try with other values is another act; after a lost answer the same key finds the same order.
-        onError: (error) => error.name !== 'NoAnswer' && setKey(newRequestKey()),
+        // Another try with other values is another act; while the outcome is unknown the same key finds the same order.
+        onError: (error) => !isOutcomeUnknown(error) && setKey(newRequestKey()),
       },
     )
   }
@@ -85,7 +91,6 @@ export function ReserveBatchForm({ listing, count }: Props) {
   return (
     <>
       <ErrorSummary errors={shown} attempt={attempt} />
-      <ReserveProblem error={reserve.error} listingId={listing.listingId} />
       <Card>
         <NumberField
           label="How many"
@@ -123,6 +128,7 @@ export function ReserveBatchForm({ listing, count }: Props) {
       {quote ? (
         <PaySummary listing={listing} quote={quote} mode={mode} mayFull={mayFull} onMode={setPayMode} />
       ) : null}
+      <ReserveProblem error={reserve.error} listingId={listing.listingId} />
       <Button
         label={
           quote
