@@ -2,6 +2,7 @@ import { useState } from 'react'
 
 import { ActFailed } from '@/components/orders/act-failed'
 import { Button } from '@/components/ui/button'
+import { ErrorState } from '@/components/ui/error-state'
 import { RadioGroup } from '@/components/ui/radio-group'
 import { Sheet } from '@/components/ui/sheet'
 import { SkeletonRows } from '@/components/ui/skeleton'
@@ -38,6 +39,14 @@ export function ChooseSlot({ order, onClose }: { order: ShownOrder; onClose: () 
     >
       <ActFailed error={move.error} />
       {listing.isPending ? <SkeletonRows label="Loading pickup times" rows={3} /> : null}
+      {listing.isError && !listing.data ? (
+        <ErrorState
+          title="The pickup times did not load"
+          body={`${listing.error.message} The day you have stays as it is.`}
+          onRetry={() => void listing.refetch()}
+          isRetrying={listing.isFetching}
+        />
+      ) : null}
       {listing.data && open.length === 0 ? (
         <Text>There is no other pickup time at the moment. Ask the seller to offer one.</Text>
       ) : null}
