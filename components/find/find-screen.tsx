@@ -3,6 +3,7 @@ import { ScrollView, StyleSheet, View } from 'react-native'
 
 import { FilterSheet } from './filter-sheet'
 import { LaterFilters } from './later-filters'
+import { PinTags } from './pin-tags'
 import { ResultHead } from './result-head'
 import { ResultList } from './result-list'
 import { ResultMap } from './result-map'
@@ -56,6 +57,7 @@ export function FindScreen() {
         {place}
         {head}
         {view === 'map' ? <View style={styles.phoneMap}>{map}</View> : list}
+        {view === 'map' ? <PinTags find={find} pin={chosenPin} /> : null}
         {sheet}
       </Page>
     )
