@@ -39,6 +39,19 @@ describe('what Find asks, kept in the address', () => {
     expect(readFind({ ...mistyped, category: 'worms' })).toEqual({ category: 'worms' })
   })
 
+  it('drops a day that is not on the calendar', () => {
+    expect(readFind({ from: '2027-02-31', until: '2028-02-29' })).toEqual({ until: '2028-02-29' })
+    expect(readFind({ from: '2027-02-29' })).toEqual({})
+  })
+
+  it('reads sizes and days that were turned round as meant', () => {
+    const turned = { sizeFromMm: '102', sizeToMm: '51', from: '2027-02-01', until: '2027-01-15' }
+    expect(readFind(turned)).toEqual({
+      ...{ sizeFromMm: 51, sizeToMm: 102 },
+      ...{ from: '2027-01-15', until: '2027-02-01' },
+    })
+  })
+
   it('takes a location cell, never a coordinate', () => {
     expect(readFind({ near: '50.2582.1909' }).near).toBe('50.2582.1909')
     expect(readFind({ near: '39.10312,-84.51202' }).near).toBeUndefined()

@@ -43,7 +43,11 @@ export function readFind(params: Params): FindState {
     const given = text(name)
     return given && shape.test(given) ? given : undefined
   }
-  return withoutGaps({
+  const day = (name: string) => {
+    const given = fitting(name, dayShape)
+    return given && isRealDay(given) ? given : undefined
+  }
+  return inOrder({
     near: fitting('near', nearShape),
     withinKm: whole('withinKm', 4000),
     category: categories.find((one) => one === text('category')),
@@ -51,8 +55,8 @@ export function readFind(params: Params): FindState {
     sizeFromMm: whole('sizeFromMm', 2000),
     sizeToMm: whole('sizeToMm', 2000),
     count: whole('count', 1_000_000),
-    from: fitting('from', dayShape),
-    until: fitting('until', dayShape),
+    from: day('from'),
+    until: day('until'),
     mostCents: whole('mostCents', 10_000_000),
     pickup: text('pickup') === 'yes' ? 'yes' : undefined,
     sort: sorts.find((one) => one === text('sort') && one !== 'nearest'),
@@ -82,6 +86,22 @@ export function writeFind(state: FindState): Record<keyof FindState, string | un
 export function toFilters(state: FindState, near: string): Omit<SearchAsked, 'sort' | 'cursor' | 'limit'> {
   const { sort: _sort, near: _near, ...filters } = state
   return { ...filters, near, withinKm: state.withinKm ?? usualWithinKm }
+}
+
+// 2027-02-31 would become March 3rd; a day that is not on the calendar was not meant.
+const isRealDay = (day: string) => new Date(`${day}T00:00:00Z`).toISOString().startsWith(day)
+
+/** "From 4 to 2 inches" is read as meant. */
+function inOrder(given: { [Part in keyof FindState]: FindState[Part] | undefined }): FindState {
+  const state = withoutGaps(given)
+  const { sizeFromMm, sizeToMm, from, until } = state
+  const isSizeTurned = sizeFromMm !== undefined && sizeToMm !== undefined && sizeFromMm > sizeToMm
+  const areDaysTurned = from !== undefined && until !== undefined && from > until
+  return {
+    ...state,
+    ...(isSizeTurned ? { sizeFromMm: sizeToMm, sizeToMm: sizeFromMm } : {}),
+    ...(areDaysTurned ? { from: until, until: from } : {}),
+  }
 }
 
 function withoutGaps(state: { [Part in keyof FindState]: FindState[Part] | undefined }): FindState {

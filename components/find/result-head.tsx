@@ -45,9 +45,11 @@ export function ResultHead({ find, onFilters, view, onView }: Props) {
         ) : null}
       </View>
       <AppliedFilters state={find.state} onChange={find.change} />
-      <Text tint="muted" size="note">
-        {said}
-      </Text>
+      {said ? (
+        <Text tint="muted" size="note">
+          {said}
+        </Text>
+      ) : null}
       <HiddenText isLive>{find.search.isFetching ? '' : said}</HiddenText>
     </View>
   )
@@ -61,7 +63,8 @@ const orders: Record<Sort, string> = {
 }
 
 function foundWords({ search, found, placeLabel, near, sort }: Find): string {
-  if (search.isPending) return 'Looking…'
+  if (search.isError && found.length === 0) return ''
+  if (search.isPending || search.isPlaceholderData) return search.isPaused ? '' : 'Looking…'
   const many = `${printCount(found.length)}${search.hasNextPage ? '+' : ''}`
   const what = found.length === 1 ? 'listing' : 'listings'
   if (!near)

@@ -12,6 +12,7 @@ import { ErrorState } from '@/components/ui/error-state'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import { NoAnswer } from '@/shared/api/call'
+import { Problem } from '@/shared/api/problem'
 
 interface Props {
   find: Find
@@ -21,10 +22,12 @@ interface Props {
 
 export function ResultList({ find, selectedPin, onHot }: Props) {
   const { search, found } = find
-  if (search.isPending && search.isPaused) {
+  // An empty list from before says nothing about the filters of now.
+  const isWaiting = search.isPending || (search.isPlaceholderData && found.length === 0)
+  if (isWaiting && search.isPaused) {
     return <NoConnection kept="Your filters are kept." onRetry={() => void search.refetch()} />
   }
-  if (search.isPending) return <TagSkeleton label="Loading listings" count={4} />
+  if (isWaiting) return <TagSkeleton label="Loading listings" count={4} />
   if (search.isError && found.length === 0) {
     const isSilent = search.error instanceof NoAnswer
     return (
@@ -33,7 +36,7 @@ export function ResultList({ find, selectedPin, onHot }: Props) {
         body={
           isSilent
             ? 'Your filters are kept. Try again in a moment.'
-            : `${search.error.message}. Your filters are kept.`.replace('..', '.')
+            : `${sentencesOf(search.error)} Your filters are kept.`
         }
         onRetry={() => void search.refetch()}
         isRetrying={search.isFetching}
@@ -45,6 +48,12 @@ export function ResultList({ find, selectedPin, onHot }: Props) {
   }
   return (
     <View style={styles.frame}>
+      {search.isPlaceholderData && search.isPaused ? (
+        <Banner isLive tone="caution" title="No connection">
+          This is the list from before. Your filters are kept; the new list comes by itself as soon as there
+          is a signal.
+        </Banner>
+      ) : null}
       {search.isError ? (
         <Banner isLive tone="caution" title="Not the latest">
           We could not ask again just now: this list is from a moment ago.
@@ -66,9 +75,16 @@ export function ResultList({ find, selectedPin, onHot }: Props) {
           />
         ))}
       </View>
-      <ListEnd find={find} />
+      {search.isPlaceholderData ? null : <ListEnd find={find} />}
     </View>
   )
+}
+
+/** What the server found wrong, part by part where it says so. */
+function sentencesOf(error: Error): string {
+  const parts = error instanceof Problem ? (error.errors ?? []).map(({ detail }) => detail) : []
+  const said = parts.length > 0 ? parts.join(' ') : error.message
+  return /[.?!]$/.test(said) ? said : `${said}.`
 }
 
 function ListEnd({ find: { search, found } }: { find: Find }) {
