@@ -1,7 +1,9 @@
 import type { FormError } from '@/components/ui/error-summary'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
 import { quoteOrder } from '@/shared/domain/money/quote-order'
 import { parseCount } from '@/shared/units/count'
+import { printCents } from '@/shared/units/money'
 
 export interface ReservationDraft {
   quantityText: string
@@ -46,6 +48,8 @@ export function reservationErrors(listing: ShownListing, draft: ReservationDraft
     wrong('quantity', `From ${minOrder} on in steps of ${orderStep}.`)
   else if (mostPerBuyer !== undefined && quantity > mostPerBuyer)
     wrong('quantity', `At most ${mostPerBuyer} for one buyer.`)
+  else if ((quoteReservation(listing, draft.quantityText)?.totalCents ?? 0) > mostOrderCents)
+    wrong('quantity', `One order may come to at most ${printCents(mostOrderCents)}. Ask for fewer.`)
   else if (quantity > listing.free) wrong('quantity', `Only ${listing.free} are left.`)
   if (!draft.hasPlace) wrong('place', 'Where will the animals live? A ZIP code or a town.')
   if (listing.windows.length > 0 && draft.windowId === '') wrong('window', 'Choose a pickup time.')

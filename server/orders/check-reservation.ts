@@ -7,6 +7,9 @@ import { readLiveTerms } from '@/server/orders/terms-store'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
 import { Problem } from '@/shared/api/problem'
 import type { ListingBody } from '@/shared/contracts/listings'
+import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
+import { tierFor } from '@/shared/domain/money/tier-price'
+import { printCents } from '@/shared/units/money'
 
 export interface CheckedReservation {
   listing: NonNullable<Awaited<ReturnType<typeof readListingRow>>>
@@ -16,7 +19,7 @@ export interface CheckedReservation {
 }
 
 function checkQuantity(terms: ListingBody, quantity: number): void {
-  const { minOrder, orderStep, mostPerBuyer } = terms
+  const { minOrder, orderStep, mostPerBuyer, tiers } = terms
   const refuse = (detail: string) =>
     new Problem('fields-invalid', undefined, { errors: [{ detail, pointer: '#/quantity' }] })
   if (quantity < minOrder) {
@@ -27,6 +30,8 @@ function checkQuantity(terms: ListingBody, quantity: number): void {
   }
   if (mostPerBuyer !== undefined && quantity > mostPerBuyer)
     throw refuse(`At most ${mostPerBuyer} for one buyer.`)
+  if ((tierFor(tiers, quantity)?.unitCents ?? 0) * quantity > mostOrderCents)
+    throw refuse(`One order may come to at most ${printCents(mostOrderCents)}. Ask for fewer.`)
 }
 
 /** What can be said no to before anything is held: who, what, how many, under which terms. */

@@ -10,6 +10,7 @@ import type { SearchHit } from '@/server/search/search-query'
 import { presentRating } from '@/server/sellers/present-seller-card'
 import type { FoundListing } from '@/shared/contracts/search'
 import { bearingWords } from '@/shared/domain/geo/bearing-words'
+import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
 import type { SpeciesRule } from '@/shared/domain/rules/species-rule'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 
@@ -62,6 +63,12 @@ async function readGrounds(all: FoundFacts[]): Promise<Map<string, string>> {
   return new Map(photos.map((photo) => [photo.id, photo.ground]))
 }
 
+/** What so many cost; left out where no order may come to that much. */
+function totalOf(unitCents: number, count: number | undefined): { totalCents?: number } {
+  const totalCents = unitCents * (count ?? 0)
+  return count === undefined || totalCents > mostOrderCents ? {} : { totalCents }
+}
+
 function presentTag(
   hit: Pick<SearchHit, 'listingId' | 'unitCents'>,
   facts: FoundFacts,
@@ -83,7 +90,7 @@ function presentTag(
     free: facts.free,
     minOrder: body.minOrder,
     unitCents: hit.unitCents,
-    ...(count === undefined ? {} : { totalCents: hit.unitCents * count }),
+    ...totalOf(hit.unitCents, count),
     waterC: body.water.temperatureC,
     farmName: facts.farmName,
     placeText: `${facts.city}, ${facts.state}`,

@@ -1,10 +1,15 @@
 import { z } from 'zod'
 
+import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
+
 /** Shapes that several nouns share. Ids are opaque; money is integer cents; times are UTC with Z. */
 export const publicIdText = z.string().regex(/^[A-Za-z0-9_-]{22}$/)
 export const instantText = z.iso.datetime()
 export const dayText = z.iso.date()
-export const cents = z.int().min(0).max(10_000_000)
+export const cents = z
+  .int()
+  .min(0, 'An amount cannot be below zero.')
+  .max(mostOrderCents, 'At most $100,000.')
 export const stateCode = z.string().regex(/^[A-Z]{2}$/)
 export const zipCode = z.string().regex(/^\d{5}$/, 'Five digits, please.')
 export const cellIdText = z.string().regex(/^\d{2,3}\.\d{1,4}\.\d{1,4}$/)

@@ -333,4 +333,14 @@ describe('a batch that nobody can have', () => {
     expect(await names({ species: 'bluegill' })).toEqual(['near-bluegill'])
     setClockOffset(Date.parse(TEST_NOW) - Date.now())
   })
+
+  it('lists a dear batch without a total where no order may come to that much', async () => {
+    const dear = { minOrder: 1, orderStep: 1, tiers: [{ fromCount: 1, unitCents: 7_500 }] }
+    await batch(dayton, 'dear', { taxonId: 'yellow_perch', countOnHand: 2000, ...dear })
+    const [within] = (await find({ species: 'yellow_perch', count: 1333 })).items
+    expect(within).toMatchObject({ unitCents: 7_500, totalCents: 9_997_500 })
+    const [beyond] = (await find({ species: 'yellow_perch', count: 1334 })).items
+    expect(beyond?.unitCents).toBe(7_500)
+    expect(beyond?.totalCents).toBeUndefined()
+  })
 })

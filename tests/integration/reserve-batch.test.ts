@@ -84,6 +84,27 @@ describe('holding animals for fifteen minutes', () => {
     expect(await stockOf(batch.publicId)).toMatchObject({ free: 500, held: 0 })
   })
 
+  it('refuses an order beyond $100,000 before anything is held, and sells up to it', async () => {
+    const dear = { minOrder: 1, orderStep: 1, tiers: [{ fromCount: 1, unitCents: 7_500 }] }
+    const batch = await desk.batch('dear', { free: 2000, body: dear })
+    const bea = await desk.signedIn('bea@example.org')
+    const hold = (quantity: number) =>
+      bea
+        .post(`/api/v1/listings/${batch.publicId}/orders`)
+        .set(keyed())
+        .send(reserveBody(batch, { quantity }))
+    const refused = await hold(1334)
+    expect([refused.status, refused.body.type]).toEqual([422, '/problems/fields-invalid'])
+    expect(refused.body.errors).toEqual([
+      { detail: 'One order may come to at most $100,000.00. Ask for fewer.', pointer: '#/quantity' },
+    ])
+    expect(await stockOf(batch.publicId)).toMatchObject({ free: 2000, held: 0 })
+    const held = await hold(1333)
+    expect([held.status, held.body.money?.totalCents]).toEqual([201, 9_997_500])
+    await bea.get('/api/v1/orders').expect(200)
+    await bea.post(`/api/v1/orders/${held.body.orderId}/departure`).set(keyed()).expect(200)
+  })
+
   it('does not sell to oneself', async () => {
     const batch = await desk.batch('own')
     const owner = await desk.signedIn(desk.hatcheryEmail)
