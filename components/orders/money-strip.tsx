@@ -14,7 +14,7 @@ interface Part {
 }
 
 /** The order's real cents, each in exactly one part: nothing is shown twice and the parts add up to the total. */
-function partsOf({ money, state, balancePaid }: ShownOrder): Part[] {
+function partsOf({ money, state, balancePaid, party }: ShownOrder): Part[] {
   const { strip, totalCents } = money
   const isOver = state === 'cancelled'
   const toPay = isOver || balancePaid ? 0 : money.balanceCents
@@ -28,7 +28,7 @@ function partsOf({ money, state, balancePaid }: ShownOrder): Part[] {
   )
   const parts: Part[] = [
     { name: state === 'reserved' ? 'To pay now' : 'Earmarked on the card', cents: earmarked, fill: 'edge' },
-    { name: 'Held until you confirm', cents: strip.heldCents, fill: 'netting' },
+    { name: `Held until ${party === 'buyer' ? 'you confirm' : 'the buyer confirms'}`, cents: strip.heldCents, fill: 'netting' },
     { name: 'Balance still to pay', cents: toPay, fill: 'line' },
     { name: 'Released to the seller', cents: strip.releasedCents, fill: 'safe' },
     { name: 'Fee and tax', cents: fee, fill: 'muted' },

@@ -112,7 +112,9 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
             <MoneyStrip order={order} />
             {order.state === 'cancelled' || order.state === 'settled' ? null : (
               <Text size="note" tint="muted">
-                Your money is held by our payment processor until you confirm, or until the time above.
+                {order.party === 'buyer'
+                  ? 'Your money is held by our payment processor until you confirm, or until the time above.'
+                  : 'The buyer’s money is held by our payment processor until they confirm, or until the time above.'}
               </Text>
             )}
           </Card>
