@@ -19,8 +19,7 @@ const reasons = [
 ] as const
 type Reason = (typeof reasons)[number]['value']
 
-const isFree = ({ state, freeCancelUntil, asOf }: ShownOrder) =>
-  state !== 'ready' && (!freeCancelUntil || asOf <= freeCancelUntil)
+const isFree = ({ freeCancelUntil, asOf }: ShownOrder) => !freeCancelUntil || asOf <= freeCancelUntil
 
 /** What the buyer gets back, told before the press. */
 function outcomeFor(order: ShownOrder): string {

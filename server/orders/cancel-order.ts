@@ -24,12 +24,13 @@ const byBuyer: Record<string, EdgeId> = { deposit_paid: 'E15', scheduled: 'E24',
 const bySeller: Record<string, EdgeId> = { deposit_paid: 'E16', scheduled: 'E25', ready: 'E55' }
 
 /**
- * Inside the free time a buyer gets all back; after it, and once the animals are ready, the deposit may be kept.
- * Returns the cents that go back.
+ * Inside the free time that was promised at payment a buyer gets all back, even when the seller has the animals ready
+ * early: else a press weeks ahead would take the promise away. After it the deposit may be kept. Returns the cents
+ * that go back.
  */
 async function settleBuyersCancel(tx: Tx, before: OrderRow, order: OrderRow): Promise<number> {
   const until = freeCancelUntil(before, await readTerms(tx, before.listingVersionId))
-  const isFree = before.state !== 'ready' && (until === null || now() <= until)
+  const isFree = until === null || now() <= until
   return isFree ? refundEverything(tx, order, 'buyer-cancelled') : keepDeposit(tx, order, 'buyer-cancelled')
 }
 

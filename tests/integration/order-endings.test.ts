@@ -89,8 +89,20 @@ describe('a buyer who cancels', () => {
     })
   })
 
-  it('may still cancel when the animals are ready, and leaves the deposit', async () => {
-    const { bea, hatchery, act, seen, payBalance, stock } = await paid('ready-cancel')
+  it('keeps the free time when the seller has the animals ready long before the window', async () => {
+    const { bea, hatchery, act, seen, payBalance, stock } = await paid('ready-early')
+    await act(hatchery, 'readiness')
+    await payBalance()
+    expect((await act(bea, 'cancellation')).status).toBe(200)
+    expect((await seen()).money).toMatchObject({
+      refundedCents: 2500,
+      strip: { heldCents: 0, releasedCents: 0 },
+    })
+    expect(await stock()).toMatchObject({ free: 500, sold: 0 })
+  })
+
+  it('may still cancel when the animals are ready and the free time is over, and leaves the deposit', async () => {
+    const { bea, hatchery, act, seen, payBalance, stock } = await paid('ready-cancel', { days: 2 })
     await act(hatchery, 'readiness')
     await payBalance()
     expect((await act(bea, 'cancellation')).status).toBe(200)

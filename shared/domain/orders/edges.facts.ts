@@ -93,7 +93,7 @@ const table = {
   E53: { id: 'E53', from: 'pledged', to: 'cancelled', reason: 'seller_cancelled', by: ['seller'], guard: 'reason-code', clock: null, money: 'refund-deposit', stock: [['pledged', -1]] },
   E54: { id: 'E54', from: 'weather_hold', to: 'cancelled', reason: 'seller_cancelled', by: ['seller'], guard: 'reason-code', clock: null, money: 'refund-all', stock: [['sold', -1]] },
   E55: { id: 'E55', from: 'ready', to: 'cancelled', reason: 'seller_cancelled', by: ['seller'], guard: 'reason-code', clock: null, money: 'refund-all', stock: [['sold', -1]] },
-  E56: { id: 'E56', from: 'ready', to: 'cancelled', reason: 'buyer_cancelled', by: ['buyer'], guard: 'before-hand-over', clock: null, money: 'refund-balance-keep-deposit', stock: [['sold', -1], ['free', 1]] },
+  E56: { id: 'E56', from: 'ready', to: 'cancelled', reason: 'buyer_cancelled', by: ['buyer'], guard: 'before-hand-over', clock: null, money: 'refund-or-keep', stock: [['sold', -1], ['free', 1]] },
 } as const satisfies Record<string, Edge>
 
 export type EdgeId = keyof typeof table
