@@ -28,7 +28,11 @@ function partsOf({ money, state, balancePaid, party }: ShownOrder): Part[] {
   )
   const parts: Part[] = [
     { name: state === 'reserved' ? 'To pay now' : 'Earmarked on the card', cents: earmarked, fill: 'edge' },
-    { name: `Held until ${party === 'buyer' ? 'you confirm' : 'the buyer confirms'}`, cents: strip.heldCents, fill: 'netting' },
+    {
+      name: `Held until ${party === 'buyer' ? 'you confirm' : 'the buyer confirms'}`,
+      cents: strip.heldCents,
+      fill: 'netting',
+    },
     { name: 'Balance still to pay', cents: toPay, fill: 'line' },
     { name: 'Released to the seller', cents: strip.releasedCents, fill: 'safe' },
     { name: 'Fee and tax', cents: fee, fill: 'muted' },
