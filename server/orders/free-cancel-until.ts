@@ -10,6 +10,7 @@ export function freeCancelUntil(order: OrderRow, terms: ListingBody): Date | nul
     category: terms.category,
     freeCancelHours: terms.freeCancelHours,
     quantityCutMs: null,
+    isMovedBySeller: order.sellerMoves > 0,
   })
   return untilMs === null ? null : new Date(untilMs)
 }

@@ -275,6 +275,20 @@ describe('moving the day', () => {
   })
 })
 
+describe('a seller who moves the day', () => {
+  it('cannot take the free time away: a buyer whom the new day does not suit gets everything back', async () => {
+    const { batch, bea, hatchery, act, seen, payBalance } = await paid('moved-near', { days: 2 })
+    await act(hatchery, 'readiness')
+    await payBalance()
+    const other = batch.windows[1]
+    expect((await act(hatchery, 'slot', { windowId: other?.publicId })).status).toBe(200)
+    expect((await seen()).freeCancelUntil).toBe(other?.startsAt.toISOString())
+    await act(hatchery, 'readiness')
+    expect((await act(bea, 'cancellation')).status).toBe(200)
+    expect((await seen()).money).toMatchObject({ refundedCents: 2500, strip: { releasedCents: 0 } })
+  })
+})
+
 describe('a moderator who stops an order', () => {
   it('needs a second factor and is no party of it', async () => {
     const { bea, path } = await paid('stop-guard')

@@ -8,6 +8,7 @@ const facts = (given: Partial<CancelFacts> = {}): CancelFacts => ({
   category: 'fish',
   freeCancelHours: null,
   quantityCutMs: null,
+  isMovedBySeller: false,
   ...given,
 })
 
@@ -27,6 +28,12 @@ describe('free cancelling', () => {
 
   it('is always free while no day is agreed', () => {
     expect(isFreeCancel(facts({ slotStartMs: null }), slot * 2)).toBe(true)
+  })
+
+  it('is free until the slot itself when the seller moved the day', () => {
+    const moved = facts({ isMovedBySeller: true })
+    expect(isFreeCancel(moved, slot)).toBe(true)
+    expect(isFreeCancel(moved, slot + 1)).toBe(false)
   })
 
   it('is free for a day after the seller cut the quantity', () => {

@@ -10,12 +10,15 @@ export interface CancelFacts {
   freeCancelHours: number | null
   /** When the order's quantity was last cut by the seller; null when never. */
   quantityCutMs: number | null
+  /** Whether the seller moved the day by their own press: a day that the buyer never chose binds nobody. */
+  isMovedBySeller: boolean
 }
 
 /** Until when a buyer may cancel for a full refund, ms. null: no day is agreed yet, so always. */
 export function freeCancelUntilMs(facts: CancelFacts): number | null {
-  const { slotStartMs, category, freeCancelHours, quantityCutMs } = facts
+  const { slotStartMs, category, freeCancelHours, quantityCutMs, isMovedBySeller } = facts
   if (slotStartMs === null) return null
+  if (isMovedBySeller) return slotStartMs
   const freeMs = freeCancelHours === null ? clockMs('freeCancel', category) : freeCancelHours * hourMs
   const afterCutMs =
     quantityCutMs === null ? -Infinity : quantityCutMs + clockMs('quantityCutCancel', category)
