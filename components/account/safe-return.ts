@@ -8,7 +8,8 @@ export function safeReturn(given: string | string[] | undefined): Href {
   if (!path || !path.startsWith('/') || /[\\\u0000-\u001f]/u.test(path)) return '/'
   try {
     const { origin, pathname, search } = new URL(path, here)
-    return origin === here ? (`${pathname}${search}` as Href) : '/'
+    // "/..//elsewhere" is ours as written, and becomes "//elsewhere" once its dots are gone.
+    return origin === here && !pathname.startsWith('//') ? (`${pathname}${search}` as Href) : '/'
   } catch {
     return '/'
   }
