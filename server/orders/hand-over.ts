@@ -25,16 +25,22 @@ const MOST_CODE_TRIES = 10
 const sameCode = (given: string, kept: string) =>
   given.length === kept.length && timingSafeEqual(Buffer.from(given), Buffer.from(kept))
 
-/** Counts a wrong guess in a transaction of its own, so that the refusal cannot roll it back. */
-async function checkCode(order: OrderRow, code: string): Promise<void> {
-  if (order.codeTries >= MOST_CODE_TRIES) {
-    throw new Problem('code-wrong', 'Too many wrong codes. Write to our moderators; nothing is lost.')
-  }
-  if (sameCode(code, order.handOverCode)) return
-  await inTransaction(async (tx) => {
-    const fresh = await lockOrder(tx, order.id)
-    if (fresh) await changeOrder(tx, fresh, { codeTries: fresh.codeTries + 1, updatedAt: now() })
+/**
+ * Judges one guess under the order's lock, so that many at once are still counted one by one, and in a transaction of
+ * its own, so that the refusal cannot roll the count back.
+ */
+async function checkCode(orderId: number, code: string): Promise<void> {
+  const isRight = await inTransaction(async (tx) => {
+    const order = await lockOrder(tx, orderId)
+    if (!order) throw new Problem('not-found')
+    if (order.codeTries >= MOST_CODE_TRIES) {
+      throw new Problem('code-wrong', 'Too many wrong codes. Write to our moderators; nothing is lost.')
+    }
+    if (sameCode(code, order.handOverCode)) return true
+    await changeOrder(tx, order, { codeTries: order.codeTries + 1, updatedAt: now() })
+    return false
   })
+  if (isRight) return
   throw new Problem(
     'code-wrong',
     'That is not the code on the buyer’s screen. Ask them to read it once more.',
@@ -78,7 +84,7 @@ export async function handOver(caller: Caller, orderId: string, asked: Asked): P
       'The buyer pays the balance on their phone first; then the code appears.',
     )
   }
-  if (seen.order.state === 'ready') await checkCode(seen.order, asked.code)
+  if (seen.order.state === 'ready') await checkCode(seen.order.id, asked.code)
   await inTransaction(async (tx) => {
     const { order, applied } = await applyEdge(tx, {
       edge: 'E30',

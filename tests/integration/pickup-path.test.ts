@@ -87,6 +87,22 @@ describe('from the hold to the bucket', () => {
     )
   })
 
+  it('counts guesses at the code one by one, also when many come at once', async () => {
+    const { bea, hatchery, order, path, seen, act } = await held('guesses', {}, { payMode: 'full' })
+    await desk.pay(order)
+    await act(hatchery, 'readiness')
+    const code = (await seen()).handOverCode ?? ''
+    const guess = (wrong: string) =>
+      hatchery.post(`${path}/hand-over`).set(keyed()).send({ code: wrong, count: 25 })
+    const wrongs = Array.from({ length: 14 }, (_, at) => String((Number(code) + at + 1) % 1_000_000))
+    const answers = await Promise.all(wrongs.map((wrong) => guess(wrong.padStart(6, '0'))))
+    const told = answers.map(({ body }) => String(body.detail))
+    expect(told.filter((text) => text.startsWith('That is not the code'))).toHaveLength(10)
+    expect(told.filter((text) => text.startsWith('Too many wrong codes'))).toHaveLength(4)
+    expect((await act(hatchery, 'hand-over', { code, count: 25 })).status).toBe(409)
+    expect((await seen(bea)).state).toBe('ready')
+  })
+
   it('waits for a seller who wants to answer first, and takes the deposit only then', async () => {
     const { hatchery, order, seen, act, stock } = await held('asks', { body: { accept: 'ask' } })
     await desk.pay(order)
