@@ -83,7 +83,11 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
     <Page
       title={`${order.quantity} × ${order.title}`}
       back={back}
-      actions={<Badge word={word} tone={tone} />}
+      actions={
+        <View style={styles.badge}>
+          <Badge word={word} tone={tone} />
+        </View>
+      }
     >
       <OrderPathLine order={order} />
       <Returned order={order} from={from} />
@@ -124,4 +128,8 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
   )
 }
 
-const styles = StyleSheet.create({ column: { gap: space.lg } })
+const styles = StyleSheet.create({
+  column: { gap: space.lg },
+  // In line with the right edge of the cards below.
+  badge: { paddingRight: space.sm },
+})
