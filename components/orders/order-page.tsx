@@ -97,7 +97,9 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
         isSideFirst={order.state === 'cancelled' || order.state === 'settled'}
         main={
           <View style={styles.column}>
-            {order.state === 'reserved' ? <HoldCountdown order={order} receivedAtMs={dataUpdatedAt} /> : null}
+            {order.state === 'reserved' && order.party === 'buyer' ? (
+              <HoldCountdown order={order} receivedAtMs={dataUpdatedAt} />
+            ) : null}
             {order.accepting ? (
               <Banner tone="info" title="Accepted: the deposit is being taken" isLive>
                 <Text>This takes a few seconds, longer when the payment service is busy.</Text>
