@@ -58,6 +58,8 @@ export const listingSearch = mysqlTable(
     pickup: utiny(),
     /** Origin band × animal class × packing class; 0: not shipped. */
     lane: usmall(),
+    /** One bit a state that it is shipped to. */
+    shipStates: ubig(),
     /** One bit a state in which the listing must not be shown. */
     hiddenStates: ubig(),
     /** 0 best … 500 worst, 501 not rated yet. */
@@ -84,7 +86,7 @@ export const listingSearch = mysqlTable(
       t.price4,
     ] as const
     const rest = [t.moreTiers, t.sizeLoMm, t.sizeHiMm, t.nextDay, t.lastDay, t.openDays] as const
-    const who = [t.pickup, t.lane, t.hiddenStates] as const
+    const who = [t.pickup, t.lane, t.shipStates, t.hiddenStates] as const
     return [
       primaryKey({ columns: [t.category, t.hil, t.listingId] }),
       uniqueIndex('u_listing').on(t.listingId),

@@ -3,6 +3,7 @@ import type { FieldProblem } from '@/shared/api/problem'
 import type { ListingBody } from '@/shared/contracts/listings'
 import { findBlock } from '@/shared/domain/rules/find-block'
 import { findState } from '@/shared/domain/rules/find-state'
+import { shipmentOf } from '@/shared/domain/season/shipment-of'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 import { stageFitsLength } from '@/shared/domain/species/stage-fits-length'
 import { traceLineage } from '@/shared/domain/species/trace-lineage'
@@ -64,7 +65,18 @@ function stateFaults(body: ListingBody, seller: SellerRow): FieldProblem[] {
   return faults
 }
 
-/** What is wrong with the animal named, its stage, and where it would be sold. */
+/** A batch that search could not judge would only ever be hidden by it. */
+function shippingFaults(body: ListingBody, { cellLat: lat, cellLng: lng }: SellerRow): FieldProblem[] {
+  if (!body.shipping) return []
+  const from = { lat, lng }
+  const shipment = shipmentOf({ taxonId: body.taxonId, packing: body.shipping.packing, from }, from)
+  if (shipment && shipment.origin !== null) return []
+  const what = shipment ? 'from your place' : 'for this animal'
+  const detail = `We hold no shipping season ${what} yet: leave shipping out for now.`
+  return [{ detail, pointer: '#/draft/shipping/packing' }]
+}
+
+/** What is wrong with the animal named, its stage, and where it would be sold or shipped. */
 export function checkAnimal(body: ListingBody, seller: SellerRow): FieldProblem[] {
-  return [...animalFaults(body), ...stageFaults(body), ...stateFaults(body, seller)]
+  return [...animalFaults(body), ...stageFaults(body), ...stateFaults(body, seller), ...shippingFaults(body, seller)]
 }

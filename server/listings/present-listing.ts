@@ -1,6 +1,8 @@
 import { describeListing, photoAlt } from '@/server/listings/describe-listing'
 import type { ListingRow } from '@/server/listings/listing-store'
+import { presentShippedThroughYear } from '@/server/listings/present-shipped'
 import { presentWindow } from '@/server/listings/present-window'
+import { seasonWeek } from '@/server/listings/season-week'
 import type { VersionRow } from '@/server/listings/version-store'
 import type { WindowRow } from '@/server/listings/window-store'
 import type { PhotoRow } from '@/server/photos/photo-store'
@@ -22,6 +24,7 @@ export interface ListingPage {
   gate: GateVerdict | null
   alsoOnSale: number
   may: ShownListing['may']
+  at: Date
 }
 
 /** The pictures of a body in its order; one whose file is gone is left out. */
@@ -34,10 +37,16 @@ export function presentPhotos(body: ListingBody, photos: PhotoRow[]): ShownListi
   })
 }
 
+function wayTo(to: FoundPlace, { version, seller, gate, at }: ListingPage) {
+  const from = { lat: seller.cellLat, lng: seller.cellLng }
+  return { body: version.body, from, to, status: gate?.status ?? 'unknown', when: seasonWeek(at) }
+}
+
 /** The public page. Place and distance run between cell centres; nothing on it depends on the true point. */
 export function presentListing(page: ListingPage): ShownListing {
   const { listing, version, seller, place } = page
   const here = { lat: seller.cellLat, lng: seller.cellLng }
+  const shipped = place && presentShippedThroughYear(wayTo(place, page))
   const bearing = place ? bearingWords(place.centre, here) : null
   return {
     listingId: listing.publicId,
@@ -52,6 +61,7 @@ export function presentListing(page: ListingPage): ShownListing {
     ...here,
     windows: page.windows.map(presentWindow),
     ...(page.gate ? { gate: page.gate } : {}),
+    ...(shipped ? { shipped } : {}),
     photos: presentPhotos(version.body, page.photos),
     alsoOnSale: page.alsoOnSale,
     may: page.may,

@@ -55,5 +55,16 @@ export async function readListing(
     countOnSale(seller.id, { buyerState: place?.state, exceptId: listing.id }),
   ])
   const may = actsOn({ listing, seller, gate }, caller)
-  return presentListing({ listing, version, seller, windows, photos, place, gate, alsoOnSale, may })
+  return presentListing({
+    listing,
+    version,
+    seller,
+    windows,
+    photos,
+    place,
+    gate,
+    alsoOnSale,
+    may,
+    at: now(),
+  })
 }

@@ -1,5 +1,6 @@
 import { now } from '@/server/clock'
 import { findListing } from '@/server/listings/listing-store'
+import { seasonWeek } from '@/server/listings/season-week'
 import { requirePlace, type FoundPlace } from '@/server/places/find-place'
 import { listOnSale, type OnSaleRow } from '@/server/search/on-sale-store'
 import { presentFound, presentPlaceless } from '@/server/search/present-found'
@@ -35,7 +36,7 @@ async function tagsOf(rows: OnSaleRow[], seller: SellerRow, place: FoundPlace | 
   const km = distanceKm(place.centre, { lat: seller.cellLat, lng: seller.cellLng })
   return presentFound(
     priced.map((hit) => ({ ...hit, distanceKm: km })),
-    { place, at },
+    { place, destination: place, when: seasonWeek(at), at },
   )
 }
 

@@ -1,4 +1,6 @@
 import { describeListing } from '@/server/listings/describe-listing'
+import { presentShipped } from '@/server/listings/present-shipped'
+import type { SeasonWeek } from '@/server/listings/season-week'
 import { findPhotos } from '@/server/photos/photo-store'
 import type { FoundPlace } from '@/server/places/find-place'
 import { askGate, taxaOf } from '@/server/rules/ask-gate'
@@ -16,6 +18,9 @@ import { findTaxon } from '@/shared/domain/species/find-taxon'
 
 interface Around {
   place: FoundPlace
+  /** Where and when what is shipped would arrive. */
+  destination: FoundPlace
+  when: SeasonWeek
   at: Date
   count?: number | undefined
 }
@@ -26,20 +31,19 @@ interface Beside {
 }
 
 /** What a tag says wherever its reader is. */
-type PlacelessTag = Omit<FoundListing, 'distanceKm' | 'bearing' | 'legal'>
+type PlacelessTag = Omit<FoundListing, 'distanceKm' | 'bearing' | 'legal' | 'shipped'>
 
-/** The gate for each kind of animal and state on the page, judged once: a page holds many of a few kinds. */
-function legalBook(
-  rules: SpeciesRule[],
-  { place, at }: Around,
-): (facts: FoundFacts) => FoundListing['legal'] {
+type LegalBook = (facts: FoundFacts) => FoundListing['legal']
+
+/** The gate for each kind of animal and a buyer of that state, judged once: a page holds many of a few kinds. */
+function legalBook(rules: SpeciesRule[], buyerState: string, at: Date): LegalBook {
   const today = at.toISOString().slice(0, 10)
   const judged = new Map<string, FoundListing['legal']>()
   return ({ body, state }) => {
     const key = `${body.taxonId}|${state}|${/\d/.test(body.licenceNumbers)}`
     const known = judged.get(key)
     if (known) return known
-    const asked = { body, sellerState: state, buyerState: place.state, viewer: 'visitor' } as const
+    const asked = { body, sellerState: state, buyerState, viewer: 'visitor' } as const
     const taxa = taxaOf(body.taxonId)
     const own = rules.filter((rule) => taxa.includes(rule.taxonId))
     const { status, buy } = presentGate(askGate(asked, own, today), asked)
@@ -48,12 +52,15 @@ function legalBook(
   }
 }
 
-async function readLegalBook(all: FoundFacts[], around: Around) {
+/** Of the place searched from, and of the one where what is shipped would arrive. */
+async function readLegalBooks(all: FoundFacts[], { place, destination, at }: Around) {
   const rules = await loadRules({
     taxonIds: [...new Set(all.flatMap(({ body }) => taxaOf(body.taxonId)))],
-    jurisdictions: [...new Set(['US', around.place.state, ...all.map(({ state }) => state)])],
+    jurisdictions: [...new Set(['US', place.state, destination.state, ...all.map(({ state }) => state)])],
   })
-  return legalBook(rules, around)
+  const legal = legalBook(rules, place.state, at)
+  const legalThere = destination.state === place.state ? legal : legalBook(rules, destination.state, at)
+  return { legal, legalThere }
 }
 
 async function readGrounds(all: FoundFacts[]): Promise<Map<string, string>> {
@@ -107,18 +114,22 @@ export async function presentFound(hits: SearchHit[], around: Around): Promise<F
   const ids = hits.map((hit) => hit.listingId)
   const [found, windows] = await Promise.all([readFound(ids), readWindowsWithRoom(ids, around.at)])
   const all = [...found.values()]
-  const [grounds, legal] = await Promise.all([readGrounds(all), readLegalBook(all, around)])
+  const [grounds, { legal, legalThere }] = await Promise.all([readGrounds(all), readLegalBooks(all, around)])
+  const { destination: to, when } = around
   const beside = { windows, grounds }
   return hits.flatMap((hit) => {
     const facts = found.get(hit.listingId)
     if (!facts) return []
     const here = { lat: facts.cellLat, lng: facts.cellLng }
+    const { status } = legalThere(facts)
+    const shipped = presentShipped({ body: facts.body, from: here, to, status, when })
     return [
       {
         ...presentTag(hit, facts, { beside, count: around.count }),
         distanceKm: hit.distanceKm,
         bearing: bearingWords(around.place.centre, here) ?? 'here',
         legal: legal(facts),
+        ...(shipped ? { shipped } : {}),
       },
     ]
   })

@@ -1,5 +1,6 @@
 import type { FoundPlace } from '@/server/places/find-place'
 import { categoryCode } from '@/server/search/category-codes'
+import { safeLanesTo } from '@/server/search/safe-lanes-to'
 import { dayNumber } from '@/server/search/open-days'
 import type { SearchQuery } from '@/server/search/search-query'
 import { speciesCodeOf } from '@/server/search/search-row-of'
@@ -32,10 +33,21 @@ function readSize(filters: SearchFilters, wrong: FieldProblem[]): SearchQuery['s
   return size
 }
 
+/** Where and in which week of the table it should arrive. */
+interface ShipTo {
+  place: FoundPlace
+  week: number
+}
+
+const shippedTo = ({ place, week }: ShipTo): SearchQuery['shipped'] => ({
+  lanes: safeLanesTo(place.centre, week),
+  state: place.state,
+})
+
 /** What a buyer asks, in the codes and whole units of search; refuses wishes that contradict themselves. */
 export function readWishes(
   filters: SearchFilters,
-  around: { place: FoundPlace; today: string },
+  around: { place: FoundPlace; today: string; shipTo?: ShipTo | null },
 ): Omit<SearchQuery, 'sort' | 'limit'> {
   const wrong: FieldProblem[] = []
   const speciesCode = filters.species === undefined ? undefined : codeOf(filters.species)
@@ -56,5 +68,6 @@ export function readWishes(
     ...(days ? { days } : {}),
     ...(filters.mostCents === undefined ? {} : { mostCents: filters.mostCents }),
     ...(filters.pickup === 'yes' ? { handover: { pickup: true, lanes: [] } } : {}),
+    ...(around.shipTo ? { shipped: shippedTo(around.shipTo) } : {}),
   }
 }

@@ -26,6 +26,7 @@ export function searchColumns(row: SearchRow) {
     openDays,
     pickup: row.pickup ? 1 : 0,
     lane: row.lane,
+    shipStates: row.shipStates,
     hiddenStates: row.hiddenStates,
     ratingRank: row.ratingRank,
     latE6: Math.round(place.lat * 1e6),

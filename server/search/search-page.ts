@@ -1,8 +1,8 @@
 import { now } from '@/server/clock'
 import { findListing } from '@/server/listings/listing-store'
-import { requirePlace } from '@/server/places/find-place'
 import { presentFound } from '@/server/search/present-found'
 import { readFound } from '@/server/search/found-store'
+import { readPlaces } from '@/server/search/read-places'
 import { readWishes } from '@/server/search/read-wishes'
 import { readSearchCursor, writeSearchCursor } from '@/server/search/search-cursor'
 import type { SearchKey, SearchQuery } from '@/server/search/search-query'
@@ -27,16 +27,17 @@ async function cursorAfter(query: SearchQuery, next: SearchKey): Promise<string 
 
 /** One page of what can be bought near a place. */
 export async function searchPage(asked: Asked): Promise<ReplyOf<typeof searchListings>> {
-  const place = await requirePlace(asked.near, 'query:near')
   const at = now()
-  const wishes = readWishes(asked, { place, today: at.toISOString().slice(0, 10) })
+  const { place, destination, when, shipTo } = await readPlaces(asked, at)
+  const wishes = readWishes(asked, { place, shipTo, today: at.toISOString().slice(0, 10) })
   const query: SearchQuery = { ...wishes, sort: asked.sort, limit: asked.limit }
   const after = asked.cursor ? await keyAfter(asked.cursor, query) : undefined
   const page = await theSearch().search(after ? { ...query, after } : query)
   const nextCursor = page.next ? await cursorAfter(query, page.next) : undefined
   return {
-    items: await presentFound(page.hits, { place, at, count: asked.count }),
+    items: await presentFound(page.hits, { place, destination, when, at, count: asked.count }),
     ...(nextCursor ? { nextCursor } : {}),
+    thisMonday: when.thisMonday,
     place: { label: place.label, state: place.state, lat: place.centre.lat, lng: place.centre.lng },
   }
 }

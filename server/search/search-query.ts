@@ -31,6 +31,8 @@ export interface SearchQuery {
   mostCents?: number
   /** Can be collected, if `pickup`, or goes by one of the lanes. */
   handover?: { pickup: boolean; lanes: readonly number[] }
+  /** Is shipped to that state, by one of these lanes. */
+  shipped?: { lanes: readonly number[]; state: string }
   /** Two letters: leaves out what must not be shown there. */
   buyerState?: string
   sort: SearchSort

@@ -4,8 +4,11 @@ import { dayNumber, packOpenDays } from '@/server/search/open-days'
 import type { ListingFacts, OpenWindow } from '@/server/search/projection-store'
 import { meanRating } from '@/server/ratings/mean-rating'
 import { ratingRank } from '@/server/search/rating-rank'
-import { NO_LANE, type SearchRow, type SearchTier } from '@/server/search/search-row'
+import type { SearchRow, SearchTier } from '@/server/search/search-row'
 import { siteMean } from '@/server/search/site-mean'
+import { stateBit } from '@/shared/domain/rules/state-bits'
+import { laneOfBatch } from '@/shared/domain/season/lane-of-batch'
+import { NO_LANE } from '@/shared/domain/season/season-lane'
 import { findSpecies } from '@/shared/domain/species/find-species'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 
@@ -19,6 +22,15 @@ export function speciesCodeOf(taxonId: string): number {
 function tiersFrom(minOrder: number, tiers: readonly SearchTier[]): SearchTier[] {
   const first = tiers.findLastIndex((tier) => tier.fromCount <= minOrder)
   return tiers.slice(Math.max(0, first)).map(({ fromCount, unitCents }) => ({ fromCount, unitCents }))
+}
+
+/** How it is shipped, and to which of the states served it may be shown at all. */
+function shippingColumns({ body, cellLat, cellLng }: ListingFacts, hiddenStates: bigint) {
+  if (!body.shipping) return { lane: NO_LANE, shipStates: 0n }
+  const from = { lat: cellLat, lng: cellLng }
+  const lane = laneOfBatch({ taxonId: body.taxonId, packing: body.shipping.packing, from })
+  const served = body.statesServed.reduce((mask, state) => mask | (stateBit(state) ?? 0n), 0n)
+  return { lane, shipStates: lane === NO_LANE ? 0n : served & ~hiddenStates }
 }
 
 interface Around {
@@ -45,7 +57,7 @@ export function searchRowOf(facts: ListingFacts, around: Around): SearchRow | nu
     sizeHiMm: Math.round(body.sizeHiMm),
     ...days,
     pickup: true,
-    lane: NO_LANE,
+    ...shippingColumns(facts, around.hiddenStates),
     hiddenStates: around.hiddenStates,
     ratingRank: ratingRank({ mean: meanRating(facts), count: facts.ratingCount }, siteMean()),
     rev: around.rev,

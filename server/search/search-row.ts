@@ -10,8 +10,6 @@ export interface SearchTier {
 export const UNRATED_RANK = 501
 /** Not of a kind that has a length: fits every size asked for. */
 export const ANY_SIZE_MM = { lo: 0, hi: 65_535 } as const
-/** Not shipped. */
-export const NO_LANE = 0
 
 /** Every fact that search tests about one listing that may be found now. */
 export interface SearchRow {
@@ -33,7 +31,10 @@ export interface SearchRow {
   lastDay: number
   openDays: bigint
   pickup: boolean
+  /** Way of shipping, `NO_LANE` where not shipped. */
   lane: number
+  /** One bit a state that it is shipped to; none where not shipped. */
+  shipStates: bigint
   hiddenStates: bigint
   ratingRank: number
   /** Grows with every change of the listing. */

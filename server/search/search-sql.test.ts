@@ -24,6 +24,15 @@ describe('the text of a search', () => {
     expect(wishSql({ ...bare, handover: { pickup: false, lanes: [] } })).toEqual(['FALSE'])
   })
 
+  it('finds nothing when no lane is safe or the state is not one of ours', () => {
+    expect(wishSql({ ...bare, shipped: { lanes: [], state: 'AK' } })).toEqual(['FALSE'])
+    expect(wishSql({ ...bare, shipped: { lanes: [3], state: 'PR' } })).toEqual(['FALSE'])
+    expect(wishSql({ ...bare, shipped: { lanes: [3, 9], state: 'AK' } })).toEqual([
+      '(ship_states&2)<>0',
+      'lane IN (3,9)',
+    ])
+  })
+
   it('finds nothing in no ranges', () => expect(rangesSql('hil', [])).toBe('FALSE'))
 
   it('shows everything to a buyer from nowhere we know', () => {

@@ -53,17 +53,22 @@ export function firstDaySql({ days }: SearchQuery): string {
   return `IF(next_day>=${whole(days.from)},next_day,${whole(days.from)}+BIT_COUNT((${turned}^(${turned}-1))>>1))`
 }
 
+const laneSql = (lanes: readonly number[]) => `lane IN (${lanes.map(whole).join(',')})`
+
 function handoverSql({ pickup, lanes }: NonNullable<SearchQuery['handover']>): string {
-  const ways = [
-    ...(pickup ? ['pickup=1'] : []),
-    ...(lanes.length > 0 ? [`lane IN (${lanes.map(whole).join(',')})`] : []),
-  ]
+  const ways = [...(pickup ? ['pickup=1'] : []), ...(lanes.length > 0 ? [laneSql(lanes)] : [])]
   return ways.length > 0 ? `(${ways.join(' OR ')})` : 'FALSE'
+}
+
+/** The bit first: it is cheaper to test than the list. */
+function shippedSql({ lanes, state }: NonNullable<SearchQuery['shipped']>): string[] {
+  const bit = stateBit(state)
+  return bit === null || lanes.length === 0 ? ['FALSE'] : [`(ship_states&${whole(bit)})<>0`, laneSql(lanes)]
 }
 
 /** Every wish except place, category and species, as conditions on one row. */
 export function wishSql(query: SearchQuery): string[] {
-  const { sizeMm, count, days, mostCents, handover, buyerState } = query
+  const { sizeMm, count, days, mostCents, handover, shipped, buyerState } = query
   const wishes: string[] = []
   if (count !== undefined) wishes.push(`min_qty<=${whole(count)}`, `qty>=${whole(count)}`)
   if (sizeMm) wishes.push(`size_lo_mm<=${whole(sizeMm.to)}`, `size_hi_mm>=${whole(sizeMm.from)}`)
@@ -73,6 +78,7 @@ export function wishSql(query: SearchQuery): string[] {
     if (mask !== null) wishes.push(`(open_days&${whole(mask)})<>0`)
   }
   if (handover) wishes.push(handoverSql(handover))
+  if (shipped) wishes.push(...shippedSql(shipped))
   const hidden = buyerState === undefined ? null : stateBit(buyerState)
   if (hidden !== null) wishes.push(`(hidden_states&${whole(hidden)})=0`)
   if (mostCents !== undefined) wishes.push(`${priceSql(query)}<=${whole(mostCents)}`)

@@ -14,6 +14,7 @@ const ONE_DAY_SHARE = 0.2
 const PICKUP_SHARE = 0.7
 const SHIP_SHARE = 0.35
 const EITHER_SHARE = 0.8
+const SHIPPED_SHARE = 0.15
 /** Weight of a new observation against what was learnt before. */
 const LEARNING_RATE = 0.1
 const MOST_REMEMBERED = 512
@@ -46,6 +47,7 @@ function firstGuess(query: SearchQuery): { wishes: string; share: number } {
     wish(oneDay ? 'day' : 'days', oneDay ? ONE_DAY_SHARE : DAYS_SHARE)
   }
   if (query.handover) wish(...handoverStep(query.handover))
+  if (query.shipped) wish('shipped', SHIPPED_SHARE)
   return { wishes: names.join(' '), share }
 }
 

@@ -25,6 +25,7 @@ const rowWith = (more: Partial<SearchRow>): SearchRow => ({
   openDays: 1n << 11n,
   pickup: true,
   lane: 0,
+  shipStates: 0n,
   hiddenStates: 0n,
   ratingRank: 80,
   rev: 1,

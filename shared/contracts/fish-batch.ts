@@ -1,6 +1,8 @@
 import { z } from 'zod'
 
 import { cents, dayText, line, photoId, stateCode, words } from '@/shared/contracts/values'
+import { packingClasses } from '@/shared/domain/season/season-classes.facts'
+import { packingClassIds } from '@/shared/domain/season/season-lane'
 
 const QUARTER_INCH_MM = 6.35
 const TWO_INCHES_MM = 50.8
@@ -36,6 +38,23 @@ export type TypedWindow = z.output<typeof typedWindow>
 export const batchPhoto = z
   .object({ photoId, takenOn: dayText, hasRuler: z.boolean(), caption: line(120).optional() })
   .strict()
+
+export const shipDays = ['mon', 'tue', 'wed'] as const
+export type ShipDay = (typeof shipDays)[number]
+
+/** How a batch may be shipped, to the states it is sold to; the packing says whether it is one night or two days. */
+export const batchShipping = z
+  .object({
+    packing: z.enum(packingClassIds, { message: 'What do you pack them in, and how long is the way?' }),
+    boxCents: cents.min(0, 'What you charge for a packed box; 0 is an answer.').max(100_000),
+    mostInBox: wholeCount(1, 'The most animals you put in one box.'),
+    days: z
+      .array(z.enum(shipDays))
+      .min(1, 'On which days do you ship?')
+      .refine((days) => new Set(days).size === days.length, 'Each day once.'),
+  })
+  .strict()
+export type BatchShipping = z.output<typeof batchShipping>
 
 /**
  * A batch of fish (crayfish and prawns too) as published: rules of trade practice, one message a field.
@@ -111,6 +130,7 @@ export const fishBody = z
         evidence: line(200).min(1, 'What should the buyer show you?'),
       })
       .strict(),
+    shipping: batchShipping.optional(),
     photos: z.array(batchPhoto).min(1, 'At least one photo of this batch.').max(6, 'At most six photos.'),
     words: words(2000),
   })
@@ -143,6 +163,10 @@ export const fishBody = z
     if (batch.origin === 'bought-in' && !batch.originState) wrong(['originState'], 'From which state?')
     if (!batch.photos.some((photo) => photo.hasRuler)) {
       wrong(['photos'], 'One photo must show the animals beside a ruler.')
+    }
+    const { shipping } = batch
+    if (shipping && packingClasses[shipping.packing].nights > 1 && shipping.days.includes('wed')) {
+      wrong(['shipping', 'days'], 'Two days on the way: ship on Monday or Tuesday, so that no box waits over a weekend.')
     }
     batch.windows.forEach((window, at) => {
       if (window.until <= window.from) wrong(['windows', at, 'until'], 'The window must end after it starts.')

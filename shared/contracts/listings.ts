@@ -3,6 +3,7 @@ import { z } from 'zod'
 import { endpoint } from '@/shared/api/endpoint'
 import { fishBody } from '@/shared/contracts/fish-batch'
 import { gateVerdict } from '@/shared/contracts/rules'
+import { shippedThroughYear } from '@/shared/contracts/shipping'
 import { sellerCard } from '@/shared/contracts/sellers'
 import { instantText, line, pageOf, publicIdText } from '@/shared/contracts/values'
 import { takeDownReasons } from '@/shared/domain/listings/take-down-reasons'
@@ -53,6 +54,8 @@ export const shownListing = z.object({
   lng: z.number(),
   windows: z.array(shownWindow),
   gate: gateVerdict.optional(),
+  /** Of a batch that may be shipped, once a place is said. */
+  shipped: shippedThroughYear.optional(),
   photos: z.array(
     z.object({
       photoId: z.string(),

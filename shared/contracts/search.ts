@@ -1,6 +1,7 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
+import { shippedTo } from '@/shared/contracts/shipping'
 import { cents, dayText, pageOf, publicIdText, stateCode } from '@/shared/contracts/values'
 
 export const categories = ['fish', 'worms', 'media', 'produce'] as const
@@ -8,9 +9,13 @@ export const searchSorts = ['nearest', 'cheapest', 'soonest', 'best-rated'] as c
 
 const wholeNumber = (least: number, most: number) => z.coerce.number().int().min(least).max(most)
 
+const nearText = z
+  .string()
+  .regex(/^(\d{5}|\d{2,3}\.\d{1,4}\.\d{1,4})$/, 'A ZIP code or a place from the list.')
+
 /** `near` is a ZIP or a location cell id: a finer point never leaves the device. */
 export const searchFilters = z.object({
-  near: z.string().regex(/^(\d{5}|\d{2,3}\.\d{1,4}\.\d{1,4})$/, 'A ZIP code or a place from the list.'),
+  near: nearText,
   withinKm: wholeNumber(1, 4000).default(160),
   category: z.enum(categories).optional(),
   species: z.string().max(60).optional(),
@@ -21,6 +26,9 @@ export const searchFilters = z.object({
   until: dayText.optional(),
   mostCents: wholeNumber(1, 10_000_000).optional(),
   pickup: z.enum(['yes', 'any']).default('any'),
+  /** Either of the two asks for what may be shipped: to `shipTo` (else to `near`) in ISO week `shipWeek` (else this one). */
+  shipTo: nearText.optional(),
+  shipWeek: wholeNumber(1, 53).optional(),
 })
 
 export const searchQuery = searchFilters.extend({
@@ -58,6 +66,8 @@ export const foundListing = z.object({
   rating: z.object({ mean: z.number(), count: z.int() }).optional(),
   photo: z.object({ photoId: z.string(), ground: z.string(), alt: z.string() }).optional(),
   legal: z.object({ status: z.string(), buy: z.string() }),
+  /** Of a batch that may be shipped. */
+  shipped: shippedTo.optional(),
 })
 export type FoundListing = z.output<typeof foundListing>
 
@@ -88,6 +98,8 @@ export const searchListings = endpoint({
   reply: z.object({
     items: z.array(foundListing),
     nextCursor: z.string().optional(),
+    /** The Monday of this week by the product's clock. */
+    thisMonday: dayText,
     place: z.object({ label: z.string(), state: stateCode, lat: z.number(), lng: z.number() }),
   }),
 })

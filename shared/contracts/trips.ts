@@ -1,6 +1,7 @@
 import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
+import { seasonVerdict } from '@/shared/contracts/shipping'
 import { dayText, publicIdText } from '@/shared/contracts/values'
 
 /** Usual air of one day at one place, °C, with its day-to-day spread. */
@@ -25,8 +26,6 @@ export const readWayHome = endpoint({
   query: z.object({ near: z.string().max(24), day: dayText }),
   reply: wayHome,
 })
-
-const seasonVerdict = z.enum(['safe', 'safe-with-packs', 'too-cold', 'too-hot', 'unknown'])
 
 export const readSeason = endpoint({
   method: 'GET',

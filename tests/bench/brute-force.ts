@@ -45,7 +45,7 @@ function firstOpenDay(made: MadeListings, at: number, { days }: SearchQuery): nu
 }
 
 function meets(made: MadeListings, at: number, query: SearchQuery): boolean {
-  const { categoryCode, speciesCode, sizeMm, count, handover, buyerState } = query
+  const { categoryCode, speciesCode, sizeMm, count, handover, shipped, buyerState } = query
   if (made.alive[at] === 0) return false
   if (speciesCode !== undefined && made.species[at] !== speciesCode) return false
   if (categoryCode !== undefined && made.category[at] !== categoryCode) return false
@@ -54,6 +54,10 @@ function meets(made: MadeListings, at: number, query: SearchQuery): boolean {
   if (handover) {
     const collected = handover.pickup && made.pickup[at] === 1
     if (!collected && !handover.lanes.includes(made.lane[at] ?? 0)) return false
+  }
+  if (shipped) {
+    const served = (made.shipStates[at] ?? 0n) & (stateBit(shipped.state) ?? 0n)
+    if (served === 0n || !shipped.lanes.includes(made.lane[at] ?? 0)) return false
   }
   const state = buyerState === undefined ? null : stateBit(buyerState)
   return state === null || ((made.hiddenStates[at] ?? 0n) & state) === 0n

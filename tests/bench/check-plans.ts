@@ -16,6 +16,7 @@ const everyWish: Omit<SearchQuery, 'sort'> = {
   days: { from: TODAY, until: TODAY + 20 },
   mostCents: 300,
   handover: { pickup: true, lanes: [1, 2, 3] },
+  shipped: { lanes: Array.from({ length: 257 }, (_, at) => 2 * at + 1), state: 'OH' },
   buyerState: 'OH',
   limit: 24,
 }

@@ -29,6 +29,7 @@ export class MadeListings {
   readonly openAfter: Uint32Array
   readonly pickup: Uint8Array
   readonly lane: Uint16Array
+  readonly shipStates: BigUint64Array
   readonly hiddenStates: BigUint64Array
   readonly ratingRank: Uint16Array
   readonly rev: Uint32Array
@@ -55,6 +56,7 @@ export class MadeListings {
     this.openAfter = new Uint32Array(count)
     this.pickup = new Uint8Array(count)
     this.lane = new Uint16Array(count)
+    this.shipStates = new BigUint64Array(count)
     this.hiddenStates = new BigUint64Array(count)
     this.ratingRank = new Uint16Array(count)
     this.rev = new Uint32Array(count)
@@ -106,6 +108,7 @@ export class MadeListings {
       openDays,
       pickup: this.pickup[at] === 1,
       lane: this.lane[at] ?? 0,
+      shipStates: this.shipStates[at] ?? 0n,
       hiddenStates: this.hiddenStates[at] ?? 0n,
       ratingRank: this.ratingRank[at] ?? 0,
       rev: this.rev[at] ?? 0,

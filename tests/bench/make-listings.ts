@@ -1,5 +1,5 @@
 import { cellAt, cellCentre, type CellPoint } from '@/shared/domain/geo/location-cell'
-import { stateBit } from '@/shared/domain/rules/state-bits'
+import { stateBit, usStates } from '@/shared/domain/rules/state-bits'
 import { chances, weighted, type Chances } from '@/tests/bench/chances'
 import { MadeListings } from '@/tests/bench/made-listings'
 import places from '@/tests/bench/us-cities.json'
@@ -90,6 +90,15 @@ function makeDays(made: MadeListings, at: number, chance: Chances): void {
   made.openAfter[at] = open >>> 0
 }
 
+/** Two states in three, others for each lane; nothing is drawn for it, so that the rest stays as it was. */
+function statesShippedTo(lane: number): bigint {
+  if (lane === 0) return 0n
+  return usStates.reduce(
+    (mask, state, at) => ((at + lane) % 3 === 0 ? mask : mask | (stateBit(state) ?? 0n)),
+    0n,
+  )
+}
+
 /** Fills in everything about one listing but its seller; also used to change it later. */
 export function makeFacts(made: MadeListings, at: number, chance: Chances): void {
   makePrices(made, at, chance)
@@ -100,6 +109,7 @@ export function makeFacts(made: MadeListings, at: number, chance: Chances): void
   made.sizeHi[at] = sized ? Math.min(60_000, shortest + chance.between(6, 50)) : 65_535
   made.pickup[at] = chance.yes(0.85) ? 1 : 0
   made.lane[at] = made.pickup[at] === 0 || chance.yes(0.55) ? chance.between(1, LANES) : 0
+  made.shipStates[at] = statesShippedTo(made.lane[at] ?? 0)
   const barred = chance.yes(0.4) ? [chance.pick(cities).state, chance.pick(cities).state] : []
   made.hiddenStates[at] = barred.reduce((mask, state) => mask | (stateBit(state) ?? 0n), 0n)
 }

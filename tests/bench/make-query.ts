@@ -6,7 +6,7 @@ import type { SearchQuery, SearchSort } from '@/server/search/search-query'
 
 export const PAGE = 24
 
-export type Shape = 'A' | 'B' | 'C' | 'D' | 'E' | 'F' | 'G'
+export type Shape = 'A' | 'B' | 'C' | 'D' | 'E' | 'F' | 'G' | 'H'
 
 export const shapes: Record<Shape, string> = {
   A: 'typical: category and species, 50 to 200 km, count, price cap, pickup or ship',
@@ -16,6 +16,7 @@ export const shapes: Record<Shape, string> = {
   E: 'cheapest of a category in 200 km',
   F: 'soonest of a category in 200 km, within two weeks',
   G: 'best rated of a category, anywhere',
+  H: 'as A, but shipped to the buyer in a week',
 }
 
 /** Draws a buyer: a town by its people, a little out of it, as a cell. */
@@ -122,6 +123,10 @@ export function shapedQueries(shape: Shape, made: MadeListings, chance: Chances)
       categoryCode: chance.pick([1, 2, 4]),
       radiusKm: 4000,
     }),
+    H: () => {
+      const { handover: _either, ...asked } = make.A()
+      return { ...asked, shipped: { lanes: safeLanes(chance), state: asked.buyerState ?? 'OH' } }
+    },
   }
   return make[shape]
 }
@@ -152,6 +157,10 @@ export function anyQuery(made: MadeListings, chance: Chances): () => SearchQuery
       handover: maybe(0.4, () => ({
         pickup: chance.yes(0.7),
         lanes: chance.yes(0.5) ? safeLanes(chance) : [],
+      })),
+      shipped: maybe(0.12, () => ({
+        lanes: chance.yes(0.9) ? safeLanes(chance) : [],
+        state: buyerState ?? 'OH',
       })),
       buyerState: maybe(0.6, () => buyerState ?? 'OH'),
       sort: chance.pick(['nearest', 'cheapest', 'soonest', 'best-rated'] as const),

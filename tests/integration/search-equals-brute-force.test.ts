@@ -21,7 +21,7 @@ import { makeFacts, makeListings } from '@/tests/bench/make-listings'
 import { freshDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const LISTINGS = 4_000
-const QUESTIONS = 300
+const QUESTIONS = 340
 
 describe('search', () => {
   const made = makeListings(LISTINGS, 42)

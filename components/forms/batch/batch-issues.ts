@@ -48,7 +48,7 @@ const lent: Record<string, unknown> = {
   words: '',
 } satisfies Record<keyof Omit<FishBody, OptionalField>, unknown>
 
-type OptionalField = 'strain' | 'readyOn' | 'mostPerBuyer' | 'sexClaimPct' | 'originState'
+type OptionalField = 'strain' | 'readyOn' | 'mostPerBuyer' | 'sexClaimPct' | 'originState' | 'shipping'
 
 /** Everything the contract has to say about a draft, the rules between fields included. Empty: it may be published. */
 export function batchIssues(draft: ListingDraft): z.core.$ZodIssue[] {

@@ -1,0 +1,5 @@
+DROP INDEX `k_species` ON `listing_search`;--> statement-breakpoint
+DROP INDEX `k_price` ON `listing_search`;--> statement-breakpoint
+ALTER TABLE `listing_search` ADD `ship_states` bigint unsigned NOT NULL;--> statement-breakpoint
+CREATE INDEX `k_species` ON `listing_search` (`species`,`hil`,`x`,`y`,`z`,`qty`,`min_qty`,`price1`,`from2`,`price2`,`from3`,`price3`,`from4`,`price4`,`more_tiers`,`size_lo_mm`,`size_hi_mm`,`next_day`,`last_day`,`open_days`,`pickup`,`lane`,`ship_states`,`hidden_states`,`rating_rank`);--> statement-breakpoint
+CREATE INDEX `k_price` ON `listing_search` (`category`,`small_price`,`listing_id`,`x`,`y`,`z`,`species`,`qty`,`min_qty`,`price1`,`from2`,`price2`,`from3`,`price3`,`from4`,`price4`,`more_tiers`,`size_lo_mm`,`size_hi_mm`,`next_day`,`last_day`,`open_days`,`pickup`,`lane`,`ship_states`,`hidden_states`);
