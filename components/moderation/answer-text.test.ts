@@ -5,6 +5,8 @@ import { answerText, answerWords } from './answer-text'
 it('names species by both names and choices in words', () => {
   expect(answerText('taxonId', 'bluegill')).toBe('Bluegill (Lepomis macrochirus)')
   expect(answerText('countMethod', 'sample-weight')).toBe('by weighed samples')
+  expect(answerText('shipping.packing', 'carton-two-days')).toBe('Plain carton, two days')
+  expect(answerText('shipping.boxCents', 1200)).toBe('$12.00')
   expect(answerText('sex', 'mixed')).toBe('mixed')
   expect(answerText('sizeLoMm', 57.15)).toBe('2¼ in')
 })

@@ -1,3 +1,4 @@
+import { packingWords } from '@/components/trips/packing-words'
 import { printAnswer } from '@/shared/domain/listings/print-answer'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 
@@ -10,6 +11,7 @@ const choices: Record<string, Record<string, string>> = {
   accept: { ask: 'answers each request', instant: 'at once' },
   balanceDue: { 'at-handover': 'at the pickup', before: '48 hours before' },
   'water.source': { town: 'town water' },
+  'shipping.packing': packingWords,
 }
 const lists = ['tiers', 'windows', 'photos']
 

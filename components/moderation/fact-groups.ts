@@ -61,6 +61,10 @@ export const factGroups: readonly { title: string; fields: readonly string[] }[]
       'promise.survivalDays',
       'promise.remedy',
       'promise.evidence',
+      'shipping.packing',
+      'shipping.boxCents',
+      'shipping.mostInBox',
+      'shipping.days',
     ],
   },
 ]

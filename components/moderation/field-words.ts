@@ -47,6 +47,10 @@ const names: Record<string, string> = {
   'promise.survivalDays': 'Survival promised, days',
   'promise.remedy': 'Remedy',
   'promise.evidence': 'Evidence asked',
+  'shipping.packing': 'Shipped in',
+  'shipping.boxCents': 'Box charge',
+  'shipping.mostInBox': 'Most in a box',
+  'shipping.days': 'Ships on',
   photos: 'Photos',
   words: 'Own words',
 }

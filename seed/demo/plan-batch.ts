@@ -15,6 +15,9 @@ import { after, DAY_MS, HOUR_MS } from '@/seed/demo/timeline'
 import { picturePlans, type PicturePlan } from '@/seed/pictures/picture-plan.facts'
 import { seededRandom, type Chance } from '@/seed/seeded-random'
 import { dayOf } from '@/server/listings/day-of'
+import { packingClasses } from '@/shared/domain/season/season-classes.facts'
+import { animalClassOf } from '@/shared/domain/season/season-lane'
+import { findTaxon } from '@/shared/domain/species/find-taxon'
 import type { TaxonId } from '@/shared/domain/species/taxa.facts'
 
 const MM_PER_INCH = 25.4
@@ -101,6 +104,26 @@ function shotsOf(wish: BatchWish, first: PicturePlan, day: string): Shot[] {
   }))
 }
 
+/** A third of the batches can be shipped; drawn apart, so that everything else about them stays as it was. */
+function shippingOf({ key, taxonId }: BatchWish, minOrder: number): Pick<BatchPlan['body'], 'shipping'> {
+  const chance = seededRandom(`shipping ${key}`)
+  const speciesId = findTaxon(taxonId)?.speciesId
+  if (!chance.happens(1 / 3) || !speciesId || !animalClassOf(speciesId)) return {}
+  // Mostly the thick box overnight: by the season table little else is ever safe.
+  const packing = chance.happens(0.8)
+    ? 'foam-38-overnight'
+    : chance.pick(['foam-25-overnight', 'foam-38-two-days'] as const)
+  const isTwoDays = packingClasses[packing].nights > 1
+  return {
+    shipping: {
+      packing,
+      boxCents: chance.pick([800, 1000, 1200, 1500]),
+      mostInBox: minOrder * chance.whole(2, 6),
+      days: isTwoDays || chance.happens(0.4) ? ['mon', 'tue'] : ['mon', 'tue', 'wed'],
+    },
+  }
+}
+
 /** A sound batch of that farm and kind, as its seller would have typed it that day. */
 export function planBatch(stage: Stage, wish: BatchWish): BatchPlan {
   const { key, farm, taxonId, daysAgo } = wish
@@ -168,6 +191,7 @@ export function planBatch(stage: Stage, wish: BatchWish): BatchPlan {
         remedy: chance.happens(0.8) ? 'refund' : 'replace',
         evidence: chance.pick(evidences),
       },
+      ...shippingOf(wish, minOrder),
       words: [chance.pick(openings), chance.pick(advice), chance.pick(extras)].filter(Boolean).join(' '),
     },
   }

@@ -104,6 +104,13 @@ const parts: readonly ((page: Page) => Promise<void>)[] = [
     await button(page, 'Add a pickup window').click()
     await page.getByRole('group', { name: 'Pickup window 1' }).waitFor()
   },
+  async function shipping(page) {
+    await page.getByRole('checkbox', { name: /can be shipped/ }).click()
+    await field(page, 'Packed in').selectOption({ label: 'Foam box with 1 1/2 in walls, overnight' })
+    await field(page, 'Charge for a box').fill('12')
+    await field(page, 'Most fish in a box').fill('100')
+    await button(page, 'Monday').click()
+  },
   async function depositAndPromise(page) {
     await field(page, 'Deposit').fill('30')
   },

@@ -47,6 +47,7 @@ export function batchDefaults({ ownState, licenceNumbers }: Given): BatchTyping 
       remedy: 'refund',
       evidence: 'A photo of every dead fish, beside the bag if there was one',
     },
+    shipping: { isOffered: false, packing: '', boxCents: '', mostInBox: '', days: [] },
     photos: [],
     words: '',
   }

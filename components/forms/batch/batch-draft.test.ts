@@ -72,6 +72,21 @@ describe('a batch between the form and its draft', () => {
     }
   })
 
+  it('comes back with its shipping, and leaves it out where the switch is off', () => {
+    const shipping = {
+      packing: 'carton-two-days',
+      boxCents: 1200,
+      mostInBox: 80,
+      days: ['mon', 'tue'],
+    } as const
+    const shipped = { ...body, shipping: { ...shipping, days: [...shipping.days] } }
+    const typing = typingFromDraft(shipped, { base, units: 'us' })
+    expect(typing.shipping).toMatchObject({ isOffered: true, boxCents: '$12.00', days: ['mon', 'tue'] })
+    expect(draftFromTyping(typing, { was: shipped, units: 'us' })).toEqual(shipped)
+    const off = { ...typing, shipping: { ...typing.shipping, isOffered: false } }
+    expect(draftFromTyping(off, { was: shipped, units: 'us' })).toEqual(body)
+  })
+
   it('shows figures in the units of the seller', () => {
     expect(typingFromDraft(body, { base, units: 'us' })).toMatchObject({
       sizeLoMm: '2 in',
@@ -99,6 +114,20 @@ describe('a batch between the form and its draft', () => {
 describe('what is still missing', () => {
   it('has nothing to say about a whole batch', () => {
     expect(batchIssues(draftOf({}))).toEqual([])
+  })
+
+  it('asks how a shipped batch travels, and keeps two days on the way clear of the weekend', () => {
+    const blank = { isOffered: true, packing: '', boxCents: '', mostInBox: '', days: [] } as const
+    expect(told({ shipping: { ...blank, days: [] } })).toMatchObject({
+      'shipping.packing': 'What do you pack them in, and how long is the way?',
+      'shipping.mostInBox': 'The most animals you put in one box.',
+      'shipping.days': 'On which days do you ship?',
+    })
+    const way = { isOffered: true, boxCents: '12', mostInBox: '80', days: ['tue', 'wed'] }
+    expect(told({ shipping: { ...way, packing: 'carton-overnight' } })).toEqual({})
+    expect(told({ shipping: { ...way, packing: 'carton-two-days' } })).toEqual({
+      'shipping.days': 'Two days on the way: ship on Monday or Tuesday, so that no box waits over a weekend.',
+    })
   })
 
   it('refuses a price that does not fall, although other answers are still missing', () => {

@@ -18,6 +18,8 @@ export const batchFigures: Readonly<Record<string, Figure>> = {
   'water.khPpm': figures.ppm,
   'water.saltPpt': figures.saltPpt,
   'windows.capacity': figures.count,
+  'shipping.boxCents': figures.cents,
+  'shipping.mostInBox': figures.count,
   depositPct: figures.percent,
   freeCancelHours: figures.hours,
   'promise.windowHours': figures.hours,

@@ -48,7 +48,7 @@ export function BatchForm(props: BatchFormProps) {
     defaultValues: openTyping(props),
     resolver: issueResolver<BatchTyping>((typing) => batchIssues(readDraft(typing)), {
       lists: batchLists,
-      whole: ['statesServed'],
+      whole: ['statesServed', 'shipping.days'],
       asks: batchAsks,
     }),
     mode: 'onTouched',

@@ -3,6 +3,7 @@ import { LegalGroup } from './legal-group'
 import { PhotosGroup } from './photos-group'
 import { PickupGroup } from './pickup-group'
 import { PromiseGroup } from './promise-group'
+import { ShippingGroup } from './shipping-group'
 import { SpeciesSizeGroup } from './species-size-group'
 import { WaterHealthGroup } from './water-health-group'
 
@@ -37,6 +38,8 @@ export function BatchGroup({ stepId, setting }: Props) {
       return <LegalGroup farm={setting.farm} />
     case 'pickup':
       return <PickupGroup farm={setting.farm} today={setting.today} />
+    case 'shipping':
+      return <ShippingGroup />
     case 'promise':
       return <PromiseGroup />
     case 'photos':

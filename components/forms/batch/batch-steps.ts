@@ -37,6 +37,7 @@ export const batchSteps: readonly BatchStep[] = [
     fields: ['origin', 'originState', 'wildCaught', 'singleSpeciesChecked', 'licenceNumbers', 'statesServed'],
   },
   { id: 'pickup', title: 'Pickup', fields: ['placeKind', 'windows', 'accept', 'balanceDue'] },
+  { id: 'shipping', title: 'Shipping (optional)', fields: ['shipping'] },
   { id: 'promise', title: 'Deposit and promise', fields: ['depositPct', 'freeCancelHours', 'promise'] },
   { id: 'photos', title: 'Photos', fields: ['photos', 'words'] },
 ]

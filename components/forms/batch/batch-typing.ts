@@ -1,4 +1,4 @@
-import type { FishBody } from '@/shared/contracts/fish-batch'
+import type { BatchShipping, FishBody } from '@/shared/contracts/fish-batch'
 
 /** A batch as it stands in the form: figures are the words the seller typed, '' is not answered yet. */
 export interface BatchTyping {
@@ -47,6 +47,13 @@ export interface BatchTyping {
     survivalDays: string
     remedy: FishBody['promise']['remedy']
     evidence: string
+  }
+  shipping: {
+    isOffered: boolean
+    packing: BatchShipping['packing'] | ''
+    boxCents: string
+    mostInBox: string
+    days: string[]
   }
   photos: PhotoTyping[]
   words: string

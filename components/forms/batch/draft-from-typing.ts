@@ -16,7 +16,10 @@ const askedTexts = ['words', 'health.treatments', 'health.lastLosses', 'licenceN
 
 /** The form's words as the draft that is stored: figures inside units; words that are no figure stay as typed. */
 export function draftFromTyping(typing: BatchTyping, { was, units }: Options): ListingDraft {
-  const draft = unwind({ typed: typing, was, path: '', units }) as ListingDraft
+  const { shipping, ...others } = typing
+  const { isOffered, ...way } = shipping
+  const typed = isOffered ? { ...others, shipping: way } : others
+  const draft = unwind({ typed, was, path: '', units }) as ListingDraft
   return { category: 'fish', ...draft }
 }
 

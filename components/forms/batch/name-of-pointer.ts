@@ -12,6 +12,7 @@ export function nameOfPointer(pointer: string): FieldPath<BatchTyping> | null {
   const name = (steps[0] === 'draft' ? steps.slice(1) : steps).join('.')
   if (stepOfField(name) === checkStep) return null
   if (name.startsWith('statesServed')) return 'statesServed' // one control answers for all the states
+  if (name.startsWith('shipping.days')) return 'shipping.days'
   const isList = batchLists.some((list) => list === name)
   return (isList ? `${name}.root` : name) as FieldPath<BatchTyping>
 }

@@ -1,4 +1,5 @@
 import { figures } from '@/components/forms/figure'
+import { canBeShipped } from '@/components/listings/shipping-words'
 import { stageName } from '@/components/listings/stage-words'
 import { printDay } from '@/components/forms/day-text'
 import { photoUrl } from '@/hooks/api'
@@ -41,7 +42,7 @@ export function previewFacts(typing: BatchTyping, { units, placeText }: Options)
     photoUrl: photo ? photoUrl(photo.photoId, 800) : undefined,
     photoText: photo?.caption || undefined,
     icon: 'fish',
-    badges: [],
+    badges: typing.shipping.isOffered ? [canBeShipped] : [],
   }
 }
 

@@ -15,11 +15,16 @@ const emptyRows: Record<string, unknown> = {
   windows: { day: '', from: '', until: '', capacity: '' },
   photos: { photoId: '', takenOn: '', hasRuler: false, caption: '' },
   statesServed: '',
+  'shipping.days': '',
 }
 
 /** A stored draft as the form shows it: figures printed in the seller's units, unreadable words as they were typed. */
 export function typingFromDraft(draft: ListingDraft, { base, units }: Options): BatchTyping {
-  return overlay({ base, given: draft, path: '', units }) as BatchTyping
+  const { shipping } = draft
+  // The switch is no answer of its own: a draft that says how it is shipped is shipped.
+  const isOffered = typeof shipping === 'object' && shipping !== null
+  const given = isOffered ? { ...draft, shipping: { ...shipping, isOffered } } : draft
+  return overlay({ base, given, path: '', units }) as BatchTyping
 }
 
 interface Layer {

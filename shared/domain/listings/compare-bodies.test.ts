@@ -22,6 +22,7 @@ const approved = {
   photos: [{ photoId: 'a'.repeat(32), takenOn: '2027-01-12', hasRuler: true }],
   words: 'Graded twice.',
 }
+const shipping = { packing: 'foam-38-overnight', boxCents: 1200, mostInBox: 100, days: ['mon', 'tue'] }
 const edit = (change: Record<string, unknown>) => effectOfEdit(approved, { ...approved, ...change })
 
 describe('editing an approved listing', () => {
@@ -31,6 +32,7 @@ describe('editing an approved listing', () => {
     ['another origin', { origin: 'bought-in', originState: 'IN' }],
     ['a treatment', { health: { treatments: 'Salt, 3 days', lastLosses: 'None' } }],
     ['another hatch date', { hatchedOn: '2026-10-02' }],
+    ['shipping that was not offered', { shipping }],
     ['a lower price together with another species', { taxonId: 'bluegill', tiers: [] }],
   ])('hides it for %s', (_, change) => expect(edit(change)).toBe('hide'))
 
@@ -53,6 +55,16 @@ describe('editing an approved listing', () => {
     ['a ready date', { readyOn: '2027-02-01' }],
   ])('goes live at once with %s', (_, change) => expect(edit(change)).toBe('live'))
 
+  it.each([
+    ['another packing', { packing: 'carton-overnight' }],
+    ['another box charge', { boxCents: 1500 }],
+    ['another ship day', { days: ['mon'] }],
+  ])('hides a shipped listing for %s, and lets it stop shipping at once', (_, change) => {
+    const shipped = { ...approved, shipping }
+    expect(effectOfEdit(shipped, { ...shipped, shipping: { ...shipping, ...change } })).toBe('hide')
+    expect(effectOfEdit(shipped, approved)).toBe('live')
+  })
+
   it('finds nothing to do when the same is said in another order', () => {
     expect(edit({ water: { pH: 7.4, temperatureC: 22 } })).toBeNull()
   })
@@ -74,6 +86,16 @@ describe('two versions side by side', () => {
       { field: 'tiers', before: 'from 25: $1.00; from 100: $0.89', after: 'from 25: $0.95', material: false },
       { field: 'words', before: 'Graded twice.', after: 'Graded.', material: false },
       { field: 'readyOn', before: '', after: '2027-02-01', material: false },
+    ])
+  })
+
+  it('prints how it is shipped', () => {
+    const told = compareBodies(approved, { ...approved, shipping }).map(({ field, after }) => [field, after])
+    expect(told).toEqual([
+      ['shipping.packing', 'foam-38-overnight'],
+      ['shipping.boxCents', '$12.00'],
+      ['shipping.mostInBox', '100'],
+      ['shipping.days', 'Mon, Tue'],
     ])
   })
 

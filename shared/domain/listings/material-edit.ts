@@ -57,10 +57,14 @@ function servesMore(before: BodyFields, after: BodyFields): boolean {
   return !Array.isArray(was) || !Array.isArray(is) || is.some((state) => !was.includes(state))
 }
 
+/** Another way of shipping may be another fate on the way; that nothing is shipped any more can wait for nobody. */
+const effectOfShipping = (after: BodyFields): EditEffect => (after['shipping'] ? 'hide' : 'live')
+
 /** Everything not named above, and whatever field is added later, is read by a moderator first. */
 export function effectOfField(field: string, before: BodyFields, after: BodyFields): EditEffect {
   if (hides.includes(field)) return 'hide'
   if (field === 'statesServed') return servesMore(before, after) ? 'wait' : 'live'
+  if (field.startsWith('shipping.')) return effectOfShipping(after)
   return goesLive.includes(field) ? 'live' : 'wait'
 }
 

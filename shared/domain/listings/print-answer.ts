@@ -21,6 +21,8 @@ interface Photo {
   caption?: string
 }
 
+const capitalised = (word: string) => `${word.charAt(0).toUpperCase()}${word.slice(1)}`
+
 function printList(field: string, list: readonly unknown[]): string {
   if (field === 'tiers') {
     return (list as Tier[]).map((one) => `from ${one.fromCount}: ${printCents(one.unitCents)}`).join('; ')
@@ -39,6 +41,7 @@ function printList(field: string, list: readonly unknown[]): string {
       )
       .join('; ')
   }
+  if (field === 'shipping.days') return list.map((day) => capitalised(String(day))).join(', ')
   return list.map(String).join(', ')
 }
 
@@ -48,6 +51,7 @@ export function printAnswer(field: string, value: unknown): string {
   if (Array.isArray(value)) return printList(field, value)
   if (typeof value === 'boolean') return value ? 'yes' : 'no'
   if (typeof value === 'number' && field.endsWith('Mm')) return printLength(value / MM_PER_CM, 'us')
+  if (typeof value === 'number' && field.endsWith('Cents')) return printCents(value)
   if (typeof value === 'number' && field.endsWith('temperatureC')) return printBothTemperatures(value, 'us')
   return String(value)
 }
