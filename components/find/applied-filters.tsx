@@ -10,12 +10,13 @@ import { useUnits } from '@/hooks/use-units'
 
 interface Props {
   state: FindState
+  thisMonday: string | undefined
   onChange: (part: Partial<FindState>) => void
 }
 
 /** What narrows the list now, each to be taken off by itself. */
-export function AppliedFilters({ state, onChange }: Props) {
-  const applied = appliedWords(state, useUnits())
+export function AppliedFilters({ state, thisMonday, onChange }: Props) {
+  const applied = appliedWords(state, useUnits(), thisMonday)
   if (applied.length === 0) return null
   const none = Object.assign({}, ...applied.map(({ off }) => off)) as Partial<FindState>
   return (

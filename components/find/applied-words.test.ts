@@ -23,6 +23,13 @@ describe('filters in use, in words', () => {
     })
   })
 
+  it('names the week of shipping by its Monday', () => {
+    const words = (thisMonday?: string) => appliedWords({ shipWeek: 15 }, 'us', thisMonday)[0]?.words
+    expect(words('2027-01-11')).toBe('Can be shipped, week of Apr 12')
+    expect(words('2027-04-12')).toBe('Can be shipped this week')
+    expect(words()).toBe('Can be shipped')
+  })
+
   it('leaves out place, distance and order', () => {
     expect(appliedWords({ near: '45202', withinKm: 41, sort: 'cheapest' }, 'us')).toEqual([])
   })

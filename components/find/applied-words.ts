@@ -2,6 +2,8 @@ import { categoryNames, speciesWords } from './category-words'
 import type { FindState } from './find-params'
 
 import { plainDay } from '@/components/listings/pickup-words'
+import { shortDay } from '@/components/listings/shipping-words'
+import { comingMonday } from '@/shared/times/coming-monday'
 import { printCount } from '@/shared/units/count'
 import { printLength, printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
@@ -15,8 +17,8 @@ export interface AppliedFilter {
   off: Partial<FindState>
 }
 
-/** The filters in use, in words. Place, distance and order are always in use and not among them. */
-export function appliedWords(state: FindState, units: UnitSystem): AppliedFilter[] {
+/** The filters in use, in words; weeks are counted from `thisMonday`. Place, distance and order are always in use and not among them. */
+export function appliedWords(state: FindState, units: UnitSystem, thisMonday?: string): AppliedFilter[] {
   const told: AppliedFilter[] = []
   const tell = (words: string, anyWords: string, off: Partial<FindState>) =>
     told.push({ words, anyWords, off })
@@ -30,7 +32,16 @@ export function appliedWords(state: FindState, units: UnitSystem): AppliedFilter
   if (state.mostCents)
     tell(`Up to ${printCents(state.mostCents)} each`, 'any price', { mostCents: undefined })
   if (state.pickup) tell('Pickup only', 'pickup or not', { pickup: undefined })
+  if (state.shipWeek)
+    tell(shippedWords(state.shipWeek, thisMonday), 'shipped or not', { shipWeek: undefined })
   return told
+}
+
+// Before the first answer nobody knows which week it is.
+function shippedWords(week: number, thisMonday: string | undefined): string {
+  if (!thisMonday) return 'Can be shipped'
+  const monday = comingMonday(thisMonday, week)
+  return monday === thisMonday ? 'Can be shipped this week' : `Can be shipped, week of ${shortDay(monday)}`
 }
 
 function sizeWords({ sizeFromMm, sizeToMm }: FindState, units: UnitSystem): string {

@@ -5,6 +5,7 @@ import { CommittedField } from './committed-field'
 import { DayFields } from './day-fields'
 import { usualWithinKm } from './find-params'
 import { reaches, reachOf } from './reach'
+import { ShipFields } from './ship-fields'
 import { SizeFields } from './size-fields'
 import { SortSelect } from './sort-select'
 import { SpeciesField } from './species-field'
@@ -60,6 +61,9 @@ export function Filters({ find }: { find: Find }) {
         isChecked={state.pickup === 'yes'}
         onChange={(isOn) => change({ pickup: isOn ? 'yes' : undefined })}
       />
+      {near && find.thisMonday ? (
+        <ShipFields state={state} thisMonday={find.thisMonday} onChange={change} />
+      ) : null}
     </View>
   )
 }

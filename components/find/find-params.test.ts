@@ -14,6 +14,7 @@ const wish: FindState = {
   until: '2027-02-01',
   mostCents: 150,
   pickup: 'yes',
+  shipWeek: 15,
   sort: 'cheapest',
 }
 

@@ -16,6 +16,8 @@ export interface FindState {
   until?: string
   mostCents?: number
   pickup?: 'yes'
+  /** ISO week in which it can be shipped to `near`. */
+  shipWeek?: number
   sort?: Sort
 }
 
@@ -59,6 +61,7 @@ export function readFind(params: Params): FindState {
     until: day('until'),
     mostCents: whole('mostCents', 10_000_000),
     pickup: text('pickup') === 'yes' ? 'yes' : undefined,
+    shipWeek: whole('shipWeek', 53),
     sort: sorts.find((one) => one === text('sort') && one !== 'nearest'),
   })
 }
@@ -78,6 +81,7 @@ export function writeFind(state: FindState): Record<keyof FindState, string | un
     until: state.until,
     mostCents: text(state.mostCents),
     pickup: state.pickup,
+    shipWeek: text(state.shipWeek),
     sort: state.sort === 'nearest' ? undefined : state.sort,
   }
 }

@@ -1,6 +1,7 @@
 import { animalWord } from '@/components/listings/animal-words'
 import type { TagBadge, TagFacts } from '@/components/listings/tag-facts'
 import { pickupDay } from '@/components/listings/pickup-words'
+import { canBeShipped, shippingBadge } from '@/components/listings/shipping-words'
 import { stageName } from '@/components/listings/stage-words'
 import { legalWords } from '@/components/rules/legal-words'
 import { photoUrl } from '@/hooks/api'
@@ -88,5 +89,6 @@ function badges(found: SellerListing, { count, state }: Asked): TagBadge[] {
   }
   if (!count && found.minOrder > 1)
     told.push({ word: `From ${printCount(found.minOrder)} up`, tone: 'neutral' })
+  if (found.shipped) told.push(state ? shippingBadge(found.shipped, state) : canBeShipped)
   return told
 }

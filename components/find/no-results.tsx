@@ -15,15 +15,16 @@ interface Props {
   state: FindState
   /** '' before a place is known. */
   placeLabel: string
+  thisMonday: string | undefined
   onChange: (part: Partial<FindState>) => void
 }
 
 /** An empty list says what would fill it: a wider circle, or one wish less. */
-export function NoResults({ state, placeLabel, onChange }: Props) {
+export function NoResults({ state, placeLabel, thisMonday, onChange }: Props) {
   const units = useUnits()
   const withinKm = state.withinKm ?? usualWithinKm
   const wider = placeLabel ? widerReach(withinKm, units) : undefined
-  const applied = appliedWords(state, units)
+  const applied = appliedWords(state, units, thisMonday)
   const where = placeLabel ? `within ${reachOf(withinKm, units).label} of ${placeLabel}` : 'anywhere'
   const what = state.category && state.category !== 'fish' ? categoryNames[state.category].toLowerCase() : ''
   return (

@@ -5,6 +5,7 @@ import { appliedWords } from './applied-words'
 import type { Sort } from './find-params'
 import type { Find } from './use-find'
 
+import { notYetSold } from '@/components/listings/shipping-words'
 import { Button } from '@/components/ui/button'
 import { HiddenText } from '@/components/ui/hidden-text'
 import { Text } from '@/components/ui/text'
@@ -44,10 +45,15 @@ export function ResultHead({ find, onFilters, view, onView }: Props) {
           />
         ) : null}
       </View>
-      <AppliedFilters state={find.state} onChange={find.change} />
+      <AppliedFilters state={find.state} thisMonday={find.thisMonday} onChange={find.change} />
       {said ? (
         <Text tint="muted" size="note">
           {said}
+        </Text>
+      ) : null}
+      {find.found.some(({ shipped }) => shipped) ? (
+        <Text tint="muted" size="note">
+          {notYetSold}
         </Text>
       ) : null}
       <HiddenText isLive>{find.search.isFetching ? '' : said}</HiddenText>

@@ -44,7 +44,8 @@ export function ResultList({ find, selectedPin, onHot }: Props) {
     )
   }
   if (found.length === 0) {
-    return <NoResults state={find.state} placeLabel={find.placeLabel} onChange={find.change} />
+    const { state, placeLabel, thisMonday, change } = find
+    return <NoResults state={state} placeLabel={placeLabel} thisMonday={thisMonday} onChange={change} />
   }
   return (
     <View style={styles.frame}>

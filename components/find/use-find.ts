@@ -20,7 +20,11 @@ export function useFind() {
   const near = state.near ?? place?.near
   const asked = near
     ? { ...toFilters(state, near), sort: state.sort ?? 'nearest' }
-    : { ...toFilters(state, middleZip), withinKm: wholeCountryKm, sort: orderWithoutPlace(state) }
+    : {
+        ...toFilters(withoutShipping(state), middleZip),
+        withinKm: wholeCountryKm,
+        sort: orderWithoutPlace(state),
+      }
   const isReady = near !== undefined || isKnown
   const search = useSearch(asked, isReady)
   const { sort: _sort, ...filters } = asked
@@ -47,6 +51,8 @@ export function useFind() {
     sort: asked.sort,
     search,
     place: near ? first?.place : undefined,
+    /** The Monday of this week by the server's clock; undefined until the first answer. */
+    thisMonday: first?.thisMonday,
     found: search.data?.pages.flatMap((page) => page.items) ?? [],
     facets: facets.data,
     change,
@@ -55,6 +61,9 @@ export function useFind() {
 }
 
 export type Find = ReturnType<typeof useFind>
+
+// Nowhere is known to ship to.
+const withoutShipping = ({ shipWeek: _shipWeek, ...state }: FindState): FindState => state
 
 // Nobody's distance is known, so nearest means nothing.
 function orderWithoutPlace({ sort }: FindState) {

@@ -50,6 +50,10 @@ const YourWater = lazy(() =>
   import('@/components/tools/tools-group').then((group) => ({ default: group.YourWater })),
 )
 
+const ListingShipping = lazy(() =>
+  import('@/components/tools/tools-group').then((group) => ({ default: group.ListingShipping })),
+)
+
 export function ListingStory(props: Props) {
   const { listing, count, limits, refusal, placeLabel, near, onCount, onPlace } = props
   const units = useUnits()
@@ -87,6 +91,11 @@ export function ListingStory(props: Props) {
             {canBuy ? (
               <LazyPart label="Loading the trip check">
                 <TripCheck listing={listing} count={count} near={near} />
+              </LazyPart>
+            ) : null}
+            {body.shipping ? (
+              <LazyPart label="Loading the shipping season">
+                <ListingShipping listing={listing} />
               </LazyPart>
             ) : null}
             <BatchFacts body={body} />

@@ -1,7 +1,8 @@
 import { animalWord } from './animal-words'
 import { pickupDay } from './pickup-words'
 import { stageName } from './stage-words'
-import type { TagFacts } from './tag-facts'
+import { canBeShipped, shippingBadge } from './shipping-words'
+import type { TagBadge, TagFacts } from './tag-facts'
 
 import { legalWords } from '@/components/rules/legal-words'
 import type { ShownListing } from '@/shared/contracts/listings'
@@ -20,7 +21,7 @@ interface Asked {
 
 /** A listing as the tag at the head of its own page reads. */
 export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFacts {
-  const { body, seller, gate, distanceKm, bearing } = listing
+  const { body, seller, distanceKm, bearing } = listing
   const next = listing.windows.find(({ placesLeft }) => placesLeft > 0)
   return {
     title: listing.title,
@@ -34,6 +35,12 @@ export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFa
       distanceKm === undefined ? undefined : `${aboutDistance(distanceKm, units)} ${bearing ?? ''}`.trim(),
     placeText: seller.placeText,
     dayText: next ? pickupDay(next) : undefined,
-    badges: gate ? [legalWords(gate.status, gate.buyerState)] : [],
+    badges: badges(listing),
   }
+}
+
+function badges({ body, gate, shipped }: ShownListing): TagBadge[] {
+  const legal = gate ? [legalWords(gate.status, gate.buyerState)] : []
+  if (!body.shipping) return legal
+  return [...legal, shipped && gate ? shippingBadge(shipped, gate.buyerState) : canBeShipped]
 }

@@ -1,0 +1,46 @@
+import { packingWords } from './packing-words'
+import { SeasonStrip } from './season-strip'
+
+import { notYetSold, shipDayNames, shippingBadge } from '@/components/listings/shipping-words'
+import { Badge } from '@/components/ui/badge'
+import { Card } from '@/components/ui/card'
+import { Heading } from '@/components/ui/heading'
+import { Text } from '@/components/ui/text'
+import type { ShownListing } from '@/shared/contracts/listings'
+import { seasonSources } from '@/shared/domain/season/season-classes.facts'
+import { printSource } from '@/shared/sources'
+import { printCount } from '@/shared/units/count'
+import { printCents } from '@/shared/units/money'
+
+/** How a batch may be shipped, and in which weeks it usually arrives alive where the buyer is. */
+export function ListingShipping({ listing: { body, shipped, gate } }: { listing: ShownListing }) {
+  const { shipping, statesServed } = body
+  if (!shipping) return null
+  const days = shipping.days.map((day) => shipDayNames[day]).join(', ')
+  return (
+    <Card labelledBy="shipping">
+      <Heading level={2} size="lead" nativeID="shipping">
+        Shipping
+      </Heading>
+      <Text face="strong">{notYetSold}</Text>
+      <Text>
+        {`${packingWords[shipping.packing]}, up to ${printCount(shipping.mostInBox)} in a box at ${printCents(shipping.boxCents)} a box, freight not included. Leaves on ${days}, to ${statesServed.join(', ')}.`}
+      </Text>
+      {shipped && gate ? (
+        <>
+          <Badge {...shippingBadge(shipped, gate.buyerState)} />
+          {shipped.isServed ? (
+            <>
+              <SeasonStrip weeks={shipped.weeks} year={shipped.year} thisWeek={shipped.week} />
+              <Text size="note" tint="muted">
+                {`By the weather of many years, not by a forecast: safe in nine of ten such trips. ${seasonSources.map(printSource).join('; ')}.`}
+              </Text>
+            </>
+          ) : null}
+        </>
+      ) : (
+        <Text tint="muted">Say where they will live: then we can say in which weeks they arrive well.</Text>
+      )}
+    </Card>
+  )
+}
