@@ -13,6 +13,10 @@ const zodV4 = `${path.sep}zod${path.sep}v4${path.sep}`
 const isLanguageOfZod = (context, name) =>
   name === '../locales/index.js' && context.originModulePath.includes(zodV4)
 
+// What prints a schema as JSON Schema: the API's description does, on the server; no screen does.
+const isPrinterOfZod = (context, name) =>
+  name.endsWith('/json-schema-processors.js') && context.originModulePath.includes(zodV4)
+
 // What the first load would carry on the web although no screen draws it: controls that have better twins in
 // components/ui, the colour arithmetic of a header we hide, the router's own list of routes.
 const undrawn =
@@ -24,7 +28,7 @@ const isUndrawn = (context, name) =>
   (/^(color|\.{1,2}\/(views\/)?Sitemap)$/.test(name) && context.originModulePath.includes(routerViews))
 
 config.resolver.resolveRequest = (context, name, platform) =>
-  isLanguageOfZod(context, name) || (platform === 'web' && isUndrawn(context, name))
+  isLanguageOfZod(context, name) || isPrinterOfZod(context, name) || (platform === 'web' && isUndrawn(context, name))
     ? { type: 'empty' }
     : context.resolveRequest(context, name, platform)
 
