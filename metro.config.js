@@ -28,7 +28,9 @@ const isUndrawn = (context, name) =>
   (/^(color|\.{1,2}\/(views\/)?Sitemap)$/.test(name) && context.originModulePath.includes(routerViews))
 
 config.resolver.resolveRequest = (context, name, platform) =>
-  isLanguageOfZod(context, name) || isPrinterOfZod(context, name) || (platform === 'web' && isUndrawn(context, name))
+  isLanguageOfZod(context, name) ||
+  isPrinterOfZod(context, name) ||
+  (platform === 'web' && isUndrawn(context, name))
     ? { type: 'empty' }
     : context.resolveRequest(context, name, platform)
 
