@@ -1,0 +1,54 @@
+import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest'
+
+import { expectNoAxeViolations, keepShot, openBrowser, type TestBrowser } from '@/tests/support/browser'
+
+const { origin } = inject('wholeProduct')
+let browser: TestBrowser
+beforeAll(async () => {
+  browser = await openBrowser()
+})
+afterAll(() => browser.close())
+
+const notYet = 'Shipping is announced, not yet sold here: ask for pickup.'
+
+describe.each([390, 1280])('a buyer at %i px', (width) => {
+  it('asks what can be shipped in May, sees it on the tags and as a year on the listing, and is offered nothing more', async () => {
+    const isPhone = width === 390
+    const page = await browser.openPage({ width, origin, theme: isPhone ? 'dark' : 'light' })
+    await page.goto('/?near=45202&withinKm=403')
+    await page.getByText(notYet).first().waitFor()
+    if (isPhone) await page.getByRole('button', { name: /^Filters and order/ }).click()
+    await page.getByRole('checkbox', { name: /^Can be shipped to me/ }).click()
+    await page.waitForURL(/shipWeek=\d+/)
+    const weeks = page.getByLabel('Week of', { exact: true })
+    const may = await weeks.evaluate((list) =>
+      [...(list as HTMLSelectElement).options]
+        .map(({ text }) => text)
+        .find((text) => text.startsWith('May 1')),
+    )
+    await weeks.selectOption({ label: may ?? '' })
+    await expectNoAxeViolations(page)
+    await keepShot(page, `ships-${width}-filter`)
+    if (isPhone)
+      await page
+        .getByRole('button', { name: /^Show / })
+        .last()
+        .click()
+    await page.getByRole('button', { name: /Can be shipped, week of May 1/ }).waitFor()
+    const tags = page.getByRole('list', { name: 'Listings' }).getByRole('listitem')
+    await tags.filter({ hasText: 'in the week of May 1' }).first().waitFor()
+    const texts = await tags.allInnerTexts()
+    expect(texts.filter((text) => !/Ships to you in the week of May 1/.test(text))).toEqual([])
+    await keepShot(page, `ships-${width}-found`)
+
+    await tags.getByRole('link').first().click()
+    const card = page.getByRole('region', { name: 'Shipping' })
+    await card.getByText(notYet).waitFor()
+    await card.getByRole('slider', { name: 'Week of the year' }).waitFor()
+    expect(await card.getByRole('button').count()).toBe(0)
+    await card.scrollIntoViewIfNeeded()
+    await expectNoAxeViolations(page)
+    await keepShot(page, `ships-${width}-listing`)
+    await page.context().close()
+  })
+})
