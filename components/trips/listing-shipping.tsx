@@ -7,9 +7,11 @@ import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
 import type { ShownListing } from '@/shared/contracts/listings'
+import type { ShippedThroughYear } from '@/shared/contracts/shipping'
 import { seasonSources } from '@/shared/domain/season/season-classes.facts'
 import { printSource } from '@/shared/sources'
 import { printCount } from '@/shared/units/count'
+import { comingMonday } from '@/shared/times/coming-monday'
 import { printCents } from '@/shared/units/money'
 
 /** How a batch may be shipped, and in which weeks it usually arrives alive where the buyer is. */
@@ -31,7 +33,7 @@ export function ListingShipping({ listing: { body, shipped, gate } }: { listing:
           <Badge {...shippingBadge(shipped, gate.buyerState)} />
           {shipped.isServed ? (
             <>
-              <SeasonStrip weeks={shipped.weeks} year={shipped.year} thisWeek={shipped.week} />
+              <YearAhead shipped={shipped} />
               <Text size="note" tint="muted">
                 {`By the weather of many years, not by a forecast: safe in nine of ten such trips. ${seasonSources.map(printSource).join('; ')}.`}
               </Text>
@@ -43,4 +45,11 @@ export function ListingShipping({ listing: { body, shipped, gate } }: { listing:
       )}
     </Card>
   )
+}
+
+/** From this week on, as the badge counts: its next safe week lies to the right. */
+function YearAhead({ shipped: { weeks, week, monday } }: { shipped: ShippedThroughYear }) {
+  const ahead = [...weeks.slice(week - 1), ...weeks.slice(0, week - 1)]
+  const mondays = ahead.map((_, at) => comingMonday(monday, ((week - 1 + at) % weeks.length) + 1))
+  return <SeasonStrip weeks={ahead} mondays={mondays} thisWeek={1} />
 }

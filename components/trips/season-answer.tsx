@@ -14,6 +14,7 @@ import type { ReplyOf } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
 import type { SeasonOption } from '@/shared/domain/season/season-classes.facts'
 import { seasonSources } from '@/shared/domain/season/season-classes.facts'
+import { mondayOfWeek } from '@/shared/times/monday-of-week'
 import { printSource } from '@/shared/sources'
 
 type Season = ReplyOf<Endpoints['readSeason']>
@@ -47,7 +48,11 @@ export function SeasonAnswer({ season }: { season: Season }) {
             ? 'No week of the year is safe with this packing.'
             : `The next safe week begins ${weekWords(year, nextSafeWeek)}.`)}
       </Banner>
-      <SeasonStrip weeks={weeks.map(({ verdict }) => verdict)} year={year} thisWeek={week} />
+      <SeasonStrip
+        weeks={weeks.map(({ verdict }) => verdict)}
+        mondays={rows.map(({ number }) => mondayOfWeek(year, number))}
+        thisWeek={week}
+      />
       <Button
         kind="quiet"
         icon={isTable ? 'up' : 'down'}

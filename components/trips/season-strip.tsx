@@ -1,18 +1,20 @@
 import { useState } from 'react'
 import { StyleSheet, View, type LayoutChangeEvent } from 'react-native'
 
-import { seasonSummary, seasonWords, weekWords } from './season-words'
+import { seasonSummary, seasonWords } from './season-words'
 
+import { shortDay } from '@/components/listings/shipping-words'
 import { Text } from '@/components/ui/text'
 import { webElement } from '@/components/ui/web-element'
 import { color, space, type ColorName } from '@/constants/theme'
 import type { SeasonVerdict } from '@/shared/domain/season/season-at'
 
 export interface SeasonStripProps {
-  /** 52, the first ISO week of the year first. */
+  /** 52 in the order shown. */
   weeks: readonly SeasonVerdict[]
-  year: number
-  /** The week marked as this one, 1-52. */
+  /** The Monday of each, YYYY-MM-DD. */
+  mondays: readonly string[]
+  /** Place of this week among them, from 1. */
   thisWeek: number
 }
 
@@ -26,11 +28,11 @@ const inks: Record<SeasonVerdict, ColorName> = {
 }
 
 /** The year in 52 cells, each with its pattern; tap or arrow keys read one out. */
-export function SeasonStrip({ weeks, year, thisWeek }: SeasonStripProps) {
+export function SeasonStrip({ weeks, mondays, thisWeek }: SeasonStripProps) {
   const [chosen, setChosen] = useState(thisWeek)
   const [widthPx, setWidthPx] = useState(0)
   const verdict = weeks[chosen - 1] ?? 'unknown'
-  const words = `Week of ${weekWords(year, chosen)}: ${seasonWords[verdict].word}`
+  const words = `Week of ${shortDay(mondays[chosen - 1] ?? '')}: ${seasonWords[verdict].word}`
   const move = (to: number) => setChosen(Math.min(weeks.length, Math.max(1, to)))
   const keys: Record<string, number> = {
     ArrowLeft: chosen - 1,
@@ -70,7 +72,7 @@ export function SeasonStrip({ weeks, year, thisWeek }: SeasonStripProps) {
         {chosen === thisWeek ? `${words} (this week)` : words}
       </Text>
       <Text size="note" tint="muted">
-        {seasonSummary(weeks, year)}
+        {seasonSummary(weeks, mondays)}
       </Text>
     </View>
   )

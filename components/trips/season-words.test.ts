@@ -3,6 +3,7 @@ import { expect, it } from 'vitest'
 import { seasonRuns, seasonSummary, weekWords } from './season-words'
 
 import type { SeasonVerdict } from '@/shared/domain/season/season-at'
+import { mondayOfWeek } from '@/shared/times/monday-of-week'
 
 const year: SeasonVerdict[] = [
   ...Array<SeasonVerdict>(12).fill('too-cold'),
@@ -21,7 +22,12 @@ it('gathers weeks with one verdict, none left out', () => {
 
 it('says the year in words, by the Mondays of ISO weeks', () => {
   expect(weekWords(2027, 1)).toBe('Jan 4')
-  expect(seasonSummary(year, 2027)).toBe(
+  expect(
+    seasonSummary(
+      year,
+      year.map((_, at) => mondayOfWeek(2027, at + 1)),
+    ),
+  ).toBe(
     'Too cold: weeks of Jan 4 to Mar 22. Safe with packs: week of Mar 29. Safe: weeks of Apr 5 to Dec 27.',
   )
 })

@@ -1,3 +1,4 @@
+import { shortDay } from '@/components/listings/shipping-words'
 import type { Tone } from '@/constants/theme'
 import type { SeasonVerdict } from '@/shared/domain/season/season-at'
 import { mondayOfWeek } from '@/shared/times/monday-of-week'
@@ -13,8 +14,7 @@ export const seasonWords: Record<SeasonVerdict, { word: string; tone: Exclude<To
 
 /** "Jan 12" for the Monday that begins an ISO week. */
 export function weekWords(year: number, week: number): string {
-  const monday = new Date(`${mondayOfWeek(year, week)}T12:00:00Z`)
-  return monday.toLocaleDateString('en-US', { month: 'short', day: 'numeric', timeZone: 'UTC' })
+  return shortDay(mondayOfWeek(year, week))
 }
 
 interface Run {
@@ -23,7 +23,7 @@ interface Run {
   to: number
 }
 
-/** Weeks in a row with one verdict, in the order of the year. */
+/** Weeks in a row with one verdict, in the order given. */
 export function seasonRuns(weeks: readonly SeasonVerdict[]): Run[] {
   return weeks.reduce<Run[]>((runs, verdict, at) => {
     const last = runs.at(-1)
@@ -34,14 +34,12 @@ export function seasonRuns(weeks: readonly SeasonVerdict[]): Run[] {
 }
 
 /** "Too cold: weeks of Jan 4 to Mar 8. Safe with packs: week of Mar 15." */
-export function seasonSummary(weeks: readonly SeasonVerdict[], year: number): string {
+export function seasonSummary(weeks: readonly SeasonVerdict[], mondays: readonly string[]): string {
+  const day = (week: number) => shortDay(mondays[week - 1] ?? '')
   return seasonRuns(weeks)
     .map(({ verdict, from, to }) => {
       const { word } = seasonWords[verdict]
-      const when =
-        from === to
-          ? `week of ${weekWords(year, from)}`
-          : `weeks of ${weekWords(year, from)} to ${weekWords(year, to)}`
+      const when = from === to ? `week of ${day(from)}` : `weeks of ${day(from)} to ${day(to)}`
       return `${word.charAt(0).toUpperCase()}${word.slice(1)}: ${when}.`
     })
     .join(' ')

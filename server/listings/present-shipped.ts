@@ -25,7 +25,9 @@ function wayOf({ body, from, to }: Way) {
 
 /** The states the seller names, without those in which it must not be shown: as search rows hold them. */
 const isServed = ({ body, to, status }: Way) =>
-  status !== 'prohibited' && findState(to.state)?.takesAnimals === true && body.statesServed.includes(to.state)
+  status !== 'prohibited' &&
+  findState(to.state)?.takesAnimals === true &&
+  body.statesServed.includes(to.state)
 
 /** Whether it may be shipped to a place in a week; undefined: this batch is not shipped. */
 export function presentShipped(way: Way): ShippedTo | undefined {
@@ -43,14 +45,10 @@ export function presentShipped(way: Way): ShippedTo | undefined {
   }
 }
 
-const THURSDAY_MS = 3 * 86_400_000
-
 /** The same with all weeks of the year. */
 export function presentShippedThroughYear(way: Way): ShippedThroughYear | undefined {
   const [shipped, shipment] = [presentShipped(way), wayOf(way)]
   if (!shipped || !shipment) return undefined
-  // A week belongs to the year of its Thursday.
-  const thursday = new Date(Date.parse(`${way.when.monday}T12:00:00Z`) + THURSDAY_MS)
   const weeks = seasonStrip(shipment).map(({ verdict }) => verdict)
-  return { ...shipped, year: thursday.getUTCFullYear(), week: way.when.week, weeks }
+  return { ...shipped, week: way.when.week, weeks }
 }

@@ -17,10 +17,11 @@ export const shippedTo = z.object({
 })
 export type ShippedTo = z.output<typeof shippedTo>
 
-/** The same with the whole year: 52 verdicts, the first ISO week first. */
+/** The same with the whole year. */
 export const shippedThroughYear = shippedTo.extend({
-  year: z.int(),
+  /** 1-52: the 53rd of a long year is judged as the 52nd. */
   week: z.int(),
+  /** 52 of them, the first ISO week first. */
   weeks: z.array(seasonVerdict),
 })
 export type ShippedThroughYear = z.output<typeof shippedThroughYear>

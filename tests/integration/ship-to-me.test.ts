@@ -14,7 +14,7 @@ import { countFacets, searchListings, type SearchAsked } from '@/shared/contract
 import { readListing } from '@/shared/contracts/listings'
 import { chances } from '@/tests/bench/chances'
 import { begin, draftOf, openListingDesk, submit, type ListingDesk } from '@/tests/support/listing-desk'
-import { disagreements, type Told } from '@/tests/support/season-tellers'
+import { disagreements, readStrip, type Told } from '@/tests/support/season-tellers'
 import { TEST_NOW } from '@/tests/support/server'
 
 const TRIPLES = 300
@@ -91,8 +91,7 @@ describe('shipped to me in a week', () => {
       if (!year || !tag) throw new Error(`${listingId} is not shipped`)
       const name = `${listingId} to ${near} in week ${year.week}`
       const isFound = idsOf(filtered).includes(listingId)
-      const strip = year.weeks[year.week - 1] ?? 'none'
-      told.push({ name, isFound, isServed: tag.isServed, badge: tag.verdict, strip })
+      told.push({ name, isFound, isServed: tag.isServed, badge: tag, strip: readStrip(year) })
       expect(year, name).toMatchObject(tag)
       daysLater(0)
       expect(idsOf(await find({ near, shipWeek: year.week })), name).toEqual(idsOf(filtered))
@@ -110,7 +109,7 @@ describe('shipped to me in a week', () => {
     await desk.db.update(listingSearch).set({ lane: 1 })
     const found = idsOf(await find(asked))
     const { shipped: year } = await listingOf(listingId, '45202')
-    const badge = year?.weeks[19] ?? 'none'
+    const badge = { verdict: year?.weeks[19] ?? 'none' }
     expect(
       disagreements([
         { name: 'planted', isFound: found.includes(listingId), isServed: true, badge, strip: badge },

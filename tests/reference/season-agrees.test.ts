@@ -12,7 +12,7 @@ import { taxa } from '@/shared/domain/species/taxa.facts'
 import { animalClassOf, packingClassIds } from '@/shared/domain/season/season-lane'
 import { chances } from '@/tests/bench/chances'
 import { cities } from '@/tests/bench/make-listings'
-import { disagreements, type Told } from '@/tests/support/season-tellers'
+import { disagreements, readStrip, type Told } from '@/tests/support/season-tellers'
 
 const TRIPLES = 5_000
 const shipped = taxa.filter(({ speciesId }) => speciesId && animalClassOf(speciesId))
@@ -62,8 +62,8 @@ function askAll(lanesFor: typeof safeLanesTo, triples = TRIPLES): Told[] {
         (row.shipStates & (stateBit(buyer.state) ?? 0n)) !== 0n &&
         lanesFor(to.centre, when.week).includes(row.lane),
       isServed: year.isServed,
-      badge: year.verdict,
-      strip: year.weeks[when.week - 1] ?? 'none',
+      badge: year,
+      strip: readStrip(year),
     }
   })
 }
@@ -73,7 +73,7 @@ describe('filter, badge and strip of the shipping season', () => {
     const told = askAll(safeLanesTo)
     expect(disagreements(told)).toEqual([])
     // The draw must have been worth asking: every verdict, both answers of the filter, unserved states.
-    const verdicts = new Set(told.map(({ badge }) => badge))
+    const verdicts = new Set(told.map(({ badge }) => badge.verdict))
     expect([...verdicts].sort()).toEqual(expect.arrayContaining(['safe-with-packs', 'too-cold', 'too-hot']))
     expect(told.filter(({ isFound }) => isFound).length).toBeGreaterThan(200)
     expect(told.filter(({ isServed }) => !isServed).length).toBeGreaterThan(200)
@@ -89,8 +89,10 @@ describe('filter, badge and strip of the shipping season', () => {
     expect(disagreements(askAll(off, 1_500)).length).toBeGreaterThan(10)
   })
 
-  it('would be caught: a badge that is not the strip’s week', () => {
+  it('would be caught: a badge of another week than the strip, or with another next week', () => {
     const [one] = askAll(safeLanesTo, 1)
-    expect(one && disagreements([{ ...one, strip: 'planted' }])).toHaveLength(1)
+    const late = { ...one?.strip, verdict: one?.strip.verdict ?? '', nextMonday: '2001-01-01' }
+    expect(one && disagreements([{ ...one, strip: late }])).toHaveLength(1)
+    expect(one && disagreements([{ ...one, strip: { verdict: 'planted' } }])).toHaveLength(1)
   })
 })
