@@ -1,3 +1,4 @@
+import type { RowDataPacket } from 'mysql2/promise'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 
 import { connect, disconnect, rawPool } from '@/db/client'
@@ -10,12 +11,19 @@ import { shapedQueries, type Shape } from '@/tests/bench/make-query'
 import { makeListings } from '@/tests/bench/make-listings'
 import { readPlan } from '@/tests/bench/read-plan'
 import { rowsRead } from '@/tests/bench/rows-read'
+import { safeLanes } from '@/shared/domain/season/season-at'
+import { seasonTable } from '@/shared/domain/season/season-table.gen'
 import { freshDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const LISTINGS = 4_000
 
 // Rows read for a page on average at this size; measured, and half as much again.
 const BUDGETS: Record<Shape, number> = { A: 20, B: 190, C: 18, D: 103, E: 88, F: 130, G: 166, H: 30 }
+
+async function tablesRead(sql: string): Promise<number> {
+  const [rows] = await rawPool().query<RowDataPacket[]>(`EXPLAIN ${sql}`)
+  return rows.length
+}
 
 describe('the plans of search', () => {
   const made = makeListings(LISTINGS, 42)
@@ -42,6 +50,21 @@ describe('the plans of search', () => {
     const sql =
       'SELECT rev FROM listing_search FORCE INDEX (k_species) WHERE species = 3 AND hil BETWEEN 1 AND 9'
     expect((await readPlan(sql)).covering).toBe(false)
+  })
+
+  it('read one table with the longest list of lanes there is', async () => {
+    const bands = Array.from({ length: seasonTable.bands }, (_, band) => band)
+    const longest = Math.max(
+      ...bands.flatMap((band) => [1, 18, 30, 40].map((week) => safeLanes(band, week).length)),
+    )
+    expect(longest).toBeGreaterThan(100)
+    // MariaDB makes a subquery of a list of a thousand and more.
+    expect(longest).toBeLessThan(900)
+    const lanes = (count: number) => Array.from({ length: count }, (_, at) => at + 1).join(',')
+    const sql = (count: number) =>
+      `SELECT listing_id FROM listing_search FORCE INDEX (k_species) WHERE species = 3 AND hil BETWEEN 1 AND 9 AND lane IN (${lanes(count)})`
+    expect(await tablesRead(sql(900))).toBe(1)
+    expect(await tablesRead(sql(1_200))).toBeGreaterThan(1)
   })
 
   it.each(Object.entries(BUDGETS))('read few rows for shape %s', async (shape, budget) => {
