@@ -78,5 +78,10 @@ function shippingFaults(body: ListingBody, { cellLat: lat, cellLng: lng }: Selle
 
 /** What is wrong with the animal named, its stage, and where it would be sold or shipped. */
 export function checkAnimal(body: ListingBody, seller: SellerRow): FieldProblem[] {
-  return [...animalFaults(body), ...stageFaults(body), ...stateFaults(body, seller), ...shippingFaults(body, seller)]
+  return [
+    ...animalFaults(body),
+    ...stageFaults(body),
+    ...stateFaults(body, seller),
+    ...shippingFaults(body, seller),
+  ]
 }

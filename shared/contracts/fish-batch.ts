@@ -166,7 +166,10 @@ export const fishBody = z
     }
     const { shipping } = batch
     if (shipping && packingClasses[shipping.packing].nights > 1 && shipping.days.includes('wed')) {
-      wrong(['shipping', 'days'], 'Two days on the way: ship on Monday or Tuesday, so that no box waits over a weekend.')
+      wrong(
+        ['shipping', 'days'],
+        'Two days on the way: ship on Monday or Tuesday, so that no box waits over a weekend.',
+      )
     }
     batch.windows.forEach((window, at) => {
       if (window.until <= window.from) wrong(['windows', at, 'until'], 'The window must end after it starts.')
