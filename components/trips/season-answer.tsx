@@ -46,7 +46,7 @@ export function SeasonAnswer({ season }: { season: Season }) {
         {packedFor(now) ||
           (nextSafeWeek === undefined
             ? 'No week of the year is safe with this packing.'
-            : `The next safe week begins ${weekWords(year, nextSafeWeek)}.`)}
+            : `The next safe week begins ${weekWords(nextSafeWeek < week ? year + 1 : year, nextSafeWeek)}.`)}
       </Banner>
       <SeasonStrip
         weeks={weeks.map(({ verdict }) => verdict)}
