@@ -130,15 +130,19 @@ describe('with the keyboard alone', () => {
 
   async function joinByKeyboard(page: Page, email: string): Promise<void> {
     await page.goto('/sign-up')
+    await page.getByRole('button', { name: 'Make my account' }).waitFor()
+    await expectNoAxeViolations(page)
     await typeInto(page, 'Your name', 'Robin Newpond')
     await typeInto(page, 'E-mail address', email)
     await typeInto(page, 'Password', NEW_PASSWORD)
     await page.keyboard.press('Enter')
     await confirmAddress(page, mailOrigin, email)
+    await expectNoAxeViolations(page)
   }
 
   async function payByKeyboard(page: Page): Promise<void> {
     await page.waitForURL((url) => url.origin === payOrigin)
+    await expectNoAxeViolations(page)
     await typeInto(page, 'Card number', '4242424242424242')
     await typeInto(page, /Expir/, '1234')
     await typeInto(page, /^CVC|Security/, '123')
