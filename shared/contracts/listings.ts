@@ -18,7 +18,7 @@ export const listingStates = [
   'taken_down',
 ] as const
 
-/** What a seller has typed so far: any part may be missing or not valid yet; the size is all that is checked. */
+/** What a seller has typed so far: each part may be missing or not valid yet; only the size is checked. */
 export const listingDraft = z
   .record(z.string().max(40), z.unknown())
   .refine((draft) => JSON.stringify(draft).length <= 20_000, 'That is more text than one listing can hold.')

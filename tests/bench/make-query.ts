@@ -12,7 +12,7 @@ export const shapes: Record<Shape, string> = {
   A: 'typical: category and species, 50 to 200 km, count, price cap, pickup or ship',
   B: 'broad: category, 500 km',
   C: 'rare: species under 0.8 %, ship only, 50 and more, price cap, 500 km',
-  D: 'local: any category, 25 km, pickup',
+  D: 'local: no category named, 25 km, pickup',
   E: 'cheapest of a category in 200 km',
   F: 'soonest of a category in 200 km, within two weeks',
   G: 'best rated of a category, anywhere',
