@@ -1,6 +1,6 @@
 import type { TagBadge } from './tag-facts'
 
-import type { ShipDay } from '@/shared/contracts/fish-batch'
+import type { ShipDay } from '@/shared/domain/shipping/ship-days'
 import type { ShippedTo } from '@/shared/contracts/shipping'
 
 /** Stands wherever a buyer reads of shipping, as long as nobody can order it. */

@@ -71,6 +71,8 @@ export const order = mysqlTable(
     buyerMoves: smallint({ unsigned: true }).notNull().default(0),
     sellerMoves: smallint({ unsigned: true }).notNull().default(0),
     claimType: varchar({ length: 20 }),
+    /** The day now agreed came by the buyer's silence: it binds nobody to its free time. */
+    isDayBySilence: boolean().notNull().default(false),
     /** The next timer: when it rings and which edge it tries. Null only in a final state. */
     clockAt: instant(),
     clockEdge: varchar({ length: 4 }),

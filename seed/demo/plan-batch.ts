@@ -118,6 +118,10 @@ function shippingOf({ key, taxonId }: BatchWish, minOrder: number): Pick<BatchPl
     shipping: {
       packing,
       boxCents: chance.pick([800, 1000, 1200, 1500]),
+      freightCents: isTwoDays ? chance.pick([1400, 1800, 2200]) : chance.pick([4500, 4800, 5500, 6200]),
+      carrier: isTwoDays ? 'Parcel post, two days' : 'Overnight air, by noon',
+      carrierAccepts: true,
+      holdsAtCounter: chance.happens(0.8),
       mostInBox: minOrder * chance.whole(2, 6),
       days: isTwoDays || chance.happens(0.4) ? ['mon', 'tue'] : ['mon', 'tue', 'wed'],
     },

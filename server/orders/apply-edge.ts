@@ -10,6 +10,8 @@ import {
   writeEvent,
   type OrderRow,
 } from '@/server/orders/order-store'
+import { readOpenHold } from '@/server/orders/hold-store'
+import { readShipment } from '@/server/orders/shipment-store'
 import { readTerms } from '@/server/orders/terms-store'
 import { queueOrderLetters } from '@/server/orders/queue-order-letters'
 import { Problem } from '@/shared/api/problem'
@@ -73,7 +75,9 @@ export async function clockAfter(
     balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
     isBalancePaid: order.balancePaidAt !== null || order.balanceCents === 0,
     claimWindowHours: terms.promise.windowHours,
-    promisedDeliveryMs: null,
+    promisedDeliveryMs: (await readShipment(tx, order.id))?.promisedAt.getTime() ?? null,
+    handOver: order.handOver === 'ship' ? 'ship' : 'pickup',
+    silenceMoves: (await readOpenHold(tx, order.id))?.silenceMoves ?? false,
     noShow:
       order.noShowBy && order.noShowAt
         ? { by: order.noShowBy === 'buyer' ? 'buyer' : 'seller', sinceMs: order.noShowAt.getTime() }

@@ -8,12 +8,21 @@ export type Party = ShownOrder['party']
 type OrderAct = Exclude<ShownOrder['may'][number], RatingAct>
 
 const isRunning = (order: OrderRow) => order.freeze === 'none'
-const GIVES_OUT = new Set<OrderAct>(['mark-ready', 'hand-over', 'confirm-good'])
+const GIVES_OUT = new Set<OrderAct>(['mark-ready', 'hand-over', 'dispatch', 'confirm-good'])
 const isHeldBack = (act: OrderAct, order: OrderRow) => order.recall === 'open' && GIVES_OUT.has(act)
 const isBalancePaid = (order: OrderRow) => order.balanceCents === 0 || order.balancePaidAt !== null
 
 const CANCELLABLE = ['deposit_paid', 'scheduled', 'ready']
-const STOPPABLE = ['requested', ...CANCELLABLE]
+const isShipped = (order: OrderRow) => order.handOver === 'ship'
+const BEFORE_DISPATCH = ['scheduled', 'weather_hold', 'ready']
+const UNCLEAR = ['handover_unclear', 'late_or_lost']
+const STOPPABLE = ['requested', ...CANCELLABLE, 'weather_hold']
+
+/** The promised delivery is over: the clock of a sent box rings 36 hours after it. */
+const isBoxLate = (order: OrderRow) =>
+  order.clockAt !== null && now().getTime() >= order.clockAt.getTime() - clockMs('lateBox', 'fish')
+
+const isSellersBox = (order: OrderRow, party: Party) => party === 'seller' && isShipped(order)
 
 /** The one who waits may say so: a buyer from the start of the window, a seller after its end and the grace. */
 function hasWaited(order: OrderRow, party: Party): boolean {
@@ -38,20 +47,44 @@ const abilities: Record<OrderAct, (order: OrderRow, party: Party) => boolean> = 
     (order.balanceDue === 'at-handover' || isBalancePaid(order)),
   'pay-balance': (order, party) =>
     party === 'buyer' && ['scheduled', 'ready'].includes(order.state) && !isBalancePaid(order),
-  'hand-over': (order, party) => party === 'seller' && order.state === 'ready' && isBalancePaid(order),
-  'confirm-good': (order, party) => party === 'buyer' && order.state === 'handed_over',
+  'hand-over': (order, party) =>
+    party === 'seller' && !isShipped(order) && order.state === 'ready' && isBalancePaid(order),
+  'confirm-good': (order, party) => party === 'buyer' && ['handed_over', 'arrived'].includes(order.state),
   'choose-slot': (order, party) =>
     party !== 'staff' &&
+    !isShipped(order) &&
     (order.state === 'deposit_paid' ||
       (order.state === 'ready' && !order.noShowBy && movesOf(order, party) === 0)),
-  cancel: (order, party) => party !== 'staff' && CANCELLABLE.includes(order.state),
+  'choose-ship-day': (order, party) =>
+    party !== 'staff' &&
+    isShipped(order) &&
+    (order.state === 'deposit_paid' || (order.state === 'ready' && movesOf(order, party) === 0)),
+  cancel: (order, party) =>
+    party !== 'staff' &&
+    (CANCELLABLE.includes(order.state) || (party === 'seller' && order.state === 'weather_hold')),
+  'check-route': (order, party) => isSellersBox(order, party) && BEFORE_DISPATCH.includes(order.state),
+  'name-papers': (order, party) =>
+    isSellersBox(order, party) && ['deposit_paid', ...BEFORE_DISPATCH].includes(order.state),
+  dispatch: (order, party) => isSellersBox(order, party) && order.state === 'ready',
+  'report-arrival': (order, party) => party === 'buyer' && order.state === 'dispatched',
+  'report-late-box': (order, party) => party === 'buyer' && order.state === 'dispatched' && isBoxLate(order),
+  'report-late-arrival': (order, party) =>
+    party === 'buyer' && order.state === 'claim_open' && order.claimType === 'late_or_lost',
+  'hold-for-weather': (order, party) =>
+    party === 'seller' && ['scheduled', 'ready'].includes(order.state) && !order.noShowBy,
+  'agree-new-day': (order, party) => party === 'buyer' && order.state === 'weather_hold',
+  'decline-new-day': (order, party) => party === 'buyer' && order.state === 'weather_hold',
   'report-no-show': (order, party) =>
-    party !== 'staff' && order.state === 'ready' && !order.noShowBy && hasWaited(order, party),
+    party !== 'staff' &&
+    !isShipped(order) &&
+    order.state === 'ready' &&
+    !order.noShowBy &&
+    hasWaited(order, party),
   contest: (order, party) =>
     party !== 'staff' && order.state === 'ready' && Boolean(order.noShowBy) && order.noShowBy !== party,
   stop: (order, party) => party === 'staff' && STOPPABLE.includes(order.state),
   decide: (order, party) =>
-    party === 'staff' && order.state === 'claim_open' && order.claimType === 'handover_unclear',
+    party === 'staff' && order.state === 'claim_open' && UNCLEAR.includes(order.claimType ?? ''),
 }
 
 export function mayAct(act: OrderAct, order: OrderRow, party: Party): boolean {
@@ -68,6 +101,7 @@ export function actsOf(order: OrderRow, party: Party, after: AfterHandOver): Sho
 export function mayMeet(order: OrderRow, party: Party): boolean {
   return (
     party !== 'staff' &&
+    !isShipped(order) &&
     ['scheduled', 'weather_hold', 'ready', 'handed_over', 'claim_open'].includes(order.state)
   )
 }

@@ -18,6 +18,8 @@ export interface Endpoints {
   decideReview: typeof import('@/shared/contracts/moderation').decideReview
   listReviews: typeof import('@/shared/contracts/moderation').listReviews
   readReview: typeof import('@/shared/contracts/moderation').readReview
+  keepNoShipDay: typeof import('@/shared/contracts/no-ship-days').keepNoShipDay
+  listNoShipDays: typeof import('@/shared/contracts/no-ship-days').listNoShipDays
   countUnreadNotices: typeof import('@/shared/contracts/notices').countUnreadNotices
   listNotices: typeof import('@/shared/contracts/notices').listNotices
   readAllNotices: typeof import('@/shared/contracts/notices').readAllNotices
@@ -61,6 +63,22 @@ export interface Endpoints {
   endOtherSessions: typeof import('@/shared/contracts/sessions').endOtherSessions
   endSession: typeof import('@/shared/contracts/sessions').endSession
   listSessions: typeof import('@/shared/contracts/sessions').listSessions
+  agreeNewDay: typeof import('@/shared/contracts/ship-acts').agreeNewDay
+  checkRoute: typeof import('@/shared/contracts/ship-acts').checkRoute
+  checkRoutes: typeof import('@/shared/contracts/ship-acts').checkRoutes
+  chooseShipDay: typeof import('@/shared/contracts/ship-acts').chooseShipDay
+  declineNewDay: typeof import('@/shared/contracts/ship-acts').declineNewDay
+  dispatchOrder: typeof import('@/shared/contracts/ship-acts').dispatchOrder
+  holdForWeather: typeof import('@/shared/contracts/ship-acts').holdForWeather
+  keepRoutePapers: typeof import('@/shared/contracts/ship-acts').keepRoutePapers
+  listOrderShipDays: typeof import('@/shared/contracts/ship-acts').listOrderShipDays
+  listRoutes: typeof import('@/shared/contracts/ship-acts').listRoutes
+  printOrderPacking: typeof import('@/shared/contracts/ship-acts').printOrderPacking
+  readMovement: typeof import('@/shared/contracts/ship-acts').readMovement
+  readShipDays: typeof import('@/shared/contracts/ship-acts').readShipDays
+  reportArrival: typeof import('@/shared/contracts/ship-acts').reportArrival
+  reportLateArrival: typeof import('@/shared/contracts/ship-acts').reportLateArrival
+  reportLateBox: typeof import('@/shared/contracts/ship-acts').reportLateBox
   readSeason: typeof import('@/shared/contracts/trips').readSeason
   readWayHome: typeof import('@/shared/contracts/trips').readWayHome
 }
@@ -84,6 +102,8 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   decideReview: ['POST', '/moderation/listings/:versionId/decision', false],
   listReviews: ['GET', '/moderation/listings', false],
   readReview: ['GET', '/moderation/listings/:versionId', false],
+  keepNoShipDay: ['POST', '/moderation/no-ship-days', false],
+  listNoShipDays: ['GET', '/moderation/no-ship-days', false],
   countUnreadNotices: ['GET', '/notices/unread-count', false],
   listNotices: ['GET', '/notices', false],
   readAllNotices: ['POST', '/notices/readings', false],
@@ -127,6 +147,22 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   endOtherSessions: ['DELETE', '/me/sessions', false],
   endSession: ['DELETE', '/me/sessions/:sessionId', false],
   listSessions: ['GET', '/me/sessions', false],
+  agreeNewDay: ['POST', '/orders/:orderId/new-day', false],
+  checkRoute: ['POST', '/orders/:orderId/route-check', false],
+  checkRoutes: ['POST', '/routes/checks', false],
+  chooseShipDay: ['POST', '/orders/:orderId/ship-day', false],
+  declineNewDay: ['POST', '/orders/:orderId/new-day-refusal', false],
+  dispatchOrder: ['POST', '/orders/:orderId/dispatch', false],
+  holdForWeather: ['POST', '/orders/:orderId/weather-hold', false],
+  keepRoutePapers: ['POST', '/orders/:orderId/route-papers', false],
+  listOrderShipDays: ['GET', '/orders/:orderId/ship-days', false],
+  listRoutes: ['GET', '/routes', false],
+  printOrderPacking: ['GET', '/orders/:orderId/packing-sheet', false],
+  readMovement: ['GET', '/orders/:orderId/movement-document', false],
+  readShipDays: ['GET', '/listings/:listingId/ship-days', false],
+  reportArrival: ['POST', '/orders/:orderId/arrival', false],
+  reportLateArrival: ['POST', '/orders/:orderId/late-arrival', false],
+  reportLateBox: ['POST', '/orders/:orderId/late-box', false],
   readSeason: ['GET', '/season', false],
   readWayHome: ['GET', '/listings/:listingId/way-home', false],
 }

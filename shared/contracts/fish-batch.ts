@@ -1,6 +1,7 @@
 import { z } from 'zod'
 
 import { cents, dayText, line, photoId, stateCode, words } from '@/shared/contracts/values'
+import { shipDays } from '@/shared/domain/shipping/ship-days'
 import { packingClasses } from '@/shared/domain/season/season-classes.facts'
 import { packingClassIds } from '@/shared/domain/season/season-lane'
 
@@ -39,14 +40,19 @@ export const batchPhoto = z
   .object({ photoId, takenOn: dayText, hasRuler: z.boolean(), caption: line(120).optional() })
   .strict()
 
-export const shipDays = ['mon', 'tue', 'wed'] as const
-export type ShipDay = (typeof shipDays)[number]
-
 /** How a batch may be shipped, to the states it is sold to; the packing says whether it is one night or two days. */
 export const batchShipping = z
   .object({
     packing: z.enum(packingClassIds, { message: 'What do you pack them in, and how long is the way?' }),
     boxCents: cents.min(0, 'What you charge for a packed box; 0 is an answer.').max(100_000),
+    freightCents: cents
+      .min(0, 'What the carrier takes for one box; 0 if it is in your price.')
+      .max(100_000, 'At most $1,000 a box.'),
+    carrier: line(60).min(2, 'Which carrier and service, in your words?'),
+    carrierAccepts: z.literal(true, {
+      message: 'Ask your carrier whether it takes these animals in this service, then tick this.',
+    }),
+    holdsAtCounter: z.boolean(),
     mostInBox: wholeCount(1, 'The most animals you put in one box.'),
     days: z
       .array(z.enum(shipDays))

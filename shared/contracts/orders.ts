@@ -3,7 +3,8 @@ import { z } from 'zod'
 import { endpoint } from '@/shared/api/endpoint'
 import { shownRating, shownSurvival } from '@/shared/contracts/ratings'
 import { gateVerdict } from '@/shared/contracts/rules'
-import { cents, instantText, pageOf, publicIdText } from '@/shared/contracts/values'
+import { shipAddress, shownHold, shownShipment } from '@/shared/contracts/shipments'
+import { cents, dayText, instantText, pageOf, publicIdText } from '@/shared/contracts/values'
 import { cancelReasons, orderStates } from '@/shared/domain/orders/states.facts'
 
 export const orderActs = [
@@ -22,6 +23,16 @@ export const orderActs = [
   'contest',
   'stop',
   'decide',
+  'choose-ship-day',
+  'check-route',
+  'name-papers',
+  'dispatch',
+  'report-arrival',
+  'report-late-box',
+  'report-late-arrival',
+  'hold-for-weather',
+  'agree-new-day',
+  'decline-new-day',
   'rate',
   'change-rating',
   'reply-to-rating',
@@ -76,6 +87,10 @@ export const shownOrder = z.object({
   meeting: z
     .object({ street: z.string(), city: z.string(), state: z.string(), zip: z.string(), phone: z.string() })
     .optional(),
+  /** Of an order that is shipped. */
+  shipment: shownShipment.optional(),
+  /** The last time weather stopped its day. */
+  hold: shownHold.optional(),
   /** The buyer's code: shown once nothing is left to pay. */
   handOverCode: z.string().optional(),
   countHandedOver: z.int().optional(),
@@ -109,6 +124,11 @@ export const reserveBatch = endpoint({
     .object({
       quantity: z.int({ message: 'How many?' }).min(1, 'How many?').max(1_000_000),
       windowId: publicIdText.optional(),
+      /** Instead of a pickup: the box leaves on that day. `near` is then the ZIP code of the address. */
+      ship: z
+        .object({ shipDay: dayText, deliverTo: z.enum(['door', 'counter']), address: shipAddress })
+        .strict()
+        .optional(),
       payMode: z.enum(['deposit', 'full']).default('deposit'),
       near: z
         .string()

@@ -23,7 +23,16 @@ const at = new Date(TEST_NOW)
 const zips = { OH: ['45202', '45402', '44101'], KY: ['40202', '41011'], IN: ['46204'] }
 const allZips = Object.values(zips).flat()
 const taxonIds = ['bluegill', 'nile_tilapia', 'channel_catfish', 'rainbow_trout', 'yellow_perch']
-const thick: BatchShipping = { packing: 'foam-38-overnight', boxCents: 1200, mostInBox: 100, days: ['mon'] }
+const thick: BatchShipping = {
+  packing: 'foam-38-overnight',
+  boxCents: 1200,
+  freightCents: 4800,
+  carrier: 'Overnight air',
+  carrierAccepts: true,
+  holdsAtCounter: true,
+  mostInBox: 100,
+  days: ['mon'],
+}
 
 let desk: ListingDesk
 /** Public ids of the batches that can be shipped, and the states each goes to. */

@@ -39,7 +39,16 @@ function askAll(lanesFor: typeof safeLanesTo, triples = TRIPLES): Told[] {
     const body = batchBody(new Date('2027-01-15T12:00:00Z'), {
       taxonId: taxon.id,
       statesServed: [...new Set(states)],
-      shipping: { packing, boxCents: 1200, mostInBox: 100, days: ['mon'] },
+      shipping: {
+        packing,
+        boxCents: 1200,
+        freightCents: 4800,
+        carrier: 'Overnight air',
+        carrierAccepts: true,
+        holdsAtCounter: true,
+        mostInBox: 100,
+        days: ['mon'],
+      },
     })
     const day = new Date(Date.UTC(2026, 0, 1) + chance.between(0, 1500) * 86_400_000)
     const when = seasonWeek(day, chance.yes(0.2) ? undefined : chance.between(1, 53))

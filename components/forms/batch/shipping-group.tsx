@@ -10,7 +10,7 @@ import { packingWords } from '@/components/trips/packing-words'
 import { Text } from '@/components/ui/text'
 import { packingClasses } from '@/shared/domain/season/season-classes.facts'
 import { packingClassIds } from '@/shared/domain/season/season-lane'
-import { shipDays } from '@/shared/contracts/fish-batch'
+import { shipDays } from '@/shared/domain/shipping/ship-days'
 
 import type { BatchTyping } from './batch-typing'
 

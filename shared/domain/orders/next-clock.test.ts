@@ -16,6 +16,8 @@ const facts: ClockFacts = {
   isBalancePaid: false,
   claimWindowHours: 24,
   promisedDeliveryMs: null,
+  handOver: 'pickup',
+  silenceMoves: false,
   noShow: null,
 }
 
@@ -42,6 +44,18 @@ describe('the clock of an order', () => {
     const noShow = { by: 'seller', sinceMs: 5 } as const
     expect(nextClock({ ...facts, state: 'ready', noShow })).toEqual({ atMs: 5 + 24 * HOUR_MS, edge: 'E31' })
     expect(nextClock({ ...facts, state: 'ready', noShow: { ...noShow, by: 'buyer' } })?.edge).toBe('E32')
+  })
+
+  it('waits for a box by its promised delivery, and ends a ship order that nobody sent', () => {
+    const ship = { ...facts, handOver: 'ship', promisedDeliveryMs: 300 * HOUR_MS } as const
+    expect(nextClock({ ...ship, state: 'dispatched' })).toEqual({ atMs: 336 * HOUR_MS, edge: 'E36' })
+    expect(nextClock({ ...ship, state: 'ready' })).toEqual({ atMs: (201 + 72) * HOUR_MS, edge: 'E34' })
+  })
+
+  it('lets silence move the day only where that was said', () => {
+    expect(nextClock({ ...facts, state: 'weather_hold' })?.edge).toBe('E21')
+    const silent = nextClock({ ...facts, state: 'weather_hold', silenceMoves: true })
+    expect(silent).toEqual({ atMs: 72 * HOUR_MS, edge: 'E19' })
   })
 
   it('gives produce 12 hours for the answer and animals 48', () => {

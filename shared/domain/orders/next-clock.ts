@@ -17,6 +17,9 @@ export interface ClockFacts {
   isBalancePaid: boolean
   claimWindowHours: number
   promisedDeliveryMs: number | null
+  handOver: 'pickup' | 'ship'
+  /** Held for weather: whether the buyer's silence moves the day rather than ending the order. */
+  silenceMoves: boolean
   /** A reported no-show that is not contested yet. */
   noShow: { by: 'buyer' | 'seller'; sinceMs: number } | null
 }
@@ -54,14 +57,20 @@ export function nextClock(facts: ClockFacts): NextClock | null {
     case 'scheduled':
       return whileScheduled(facts)
     case 'weather_hold':
-      return { atMs: sinceMs + clockMs('weatherConsent', category), edge: 'E21' }
+      return {
+        atMs: sinceMs + clockMs('weatherConsent', category),
+        edge: facts.silenceMoves ? 'E19' : 'E21',
+      }
     case 'ready':
       if (facts.noShow) {
         // The one who did not come is not the one who says so.
         const edge = facts.noShow.by === 'seller' ? 'E31' : 'E32'
         return { atMs: facts.noShow.sinceMs + clockMs('noShowContest', category), edge }
       }
-      return { atMs: (facts.slotEndMs ?? sinceMs) + clockMs('missedDay', category), edge: 'E33' }
+      return {
+        atMs: (facts.slotEndMs ?? sinceMs) + clockMs('missedDay', category),
+        edge: facts.handOver === 'ship' ? 'E34' : 'E33',
+      }
     case 'dispatched':
       return { atMs: (facts.promisedDeliveryMs ?? sinceMs) + clockMs('lateBox', category), edge: 'E36' }
     case 'handed_over':

@@ -12,7 +12,7 @@ import type { SpeciesRecord } from '@/shared/domain/species/species-record'
 import { USUAL_ALKALINITY_MEQ_PER_L } from '@/shared/domain/transport/bag-equations.facts'
 import type { Weather } from '@/shared/domain/transport/leg-air'
 import type { Packs } from '@/shared/domain/transport/pack-heat'
-import type { Container, Trip } from '@/shared/domain/transport/trip'
+import type { Container, Trip, Vessel } from '@/shared/domain/transport/trip'
 
 /** Fingerlings of 5 g in usual bags, or lots of bedding. House rules. */
 const MASS_G = 5
@@ -24,6 +24,27 @@ export interface SeasonPacking {
   animals: AnimalClassId
   packing: PackingClassId
   option: SeasonOption
+}
+
+/** The usual filling of a packed box: bags of water and oxygen, or damp bedding. */
+export function filledBox(
+  species: SpeciesRecord<SpeciesId>,
+  { packing, option }: Pick<SeasonPacking, 'packing' | 'option'>,
+): Exclude<Container, Vessel> {
+  const { box, fillings, packHours } = packingClasses[packing]
+  const packs = packsOf(option, packHours)
+  if (species.travels !== 'in-water') return { kind: 'bedding', beddingKg: fillings * BEDDING_KG, box, packs }
+  return {
+    kind: 'bags',
+    boxes: 1,
+    bagsPerBox: fillings,
+    waterLPerBag: WATER_L,
+    oxygenLPerBag: OXYGEN_L,
+    isDoubled: true,
+    standsStill: true,
+    box,
+    packs,
+  }
 }
 
 function packsOf(option: SeasonOption, hours: 40 | 72): Packs {
@@ -46,22 +67,7 @@ export function seasonTrip(
   packing: SeasonPacking,
   weather: Weather,
 ): Trip {
-  const { box, fillings, legs, loadGPerL, packHours } = packingClasses[packing.packing]
-  const packs = packsOf(packing.option, packHours)
-  const isWet = species.travels === 'in-water'
-  const container: Container = isWet
-    ? {
-        kind: 'bags',
-        boxes: 1,
-        bagsPerBox: fillings,
-        waterLPerBag: WATER_L,
-        oxygenLPerBag: OXYGEN_L,
-        isDoubled: true,
-        standsStill: true,
-        box,
-        packs,
-      }
-    : { kind: 'bedding', beddingKg: fillings * BEDDING_KG, box, packs }
+  const { fillings, legs, loadGPerL } = packingClasses[packing.packing]
   return {
     animals: {
       species,
@@ -73,7 +79,7 @@ export function seasonTrip(
       fastedHours: species.fastHours,
     },
     water: { startC: packedC(packing), alkalinityMeqPerL: USUAL_ALKALINITY_MEQ_PER_L, pH: 7.5 },
-    container,
+    container: filledBox(species, packing),
     legs,
     departHour: SEASON_DEPART_HOUR,
     weather,

@@ -57,7 +57,10 @@ function judgeSpines({ species, longestMm, shortestMm }: Animals, container: Con
 function judgeSizes({ species: { sizeRatioMost }, shortestMm, longestMm }: Animals): Reason[] {
   if (sizeRatioMost === null || shortestMm === null || longestMm === null) return []
   const value = longestMm / shortestMm
-  return value > sizeRatioMost ? [remark('sizes-too-mixed', 'caution', { value, limit: sizeRatioMost })] : []
+  // 3 in over 2 in is 1.5, whatever the last digit of the millimetres says.
+  return value > sizeRatioMost + 1e-9
+    ? [remark('sizes-too-mixed', 'caution', { value, limit: sizeRatioMost })]
+    : []
 }
 
 function judgeFasting({ species: { fastHours }, fastedHours }: Animals): Reason[] {

@@ -1,0 +1,19 @@
+import { clockMs } from '@/shared/domain/orders/clocks.facts'
+
+export interface HoldFacts {
+  /** 1 for the first hold of the order. */
+  number: number
+  /** Begin of the day or window agreed before the hold, ms since 1970. */
+  fromMs: number
+  /** Begin of the proposed one; null: open-ended. */
+  proposedMs: number | null
+}
+
+/**
+ * Whether a buyer's silence may move the day (16 CFR 435.2(b)): only for the first hold, only to a named day, and only
+ * up to 30 days after the one agreed before. Otherwise silence ends the order and all money goes back.
+ */
+export function silenceMoves({ number, fromMs, proposedMs }: HoldFacts): boolean {
+  if (number !== 1 || proposedMs === null) return false
+  return proposedMs - fromMs <= clockMs('weatherSilence', 'fish')
+}
