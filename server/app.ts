@@ -17,6 +17,7 @@ import { noticeRoutes } from '@/server/notices/notice-routes'
 import { calendarRoutes } from '@/server/orders/calendar-routes'
 import { openapiRoutes } from '@/server/openapi/openapi-routes'
 import { orderRoutes } from '@/server/orders/order-routes'
+import { weatherRoutes } from '@/server/weather/weather-routes'
 import { packingRoutes } from '@/server/packing/packing-routes'
 import { photoFiles } from '@/server/photos/photo-files'
 import { photoRoutes } from '@/server/photos/photo-routes'
@@ -41,7 +42,7 @@ function api(origins: string[]): Router {
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
   router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
-  router.use(listingRoutes(), tripRoutes(), orderRoutes(), calendarRoutes())
+  router.use(listingRoutes(), tripRoutes(), orderRoutes(), weatherRoutes(), calendarRoutes())
   router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
   router.use(packingRoutes(), openapiRoutes())
   router.use(unknownPath)

@@ -11,6 +11,7 @@ const icons: Record<NoticeKind, IconName> = {
   settled: 'money',
   ended: 'stop',
   unclear: 'warn',
+  'weather-held': 'warn',
   'no-show': 'warn',
   'evening-before': 'clock',
   'two-hours-before': 'clock',

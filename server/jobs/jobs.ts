@@ -8,6 +8,7 @@ import { remindPickups } from '@/server/notices/remind-pickups'
 import { askSurvival } from '@/server/ratings/ask-survival'
 import { runEffects } from '@/server/outbox/run-effects'
 import { refreshSiteMean } from '@/server/search/refresh-site-mean'
+import { checkDueWays } from '@/server/weather/check-due-ways'
 
 const SECOND = 1000
 const HOUR = 3600 * SECOND
@@ -19,6 +20,7 @@ export function jobsOf(): Job[] {
     { name: 'effects', everyMs: 2 * SECOND, run: runEffects },
     { name: 'clocks', everyMs: 2 * SECOND, run: ringClocks },
     { name: 'reminders', everyMs: 20 * SECOND, run: remindPickups },
+    { name: 'ways', everyMs: 30 * SECOND, run: checkDueWays },
     { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
     { name: 'survival-questions', everyMs: 60 * SECOND, run: askSurvival },
     { name: 'site-mean', everyMs: HOUR, run: refreshSiteMean },

@@ -10,6 +10,7 @@ import {
   writeEvent,
   type OrderRow,
 } from '@/server/orders/order-store'
+import { closeHold } from '@/server/weather/close-hold'
 import { readOpenHold } from '@/server/orders/hold-store'
 import { readShipment } from '@/server/orders/shipment-store'
 import { readTerms } from '@/server/orders/terms-store'
@@ -114,6 +115,10 @@ export async function applyEdge(tx: Tx, command: EdgeCommand): Promise<EdgeOutco
     by: command.actorId ?? null,
     at,
   })
+  if (edge.from === 'weather_hold') {
+    const { edge: id, actor } = command
+    await closeHold(tx, { orderId: before.id, edge: id, actor, windowId: moved.windowId, at })
+  }
   if (edge.to === 'cancelled' && before.windowId !== null && isAhead(before, at))
     await freeSlot(tx, before.windowId)
   await writeEvent(tx, {

@@ -8,6 +8,7 @@ import { letMoneyGo } from '@/server/orders/let-money-go'
 import { markAnswerMissed, markDayMissed, markNoShow } from '@/server/orders/party-store'
 import type { OrderRow } from '@/server/orders/order-store'
 import { refundEverything } from '@/server/orders/refund-everything'
+import { takeDayBySilence } from '@/server/weather/silent-hold'
 import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 
 type ClockEdge = (order: OrderRow) => Promise<void>
@@ -56,6 +57,8 @@ export const clockEdges: Partial<Record<string, ClockEdge>> = {
   E02: (order) => endHold(order, ringOf('E02', order)),
   // A seller who has accepted waits for the processor, not for themselves.
   E09: async (order) => (order.acceptedAt === null ? sellerSilent(order) : undefined),
+  E19: (order) => takeDayBySilence(order, ringOf('E19', order)),
+  E21: byClock('E21', (tx, order) => refundEverything(tx, order, 'hold-no-consent')),
   E17: byClock('E17', (tx, order) => refundEverything(tx, order, 'never-scheduled')),
   E23: byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid')),
   E26: dayMissed,

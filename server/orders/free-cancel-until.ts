@@ -10,7 +10,7 @@ export function freeCancelUntil(order: OrderRow, terms: ListingBody): Date | nul
     category: terms.category,
     freeCancelHours: terms.freeCancelHours,
     quantityCutMs: null,
-    isMovedBySeller: order.sellerMoves > 0,
+    isMovedBySeller: order.sellerMoves > 0 || order.isDayBySilence,
   })
   return untilMs === null ? null : new Date(untilMs)
 }

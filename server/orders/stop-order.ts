@@ -20,10 +20,11 @@ const stops: Record<string, EdgeId> = {
   requested: 'E43',
   deposit_paid: 'E45',
   scheduled: 'E46',
+  weather_hold: 'E47',
   ready: 'E48',
 }
 
-/** E43, E45, E46, E48: a moderator ends the order, the buyer gets every cent, the animals go free only if said so. */
+/** E43, E45 to E48: a moderator ends the order, the buyer gets every cent, the animals go free only if said so. */
 export async function stopOrder(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const seen = await orderSeenBy(caller, orderId)
   if (seen.party !== 'staff')

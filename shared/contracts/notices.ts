@@ -13,6 +13,7 @@ export const noticeKinds = [
   'settled',
   'ended',
   'unclear',
+  'weather-held',
   'no-show',
   'evening-before',
   'two-hours-before',

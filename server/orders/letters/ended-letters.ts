@@ -94,6 +94,18 @@ export const endings = {
     buyer: ALL_BACK,
     seller: 'The buyer waited and nobody objected, so they have everything back. It counts in your record.',
   }),
+  holdDeclined: ended({
+    subject: 'The held order has ended',
+    buyer: `You did not want another day. ${ALL_BACK}`,
+    seller:
+      'The buyer did not want another day and gets everything back. The animals are free again; it does not count against you.',
+  }),
+  holdNoConsent: ended({
+    subject: 'The held order has ended',
+    buyer: `You did not answer about a new day, and silence may not move it again. ${ALL_BACK}`,
+    seller:
+      'The buyer did not answer about a new day, so everything goes back. The animals are free again; it does not count against you.',
+  }),
   stopped: ended({
     subject: 'We stopped this order',
     buyer: `Our moderators stopped the order; the reason stands with it. ${ALL_BACK}`,

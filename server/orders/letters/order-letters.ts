@@ -221,6 +221,8 @@ export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E14: scheduled,
   E16: endings.sellerCancelled,
   E17: endings.neverScheduled,
+  E20: endings.holdDeclined,
+  E21: endings.holdNoConsent,
   E22: ready,
   E23: endings.balanceUnpaid,
   E25: endings.sellerCancelled,
@@ -235,6 +237,8 @@ export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E43: endings.stopped,
   E45: endings.stopped,
   E46: endings.stopped,
+  E47: endings.stopped,
   E48: endings.stopped,
+  E54: endings.sellerCancelled,
   E55: endings.sellerCancelled,
 }

@@ -1,0 +1,79 @@
+import { inTransaction } from '@/db/transaction'
+import { now } from '@/server/clock'
+import { lockOrder, type OrderRow } from '@/server/orders/order-store'
+import { judgeWay, type JudgedWay } from '@/server/shipping/judge-way'
+import { holdOrder } from '@/server/weather/hold-order'
+import { askWay, loadOrderWay, type OrderWay } from '@/server/weather/order-way'
+import { proposeShipDay } from '@/server/weather/propose-ship-day'
+import { insertRouteCheck, type RouteCheckKind } from '@/server/weather/weather-store'
+import { fillCaution } from '@/shared/domain/rules/fill-caution'
+import { reasonTexts, type ReasonCode } from '@/shared/domain/transport/reason-texts.facts'
+import { printDay } from '@/shared/times/print-time'
+import { printBothTemperatures } from '@/shared/units/temperature'
+
+interface Checking {
+  kind: RouteCheckKind
+  /** Whether a way that is not safe holds its order (E18, E27). */
+  holds: boolean
+  isFresh: boolean
+}
+
+const noon = (day: string) => `${day}T12:00:00Z`
+
+/** G-10, or the same without a day when none can be named. */
+function whyOf(way: OrderWay, judged: JudgedWay, proposed: string | null): string {
+  const day = printDay(noon(way.shipment.shipDay), 'UTC')
+  const { worst, reasons } = judged.facts
+  if (!worst) {
+    const first = reasons[0]
+    const text = first ? reasonTexts[first.code as ReasonCode].text : 'The way is not safe.'
+    return `${text} You may cancel for a full refund.`
+  }
+  const extreme = worst.side
+  const temperature = printBothTemperatures(worst.airC, 'us')
+  if (proposed) {
+    return fillCaution('G-10', {
+      extreme,
+      day,
+      place: worst.place,
+      temperature,
+      date: printDay(noon(proposed), 'UTC'),
+    })
+  }
+  return `The route is too ${extreme} on ${day}: ${worst.place} ${temperature}. No better day can be named yet. You may cancel for a full refund.`
+}
+
+/**
+ * Looks at the way of an order now, keeps what was found, and holds the order when asked to and it is not safe. An
+ * answer `unknown` is kept and holds nothing: nobody knows that it is unsafe, and the dispatch gate still wants a safe one.
+ * True: the order was held.
+ */
+export async function checkWay(order: OrderRow, { kind, holds, isFresh }: Checking): Promise<boolean> {
+  const way = await loadOrderWay(order)
+  if (!way) return false
+  const { shipDay } = way.shipment
+  const judged = await judgeWay(askWay(way, shipDay, isFresh))
+  const isRed = judged.verdict === 'unsafe' && holds
+  const proposed = isRed ? await proposeShipDay(way) : null
+  return inTransaction(async (tx) => {
+    const locked = await lockOrder(tx, order.id)
+    if (!locked) return false
+    await insertRouteCheck(tx, {
+      orderId: order.id,
+      kind,
+      shipDay,
+      at: now(),
+      verdict: judged.verdict,
+      facts: judged.facts,
+    })
+    const isSameDay = locked.slotStartsAt?.getTime() === order.slotStartsAt?.getTime()
+    if (!isRed || !isSameDay || !['scheduled', 'ready'].includes(locked.state)) return false
+    await holdOrder(tx, locked, {
+      startedBy: kind === 'seller' ? 'seller' : 'system',
+      commandId: `weather:${kind}:${shipDay}:${locked.version}`,
+      why: whyOf(way, judged, proposed),
+      proposed: proposed ? { shipDay: proposed } : {},
+    })
+    return true
+  })
+}

@@ -1,0 +1,47 @@
+import { inTransaction } from '@/db/transaction'
+import type { Caller } from '@/server/http/caller'
+import { hasCommand, lockOrder } from '@/server/orders/order-store'
+import { mayAct } from '@/server/orders/order-policy'
+import { orderSeenBy } from '@/server/orders/party-of'
+import { showAgain } from '@/server/orders/show-order'
+import { holdOrder } from '@/server/weather/hold-order'
+import { requireShipDay } from '@/server/weather/require-ship-day'
+import { loadOrderWay } from '@/server/weather/order-way'
+import { Problem } from '@/shared/api/problem'
+import type { ParsedBody } from '@/shared/api/endpoint'
+import type { Endpoints } from '@/shared/api/routes.gen'
+import type { ShownOrder } from '@/shared/contracts/orders'
+
+type Asked = ParsedBody<Endpoints['holdForWeather']> & { commandId: string }
+
+/** E18, E27 by the seller, who sees the sky: a box or a pickup, with a day proposed or open-ended. */
+export async function holdForWeather(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
+  const { order, party } = await orderSeenBy(caller, orderId)
+  if (party !== 'seller') throw new Problem('not-found')
+  const isShipped = order.handOver === 'ship'
+  if (isShipped ? asked.windowId : asked.shipDay) {
+    const pointer = isShipped ? '#/windowId' : '#/shipDay'
+    const detail = isShipped
+      ? 'This order is shipped: propose a ship day.'
+      : 'This order is collected: propose a pickup time.'
+    throw new Problem('fields-invalid', undefined, { errors: [{ detail, pointer }] })
+  }
+  const way = asked.shipDay && mayAct('hold-for-weather', order, 'seller') ? await loadOrderWay(order) : null
+  if (way && asked.shipDay) await requireShipDay(way, asked.shipDay)
+  await inTransaction(async (tx) => {
+    const locked = await lockOrder(tx, order.id)
+    if (!locked) throw new Problem('not-found')
+    if (await hasCommand(tx, locked.id, asked.commandId)) return
+    if (!mayAct('hold-for-weather', locked, 'seller')) {
+      throw new Problem('order-moved', undefined, { facts: { state: locked.state } })
+    }
+    await holdOrder(tx, locked, {
+      startedBy: 'seller',
+      actorId: caller.memberId,
+      commandId: asked.commandId,
+      why: asked.why,
+      proposed: { shipDay: asked.shipDay, windowId: asked.windowId },
+    })
+  })
+  return showAgain({ order, party })
+}
