@@ -56,6 +56,17 @@ const inner = [
     except: ['./fake'],
     message: 'the fake processor shares no module with the product',
   },
+  {
+    target: ['./server/!(forecast)/**', './server/*.ts', './server/forecast/!(*.test).ts'],
+    from: './server/forecast/fake',
+    message: 'the product does not know the practice forecast',
+  },
+  {
+    target: './server/forecast/fake',
+    from: ['./server', './shared', './db', './payments'],
+    except: ['./forecast/fake'],
+    message: 'the practice forecast shares no module with the product',
+  },
 ]
 const noBarrels = {
   selector: 'ExportAllDeclaration',

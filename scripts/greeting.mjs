@@ -9,10 +9,14 @@ function columns(rows) {
  * @param {import('./start-product.mjs').Product} product
  * @param {{ people: import('./demo-people.mjs').DemoPerson[], production: boolean, clockOffsetMs: number }} shown
  */
-export function greeting({ origin, mailOrigin, payOrigin }, { people, production, clockOffsetMs }) {
+export function greeting(
+  { origin, mailOrigin, payOrigin, weatherOrigin },
+  { people, production, clockOffsetMs },
+) {
   const lines = ['', `Tankward is ready:  ${origin}`]
   if (mailOrigin) lines.push(`Mail it has sent:   ${mailOrigin}`)
   if (payOrigin) lines.push(`Practice payments:  ${payOrigin}`)
+  if (weatherOrigin) lines.push(`Practice weather:   ${weatherOrigin}`)
   if (clockOffsetMs !== 0) {
     const day = new Date(Date.now() + clockOffsetMs).toISOString().slice(0, 10)
     lines.push(`For Tankward, today is ${day} (sign-in and logs keep real time).`)

@@ -8,12 +8,12 @@ import { readSecrets } from './secrets.mjs'
 import { seedOnce } from './seed-once.mjs'
 import { namedIn, serverEnvironment } from './server-environment.mjs'
 import { startDatabase } from './start-database.mjs'
-import { startMailCatcher, startPayments } from './start-stand-ins.mjs'
+import { startForecast, startMailCatcher, startPayments } from './start-stand-ins.mjs'
 import { step } from './tell.mjs'
 
 // Beside the server's own 8080; tried at the first start of a data folder.
-const FIRST_PORTS = { smtp: 8025, mail: 8026, pay: 8027 }
-const ANY_PORTS = { smtp: 0, mail: 0, pay: 0 }
+const FIRST_PORTS = { smtp: 8025, mail: 8026, pay: 8027, weather: 8028 }
+const ANY_PORTS = { smtp: 0, mail: 0, pay: 0, weather: 0 }
 
 /** @param {number} wanted */
 async function portFor(wanted) {
@@ -38,7 +38,7 @@ export async function claimGround(dataDir, wantedPort) {
 }
 
 /**
- * Everything the server stands on: database with its first rows, mail, payments, settings.
+ * Everything the server stands on: database with its first rows, mail, payments, forecast, settings.
  * @param {import('./crew.mjs').Crew} crew
  * @param {Omit<import('./start-product.mjs').ProductOptions, 'onDeath'> & { origin: string, startOver?: boolean }} options
  */
@@ -50,13 +50,14 @@ export async function layGround(crew, options) {
   const secrets = await readSecrets(dataDir)
   const ports = await rememberedPorts(dataDir, durable ? FIRST_PORTS : ANY_PORTS)
   const given = { dataDir, origin, clockOffsetMs, ports, secrets }
-  const [database, mail, payments] = await Promise.all([
+  const [database, mail, payments, forecast] = await Promise.all([
     named.database ? null : step('Database', () => startDatabase(crew, { dataDir, durable, startOver })),
     named.mail ? null : startMailCatcher(crew, given),
     named.payments ? null : startPayments(crew, given),
+    named.forecast ? null : startForecast(crew, given),
   ])
   const databaseUrl = environment.DATABASE_URL ?? database?.url ?? ''
   const settings = serverEnvironment({ ...given, port, databaseUrl }, environment)
   if (database) await seedOnce(crew, { dataDir, ownerUrl: database.ownerUrl, settings })
-  return { database, mail, payments, settings }
+  return { database, mail, payments, forecast, settings }
 }

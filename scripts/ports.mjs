@@ -27,7 +27,7 @@ async function thisOrAny(wanted) {
  * Ports for the programs beside the server. They stay the same from start to start while they are free, so
  * that an open mail page or a bookmarked payment page goes on working.
  * @param {string} dataDir
- * @param {{ smtp: number, mail: number, pay: number }} first what to try at the first start
+ * @param {{ smtp: number, mail: number, pay: number, weather: number }} first what to try at the first start
  */
 export async function rememberedPorts(dataDir, first) {
   const file = path.join(dataDir, 'ports.json')
@@ -37,6 +37,7 @@ export async function rememberedPorts(dataDir, first) {
     smtp: await thisOrAny(wanted.smtp),
     mail: await thisOrAny(wanted.mail),
     pay: await thisOrAny(wanted.pay),
+    weather: await thisOrAny(wanted.weather),
   }
   await writeFile(file, JSON.stringify(ports))
   return ports

@@ -9,7 +9,7 @@ import { ROOT } from './project-root.mjs'
  * @property {number} clockOffsetMs
  * @property {string} databaseUrl
  * @property {import('./secrets.mjs').Secrets} secrets
- * @property {{ smtp: number, mail: number, pay: number }} ports
+ * @property {{ smtp: number, mail: number, pay: number, weather: number }} ports
  */
 
 /** Which hosted services the environment names: those are used, and no local stand-in is started. @param {Record<string, string | undefined>} environment */
@@ -17,6 +17,8 @@ export const namedIn = (environment) => ({
   database: Boolean(environment.DATABASE_URL),
   mail: Boolean(environment.SMTP_URL),
   payments: Boolean(environment.STRIPE_SECRET_KEY),
+  // Real growers must never read invented weather: in production there is a real service, or none.
+  forecast: Boolean(environment.FORECAST_URL) || environment.NODE_ENV === 'production',
 })
 
 /**
@@ -39,6 +41,7 @@ export function serverEnvironment(own, environment) {
     // Invented people do not belong in a named database, and their cards not at a real processor.
     DEMO: production || named.database || named.payments ? 'off' : 'on',
     ...(own.clockOffsetMs === 0 ? {} : { CLOCK_OFFSET_MS: String(own.clockOffsetMs) }),
+    ...(named.forecast ? {} : { FORECAST_URL: `http://127.0.0.1:${own.ports.weather}` }),
     ...(named.payments
       ? {}
       : {

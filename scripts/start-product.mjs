@@ -20,6 +20,7 @@ import { deathOf, waitUntilUp } from './wait-until-up.mjs'
  * @property {string} origin
  * @property {string | null} mailOrigin null when the environment names a real mail server
  * @property {string | null} payOrigin
+ * @property {string | null} weatherOrigin
  * @property {string} databaseUrl as the app signs in
  * @property {() => Promise<void>} restartServer
  */
@@ -45,11 +46,11 @@ function watchDatabase(database, gone) {
 export async function startProduct(crew, options) {
   const dataDir = path.resolve(options.dataDir)
   const { port, origin } = await claimGround(dataDir, options.port)
-  const [{ database, mail, payments, settings }] = await Promise.all([
+  const [{ database, mail, payments, forecast, settings }] = await Promise.all([
     layGround(crew, { ...options, dataDir, port, origin }),
     step('Web app', () => exportWeb(crew)),
   ])
-  const beside = [mail, payments].flatMap((one) => (one ? [one.member] : []))
+  const beside = [mail, payments, forecast].flatMap((one) => (one ? [one.member] : []))
   /** @type {Set<import('./crew.mjs').Member>} */
   const dismissed = new Set()
 
@@ -81,6 +82,7 @@ export async function startProduct(crew, options) {
     origin,
     mailOrigin: mail?.url ?? null,
     payOrigin: payments?.url ?? null,
+    weatherOrigin: forecast?.url ?? null,
     databaseUrl: settings.DATABASE_URL ?? '',
     restartServer: async () => {
       dismissed.add(server)

@@ -10,7 +10,7 @@ const TSX = ['node', '--import', 'tsx']
  * @property {string} dataDir
  * @property {string} origin of the product
  * @property {number} clockOffsetMs
- * @property {{ smtp: number, mail: number, pay: number }} ports
+ * @property {{ smtp: number, mail: number, pay: number, weather: number }} ports
  * @property {import('./secrets.mjs').Secrets} secrets
  */
 
@@ -43,5 +43,20 @@ export async function startPayments(crew, { dataDir, origin, clockOffsetMs, port
     environment: { ...plainEnvironment(), PAYMENTS_FAKE_WEBHOOK_SECRET: secrets.stripeWebhook },
   })
   await waitUntilUp(member, url)
+  return { member, url }
+}
+
+/** The practice forecast: invented weather, which its page lets one set. @param {import('./crew.mjs').Crew} crew @param {StandIns} given */
+export async function startForecast(crew, { dataDir, clockOffsetMs, ports }) {
+  const url = `http://127.0.0.1:${ports.weather}`
+  const member = crew.start({
+    name: 'practice forecast',
+    command: [
+      ...[...TSX, 'server/forecast/fake/main.ts', '--port', String(ports.weather)],
+      ...['--clock-offset', String(clockOffsetMs), '--weather', path.join(dataDir, 'weather.json')],
+    ],
+    environment: plainEnvironment(),
+  })
+  await waitUntilUp(member, `${url}/healthz`)
   return { member, url }
 }

@@ -15,6 +15,7 @@ const shape = z.object({
   STRIPE_SECRET_KEY: z.string().regex(/^sk_/, 'must be a secret key of the payment processor'),
   STRIPE_WEBHOOK_SECRET: z.string().regex(/^whsec_/, 'must be the signing secret of the webhook'),
   STRIPE_API_BASE: z.url().optional(),
+  FORECAST_URL: z.url().optional(),
   SMTP_URL: z.string().regex(/^smtps?:\/\//, 'must start with smtp:// or smtps://'),
   MAIL_FROM: z.email().default('hello@tankward.example'),
   UPLOAD_DIR: z.string().min(1),

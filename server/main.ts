@@ -5,6 +5,7 @@ import { buildApp } from '@/server/app'
 import { openAuth } from '@/server/auth/auth'
 import { setClockOffset } from '@/server/clock'
 import { readSettings, type Settings } from '@/server/env'
+import { configureForecast } from '@/server/forecast/forecast-settings'
 import { isStopping, noteStopping } from '@/server/health/stopping'
 import { jobsOf } from '@/server/jobs/jobs'
 import { startJobs } from '@/server/jobs/job-runner'
@@ -52,6 +53,7 @@ function main(): void {
   configurePayments(paymentSettings(settings))
   configurePhotos({ dir: settings.UPLOAD_DIR })
   configureOrders({ origin: settings.PUBLIC_ORIGIN, feeBp: settings.FEE_BP })
+  configureForecast({ url: settings.FORECAST_URL ?? null })
   armFailPoint(settings.FAIL_POINT)
   registerDoers()
 

@@ -64,11 +64,13 @@ describe('starting and stopping everything', () => {
     await rm(dataDir, { recursive: true, force: true })
   })
 
-  it('serves the app, the mail page and the practice payments', async () => {
-    const [mail, pay] = [/Mail it has sent: +(\S+)/, /Practice payments: +(\S+)/].map(
-      (line) => line.exec(first.said())?.[1],
-    )
-    for (const address of [origin, `${origin}/readyz`, mail, pay]) {
+  it('serves the app, the mail page, the practice payments and the practice weather', async () => {
+    const [mail, pay, weather] = [
+      /Mail it has sent: +(\S+)/,
+      /Practice payments: +(\S+)/,
+      /Practice weather: +(\S+)/,
+    ].map((line) => line.exec(first.said())?.[1])
+    for (const address of [origin, `${origin}/readyz`, mail, pay, weather]) {
       expect((await fetch(String(address))).status, address).toBe(200)
     }
   })
@@ -101,12 +103,14 @@ describe('starting and stopping everything', () => {
     const note = JSON.parse(await readFile(path.join(dataDir, 'running.json'), 'utf8')) as {
       programs: { pid: number }[]
     }
-    expect(note.programs).toHaveLength(3)
+    expect(note.programs).toHaveLength(4)
     const began = Date.now()
     first.child.kill('SIGTERM')
     expect(await ending(first)).toBe(0)
     expect(Date.now() - began).toBeLessThan(10_000)
     expect(await programsOf(dataDir)).toEqual([])
-    expect(await Promise.all(note.programs.map(({ pid }) => commandOf(pid)))).toEqual([null, null, null])
+    expect(await Promise.all(note.programs.map(({ pid }) => commandOf(pid)))).toEqual(
+      note.programs.map(() => null),
+    )
   })
 })

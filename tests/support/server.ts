@@ -12,6 +12,7 @@ import { BUILT_PASSWORD } from '@/seed/build-member'
 import { buildApp } from '@/server/app'
 import { openAuth } from '@/server/auth/auth'
 import { setClockOffset } from '@/server/clock'
+import { configureForecast } from '@/server/forecast/forecast-settings'
 import { log } from '@/server/log'
 import { configureUnsubscribe } from '@/server/mail/unsubscribe-token'
 import { configureOrders } from '@/server/orders/order-settings'
@@ -55,6 +56,7 @@ export async function openTestServer(label: string): Promise<TestServer> {
   openAuth({ secret: 'test-secret-'.repeat(4), origin: TEST_ORIGIN, alsoTrusted: [] })
   configureOrders({ origin: TEST_ORIGIN, feeBp: 600 })
   configureUnsubscribe({ origin: TEST_ORIGIN, secret: 'test-secret-'.repeat(4) })
+  configureForecast({ url: null })
   const uploadDir = await mkdtemp(path.join(tmpdir(), 'tankward-test-photos-'))
   configurePhotos({ dir: uploadDir })
   forgetPlaces()

@@ -14,6 +14,7 @@ export interface WholeProduct {
   origin: string
   mailOrigin: string
   payOrigin: string
+  weatherOrigin: string
   /** As the product signs in. */
   databaseUrl: string
   /** Holds demo-people.json, logs and uploads of this run. */
@@ -67,9 +68,9 @@ export default async function setup(project: TestProject): Promise<() => Promise
       environment: { ...plainEnvironment(), LOG_LEVEL: 'warn', TRUST_PROXY_HOPS: '1' },
       onDeath: (_name, fault) => console.error(sentenceOf(fault)),
     })
-    const { origin, mailOrigin, payOrigin, databaseUrl } = product
-    if (!mailOrigin || !payOrigin) throw new Error('the mail catcher and the practice processor must run')
-    project.provide('wholeProduct', { origin, mailOrigin, payOrigin, databaseUrl, dataDir })
+    const { origin, mailOrigin, payOrigin, weatherOrigin, databaseUrl } = product
+    if (!mailOrigin || !payOrigin || !weatherOrigin) throw new Error('every stand-in must run')
+    project.provide('wholeProduct', { origin, mailOrigin, payOrigin, weatherOrigin, databaseUrl, dataDir })
   } catch (error) {
     await tearDown()
     throw error
