@@ -51,7 +51,7 @@ function drop(gone: Worker, why: string): void {
 
 function startThread(): Worker {
   const file = new URL('./ask-service-thread.mjs', import.meta.url)
-  const started = new Worker(file, { execArgv: [], resourceLimits: { maxOldGenerationSizeMb: 64 } })
+  const started = new Worker(file, { execArgv: [] })
   // A server that wants to end does not wait for it.
   started.unref()
   started.on('message', ({ id, reply, failure }: Told) => {
@@ -66,9 +66,8 @@ function startThread(): Worker {
 }
 
 /**
- * Asks through the service's own client; throws what it throws. The client runs in a thread of its own because it
- * reads any body as lengths and offsets: one that is no forecast (a negative length) keeps it turning for ever,
- * which no time-out within the same thread could end.
+ * Asks through the service's own client; throws what it throws. The client runs in a thread of its own: there its
+ * `fetch` can be guarded without touching ours, and a reply on which it turns for ever is ended with the thread.
  */
 export async function askService(ask: ServiceAsk): Promise<ServiceReply> {
   thread ??= startThread()
