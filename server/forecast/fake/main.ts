@@ -18,9 +18,15 @@ const { values } = parseArgs({
   },
 })
 
+function wholeNumber(name: 'clock-offset' | 'port'): number {
+  const text = values[name]
+  if (!/^-?\d+$/.test(text)) throw new Error(`--${name} wants a whole number, not "${text}"`)
+  return Number(text)
+}
+
 const forecast = await startForecast({
-  port: Number(values.port),
-  clockOffsetMs: Number(values['clock-offset']),
+  port: wholeNumber('port'),
+  clockOffsetMs: wholeNumber('clock-offset'),
   weatherFile: values.weather,
 })
 process.stdout.write(`practice forecast on ${forecast.url} (kept in ${values.weather})\n`)
