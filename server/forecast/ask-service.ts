@@ -52,8 +52,6 @@ function drop(gone: Worker, why: string): void {
 function startThread(): Worker {
   const file = new URL('./ask-service-thread.mjs', import.meta.url)
   const started = new Worker(file, { execArgv: [] })
-  // A server that wants to end does not wait for it.
-  started.unref()
   started.on('message', ({ id, reply, failure }: Told) => {
     const asked = waiting.get(id)
     waiting.delete(id)
@@ -62,6 +60,8 @@ function startThread(): Worker {
   })
   started.on('error', (error) => drop(started, `the forecast thread failed: ${error.message}`))
   started.on('exit', () => drop(started, 'the forecast thread ended'))
+  // A server that wants to end does not wait for it. Said last: a listener for messages would hold it again.
+  started.unref()
   return started
 }
 
