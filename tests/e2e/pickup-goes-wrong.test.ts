@@ -8,7 +8,7 @@ import { demoOrder, moveSlot, type DemoOrder } from '@/tests/support/demo-orders
 import { signInNeighbour } from '@/tests/support/demo-people'
 import { waitForMail } from '@/tests/support/mailbox'
 
-const { origin, mailOrigin, databaseUrl, dataDir } = inject('wholeProduct')
+const { origin, mailOrigin, databaseUrl, clockOffsetMs, dataDir } = inject('wholeProduct')
 let browser: TestBrowser
 beforeAll(async () => {
   connect(databaseUrl)
@@ -43,7 +43,7 @@ async function cancel(page: Page, told: string): Promise<void> {
 
 it('a buyer cancels in the free time and gets everything back', async () => {
   const order = await demoOrder({ state: 'scheduled', isBalancePaid: false })
-  await moveSlot(order.orderId, 30 * 24)
+  await moveSlot(order.orderId, 30 * 24, clockOffsetMs)
   const page = await openOrder(order, order.buyerEmail)
   const since = new Date()
   await cancel(page, `You get ${printCents(order.paidCents)} back.`)
@@ -59,7 +59,7 @@ it('a buyer cancels in the free time and gets everything back', async () => {
 
 it('a buyer who cancels late is told what the seller keeps before pressing', async () => {
   const order = await demoOrder({ state: 'scheduled', isBalancePaid: false })
-  await moveSlot(order.orderId, 20)
+  await moveSlot(order.orderId, 20, clockOffsetMs)
   const page = await openOrder(order, order.buyerEmail)
   const back = printCents(order.paidCents - order.depositCents)
   await cancel(page, `the seller keeps ${printCents(order.depositCents)}, you get ${back} back.`)
@@ -79,7 +79,7 @@ async function sayNoShow(page: Page, act: string): Promise<void> {
 
 it('a seller says that the buyer did not come, and the buyer objects', async () => {
   const order = await demoOrder({ state: 'ready', isBalancePaid: true })
-  await moveSlot(order.orderId, -2.5)
+  await moveSlot(order.orderId, -2.5, clockOffsetMs)
   const seller = await openOrder(order, order.sellerEmail)
   await sayNoShow(seller, 'The buyer did not come')
   await seller.getByText('The seller says the buyer did not come').waitFor()
@@ -102,7 +102,7 @@ it('a seller says that the buyer did not come, and the buyer objects', async () 
 
 it('a buyer stands at the gate and says that the seller is not there', async () => {
   const order = await demoOrder({ state: 'ready', isBalancePaid: false })
-  await moveSlot(order.orderId, -0.5)
+  await moveSlot(order.orderId, -0.5, clockOffsetMs)
   const page = await openOrder(order, order.buyerEmail)
   await sayNoShow(page, 'The seller is not here')
   await page.getByText('The buyer says the seller was not there').waitFor()

@@ -31,8 +31,8 @@ export async function demoOrder(wish: {
 }
 
 /** Lets time pass for one order alone: its window now begins so many hours from now, and lasts one. */
-export async function moveSlot(orderId: string, startsInHours: number): Promise<void> {
-  const startsAt = new Date(Date.now() + startsInHours * 3_600_000)
+export async function moveSlot(orderId: string, startsInHours: number, clockOffsetMs: number): Promise<void> {
+  const startsAt = new Date(Date.now() + clockOffsetMs + startsInHours * 3_600_000)
   const endsAt = new Date(startsAt.getTime() + 3_600_000)
   await db().execute(
     sql`UPDATE orders SET slot_starts_at = ${startsAt}, slot_ends_at = ${endsAt} WHERE public_id = ${orderId}`,

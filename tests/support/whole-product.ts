@@ -1,6 +1,7 @@
 import { readdir, rm } from 'node:fs/promises'
 import path from 'node:path'
 
+import holidays from '@18f/us-federal-holidays'
 import type { TestProject } from 'vitest/node'
 
 import { makeCrew } from '@/scripts/crew.mjs'
@@ -17,6 +18,8 @@ export interface WholeProduct {
   weatherOrigin: string
   /** As the product signs in. */
   databaseUrl: string
+  /** How far the product's own date runs ahead of the real one. */
+  clockOffsetMs: number
   /** Holds demo-people.json, logs and uploads of this run. */
   dataDir: string
 }
@@ -28,6 +31,27 @@ declare module 'vitest' {
 }
 
 const PARENT = path.resolve('.data/e2e')
+
+const DAY_MS = 86_400_000
+const TUESDAY = 2
+
+/**
+ * Boxes leave on Mondays to Wednesdays: journeys run on the next Tuesday without a holiday about it, whatever the day
+ * of the run. In the hours of a UTC Tuesday it is Monday or Tuesday all over the United States.
+ */
+function msToShipDay(now: Date): number {
+  const year = now.getUTCFullYear()
+  const noCarriers = new Set(
+    [year, year + 1].flatMap((one) => holidays.allForYear(one)).map((one) => one.dateString),
+  )
+  for (let days = 0; ; days++) {
+    const at = new Date(now.getTime() + days * DAY_MS)
+    const about = [-1, 0, 1, 2].map((more) =>
+      new Date(at.getTime() + more * DAY_MS).toISOString().slice(0, 10),
+    )
+    if (at.getUTCDay() === TUESDAY && !about.some((day) => noCarriers.has(day))) return days * DAY_MS
+  }
+}
 
 /** Ends and removes what runs left behind that were killed. */
 async function sweep(): Promise<void> {
@@ -52,6 +76,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
   }
   await sweep()
   const dataDir = path.join(PARENT, String(process.pid))
+  const clockOffsetMs = msToShipDay(new Date())
   const crew = makeCrew(path.join(dataDir, 'logs'))
   const tearDown = async () => {
     await crew.stopAll()
@@ -61,7 +86,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
     const product = await startProduct(crew, {
       dataDir,
       port: 0,
-      clockOffsetMs: 0,
+      clockOffsetMs,
       durable: false,
       // Not the runner's own: a server that believes to be under test would leave its guards down.
       // One proxy hop: the address that a test's browser says it comes from is believed.
@@ -70,7 +95,15 @@ export default async function setup(project: TestProject): Promise<() => Promise
     })
     const { origin, mailOrigin, payOrigin, weatherOrigin, databaseUrl } = product
     if (!mailOrigin || !payOrigin || !weatherOrigin) throw new Error('every stand-in must run')
-    project.provide('wholeProduct', { origin, mailOrigin, payOrigin, weatherOrigin, databaseUrl, dataDir })
+    project.provide('wholeProduct', {
+      origin,
+      mailOrigin,
+      payOrigin,
+      weatherOrigin,
+      databaseUrl,
+      clockOffsetMs,
+      dataDir,
+    })
   } catch (error) {
     await tearDown()
     throw error
