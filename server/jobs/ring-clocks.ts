@@ -8,7 +8,7 @@ const MOST_AT_A_TIME = 100
 
 /** Fires the timers that have rung. An order that moved on meanwhile is left alone; one failure stops nothing else. */
 export async function ringClocks(): Promise<void> {
-  for (const due of await listDueOrders(now(), MOST_AT_A_TIME)) {
+  for (const due of await listDueOrders(now(), Object.keys(clockEdges), MOST_AT_A_TIME)) {
     const ring = due.clockEdge ? clockEdges[due.clockEdge] : undefined
     const order = ring ? await readOrderById(due.id) : undefined
     if (!ring || !order) continue

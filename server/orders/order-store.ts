@@ -189,11 +189,8 @@ export async function listOrderRows(page: OrderPage): Promise<OrderRow[]> {
     .limit(page.limit)
 }
 
-/** Orders whose timer has rung and that nothing holds still. */
-export async function listDueOrders(
-  at: Date,
-  most: number,
-): Promise<{ id: number; clockEdge: string | null }[]> {
+/** Orders whose timer for one of these edges has rung and that nothing holds still, the oldest first. */
+export function listDueOrders(at: Date, edges: readonly string[], most: number) {
   return db()
     .select({ id: order.id, clockEdge: order.clockEdge })
     .from(order)
@@ -201,6 +198,7 @@ export async function listDueOrders(
       and(
         isNotNull(order.clockAt),
         lte(order.clockAt, at),
+        inArray(order.clockEdge, [...edges]),
         eq(order.freeze, 'none'),
         or(ne(order.paymentDispute, 'open'), isNull(order.paymentDispute)),
       ),
