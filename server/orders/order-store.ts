@@ -189,21 +189,35 @@ export async function listOrderRows(page: OrderPage): Promise<OrderRow[]> {
     .limit(page.limit)
 }
 
+export interface DueOrders {
+  at: Date
+  edges: readonly string[]
+  /** The last one of the look before. */
+  after?: { id: number; clockAt: Date | null }
+  most: number
+}
+
 /** Orders whose timer for one of these edges has rung and that nothing holds still, the oldest first. */
-export function listDueOrders(at: Date, edges: readonly string[], most: number) {
+export function listDueOrders({ at, edges, after, most }: DueOrders) {
   return db()
-    .select({ id: order.id, clockEdge: order.clockEdge })
+    .select({ id: order.id, clockAt: order.clockAt, clockEdge: order.clockEdge })
     .from(order)
     .where(
       and(
         isNotNull(order.clockAt),
         lte(order.clockAt, at),
+        after?.clockAt
+          ? or(
+              gt(order.clockAt, after.clockAt),
+              and(eq(order.clockAt, after.clockAt), gt(order.id, after.id)),
+            )
+          : undefined,
         inArray(order.clockEdge, [...edges]),
         eq(order.freeze, 'none'),
         or(ne(order.paymentDispute, 'open'), isNull(order.paymentDispute)),
       ),
     )
-    .orderBy(asc(order.clockAt))
+    .orderBy(asc(order.clockAt), asc(order.id))
     .limit(most)
 }
 

@@ -69,6 +69,15 @@ describe('a clock that rings', () => {
     await forget('E42')
   })
 
+  it('is heard behind many that ring and may not act yet', async () => {
+    const orderId = await held('behind the processor')
+    // Accepted, but the processor has not confirmed: E09 waits.
+    await rungBefore(orderId, { state: 'requested', clockEdge: 'E09', acceptedAt: now() })
+    await ringLater()
+    expect((await rowOf(orderId)).state).toBe('cancelled')
+    await forget('E09')
+  })
+
   it.each([
     ['rest', { state: 'settled', clockAt: null, clockEdge: null }],
     ['wait for an edge that nobody has wired', { state: 'claim_open', clockEdge: 'E42' }],
@@ -76,9 +85,12 @@ describe('a clock that rings', () => {
     const orderId = await held(name)
     for (let times = 0; times < 20; times++) await rungBefore(orderId, change)
     await desk.db.execute(sql`analyze table orders`)
-    const asked = listDueOrders(now(), ['E02', 'E40'], 100).getSQL()
-    const [plan] = await desk.db.execute(sql`explain ${asked}`)
-    expect(plan).toMatchObject([{ key: 'k_order_clock', type: 'range' }])
-    expect(JSON.stringify(plan)).not.toContain('filesort')
+    const before = { id: 1, clockAt: new Date(now().getTime() - 61 * MINUTE_MS) }
+    for (const after of [undefined, before]) {
+      const asked = listDueOrders({ at: now(), edges: ['E02', 'E40'], after, most: 100 }).getSQL()
+      const [plan] = await desk.db.execute(sql`explain ${asked}`)
+      expect(plan).toMatchObject([{ key: 'k_order_clock', type: 'range' }])
+      expect(JSON.stringify(plan)).not.toContain('filesort')
+    }
   })
 })
