@@ -92,6 +92,22 @@ export const listingSearch = mysqlTable(
       uniqueIndex('u_listing').on(t.listingId),
       // Most searches name a species: all four sorts read its circle here. Covering, as a look-up a row costs 3 to 7 times more.
       index('k_species').on(t.species, t.hil, t.x, t.y, t.z, ...facts, ...rest, ...who, t.ratingRank),
+      // What is safely shipped in a week: a few lanes out of thousands, so this reads hardly more than it finds.
+      index('k_lane').on(
+        t.lane,
+        t.hil,
+        t.category,
+        t.species,
+        t.x,
+        t.y,
+        t.z,
+        ...facts,
+        ...rest,
+        t.pickup,
+        t.shipStates,
+        t.hiddenStates,
+        t.ratingRank,
+      ),
       // Cheapest of a category in a wide circle: walk upwards and stop at a page. Covering for the same reason.
       index('k_price').on(
         t.category,

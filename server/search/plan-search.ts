@@ -118,9 +118,12 @@ export function planSearch(query: SearchQuery, outlook: Outlook): SearchPlan {
   if (candidates <= SMALL_CIRCLE_ROWS) return { kind: 'circle' }
   const share = outlook.selectivity.estimate(query)
   if (query.sort === 'nearest') {
-    if (candidates * share <= SMALL_CIRCLE_HITS) return { kind: 'circle' }
+    // By lane little is read but what is found.
+    const few = query.shipped ? SMALL_CIRCLE_ROWS : SMALL_CIRCLE_HITS
+    if (candidates * share <= few) return { kind: 'circle' }
     return { kind: 'grow', firstKm: guessRadiusKm(query, density, (query.limit * ROOM) / share) }
   }
+  if (query.shipped) return { kind: 'circle' }
   const byDay = planByDay(query, candidates, outlook)
   if (byDay) return byDay
   const categories = categoriesOf(query, density)

@@ -35,10 +35,10 @@ const capped = (code: number, count: number): FacetCount => ({
 })
 
 function facetsSql(query: SearchQuery): string {
-  const { where } = classSql(query)
+  const { index, where } = classSql(query)
   const ranges = circleCover({ centre: query.origin, radiusKm: query.radiusKm })
   const tests = [...where, ...circleSql(query, ranges, query.radiusKm), ...wishSql(query)]
-  return `SELECT category,species,COUNT(*) FROM listing_search FORCE INDEX (PRIMARY) WHERE ${tests.join(' AND ')} GROUP BY category,species`
+  return `SELECT category,species,COUNT(*) FROM listing_search FORCE INDEX (${index}) WHERE ${tests.join(' AND ')} GROUP BY category,species`
 }
 
 async function tally(query: SearchQuery): Promise<Tally[]> {

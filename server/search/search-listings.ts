@@ -4,6 +4,7 @@ import { findInCircle, findOutwards } from '@/server/search/find-in-circle'
 import type { FoundRow } from '@/server/search/found-row'
 import type { ListingSearch } from '@/server/search/listing-search'
 import { findPins } from '@/server/search/map-pins'
+import { nearLanes } from '@/server/search/near-lanes'
 import { OverviewKeeper } from '@/server/search/overview-keeper'
 import type { Overview } from '@/server/search/overview-store'
 import { planSearch, type Outlook, type SearchPlan } from '@/server/search/plan-search'
@@ -83,7 +84,8 @@ export function openListingSearch(): ListingSearch & { refresh: () => Promise<vo
   const selectivity = new Selectivity()
   const facets = new FacetCounter()
 
-  async function search(query: SearchQuery): Promise<SearchPage> {
+  async function search(asked: SearchQuery): Promise<SearchPage> {
+    const query = nearLanes(asked)
     const overview = await keeper.current()
     const outlook = { overview, selectivity }
     const found = await follow(planSearch(query, outlook), query, overview)
@@ -93,7 +95,7 @@ export function openListingSearch(): ListingSearch & { refresh: () => Promise<vo
 
   return {
     search,
-    facets: (query) => facets.count(query),
+    facets: (asked) => facets.count(nearLanes(asked)),
     pins: findPins,
     refresh: async () => {
       await keeper.count()

@@ -14,7 +14,7 @@ const ONE_DAY_SHARE = 0.2
 const PICKUP_SHARE = 0.7
 const SHIP_SHARE = 0.35
 const EITHER_SHARE = 0.8
-const SHIPPED_SHARE = 0.15
+const SHIPPED_SHARE = 0.02
 /** Weight of a new observation against what was learnt before. */
 const LEARNING_RATE = 0.1
 const MOST_REMEMBERED = 512

@@ -25,6 +25,9 @@ export function laneOf({ origin, animals, packing }: LaneParts): number {
   return 1 + (origin * CLASSES + code) * PACKINGS + packingClasses[packing].code
 }
 
+/** Band that a lane is shipped from: the inverse of `laneOf`. -1: `NO_LANE`. */
+export const originOfLane = (lane: number): number => Math.floor((lane - 1) / (CLASSES * PACKINGS))
+
 /** Class of an animal for the season. null: an animal we hold no class for. */
 export function animalClassOf(species: SpeciesId): AnimalClassId | null {
   return animalClassIds.find((id) => animalClasses[id].species.some((member) => member === species)) ?? null

@@ -1,0 +1,1 @@
+CREATE INDEX `k_lane` ON `listing_search` (`lane`,`hil`,`category`,`species`,`x`,`y`,`z`,`qty`,`min_qty`,`price1`,`from2`,`price2`,`from3`,`price3`,`from4`,`price4`,`more_tiers`,`size_lo_mm`,`size_hi_mm`,`next_day`,`last_day`,`open_days`,`pickup`,`ship_states`,`hidden_states`,`rating_rank`);
