@@ -15,11 +15,14 @@ const everyWish: Omit<SearchQuery, 'sort'> = {
   count: 20,
   days: { from: TODAY, until: TODAY + 20 },
   mostCents: 300,
-  handover: { pickup: true, lanes: [1, 2, 3] },
-  shipped: { lanes: Array.from({ length: 257 }, (_, at) => 2 * at + 1), state: 'OH' },
+  handover: { pickup: true, lanes: Array.from({ length: 257 }, (_, at) => 2 * at + 1) },
   buyerState: 'OH',
   limit: 24,
 }
+const shippedBy = (lanes: number): SearchQuery['shipped'] => ({
+  lanes: Array.from({ length: lanes }, (_, at) => 24 * at + 10),
+  state: 'OH',
+})
 const sorts: SearchSort[] = ['nearest', 'cheapest', 'soonest', 'best-rated']
 const foot = { categoryCode: 1, smallPrice: 0, listingId: 0 }
 
@@ -42,6 +45,13 @@ function expectations(): Expected[] {
       sql: circlePageSql({ ...anySpecies, sort }, everyWish.radiusKm),
       plan: { key: 'PRIMARY', access: 'range' },
     })),
+    ...sorts.flatMap((sort) =>
+      [3, 40, 257].map((lanes) => ({
+        name: `circle by ${lanes} lanes, ${sort}`,
+        sql: circlePageSql({ ...everyWish, sort, shipped: shippedBy(lanes) }, everyWish.radiusKm),
+        plan: { key: 'k_lane', access: 'range', covering: true },
+      })),
+    ),
     {
       name: 'walk by price',
       sql: priceStepSql({ ...everyWish, sort: 'cheapest' }, foot, { rows: 32 }),

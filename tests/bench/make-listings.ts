@@ -1,23 +1,10 @@
 import { cellAt, cellCentre, type CellPoint } from '@/shared/domain/geo/location-cell'
-import { stateBit, usStates } from '@/shared/domain/rules/state-bits'
+import { stateBit } from '@/shared/domain/rules/state-bits'
 import { chances, weighted, type Chances } from '@/tests/bench/chances'
+import { cities } from '@/tests/bench/cities'
 import { MadeListings } from '@/tests/bench/made-listings'
-import places from '@/tests/bench/us-cities.json'
+import { makeShipping } from '@/tests/bench/make-shipping'
 import { UNRATED_RANK } from '@/server/search/search-row'
-
-export interface City {
-  name: string
-  state: string
-  place: CellPoint
-  population: number
-}
-
-export const cities: readonly City[] = places.cities.map(([name, state, lat, lng, population]) => ({
-  name: String(name),
-  state: String(state),
-  place: { lat: Number(lat), lng: Number(lng) },
-  population: Number(population),
-}))
 
 /** Invented sizes of the trade: how many listings fall to a category, and how many species share them by Zipf. */
 const kinds = [
@@ -28,7 +15,6 @@ const kinds = [
 ] as const
 
 export const SPECIES_CODES = Array.from({ length: 66 }, (_, at) => at + 1)
-export const LANES = 480
 /** The day the questions are asked on, in days since 2020-01-01. */
 export const TODAY = 2526
 
@@ -90,15 +76,6 @@ function makeDays(made: MadeListings, at: number, chance: Chances): void {
   made.openAfter[at] = open >>> 0
 }
 
-/** Two states in three, others for each lane; nothing is drawn for it, so that the rest stays as it was. */
-function statesShippedTo(lane: number): bigint {
-  if (lane === 0) return 0n
-  return usStates.reduce(
-    (mask, state, at) => ((at + lane) % 3 === 0 ? mask : mask | (stateBit(state) ?? 0n)),
-    0n,
-  )
-}
-
 /** Fills in everything about one listing but its seller; also used to change it later. */
 export function makeFacts(made: MadeListings, at: number, chance: Chances): void {
   makePrices(made, at, chance)
@@ -107,11 +84,9 @@ export function makeFacts(made: MadeListings, at: number, chance: Chances): void
   const shortest = Math.round(15 * chance.lognormal(0.7))
   made.sizeLo[at] = sized ? shortest : 0
   made.sizeHi[at] = sized ? Math.min(60_000, shortest + chance.between(6, 50)) : 65_535
-  made.pickup[at] = chance.yes(0.85) ? 1 : 0
-  made.lane[at] = made.pickup[at] === 0 || chance.yes(0.55) ? chance.between(1, LANES) : 0
-  made.shipStates[at] = statesShippedTo(made.lane[at] ?? 0)
   const barred = chance.yes(0.4) ? [chance.pick(cities).state, chance.pick(cities).state] : []
   made.hiddenStates[at] = barred.reduce((mask, state) => mask | (stateBit(state) ?? 0n), 0n)
+  makeShipping(made, at, chance)
 }
 
 /** Invented listings of invented sellers around real towns; the same for the same seed. */

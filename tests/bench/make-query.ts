@@ -1,7 +1,9 @@
 import { cellAt, cellCentre } from '@/shared/domain/geo/location-cell'
 import { weighted, type Chances } from '@/tests/bench/chances'
-import { cities, LANES, SPECIES_CODES, TODAY } from '@/tests/bench/make-listings'
+import { cities } from '@/tests/bench/cities'
+import { SPECIES_CODES, TODAY } from '@/tests/bench/make-listings'
 import type { MadeListings } from '@/tests/bench/made-listings'
+import { safeLanesTo } from '@/server/search/safe-lanes-to'
 import type { SearchQuery, SearchSort } from '@/server/search/search-query'
 
 export const PAGE = 24
@@ -38,10 +40,14 @@ export function buyers(chance: Chances): () => Pick<SearchQuery, 'origin' | 'buy
   }
 }
 
-/** Lanes that are safe this week: runs of neighbours, as bands of climate are. */
-function safeLanes(chance: Chances): number[] {
-  const from = chance.between(1, LANES - 200)
-  return Array.from({ length: LANES }, (_, at) => at + 1).filter((lane) => lane >= from && lane < from + 190)
+const anyWeek = (chance: Chances) => chance.between(1, 52)
+
+/** The season filter as the product reads it: to the buyer, in some week of the year. */
+export function shippedTo(
+  { origin, buyerState }: Pick<SearchQuery, 'origin' | 'buyerState'>,
+  chance: Chances,
+): NonNullable<SearchQuery['shipped']> {
+  return { lanes: safeLanesTo(origin, anyWeek(chance)), state: buyerState ?? 'OH' }
 }
 
 interface Counted {
@@ -70,12 +76,12 @@ export function shapedQueries(shape: Shape, made: MadeListings, chance: Chances)
   const buyer = buyers(chance)
   const { speciesOf, rare } = countSpecies(made)
   const nearest = { sort: 'nearest' as SearchSort, limit: PAGE }
-  const either = () => ({ pickup: true, lanes: safeLanes(chance) })
   const make: Record<Shape, () => SearchQuery> = {
     A: () => {
       const categoryCode = chance.pick([1, 1, 2, 4])
+      const from = buyer()
       return {
-        ...buyer(),
+        ...from,
         ...nearest,
         categoryCode,
         // Buyers want what is offered most: the square leans towards the first of the list.
@@ -83,19 +89,22 @@ export function shapedQueries(shape: Shape, made: MadeListings, chance: Chances)
         radiusKm: chance.pick([50, 100, 200]),
         count: chance.pick([1, 10, 25, 50]),
         mostCents: categoryCode === 1 ? 160 : 1300,
-        handover: either(),
+        handover: { pickup: true, lanes: safeLanesTo(from.origin, anyWeek(chance)) },
       }
     },
     B: () => ({ ...buyer(), ...nearest, categoryCode: chance.pick([1, 2, 3, 4]), radiusKm: 500 }),
-    C: () => ({
-      ...buyer(),
-      ...nearest,
-      speciesCode: chance.pick(rare.length > 0 ? rare : SPECIES_CODES),
-      radiusKm: 500,
-      count: 50,
-      mostCents: 900,
-      handover: { pickup: false, lanes: safeLanes(chance) },
-    }),
+    C: () => {
+      const from = buyer()
+      return {
+        ...from,
+        ...nearest,
+        speciesCode: chance.pick(rare.length > 0 ? rare : SPECIES_CODES),
+        radiusKm: 500,
+        count: 50,
+        mostCents: 900,
+        handover: { pickup: false, lanes: safeLanesTo(from.origin, anyWeek(chance)) },
+      }
+    },
     D: () => ({ ...buyer(), ...nearest, radiusKm: 25, handover: { pickup: true, lanes: [] } }),
     E: () => ({
       ...buyer(),
@@ -125,7 +134,7 @@ export function shapedQueries(shape: Shape, made: MadeListings, chance: Chances)
     }),
     H: () => {
       const { handover: _either, ...asked } = make.A()
-      return { ...asked, shipped: { lanes: safeLanes(chance), state: asked.buyerState ?? 'OH' } }
+      return { ...asked, shipped: shippedTo(asked, chance) }
     },
   }
   return make[shape]
@@ -156,12 +165,9 @@ export function anyQuery(made: MadeListings, chance: Chances): () => SearchQuery
       mostCents: maybe(0.3, () => chance.pick([50, 100, 180, 900])),
       handover: maybe(0.4, () => ({
         pickup: chance.yes(0.7),
-        lanes: chance.yes(0.5) ? safeLanes(chance) : [],
+        lanes: chance.yes(0.5) ? safeLanesTo(origin, anyWeek(chance)) : [],
       })),
-      shipped: maybe(0.12, () => ({
-        lanes: chance.yes(0.9) ? safeLanes(chance) : [],
-        state: buyerState ?? 'OH',
-      })),
+      shipped: maybe(0.12, () => shippedTo({ origin, buyerState }, chance)),
       buyerState: maybe(0.6, () => buyerState ?? 'OH'),
       sort: chance.pick(['nearest', 'cheapest', 'soonest', 'best-rated'] as const),
       limit: chance.pick([1, 5, 24, 24, 50]),

@@ -8,6 +8,7 @@ export interface BenchFlags {
   queries: number
   seed: number
   plantFault: boolean
+  plantSlowness: boolean
   /** Names of those asked beside ours. */
   peers: string[]
 }
@@ -26,6 +27,7 @@ export function readFlags(args: string[]): BenchFlags {
       queries: { type: 'string', default: '100' },
       seed: { type: 'string', default: '42' },
       'plant-fault': { type: 'boolean', default: false },
+      'plant-slowness': { type: 'boolean', default: false },
       peers: { type: 'string', default: PEERS.join(',') },
     },
   })
@@ -48,6 +50,7 @@ export function readFlags(args: string[]): BenchFlags {
     queries: number('queries'),
     seed: number('seed'),
     plantFault: values['plant-fault'],
+    plantSlowness: values['plant-slowness'],
     peers: values.peers.split(',').filter((name) => name !== 'none'),
   }
 }

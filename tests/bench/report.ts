@@ -3,6 +3,7 @@ import { mkdirSync, writeFileSync } from 'node:fs'
 import { availableParallelism, loadavg } from 'node:os'
 import path from 'node:path'
 
+import type { PairTimes, SeasonResult } from '@/tests/bench/measure-season'
 import type { BenchFlags } from '@/tests/bench/read-flags'
 import type { ShapeResult } from '@/tests/bench/run-shape'
 import type { Times } from '@/tests/bench/times'
@@ -18,6 +19,8 @@ export interface BenchReport {
   loadAverage: number
   commit: string
   results: ShapeResult[]
+  /** The same questions with and without the season filter. */
+  season: SeasonResult
   extras: Record<string, Times>
   skipped: string[]
   faults: string[]
@@ -33,7 +36,7 @@ function commit(): string {
 
 /** Everything needed to judge a figure later: ratios are only ever taken inside one such run. */
 export function makeReport(
-  run: Pick<BenchReport, 'flags' | 'mariadb' | 'results' | 'extras' | 'skipped' | 'faults'>,
+  run: Pick<BenchReport, 'flags' | 'mariadb' | 'results' | 'season' | 'extras' | 'skipped' | 'faults'>,
 ): BenchReport {
   return {
     ...run,
@@ -47,7 +50,14 @@ export function makeReport(
 
 const ms = (value: number) => value.toFixed(2).padStart(9)
 
-export function printReport({ results, extras, flags, loadAverage, cores }: BenchReport): void {
+function printPairs(name: string, { plain, shipped, ratio, meanHits }: PairTimes): void {
+  const hits = `hits ${meanHits.plain.toFixed(1)} / ${meanHits.shipped.toFixed(1)}`
+  console.log(
+    `  ${name.padEnd(10)}${ms(plain.p50Ms)} / ${ms(plain.p95Ms)} without ${ms(shipped.p50Ms)} / ${ms(shipped.p95Ms)} with  (${plain.samples})  ratio ${ratio.toFixed(3)}  ${hits}`,
+  )
+}
+
+export function printReport({ results, season, extras, flags, loadAverage, cores }: BenchReport): void {
   console.log(
     `${flags.listings} listings, seed ${flags.seed}, ${cores} cores, load ${loadAverage.toFixed(1)}`,
   )
@@ -64,6 +74,9 @@ export function printReport({ results, extras, flags, loadAverage, cores }: Benc
       )
     }
   }
+  console.log('\nwith and without the season filter, in pairs')
+  printPairs('all', season.all)
+  for (const [kind, times] of Object.entries(season.kinds)) printPairs(kind, times)
   console.log('')
   for (const [name, times] of Object.entries(extras)) {
     console.log(`  ${name.padEnd(32)}${ms(times.p50Ms)} / ${ms(times.p95Ms)}  (${times.samples})`)

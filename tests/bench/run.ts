@@ -6,19 +6,22 @@ import { openBenchServer } from '@/tests/bench/bench-server'
 import { pagingFaults } from '@/tests/bench/check-paging'
 import { planFaults } from '@/tests/bench/check-plans'
 import { measureExtras } from '@/tests/bench/measure-extras'
+import { measureSeason, slownessFaults } from '@/tests/bench/measure-season'
 import { loadListings } from '@/tests/bench/load-listings'
 import { makeListings } from '@/tests/bench/make-listings'
 import type { OpenPeer, Peer, PeerGround } from '@/tests/bench/peers/peer'
 import { openPlainScan } from '@/tests/bench/peers/plain-scan'
 import { openSelectOne } from '@/tests/bench/peers/select-one'
 import { openSpatialIndex } from '@/tests/bench/peers/spatial-index'
-import { plantFault } from '@/tests/bench/plant-fault'
+import { plantFault, plantSlowness } from '@/tests/bench/plant-fault'
 import { readFlags, type BenchFlags } from '@/tests/bench/read-flags'
 import { makeReport, printReport, saveReport, type BenchReport } from '@/tests/bench/report'
 import { rowFaults } from '@/tests/bench/row-budgets'
 import { runShape, type ShapeResult } from '@/tests/bench/run-shape'
 
 const PAGING_WALKS = 60
+/** Of each question of the shapes, so many pairs: a ratio of medians wants more than a median. */
+const PAIRS_A_QUERY = 6
 
 /** PostGIS joins here: one more file in peers/ that says why it is skipped where it is not installed. */
 const OPENERS: Record<string, OpenPeer> = {
@@ -64,6 +67,12 @@ async function bench(flags: BenchFlags): Promise<BenchReport> {
       results.push(await runShape(shape, { made, search, peers }, flags))
       say(`shape ${shape}`)
     }
+    const season = await measureSeason(made, flags.plantSlowness ? plantSlowness(search) : search, {
+      pairs: flags.queries * PAIRS_A_QUERY,
+      seed: flags.seed,
+    })
+    say('with and without the season filter')
+    faults.push(...season.faults, ...slownessFaults(flags.listings, season))
     faults.push(...results.flatMap((result) => result.faults), ...rowFaults(flags.listings, results))
     faults.push(...(await pagingFaults(made, search, PAGING_WALKS)))
     for (const peer of peers) await peer.close()
@@ -75,6 +84,7 @@ async function bench(flags: BenchFlags): Promise<BenchReport> {
       flags,
       mariadb: String(version[0]?.mariadb),
       results,
+      season,
       extras: extras.times,
       skipped,
       faults,

@@ -18,6 +18,7 @@ import { chances } from '@/tests/bench/chances'
 import { pageFault } from '@/tests/bench/compare-page'
 import { anyQuery } from '@/tests/bench/make-query'
 import { makeFacts, makeListings } from '@/tests/bench/make-listings'
+import { makeShipping } from '@/tests/bench/make-shipping'
 import { freshDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const LISTINGS = 4_000
@@ -62,6 +63,7 @@ describe('search', () => {
       else if (chance.yes(0.3)) {
         const other = chance.between(0, LISTINGS - 1)
         made.setPlace(at, made.row(other).place)
+        makeShipping(made, at, chance)
       } else makeFacts(made, at, chance)
     }
     await inTransaction(async (tx) => {

@@ -1,4 +1,4 @@
-import type { RowDataPacket } from 'mysql2/promise'
+import mysql, { type RowDataPacket } from 'mysql2/promise'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 
 import { connect, disconnect, rawPool } from '@/db/client'
@@ -9,6 +9,8 @@ import { chances } from '@/tests/bench/chances'
 import { planFaults } from '@/tests/bench/check-plans'
 import { shapedQueries, type Shape } from '@/tests/bench/make-query'
 import { makeListings } from '@/tests/bench/make-listings'
+import { measureSeason, slownessFaults } from '@/tests/bench/measure-season'
+import { plantLanes, plantSlowness } from '@/tests/bench/plant-fault'
 import { readPlan } from '@/tests/bench/read-plan'
 import { rowsRead } from '@/tests/bench/rows-read'
 import { safeLanes } from '@/shared/domain/season/season-at'
@@ -75,5 +77,24 @@ describe('the plans of search', () => {
     for (let asked = 0; asked < 40; asked++) rows += (await rowsRead(() => search.search(ask()))).rows
     expect(rows / 40).toBeLessThan(budget)
     expect(rows / 40).toBeGreaterThan(budget / 4)
+  })
+
+  it('are measured with and without the season filter, and what is slow or wrong with it is noticed', async () => {
+    const search = openListingSearch()
+    await search.refresh()
+    const asked = { pairs: 40, seed: 3 }
+    const fair = await measureSeason(made, search, asked)
+    expect(fair.faults).toEqual([])
+    expect(fair.all.meanHits.shipped).toBeGreaterThan(1)
+    expect(slownessFaults(99_999, { all: { ...fair.all, ratio: 9 } })).toEqual([])
+    const slow = await measureSeason(made, plantSlowness(search), asked)
+    expect(slownessFaults(100_000, slow)).toHaveLength(1)
+    // From here on the table is wrong: this test comes last.
+    const owner = await mysql.createConnection({ uri: database.url })
+    await plantLanes(owner)
+    await owner.end()
+    const wrong = await measureSeason(made, search, asked)
+    expect(wrong.faults.length).toBeGreaterThan(0)
+    expect(wrong.faults.every((fault) => fault.includes('shipped'))).toBe(true)
   })
 })

@@ -11,7 +11,7 @@ import { buyerCellAt, cellAt, cellCentre } from '@/shared/domain/geo/location-ce
 import { taxa } from '@/shared/domain/species/taxa.facts'
 import { animalClassOf, packingClassIds } from '@/shared/domain/season/season-lane'
 import { chances } from '@/tests/bench/chances'
-import { cities } from '@/tests/bench/make-listings'
+import { cities } from '@/tests/bench/cities'
 import { disagreements, readStrip, type Told } from '@/tests/support/season-tellers'
 
 const TRIPLES = 5_000
