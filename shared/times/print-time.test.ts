@@ -12,6 +12,12 @@ describe('printing the time of a place', () => {
     expect(printSlot(slot)).toBe('Sat, Jan 16, 9:00 AM to 10:00 AM EST')
   })
 
+  it('names the time of both ends when the clocks change in between', () => {
+    const autumn = { startsAt: '2027-11-07T04:30:00Z', endsAt: '2027-11-07T07:30:00Z' }
+    expect(printSlot({ ...autumn, zone: 'America/New_York' })).toBe('Sun, Nov 7, 12:30 AM EDT to 2:30 AM EST')
+    expect(printSlot({ ...autumn, zone: 'America/Phoenix' })).toBe('Sat, Nov 6, 9:30 PM to 12:30 AM MST')
+  })
+
   it('names the two hours of an autumn night apart', () => {
     expect(printMoment('2027-11-07T05:30:00Z', 'America/New_York')).toBe('Sun, Nov 7, 1:30 AM EDT')
     expect(printMoment('2027-11-07T06:30:00Z', 'America/New_York')).toBe('Sun, Nov 7, 1:30 AM EST')

@@ -29,9 +29,17 @@ function bareClock(at: string, zone: string): string {
   )
 }
 
-/** A pickup window in the time of its place: "Sat, Jan 16, 9:00 AM to 10:00 AM EST". */
+const zoneNameOf = (clock: string) => clock.slice(clock.lastIndexOf(' ') + 1)
+
+/**
+ * A pickup window in the time of its place: "Sat, Jan 16, 9:00 AM to 10:00 AM EST". When the clocks change in between,
+ * both ends name theirs: "12:30 AM EDT to 2:30 AM EST".
+ */
 export function printSlot(slot: { startsAt: string; endsAt: string; zone: string }): string {
-  return `${printDay(slot.startsAt, slot.zone)}, ${bareClock(slot.startsAt, slot.zone)} to ${printClock(slot.endsAt, slot.zone)}`
+  const { startsAt, endsAt, zone } = slot
+  const [from, until] = [printClock(startsAt, zone), printClock(endsAt, zone)]
+  const isSame = zoneNameOf(from) === zoneNameOf(until)
+  return `${printDay(startsAt, zone)}, ${isSame ? bareClock(startsAt, zone) : from} to ${until}`
 }
 
 /** An instant in words: "Sat, Jan 16, 9:00 AM EST". */
