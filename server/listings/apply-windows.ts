@@ -33,6 +33,7 @@ export async function applyWindows({ listingId, body, zone, at }: WindowsWanted,
   )
   const added = plan.add.map((window) => ({ publicId: newPublicId(), listingId, ...window, zone, placeKind }))
   await insertWindows(added, tx)
-  for (const { id, capacity } of plan.change) await setWindow(id, { capacity, placeKind, zone, closed: 0 }, tx)
+  for (const { id, capacity } of plan.change)
+    await setWindow(id, { capacity, placeKind, zone, closed: 0 }, tx)
   for (const id of plan.close) await setWindow(id, { closed: 1 }, tx)
 }
