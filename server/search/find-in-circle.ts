@@ -5,8 +5,9 @@ import { categoryCodes } from '@/server/search/category-codes'
 import { readSearchRows } from '@/server/search/read-search-store'
 import { readFoundRows, type FoundRow } from '@/server/search/found-row'
 import { afterSql, orderSql, selectedSql } from '@/server/search/search-order'
+import { WIDE_KM } from '@/server/search/near-lanes'
 import type { SearchQuery } from '@/server/search/search-query'
-import { circleSql, whole, wishSql } from '@/server/search/search-sql'
+import { circleSql, insideSql, whole, wishSql } from '@/server/search/search-sql'
 
 /** Ranges of the index by lane: each costs the planner of the database some microseconds, each square saved some rows. */
 const LANE_RANGES = 64
@@ -39,12 +40,15 @@ export function classSql({ categoryCode, speciesCode, shipped }: SearchQuery): {
 /** Text of one page inside a circle of the query's centre; for `nearest`, without what earlier pages hold. */
 export function circlePageSql(query: SearchQuery, radiusKm: number, also: readonly string[] = []): string {
   const beyondKm = query.sort === 'nearest' && query.after ? kmOfSquaredChord(query.after.dm2) : 0
-  const ranges = coverOf(query, { radiusKm, beyondKm })
+  // Most of the country and a hundred lanes: ranges of place would cost more than they save.
+  const isByLane = query.shipped !== undefined && radiusKm > WIDE_KM
+  const place = isByLane
+    ? [insideSql(query, radiusKm)]
+    : circleSql(query, coverOf(query, { radiusKm, beyondKm }), radiusKm)
   const { index, where } = classSql(query)
   const tests = [
     ...where,
-    ...circleSql(query, ranges, radiusKm),
-    ...wishSql(query),
+    ...(isByLane ? [...wishSql(query), ...place] : [...place, ...wishSql(query)]),
     ...also,
     ...afterSql(query),
   ]

@@ -3,7 +3,7 @@ import { seasonBandsWithin } from '@/shared/domain/season/season-bands-within'
 import type { SearchQuery } from '@/server/search/search-query'
 
 /** Beyond this a circle holds most bands there are. */
-const WIDE_KM = 1_000
+export const WIDE_KM = 1_000
 
 /**
  * The same question with those lanes only that begin inside its circle: a listing's lane begins in the band of its own
