@@ -9,6 +9,7 @@ import { askSurvival } from '@/server/ratings/ask-survival'
 import { runEffects } from '@/server/outbox/run-effects'
 import { refreshSiteMean } from '@/server/search/refresh-site-mean'
 import { checkDueWays } from '@/server/weather/check-due-ways'
+import { keepFederalDays } from '@/server/shipping/no-ship-days'
 
 const SECOND = 1000
 const HOUR = 3600 * SECOND
@@ -24,6 +25,7 @@ export function jobsOf(): Job[] {
     { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
     { name: 'survival-questions', everyMs: 60 * SECOND, run: askSurvival },
     { name: 'site-mean', everyMs: HOUR, run: refreshSiteMean },
+    { name: 'federal-days', everyMs: DAY, run: keepFederalDays },
     { name: 'quiet-payments', everyMs: 10 * SECOND, run: refreshQuietPayments },
     {
       name: 'forget',

@@ -23,6 +23,8 @@ import { shortOf } from '@/server/orders/short-of'
 import { noteStock } from '@/server/orders/stock-store'
 import type { FoundPlace } from '@/server/places/find-place'
 import { projectListings } from '@/server/search/project-listings'
+import type { ReservedShipment } from '@/server/shipping/plan-reserved'
+import { writeReserved } from '@/server/shipping/write-reserved'
 import { Problem } from '@/shared/api/problem'
 import type { GateVerdict } from '@/shared/contracts/rules'
 import { quoteOrder } from '@/shared/domain/money/quote-order'
@@ -37,16 +39,25 @@ interface Placing extends CheckedReservation {
   asked: ReserveAsked
   place: FoundPlace
   verdict: GateVerdict
+  /** null: it is collected. */
+  shipped: ReservedShipment | null
   at: Date
 }
 
-type Slot = NonNullable<Awaited<ReturnType<typeof findWindow>>>
+interface Slot {
+  windowId: number | null
+  slotStartsAt: Date | null
+  slotEndsAt: Date | null
+  zone: string
+}
 
-/** One place in the window asked for; where windows are published, one must be chosen. */
-async function takeSlot(tx: Tx, placing: Placing): Promise<Slot | null> {
-  const { listing, asked, at } = placing
+/** The ship day, or one place in the window asked for; where windows are published, one must be chosen. */
+async function takeSlot(tx: Tx, placing: Placing): Promise<Slot> {
+  const { listing, asked, at, shipped, seller } = placing
+  if (shipped) return { windowId: null, ...shipped.slot, zone: seller.zone }
   if (!asked.windowId) {
-    if (!(await hasOpenWindow(tx, listing.id, at))) return null
+    if (!(await hasOpenWindow(tx, listing.id, at)))
+      return { windowId: null, slotStartsAt: null, slotEndsAt: null, zone: seller.zone }
     throw new Problem('fields-invalid', undefined, {
       errors: [{ detail: 'Choose a pickup time.', pointer: '#/windowId' }],
     })
@@ -58,7 +69,8 @@ async function takeSlot(tx: Tx, placing: Placing): Promise<Slot | null> {
   if (!(await holdSlot(tx, window.id))) {
     throw new Problem('slot-full', 'Somebody took the last place in that pickup time. Choose another.')
   }
-  return window
+  const { id, startsAt, endsAt, zone } = window
+  return { windowId: id, slotStartsAt: startsAt, slotEndsAt: endsAt, zone }
 }
 
 /**
@@ -86,14 +98,14 @@ async function takeFish(tx: Tx, placing: Placing): Promise<void> {
   if (!held) throw shortOf(await readFree(listing.id, tx))
 }
 
-function priced(placing: Placing, slot: Slot | null) {
-  const { terms, asked, at } = placing
+function priced(placing: Placing, slot: Slot) {
+  const { terms, asked, at, shipped } = placing
   const { feeBp } = orderSettings()
   const quote = quoteOrder({
     tiers: terms.tiers,
     quantity: asked.quantity,
-    boxCents: 0,
-    freightCents: 0,
+    boxCents: shipped?.charges.boxCents ?? 0,
+    freightCents: shipped?.charges.freightCents ?? 0,
     taxCents: 0,
     depositBp: terms.depositPct * 100,
     feeBp,
@@ -103,11 +115,13 @@ function priced(placing: Placing, slot: Slot | null) {
     mayPayInFull({
       totalCents: quote.totalCents,
       nowMs: at.getTime(),
-      slotStartMs: slot?.startsAt.getTime() ?? null,
+      slotStartMs: slot.slotStartsAt?.getTime() ?? null,
     })
   const firstChargeCents = isFull ? quote.totalCents : quote.depositCents
   return {
     goodsCents: quote.goodsCents,
+    boxCents: quote.boxCents,
+    freightCents: quote.freightCents,
     taxCents: quote.taxCents,
     totalCents: quote.totalCents,
     depositCents: quote.depositCents,
@@ -120,7 +134,7 @@ function priced(placing: Placing, slot: Slot | null) {
 }
 
 async function write(tx: Tx, placing: Placing): Promise<number> {
-  const { listing, seller, caller, asked, place, verdict, terms, versionId, at } = placing
+  const { listing, seller, caller, asked, place, verdict, terms, versionId, shipped, at } = placing
   await takeFish(tx, placing)
   const slot = await takeSlot(tx, placing)
   const money = priced(placing, slot)
@@ -132,14 +146,11 @@ async function write(tx: Tx, placing: Placing): Promise<number> {
     listingVersionId: versionId,
     state: 'reserved',
     quantity: asked.quantity,
-    handOver: 'pickup',
-    balanceDue: terms.balanceDue,
+    handOver: shipped ? 'ship' : 'pickup',
+    balanceDue: shipped ? 'before' : terms.balanceDue,
     needsAcceptance: terms.accept === 'ask',
     ...money,
-    windowId: slot?.id ?? null,
-    slotStartsAt: slot?.startsAt ?? null,
-    slotEndsAt: slot?.endsAt ?? null,
-    zone: slot?.zone ?? seller.zone,
+    ...slot,
     buyerState: place.state,
     buyerCell: place.cellId,
     handOverCode: String(randomInt(0, 1_000_000)).padStart(6, '0'),
@@ -148,6 +159,7 @@ async function write(tx: Tx, placing: Placing): Promise<number> {
     createdAt: at,
     updatedAt: at,
   })
+  if (shipped) await writeReserved(tx, shipped, { orderId, place, at })
   const by = caller.memberId
   const { quantity } = asked
   await noteStock(

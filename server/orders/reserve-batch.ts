@@ -7,6 +7,7 @@ import { findOrderByCommand, readOrderById } from '@/server/orders/order-store'
 import { placeOrder } from '@/server/orders/place-order'
 import { showAgain } from '@/server/orders/show-order'
 import { judgeListing } from '@/server/rules/judge-listing'
+import { planReserved } from '@/server/shipping/plan-reserved'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
@@ -15,8 +16,8 @@ import type { ShownOrder } from '@/shared/contracts/orders'
 export type ReserveAsked = ParsedBody<Endpoints['reserveBatch']> & { commandId: string }
 
 /**
- * E01: a member holds animals and a place in a pickup window for 15 minutes. Load, check, then in one transaction
- * take the fish and the slot and write the order; the payment page is opened after the commit. When the processor
+ * E01: a member holds animals and a place in a pickup window, or boxes on a ship day, for 15 minutes. Load, check, then
+ * in one transaction take the fish and the slot and write the order; the payment page is opened after the commit. When the processor
  * does not answer, the hold stands and the page can be opened again from the order.
  */
 export async function reserveBatch(
@@ -38,7 +39,8 @@ export async function reserveBatch(
     viewer: 'buyer',
   })
   checkGate(verdict, asked.ticked)
-  const orderId = await placeOrder({ caller, asked, place, verdict, at: now(), ...checked })
+  const shipped = await planReserved({ asked, place, ...checked })
+  const orderId = await placeOrder({ caller, asked, place, verdict, shipped, at: now(), ...checked })
   await openPayment(orderId, 'deposit')
   const order = await readOrderById(orderId)
   if (!order) throw new Problem('not-found')

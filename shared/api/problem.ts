@@ -30,6 +30,8 @@ export const problems = {
   'rule-unknown': { status: 409, title: 'Nobody has checked this species here for us' },
   'ticks-missing': { status: 422, title: 'Please read and tick each statement' },
   'trip-unsafe': { status: 409, title: 'The animals would not survive this trip' },
+  'not-shipped': { status: 409, title: 'These animals are not shipped there' },
+  'dispatch-refused': { status: 409, title: 'This box cannot leave yet' },
   'holds-too-many': { status: 409, title: 'You already hold unpaid orders' },
   'deposit-expired': { status: 409, title: 'The 15 minutes are over' },
   'order-moved': { status: 409, title: 'The order has moved on' },

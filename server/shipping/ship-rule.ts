@@ -1,0 +1,37 @@
+import { now } from '@/server/clock'
+import { dayOf } from '@/server/listings/day-of'
+import { noShipDaysFrom } from '@/server/shipping/no-ship-days'
+import type { BatchShipping } from '@/shared/contracts/fish-batch'
+import type { ListingBody } from '@/shared/contracts/listings'
+import { dateAfter } from '@/shared/domain/calendar/day-number'
+import { packingClasses } from '@/shared/domain/season/season-classes.facts'
+import type { ShipDayRule } from '@/shared/domain/shipping/ship-days'
+import type { SourceKey } from '@/shared/sources'
+
+/**
+ * Days between choosing a ship day and the day itself, so that fish can be kept without food for 24 to 48 hours before
+ * they travel. Source below.
+ */
+const DAYS_BEFORE = 2
+export const fastingSource: SourceKey = 'mx392'
+
+/** How a batch is shipped; a batch that is collected only is an error of ours by then. */
+export function shippingOf({ shipping }: Pick<ListingBody, 'shipping'>): BatchShipping {
+  if (!shipping) throw new Error('this batch is not shipped')
+  return shipping
+}
+
+/** The days on which this batch may leave, by the carriers' calendar from a day on. */
+export async function shipRuleOf(terms: ListingBody, fromDay: string): Promise<ShipDayRule> {
+  const { packing, days } = shippingOf(terms)
+  return { days, nights: packingClasses[packing].nights, noShipDays: await noShipDaysFrom(fromDay) }
+}
+
+/** Today by the seller's calendar. */
+export const sellersToday = (zone: string): string => dayOf(now(), zone)
+
+/** The first day that may still be chosen: animals not ready yet do not leave before they are. */
+export function firstShipDay({ readyOn }: Pick<ListingBody, 'readyOn'>, zone: string): string {
+  const soonest = dateAfter(sellersToday(zone), DAYS_BEFORE)
+  return readyOn !== undefined && readyOn > soonest ? readyOn : soonest
+}

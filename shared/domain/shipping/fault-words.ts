@@ -1,0 +1,17 @@
+import type { ShipDayFault } from '@/shared/domain/shipping/ship-days'
+
+/** Why a day is no lawful ship day, in a sentence. */
+export function faultWords({ code, day, why }: ShipDayFault): string {
+  switch (code) {
+    case 'not-a-ship-day':
+      return `${day} is not one of the days on which the seller ships; no box waits over a weekend.`
+    case 'holiday':
+      return `On ${day} carriers do not work: ${why ?? 'a holiday'}.`
+    case 'holiday-on-the-way':
+      return `The box would be on its way on ${day}, when carriers do not work: ${why ?? 'a holiday'}.`
+    case 'arrives-on-holiday':
+      return `The box would arrive on ${day}, when carriers do not deliver: ${why ?? 'a holiday'}.`
+    case 'arrives-on-sunday':
+      return `The box would arrive on ${day}, a Sunday, when carriers do not deliver.`
+  }
+}
