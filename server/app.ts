@@ -27,6 +27,7 @@ import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
 import { sessionRoutes } from '@/server/sessions/session-routes'
 import { shareRoutes } from '@/server/share/share-routes'
+import { shipRoutes } from '@/server/shipping/ship-routes'
 import { tripRoutes } from '@/server/trips/trip-routes'
 import { stripeEvents } from '@/server/stripe-events/stripe-events'
 
@@ -42,7 +43,7 @@ function api(origins: string[]): Router {
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
   router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
-  router.use(listingRoutes(), tripRoutes(), orderRoutes(), weatherRoutes(), calendarRoutes())
+  router.use(listingRoutes(), tripRoutes(), orderRoutes(), weatherRoutes(), calendarRoutes(), shipRoutes())
   router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
   router.use(packingRoutes(), openapiRoutes())
   router.use(unknownPath)

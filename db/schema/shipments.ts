@@ -41,6 +41,8 @@ export const shipment = mysqlTable('shipment', {
   tracking: varchar({ length: 60 }),
   dispatchedAt: instant(),
   arrivedAt: instant(),
+  /** Of a late box: how many the buyer found alive, while a moderator has not decided. */
+  aliveCount: int({ unsigned: true }),
   /** What travelled, as it stood at dispatch. */
   movement: jsonOf<MovementFacts | null>().notNull(),
 })

@@ -12,6 +12,8 @@ const DUPLICATE = 1062
 
 /** Why a charge that came too late, or twice, went straight back. */
 export const STRAY = 'paid-too-late'
+/** The fee falls on goods alone: what goes back of box and freight does not lower it. */
+export const BOX_AND_FREIGHT = 'box-and-freight'
 
 export async function insertPayment(
   tx: Tx,
@@ -119,14 +121,15 @@ export async function finishRefund(
 export async function sumRefunds(
   tx: Tx,
   orderId: number,
-): Promise<{ goodsCents: number; strayCents: number }> {
+): Promise<{ goodsCents: number; otherCents: number }> {
   const rows = await tx
     .select({ amountCents: refund.amountCents, why: refund.why })
     .from(refund)
     .where(and(eq(refund.orderId, orderId), ne(refund.status, 'failed')))
-  const sum = (isStray: boolean) =>
-    rows.filter((row) => (row.why === STRAY) === isStray).reduce((total, row) => total + row.amountCents, 0)
-  return { goodsCents: sum(false), strayCents: sum(true) }
+  const isOther = (why: string) => why === STRAY || why === BOX_AND_FREIGHT
+  const sum = (other: boolean) =>
+    rows.filter((row) => isOther(row.why) === other).reduce((total, row) => total + row.amountCents, 0)
+  return { goodsCents: sum(false), otherCents: sum(true) }
 }
 
 export async function insertTransfer(

@@ -15,7 +15,7 @@ async function splitOf(tx: Tx, order: OrderRow): Promise<Settlement> {
     goodsCents: order.goodsCents,
     taxCents: order.taxCents,
     refundedGoodsCents: refunds.goodsCents,
-    refundedOtherCents: refunds.strayCents,
+    refundedOtherCents: refunds.otherCents,
     feeBp: order.feeBp,
     debtCents: 0,
   })
@@ -28,6 +28,8 @@ export async function settleOrder(tx: Tx, command: EdgeCommand): Promise<OrderRo
   if (!applied) return null
   const { transferCents, feeCents, taxCents } = await splitOf(tx, order)
   await changeOrder(tx, order, { feeCents, updatedAt: at })
+  // Nothing is left to split of an order that was lost whole.
+  if (transferCents + feeCents + taxCents === 0) return order
   await book(tx, {
     orderId: order.id,
     sellerId: order.sellerId,

@@ -21,7 +21,12 @@ import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 type Asked = ParsedBody<Endpoints['cancelOrder']> & { commandId: string }
 
 const byBuyer: Record<string, EdgeId> = { deposit_paid: 'E15', scheduled: 'E24', ready: 'E56' }
-const bySeller: Record<string, EdgeId> = { deposit_paid: 'E16', scheduled: 'E25', ready: 'E55' }
+const bySeller: Record<string, EdgeId> = {
+  deposit_paid: 'E16',
+  scheduled: 'E25',
+  weather_hold: 'E54',
+  ready: 'E55',
+}
 
 /**
  * Inside the free time that was promised at payment a buyer gets all back, even when the seller has the animals ready
@@ -34,7 +39,7 @@ async function settleBuyersCancel(tx: Tx, before: OrderRow, order: OrderRow): Pr
   return isFree ? refundEverything(tx, order, 'buyer-cancelled') : keepDeposit(tx, order, 'buyer-cancelled')
 }
 
-/** E15, E24, E56 by the buyer; E16, E25, E55 by the seller, who says why and never costs the buyer a cent. */
+/** E15, E24, E56 by the buyer; E16, E25, E54, E55 by the seller, who says why and never costs the buyer a cent. */
 export async function cancelOrder(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const seen = await orderSeenBy(caller, orderId)
   if (seen.party === 'staff') throw new Problem('not-allowed', 'Staff stop an order; they do not cancel it.')

@@ -24,7 +24,13 @@ async function takeWindow(tx: Tx, order: OrderRow, windowId: string) {
   if (!(await holdSlot(tx, window.id)))
     throw new Problem('slot-full', 'That pickup time is full. Choose another.')
   if (order.windowId !== null) await freeSlot(tx, order.windowId)
-  return { windowId: window.id, slotStartsAt: window.startsAt, slotEndsAt: window.endsAt, zone: window.zone }
+  return {
+    windowId: window.id,
+    isDayBySilence: false,
+    slotStartsAt: window.startsAt,
+    slotEndsAt: window.endsAt,
+    zone: window.zone,
+  }
 }
 
 /** E14 for an order without a day; E28 moves a ready one back to `scheduled`, once for each side. */

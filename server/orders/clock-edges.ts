@@ -37,10 +37,24 @@ const sellerSilent = byClock('E09', async (tx, order) => {
   await markAnswerMissed(tx, order.sellerId)
 })
 
-const dayMissed = byClock('E26', async (tx, order) => {
-  await refundEverything(tx, order, 'seller-missed-day')
-  await markDayMissed(tx, order.sellerId)
-})
+const dayMissed = (edge: 'E26' | 'E34') =>
+  byClock(edge, async (tx, order) => {
+    await refundEverything(tx, order, 'seller-missed-day')
+    await markDayMissed(tx, order.sellerId)
+  })
+
+/** The claim window is over and nobody said a word: the money goes to the seller. */
+const settled =
+  (edge: 'E38' | 'E40'): ClockEdge =>
+  (order) =>
+    inTransaction(async (tx) => {
+      await settleOrder(tx, {
+        edge,
+        orderId: order.id,
+        commandId: ringOf(edge, order),
+        actor: 'timer',
+      })
+    })
 
 const buyerAbsent = byClock('E31', async (tx, order) => {
   await keepDeposit(tx, order, 'buyer-absent')
@@ -61,17 +75,13 @@ export const clockEdges: Partial<Record<string, ClockEdge>> = {
   E21: byClock('E21', (tx, order) => refundEverything(tx, order, 'hold-no-consent')),
   E17: byClock('E17', (tx, order) => refundEverything(tx, order, 'never-scheduled')),
   E23: byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid')),
-  E26: dayMissed,
+  E26: dayMissed('E26'),
   E31: buyerAbsent,
   E32: sellerAbsent,
   E33: byClock('E33', async () => undefined, { claimType: 'handover_unclear' }),
-  E40: (order) =>
-    inTransaction(async (tx) => {
-      await settleOrder(tx, {
-        edge: 'E40',
-        orderId: order.id,
-        commandId: ringOf('E40', order),
-        actor: 'timer',
-      })
-    }),
+  E34: dayMissed('E34'),
+  // Carriers are late without a seller's doing: no mark.
+  E36: byClock('E36', async () => undefined, { claimType: 'late_or_lost' }),
+  E38: settled('E38'),
+  E40: settled('E40'),
 }

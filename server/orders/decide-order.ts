@@ -7,18 +7,19 @@ import { keepDeposit } from '@/server/orders/keep-deposit'
 import { mayAct } from '@/server/orders/order-policy'
 import type { OrderRow } from '@/server/orders/order-store'
 import { orderSeenBy } from '@/server/orders/party-of'
+import { LATE_OUTCOMES, requireFitting } from '@/server/orders/fitting-outcome'
 import { refundEverything } from '@/server/orders/refund-everything'
 import { showAgain } from '@/server/orders/show-order'
 import { moveStock } from '@/server/orders/stock-store'
 import { now } from '@/server/clock'
 import { openSurvival } from '@/server/ratings/open-survival'
 import { projectListings } from '@/server/search/project-listings'
+import { decideLateBox } from '@/server/shipping/decide-late-box'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
 import type { ShownOrder } from '@/shared/contracts/orders'
 
-type Outcome = ParsedBody<Endpoints['decideOrder']>['outcome']
 type Asked = ParsedBody<Endpoints['decideOrder']> & { commandId: string }
 
 interface Move {
@@ -47,7 +48,9 @@ async function moveAnimals(tx: Tx, { order, by, to }: Move): Promise<void> {
 /** A hand-over that was decided counts from the end of its window. */
 const handedOverAt = (order: OrderRow) => order.slotEndsAt ?? now()
 
-async function carryOut(tx: Tx, command: EdgeCommand, outcome: Outcome): Promise<void> {
+async function carryOut(tx: Tx, command: EdgeCommand, { outcome, aliveCount }: Asked): Promise<void> {
+  if (LATE_OUTCOMES.includes(outcome))
+    return decideLateBox(tx, command, outcome === 'lost' ? null : (aliveCount ?? 0))
   if (outcome === 'handed-over') {
     const order = await settleOrder(tx, command)
     if (!order) return
@@ -62,13 +65,17 @@ async function carryOut(tx: Tx, command: EdgeCommand, outcome: Outcome): Promise
   await moveAnimals(tx, { order, by: command.actorId ?? null, to: 'free' })
 }
 
-/** E41 by a moderator, for a hand-over the two parties do not agree on. */
+/** E41 by a moderator, for a hand-over the two parties do not agree on or a box that is late. */
 export async function decideOrder(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const seen = await orderSeenBy(caller, orderId)
   if (seen.party !== 'staff')
     throw new Problem('not-allowed', 'You are a party of this order: another moderator decides.')
   if (!mayAct('decide', seen.order, 'staff'))
     throw new Problem('order-moved', undefined, { facts: { state: seen.order.state } })
+  requireFitting(seen.order, asked)
+  const { outcome, aliveCount, note } = asked
+  const said: Record<string, string | number> = { outcome }
+  if (aliveCount !== undefined) said.aliveCount = aliveCount
   await inTransaction(async (tx) => {
     const command: EdgeCommand = {
       edge: 'E41',
@@ -76,17 +83,17 @@ export async function decideOrder(caller: Caller, orderId: string, asked: Asked)
       commandId: asked.commandId,
       actor: 'admin',
       actorId: caller.memberId,
-      note: asked.note,
-      facts: { outcome: asked.outcome },
-      ...(asked.outcome === 'handed-over' ? { change: { handedOverAt: handedOverAt(seen.order) } } : {}),
+      note,
+      facts: said,
+      ...(outcome === 'handed-over' ? { change: { handedOverAt: handedOverAt(seen.order) } } : {}),
     }
-    await carryOut(tx, command, asked.outcome)
+    await carryOut(tx, command, asked)
     await writeAudit(
       {
         actorId: caller.memberId,
         act: 'order-decided',
         subject: `order:${seen.order.publicId}`,
-        facts: { outcome: asked.outcome, note: asked.note },
+        facts: { ...said, note },
         at: now(),
       },
       tx,

@@ -10,6 +10,7 @@ export function freeCancelUntil(order: OrderRow, terms: ListingBody): Date | nul
     category: terms.category,
     freeCancelHours: terms.freeCancelHours,
     quantityCutMs: null,
+    // A day that came by silence was no choice of the buyer's either.
     isMovedBySeller: order.sellerMoves > 0 || order.isDayBySilence,
   })
   return untilMs === null ? null : new Date(untilMs)

@@ -106,7 +106,16 @@ export function mayMeet(order: OrderRow, party: Party): boolean {
   )
 }
 
+/** Where a shipped order goes: the buyer's own, and the seller's to read from the agreed day on. Never for staff. */
+export function mayReadAddress(order: OrderRow, party: Party): boolean {
+  return (
+    party === 'buyer' ||
+    (party === 'seller' &&
+      [...BEFORE_DISPATCH, 'dispatched', 'arrived', 'claim_open', 'settled'].includes(order.state))
+  )
+}
+
 /** The code appears to the buyer when the animals are ready and nothing is left to pay. */
 export function maySeeCode(order: OrderRow, party: Party): boolean {
-  return party === 'buyer' && order.state === 'ready' && isBalancePaid(order)
+  return party === 'buyer' && !isShipped(order) && order.state === 'ready' && isBalancePaid(order)
 }

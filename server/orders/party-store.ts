@@ -62,6 +62,16 @@ export async function readPlaceKinds(windowIds: number[]): Promise<Map<number, s
   return new Map(rows.map((row) => [row.id, row.placeKind]))
 }
 
+/** Public ids of pickup windows by their numbers. */
+export async function readWindowIds(windowIds: number[]): Promise<Map<number, string>> {
+  if (windowIds.length === 0) return new Map()
+  const rows = await db()
+    .select({ id: pickupWindow.id, publicId: pickupWindow.publicId })
+    .from(pickupWindow)
+    .where(inArray(pickupWindow.id, windowIds))
+  return new Map(rows.map((row) => [row.id, row.publicId]))
+}
+
 /** Response record: an answer in time, or none. */
 export async function markAnswerMissed(tx: Tx, sellerId: number): Promise<void> {
   await tx

@@ -2,6 +2,7 @@ import { now } from '@/server/clock'
 import { balancesOf, type LedgerAccount } from '@/server/money/ledger-store'
 import { listPaymentsOf, type PaymentRow } from '@/server/money/payment-store'
 import { describeListing } from '@/server/listings/describe-listing'
+import { listHoldsOf, type HoldRow } from '@/server/orders/hold-store'
 import { freeCancelUntil } from '@/server/orders/free-cancel-until'
 import { actsOf, mayMeet, maySeeCode, type Party } from '@/server/orders/order-policy'
 import { listEventsOf, readEvidence, type OrderEventRow, type OrderRow } from '@/server/orders/order-store'
@@ -10,15 +11,19 @@ import {
   readListingIds,
   readPeople,
   readPlaceKinds,
+  readWindowIds,
   readSellers,
   type SellerRow,
 } from '@/server/orders/party-store'
+import { presentHold, presentShipment } from '@/server/orders/present-shipment'
+import { listShipmentsOf, type ShipmentRow } from '@/server/orders/shipment-store'
 import { presentRating, presentSurvival } from '@/server/ratings/present-rating'
 import type { AfterHandOver } from '@/server/ratings/rating-policy'
 import { listRatingsOf } from '@/server/ratings/rating-store'
 import { listSurvivalOf } from '@/server/ratings/survival-store'
 import { promiseWords } from '@/server/orders/promise-words'
 import { readTermsOf } from '@/server/orders/terms-store'
+import { listLatestChecks, type RouteCheckRow } from '@/server/shipping/route-check-store'
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { GateVerdict } from '@/shared/contracts/rules'
 import type { ShownOrder } from '@/shared/contracts/orders'
@@ -34,6 +39,11 @@ interface OrderFacts {
   gate?: GateVerdict
   after: AfterHandOver
   placeKind?: string
+  shipment: ShipmentRow | undefined
+  check: RouteCheckRow | undefined
+  hold: HoldRow | undefined
+  /** Of a pickup window that the hold proposes. */
+  holdWindowId: string | undefined
 }
 
 const idsOf = <T>(values: (T | null)[]) => [...new Set(values.filter((value): value is T => value !== null))]
@@ -89,7 +99,16 @@ function afterwards({ after, buyerName }: OrderFacts): Pick<ShownOrder, 'rating'
   }
 }
 
-function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrder {
+function onItsWay(seen: OrderSeen, facts: OrderFacts): Pick<ShownOrder, 'shipment' | 'hold'> {
+  const { shipment, check, gate, hold, holdWindowId } = facts
+  return {
+    ...(shipment ? { shipment: presentShipment(seen, { shipment, check, gate }) } : {}),
+    ...(hold ? { hold: presentHold(hold, holdWindowId) } : {}),
+  }
+}
+
+function presentOrder(seen: OrderSeen, facts: OrderFacts): ShownOrder {
+  const { order, party } = seen
   const { terms, seller } = facts
   const described = describeListing(terms)
   const { street, city, state, zip, phone } = seller
@@ -116,6 +135,7 @@ function presentOrder({ order, party }: OrderSeen, facts: OrderFacts): ShownOrde
     ...(mayMeet(order, party) ? { meeting: { street, city, state, zip, phone } } : {}),
     ...(maySeeCode(order, party) ? { handOverCode: order.handOverCode } : {}),
     ...(order.countHandedOver === null ? {} : { countHandedOver: order.countHandedOver }),
+    ...onItsWay(seen, facts),
     ...afterwards(facts),
     arrivalPromise: promiseWords(terms.promise),
     ...(order.clockAt && order.clockEdge
@@ -159,6 +179,9 @@ export async function presentOrders(seen: OrderSeen[]): Promise<ShownOrder[]> {
     placeKinds,
     ratings,
     survivals,
+    shipments,
+    checks,
+    holds,
   ] = await Promise.all([
     readTermsOf(idsOf(rows.map((order) => order.listingVersionId))),
     readSellers(idsOf(rows.map((order) => order.sellerId))),
@@ -171,12 +194,17 @@ export async function presentOrders(seen: OrderSeen[]): Promise<ShownOrder[]> {
     readPlaceKinds(idsOf(rows.map((order) => order.windowId))),
     listRatingsOf(ids),
     listSurvivalOf(ids),
+    listShipmentsOf(ids),
+    listLatestChecks(ids),
+    listHoldsOf(ids),
   ])
+  const windowIds = await readWindowIds(idsOf(holds.map((hold) => hold.proposedWindowId)))
   return seen.flatMap((one) => {
     const { order } = one
     const body = terms.get(order.listingVersionId)
     const seller = sellers.get(order.sellerId)
     if (!body || !seller) return []
+    const hold = holds.findLast((row) => row.orderId === order.id)
     return [
       presentOrder(one, {
         terms: body,
@@ -192,6 +220,10 @@ export async function presentOrders(seen: OrderSeen[]): Promise<ShownOrder[]> {
           survival: survivals.find((row) => row.orderId === order.id),
         },
         placeKind: order.windowId === null ? undefined : placeKinds.get(order.windowId),
+        shipment: shipments.find((row) => row.orderId === order.id),
+        check: checks.find((row) => row.orderId === order.id),
+        hold,
+        holdWindowId: windowIds.get(hold?.proposedWindowId ?? 0),
       }),
     ]
   })

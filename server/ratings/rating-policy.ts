@@ -17,7 +17,7 @@ interface Looking extends AfterHandOver {
 }
 
 const until = (from: Date, ms: number) => new Date(from.getTime() + ms)
-const RATEABLE = ['handed_over', 'claim_open', 'settled']
+const RATEABLE = ['handed_over', 'arrived', 'claim_open', 'settled']
 
 /** Handed over, and not merely closed: a kept deposit is settled too. */
 const wasHandedOver = ({ order }: Looking) => order.handedOverAt !== null && RATEABLE.includes(order.state)

@@ -33,6 +33,16 @@ export interface JudgedWay {
   plan: ShipmentPlan | null
 }
 
+/** Everything that weather does not change. */
+function taskOf({ terms, quantity, boxes }: Pick<AskedWay, 'terms' | 'quantity' | 'boxes'>) {
+  const { shipping, water } = terms
+  if (!shipping) throw new Error('this batch is not shipped')
+  const animals = animalsOf(terms, quantity)
+  if (!animals) return null
+  const { khPpm, pH } = water
+  return { animals, boxes, packing: shipping.packing, water: { alkalinityMeqPerL: khPpm / PPM_PER_MEQ, pH } }
+}
+
 const PPM_PER_MEQ = 50
 
 /** The animals of an order as the trip engine reads them, fasted as the species asks. null: no figures for them. */
@@ -77,19 +87,29 @@ function unknownWay(known: WayWeather | null): JudgedWay {
   return { verdict: 'unknown', plan: null, facts: { basis, reasons: [] } }
 }
 
+const plannerOf = (basis: RouteCheckFacts['basis']) =>
+  basis === 'forecast' ? planShipment : planShipmentAhead
+
+/** The plan behind a check that was kept, made again from the weather it kept. null: the forecast still decides. */
+export function planOfCheck(
+  asked: Pick<AskedWay, 'terms' | 'quantity' | 'boxes'>,
+  { basis, weather }: RouteCheckFacts,
+): ShipmentPlan | null {
+  const task = taskOf(asked)
+  return task && weather ? plannerOf(basis)({ ...task, weather }).plan : null
+}
+
 /** Whether an order survives its way on a day, packed the seller's way, and how each box is to be packed for it. */
 export async function judgeWay(asked: AskedWay): Promise<JudgedWay> {
-  const { terms, quantity, boxes, shipDay, from, to, isFresh } = asked
+  const { terms, boxes, shipDay, from, to, isFresh } = asked
   const { shipping } = terms
   if (!shipping) throw new Error('this batch is not shipped')
   const { nights } = packingClasses[shipping.packing]
   const known = await wayWeather({ from, to, shipDay, nights, isFresh: isFresh ?? false })
-  const animals = animalsOf(terms, quantity)
-  if (!known || !animals) return unknownWay(known)
+  const task = taskOf(asked)
+  if (!known || !task) return unknownWay(known)
   const { basis, weather } = known
-  const water = { alkalinityMeqPerL: terms.water.khPpm / PPM_PER_MEQ, pH: terms.water.pH }
-  const plan = basis === 'forecast' ? planShipment : planShipmentAhead
-  const answer = plan({ animals, water, packing: shipping.packing, boxes, weather })
+  const answer = plannerOf(basis)({ ...task, weather })
   const worst = answer.verdict === 'safe' ? null : worstAir(weather, answer.reasons)
   return {
     verdict: answer.verdict,

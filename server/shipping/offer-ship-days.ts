@@ -1,21 +1,12 @@
 import { judgeWay, type JudgedWay } from '@/server/shipping/judge-way'
+import { reasonsOf } from '@/server/shipping/reasons-of'
 import { shipRuleOf } from '@/server/shipping/ship-rule'
 import type { ShipWay } from '@/server/shipping/ship-way'
 import type { ShipDayOffer, ShipDayOffers } from '@/shared/contracts/shipments'
 import { lawfulShipDays, type JudgedShipDay } from '@/shared/domain/shipping/ship-days'
-import { reasonSentences } from '@/shared/domain/shipping/reason-sentences'
 
 /** Three weeks of a seller who ships on three days; more is no choice but a calendar. House rule. */
 const MOST_OFFERS = 9
-
-const NO_FIGURES =
-  'We hold no figures for these animals or for the weather on this way, so nobody can say that they survive it.'
-
-/** Why a way is not safe, in sentences; empty when it is. */
-export function reasonsOf({ verdict, reasons }: { verdict: string; reasons: { code: string }[] }): string[] {
-  const said = verdict === 'safe' ? [] : reasonSentences(reasons)
-  return verdict === 'unknown' && said.length === 0 ? [NO_FIGURES] : said
-}
 
 function offerOf({ shipDay, arriveDay }: JudgedShipDay, { verdict, facts }: JudgedWay): ShipDayOffer {
   const { basis, packing, reasons, worst } = facts

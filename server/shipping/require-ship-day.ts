@@ -1,5 +1,6 @@
 import { judgeWay, type JudgedWay } from '@/server/shipping/judge-way'
-import { offerShipDays, reasonsOf } from '@/server/shipping/offer-ship-days'
+import { offerShipDays } from '@/server/shipping/offer-ship-days'
+import { reasonsOf } from '@/server/shipping/reasons-of'
 import { firstShipDay, shipRuleOf } from '@/server/shipping/ship-rule'
 import type { ShipWay } from '@/server/shipping/ship-way'
 import { Problem } from '@/shared/api/problem'

@@ -31,6 +31,7 @@ export const problems = {
   'ticks-missing': { status: 422, title: 'Please read and tick each statement' },
   'trip-unsafe': { status: 409, title: 'The animals would not survive this trip' },
   'not-shipped': { status: 409, title: 'These animals are not shipped there' },
+  'packing-open': { status: 409, title: 'How to pack is not settled yet' },
   'dispatch-refused': { status: 409, title: 'This box cannot leave yet' },
   'holds-too-many': { status: 409, title: 'You already hold unpaid orders' },
   'deposit-expired': { status: 409, title: 'The 15 minutes are over' },

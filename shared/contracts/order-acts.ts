@@ -133,11 +133,14 @@ export const decideOrder = endpoint({
   path: '/moderation/orders/:orderId/decision',
   auth: 'moderator',
   idempotent: true,
-  summary: 'Decide an unclear hand-over',
+  summary: 'Decide an unclear hand-over or a late box',
   params: orderParams,
   body: z
     .object({
-      outcome: z.enum(['handed-over', 'buyer-absent', 'seller-absent']),
+      /** Of a hand-over nobody agrees on the first three, of a late box the last two. */
+      outcome: z.enum(['handed-over', 'buyer-absent', 'seller-absent', 'arrived', 'lost']),
+      /** Of a late box that came: how many were alive. */
+      aliveCount: z.int({ message: 'How many were alive?' }).min(0).max(1_000_000).optional(),
       note: line(300).min(10, 'Say in a sentence why; both parties read it.'),
     })
     .strict(),

@@ -136,6 +136,8 @@ export const shownShipment = z.object({
   tracking: z.string().optional(),
   dispatchedAt: instantText.optional(),
   arrivedAt: instantText.optional(),
+  /** Of a late box: how many the buyer found alive. */
+  aliveCount: z.int().optional(),
   check: shownRouteCheck.optional(),
   movement: movementFacts.optional(),
 })

@@ -1,5 +1,6 @@
 import { advice, saltGPerL } from '@/shared/domain/transport/advice.facts'
 import type { PackingPlan, PackingTask } from '@/shared/domain/transport/plan-packing'
+import type { BagSize, BoxSize } from '@/shared/domain/transport/packing.facts'
 import { heatPacks } from '@/shared/domain/transport/packs.facts'
 import { reasonTexts } from '@/shared/domain/transport/reason-texts.facts'
 import { fahrenheitFromC } from '@/shared/units/temperature'
@@ -16,13 +17,28 @@ export interface PackingSheet {
   label: readonly string[]
 }
 
+type SheetTask = Pick<PackingTask, 'animals' | 'water'>
+
+/** As much of a plan as a sheet tells. */
+export interface SheetPlan extends Pick<
+  PackingPlan,
+  'boxes' | 'bagsPerBox' | 'animalsPerBag' | 'packs' | 'answer'
+> {
+  box: Pick<BoxSize, 'box'>
+  bag: Pick<BagSize, 'waterL' | 'oxygenL'>
+  /** Absent: the material was not chosen from a list with prices. */
+  priceCents?: number
+  /** The weather it was reckoned by is the forecast of the day. */
+  isForecast?: boolean
+}
+
 const plain = (value: number, digits = 1) => String(Number(value.toFixed(digits)))
 /** Both scales: these figures decide whether animals live. */
 const degrees = (degreesC: number) => `${plain(degreesC)} °C (${plain(fahrenheitFromC(degreesC), 0)} °F)`
 const some = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`
 
 /** Everything a person at the packing table has to know, in words; figures in L, g, cm, °C and hours. */
-export function packingSheet(task: PackingTask, plan: PackingPlan): PackingSheet {
+export function packingSheet(task: SheetTask, plan: SheetPlan): PackingSheet {
   const { animals, water } = task
   const name = animals.species.commonName
   return {
@@ -47,10 +63,7 @@ export function packingSheet(task: PackingTask, plan: PackingPlan): PackingSheet
   }
 }
 
-function bagLines(
-  { animals }: PackingTask,
-  { bag, animalsPerBag, boxes, bagsPerBox }: PackingPlan,
-): string[] {
+function bagLines({ animals }: SheetTask, { bag, animalsPerBag, boxes, bagsPerBox }: SheetPlan): string[] {
   const massG = animalsPerBag * animals.massG
   return [
     `${animals.count} animals in all, ${plain(animals.massG, 2)} g each, in ${some(boxes * bagsPerBox, 'bag', 'bags')}`,
@@ -60,7 +73,7 @@ function bagLines(
   ]
 }
 
-function boxLines({ box: { box }, boxes, bagsPerBox, packs, priceCents }: PackingPlan): string[] {
+function boxLines({ box: { box }, boxes, bagsPerBox, packs, priceCents }: SheetPlan): string[] {
   const { lengthCm, widthCm, heightCm, wallMm } = box
   return [
     `${some(boxes, 'box', 'boxes')}, inside ${plain(lengthCm)} × ${plain(widthCm)} × ${plain(heightCm)} cm, walls of ${plain(wallMm)} mm foam`,
@@ -78,11 +91,13 @@ function boxLines({ box: { box }, boxes, bagsPerBox, packs, priceCents }: Packin
         ]
       : []),
     ...(packs.heat || packs.cold ? [] : ['No heat packs and no cold packs.']),
-    `Material about $${(priceCents / 100).toFixed(2)}, at the prices of the list.`,
+    ...(priceCents === undefined
+      ? []
+      : [`Material about $${(priceCents / 100).toFixed(2)}, at the prices of the list.`]),
   ]
 }
 
-function beforeLines({ animals: { species }, water }: PackingTask): string[] {
+function beforeLines({ animals: { species }, water }: SheetTask): string[] {
   const salt = saltGPerL(species)
   return [
     ...(species.fastHours === null ? [] : [`No food for ${species.fastHours} hours. ${advice.fast.text}`]),
@@ -91,18 +106,20 @@ function beforeLines({ animals: { species }, water }: PackingTask): string[] {
   ]
 }
 
-function wayLines({ answer: { hours, cold, hot } }: PackingPlan): string[] {
+function wayLines({ answer: { hours, cold, hot }, isForecast }: SheetPlan): string[] {
   const coldest = cold?.coldest
   const warmest = hot?.warmest
   return [
     `Reckoned for ${plain(hours)} hours from packing to release.`,
     ...(coldest ? [`On the cold day the water falls to ${degrees(coldest.waterC)} at the coldest.`] : []),
     ...(warmest ? [`On the hot day it rises to ${degrees(warmest.waterC)} at the warmest.`] : []),
-    'Long-term weather is no forecast: look at the forecast on the day.',
+    isForecast
+      ? 'Reckoned by the forecast, 2 °C to the cold and to the hot side of it.'
+      : 'Long-term weather is no forecast: look at the forecast on the day.',
   ]
 }
 
-function cautionLines({ answer: { reasons } }: PackingPlan): string[] {
+function cautionLines({ answer: { reasons } }: Pick<SheetPlan, 'answer'>): string[] {
   const said = reasons.map(({ code, value, limit }) => {
     const { text, unit } = reasonTexts[code]
     const figures =
