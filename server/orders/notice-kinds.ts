@@ -11,8 +11,12 @@ const kinds: Partial<Record<EdgeId, NoticeKind>> = {
   E22: 'ready',
   E27: 'weather-held',
   E28: 'moved',
+  E29: 'dispatched',
   E30: 'handed-over',
   E33: 'unclear',
+  E35: 'arrived',
+  E36: 'late-box',
+  E38: 'settled',
   E40: 'settled',
   E41: 'settled',
 }

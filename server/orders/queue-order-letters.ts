@@ -1,9 +1,10 @@
 import type { Tx } from '@/db/transaction'
 import { describeListing } from '@/server/listings/describe-listing'
 import { tellMember } from '@/server/notices/tell-member'
+import { dayFollows } from '@/server/orders/day-follows'
 import { loadLetterFacts } from '@/server/orders/letters/load-letter-facts'
 import type { LetterFacts, OrderLetter } from '@/server/orders/letters/letter-facts'
-import { orderLetters } from '@/server/orders/letters/order-letters'
+import { writerOf } from '@/server/orders/letters/order-letters'
 import { noticeKindOf } from '@/server/orders/notice-kinds'
 import { orderCalendar } from '@/server/orders/order-calendar'
 import type { OrderRow } from '@/server/orders/order-store'
@@ -17,8 +18,8 @@ const CHANGES_CALENDAR = new Set(['scheduled', 'cancelled'])
  * Queues mails and notices of an edge with the change itself. Where the date follows in the same breath, one says both.
  */
 export async function queueOrderLetters(tx: Tx, edge: EdgeId, order: OrderRow): Promise<void> {
-  const write = orderLetters[edge]
-  if (!write || (DATE_FOLLOWS.has(edge) && order.windowId !== null)) return
+  const write = writerOf(edge, order.handOver)
+  if (!write || (DATE_FOLLOWS.has(edge) && dayFollows(order))) return
   await queueLettersOf(tx, { edge, order, write })
 }
 

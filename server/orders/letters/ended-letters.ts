@@ -83,6 +83,17 @@ export const endings = {
     seller:
       'The day passed and the order was not marked ready, so the buyer has everything back. It counts in your record.',
   }),
+  neverSent: ended({
+    subject: 'The box was never sent',
+    buyer: `The ship day passed and the seller did not send the box. ${ALL_BACK}`,
+    seller:
+      'The ship day passed and the box was not sent, so the buyer has everything back. It counts in your record.',
+  }),
+  lateDecided: ended({
+    subject: 'Your late box was decided',
+    buyer: 'A moderator has decided; the reason and what goes where stand with the order.',
+    seller: 'A moderator has decided; the reason and what goes where stand with the order.',
+  }),
   buyerAbsent: ended({
     subject: 'The pickup was missed',
     buyer:

@@ -3,6 +3,7 @@ import { describeListing } from '@/server/listings/describe-listing'
 import type { Agreement } from '@/server/orders/slot-agreement'
 import type { OrderRow } from '@/server/orders/order-store'
 import type { SellerRow } from '@/server/orders/party-store'
+import type { ShipmentRow } from '@/server/orders/shipment-store'
 import type { ListingBody } from '@/shared/contracts/listings'
 import { printSlot } from '@/shared/times/print-time'
 import { printLengthRange } from '@/shared/units/length'
@@ -27,6 +28,8 @@ export interface LetterFacts {
   origin: string
   /** The pickup time as it was agreed on; null while none was. */
   agreement: Agreement | null
+  /** null: it is collected. */
+  shipment: ShipmentRow | null
 }
 
 export function orderUrl({ origin, order }: LetterFacts): string {

@@ -3,6 +3,7 @@ import type { LetterFacts } from '@/server/orders/letters/letter-facts'
 import { orderSettings } from '@/server/orders/order-settings'
 import { listEventsOf, type OrderRow } from '@/server/orders/order-store'
 import { readPeople, readSellerById } from '@/server/orders/party-store'
+import { readShipment } from '@/server/orders/shipment-store'
 import { agreementOf } from '@/server/orders/slot-agreement'
 import { readTerms } from '@/server/orders/terms-store'
 
@@ -16,5 +17,7 @@ export async function loadLetterFacts(tx: Tx, order: OrderRow): Promise<LetterFa
   if (!buyer || !sellerPerson) return null
   const terms = await readTerms(tx, order.listingVersionId)
   const agreement = agreementOf(await listEventsOf([order.id], tx))
-  return { order, terms, seller, buyer, sellerPerson, origin: orderSettings().origin, agreement }
+  const shipment = (await readShipment(tx, order.id)) ?? null
+  const { origin } = orderSettings()
+  return { order, terms, seller, buyer, sellerPerson, origin, agreement, shipment }
 }

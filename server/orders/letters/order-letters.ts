@@ -1,35 +1,18 @@
-import type { Letter } from '@/server/mail/letter'
 import { endings } from '@/server/orders/letters/ended-letters'
-import {
-  orderTag,
-  orderUrl,
-  slotText,
-  type LetterFacts,
-  type OrderLetter,
-} from '@/server/orders/letters/letter-facts'
+import { orderTag, slotText, type LetterFacts } from '@/server/orders/letters/letter-facts'
+import { say, see, toBuyer, toSeller, untilClock, type Writer } from '@/server/orders/letters/letter-parts'
+import { settled } from '@/server/orders/letters/settled-letters'
+import { shipLetters } from '@/server/orders/letters/ship-letters'
+import { daysRows } from '@/server/orders/letters/ship-words'
 import { promiseWords } from '@/server/orders/promise-words'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import type { EdgeId } from '@/shared/domain/orders/edges.facts'
-import { printMoment } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
 
-type Writer = (facts: LetterFacts) => OrderLetter[]
-
-const see = (facts: LetterFacts, label: string) => ({ kind: 'button' as const, label, url: orderUrl(facts) })
-const say = (text: string) => ({ kind: 'text' as const, text })
-const untilClock = ({ order }: LetterFacts) =>
-  order.clockAt ? printMoment(order.clockAt.toISOString(), order.zone) : 'the clock ends'
-
-const toBuyer = (facts: LetterFacts, letter: Omit<Letter, 'to'>): OrderLetter => ({
-  to: facts.buyer,
-  ...letter,
-})
-const toSeller = (facts: LetterFacts, letter: Omit<Letter, 'to'>): OrderLetter => ({
-  to: facts.sellerPerson,
-  ...letter,
-})
-
 const charge = (facts: LetterFacts) => printCents(facts.order.firstChargeCents)
+
+const whenRows = (facts: LetterFacts): [string, string][] =>
+  facts.shipment ? daysRows(facts.shipment, facts.order) : [['Pickup', slotText(facts)]]
 
 const requested: Writer = (facts) => [
   toSeller(facts, {
@@ -39,10 +22,7 @@ const requested: Writer = (facts) => [
       orderTag(facts),
       {
         kind: 'facts',
-        rows: [
-          ['Pickup', slotText(facts)],
-          ['Answer until', untilClock(facts)],
-        ],
+        rows: [...whenRows(facts), ['Answer until', untilClock(facts)]],
       },
       say(
         'The deposit is earmarked on the buyer’s card. Accept and it is taken; without an answer it is let go.',
@@ -57,11 +37,7 @@ const requested: Writer = (facts) => [
       orderTag(facts),
       {
         kind: 'facts',
-        rows: [
-          ['Earmarked, not taken', charge(facts)],
-          ['Pickup', slotText(facts)],
-          ['Answer by', untilClock(facts)],
-        ],
+        rows: [['Earmarked, not taken', charge(facts)], ...whenRows(facts), ['Answer by', untilClock(facts)]],
       },
       say('If the seller declines or stays silent, nothing is taken and your card is free again.'),
       see(facts, 'See your order'),
@@ -164,43 +140,6 @@ const handedOver: Writer = (facts) => [
   }),
 ]
 
-const settled: Writer = (facts) => {
-  const { order } = facts
-  const kept = order.firstChargeCents + (order.balancePaidAt ? order.balanceCents : 0) - order.refundedCents
-  return [
-    toBuyer(facts, {
-      subject: 'Receipt: your order is complete',
-      heading: 'All done',
-      blocks: [
-        orderTag(facts),
-        {
-          kind: 'facts',
-          rows: [
-            ['Paid in all', printCents(kept)],
-            ['Refunded', printCents(order.refundedCents)],
-          ],
-        },
-        see(facts, 'See the receipt'),
-      ],
-    }),
-    toSeller(facts, {
-      subject: 'Your money is on its way',
-      heading: `${printCents(kept - order.feeCents - order.taxCents)} released`,
-      blocks: [
-        orderTag(facts),
-        {
-          kind: 'facts',
-          rows: [
-            ['Paid by the buyer', printCents(kept)],
-            ['Our fee', printCents(order.feeCents)],
-          ],
-        },
-        see(facts, 'See the order'),
-      ],
-    }),
-  ]
-}
-
 const withdrawn: Writer = (facts) => [
   toSeller(facts, {
     subject: 'A request was taken back',
@@ -210,7 +149,7 @@ const withdrawn: Writer = (facts) => [
 ]
 
 /** The mails of each edge; an edge without a row sends none, or (E15, E24, E56) once its money is decided. */
-export const orderLetters: Partial<Record<EdgeId, Writer>> = {
+const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E02: endings.holdOver,
   E04: requested,
   E05: accepted,
@@ -232,6 +171,7 @@ export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E31: endings.buyerAbsent,
   E32: endings.sellerAbsent,
   E33: endings.unclear,
+  E38: settled,
   E40: settled,
   E41: endings.decided,
   E43: endings.stopped,
@@ -241,4 +181,9 @@ export const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E48: endings.stopped,
   E54: endings.sellerCancelled,
   E55: endings.sellerCancelled,
+}
+
+/** The writer of an edge's mails: of a shipped order its own where there is one. */
+export function writerOf(edge: EdgeId, handOver: string): Writer | undefined {
+  return (handOver === 'ship' ? shipLetters[edge] : undefined) ?? orderLetters[edge]
 }
