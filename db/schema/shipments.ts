@@ -43,8 +43,8 @@ export const shipment = mysqlTable('shipment', {
   arrivedAt: instant(),
   /** Of a late box: how many the buyer found alive, while a moderator has not decided. */
   aliveCount: int({ unsigned: true }),
-  /** What travelled, as it stood at dispatch. */
-  movement: jsonOf<MovementFacts | null>().notNull(),
+  /** What travelled, as it stood at dispatch; null before. */
+  movement: jsonOf<MovementFacts>(),
 })
 
 /** Every check of a route, kept for ever: what was known when, and what was decided by it. */

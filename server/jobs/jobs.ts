@@ -4,6 +4,7 @@ import type { Job } from '@/server/jobs/job-runner'
 import { ringClocks } from '@/server/jobs/ring-clocks'
 import { expireListings } from '@/server/listings/expire-listings'
 import { refreshQuietPayments } from '@/server/money/refresh-payment'
+import { remindBoxes } from '@/server/notices/remind-boxes'
 import { remindPickups } from '@/server/notices/remind-pickups'
 import { askSurvival } from '@/server/ratings/ask-survival'
 import { runEffects } from '@/server/outbox/run-effects'
@@ -22,6 +23,7 @@ export function jobsOf(): Job[] {
     { name: 'clocks', everyMs: 2 * SECOND, run: ringClocks },
     { name: 'reminders', everyMs: 20 * SECOND, run: remindPickups },
     { name: 'ways', everyMs: 30 * SECOND, run: checkDueWays },
+    { name: 'box-reminders', everyMs: 20 * SECOND, run: remindBoxes },
     { name: 'expired-listings', everyMs: 5 * 60 * SECOND, run: expireListings },
     { name: 'survival-questions', everyMs: 60 * SECOND, run: askSurvival },
     { name: 'site-mean', everyMs: HOUR, run: refreshSiteMean },

@@ -4,6 +4,7 @@ import { mailSender } from '@/server/mail/mail-sender'
 import { describeListing } from '@/server/listings/describe-listing'
 import { orderUrl, type LetterFacts } from '@/server/orders/letters/letter-facts'
 import { mayMeet } from '@/server/orders/order-policy'
+import { shipmentEvent, type OrderEvent } from '@/server/orders/shipment-event'
 import { writeCalendar } from '@/shared/calendar/write-calendar'
 import { printCents } from '@/shared/units/money'
 
@@ -35,26 +36,36 @@ function descriptionOf(facts: LetterFacts, party: 'buyer' | 'seller'): string {
   return [...lines, orderUrl(facts)].join('\n')
 }
 
-/** The pickup as a calendar file for one party; null while no time was agreed. */
-export function orderCalendar(facts: LetterFacts, party: 'buyer' | 'seller'): CalendarFile | null {
-  const { order, agreement, seller } = facts
-  if (!agreement || !order.slotStartsAt || !order.slotEndsAt) return null
-  const isCancelled = order.state === 'cancelled'
-  const text = writeCalendar({
-    uid: uidOf(order.publicId),
-    sequence: agreement.sequence,
-    stampedAt: now(),
+function pickupEvent(facts: LetterFacts, party: 'buyer' | 'seller'): OrderEvent | null {
+  const { order, seller } = facts
+  if (!order.slotStartsAt || !order.slotEndsAt) return null
+  return {
     startsAt: order.slotStartsAt,
     endsAt: order.slotEndsAt,
-    isCancelled,
     summary: summaryOf(facts, party),
     description: descriptionOf(facts, party),
     // The true place follows the same rule as on the order's page.
     ...(mayMeet(order, party)
       ? { location: `${seller.street}, ${seller.city}, ${seller.state} ${seller.zip}` }
       : {}),
+  }
+}
+
+/** The pickup, or the box, as a calendar file for one party; null while no time was agreed. */
+export function orderCalendar(facts: LetterFacts, party: 'buyer' | 'seller'): CalendarFile | null {
+  const { order, agreement, shipment } = facts
+  const event = shipment ? shipmentEvent({ ...facts, shipment }, party) : pickupEvent(facts, party)
+  if (!agreement || !event) return null
+  const isCancelled = order.state === 'cancelled'
+  const text = writeCalendar({
+    ...event,
+    uid: uidOf(order.publicId),
+    sequence: agreement.sequence,
+    stampedAt: now(),
+    isCancelled,
     url: orderUrl(facts),
     organizerEmail: mailSender().address,
   })
-  return { fileName: 'pickup.ics', method: isCancelled ? 'CANCEL' : 'PUBLISH', text }
+  const fileName = shipment ? 'box.ics' : 'pickup.ics'
+  return { fileName, method: isCancelled ? 'CANCEL' : 'PUBLISH', text }
 }

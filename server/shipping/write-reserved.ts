@@ -20,7 +20,6 @@ export async function writeReserved(
     toLng: place.centre.lng,
     toZone: place.zone,
     papers: [],
-    movement: null,
   })
   const { verdict, facts } = judged
   await insertRouteCheck(tx, { orderId, kind: 'reservation', shipDay, at, verdict, facts })

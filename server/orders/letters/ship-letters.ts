@@ -37,7 +37,7 @@ const scheduled = shipped((facts) => {
         { kind: 'facts', rows: [...rows, ['Still to pay', printCents(rest)]] },
         ...(rest > 0 ? [say(`Please pay the rest before ${untilClock(facts)}: a box leaves paid.`)] : []),
         say(
-          'The seller looks at the weather on the way before packing. If it is too cold or too hot, the day moves; nobody sends animals to their death.',
+          'The seller looks at the weather on the way before packing. If it is too cold or too hot for them, the day moves.',
         ),
         see(facts, 'See your order'),
       ],
