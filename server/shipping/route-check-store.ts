@@ -2,12 +2,7 @@ import { and, desc, eq, inArray, max } from 'drizzle-orm'
 
 import { db, type Tx } from '@/db/client'
 import { routeCheck } from '@/db/schema/shipments'
-
-export type RouteCheckRow = typeof routeCheck.$inferSelect
-
-export async function insertRouteCheck(tx: Tx, row: typeof routeCheck.$inferInsert): Promise<void> {
-  await tx.insert(routeCheck).values(row)
-}
+import type { RouteCheckRow } from '@/server/weather/weather-store'
 
 /** The last check that was made of an order for this ship day. */
 export async function readLatestCheck(

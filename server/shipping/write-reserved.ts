@@ -2,7 +2,7 @@ import type { Tx } from '@/db/transaction'
 import { insertShipment } from '@/server/orders/shipment-store'
 import type { FoundPlace } from '@/server/places/find-place'
 import type { ReservedShipment } from '@/server/shipping/plan-reserved'
-import { insertRouteCheck } from '@/server/shipping/route-check-store'
+import { insertRouteCheck } from '@/server/weather/weather-store'
 
 /** The rows of a shipped order beside the order itself: the shipment, and the check its day was agreed by. */
 export async function writeReserved(
