@@ -4,7 +4,7 @@ import { bookCapture, bookProcessorCost } from '@/server/money/book-capture'
 import { changePayment, lockPayment, STRAY, type PaymentRow } from '@/server/money/payment-store'
 import type { ChargeState } from '@/server/money/read-charge'
 import { refundPayment } from '@/server/money/refund-payment'
-import { applyEdge } from '@/server/orders/apply-edge'
+import { applyEdge, clockAfter } from '@/server/orders/apply-edge'
 import { changeOrder, lockOrder, type OrderRow } from '@/server/orders/order-store'
 import { scheduleOrder } from '@/server/orders/schedule-order'
 import { queueEffect } from '@/server/outbox/outbox-store'
@@ -38,7 +38,10 @@ async function takeAuthorisation(tx: Tx, { payment, order }: Locked, facts: Paym
 async function takeBalance(tx: Tx, { payment, order }: Locked): Promise<void> {
   if (['scheduled', 'weather_hold', 'ready'].includes(order.state) && order.balancePaidAt === null) {
     const at = now()
-    await changeOrder(tx, order, { balancePaidAt: at, updatedAt: at })
+    const paid = { ...order, balancePaidAt: at }
+    // The clock that waited for the balance waits for the day from now on.
+    const clock = order.state === 'scheduled' ? await clockAfter(tx, paid, at) : {}
+    await changeOrder(tx, order, { balancePaidAt: at, updatedAt: at, ...clock })
     return
   }
   await refundPayment(tx, { order, payment, amountCents: payment.amountCents, why: STRAY })

@@ -37,6 +37,8 @@ const sellerSilent = byClock('E09', async (tx, order) => {
   await markAnswerMissed(tx, order.sellerId)
 })
 
+const balanceUnpaid = byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid'))
+
 const dayMissed = (edge: 'E26' | 'E34') =>
   byClock(edge, async (tx, order) => {
     await refundEverything(tx, order, 'seller-missed-day')
@@ -74,7 +76,8 @@ export const clockEdges: Partial<Record<string, ClockEdge>> = {
   E19: (order) => takeDayBySilence(order, ringOf('E19', order)),
   E21: byClock('E21', (tx, order) => refundEverything(tx, order, 'hold-no-consent')),
   E17: byClock('E17', (tx, order) => refundEverything(tx, order, 'never-scheduled')),
-  E23: byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid')),
+  // A clock set before the balance came must not end a paid order.
+  E23: async (order) => (order.balancePaidAt === null ? balanceUnpaid(order) : undefined),
   E26: dayMissed('E26'),
   E31: buyerAbsent,
   E32: sellerAbsent,

@@ -3,11 +3,11 @@ import { now } from '@/server/clock'
 import { lockOrder, type OrderRow } from '@/server/orders/order-store'
 import { judgeWay, type JudgedWay } from '@/server/shipping/judge-way'
 import { holdOrder } from '@/server/weather/hold-order'
-import { askWay, loadOrderWay, type OrderWay } from '@/server/weather/order-way'
+import { loadOrderWay, type OrderWay } from '@/server/weather/order-way'
 import { proposeShipDay } from '@/server/weather/propose-ship-day'
 import { insertRouteCheck, type RouteCheckKind } from '@/server/weather/weather-store'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
-import { reasonTexts, type ReasonCode } from '@/shared/domain/transport/reason-texts.facts'
+import { reasonSentences } from '@/shared/domain/shipping/reason-sentences'
 import { printDay } from '@/shared/times/print-time'
 import { printBothTemperatures } from '@/shared/units/temperature'
 
@@ -25,8 +25,7 @@ function whyOf(way: OrderWay, judged: JudgedWay, proposed: string | null): strin
   const day = printDay(noon(way.shipment.shipDay), 'UTC')
   const { worst, reasons } = judged.facts
   if (!worst) {
-    const first = reasons[0]
-    const text = first ? reasonTexts[first.code as ReasonCode].text : 'The way is not safe.'
+    const [text = 'The way is not safe.'] = reasonSentences(reasons)
     return `${text} You may cancel for a full refund.`
   }
   const extreme = worst.side
@@ -52,7 +51,8 @@ export async function checkWay(order: OrderRow, { kind, holds, isFresh }: Checki
   const way = await loadOrderWay(order)
   if (!way) return false
   const { shipDay } = way.shipment
-  const judged = await judgeWay(askWay(way, shipDay, isFresh))
+  const { charges, ...asked } = way.way
+  const judged = await judgeWay({ ...asked, boxes: charges.boxes, shipDay, isFresh })
   const isRed = judged.verdict === 'unsafe' && holds
   const proposed = isRed ? await proposeShipDay(way) : null
   return inTransaction(async (tx) => {

@@ -5,7 +5,7 @@ import { mayAct } from '@/server/orders/order-policy'
 import { orderSeenBy } from '@/server/orders/party-of'
 import { showAgain } from '@/server/orders/show-order'
 import { holdOrder } from '@/server/weather/hold-order'
-import { requireShipDay } from '@/server/weather/require-ship-day'
+import { requireLawfulDay, requireSafeWay } from '@/server/shipping/require-ship-day'
 import { loadOrderWay } from '@/server/weather/order-way'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
@@ -26,8 +26,11 @@ export async function holdForWeather(caller: Caller, orderId: string, asked: Ask
       : 'This order is collected: propose a pickup time.'
     throw new Problem('fields-invalid', undefined, { errors: [{ detail, pointer }] })
   }
-  const way = asked.shipDay && mayAct('hold-for-weather', order, 'seller') ? await loadOrderWay(order) : null
-  if (way && asked.shipDay) await requireShipDay(way, asked.shipDay)
+  const held = asked.shipDay && mayAct('hold-for-weather', order, 'seller') ? await loadOrderWay(order) : null
+  if (held && asked.shipDay) {
+    await requireLawfulDay(held.way, { shipDay: asked.shipDay, pointer: '#/shipDay' })
+    await requireSafeWay(held.way, asked.shipDay)
+  }
   await inTransaction(async (tx) => {
     const locked = await lockOrder(tx, order.id)
     if (!locked) throw new Problem('not-found')

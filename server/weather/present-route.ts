@@ -2,7 +2,8 @@ import type { OrderRow } from '@/server/orders/order-store'
 import type { ShipmentRow } from '@/server/orders/shipment-store'
 import type { RouteCheckRow } from '@/server/weather/weather-store'
 import type { RouteRow } from '@/shared/contracts/ship-acts'
-import { reasonTexts, type ReasonCode } from '@/shared/domain/transport/reason-texts.facts'
+import { reasonSentences } from '@/shared/domain/shipping/reason-sentences'
+import { worstWords } from '@/shared/domain/shipping/worst-words'
 import { printBothTemperatures } from '@/shared/units/temperature'
 
 interface RouteParts {
@@ -18,8 +19,8 @@ interface RouteParts {
 export function wordsOfCheck({ verdict, facts }: Pick<RouteCheckRow, 'verdict' | 'facts'>): string {
   const { worst, packing, reasons } = facts
   if (verdict === 'unknown') return 'Nobody can say: figures or weather are missing for this way.'
-  if (worst) return `Too ${worst.side}: ${worst.place} ${printBothTemperatures(worst.airC, 'us')}.`
-  if (verdict === 'unsafe') return reasons[0] ? reasonTexts[reasons[0].code as ReasonCode].text : 'Not safe.'
+  if (worst) return worstWords(worst)
+  if (verdict === 'unsafe') return reasonSentences(reasons)[0] ?? 'Not safe.'
   if (!packing) return 'Safe when packed as the forecast asks; that comes within a week of the day.'
   const packs =
     packing.packs === 'none' ? 'no packs' : `${packing.packCount} ${packing.packs} packs in each box`

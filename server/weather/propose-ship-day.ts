@@ -1,8 +1,9 @@
 import { now } from '@/server/clock'
 import { dayOf } from '@/server/listings/day-of'
 import { judgeWay } from '@/server/shipping/judge-way'
+import { shipRuleOf } from '@/server/shipping/ship-rule'
 import { shipSlot } from '@/server/shipping/ship-slot'
-import { askWay, shipDayRuleOf, type OrderWay } from '@/server/weather/order-way'
+import type { OrderWay } from '@/server/weather/order-way'
 import { clockMs } from '@/shared/domain/orders/clocks.facts'
 import { lawfulShipDays } from '@/shared/domain/shipping/ship-days'
 
@@ -13,17 +14,18 @@ const MOST_LOOKED_AT = 15
  * The first lawful day on which the way is safe, late enough that the buyer's silence has ended before it begins and
  * within 30 days of the day agreed before. null: none, so the hold is open-ended.
  */
-export async function proposeShipDay(way: OrderWay): Promise<string | null> {
-  const { order, terms, seller } = way
-  const silenceEndsAt = new Date(now().getTime() + clockMs('weatherConsent', terms.category))
-  const fromDay = dayOf(silenceEndsAt, seller.zone)
-  const latestMs = (order.slotStartsAt ?? now()).getTime() + clockMs('weatherSilence', terms.category)
-  const rule = await shipDayRuleOf(terms, fromDay)
-  for (const { shipDay } of lawfulShipDays(fromDay, rule, MOST_LOOKED_AT)) {
-    const startsAt = shipSlot(shipDay, order.zone).slotStartsAt
+export async function proposeShipDay({ order, way }: OrderWay): Promise<string | null> {
+  const { charges, ...asked } = way
+  const { category } = way.terms
+  const silenceEndsAt = new Date(now().getTime() + clockMs('weatherConsent', category))
+  const fromDay = dayOf(silenceEndsAt, way.zone)
+  const latestMs = (order.slotStartsAt ?? now()).getTime() + clockMs('weatherSilence', category)
+  for (const { shipDay } of lawfulShipDays(fromDay, await shipRuleOf(way.terms, fromDay), MOST_LOOKED_AT)) {
+    const startsAt = shipSlot(shipDay, way.zone).slotStartsAt
     if (startsAt < silenceEndsAt) continue
     if (startsAt.getTime() > latestMs) return null
-    if ((await judgeWay(askWay(way, shipDay, false))).verdict === 'safe') return shipDay
+    const { verdict } = await judgeWay({ ...asked, boxes: charges.boxes, shipDay })
+    if (verdict === 'safe') return shipDay
   }
   return null
 }
