@@ -1,5 +1,6 @@
 import { checkStock, checkWindows, type Wrong } from '@/shared/contracts/check-lot'
 import type { ProduceBody } from '@/shared/contracts/produce-lot'
+import { dayNumberOf } from '@/shared/domain/calendar/day-number'
 import { tierFor } from '@/shared/domain/money/tier-price'
 import { SMALL_TOTAL_CENTS } from '@/shared/domain/orders/pay-in-full'
 import type { Crop } from '@/shared/domain/produce/crop'
@@ -8,15 +9,18 @@ import { findCrop } from '@/shared/domain/produce/find-crop'
 import { holdingFault } from '@/shared/domain/produce/judge-holding'
 import { methodFault } from '@/shared/domain/produce/judge-method'
 import { judgeWords } from '@/shared/domain/produce/judge-words'
-import { isLotCodeOf } from '@/shared/domain/produce/lot-code'
+import { isLotCodeOf, readLotCode } from '@/shared/domain/produce/lot-code'
 import { sellBy } from '@/shared/domain/produce/sell-by'
 
-/** Rules between the answers of a produce listing. What needs today's date or papers runs where it is submitted. */
+/**
+ * Rules between the answers of a produce listing. What needs today's date or papers runs where it is submitted. They
+ * are asked even when a text had the wrong shape, so none may rest on a day being one.
+ */
 export function checkProduce(lot: ProduceBody, wrong: Wrong): void {
   const crop = findCrop(lot.cropId)
   if (!crop) wrong(['cropId'], 'Pick the crop from the list. Is yours missing? Ask us to add it.')
   else checkCrop(lot, crop, wrong)
-  if (lot.lotCode !== undefined && !isLotCodeOf(lot.lotCode, lot.harvest.day)) {
+  if (lot.lotCode !== undefined && readLotCode(lot.lotCode) && !isLotCodeOf(lot.lotCode, lot.harvest.day)) {
     wrong(['lotCode'], 'The lot code names another day than the harvest. Leave it empty and we write one.')
   }
   checkFarm(lot, wrong)
@@ -28,6 +32,7 @@ export function checkProduce(lot: ProduceBody, wrong: Wrong): void {
 
 function checkCrop(lot: ProduceBody, crop: Crop, wrong: Wrong): void {
   const { form, harvest, handling } = lot
+  const hasDay = dayNumberOf(harvest.day) !== null
   const method = methodFault(crop, lot.saleUnit)
   if (method) wrong(['saleUnit'], method)
   const holding = holdingFault({ crop, form, heldC: handling.heldC })
@@ -36,7 +41,7 @@ function checkCrop(lot: ProduceBody, crop: Crop, wrong: Wrong): void {
     wrong(['handling', 'coldAtPickup'], 'Cut leafy greens are handed over from a cooler or fridge.')
   }
   const reckoned = sellBy({ crop, form, harvestDay: harvest.day, heldC: handling.heldC })
-  if (lot.sellBy === undefined && !reckoned) {
+  if (lot.sellBy === undefined && hasDay && !reckoned) {
     wrong(['sellBy'], 'Nobody published how long it keeps like this. Say until which day you sell it.')
   }
   if (lot.sellBy !== undefined && lot.sellBy < harvest.day) {
@@ -56,7 +61,7 @@ function checkCrop(lot: ProduceBody, crop: Crop, wrong: Wrong): void {
 
 function checkFarm(lot: ProduceBody, wrong: Wrong): void {
   const { fault } = judgeStanding(lot.standing, lot.farm ?? null)
-  if (fault) wrong(['farm'], fault)
+  if (fault && !lot.farm) wrong(['farm'], fault)
   if (lot.standing !== 'qualified-exempt' && lot.farm) {
     wrong(['farm'], 'Your address would be public without need: leave it out, or choose "qualified exempt".')
   }

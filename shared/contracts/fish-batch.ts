@@ -19,7 +19,7 @@ const quarterInches = z
     'In quarter-inch steps.',
   )
 
-export const priceTier = tierOf(cents.min(1, 'A price for each animal.'))
+export const priceTier = tierOf(cents.min(1, 'A price for each animal.'), {})
 export type PriceTier = z.output<typeof priceTier>
 export type { TypedWindow } from '@/shared/contracts/lot-terms'
 

@@ -6,37 +6,42 @@ import { dayText, line, photoId } from '@/shared/contracts/values'
 export const wholeCount = (least: number, saying: string, tooMany?: string) =>
   z.int({ message: saying }).min(least, saying).max(1_000_000, tooMany)
 
-/** From this count on, one unit costs this; `unitCents` says what is asked for one. */
-export const tierOf = (unitCents: z.ZodType<number, number>) =>
-  z.object({ fromCount: wholeCount(1, 'From how many?'), unitCents }).strict()
-
-const clockTime = /^\d{2}:\d{2}$/
-
 /** What is said where nothing was answered. A batch of fish leaves them out: its own form asks before the contract does. */
 export interface LotSayings {
   day?: string
   time?: string
   manyBuyers?: string
+  window?: string
   windows?: string
   manyWindows?: string
   accept?: string
   balanceDue?: string
+  tier?: string
   tiers?: string
   tooMany?: string
 }
 
+/** From this count on, one unit costs this; `unitCents` says what is asked for one. */
+export const tierOf = (unitCents: z.ZodType<number, number>, said: LotSayings) =>
+  z.object({ fromCount: wholeCount(1, 'From how many?', said.tooMany), unitCents }, said.tier).strict()
+
+const clockTime = /^\d{2}:\d{2}$/
+
 /** A pickup window as the seller types it: a day and two times in the zone of the place. */
 export const windowOf = (said: LotSayings) =>
   z
-    .object({
-      day: z.iso.date(said.day),
-      from: z.string(said.time).regex(clockTime, 'A time, like 09:00.'),
-      until: z.string(said.time).regex(clockTime, 'A time, like 10:00.'),
-      capacity: z
-        .int({ message: 'How many buyers fit?' })
-        .min(1, 'At least one buyer.')
-        .max(500, said.manyBuyers),
-    })
+    .object(
+      {
+        day: z.iso.date(said.day),
+        from: z.string(said.time).regex(clockTime, 'A time, like 09:00.'),
+        until: z.string(said.time).regex(clockTime, 'A time, like 10:00.'),
+        capacity: z
+          .int({ message: 'How many buyers fit?' })
+          .min(1, 'At least one buyer.')
+          .max(500, said.manyBuyers),
+      },
+      said.window,
+    )
     .strict()
 export type TypedWindow = z.output<ReturnType<typeof windowOf>>
 

@@ -1,10 +1,9 @@
 import { z } from 'zod'
 
-import { askedNumber, askedYesNo } from '@/shared/contracts/asked'
+import { askedNumber, askedYesNo, freeLine, freeWords } from '@/shared/contracts/asked'
 import { checkStock, checkWindows, type Wrong } from '@/shared/contracts/check-lot'
 import { mediaUnit } from '@/shared/contracts/sale-unit'
 import { supplyTerms } from '@/shared/contracts/supply-terms'
-import { line, words } from '@/shared/contracts/values'
 import { findMedia } from '@/shared/domain/media/find-media'
 import { mediaIds } from '@/shared/domain/media/media.facts'
 import { heatAnswers } from '@/shared/domain/worms/heat-treated'
@@ -16,7 +15,7 @@ export const mediaBody = z
   .object({
     category: z.literal('media'),
     material: z.enum(mediaIds, 'Pick the material from the list.'),
-    materialWords: line(80).optional(),
+    materialWords: freeLine(80),
     saleUnit: mediaUnit,
     grainLoMm: grainMm.optional(),
     grainHiMm: grainMm.optional(),
@@ -25,7 +24,7 @@ export const mediaBody = z
       .enum(['no-fizz', 'fizzes', 'not-done'], 'What does a handful do in vinegar? "Not done" is an answer.')
       .optional(),
     used: z.enum(['new', 'used'], 'New, or used before?'),
-    usedWords: words(400).optional(),
+    usedWords: freeWords(400),
     heatTreated: z.enum(heatAnswers, 'Was it heat treated? "Unknown" is an answer.').optional(),
     ...supplyTerms({ least: 0, most: 30, leastFreeHours: 12 }),
   })

@@ -1,10 +1,17 @@
 import { z } from 'zod'
 
-import { askedDay, askedLine, askedNumber, askedTime, askedWords, askedYesNo } from '@/shared/contracts/asked'
+import {
+  askedDay,
+  askedLine,
+  askedNumber,
+  askedTime,
+  askedWords,
+  askedYesNo,
+  freeLine,
+} from '@/shared/contracts/asked'
 import { checkProduce } from '@/shared/contracts/check-produce'
 import { produceUnit } from '@/shared/contracts/sale-unit'
 import { supplyTerms } from '@/shared/contracts/supply-terms'
-import { line } from '@/shared/contracts/values'
 import { farmStandings } from '@/shared/domain/produce/farm-standing'
 import { waterTouches } from '@/shared/domain/produce/judge-holding'
 import { produceForms } from '@/shared/domain/produce/judge-form'
@@ -15,7 +22,7 @@ const harvest = z
     {
       day: askedDay('On which day is it harvested?'),
       time: askedTime('At what time is it harvested? Like 07:30.'),
-      bed: line(20).optional(),
+      bed: freeLine(20),
     },
     'When is it harvested? A day and a time.',
   )
@@ -38,13 +45,16 @@ const handling = z
   .strict()
 
 const farm = z
-  .object({
-    name: askedLine(120, 'The name of the farm.'),
-    street: askedLine(120, 'Street and number of the farm.'),
-    city: askedLine(80, 'The town.'),
-    state: z.string('Two letters, like OH.').regex(/^[A-Z]{2}$/, 'Two letters, like OH.'),
-    zip: z.string('Five digits, please.').regex(/^\d{5}$/, 'Five digits, please.'),
-  })
+  .object(
+    {
+      name: askedLine(120, 'The name of the farm.'),
+      street: askedLine(120, 'Street and number of the farm.'),
+      city: askedLine(80, 'The town.'),
+      state: z.string('Two letters, like OH.').regex(/^[A-Z]{2}$/, 'Two letters, like OH.'),
+      zip: z.string('Five digits, please.').regex(/^\d{5}$/, 'Five digits, please.'),
+    },
+    'Name and full address of the farm.',
+  )
   .strict()
 
 /** A harvest: one crop, one form, one method of sale, one lot. */
@@ -52,13 +62,13 @@ const produceFields = z
   .object({
     category: z.literal('produce'),
     cropId: askedLine(60, 'Pick the crop from the list.'),
-    variety: line(80).optional(),
+    variety: freeLine(80),
     form: z.enum(produceForms, 'Whole, leaves cut at the harvest, or cut, mixed or washed ready to eat?'),
     saleUnit: produceUnit,
     harvest,
     /** Left out: the server gives the next free one. */
     lotCode: z
-      .string()
+      .string('A lot code like L-0412. Leave it empty and we write one.')
       .refine(
         (code) => readLotCode(code) !== null,
         'A lot code like L-0412 or L-0412-B3. Leave it empty and we write one.',
@@ -71,7 +81,7 @@ const produceFields = z
     organic: z
       .enum(['certified', 'exempt-small'], 'Certified organic, or exempt as a small farm?')
       .optional(),
-    organicCertifier: line(120).optional(),
+    organicCertifier: freeLine(120),
     standing: z.enum(
       farmStandings,
       'What does the produce safety rule say of your farm? "Don\'t know" is an answer.',

@@ -7,11 +7,11 @@ import {
   askedState,
   askedWords,
   askedYesNo,
+  freeLine,
 } from '@/shared/contracts/asked'
 import { checkStock, checkWindows, type Wrong } from '@/shared/contracts/check-lot'
 import { wormUnit } from '@/shared/contracts/sale-unit'
 import { supplyTerms } from '@/shared/contracts/supply-terms'
-import { line } from '@/shared/contracts/values'
 import { judgeWormLot } from '@/shared/domain/worms/judge-worm-lot'
 
 const survival = 'No survival promise (0), or 3 to 7 days.'
@@ -21,7 +21,7 @@ const promise = z
   .object(
     {
       windowHours: askedInt(4, 24, '4 to 24 hours.'),
-      survivalDays: z.union([z.literal(0), z.int().min(3).max(7)], survival),
+      survivalDays: z.union([z.literal(0), z.int(survival).min(3, survival).max(7, survival)], survival),
       remedy: z.enum(['refund', 'replace'], 'A refund, or new worms?'),
       evidence: askedLine(200, 'What should the buyer show you? A photo of the open bag, for instance.'),
     },
@@ -34,7 +34,7 @@ export const wormBody = z
   .object({
     category: z.literal('worms'),
     taxonId: askedLine(60, 'Pick the worm from the list, genus and species.'),
-    strain: line(80).optional(),
+    strain: freeLine(80),
     grading: z.enum(['bed-run', 'sized'], 'Bed-run (all sizes as they come), or sorted by size?'),
     sizeLoMm: wormMm.optional(),
     sizeHiMm: wormMm.optional(),

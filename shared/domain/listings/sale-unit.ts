@@ -1,5 +1,6 @@
-import { gramsPerPound, printMass } from '@/shared/units/mass'
+import { gramsPerOunce, poundsFromG, printMass } from '@/shared/units/mass'
 import { printCount } from '@/shared/units/count'
+import { roundTo } from '@/shared/units/round-to'
 import { printDryVolume } from '@/shared/units/volume'
 
 /**
@@ -17,12 +18,18 @@ export type SaleUnit =
 
 export type SaleUnitKind = SaleUnit['kind']
 
-/** In both systems, since it stands on labels: '8 oz (227 g)', '2 lb (907 g)'. */
+/** A mass as a label states it, finer than a screen rounds: '13.5 oz (383 g)', '2.25 lb (1.02 kg)'. */
 export function printBothMasses(massG: number): string {
-  return `${printMass(massG, 'us')} (${printMass(massG, 'metric')})`
+  const pounds = poundsFromG(massG)
+  const us = pounds >= 1 ? `${figure(pounds, 0.01)} lb` : `${figure(massG / gramsPerOunce, 0.1)} oz`
+  const metric =
+    massG >= 1000 ? `${figure(massG / 1000, 0.01)} kg` : `${figure(massG, massG >= 10 ? 1 : 0.1)} g`
+  return `${us} (${metric})`
 }
 
-/** One unit in words: 'head', 'bunch, 4 oz (113 g) net', '250 worms', '50 L (1.8 cu ft), about 14 kg (31 lb)'. */
+const figure = (value: number, step: number) => roundTo(value, step).toLocaleString('en-US')
+
+/** One unit in words: 'head', 'bunch, 4 oz (113 g) net', '250 worms', '50 L (1.8 cu ft), about 31 lb (14 kg)'. */
 export function printSaleUnit(unit: SaleUnit, animals = 'worms'): string {
   switch (unit.kind) {
     case 'each':
@@ -36,13 +43,7 @@ export function printSaleUnit(unit: SaleUnit, animals = 'worms'): string {
       return 'dry pint'
     case 'pack':
       return `${printCount(unit.count)} ${animals}`
-    case 'volume': {
-      const volume = `${printDryVolume(unit.litres, 'metric')} (${printDryVolume(unit.litres, 'us')})`
-      const massG = unit.weightKg * 1000
-      // A bag below a pound is told in ounces by printMass; both orders read well.
-      const [first, second] =
-        massG >= gramsPerPound ? (['metric', 'us'] as const) : (['us', 'metric'] as const)
-      return `${volume}, about ${printMass(massG, first)} (${printMass(massG, second)})`
-    }
+    case 'volume':
+      return `${printDryVolume(unit.litres, 'metric')} (${printDryVolume(unit.litres, 'us')}), about ${printMass(unit.weightKg * 1000, 'us')} (${printMass(unit.weightKg * 1000, 'metric')})`
   }
 }

@@ -8,9 +8,12 @@ export type ParcelJudgement = { verdict: 'together' } | { verdict: 'refuse'; say
 
 /** Whether crops may travel in one parcel: what needs near freezing and what is harmed by it go apart. */
 export function judgeParcel(together: readonly Crop[], hasIce: boolean): ParcelJudgement {
-  const tender = together.find((crop) => crop.chillsBelowC !== null)
-  if (!tender || tender.chillsBelowC === null) return { verdict: 'together' }
-  const limitC = tender.chillsBelowC
+  const tender = together.reduce<Crop | null>(
+    (most, crop) => ((crop.chillsBelowC ?? -Infinity) > (most?.chillsBelowC ?? -Infinity) ? crop : most),
+    null,
+  )
+  const limitC = tender?.chillsBelowC ?? null
+  if (!tender || limitC === null) return { verdict: 'together' }
   const cold = together.find((crop) => crop.storeC !== null && crop.storeC[1] < limitC)
   const harm = `${tender.name}: harmed below ${printBothTemperatures(limitC, 'us')}`
   if (cold)

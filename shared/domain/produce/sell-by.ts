@@ -1,4 +1,4 @@
-import { dateAfter } from '@/shared/domain/calendar/day-number'
+import { dateOfNumber, dayNumberOf } from '@/shared/domain/calendar/day-number'
 import type { Crop, KeepingTime } from '@/shared/domain/produce/crop'
 import type { ProduceForm } from '@/shared/domain/produce/judge-form'
 import type { SourceKey } from '@/shared/sources'
@@ -27,7 +27,8 @@ export function keepingTime(crop: Crop, heldC: number): KeepingTime | null {
 /** Until which day a harvest is sold. null: nobody says, for that temperature or once it is cut; the grower must. */
 export function sellBy({ crop, form, harvestDay, heldC }: Kept): SellBy | null {
   const row = keepingTime(crop, heldC)
-  if (!row || form === 'cut-mixed-or-washed') return null
+  const harvested = dayNumberOf(harvestDay)
+  if (!row || harvested === null || form === 'cut-mixed-or-washed') return null
   const days = row.days[0]
-  return { day: dateAfter(harvestDay, days), days, sourceKey: row.sourceKey }
+  return { day: dateOfNumber(harvested + days), days, sourceKey: row.sourceKey }
 }
