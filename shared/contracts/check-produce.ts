@@ -18,7 +18,7 @@ import { sellBy } from '@/shared/domain/produce/sell-by'
  */
 export function checkProduce(lot: ProduceBody, wrong: Wrong): void {
   const crop = findCrop(lot.cropId)
-  if (!crop) wrong(['cropId'], 'Pick the crop from the list. Is yours missing? Ask us to add it.')
+  if (!crop) wrong(['cropId'], unknownCropSaying(lot.cropId))
   else checkCrop(lot, crop, wrong)
   if (lot.lotCode !== undefined && readLotCode(lot.lotCode) && !isLotCodeOf(lot.lotCode, lot.harvest.day)) {
     wrong(['lotCode'], 'The lot code names another day than the harvest. Leave it empty and we write one.')
@@ -28,6 +28,15 @@ export function checkProduce(lot: ProduceBody, wrong: Wrong): void {
   checkDeposit(lot, wrong)
   checkStock(lot, wrong)
   checkWindows(lot, wrong)
+}
+
+/** Sprouts are no oversight of the list. */
+function unknownCropSaying(typed: string): string {
+  const found = judgeWords(typed, { organic: null, form: 'whole', taxonId: null })
+  return (
+    found.find(({ rule }) => rule === 'sprouts')?.saying ??
+    'Pick the crop from the list. Is yours missing? Ask us to add it.'
+  )
 }
 
 function checkCrop(lot: ProduceBody, crop: Crop, wrong: Wrong): void {

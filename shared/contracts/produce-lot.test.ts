@@ -1,30 +1,9 @@
 import { describe, expect, it } from 'vitest'
 
 import { produceBody } from '@/shared/contracts/produce-lot'
+import { lettuce } from '@/shared/contracts/lettuce-for-tests'
 import { changeAt, issuesOf, readsWell, type Path } from '@/shared/contracts/lot-issues-for-tests'
 
-const lettuce = {
-  category: 'produce',
-  cropId: 'leaf_lettuce',
-  form: 'whole',
-  saleUnit: { kind: 'head' },
-  harvest: { day: '2027-04-12', time: '07:30', bed: 'raft 3' },
-  handling: { touchesSystemWater: 'no', rinsedInDrinkingWater: true, heldC: 1, coldAtPickup: true },
-  growing: 'On rafts, in fish water, without synthetic pesticides.',
-  standing: 'not-covered',
-  countOnHand: 14,
-  minOrder: 1,
-  orderStep: 1,
-  tiers: [{ fromCount: 1, unitCents: 300 }],
-  placeKind: 'public-place',
-  windows: [{ day: '2027-04-13', from: '17:00', until: '19:00', capacity: 10 }],
-  accept: 'instant',
-  balanceDue: 'before',
-  depositPct: 100,
-  freeCancelHours: 12,
-  photos: [{ photoId: 'a'.repeat(32), takenOn: '2027-04-12', hasRuler: false }],
-  words: '',
-}
 const farm = { name: 'Willow Run', street: '12 Mill Rd', city: 'Oxford', state: 'OH', zip: '45056' }
 const told = (...changes: [Path, unknown][]) =>
   issuesOf(
@@ -84,6 +63,11 @@ const bad: [string, [Path, unknown][], Record<string, string>][] = [
     {
       cropId: 'Pick the crop from the list. Is yours missing? Ask us to add it.',
     },
+  ],
+  [
+    'A6.6 sprouts as the crop',
+    [[['cropId'], 'alfalfa sprouts']],
+    { cropId: expect.stringContaining('Sprouts are not sold here') as string },
   ],
   [
     'G-A4 kale per bag',

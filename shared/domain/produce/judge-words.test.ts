@@ -65,9 +65,10 @@ describe('words of a produce listing', () => {
       rules('Rainbow chard grown in fish water without synthetic pesticides. Eat it the same day.'),
     ).toEqual([]))
 
-  it('reads a long text in no time', () => {
+  it('reads the longest text a listing may hold in no time, even one made to be slow', () => {
     const start = performance.now()
-    judgeWords('not '.repeat(20_000) + 'ready '.repeat(20_000) + ' '.repeat(20_000), plain)
-    expect(performance.now() - start).toBeLessThan(1500)
+    for (const part of ['not ', 'ready ', ' ', 'no-', 'brussel '])
+      judgeWords(part.repeat(2000).slice(0, 2000) + 'organic', plain)
+    expect(performance.now() - start).toBeLessThan(1000)
   })
 })

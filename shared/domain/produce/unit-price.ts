@@ -1,5 +1,6 @@
 import { printBothMasses, type SaleUnit } from '@/shared/domain/listings/sale-unit'
-import { basisMark, comparableCents, type PriceBasis } from '@/shared/domain/pricing/comparable-price'
+import { comparableCents, type PriceBasis } from '@/shared/domain/pricing/comparable-price'
+import { printComparable } from '@/shared/domain/pricing/supply-price'
 import type { Crop } from '@/shared/domain/produce/crop'
 import { printCents } from '@/shared/units/money'
 import type { UnitSystem } from '@/shared/units/unit-system'
@@ -40,7 +41,7 @@ export function unitPrice(
   const netG = unit.kind === 'weight' || unit.kind === 'bunch' ? unit.netG : undefined
   return {
     price: printPrice(unitCents, unit),
-    comparable: cents === null ? null : `${printCents(cents)}/${basisMark(basis)}`,
+    comparable: printComparable(unitCents, unit, basis),
     comparableCents: cents,
     basis: cents === null ? null : basis,
     netWeight: netG === undefined ? null : `Net weight ${printBothMasses(netG)}, without box or root ball.`,
