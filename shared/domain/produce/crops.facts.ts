@@ -79,7 +79,7 @@ export const crops: readonly Crop[] = [
   // Published tables say 8-10 °C and above 10 °C; the leaf was seen to suffer below 12 °C, so that is our least.
   crop('herb', { id: 'basil', name: 'Basil', alsoCalled: ['sweet basil', 'Genovese basil', 'Thai basil'], storeC: [12, 15], humidityPct: [90, 95], chillsBelowC: 12, sourceKeys: ['lange-cameron-1994', 'house-rule', guide], keeps: [
     { fromC: 4, toC: 6, days: [3, 4], sourceKey: 'lange-cameron-1997' },
-    { fromC: 8, toC: 10, days: [4, 7], sourceKey: guide },
+    { fromC: 7.7, toC: 10, days: [4, 7], sourceKey: guide },
     { fromC: 10, toC: 15, days: [7, 14], sourceKey: 'ucd-produce-facts' },
   ] }),
   crop('herb', { id: 'parsley', name: 'Parsley', storeC: [0, 0], humidityPct: [95, 95], keeps: nearFreezing([30, 60], guide), sourceKeys: [guide] }),
@@ -94,6 +94,6 @@ export const crops: readonly Crop[] = [
   crop('fruit', { id: 'cucumber', name: 'Cucumbers', storeC: [10, 10], humidityPct: [90, 95], keeps: [{ fromC: 10, toC: 12, days: [7, 14], sourceKey: guide }], chillsBelowC: 10, sourceKeys: [guide] }),
   crop('fruit', { id: 'pepper', name: 'Peppers', alsoCalled: ['bell pepper', 'sweet pepper', 'chili', 'jalapeno'], storeC: [7, 10], humidityPct: [90, 95], keeps: [{ fromC: 7, toC: 10, days: [14, 21], sourceKey: guide }], chillsBelowC: 7, sourceKeys: [guide] }),
   crop('fruit', { id: 'tomato', name: 'Tomatoes', alsoCalled: ['ripe tomato', 'cherry tomato', 'grape tomato'], storeC: [7, 13], humidityPct: [85, 90], keeps: [{ fromC: 7, toC: 13, days: [7, 14], sourceKey: 'hb66-1954' }], chillsBelowC: 7, soldBy: ['weight', 'each', 'dry-pint'], sourceKeys: ['hb66-1954'] }),
-  crop('fruit', { id: 'green_tomato', name: 'Green tomatoes', alsoCalled: ['mature green tomato'], storeC: [13, 16], humidityPct: [85, 90], keeps: [{ fromC: 13, toC: 16, days: [7, 14], sourceKey: 'hb66-1954' }], chillsBelowC: 13, soldBy: ['weight', 'each', 'dry-pint'], sourceKeys: ['hb66-1954'] }),
+  crop('fruit', { id: 'green_tomato', name: 'Green tomatoes', alsoCalled: ['mature green tomato'], storeC: [12.8, 15.6], humidityPct: [85, 90], keeps: [{ fromC: 12.7, toC: 15.6, days: [7, 14], sourceKey: 'hb66-1954' }], chillsBelowC: 12.7, soldBy: ['weight', 'each', 'dry-pint'], sourceKeys: ['hb66-1954'] }),
   crop('berry', { id: 'strawberry', name: 'Strawberries', storeC: [0, 0], humidityPct: [90, 95], keeps: nearFreezing([5, 7], 'memory'), sourceKeys: ['memory'] }),
 ]

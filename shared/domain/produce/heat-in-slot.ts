@@ -37,6 +37,6 @@ export function adviseSlotHeat({ warmestC, untilHour, crop }: SlotHeat): SlotAdv
   return {
     verdict: 'caution',
     cooler,
-    caution: `${crop.name} wilt fast at ${air}. A slot that ends by 11:00 would be kinder; keep them cold until the hand-over.`,
+    caution: `${crop.name}: wilts fast at ${air}. A slot that ends by 11:00 would be kinder; keep it cold until the hand-over.`,
   }
 }

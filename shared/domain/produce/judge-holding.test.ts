@@ -21,7 +21,7 @@ describe('how a harvest is held', () => {
   it('warns of cold for basil and of fish water on leaves, and blocks neither', () => {
     const held = { form: 'whole', rinsedInDrinkingWater: false } as const
     expect(adviseHolding({ ...held, crop: crop('basil'), heldC: 4, touchesSystemWater: 'no' })).toEqual([
-      'Basil: colder than 54 °F (12 °C) harms them. Keep them less cold.',
+      'Basil: harmed below 54 °F (12 °C). Keep it less cold.',
     ])
     expect(
       adviseHolding({ ...held, crop: crop('kale'), heldC: 1, touchesSystemWater: 'not-sure' })[0],

@@ -32,7 +32,7 @@ export function adviseHolding(held: Held): string[] {
   const told: string[] = []
   if (crop.chillsBelowC !== null && heldC < crop.chillsBelowC) {
     told.push(
-      `${crop.name}: colder than ${printBothTemperatures(crop.chillsBelowC, 'us')} harms them. Keep them less cold.`,
+      `${crop.name}: harmed below ${printBothTemperatures(crop.chillsBelowC, 'us')}. Keep it less cold.`,
     )
   }
   if (touchesSystemWater !== 'no') {

@@ -12,7 +12,7 @@ import type { Check } from './check'
 type Row = readonly [crop: string, heldF: number, days: readonly [number, number]]
 
 const guide: readonly Row[] = [
-  ['basil', 46.5, [4, 7]],
+  ['basil', 46, [4, 7]],
   ['basil', 50, [4, 7]],
   ['leaf_lettuce', 32, [7, 7]],
   ['bibb_lettuce', 34, [7, 7]],
@@ -35,8 +35,10 @@ const davis: readonly Row[] = [
   ['basil', 54, [7, 14]],
 ]
 const handbook1954: readonly Row[] = [
-  ['tomato', 50, [7, 14]],
-  ['green_tomato', 57, [7, 14]],
+  ['tomato', 45, [7, 14]],
+  ['tomato', 55, [7, 14]],
+  ['green_tomato', 55, [7, 14]],
+  ['green_tomato', 60, [7, 14]],
 ]
 const sweetBasil: readonly Row[] = [['basil', 41, [3, 4]]]
 
