@@ -1,6 +1,8 @@
 import { z } from 'zod'
 
-import { cents, dayText, line, photoId, stateCode, words } from '@/shared/contracts/values'
+import { checkStock, checkWindows } from '@/shared/contracts/check-lot'
+import { batchPhoto, pickupTerms, stockTerms, tierOf, wholeCount } from '@/shared/contracts/lot-terms'
+import { cents, dayText, line, stateCode, words } from '@/shared/contracts/values'
 import { shipDays } from '@/shared/domain/shipping/ship-days'
 import { packingClasses } from '@/shared/domain/season/season-classes.facts'
 import { packingClassIds } from '@/shared/domain/season/season-lane'
@@ -17,28 +19,9 @@ const quarterInches = z
     'In quarter-inch steps.',
   )
 
-const wholeCount = (least: number, saying: string) =>
-  z.int({ message: saying }).min(least, saying).max(1_000_000)
-
-export const priceTier = z
-  .object({ fromCount: wholeCount(1, 'From how many?'), unitCents: cents.min(1, 'A price for each animal.') })
-  .strict()
+export const priceTier = tierOf(cents.min(1, 'A price for each animal.'), {})
 export type PriceTier = z.output<typeof priceTier>
-
-/** A pickup window as the seller types it: a day and two times in the zone of the place. */
-export const typedWindow = z
-  .object({
-    day: dayText,
-    from: z.string().regex(/^\d{2}:\d{2}$/, 'A time, like 09:00.'),
-    until: z.string().regex(/^\d{2}:\d{2}$/, 'A time, like 10:00.'),
-    capacity: z.int({ message: 'How many buyers fit?' }).min(1, 'At least one buyer.').max(500),
-  })
-  .strict()
-export type TypedWindow = z.output<typeof typedWindow>
-
-export const batchPhoto = z
-  .object({ photoId, takenOn: dayText, hasRuler: z.boolean(), caption: line(120).optional() })
-  .strict()
+export type { TypedWindow } from '@/shared/contracts/lot-terms'
 
 /** How a batch may be shipped, to the states it is sold to; the packing says whether it is one night or two days. */
 export const batchShipping = z
@@ -82,11 +65,7 @@ export const fishBody = z
     ungraded: z.boolean(),
     hatchedOn: dayText,
     readyOn: dayText.optional(),
-    countOnHand: wholeCount(1, 'How many are there to sell?'),
-    minOrder: wholeCount(1, 'The smallest order.'),
-    orderStep: wholeCount(1, 'Sold in steps of how many?'),
-    mostPerBuyer: wholeCount(1, 'A number, or leave it empty.').optional(),
-    tiers: z.array(priceTier).min(1, 'Give at least one price.').max(8, 'At most eight prices.'),
+    ...stockTerms(priceTier, {}),
     countMethod: z.enum(['hand', 'sample-weight', 'displacement'], { message: 'How do you count?' }),
     overcountPct: z.int().min(0).max(15, 'At most 15 %.'),
     sex: z.enum(['mixed', 'all-male', 'unknown'], { message: 'Mixed, all-male or unknown?' }),
@@ -122,10 +101,7 @@ export const fishBody = z
     }),
     licenceNumbers: words(300).min(1, 'Your licence or permit numbers, or "none needed" and why.'),
     statesServed: z.array(stateCode).min(1, 'Which states do you serve?').max(51),
-    placeKind: z.enum(['farm-gate', 'public-place'], { message: 'Where do people collect?' }),
-    windows: z.array(typedWindow).min(1, 'Offer at least one pickup window.').max(40),
-    accept: z.enum(['instant', 'ask']),
-    balanceDue: z.enum(['at-handover', 'before']),
+    ...pickupTerms({}),
     depositPct: z.int({ message: '10 to 50 %.' }).min(10, '10 to 50 %.').max(50, '10 to 50 %.'),
     freeCancelHours: z.int().min(12).max(336),
     promise: z
@@ -149,23 +125,7 @@ export const fishBody = z
     if (batch.sizeHiMm - batch.sizeLoMm > TWO_INCHES_MM + 0.01 && !batch.ungraded) {
       wrong(['ungraded'], 'A spread of more than 2 inches is an ungraded batch: tick it, or grade them.')
     }
-    batch.tiers.forEach((tier, at) => {
-      const before = batch.tiers[at - 1]
-      if (before && tier.fromCount <= before.fromCount) {
-        wrong(['tiers', at, 'fromCount'], 'Each price starts at a larger count than the one before.')
-      }
-      if (before && tier.unitCents >= before.unitCents) {
-        wrong(['tiers', at, 'unitCents'], 'The price must fall as the count grows.')
-      }
-    })
-    const first = batch.tiers[0]
-    if (first && first.fromCount > batch.minOrder) {
-      wrong(['tiers', 0, 'fromCount'], 'The first price must cover your smallest order.')
-    }
-    if (batch.minOrder > batch.countOnHand) wrong(['minOrder'], 'The smallest order is more than you have.')
-    if (batch.mostPerBuyer !== undefined && batch.mostPerBuyer < batch.minOrder) {
-      wrong(['mostPerBuyer'], 'The most for one buyer is below your smallest order.')
-    }
+    checkStock(batch, wrong)
     if (batch.origin === 'bought-in' && !batch.originState) wrong(['originState'], 'From which state?')
     if (!batch.photos.some((photo) => photo.hasRuler)) {
       wrong(['photos'], 'One photo must show the animals beside a ruler.')
@@ -177,8 +137,6 @@ export const fishBody = z
         'Two days on the way: ship on Monday or Tuesday, so that no box waits over a weekend.',
       )
     }
-    batch.windows.forEach((window, at) => {
-      if (window.until <= window.from) wrong(['windows', at, 'until'], 'The window must end after it starts.')
-    })
+    checkWindows(batch, wrong)
   })
 export type FishBody = z.output<typeof fishBody>

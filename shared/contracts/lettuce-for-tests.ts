@@ -1,0 +1,23 @@
+/** Fourteen heads of one evening, as a grower posts them. */
+export const lettuce = {
+  category: 'produce',
+  cropId: 'leaf_lettuce',
+  form: 'whole',
+  saleUnit: { kind: 'head' },
+  harvest: { day: '2027-04-12', time: '07:30', bed: 'raft 3' },
+  handling: { touchesSystemWater: 'no', rinsedInDrinkingWater: true, heldC: 1, coldAtPickup: true },
+  growing: 'On rafts, in fish water, without synthetic pesticides.',
+  standing: 'not-covered',
+  countOnHand: 14,
+  minOrder: 1,
+  orderStep: 1,
+  tiers: [{ fromCount: 1, unitCents: 300 }],
+  placeKind: 'public-place',
+  windows: [{ day: '2027-04-13', from: '17:00', until: '19:00', capacity: 10 }],
+  accept: 'instant',
+  balanceDue: 'before',
+  depositPct: 100,
+  freeCancelHours: 12,
+  photos: [{ photoId: 'a'.repeat(32), takenOn: '2027-04-12', hasRuler: false }],
+  words: '',
+}
