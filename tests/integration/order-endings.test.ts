@@ -157,6 +157,13 @@ describe('clocks that nobody beats', () => {
     })
   })
 
+  it('lets an order run whose balance came in time, however late the seller marks it ready', async () => {
+    const { seen, slot, payBalance } = await paid('paid-in-time', { before: true })
+    await payBalance()
+    await desk.travelTo(new Date(slot.startsAt.getTime() - 23 * HOUR))
+    expect(await seen()).toMatchObject({ state: 'scheduled', balancePaid: true, clock: { edge: 'E26' } })
+  })
+
   it('refunds everything when the seller lets the day pass', async () => {
     const before = (await desk.db.select().from(seller))[0]?.daysMissed ?? 0
     const { seen, slot, stock } = await paid('missed-day')
