@@ -158,10 +158,11 @@ describe('clocks that nobody beats', () => {
   })
 
   it('lets an order run whose balance came in time, however late the seller marks it ready', async () => {
-    const { seen, slot, payBalance } = await paid('paid-in-time', { before: true })
+    const { seen, slot, payBalance, act, hatchery } = await paid('paid-in-time', { before: true })
     await payBalance()
     await desk.travelTo(new Date(slot.startsAt.getTime() - 23 * HOUR))
     expect(await seen()).toMatchObject({ state: 'scheduled', balancePaid: true, clock: { edge: 'E26' } })
+    await act(hatchery, 'cancellation', { reason: 'other' })
   })
 
   it('refunds everything when the seller lets the day pass', async () => {
