@@ -27,6 +27,17 @@ import { answerSurvival } from '@/server/ratings/answer-survival'
 import { askSurvival } from '@/server/ratings/ask-survival'
 import { rateOrder } from '@/server/ratings/rate-order'
 import { replyToRating } from '@/server/ratings/reply-to-rating'
+import { checkRoute } from '@/server/shipping/check-route'
+import { dispatchOrder } from '@/server/shipping/dispatch-order'
+import { listOrderShipDays } from '@/server/shipping/list-order-ship-days'
+import { keepRoutePapers } from '@/server/shipping/keep-route-papers'
+import { showOrder } from '@/server/orders/show-order'
+import { after, DAY_MS } from '@/seed/demo/timeline'
+import { reportArrival } from '@/server/shipping/report-arrival'
+import { requirePlace } from '@/server/places/find-place'
+import { holdForWeather } from '@/server/weather/hold-for-weather'
+import { packingTicks } from '@/shared/contracts/ship-acts'
+import { seededRandom } from '@/seed/seeded-random'
 import type { ShownOrder } from '@/shared/contracts/orders'
 
 /** A practice card that goes through. */
@@ -59,6 +70,12 @@ export interface OrderDesk {
   decide: () => Promise<void>
   stop: () => Promise<void>
   ring: () => Promise<void>
+  namePapers: () => Promise<void>
+  checkRoute: () => Promise<void>
+  dispatch: () => Promise<void>
+  arrive: () => Promise<void>
+  /** The seller sees the sky, and proposes the next day that is offered. */
+  holdForWeather: () => Promise<void>
 }
 
 /** Pays an open page as a person does and comes back from it, which is when the product asks how it went. */
@@ -68,8 +85,20 @@ async function payOn(order: ShownOrder, { caller }: Actor): Promise<void> {
   for (const payment of await listPayments(id)) await refreshPayment(payment)
 }
 
+const trackingOf = (key: string) =>
+  `DEMO ${String(seededRandom(`tracking ${key}`).whole(1_000_000, 9_999_999))}`
+
+async function boxFor({ buyer }: OrderPlan, { shipDay, street }: NonNullable<OrderPlan['ship']>) {
+  const { label, state } = await requirePlace(buyer.zip, '#/near')
+  const address = {
+    ...{ name: buyer.caller.name, street, city: label.split(',')[0] ?? label, state, zip: buyer.zip },
+    phone: '(555) 010-0142',
+  }
+  return { shipDay, deliverTo: 'counter' as const, address }
+}
+
 export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator: Actor): OrderDesk {
-  const { buyer, batch, quantity, payMode, slot } = plan
+  const { buyer, batch, quantity, payMode, slot, ship } = plan
   const by = { buyer: buyer.caller, seller: batch.farm.owner.caller } as const
   const told = planRating(plan.key)
   let placed: ShownOrder | undefined
@@ -90,7 +119,8 @@ export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator:
       placed = await reserveBatch(by.buyer, listingId, {
         ...{ quantity, payMode, commandId, near: buyer.zip, version: shown.version },
         ticked: shown.gate?.ticks.map((tick) => tick.id) ?? [],
-        ...(slot ? { windowId: need(window, `window of ${plan.key}`).windowId } : {}),
+        ...(slot && !ship ? { windowId: need(window, `window of ${plan.key}`).windowId } : {}),
+        ...(ship ? { ship: await boxFor(plan, ship) } : {}),
       })
     }),
     payDeposit: act('pay', async () => payOn(need(placed, plan.key), buyer)),
@@ -156,5 +186,31 @@ export function openOrderDesk(plan: OrderPlan, listings: ListingDesk, moderator:
       }),
     ),
     ring: act('ring', () => ringClocks()),
+    namePapers: act('name papers', async () => {
+      const { shipment } = await showOrder(by.seller, id())
+      const [issuedOn, expiresOn] = [
+        after(plan.reservedAt, -200 * DAY_MS),
+        after(plan.reservedAt, 165 * DAY_MS),
+      ].map((at) => at.toISOString().slice(0, 10))
+      const papers = (shipment?.papersNeeded ?? []).map((kind) => ({
+        ...{ kind, number: `D-${kind.length}${plan.key.length}07`, issuer: 'Demonstration office' },
+        ...{ issuedOn: need(issuedOn, 'day'), expiresOn: need(expiresOn, 'day') },
+      }))
+      if (papers.length > 0) await keepRoutePapers(by.seller, id(), papers)
+    }),
+    checkRoute: act('check route', () => checkRoute(by.seller, id())),
+    dispatch: act('dispatch', (commandId) =>
+      dispatchOrder(by.seller, id(), { commandId, tracking: trackingOf(plan.key), ticks: [...packingTicks] }),
+    ),
+    arrive: act('arrive', (commandId) => reportArrival(by.buyer, id(), commandId)),
+    holdForWeather: act('hold', async (commandId) => {
+      const { days } = await listOrderShipDays(by.seller, id())
+      const later = days.find((day) => day.verdict === 'safe' && day.shipDay !== plan.ship?.shipDay)
+      await holdForWeather(by.seller, id(), {
+        commandId,
+        why: 'Freezing rain is forecast for the hub; the truck may stand all night.',
+        ...(later ? { shipDay: later.shipDay } : {}),
+      })
+    }),
   }
 }

@@ -1,6 +1,7 @@
 import type { OrderDesk } from '@/seed/demo/order-desk'
 import type { OrderPath } from '@/seed/demo/order-story.facts'
 import type { OrderPlan } from '@/seed/demo/plan-orders'
+import type { ShipPath } from '@/seed/demo/ship-story.facts'
 import { after, DAY_MS, HOUR_MS, MINUTE_MS, type Step } from '@/seed/demo/timeline'
 
 type Timed = readonly [at: Date, act: keyof OrderDesk]
@@ -50,7 +51,34 @@ const cancelled = (times: Times, by: 'buyer' | 'seller', at: Date): Timed[] => [
   [at, by === 'buyer' ? 'cancelAsBuyer' : 'cancelAsSeller'],
 ]
 
-const paths: Record<OrderPath, (times: Times) => Timed[]> = {
+/** Ordered, paid and counted; a step that lies ahead is left to the people of the demo. */
+const boxed = (times: Times): Timed[] => [
+  ...agreed(times),
+  [after(times.reserved, 8 * HOUR_MS), 'payBalance'],
+  [after(times.begins, -13 * HOUR_MS), 'namePapers'],
+  [after(times.begins, -12 * HOUR_MS), 'markReady'],
+]
+const sent = (times: Times): Timed[] => [
+  ...boxed(times),
+  [after(times.begins, 8 * HOUR_MS), 'checkRoute'],
+  [after(times.begins, 8 * HOUR_MS + 10 * MINUTE_MS), 'dispatch'],
+]
+
+const paths: Record<OrderPath | ShipPath, (times: Times) => Timed[]> = {
+  'ship-settled': (times) => [
+    ...sent(times),
+    [after(times.begins, 28 * HOUR_MS), 'arrive'],
+    [after(times.begins, 33 * HOUR_MS), 'confirm'],
+    ...afterwards({ ...times, begins: after(times.begins, DAY_MS) }),
+  ],
+  // Promised for 20:00 of the day after, and 36 hours more: nobody said that it came.
+  'ship-late': (times) => [...sent(times), [after(times.begins, 75 * HOUR_MS), 'ring']],
+  'ship-leaving': (times) => boxed(times).filter(([at]) => at < times.now),
+  'ship-coming': (times) => boxed(times).filter(([at]) => at < times.now),
+  'ship-held': (times) => [
+    ...boxed(times).filter(([at]) => at < times.now),
+    [after(times.now, -90 * MINUTE_MS), 'holdForWeather'],
+  ],
   confirmed: (times) => [
     ...handedOver(times),
     [after(times.begins, 5 * HOUR_MS), 'confirm'],

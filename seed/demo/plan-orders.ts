@@ -1,5 +1,6 @@
 import type { BatchPlan } from '@/seed/demo/batch-plan'
 import { orderPaths, type OrderPath, type PathFacts } from '@/seed/demo/order-story.facts'
+import type { ShipPath } from '@/seed/demo/ship-story.facts'
 import { slotAfter, slotBefore, type Slot } from '@/seed/demo/pickup-times'
 import { need, type Actor, type Stage } from '@/seed/demo/stage'
 import { after, DAY_MS, HOUR_MS, MINUTE_MS } from '@/seed/demo/timeline'
@@ -7,7 +8,7 @@ import { seededRandom, type Chance } from '@/seed/seeded-random'
 
 export interface OrderPlan {
   key: string
-  path: OrderPath
+  path: OrderPath | ShipPath
   batch: BatchPlan
   buyer: Actor
   quantity: number
@@ -15,6 +16,8 @@ export interface OrderPlan {
   /** null: the batch offers no day any more. */
   slot: Slot | null
   reservedAt: Date
+  /** Set where the animals go by box; the slot is then the ship day. */
+  ship?: { shipDay: string; street: string }
 }
 
 /** Kinds that people of all three states may buy of each other, as the demonstration's rows have it. */

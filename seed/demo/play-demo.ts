@@ -3,6 +3,7 @@ import { seedDemo } from '@/seed/demo/seed-demo'
 import { openWebhookDoor } from '@/seed/demo/webhook-door'
 import { openAuth } from '@/server/auth/auth'
 import { readSettings } from '@/server/env'
+import { configureForecast } from '@/server/forecast/forecast-settings'
 import { log } from '@/server/log'
 import { configureOrders } from '@/server/orders/order-settings'
 import { configurePhotos } from '@/server/photos/photo-files'
@@ -18,6 +19,7 @@ export async function playDemo(options: { say: (line: string) => void }): Promis
   const { hostname: host, port, protocol } = new URL(processor)
   openAuth({ secret: settings.AUTH_SECRET, origin, alsoTrusted: [] })
   configureOrders({ origin, feeBp: settings.FEE_BP })
+  configureForecast({ url: settings.FORECAST_URL ?? null })
   configurePhotos({ dir: settings.UPLOAD_DIR })
   configurePayments({
     secretKey: settings.STRIPE_SECRET_KEY,

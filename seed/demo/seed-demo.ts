@@ -8,6 +8,7 @@ import { openOrderDesk } from '@/seed/demo/order-desk'
 import { orderSteps } from '@/seed/demo/order-steps'
 import { openPhotoDesk } from '@/seed/demo/photo-desk'
 import { planBatches } from '@/seed/demo/plan-batches'
+import { planShipped } from '@/seed/demo/plan-shipped'
 import { planOrders } from '@/seed/demo/plan-orders'
 import { planQueueStories } from '@/seed/demo/queue-stories'
 import { need, type Stage } from '@/seed/demo/stage'
@@ -65,7 +66,7 @@ export async function seedDemo(options: DemoOptions): Promise<void> {
   const stage = await setStage(options, at)
   const batches = planBatches(stage)
   const stories = planQueueStories(stage)
-  const orders = planOrders(stage, batches)
+  const orders = [...planOrders(stage, batches), ...planShipped(stage, batches)]
   const isIdle = (plan: BatchPlan) => !orders.some((order) => order.batch === plan)
   const plans = [...batches, ...stories.map((story) => story.plan)]
   const photos = await openPhotoDesk(
