@@ -61,12 +61,15 @@ type PlainAct =
   | 'payBalance'
   | 'confirmGood'
 
-function useKeepOrder() {
+/** What an act on an order changes: the order itself, and every list that shows it. */
+export function useKeepOrder() {
   const client = useQueryClient()
   return (order: ShownOrder) => {
     client.setQueryData(['orders', order.orderId], order)
     void client.invalidateQueries({ queryKey: ['orders', 'list'] })
     void client.invalidateQueries({ queryKey: ['listings'] })
+    void client.invalidateQueries({ queryKey: ['ship-days'] })
+    void client.invalidateQueries({ queryKey: ['routes'] })
     void client.invalidateQueries({ queryKey: ['me'] })
     void client.invalidateQueries({ queryKey: ['notices'] })
   }

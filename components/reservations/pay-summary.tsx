@@ -1,5 +1,7 @@
 import { StyleSheet, View } from 'react-native'
 
+import { quoteCount, type Quote, type Way } from './reservation'
+
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import { RadioGroup } from '@/components/ui/radio-group'
@@ -8,11 +10,10 @@ import { space } from '@/constants/theme'
 import type { ShownListing } from '@/shared/contracts/listings'
 import { printCents } from '@/shared/units/money'
 
-import type { quoteReservation } from './reservation'
-
 interface Props {
   listing: ShownListing
-  quote: NonNullable<ReturnType<typeof quoteReservation>>
+  quote: Quote
+  way: Way
   mode: 'deposit' | 'full'
   mayFull: boolean
   onMode: (mode: 'deposit' | 'full') => void
@@ -29,19 +30,42 @@ function Line({ name, cents, isStrong }: { name: string; cents: number; isStrong
   )
 }
 
+/** "2 boxes", "1 box". */
+const boxesWords = (boxes: number) => (boxes === 1 ? '1 box' : `${boxes} boxes`)
+
+/** Box and freight, and what one animal comes to at the door beside the gate. */
+function ShippedLines({ listing, quote }: Pick<Props, 'listing' | 'quote'>) {
+  const { boxes, boxCents, freightCents, totalCents, landedCents, quantity } = quote
+  return (
+    <>
+      <Line name={`Packing, ${boxesWords(boxes)}`} cents={boxCents} />
+      <Line name={`Freight, ${boxesWords(boxes)}`} cents={freightCents} />
+      <Line name="Total" cents={totalCents} isStrong />
+      <View style={styles.each}>
+        <Line name="Each animal at your end, all in" cents={landedCents} isStrong />
+        <Line name="Each if you collect them" cents={quoteCount(listing, quantity, 'collect').landedCents} />
+      </View>
+    </>
+  )
+}
+
 /** Every cent and what it is for, before anything is taken. */
-export function PaySummary({ listing, quote, mode, mayFull, onMode }: Props) {
+export function PaySummary({ listing, quote, way, mode, mayFull, onMode }: Props) {
   const { accept, balanceDue, freeCancelHours, depositPct } = listing.body
+  const isShipped = way === 'ship'
   const now = mode === 'full' ? quote.totalCents : quote.depositCents
   const later = quote.totalCents - now
-  const unitCents = Math.round(quote.goodsCents / quote.quantity)
   return (
     <Card labelledBy="pay-summary">
       <Heading level={2} size="lead" nativeID="pay-summary">
         What you pay
       </Heading>
-      <Line name={`${quote.quantity} × ${printCents(unitCents)}`} cents={quote.goodsCents} />
-      <Line name="Total" cents={quote.totalCents} isStrong />
+      <Line name={`${quote.quantity} × ${printCents(quote.unitCents)}`} cents={quote.goodsCents} />
+      {isShipped ? (
+        <ShippedLines listing={listing} quote={quote} />
+      ) : (
+        <Line name="Total" cents={quote.totalCents} isStrong />
+      )}
       {mayFull ? (
         <RadioGroup
           label="Pay now"
@@ -56,7 +80,7 @@ export function PaySummary({ listing, quote, mode, mayFull, onMode }: Props) {
             {
               value: 'full',
               label: `Everything, ${printCents(quote.totalCents)}`,
-              hint: 'One payment, nothing at the gate',
+              hint: isShipped ? 'One payment, nothing more to do' : 'One payment, nothing at the gate',
             },
           ]}
         />
@@ -66,18 +90,9 @@ export function PaySummary({ listing, quote, mode, mayFull, onMode }: Props) {
         cents={now}
         isStrong
       />
-      {later > 0 ? (
-        <Line
-          name={
-            balanceDue === 'before'
-              ? 'Balance, due 48 hours before'
-              : 'Balance, paid on your phone at the gate'
-          }
-          cents={later}
-        />
-      ) : null}
+      {later > 0 ? <Line name={balanceWords(isShipped, balanceDue)} cents={later} /> : null}
       <Text size="note" tint="muted">
-        {`Free to cancel until ${freeCancelHours} hours before the pickup time; after that the seller may keep up to the deposit of ${printCents(quote.depositCents)}. If the seller cancels you get every cent back.`}
+        {`Free to cancel until ${freeCancelHours} hours before the ${isShipped ? 'ship day' : 'pickup time'}; after that the seller may keep up to the deposit of ${printCents(quote.depositCents)}. ${isShipped ? 'If the seller cancels, or the weather stops the day and you do not want another, you get every cent back.' : 'If the seller cancels you get every cent back.'}`}
       </Text>
       <Text size="note" tint="muted">
         Your money is held by our payment processor until you confirm, or until the claim window ends.
@@ -86,7 +101,13 @@ export function PaySummary({ listing, quote, mode, mayFull, onMode }: Props) {
   )
 }
 
+function balanceWords(isShipped: boolean, balanceDue: ShownListing['body']['balanceDue']): string {
+  if (isShipped) return 'Balance, due 48 hours before the ship day'
+  return balanceDue === 'before' ? 'Balance, due 48 hours before' : 'Balance, paid on your phone at the gate'
+}
+
 const styles = StyleSheet.create({
   line: { flexDirection: 'row', gap: space.md },
   name: { flex: 1 },
+  each: { gap: space.xs },
 })

@@ -1,3 +1,4 @@
+import type { Way } from '@/components/reservations/reservation'
 import { ReserveBatchForm } from '@/components/reservations/reserve-batch-form'
 import { Page } from '@/components/layout/page'
 import { ButtonLink } from '@/components/ui/button-link'
@@ -13,10 +14,12 @@ interface Props {
   listingId: string
   /** From the listing page's count field. */
   count: string | undefined
+  /** What was chosen there: collected, where the link says nothing. */
+  way: Way
 }
 
 /** The step between a listing and its payment page: how many, when, under which statements, for how much. */
-export function ReserveBatch({ listingId, count }: Props) {
+export function ReserveBatch({ listingId, count, way }: Props) {
   const { place, isKnown } = useCurrentPlace()
   const { me, isPending: isAsking } = useMe()
   const listing = useListing(listingId, place?.near, isKnown)
@@ -44,7 +47,8 @@ export function ReserveBatch({ listingId, count }: Props) {
     )
   }
   if (!me) {
-    const returnTo = encodeURIComponent(`/listings/${listingId}/reserve${count ? `?count=${count}` : ''}`)
+    const chosen = new URLSearchParams({ ...(count ? { count } : {}), ...(way === 'ship' ? { way } : {}) })
+    const returnTo = encodeURIComponent(`/listings/${listingId}/reserve?${chosen}`)
     return (
       <Page title={title} back={back} width="readable">
         <EmptyState
@@ -57,7 +61,7 @@ export function ReserveBatch({ listingId, count }: Props) {
   }
   return (
     <Page title={title} back={back} width="readable">
-      <ReserveBatchForm key={listing.data.version} listing={listing.data} count={count} />
+      <ReserveBatchForm key={listing.data.version} listing={listing.data} count={count} wantedWay={way} />
     </Page>
   )
 }

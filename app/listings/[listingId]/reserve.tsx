@@ -8,10 +8,14 @@ const ReserveBatch = lazy(() =>
 )
 
 export default function ReservePage() {
-  const { listingId, count } = useLocalSearchParams<{ listingId: string; count?: string }>()
+  const { listingId, count, way } = useLocalSearchParams<{
+    listingId: string
+    count?: string
+    way?: string
+  }>()
   return (
     <LazyPart label="Loading the reservation">
-      <ReserveBatch listingId={listingId} count={count} />
+      <ReserveBatch listingId={listingId} count={count} way={way === 'ship' ? 'ship' : 'collect'} />
     </LazyPart>
   )
 }
