@@ -5,7 +5,6 @@ import { appliedWords } from './applied-words'
 import type { Sort } from './find-params'
 import type { Find } from './use-find'
 
-import { ShippingNote } from '@/components/listings/shipping-note'
 import { Button } from '@/components/ui/button'
 import { HiddenText } from '@/components/ui/hidden-text'
 import { Text } from '@/components/ui/text'
@@ -51,7 +50,6 @@ export function ResultHead({ find, onFilters, view, onView }: Props) {
           {said}
         </Text>
       ) : null}
-      <ShippingNote listings={find.found} />
       <HiddenText isLive>{find.search.isFetching ? '' : said}</HiddenText>
     </View>
   )

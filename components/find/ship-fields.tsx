@@ -2,7 +2,7 @@ import { StyleSheet, View } from 'react-native'
 
 import type { FindState } from './find-params'
 
-import { notYetSold, shortDay } from '@/components/listings/shipping-words'
+import { shortDay } from '@/components/listings/shipping-words'
 import { Checkbox } from '@/components/ui/checkbox'
 import { Select } from '@/components/ui/select'
 import { space } from '@/constants/theme'
@@ -26,7 +26,7 @@ export function ShipFields({ state: { shipWeek }, thisMonday, onChange }: Props)
     <View style={styles.frame}>
       <Checkbox
         label="Can be shipped to me in the week of …"
-        hint={notYetSold}
+        hint="The day itself is looked at again when you order."
         isChecked={chosen !== undefined}
         onChange={(isOn) => onChange({ shipWeek: isOn ? thisWeek : undefined })}
       />

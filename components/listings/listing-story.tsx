@@ -54,6 +54,10 @@ const ListingShipping = lazy(() =>
   import('@/components/tools/tools-group').then((group) => ({ default: group.ListingShipping })),
 )
 
+const ListingShipDays = lazy(() =>
+  import('@/components/orders/orders-group').then((group) => ({ default: group.ListingShipDays })),
+)
+
 export function ListingStory(props: Props) {
   const { listing, count, limits, refusal, placeLabel, near, onCount, onPlace } = props
   const units = useUnits()
@@ -95,7 +99,11 @@ export function ListingStory(props: Props) {
             ) : null}
             {body.shipping ? (
               <LazyPart label="Loading the shipping season">
-                <ListingShipping listing={listing} />
+                <ListingShipping listing={listing}>
+                  <LazyPart label="Loading the next ship days">
+                    <ListingShipDays listing={listing} count={count} near={near} canBuy={canBuy} />
+                  </LazyPart>
+                </ListingShipping>
               </LazyPart>
             ) : null}
             <BatchFacts body={body} />

@@ -3,9 +3,6 @@ import type { TagBadge } from './tag-facts'
 import type { ShipDay } from '@/shared/domain/shipping/ship-days'
 import type { ShippedTo } from '@/shared/contracts/shipping'
 
-/** Stands wherever a buyer reads of shipping, as long as nobody can order it. */
-export const notYetSold = 'Shipping is announced, not yet sold here: ask for pickup.'
-
 export const shipDayNames: Record<ShipDay, string> = { mon: 'Monday', tue: 'Tuesday', wed: 'Wednesday' }
 
 export const canBeShipped: TagBadge = { word: 'Can be shipped', tone: 'neutral', icon: 'truck' }

@@ -2,3 +2,4 @@
 export { OrderPage } from './order-page'
 export { OrdersHome } from './orders-home'
 export { ReserveBatch } from '../reservations/reserve-batch'
+export { ListingShipDays } from '../shipping/listing-ship-days'

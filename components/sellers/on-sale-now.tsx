@@ -1,7 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
 import { foundFacts } from '@/components/find/found-facts'
-import { ShippingNote } from '@/components/listings/shipping-note'
 import { Tag } from '@/components/listings/tag'
 import { TagSkeleton } from '@/components/listings/tag-skeleton'
 import { Button } from '@/components/ui/button'
@@ -55,7 +54,6 @@ function Rows({ sellerId }: { sellerId: string }) {
   const asked = { units, count: undefined, state: place?.state, near: undefined }
   return (
     <>
-      <ShippingNote listings={listings} />
       <View role="list" aria-label="On sale now" style={styles.list}>
         {listings.map((listing) => (
           <View key={listing.listingId} role="listitem">

@@ -6,7 +6,6 @@ import { basisWords, reasonsAgainst, verdictLook } from './ship-day-words'
 import { Icon } from '@/components/ui/icon'
 import { Text } from '@/components/ui/text'
 import { toneTint } from '@/components/ui/tone'
-import { space } from '@/constants/theme'
 import { useUnits } from '@/hooks/use-units'
 import type { ShipDayOffer } from '@/shared/contracts/shipments'
 

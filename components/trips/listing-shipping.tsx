@@ -1,7 +1,9 @@
+import type { ReactNode } from 'react'
+
 import { packingWords } from './packing-words'
 import { SeasonStrip } from './season-strip'
 
-import { notYetSold, shipDayNames, shippingBadge } from '@/components/listings/shipping-words'
+import { shipDayNames, shippingBadge } from '@/components/listings/shipping-words'
 import { Badge } from '@/components/ui/badge'
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
@@ -14,8 +16,14 @@ import { printCount } from '@/shared/units/count'
 import { comingMonday } from '@/shared/times/coming-monday'
 import { printCents } from '@/shared/units/money'
 
+interface Props {
+  listing: ShownListing
+  /** The days to come, below the year. */
+  children?: ReactNode
+}
+
 /** How a batch may be shipped, and in which weeks it usually arrives alive where the buyer is. */
-export function ListingShipping({ listing: { body, shipped, gate } }: { listing: ShownListing }) {
+export function ListingShipping({ listing: { body, shipped, gate }, children }: Props) {
   const { shipping, statesServed } = body
   if (!shipping) return null
   const days = shipping.days.map((day) => shipDayNames[day]).join(', ')
@@ -24,9 +32,8 @@ export function ListingShipping({ listing: { body, shipped, gate } }: { listing:
       <Heading level={2} size="lead" nativeID="shipping">
         Shipping
       </Heading>
-      <Text face="strong">{notYetSold}</Text>
       <Text>
-        {`${packingWords[shipping.packing]}, up to ${printCount(shipping.mostInBox)} in a box at ${printCents(shipping.boxCents)} a box, freight not included. Leaves on ${days}, to ${statesServed.join(', ')}.`}
+        {`${packingWords[shipping.packing]}, up to ${printCount(shipping.mostInBox)} in a box. ${printCents(shipping.boxCents)} for a packed box and ${printCents(shipping.freightCents)} freight, with ${shipping.carrier}. Leaves on ${days}, to ${statesServed.join(', ')}.${shipping.holdsAtCounter ? ' Can wait for you at the carrier’s counter.' : ''}`}
       </Text>
       {shipped && gate ? (
         <>
@@ -35,8 +42,9 @@ export function ListingShipping({ listing: { body, shipped, gate } }: { listing:
             <>
               <YearAhead shipped={shipped} />
               <Text size="note" tint="muted">
-                {`By the weather of many years, not by a forecast: safe in nine of ten such trips. ${seasonSources.map(printSource).join('; ')}.`}
+                {`The year goes by the weather of many years, not by a forecast: safe in nine of ten such trips. ${seasonSources.map(printSource).join('; ')}.`}
               </Text>
+              {children}
             </>
           ) : null}
         </>

@@ -9,14 +9,11 @@ beforeAll(async () => {
 })
 afterAll(() => browser.close())
 
-const notYet = 'Shipping is announced, not yet sold here: ask for pickup.'
-
 describe.each([390, 1280])('a buyer at %i px', (width) => {
-  it('asks what can be shipped in May, sees it on the tags and as a year on the listing, and is offered nothing more', async () => {
+  it('asks what can be shipped in May, sees it on the tags, as a year and as days on the listing, and is led on to order', async () => {
     const isPhone = width === 390
     const page = await browser.openPage({ width, origin, theme: isPhone ? 'dark' : 'light' })
     await page.goto('/?near=45202&withinKm=403')
-    await page.getByText(notYet).first().waitFor()
     if (isPhone) await page.getByRole('button', { name: /^Filters and order/ }).click()
     await page.getByRole('checkbox', { name: /^Can be shipped to me/ }).click()
     await page.waitForURL(/shipWeek=\d+/)
@@ -43,9 +40,10 @@ describe.each([390, 1280])('a buyer at %i px', (width) => {
 
     await tags.getByRole('link').first().click()
     const card = page.getByRole('region', { name: 'Shipping' })
-    await card.getByText(notYet).waitFor()
     await card.getByRole('slider', { name: 'Week of the year' }).waitFor()
-    expect(await card.getByRole('button').count()).toBe(0)
+    await card.getByRole('heading', { name: 'The next ship days' }).waitFor()
+    expect(await card.getByText(/shipped: \$[\d.]+ each at your end/).count()).toBe(1)
+    await card.getByRole('link', { name: /^Have \d+ shipped$/ }).waitFor()
     await card.scrollIntoViewIfNeeded()
     await expectNoAxeViolations(page)
     await keepShot(page, `ships-${width}-listing`)

@@ -11,6 +11,8 @@ export const batchAsks: Readonly<Record<string, string>> = {
   'windows.day': 'On which day may people come?',
   'shipping.packing': 'What do you pack them in, and how long is the way?',
   'shipping.boxCents': 'What you charge for a packed box; 0 is an answer.',
+  'shipping.freightCents': 'What the carrier takes for one box; 0 if it is in your price.',
+  'shipping.carrier': 'Which carrier and service, in your words?',
   'shipping.mostInBox': 'The most animals you put in one box.',
   placeKind: 'Where do people collect?',
   freeCancelHours: 'How many hours before the pickup? 12 to 336.',

@@ -47,7 +47,17 @@ export function batchDefaults({ ownState, licenceNumbers }: Given): BatchTyping 
       remedy: 'refund',
       evidence: 'A photo of every dead fish, beside the bag if there was one',
     },
-    shipping: { isOffered: false, packing: '', boxCents: '', mostInBox: '', days: [] },
+    shipping: {
+      isOffered: false,
+      packing: '',
+      boxCents: '',
+      freightCents: '',
+      carrier: '',
+      carrierAccepts: false,
+      holdsAtCounter: false,
+      mostInBox: '',
+      days: [],
+    },
     photos: [],
     words: '',
   }

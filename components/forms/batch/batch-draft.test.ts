@@ -76,12 +76,22 @@ describe('a batch between the form and its draft', () => {
     const shipping = {
       packing: 'carton-two-days',
       boxCents: 1200,
+      freightCents: 3800,
+      carrier: 'Overnight by air',
+      carrierAccepts: true,
+      holdsAtCounter: false,
       mostInBox: 80,
       days: ['mon', 'tue'],
     } as const
     const shipped = { ...body, shipping: { ...shipping, days: [...shipping.days] } }
     const typing = typingFromDraft(shipped, { base, units: 'us' })
-    expect(typing.shipping).toMatchObject({ isOffered: true, boxCents: '$12.00', days: ['mon', 'tue'] })
+    expect(typing.shipping).toMatchObject({
+      isOffered: true,
+      boxCents: '$12.00',
+      freightCents: '$38.00',
+      carrierAccepts: true,
+      days: ['mon', 'tue'],
+    })
     expect(draftFromTyping(typing, { was: shipped, units: 'us' })).toEqual(shipped)
     const off = { ...typing, shipping: { ...typing.shipping, isOffered: false } }
     expect(draftFromTyping(off, { was: shipped, units: 'us' })).toEqual(body)
@@ -117,13 +127,22 @@ describe('what is still missing', () => {
   })
 
   it('asks how a shipped batch travels, and keeps two days on the way clear of the weekend', () => {
-    const blank = { isOffered: true, packing: '', boxCents: '', mostInBox: '', days: [] } as const
+    const blank = {
+      ...base.shipping,
+      isOffered: true,
+    }
     expect(told({ shipping: { ...blank, days: [] } })).toMatchObject({
       'shipping.packing': 'What do you pack them in, and how long is the way?',
+      'shipping.carrierAccepts':
+        'Ask your carrier whether it takes these animals in this service, then tick this.',
       'shipping.mostInBox': 'The most animals you put in one box.',
       'shipping.days': 'On which days do you ship?',
     })
-    const way = { isOffered: true, boxCents: '12', mostInBox: '80', days: ['tue', 'wed'] }
+    const way = {
+      ...blank,
+      ...{ boxCents: '12', freightCents: '38', carrier: 'Overnight by air', carrierAccepts: true },
+      ...{ mostInBox: '80', days: ['tue', 'wed'] },
+    }
     expect(told({ shipping: { ...way, packing: 'carton-overnight' } })).toEqual({})
     expect(told({ shipping: { ...way, packing: 'carton-two-days' } })).toEqual({
       'shipping.days': 'Two days on the way: ship on Monday or Tuesday, so that no box waits over a weekend.',

@@ -19,6 +19,7 @@ export const batchFigures: Readonly<Record<string, Figure>> = {
   'water.saltPpt': figures.saltPpt,
   'windows.capacity': figures.count,
   'shipping.boxCents': figures.cents,
+  'shipping.freightCents': figures.cents,
   'shipping.mostInBox': figures.count,
   depositPct: figures.percent,
   freeCancelHours: figures.hours,

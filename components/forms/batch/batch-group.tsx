@@ -39,7 +39,7 @@ export function BatchGroup({ stepId, setting }: Props) {
     case 'pickup':
       return <PickupGroup farm={setting.farm} today={setting.today} />
     case 'shipping':
-      return <ShippingGroup />
+      return <ShippingGroup farm={setting.farm} />
     case 'promise':
       return <PromiseGroup />
     case 'photos':

@@ -52,6 +52,10 @@ export interface BatchTyping {
     isOffered: boolean
     packing: BatchShipping['packing'] | ''
     boxCents: string
+    freightCents: string
+    carrier: string
+    carrierAccepts: boolean
+    holdsAtCounter: boolean
     mostInBox: string
     days: string[]
   }

@@ -12,12 +12,16 @@ import { packingClasses } from '@/shared/domain/season/season-classes.facts'
 import { packingClassIds } from '@/shared/domain/season/season-lane'
 import { shipDays } from '@/shared/domain/shipping/ship-days'
 
+import { CarrierFields } from './carrier-fields'
+import { SeasonNote } from './season-note'
+
 import type { BatchTyping } from './batch-typing'
+import type { OwnSeller } from '@/shared/contracts/sellers'
 
 const packings = packingClassIds.map((id) => ({ value: id, label: packingWords[id] }))
 const days = shipDays.map((day) => ({ value: day, label: shipDayNames[day] }))
 
-export function ShippingGroup() {
+export function ShippingGroup({ farm }: { farm: OwnSeller }) {
   const form = useFormContext<BatchTyping>()
   const { isOffered, packing } = useWatch<BatchTyping, 'shipping'>({ name: 'shipping' })
   const isTwoDays = packing !== '' && packingClasses[packing].nights > 1
@@ -25,7 +29,7 @@ export function ShippingGroup() {
     <FormGroup
       groupId="shipping"
       title="Shipping (optional)"
-      intro="Shown in search as can be shipped; orders for shipping open later."
+      intro="Buyers in the states you serve can then have a box sent, on days on which the animals arrive well. You get the packing of each box, and labels."
     >
       <BoundCheck<BatchTyping>
         name="shipping.isOffered"
@@ -43,12 +47,13 @@ export function ShippingGroup() {
             isFolded
             emptyLabel="Choose a packing"
           />
+          <SeasonNote farm={farm} />
           <FieldRow>
             <FieldCell>
               <BoundText<BatchTyping>
                 name="shipping.boxCents"
                 label="Charge for a box"
-                hint="Box, packs and packing, without freight."
+                hint="Box, packs and packing, without freight; 0 is an answer."
                 placeholder="12.00"
                 prefix="$"
                 isFigure
@@ -63,6 +68,7 @@ export function ShippingGroup() {
               />
             </FieldCell>
           </FieldRow>
+          <CarrierFields />
           <BoundChips<BatchTyping>
             name="shipping.days"
             label="Ships on"
