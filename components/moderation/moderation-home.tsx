@@ -8,6 +8,7 @@ import { ReviewQueue } from './review-queue'
 import { stepThrough } from './step-through'
 import { useDeskKeys } from './use-desk-keys'
 
+import { ButtonLink } from '@/components/ui/button-link'
 import { space } from '@/constants/theme'
 import type { ReportedListing } from '@/shared/contracts/listing-reports'
 
@@ -38,6 +39,15 @@ export function ModerationHome() {
         onRow={setOnRow}
         onDecide={(act, listing) => setDeciding({ act, listing })}
       />
+      <View>
+        <ButtonLink
+          kind="secondary"
+          icon="calendar"
+          href="/moderate/ship-days"
+          label="Days without carriers"
+          style={styles.link}
+        />
+      </View>
       {deciding ? (
         <ReportSheet act={deciding.act} listing={deciding.listing} onClose={() => setDeciding(null)} />
       ) : null}
@@ -46,4 +56,4 @@ export function ModerationHome() {
   )
 }
 
-const styles = StyleSheet.create({ frame: { gap: space.xl } })
+const styles = StyleSheet.create({ frame: { gap: space.xl }, link: { alignSelf: 'flex-start' } })

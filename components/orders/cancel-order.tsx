@@ -1,6 +1,7 @@
 import { useState } from 'react'
 
 import { ActFailed } from '@/components/orders/act-failed'
+import { zoneOf } from '@/components/orders/order-zone'
 import { Button } from '@/components/ui/button'
 import { RadioGroup } from '@/components/ui/radio-group'
 import { Sheet } from '@/components/ui/sheet'
@@ -27,7 +28,7 @@ function outcomeFor(order: ShownOrder): string {
   const paid = order.money.strip.heldCents
   if (isFree(order)) {
     const until = order.freeCancelUntil
-      ? ` Free until ${printMoment(order.freeCancelUntil, order.slot?.zone ?? 'America/New_York')}.`
+      ? ` Free until ${printMoment(order.freeCancelUntil, zoneOf(order))}.`
       : ''
     return `You get ${printCents(paid)} back.${until}`
   }

@@ -5,6 +5,7 @@ import { DeclineOrder } from '@/components/orders/decline-order'
 import { HandOverForm } from '@/components/orders/hand-over-form'
 import { goToPayment } from '@/components/orders/go-to-payment'
 import { OrderTrouble } from '@/components/orders/order-trouble'
+import { ShippingActs } from '@/components/shipping/shipping-acts'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
 import { Confirm } from '@/components/ui/confirm'
@@ -57,13 +58,14 @@ export function OrderActs({ order }: { order: ShownOrder }) {
       ) : null}
       {may.has('mark-ready') ? (
         <Button
-          label="Mark ready to collect"
+          label={order.handOver === 'ship' ? 'Mark ready to send' : 'Mark ready to collect'}
           icon="check"
           isWide
           isBusy={running === 'markReady'}
           onPress={() => act.mutate('markReady')}
         />
       ) : null}
+      <ShippingActs order={order} />
       {may.has('pay-balance') ? (
         <Button
           label={`Pay the balance, ${printCents(balanceCents)}`}

@@ -1,25 +1,15 @@
 import { StyleSheet, View } from 'react-native'
 
+import { Fact } from '@/components/orders/fact'
+import { ShipmentFacts } from '@/components/shipping/shipment-facts'
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import { Link } from '@/components/ui/link'
-import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import { calendarUrl } from '@/hooks/api'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { printSlot } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
-
-function Fact({ name, children }: { name: string; children: string }) {
-  return (
-    <View style={styles.fact}>
-      <Text size="note" tint="muted" style={styles.name}>
-        {name}
-      </Text>
-      <Text style={styles.value}>{children}</Text>
-    </View>
-  )
-}
 
 const mapLink = ({ street, city, state, zip }: NonNullable<ShownOrder['meeting']>) =>
   `geo:0,0?q=${encodeURIComponent(`${street}, ${city}, ${state} ${zip}`)}`
@@ -37,8 +27,14 @@ export function OrderFacts({ order }: { order: ShownOrder }) {
         The agreement
       </Heading>
       <Fact name="Animals">{`${order.quantity} at ${printCents(order.unitCents)} each`}</Fact>
-      <Fact name="Pickup">{slot ? printSlot(slot) : 'No day agreed yet'}</Fact>
-      {place ? <Fact name="Place">{place}</Fact> : null}
+      {order.shipment ? (
+        <ShipmentFacts shipment={order.shipment} party={party} />
+      ) : (
+        <>
+          <Fact name="Pickup">{slot ? printSlot(slot) : 'No day agreed yet'}</Fact>
+          {place ? <Fact name="Place">{place}</Fact> : null}
+        </>
+      )}
       {meeting && party === 'buyer' ? <Fact name="Phone">{meeting.phone}</Fact> : null}
       <Fact name={party === 'seller' ? 'Buyer' : 'Seller'}>{order.otherParty.name}</Fact>
       <Fact name="Arrival promise">{order.arrivalPromise}</Fact>
@@ -63,8 +59,5 @@ export function OrderFacts({ order }: { order: ShownOrder }) {
 }
 
 const styles = StyleSheet.create({
-  fact: { flexDirection: 'row', gap: space.md, flexWrap: 'wrap' },
-  name: { width: 128 },
-  value: { flex: 1, minWidth: 180 },
   links: { flexDirection: 'row', gap: space.xl, flexWrap: 'wrap' },
 })

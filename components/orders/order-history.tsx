@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
+import { zoneOf } from '@/components/orders/order-zone'
 import { stateWord } from '@/components/orders/state-words'
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
@@ -21,7 +22,7 @@ const byWhom: Record<string, string> = {
 
 /** What happened, oldest first, in the time of the place. */
 export function OrderHistory({ order }: { order: ShownOrder }) {
-  const zone = order.slot?.zone ?? 'America/New_York'
+  const zone = zoneOf(order)
   return (
     <Card labelledBy="order-history">
       <Heading level={2} size="lead" nativeID="order-history">
@@ -30,7 +31,7 @@ export function OrderHistory({ order }: { order: ShownOrder }) {
       <View role="list" style={styles.list}>
         {order.events.map((event) => (
           <View key={`${event.edge}-${event.at}`} role="listitem" style={styles.row}>
-            <Text face="strong">{stateWord(event.to).word}</Text>
+            <Text face="strong">{stateWord(event.to, order.handOver).word}</Text>
             <Text size="note" tint="muted">
               {`${printMoment(event.at, zone)}, ${byWhom[event.actor] ?? event.actor}`}
             </Text>

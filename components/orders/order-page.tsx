@@ -8,6 +8,9 @@ import { OrderFacts } from '@/components/orders/order-facts'
 import { OrderHistory } from '@/components/orders/order-history'
 import { OrderPathLine } from '@/components/orders/order-path-line'
 import { stateWord } from '@/components/orders/state-words'
+import { ArrivalGuide } from '@/components/shipping/arrival-guide'
+import { MovementCard } from '@/components/shipping/movement-card'
+import { RouteCheckCard } from '@/components/shipping/route-check-card'
 import { AfterHandOver } from '@/components/ratings/after-hand-over'
 import { Page } from '@/components/layout/page'
 import { TwoColumns } from '@/components/layout/two-columns'
@@ -21,7 +24,6 @@ import { space } from '@/constants/theme'
 import { useOrder } from '@/hooks/use-orders'
 import { Problem } from '@/shared/api/problem'
 import type { ShownOrder } from '@/shared/contracts/orders'
-import { fillCaution } from '@/shared/domain/rules/fill-caution'
 
 const back = { label: 'Orders', href: '/orders' } as const
 
@@ -42,17 +44,6 @@ function Returned({ order, from }: { order: ShownOrder; from: { paid?: string; l
     )
   }
   return null
-}
-
-function AfterCare({ order }: { order: ShownOrder }) {
-  if (order.party !== 'buyer' || !['handed_over', 'settled'].includes(order.state)) return null
-  return (
-    <Banner tone="info" title="Look after them now">
-      <Text>{fillCaution('G-8', { hours: '6' })}</Text>
-      <Text>{fillCaution('G-7', {})}</Text>
-      <Text>{fillCaution('G-1', {})}</Text>
-    </Banner>
-  )
 }
 
 /** One order, for whichever party looks at it. */
@@ -78,7 +69,7 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
       </Page>
     )
   }
-  const { word, tone } = stateWord(order.state)
+  const { word, tone } = stateWord(order.state, order.handOver)
   return (
     <Page
       title={`${order.quantity} × ${order.title}`}
@@ -108,8 +99,12 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
             {order.handOverCode ? <HandOverCode code={order.handOverCode} /> : null}
             <OrderActs order={order} />
             <AfterHandOver order={order} />
-            <AfterCare order={order} />
+            <ArrivalGuide order={order} />
             <OrderFacts order={order} />
+            {order.shipment ? <RouteCheckCard shipment={order.shipment} /> : null}
+            {order.shipment?.movement ? (
+              <MovementCard movement={order.shipment.movement} zone={order.shipment.toZone} />
+            ) : null}
             <OrderHistory order={order} />
           </View>
         }

@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
+import { zoneOf } from '@/components/orders/order-zone'
 import { Icon } from '@/components/ui/icon'
 import { Text } from '@/components/ui/text'
 import { color, radius, space } from '@/constants/theme'
@@ -19,7 +20,7 @@ function pathOf(order: ShownOrder): OrderPath {
 /** Where the order is, whose move it is, until when, and what happens if nobody moves: always on top. */
 export function OrderPathLine({ order }: { order: ShownOrder }) {
   const path = pathOf(order)
-  const zone = order.slot?.zone ?? 'America/New_York'
+  const zone = zoneOf(order)
   const until = path.untilMs === null ? null : printMoment(new Date(path.untilMs).toISOString(), zone)
   const isYours = path.move.whose === 'you' || path.move.whose === 'both'
   return (

@@ -10,14 +10,19 @@ import { color, radius, space } from '@/constants/theme'
 import { photoUrl } from '@/hooks/api'
 import type { OrderRow } from '@/shared/contracts/orders'
 import { whoseMove } from '@/shared/domain/orders/whose-move'
-import { printSlot } from '@/shared/times/print-time'
+import { printDay, printSlot } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
 
 const look = ({ pressed }: { pressed: boolean }) => [styles.card, pressed ? styles.pressed : null]
 
+/** A pickup has its hours; of a box the day counts. */
+function dayOf(slot: NonNullable<OrderRow['slot']>, handOver: OrderRow['handOver']): string {
+  return handOver === 'ship' ? `Leaves ${printDay(slot.startsAt, slot.zone)}` : printSlot(slot)
+}
+
 /** One order in the list: what, with whom, when, and what it waits for. */
 export function OrderRowCard({ order }: { order: OrderRow }) {
-  const { word, tone } = stateWord(order.state)
+  const { word, tone } = stateWord(order.state, order.handOver)
   const isYours = isYourMove(order)
   const isOver = order.state === 'settled' || order.state === 'cancelled'
   return (
@@ -35,7 +40,7 @@ export function OrderRowCard({ order }: { order: OrderRow }) {
       <View style={styles.words}>
         <Text face="title" size="lead">{`${order.quantity} × ${order.title}`}</Text>
         <Text size="note" tint="muted">{`${order.otherParty.name} · ${printCents(order.totalCents)}`}</Text>
-        {order.slot ? <Text size="note">{printSlot(order.slot)}</Text> : null}
+        {order.slot ? <Text size="note">{dayOf(order.slot, order.handOver)}</Text> : null}
         <View style={styles.badges}>
           <Badge word={isYours ? 'Your move' : word} tone={isYours ? 'today' : tone} />
         </View>

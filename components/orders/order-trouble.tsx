@@ -3,6 +3,8 @@ import { StyleSheet, View } from 'react-native'
 
 import { CancelOrder } from '@/components/orders/cancel-order'
 import { ChooseSlot } from '@/components/orders/choose-slot'
+import { DecideBox } from '@/components/orders/decide-box'
+import { zoneOf } from '@/components/orders/order-zone'
 import { SayWhatHappened } from '@/components/orders/say-what-happened'
 import { StaffActs } from '@/components/orders/staff-acts'
 import { Banner } from '@/components/ui/banner'
@@ -19,7 +21,7 @@ export function OrderTrouble({ order }: { order: ShownOrder }) {
   const [open, setOpen] = useState<Open>(null)
   const may = new Set(order.may)
   const close = () => setOpen(null)
-  const zone = order.slot?.zone ?? 'America/New_York'
+  const zone = zoneOf(order)
   return (
     <View style={styles.trouble}>
       {order.noShow ? (
@@ -63,7 +65,10 @@ export function OrderTrouble({ order }: { order: ShownOrder }) {
       {may.has('cancel') ? (
         <Button label="Cancel the order" kind="quiet" isWide onPress={() => setOpen('cancel')} />
       ) : null}
-      {may.has('stop') || may.has('decide') ? <StaffActs order={order} /> : null}
+      {may.has('decide') && order.handOver === 'ship' ? <DecideBox order={order} /> : null}
+      {may.has('stop') || (may.has('decide') && order.handOver === 'pickup') ? (
+        <StaffActs order={order} />
+      ) : null}
       {open === 'cancel' ? <CancelOrder order={order} onClose={close} /> : null}
       {open === 'slot' ? <ChooseSlot order={order} onClose={close} /> : null}
       {open === 'no-show' || open === 'contest' ? (

@@ -30,6 +30,17 @@ export function OrdersHome({ as }: { as: 'buyer' | 'seller' }) {
           <Side href="/orders?as=seller" words="I sell" isHere={as === 'seller'} />
         </View>
       ) : null}
+      {as === 'seller' && me.sellerId ? (
+        <View>
+          <ButtonLink
+            kind="secondary"
+            icon="truck"
+            href="/orders/routes"
+            label="Routes: what you ship, by day"
+            style={styles.routes}
+          />
+        </View>
+      ) : null}
       <OrderList as={as} />
     </View>
   )
@@ -56,5 +67,6 @@ const styles = StyleSheet.create({
     borderWidth: 1,
     borderColor: color.edge,
   },
+  routes: { alignSelf: 'flex-start' },
   here: { backgroundColor: color.algae, color: color.onAlgae, borderColor: color.onAlgae },
 })

@@ -19,8 +19,10 @@ const words: Record<State, [word: string, tone: Tone]> = {
   cancelled: ['Ended', 'neutral'],
 }
 
+const readyToSend: (typeof words)['ready'] = ['Ready to send', 'today']
+
 /** The state as a word of the trade, for badges. */
-export function stateWord(state: State): { word: string; tone: Tone } {
-  const [word, tone] = words[state]
+export function stateWord(state: State, handOver: OrderRow['handOver']): { word: string; tone: Tone } {
+  const [word, tone] = state === 'ready' && handOver === 'ship' ? readyToSend : words[state]
   return { word, tone }
 }

@@ -30,6 +30,10 @@ export function SellHome() {
                 <Link href="/sell/farm" size="note">
                   Farm, licences and payouts
                 </Link>
+                {' · '}
+                <Link href="/orders/routes" size="note">
+                  What you ship
+                </Link>
               </Text>
             </View>
             <ButtonLink

@@ -38,7 +38,9 @@ function turnOf({ state, handOver, balanceDue, balancePaid }: MoveFacts): Turn {
     case 'pledged':
       return ['nobody', 'The run is filling up.', 'The run is filling up.']
     case 'deposit_paid':
-      return ['both', 'Agree on a day.', 'Agree on a day.']
+      return handOver === 'ship'
+        ? ['both', 'Choose a ship day.', 'Choose a ship day.']
+        : ['both', 'Agree on a day.', 'Agree on a day.']
     case 'scheduled':
       return isOwing && balanceDue === 'before'
         ? ['buyer', 'Pay the balance.', 'The buyer pays the balance.']
@@ -46,17 +48,24 @@ function turnOf({ state, handOver, balanceDue, balancePaid }: MoveFacts): Turn {
     case 'weather_hold':
       return [
         'buyer',
-        'Agree to the new day, or cancel for a full refund.',
+        'Agree on another day, or end it for a full refund.',
         'The buyer answers about the new day.',
       ]
     case 'ready':
       return readyTurn(handOver, isOwing)
     case 'dispatched':
-      return ['nobody', 'On the way. Be there when it comes.', 'On the way.']
+      return ['nobody', 'On the way. Be there when it comes, then say that it is here.', 'On the way.']
     case 'arrived':
     case 'handed_over':
       return ['buyer', 'Say that all is well, or report a loss.', 'The buyer looks the animals over.']
     case 'claim_open':
+      if (handOver === 'ship') {
+        return [
+          'nobody',
+          'We look at what became of the box. If it comes after all, say so.',
+          'We look at what became of the box.',
+        ]
+      }
       return ['seller', 'The seller answers the claim.', 'Answer the claim.']
     case 'settled':
       return ['nobody', 'Done.', 'Done. The money is on its way to you.']
