@@ -36,7 +36,7 @@ export function verdictLook({ verdict, worst }: Judged): VerdictLook {
 }
 
 /** "Dayton, OH: down to 12 °F (-11 °C)"; '' when no air is to blame. */
-export function worstWords({ worst }: Judged, units: UnitSystem): string {
+export function worstWords({ worst }: Pick<ShipDayOffer, 'worst'>, units: UnitSystem): string {
   if (!worst) return ''
   const reach = worst.side === 'cold' ? 'down to' : 'up to'
   return `${worst.place}: ${reach} ${printBothTemperatures(worst.airC, units)}`

@@ -49,6 +49,22 @@ describe('the order path', () => {
     expect(path.move).toEqual({ whose: 'you', words: 'Accept or decline.' })
   })
 
+  it('says of a box what is true of a box', () => {
+    const box = pickup({ handOver: 'ship', balanceDue: 'before', balancePaid: true })
+    const move = (state: PathFacts['state'], party: PathFacts['party'] = 'buyer') =>
+      orderPath({ ...box, state, party }).move
+    expect(move('deposit_paid').words).toBe('Choose a ship day.')
+    expect(move('ready', 'seller')).toEqual({ whose: 'you', words: 'Check the route, then send the box.' })
+    expect(move('dispatched').whose).toBe('nobody')
+    expect(move('claim_open')).toEqual({
+      whose: 'nobody',
+      words: 'We look at what became of the box. If it comes after all, say so.',
+    })
+    expect(orderPath({ ...box, state: 'dispatched', clock: { atMs: 1, edge: 'E36' } }).ifNobodyMoves).toBe(
+      'the box counts as late and a claim opens by itself',
+    )
+  })
+
   it('asks the buyer for a balance that is due before the day', () => {
     const owing = pickup({ state: 'scheduled', balanceDue: 'before' })
     expect(orderPath(owing).move).toEqual({ whose: 'you', words: 'Pay the balance.' })
