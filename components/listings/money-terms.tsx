@@ -40,6 +40,14 @@ export function MoneyTerms({ body }: { body: ListingBody }) {
           term: 'Cancelling',
           value: `Free until ${body.freeCancelHours} hours before the window. After that the grower may keep the deposit, never more.`,
         },
+        ...(body.shipping
+          ? [
+              {
+                term: 'When shipped',
+                value: `The rest is due ${clocks.balanceDue.minutes / minutesPerHour} hours before the ship day; cancelling is free until ${body.freeCancelHours} hours before it. If the weather stops the day and you do not want another, everything goes back.`,
+              },
+            ]
+          : []),
         {
           term: 'Not coming',
           value: `If you are not there ${graceMinutes} minutes after the window, the grower may keep the deposit; the rest goes back to your card. If the grower is not there, everything goes back.`,

@@ -13,7 +13,11 @@ import type { ShownOrder } from '@/shared/contracts/orders'
 import { parseCount } from '@/shared/units/count'
 
 const outcomes = [
-  { value: 'arrived', label: 'It arrived', hint: 'The buyer gets the price of the lost ones back.' },
+  {
+    value: 'arrived',
+    label: 'It arrived',
+    hint: 'The price of the lost ones goes back; box and freight too when fewer than half live.',
+  },
   { value: 'lost', label: 'It never came', hint: 'The buyer gets everything back.' },
 ] as const
 const LEAST_LETTERS = 10

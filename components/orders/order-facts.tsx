@@ -28,7 +28,7 @@ export function OrderFacts({ order }: { order: ShownOrder }) {
       </Heading>
       <Fact name="Animals">{`${order.quantity} at ${printCents(order.unitCents)} each`}</Fact>
       {order.shipment ? (
-        <ShipmentFacts shipment={order.shipment} party={party} />
+        <ShipmentFacts shipment={order.shipment} order={order} />
       ) : (
         <>
           <Fact name="Pickup">{slot ? printSlot(slot) : 'No day agreed yet'}</Fact>

@@ -37,7 +37,7 @@ export function GateStatements({ gate, ticked, onChange, errorAt }: Props) {
         />
       ))}
       {gate.papersNeeded.map((paper) => (
-        <Text key={paper}>{`Paper needed before the hand-over: ${paper}`}</Text>
+        <Text key={paper}>{`Paper needed before the animals leave: ${paper}`}</Text>
       ))}
       {gate.cautions.map((caution) => (
         <Text key={caution.id} size="note" tint="muted">

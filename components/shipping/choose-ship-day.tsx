@@ -42,7 +42,12 @@ export function ChooseShipDay({ order, act, onClose }: Props) {
     >
       <ActFailed error={send.error} />
       {order.state === 'ready' ? <Text tint="muted">Each side may move the day once.</Text> : null}
-      <ShipDays query={query} value={shipDay} onChange={setShipDay} />
+      <ShipDays
+        query={query}
+        value={shipDay}
+        onChange={setShipDay}
+        without={isFirst ? undefined : order.shipment?.shipDay}
+      />
     </Sheet>
   )
 }

@@ -34,7 +34,7 @@ export function DispatchForm({ order }: { order: ShownOrder }) {
         Send the box
       </Heading>
       <ErrorSummary errors={shown} attempt={attempt} />
-      <Refusals error={dispatch.error} title="Not sent" />
+      <Refusals error={dispatch.error} title="Not sent: the animals and the money stay" />
       {tickIds.map((tick) => (
         <Checkbox
           key={tick}

@@ -72,7 +72,13 @@ export function HoldForWeather({ order, onClose }: { order: ShownOrder; onClose:
       />
       <RadioGroup label="And then?" value={names} choices={naming} onChange={setNames} />
       {names === 'day' && isShipped ? (
-        <ShipDays query={shipDays} value={day} onChange={setDay} error={dayError} />
+        <ShipDays
+          query={shipDays}
+          value={day}
+          onChange={setDay}
+          error={dayError}
+          without={order.shipment?.shipDay}
+        />
       ) : null}
       {names === 'day' && !isShipped ? (
         <>

@@ -9,12 +9,12 @@ export function Refusals({ error, title }: { error: Error | null; title: string 
   if (!error) return null
   const told = error instanceof Problem ? (error.errors ?? []).map(({ detail }) => detail) : []
   const nearest = error instanceof Problem ? nearestDayWords(error.facts) : null
-  const reasons = [...new Set(told)].filter((detail) => detail !== error.message)
+  const reasons = [...new Set(told)]
   return (
     <Banner tone="danger" title={title} isLive>
-      <Text>{error.message}</Text>
+      {reasons.length === 0 ? <Text>{error.message}</Text> : null}
       {reasons.map((reason) => (
-        <Text key={reason}>{`• ${reason}`}</Text>
+        <Text key={reason}>{reasons.length > 1 ? `• ${reason}` : reason}</Text>
       ))}
       {nearest ? <Text face="strong">{nearest}</Text> : null}
     </Banner>

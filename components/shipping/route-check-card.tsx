@@ -44,11 +44,11 @@ export function RouteCheckCard({ shipment }: { shipment: ShownShipment }) {
             </Fact>
           ))
         : null}
-      {check.packing ? null : (
+      {check.verdict === 'safe' && !check.packing ? (
         <Text size="note" tint="muted">
-          How to pack is decided by the forecast, a few days before.
+          How to pack is decided by the forecast, within a week of the day.
         </Text>
-      )}
+      ) : null}
     </Card>
   )
 }

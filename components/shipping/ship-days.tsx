@@ -15,13 +15,15 @@ interface Props {
   value: string
   onChange: (shipDay: string) => void
   error?: string
+  /** The day agreed already: not offered once more. */
+  without?: string
 }
 
 /** A refusal is an answer: asking again changes nothing. */
 const isRefusal = (error: Error) => error instanceof Problem && error.status >= 400 && error.status < 500
 
 /** The coming ship days of a way: loading, empty, refused, not loaded, or to choose from. */
-export function ShipDays({ query, value, onChange, error }: Props) {
+export function ShipDays({ query, value, onChange, error, without }: Props) {
   if (query.isPending) return <SkeletonRows label="Looking at the coming ship days" rows={3} />
   if (!query.data) {
     return isRefusal(query.error) ? (
@@ -38,14 +40,14 @@ export function ShipDays({ query, value, onChange, error }: Props) {
       />
     )
   }
-  const { days } = query.data
+  const days = query.data.days.filter(({ shipDay }) => shipDay !== without)
   if (days.length === 0) {
     return (
       <EmptyState
         level={3}
         icon="calendar"
         title="No ship day in the coming weeks"
-        body="The carrier does not work on the seller’s ship days. Look again in a few days, or collect."
+        body="Carriers do not work on the seller’s ship days. Look again in a few days."
       />
     )
   }

@@ -5,6 +5,7 @@ import { Fact } from '@/components/orders/fact'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import type { RoutePaper, ShownShipment } from '@/shared/contracts/shipments'
 import { printMoment } from '@/shared/times/print-time'
+import { printCents } from '@/shared/units/money'
 
 const boxesWords = (boxes: number) => (boxes === 1 ? '1 box' : `${boxes} boxes`)
 
@@ -16,12 +17,18 @@ function papersWords({ papers, papersNeeded }: ShownShipment): string | null {
   return papersNeeded.length > 0 ? `Still to be named: ${papersNeeded.join('; ')}` : null
 }
 
+interface Props {
+  shipment: ShownShipment
+  order: Pick<ShownOrder, 'party' | 'money'>
+}
+
 /** What leaves when, arrives when and where, with whom. */
-export function ShipmentFacts({ shipment, party }: { shipment: ShownShipment; party: ShownOrder['party'] }) {
+export function ShipmentFacts({ shipment, order: { party, money } }: Props) {
   const { shipDay, arriveDay, promisedAt, toZone, boxes, carrier, tracking, address } = shipment
   const papers = papersWords(shipment)
   return (
     <>
+      <Fact name="Box and freight">{`${printCents(money.boxCents)} for packing, ${printCents(money.freightCents)} freight`}</Fact>
       <Fact name="Leaves">{`${dayWords(shipDay)}, ${boxesWords(boxes)}`}</Fact>
       <Fact name="Arrives">{`${dayWords(arriveDay)}; promised until ${printMoment(promisedAt, toZone)}`}</Fact>
       <Fact name="Handed over">{deliverWords[shipment.deliverTo]}</Fact>

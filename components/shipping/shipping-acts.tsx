@@ -32,7 +32,6 @@ export function ShippingActs({ order }: { order: ShownOrder }) {
     <>
       <WeatherHold order={order} />
       <BoxActs order={order} />
-      {may.has('dispatch') ? <DispatchForm order={order} /> : null}
       <Refusals error={act.error} title="That did not work" />
       {may.has('name-papers') ? (
         <Button
@@ -55,6 +54,7 @@ export function ShippingActs({ order }: { order: ShownOrder }) {
         />
       ) : null}
       {isPacking ? <PrintPacking orderId={order.orderId} /> : null}
+      {may.has('dispatch') ? <DispatchForm order={order} /> : null}
       {may.has('choose-ship-day') ? (
         <Button
           label={order.state === 'deposit_paid' ? 'Agree on a ship day' : 'Move to another day'}
