@@ -9,8 +9,14 @@ import { toneTint } from '@/components/ui/tone'
 import { useUnits } from '@/hooks/use-units'
 import type { ShipDayOffer } from '@/shared/contracts/shipments'
 
+interface Props {
+  day: Omit<ShipDayOffer, 'shipDay' | 'arriveDay'>
+  /** Where many days stand below each other: the strictest alone; all of them when absent. */
+  mostReasons?: number
+}
+
 /** The verdict in words with its sign, what it rests on, and what speaks against the day. */
-export function DayVerdict({ day }: { day: Omit<ShipDayOffer, 'shipDay' | 'arriveDay'> }) {
+export function DayVerdict({ day, mostReasons }: Props) {
   const units = useUnits()
   const { word, tone, icon } = verdictLook(day)
   const water = day.packing ? waterWords(day.packing, units) : ''
@@ -30,11 +36,13 @@ export function DayVerdict({ day }: { day: Omit<ShipDayOffer, 'shipDay' | 'arriv
           {`${day.packing?.bagsPerBox === undefined ? 'Bedding' : 'Water'} on the way ${water}.`}
         </Text>
       ) : null}
-      {reasonsAgainst(day, units).map((reason) => (
-        <Text key={reason} size="note" tint="muted">
-          {reason}
-        </Text>
-      ))}
+      {reasonsAgainst(day, units)
+        .slice(0, mostReasons)
+        .map((reason) => (
+          <Text key={reason} size="note" tint="muted">
+            {reason}
+          </Text>
+        ))}
     </View>
   )
 }

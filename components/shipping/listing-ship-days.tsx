@@ -91,7 +91,7 @@ function NextDays({ query }: { query: UseQueryResult<ShipDayOffers> }) {
       {next.map((day) => (
         <View key={day.shipDay} role="listitem" style={styles.day}>
           <Text face="strong">{wayWords(day)}</Text>
-          <DayVerdict day={day} />
+          <DayVerdict day={day} mostReasons={2} />
         </View>
       ))}
     </View>

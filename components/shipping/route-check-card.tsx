@@ -1,6 +1,6 @@
 import { boxPackingLines } from './box-packing-words'
 import { DayVerdict } from './day-verdict'
-import { wayWords } from './ship-day-words'
+import { dayWords, wayWords } from './ship-day-words'
 
 import { Fact } from '@/components/orders/fact'
 import { Card } from '@/components/ui/card'
@@ -29,7 +29,7 @@ export function RouteCheckCard({ shipment }: { shipment: ShownShipment }) {
         The way
       </Heading>
       {isOtherDay ? (
-        <Text tint="muted">This look was for another day; the agreed one will be looked at anew.</Text>
+        <Text tint="muted">{`This look was for ${dayWords(check.shipDay)}; the agreed day will be looked at anew.`}</Text>
       ) : (
         <Text>{wayWords(shipment)}</Text>
       )}

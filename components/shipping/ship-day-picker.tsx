@@ -82,7 +82,7 @@ export function ShipDayPicker({ days, value, onChange, error, isBusy = false }: 
                 <Text face="strong" tint={day.verdict === 'safe' ? 'ink' : 'muted'}>
                   {wayWords(day)}
                 </Text>
-                <DayVerdict day={day} />
+                <DayVerdict day={day} mostReasons={2} />
               </View>
             </Pressable>
           )

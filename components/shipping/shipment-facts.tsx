@@ -4,13 +4,13 @@ import { dayWords } from './ship-day-words'
 import { Fact } from '@/components/orders/fact'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import type { RoutePaper, ShownShipment } from '@/shared/contracts/shipments'
-import { printMoment } from '@/shared/times/print-time'
+import { printLongDay, printMoment } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
 
 const boxesWords = (boxes: number) => (boxes === 1 ? '1 box' : `${boxes} boxes`)
 
 const paperWords = ({ kind, number, issuer, expiresOn }: RoutePaper) =>
-  `${kind}: ${number}, by ${issuer}, good until ${dayWords(expiresOn)}`
+  `${kind}: ${number}, by ${issuer}, good until ${printLongDay(`${expiresOn}T12:00:00Z`, 'UTC')}`
 
 function papersWords({ papers, papersNeeded }: ShownShipment): string | null {
   if (papers.length > 0) return papers.map(paperWords).join('; ')
