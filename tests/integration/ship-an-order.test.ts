@@ -17,6 +17,7 @@ import {
   LOUISVILLE,
   onShipDay,
   openShipDesk,
+  permit,
   SHIP_DAY,
   SHIP_NOW,
   shipping,
@@ -133,10 +134,25 @@ describe('reserving a box', () => {
     expect(reply.body.detail).toContain('colder')
     expect(reply.body.facts).toEqual({ verdict: 'unsafe' })
     expect(await desk.db.select().from(routeCheck).where(eq(routeCheck.shipDay, '2027-01-11'))).toEqual([])
+    // A fortnight later some of the next days are mild enough: the first of them is named, as the offers have it.
+    await desk.travelToWithoutRest(new Date('2027-01-18T15:00:00Z'))
+    const later = await desk.ask(batch, { ship: { shipDay: '2027-01-20' } })
+    const offers = (
+      await desk
+        .visitor()
+        .get(`/api/v1/listings/${batch.publicId}/ship-days`)
+        .query({ near: LOUISVILLE, quantity: 60 })
+        .expect(200)
+    ).body as ShipDayOffers
+    const safe = offers.days.find(({ verdict }) => verdict === 'safe')?.shipDay
+    expect(offers.days[0]?.reasons.join(' ')).toContain('colder')
+    expect(safe).toMatch(/^2027-0[12]-/)
+    expect(later.body.facts).toEqual({ verdict: 'unsafe', nearestSafeDay: safe })
+    expect(later.body.detail).toContain(`The nearest day that is safe is ${safe}.`)
   })
 
-  it('refuses animals that nobody has figures for', async () => {
-    const batch = await desk.batchOf('unknown', { body: { taxonId: 'redear_sunfish' } })
+  it('refuses animals so small that no figures reach them', async () => {
+    const batch = await desk.batchOf('unknown', { body: { sizeLoMm: 6.35, sizeHiMm: 6.35 } })
     const reply = await desk.ask(batch)
     expect([reply.status, reply.body.type]).toEqual([409, '/problems/trip-unsafe'])
     expect(reply.body.facts).toEqual({ verdict: 'unknown' })
@@ -186,6 +202,8 @@ describe('a shipped order', () => {
     expect(await stock()).toMatchObject({ free: 440, sold: 60 })
 
     await desk.travelTo(onShipDay(12))
+    const named = await act(hatchery, 'route-papers', { papers: [permit] })
+    expect(named.shipment).toMatchObject({ papersNeeded: [permit.kind], papers: [permit] })
     const checked = await act(hatchery, 'route-check')
     expect(checked.state).toBe('ready')
     expect(checked.shipment?.check).toMatchObject({ kind: 'seller', verdict: 'safe', shipDay: SHIP_DAY })
@@ -244,6 +262,21 @@ describe('a shipped order', () => {
     expect(over.money).toMatchObject({ refundedCents: 11_390, strip: { heldCents: 0 } })
     expect(await box.stock()).toMatchObject({ free: 440, sold: 0, shipped: 0 })
     expect(subjects('bea@example.org')).toContain('The box was never sent')
+    expect(await brokenInvariants(desk.db)).toEqual([])
+  })
+
+  it('keeps at most the deposit on the goods when it is cancelled late', async () => {
+    const box = await desk.ready('late cancel')
+    await desk.travelTo(new Date('2027-05-08T14:00:00Z'))
+    expect((await box.press(box.hatchery, 'hand-over', { code: '000000', count: 60 })).body.type).toBe(
+      '/problems/order-moved',
+    )
+    await box.act(box.bea, 'cancellation')
+    expect((await box.seen()).money).toMatchObject({
+      ...{ refundedCents: 10_055, feeCents: 80 },
+      strip: { heldCents: 0, releasedCents: 1255 },
+    })
+    expect(await box.stock()).toMatchObject({ free: 500, sold: 0 })
     expect(await brokenInvariants(desk.db)).toEqual([])
   })
 
@@ -308,13 +341,13 @@ describe('a shipped order', () => {
     expect(unlawful.body).toMatchObject({ errors: [{ pointer: '#/shipDay' }] })
     expect((await press(bea, 'ship-day', { shipDay: SHIP_DAY })).status).toBe(422)
     const key = keyed()
-    const moved = await press(bea, 'ship-day', { shipDay: '2027-05-12' }, key)
+    const moved = await box.pressAs(key, bea, ['ship-day', { shipDay: '2027-05-12' }])
     expect(moved.body).toMatchObject({
       state: 'scheduled',
       slot: { startsAt: '2027-05-12T10:00:00.000Z' },
       shipment: { arriveDay: '2027-05-13', promisedAt: '2027-05-14T00:00:00.000Z' },
     })
-    expect((await press(bea, 'ship-day', { shipDay: '2027-05-12' }, key)).body).toEqual(moved.body)
+    expect((await box.pressAs(key, bea, ['ship-day', { shipDay: '2027-05-12' }])).body).toEqual(moved.body)
     await act(hatchery, 'readiness')
     expect((await press(bea, 'ship-day', { shipDay: '2027-05-17' })).body.type).toBe('/problems/order-moved')
     await act(hatchery, 'ship-day', { shipDay: '2027-05-17' })
@@ -383,6 +416,7 @@ describe('a shipped order', () => {
     const before = await remindAt(new Date('2027-05-09T22:30:00Z'))
     expect(before.map(({ subject }) => subject)).toEqual(['Tomorrow: 1 box to bea'])
     await desk.travelTo(onShipDay(18))
+    await box.act(box.hatchery, 'route-papers', { papers: [permit] })
     await box.act(box.hatchery, 'route-check')
     await box.act(box.hatchery, 'dispatch', leaving())
     const evening = await remindAt(onShipDay(22))
