@@ -80,10 +80,13 @@ async function faultsOf(
   })
 }
 
-function refuse(faults: DispatchFault[], nearest: string | undefined): void {
+function refuse(
+  faults: DispatchFault[],
+  { today, nearest }: { today: string; nearest: string | undefined },
+): void {
   if (faults.length === 0) return
   const errors = faults.map(({ detail, pointer }) => ({ detail, pointer }))
-  const next = nearest ? ` The nearest day on which it may leave is ${nearest}.` : ''
+  const next = nearest && nearest !== today ? ` The nearest day on which it may leave is ${nearest}.` : ''
   throw new Problem('dispatch-refused', `${faults[0]?.detail ?? ''}${next} The animals and the money stay.`, {
     errors,
     ...(nearest ? { facts: { nearestShipDay: nearest } } : {}),
@@ -103,7 +106,7 @@ async function sendOff(tx: Tx, shipped: OrderShipped, given: { asked: Asked; kno
   if (!mayTry(order)) throw new Problem('order-moved', undefined, { facts: { state: order.state } })
   const shipment = await requireShipment(tx, order.id)
   const faults = await faultsOf(tx, { order, shipment, ticks: asked.ticks }, known)
-  refuse(faults, nearestDay(shipment.shipDay, known))
+  refuse(faults, { today: known.today, nearest: nearestDay(shipment.shipDay, known) })
   const at = now()
   const { tracking } = asked
   const movement = movementFactsOf({ ...shipped, order, shipment, tracking, at })

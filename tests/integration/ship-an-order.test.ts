@@ -17,6 +17,7 @@ import {
   LOUISVILLE,
   onShipDay,
   openShipDesk,
+  permit,
   SHIP_DAY,
   SHIP_NOW,
   shipping,
@@ -135,8 +136,8 @@ describe('reserving a box', () => {
     expect(await desk.db.select().from(routeCheck).where(eq(routeCheck.shipDay, '2027-01-11'))).toEqual([])
   })
 
-  it('refuses animals that nobody has figures for', async () => {
-    const batch = await desk.batchOf('unknown', { body: { taxonId: 'redear_sunfish' } })
+  it('refuses animals so small that no figures reach them', async () => {
+    const batch = await desk.batchOf('unknown', { body: { sizeLoMm: 6.35, sizeHiMm: 6.35 } })
     const reply = await desk.ask(batch)
     expect([reply.status, reply.body.type]).toEqual([409, '/problems/trip-unsafe'])
     expect(reply.body.facts).toEqual({ verdict: 'unknown' })
@@ -186,6 +187,8 @@ describe('a shipped order', () => {
     expect(await stock()).toMatchObject({ free: 440, sold: 60 })
 
     await desk.travelTo(onShipDay(12))
+    const named = await act(hatchery, 'route-papers', { papers: [permit] })
+    expect(named.shipment).toMatchObject({ papersNeeded: [permit.kind], papers: [permit] })
     const checked = await act(hatchery, 'route-check')
     expect(checked.state).toBe('ready')
     expect(checked.shipment?.check).toMatchObject({ kind: 'seller', verdict: 'safe', shipDay: SHIP_DAY })
@@ -383,6 +386,7 @@ describe('a shipped order', () => {
     const before = await remindAt(new Date('2027-05-09T22:30:00Z'))
     expect(before.map(({ subject }) => subject)).toEqual(['Tomorrow: 1 box to bea'])
     await desk.travelTo(onShipDay(18))
+    await box.act(box.hatchery, 'route-papers', { papers: [permit] })
     await box.act(box.hatchery, 'route-check')
     await box.act(box.hatchery, 'dispatch', leaving())
     const evening = await remindAt(onShipDay(22))

@@ -42,6 +42,15 @@ export const shipping: NonNullable<ListingBody['shipping']> = {
 /** Sixty fish at $0.89, box 12.00, freight 48.50: the worked example of the money rules. */
 const body: Partial<ListingBody> = { shipping, tiers: [{ fromCount: 25, unitCents: 89 }] }
 
+/** The paper that the demonstration rules ask a seller in Ohio for. */
+export const permit = {
+  kind: 'Ohio aquaculture permit, class A or B',
+  number: 'A 1142',
+  issuer: 'Ohio DNR',
+  issuedOn: '2027-01-04',
+  expiresOn: '2027-12-31',
+}
+
 interface Wish {
   body?: Partial<ListingBody>
   /** Of the reservation's body. */
@@ -130,6 +139,7 @@ export async function openShipDesk(label: string) {
   async function dispatched(name: string, wish: Wish = {}) {
     const box = await ready(name, wish)
     await desk.travelTo(onShipDay(18))
+    await box.act(box.hatchery, 'route-papers', { papers: [permit] })
     await box.act(box.hatchery, 'route-check')
     const state = (await box.act(box.hatchery, 'dispatch', leaving())).state
     expect(state).toBe('dispatched')
