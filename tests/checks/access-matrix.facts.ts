@@ -119,6 +119,15 @@ export const accessMatrix: AccessRow[] = [
     ...open,
     query: 'from=45202&to=40202&species=bluegill&packing=carton-overnight',
   },
+  // These batches are collected only.
+  {
+    route: 'readShipDays',
+    object: 'public-listing',
+    query: 'near=45202&quantity=25',
+    own: '409 409 409 409 409 409 409 409',
+    foreign: nobody,
+    missing: nobody,
+  },
   { route: 'readSeller', object: 'seller', own: everybody, missing: nobody },
   { route: 'listSellerListings', object: 'seller', query: 'near=45202', own: everybody, missing: nobody },
   {
@@ -180,6 +189,55 @@ export const accessMatrix: AccessRow[] = [
   { route: 'contestNoShow', send: { note: NOTE }, ...partysAct },
   { route: 'stopOrder', send: { cause: 'fraud', animals: 'free', note: NOTE }, ...staffsAct },
   { route: 'decideOrder', send: { outcome: 'handed-over', note: NOTE }, ...staffsAct },
+
+  // These orders are collected and over: whoever gets past the guards meets a 409.
+  {
+    route: 'listOrderShipDays',
+    object: 'order',
+    own: '401 409 409 404 409 409 404 404',
+    foreign: '401 404 404 409 409 409 404 404',
+    missing: nobodySignedIn,
+  },
+  {
+    route: 'chooseShipDay',
+    send: { shipDay: '2027-05-10' },
+    object: 'order',
+    own: '401 409 409 404 409 409 404 404',
+    foreign: '401 404 404 409 409 409 404 404',
+    missing: nobodySignedIn,
+  },
+  { route: 'checkRoute', ...sellersAct },
+  { route: 'keepRoutePapers', send: { papers: [] }, ...sellersAct },
+  { route: 'dispatchOrder', send: { tracking: '9400 1112', ticks: [] }, ...sellersAct },
+  { route: 'printOrderPacking', ...sellersAct },
+  { route: 'reportArrival', ...buyersAct },
+  { route: 'reportLateBox', ...buyersAct },
+  { route: 'reportLateArrival', send: { aliveCount: 25 }, ...buyersAct },
+  // Nothing travelled: there is no such paper.
+  {
+    route: 'readMovement',
+    object: 'order',
+    own: nobodySignedIn,
+    foreign: nobodySignedIn,
+    missing: nobodySignedIn,
+  },
+  { route: 'holdForWeather', send: { why: 'Frost all week.' }, ...sellersAct },
+  { route: 'agreeNewDay', send: {}, ...buyersAct },
+  { route: 'declineNewDay', ...buyersAct },
+  { route: 'listRoutes', object: 'none', own: '401 403 200 200 403 403 403 403' },
+  {
+    route: 'checkRoutes',
+    object: 'none',
+    send: { shipDay: '2027-05-10', hold: false },
+    own: '401 403 200 200 403 403 403 403',
+  },
+  { route: 'listNoShipDays', object: 'none', own: staffOn('200') },
+  {
+    route: 'keepNoShipDay',
+    object: 'none',
+    send: { day: '2020-01-01', why: 'Long over', isOff: false },
+    own: staffOn('422'),
+  },
 
   { route: 'rateOrder', send: { marks: { fish: 5, count: 5, contact: 5 } }, ...buyersAct },
   // Nobody has rated these orders: there is nothing to change or to reply to.
