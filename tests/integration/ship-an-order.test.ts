@@ -311,13 +311,13 @@ describe('a shipped order', () => {
     expect(unlawful.body).toMatchObject({ errors: [{ pointer: '#/shipDay' }] })
     expect((await press(bea, 'ship-day', { shipDay: SHIP_DAY })).status).toBe(422)
     const key = keyed()
-    const moved = await press(bea, 'ship-day', { shipDay: '2027-05-12' }, key)
+    const moved = await box.pressAs(key, bea, ['ship-day', { shipDay: '2027-05-12' }])
     expect(moved.body).toMatchObject({
       state: 'scheduled',
       slot: { startsAt: '2027-05-12T10:00:00.000Z' },
       shipment: { arriveDay: '2027-05-13', promisedAt: '2027-05-14T00:00:00.000Z' },
     })
-    expect((await press(bea, 'ship-day', { shipDay: '2027-05-12' }, key)).body).toEqual(moved.body)
+    expect((await box.pressAs(key, bea, ['ship-day', { shipDay: '2027-05-12' }])).body).toEqual(moved.body)
     await act(hatchery, 'readiness')
     expect((await press(bea, 'ship-day', { shipDay: '2027-05-17' })).body.type).toBe('/problems/order-moved')
     await act(hatchery, 'ship-day', { shipDay: '2027-05-17' })

@@ -96,11 +96,13 @@ export async function openShipDesk(label: string) {
     const hatchery = await desk.signedIn(desk.hatcheryEmail)
     const path = `/api/v1/orders/${order.orderId}`
     const seen = async (by = bea) => (await by.get(path).expect(200)).body as ShownOrder
-    const press = async (by: typeof bea, what: string, send: object = {}, key = keyed()) => {
-      const answer = await by.post(`${path}/${what}`).set(key).send(send)
+    /** With a key of one's own, to press again. */
+    const pressAs = async (key: ReturnType<typeof keyed>, by: typeof bea, asked: [string, object]) => {
+      const answer = await by.post(`${path}/${asked[0]}`).set(key).send(asked[1])
       await desk.quiet()
       return answer
     }
+    const press = (by: typeof bea, what: string, send: object = {}) => pressAs(keyed(), by, [what, send])
     const act = async (by: typeof bea, what: string, send: object = {}) => {
       const answer = await press(by, what, send)
       expect(answer.status, JSON.stringify(answer.body)).toBe(200)
@@ -116,7 +118,7 @@ export async function openShipDesk(label: string) {
         .update(shipment)
         .set(change)
         .where(eq(shipment.orderId, (await row())?.id ?? 0))
-    return { batch, order, bea, hatchery, path, seen, press, act, stock, row, setOrder, setShipment }
+    return { batch, order, bea, hatchery, path, seen, press, pressAs, act, stock, row, setOrder, setShipment }
   }
 
   /** Deposit paid: the day chosen with the reservation is agreed. */
