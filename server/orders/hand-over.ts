@@ -78,6 +78,12 @@ async function refundShort(tx: Tx, order: OrderRow, count: number): Promise<void
 export async function handOver(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const seen = await orderSeenBy(caller, orderId)
   if (seen.party !== 'seller') throw new Problem('not-found')
+  if (seen.order.handOver === 'ship') {
+    throw new Problem(
+      'order-moved',
+      'This order is shipped: it goes to the carrier, and no code is asked for.',
+    )
+  }
   if (seen.order.state === 'ready' && !mayAct('hand-over', seen.order, 'seller')) {
     throw new Problem(
       'balance-unpaid',

@@ -134,6 +134,21 @@ describe('reserving a box', () => {
     expect(reply.body.detail).toContain('colder')
     expect(reply.body.facts).toEqual({ verdict: 'unsafe' })
     expect(await desk.db.select().from(routeCheck).where(eq(routeCheck.shipDay, '2027-01-11'))).toEqual([])
+    // A fortnight later some of the next days are mild enough: the first of them is named, as the offers have it.
+    await desk.travelToWithoutRest(new Date('2027-01-18T15:00:00Z'))
+    const later = await desk.ask(batch, { ship: { shipDay: '2027-01-20' } })
+    const offers = (
+      await desk
+        .visitor()
+        .get(`/api/v1/listings/${batch.publicId}/ship-days`)
+        .query({ near: LOUISVILLE, quantity: 60 })
+        .expect(200)
+    ).body as ShipDayOffers
+    const safe = offers.days.find(({ verdict }) => verdict === 'safe')?.shipDay
+    expect(offers.days[0]?.reasons.join(' ')).toContain('colder')
+    expect(safe).toMatch(/^2027-0[12]-/)
+    expect(later.body.facts).toEqual({ verdict: 'unsafe', nearestSafeDay: safe })
+    expect(later.body.detail).toContain(`The nearest day that is safe is ${safe}.`)
   })
 
   it('refuses animals so small that no figures reach them', async () => {
@@ -247,6 +262,21 @@ describe('a shipped order', () => {
     expect(over.money).toMatchObject({ refundedCents: 11_390, strip: { heldCents: 0 } })
     expect(await box.stock()).toMatchObject({ free: 440, sold: 0, shipped: 0 })
     expect(subjects('bea@example.org')).toContain('The box was never sent')
+    expect(await brokenInvariants(desk.db)).toEqual([])
+  })
+
+  it('keeps at most the deposit on the goods when it is cancelled late', async () => {
+    const box = await desk.ready('late cancel')
+    await desk.travelTo(new Date('2027-05-08T14:00:00Z'))
+    expect((await box.press(box.hatchery, 'hand-over', { code: '000000', count: 60 })).body.type).toBe(
+      '/problems/order-moved',
+    )
+    await box.act(box.bea, 'cancellation')
+    expect((await box.seen()).money).toMatchObject({
+      ...{ refundedCents: 10_055, feeCents: 80 },
+      strip: { heldCents: 0, releasedCents: 1255 },
+    })
+    expect(await box.stock()).toMatchObject({ free: 500, sold: 0 })
     expect(await brokenInvariants(desk.db)).toEqual([])
   })
 
