@@ -5,15 +5,8 @@ import type { BatchShipping } from '@/shared/contracts/fish-batch'
 import type { ListingBody } from '@/shared/contracts/listings'
 import { dateAfter } from '@/shared/domain/calendar/day-number'
 import { packingClasses } from '@/shared/domain/season/season-classes.facts'
+import { FASTING_DAYS } from '@/shared/domain/shipping/fasting-days'
 import type { ShipDayRule } from '@/shared/domain/shipping/ship-days'
-import type { SourceKey } from '@/shared/sources'
-
-/**
- * Days between choosing a ship day and the day itself, so that fish can be kept without food for 24 to 48 hours before
- * they travel. Source below.
- */
-const DAYS_BEFORE = 2
-export const fastingSource: SourceKey = 'mx392'
 
 /** How a batch is shipped; a batch that is collected only is an error of ours by then. */
 export function shippingOf({ shipping }: Pick<ListingBody, 'shipping'>): BatchShipping {
@@ -32,6 +25,6 @@ export const sellersToday = (zone: string): string => dayOf(now(), zone)
 
 /** The first day that may still be chosen: animals not ready yet do not leave before they are. */
 export function firstShipDay({ readyOn }: Pick<ListingBody, 'readyOn'>, zone: string): string {
-  const soonest = dateAfter(sellersToday(zone), DAYS_BEFORE)
+  const soonest = dateAfter(sellersToday(zone), FASTING_DAYS)
   return readyOn !== undefined && readyOn > soonest ? readyOn : soonest
 }
