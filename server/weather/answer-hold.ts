@@ -6,8 +6,7 @@ import { hasCommand, lockOrder } from '@/server/orders/order-store'
 import { orderSeenBy } from '@/server/orders/party-of'
 import { refundEverything } from '@/server/orders/refund-everything'
 import { showAgain } from '@/server/orders/show-order'
-import { loadOrderWay } from '@/server/weather/order-way'
-import { requireLawfulDay, requireSafeWay } from '@/server/shipping/require-ship-day'
+import { requireNewDay } from '@/server/weather/require-new-day'
 import { takeNewDay } from '@/server/weather/take-new-day'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
@@ -20,11 +19,7 @@ type Asked = ParsedBody<Endpoints['agreeNewDay']> & { commandId: string }
 export async function agreeNewDay(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const { order, party } = await orderSeenBy(caller, orderId)
   if (party !== 'buyer') throw new Problem('not-found')
-  const held = asked.shipDay && order.state === 'weather_hold' ? await loadOrderWay(order) : null
-  if (held && asked.shipDay) {
-    await requireLawfulDay(held.way, { shipDay: asked.shipDay, pointer: '#/shipDay' })
-    await requireSafeWay(held.way, asked.shipDay)
-  }
+  if (asked.shipDay && order.state === 'weather_hold') await requireNewDay(order, asked.shipDay)
   await inTransaction(async (tx) => {
     const locked = await lockOrder(tx, order.id)
     if (!locked) throw new Problem('not-found')
