@@ -76,9 +76,10 @@ function batchFor(
       { day: shipDay, from: '06:00', until: '18:00', capacity: 1 },
       batch.farm.zone,
     ).startsAt
-    const reservedAt = after(begins, -LEAD_DAYS * DAY_MS + 9 * HOUR_MS)
-    if (reservedAt > after(batch.decidedAt, HOUR_MS) && reservedAt < after(choice.stage.at, -2 * HOUR_MS))
-      return { batch, shipDay, reservedAt }
+    const usual = after(begins, -LEAD_DAYS * DAY_MS + 9 * HOUR_MS)
+    const latest = after(choice.stage.at, -20 * HOUR_MS)
+    const reservedAt = usual < latest ? usual : latest
+    if (reservedAt > after(batch.decidedAt, HOUR_MS)) return { batch, shipDay, reservedAt }
   }
   return null
 }

@@ -18,9 +18,9 @@ export const shipStories: readonly ShipStory[] = [
   { path: 'ship-late', times: 1, daysFromNow: [-9, -4] },
   { path: 'ship-leaving', times: 1, daysFromNow: [0, 6], farm: 'hatchery' },
   { path: 'ship-leaving', times: 2, daysFromNow: [0, 6] },
-  { path: 'ship-coming', times: 1, daysFromNow: [2, 7], farm: 'hatchery', buyer: 'beginner' },
-  { path: 'ship-coming', times: 1, daysFromNow: [2, 7] },
-  { path: 'ship-held', times: 1, daysFromNow: [2, 7] },
+  { path: 'ship-coming', times: 1, daysFromNow: [2, 6], farm: 'hatchery', buyer: 'beginner' },
+  { path: 'ship-coming', times: 1, daysFromNow: [2, 6] },
+  { path: 'ship-held', times: 1, daysFromNow: [2, 6] },
 ]
 
 /** Hardy in a box, and allowed between the three states by the demonstration's rows. */
