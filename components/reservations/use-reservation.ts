@@ -2,7 +2,7 @@ import { useRouter } from 'expo-router'
 import { useState } from 'react'
 
 import { isShippedHere, quoteReservation, reservationErrors, type Way } from './reservation'
-import { blankAddress, isZip, trimmedAddress } from './ship-address'
+import { blankAddress, isZip, trimmedAddress, type AddressTyping } from './ship-address'
 
 import { goToPayment } from '@/components/orders/go-to-payment'
 import { newRequestKey } from '@/hooks/request-key'
@@ -44,9 +44,9 @@ export function useReservation({ listing: opened, count, wantedWay }: Asked) {
   )
   const near = place?.near ?? ''
   const onlyState = opened.body.statesServed.length === 1 ? opened.body.statesServed[0] : undefined
-  const [address, setAddress] = useState(() =>
-    blankAddress(isZip(near) ? near : '', onlyState ?? place?.state ?? ''),
-  )
+  const [typedAddress, setAddress] = useState<AddressTyping | null>(null)
+  // The place searched for comes late for a member who has just signed in: it fills the form until something is typed.
+  const address = typedAddress ?? blankAddress(isZip(near) ? near : '', onlyState ?? place?.state ?? '')
   const [payMode, setPayMode] = useState<'deposit' | 'full'>('deposit')
   const [ticked, setTicked] = useState<readonly string[]>([])
   const reserve = useReserveBatch(opened.listingId, key)
