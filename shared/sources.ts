@@ -84,6 +84,8 @@ const table = {
   'arguez-2012': { author: 'Arguez et al., NOAA NCEI', year: 2012, title: "NOAA's 1981-2010 US climate normals, Bull. Am. Meteorol. Soc., doi:10.1175/BAMS-D-11-00197.1", where: 'monthly normals', reading: 'read' },
   'census-zcta': { author: 'US Census Bureau', year: 2021, title: 'Gazetteer files: ZIP Code Tabulation Areas', where: 'internal points', reading: 'read' },
   'geonames': { author: 'GeoNames', year: null, title: 'Places with population, CC BY 4.0', where: null, reading: 'read' },
+  'open-meteo': { author: 'Open-Meteo', year: null, title: 'Weather forecast by interface; data under CC BY 4.0', where: null, reading: 'from memory' },
+  'us-holidays': { author: '18F', year: null, title: 'us-federal-holidays, days on which federal holidays are observed, CC0', where: null, reading: 'read' },
   // Produce and media
   'ne-veg-guide': { author: 'New England Vegetable Management Guide', year: null, title: 'Storage conditions of vegetables, after USDA Handbook 66', where: 'table 16', reading: 'read' },
   'ucd-produce-facts': { author: 'Cantwell & Reid, UC Davis Postharvest Center', year: null, title: 'Produce Facts: fresh culinary herbs', where: null, reading: 'read' },
@@ -147,7 +149,13 @@ export type SourceKey = keyof typeof table
 export const sources: Readonly<Record<SourceKey, Source>> = table
 
 /** Where the shipped tables of places and climate come from; each is credited on the page about sources. */
-export const openDataSources: readonly SourceKey[] = ['geonames', 'census-zcta', 'arguez-2012']
+export const openDataSources: readonly SourceKey[] = [
+  'geonames',
+  'census-zcta',
+  'arguez-2012',
+  'open-meteo',
+  'us-holidays',
+]
 
 /** One line for a reader: author, year, title, place in it, how it was read. */
 export function printSource(key: SourceKey): string {

@@ -13,9 +13,9 @@ const published = (Object.keys(sources) as SourceKey[]).filter(isPublished)
 
 const parts: readonly { title: string; intro: string; keys: readonly SourceKey[] }[] = [
   {
-    title: 'Places and climate',
+    title: 'Places, climate, forecast and holidays',
     intro:
-      'Towns and their people come from GeoNames (Creative Commons Attribution 4.0; we snapped them to areas). ZIP areas and climate normals are works of the US government.',
+      'Towns and their people come from GeoNames (Creative Commons Attribution 4.0; we snapped them to areas). ZIP areas and climate normals are works of the US government. Forecasts of the coming week come from the weather service that this installation names; a practice installation invents them and says so.',
     keys: openDataSources,
   },
   {
