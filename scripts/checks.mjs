@@ -41,6 +41,13 @@ export const CHECKS = [
     faultCommand: ['node', '--import', 'tsx', 'scripts/check-ics.ts', '--cases', '500', '--plant-fault'],
     ci: true,
   },
+  {
+    name: 'csv',
+    command: ['node', '--import', 'tsx', 'scripts/check-csv.ts'],
+    sliceCommand: ['node', '--import', 'tsx', 'scripts/check-csv.ts'],
+    faultCommand: ['node', '--import', 'tsx', 'scripts/check-csv.ts', '--plant-fault'],
+    ci: false,
+  },
   proof('matrix'),
   proof('headers'),
   proof('privacy'),

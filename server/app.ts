@@ -25,6 +25,7 @@ import { placeRoutes } from '@/server/places/place-routes'
 import { ratingRoutes } from '@/server/ratings/rating-routes'
 import { searchRoutes } from '@/server/search/search-routes'
 import { sellerRoutes } from '@/server/sellers/seller-routes'
+import { statementRoutes } from '@/server/statements/statement-routes'
 import { sessionRoutes } from '@/server/sessions/session-routes'
 import { shareRoutes } from '@/server/share/share-routes'
 import { shipRoutes } from '@/server/shipping/ship-routes'
@@ -42,7 +43,15 @@ function api(origins: string[]): Router {
   const router = Router()
   router.use(sameOrigin(origins))
   router.use(express.json({ limit: '256kb', strict: true }))
-  router.use(placeRoutes(), memberRoutes(), sessionRoutes(), sellerRoutes(), photoRoutes(), searchRoutes())
+  router.use(
+    placeRoutes(),
+    memberRoutes(),
+    sessionRoutes(),
+    sellerRoutes(),
+    statementRoutes(),
+    photoRoutes(),
+    searchRoutes(),
+  )
   router.use(listingRoutes(), tripRoutes(), orderRoutes(), weatherRoutes(), calendarRoutes(), shipRoutes())
   router.use(ratingRoutes(), moderationRoutes(), noticeRoutes())
   router.use(packingRoutes(), openapiRoutes())

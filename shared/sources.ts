@@ -139,6 +139,7 @@ const table = {
   'demonstration': { author: 'Tankward', year: 2026, title: 'Demonstration only, not a reading of any law', where: null, reading: 'own' },
   // Trade practice and ourselves
   'trade-practice': { author: 'Sellers and buyers in public pages', year: null, title: 'Trade practice as described', where: null, reading: 'read in a reproduction' },
+  'inform-act': { author: 'US Federal Trade Commission', year: null, title: 'INFORM Consumers Act, guidance for sellers: 200 sales and $5,000 in twelve months', where: null, reading: 'read in part' },
   'memory': { author: 'Tankward', year: null, title: 'From memory, not checked against a text', where: null, reading: 'from memory' },
   'house-rule': { author: 'Tankward', year: null, title: 'House rule: our own cautious judgement', where: null, reading: 'own' },
 } as const satisfies Record<string, Source>

@@ -28,7 +28,7 @@ export interface EndpointSpec<
   /** Absent: 204, nothing to say. */
   reply?: R
   /** The reply is bytes of this kind instead of JSON. */
-  replyMedia?: 'application/pdf'
+  replyMedia?: 'application/pdf' | 'text/csv'
   /** 200 unless said otherwise; 201 for things created. */
   status?: 200 | 201 | 204
   summary: string

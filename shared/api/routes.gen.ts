@@ -79,6 +79,9 @@ export interface Endpoints {
   reportArrival: typeof import('@/shared/contracts/ship-acts').reportArrival
   reportLateArrival: typeof import('@/shared/contracts/ship-acts').reportLateArrival
   reportLateBox: typeof import('@/shared/contracts/ship-acts').reportLateBox
+  printStatement: typeof import('@/shared/contracts/statements').printStatement
+  readRecord: typeof import('@/shared/contracts/statements').readRecord
+  readStatement: typeof import('@/shared/contracts/statements').readStatement
   readSeason: typeof import('@/shared/contracts/trips').readSeason
   readWayHome: typeof import('@/shared/contracts/trips').readWayHome
 }
@@ -163,6 +166,9 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   reportArrival: ['POST', '/orders/:orderId/arrival', false],
   reportLateArrival: ['POST', '/orders/:orderId/late-arrival', false],
   reportLateBox: ['POST', '/orders/:orderId/late-box', false],
+  printStatement: ['GET', '/statements/:month/csv', false],
+  readRecord: ['GET', '/record', false],
+  readStatement: ['GET', '/statements/:month', false],
   readSeason: ['GET', '/season', false],
   readWayHome: ['GET', '/listings/:listingId/way-home', false],
 }

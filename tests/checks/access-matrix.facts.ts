@@ -224,6 +224,9 @@ export const accessMatrix: AccessRow[] = [
   { route: 'holdForWeather', send: { why: 'Frost all week.' }, ...sellersAct },
   { route: 'agreeNewDay', send: {}, ...buyersAct },
   { route: 'declineNewDay', ...buyersAct },
+  { route: 'readStatement', object: 'none', own: '401 403 200 200 403 403 403 403' },
+  { route: 'printStatement', object: 'none', own: '401 403 200 200 403 403 403 403' },
+  { route: 'readRecord', object: 'none', own: '401 403 200 200 403 403 403 403' },
   { route: 'listRoutes', object: 'none', own: '401 403 200 200 403 403 403 403' },
   {
     route: 'checkRoutes',
