@@ -34,6 +34,10 @@ export function SellHome() {
                 <Link href="/orders/routes" size="note">
                   What you ship
                 </Link>
+                {' · '}
+                <Link href="/sell/record" size="note">
+                  Your record
+                </Link>
               </Text>
             </View>
             <ButtonLink
