@@ -35,13 +35,14 @@ const columns: readonly Column<StatementRow>[] = [
       <Link href={`/orders/${row.orderId}`} size="note">{`${printCount(row.quantity)} × ${row.title}`}</Link>
     ),
   },
+  // Second, so that a phone shows it without scrolling.
+  money('yoursCents', 'Yours'),
   { key: 'day', title: 'Released', cell: (row) => shortDay(row.day), sortBy: (row) => row.day },
   { key: 'kind', title: 'Kind', cell: (row) => kindWords[row.kind] },
   money('paidCents', 'Paid'),
   money('refundedCents', 'Refunded'),
   money('taxCents', 'Tax'),
   money('feeCents', 'Our fee'),
-  money('yoursCents', 'Yours'),
 ]
 
 interface Props {
