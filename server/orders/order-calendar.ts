@@ -21,6 +21,7 @@ function summaryOf(facts: LetterFacts, party: 'buyer' | 'seller'): string {
 function descriptionOf(facts: LetterFacts, party: 'buyer' | 'seller'): string {
   const { order, seller } = facts
   if (order.state === 'cancelled') return 'This order has ended; nobody needs to come.'
+  if (order.state === 'weather_hold') return 'Held for weather: wait for the new day.'
   const rest = order.balancePaidAt === null && order.balanceCents > 0 ? printCents(order.balanceCents) : null
   const lines =
     party === 'buyer'
@@ -56,7 +57,8 @@ export function orderCalendar(facts: LetterFacts, party: 'buyer' | 'seller'): Ca
   const { order, agreement, shipment } = facts
   const event = shipment ? shipmentEvent({ ...facts, shipment }, party) : pickupEvent(facts, party)
   if (!agreement || !event) return null
-  const isCancelled = order.state === 'cancelled'
+  // A held day is off until another one is agreed; the file that says so brings it back.
+  const isCancelled = order.state === 'cancelled' || order.state === 'weather_hold'
   const text = writeCalendar({
     ...event,
     uid: uidOf(order.publicId),

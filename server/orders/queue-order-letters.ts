@@ -12,7 +12,7 @@ import { edges, type EdgeId } from '@/shared/domain/orders/edges.facts'
 
 const DATE_FOLLOWS = new Set<EdgeId>(['E05', 'E07'])
 /** Agreed, moved or off: what a calendar has to know. */
-const CHANGES_CALENDAR = new Set(['scheduled', 'cancelled'])
+const CHANGES_CALENDAR = new Set(['scheduled', 'weather_hold', 'cancelled'])
 
 /**
  * Queues mails and notices of an edge with the change itself. Where the date follows in the same breath, one says both.

@@ -3,7 +3,7 @@ import type { OrderEventRow } from '@/server/orders/order-store'
 export interface Agreement {
   /** When the present time was agreed. */
   agreedAt: Date
-  /** 0 for the first agreed time, one more with each move and with the end: the SEQUENCE of the calendar file. */
+  /** 0 for the first agreed time, one more with each move, each hold and with the end: the SEQUENCE of the calendar file. */
   sequence: number
 }
 
@@ -16,5 +16,6 @@ export function agreementOf(events: readonly Told[]): Agreement | null {
   const last = agreed.at(-1)
   if (!last) return null
   const isOver = changes.some((event) => event.toState === 'cancelled')
-  return { agreedAt: last.at, sequence: agreed.length - 1 + (isOver ? 1 : 0) }
+  const holds = changes.filter((event) => event.toState === 'weather_hold').length
+  return { agreedAt: last.at, sequence: agreed.length - 1 + holds + (isOver ? 1 : 0) }
 }

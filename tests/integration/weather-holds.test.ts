@@ -83,7 +83,11 @@ describe('a cold snap before a box leaves', () => {
       /^The route is too cold on Mon, May 10: .+, (OH|KY) 3 °F \(-16 °C\)\. We propose Mon, May 17\. You may cancel for a full refund\.$/,
     )
     expect(held.may).toEqual(expect.arrayContaining(['agree-new-day', 'decline-new-day']))
-    expect(lettersAbout(/Held for weather/)).toHaveLength(2)
+    const told = lettersAbout(/Held for weather/)
+    expect(told).toHaveLength(2)
+    // The held day leaves both calendars; the day that comes instead has a higher number.
+    expect(told.map((letter) => letter.calendar?.method)).toEqual(['CANCEL', 'CANCEL'])
+    expect(told[0]?.calendar?.text).toMatch(/^SEQUENCE:1\r?$/m)
 
     await wait(EVENING, 71.9)
     expect((await box.seen()).state).toBe('weather_hold')
@@ -92,6 +96,7 @@ describe('a cold snap before a box leaves', () => {
     expect(moved.state).toBe('scheduled')
     expect(moved.shipment).toMatchObject({ shipDay: '2027-05-17', arriveDay: '2027-05-18' })
     expect(moved.hold?.answer).toBe('silence')
+    expect(lettersAbout(/^New day/)[0]?.calendar?.text).toMatch(/^SEQUENCE:2\r?$/m)
     // A day that nobody chose binds nobody: free to cancel until it begins.
     expect(moved.freeCancelUntil).toBe('2027-05-17T10:00:00.000Z')
   })
