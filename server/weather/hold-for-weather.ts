@@ -5,8 +5,7 @@ import { mayAct } from '@/server/orders/order-policy'
 import { orderSeenBy } from '@/server/orders/party-of'
 import { showAgain } from '@/server/orders/show-order'
 import { holdOrder } from '@/server/weather/hold-order'
-import { requireLawfulDay, requireSafeWay } from '@/server/shipping/require-ship-day'
-import { loadOrderWay } from '@/server/weather/order-way'
+import { requireNewDay } from '@/server/weather/require-new-day'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
@@ -18,19 +17,7 @@ type Asked = ParsedBody<Endpoints['holdForWeather']> & { commandId: string }
 export async function holdForWeather(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const { order, party } = await orderSeenBy(caller, orderId)
   if (party !== 'seller') throw new Problem('not-found')
-  const isShipped = order.handOver === 'ship'
-  if (isShipped ? asked.windowId : asked.shipDay) {
-    const pointer = isShipped ? '#/windowId' : '#/shipDay'
-    const detail = isShipped
-      ? 'This order is shipped: propose a ship day.'
-      : 'This order is collected: propose a pickup time.'
-    throw new Problem('fields-invalid', undefined, { errors: [{ detail, pointer }] })
-  }
-  const held = asked.shipDay && mayAct('hold-for-weather', order, 'seller') ? await loadOrderWay(order) : null
-  if (held && asked.shipDay) {
-    await requireLawfulDay(held.way, { shipDay: asked.shipDay, pointer: '#/shipDay' })
-    await requireSafeWay(held.way, asked.shipDay)
-  }
+  if (mayAct('hold-for-weather', order, 'seller')) await requireNewDay(order, asked)
   await inTransaction(async (tx) => {
     const locked = await lockOrder(tx, order.id)
     if (!locked) throw new Problem('not-found')
