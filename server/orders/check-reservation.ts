@@ -5,11 +5,9 @@ import { readListingRow, readSellerById, type SellerRow } from '@/server/orders/
 import { shortOf } from '@/server/orders/short-of'
 import { readLiveTerms } from '@/server/orders/terms-store'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
+import { requireOrderSize } from '@/server/orders/require-order-size'
 import { Problem } from '@/shared/api/problem'
 import type { ListingBody } from '@/shared/contracts/listings'
-import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
-import { tierFor } from '@/shared/domain/money/tier-price'
-import { printCents } from '@/shared/units/money'
 
 export interface CheckedReservation {
   listing: NonNullable<Awaited<ReturnType<typeof readListingRow>>>
@@ -19,7 +17,7 @@ export interface CheckedReservation {
 }
 
 function checkQuantity(terms: ListingBody, quantity: number): void {
-  const { minOrder, orderStep, mostPerBuyer, tiers } = terms
+  const { minOrder, orderStep, mostPerBuyer } = terms
   const refuse = (detail: string) =>
     new Problem('fields-invalid', undefined, { errors: [{ detail, pointer: '#/quantity' }] })
   if (quantity < minOrder) {
@@ -30,8 +28,7 @@ function checkQuantity(terms: ListingBody, quantity: number): void {
   }
   if (mostPerBuyer !== undefined && quantity > mostPerBuyer)
     throw refuse(`At most ${mostPerBuyer} for one buyer.`)
-  if ((tierFor(tiers, quantity)?.unitCents ?? 0) * quantity > mostOrderCents)
-    throw refuse(`One order may come to at most ${printCents(mostOrderCents)}. Ask for fewer.`)
+  requireOrderSize(terms, { quantity, pointer: '#/quantity' })
 }
 
 /** What can be said no to before anything is held: who, what, how many, under which terms. */

@@ -6,7 +6,7 @@ import { endHold } from '@/server/orders/end-hold'
 import { keepDeposit } from '@/server/orders/keep-deposit'
 import { letMoneyGo } from '@/server/orders/let-money-go'
 import { markAnswerMissed, markDayMissed, markNoShow } from '@/server/orders/party-store'
-import type { OrderRow } from '@/server/orders/order-store'
+import { lockOrder, type OrderRow } from '@/server/orders/order-store'
 import { refundEverything } from '@/server/orders/refund-everything'
 import { takeDayBySilence } from '@/server/weather/silent-hold'
 import type { EdgeId } from '@/shared/domain/orders/edges.facts'
@@ -17,10 +17,15 @@ type Aftermath = (tx: Tx, order: OrderRow) => Promise<unknown>
 /** A timer's command id: the same ring twice changes nothing. */
 const ringOf = (edge: string, order: OrderRow) => `clock:${edge}:${order.clockAt?.getTime() ?? 0}`
 
-/** The edge by the clock, and what follows from it in the same transaction. */
+/**
+ * The edge by the clock, and what follows from it in the same transaction. The order was read before it is locked: a
+ * balance that came meanwhile, or another hold, has set another clock, and this one is over.
+ */
 function byClock(edge: EdgeId, then: Aftermath, change: Partial<OrderRow> = {}): ClockEdge {
   return (order) =>
     inTransaction(async (tx) => {
+      const locked = await lockOrder(tx, order.id)
+      if (!locked || locked.clockEdge !== edge || ringOf(edge, locked) !== ringOf(edge, order)) return
       const outcome = await applyEdge(tx, {
         edge,
         orderId: order.id,
@@ -36,8 +41,6 @@ const sellerSilent = byClock('E09', async (tx, order) => {
   await letMoneyGo(tx, order)
   await markAnswerMissed(tx, order.sellerId)
 })
-
-const balanceUnpaid = byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid'))
 
 const dayMissed = (edge: 'E26' | 'E34') =>
   byClock(edge, async (tx, order) => {
@@ -76,8 +79,7 @@ export const clockEdges: Partial<Record<string, ClockEdge>> = {
   E19: (order) => takeDayBySilence(order, ringOf('E19', order)),
   E21: byClock('E21', (tx, order) => refundEverything(tx, order, 'hold-no-consent')),
   E17: byClock('E17', (tx, order) => refundEverything(tx, order, 'never-scheduled')),
-  // A clock set before the balance came must not end a paid order.
-  E23: async (order) => (order.balancePaidAt === null ? balanceUnpaid(order) : undefined),
+  E23: byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid')),
   E26: dayMissed('E26'),
   E31: buyerAbsent,
   E32: sellerAbsent,

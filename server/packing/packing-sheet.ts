@@ -1,5 +1,6 @@
 import PdfPage from 'pdfkit'
 
+import { labelText } from '@/shared/domain/shipping/label-text'
 import type { PackingSheet } from '@/shared/domain/transport/packing-sheet'
 
 const MARGIN_PT = 54
@@ -24,11 +25,11 @@ export function renderPackingSheet(
     info: { Title: title, Creator: 'Tankward' },
   })
   const done = bytesOf(page)
-  page.fillColor('#000').font('Helvetica-Bold').fontSize(16).text(title)
+  page.fillColor('#000').font('Helvetica-Bold').fontSize(16).text(labelText(title))
   for (const { heading, lines } of sections) {
-    page.moveDown(0.5).font('Helvetica-Bold').fontSize(11).text(heading)
+    page.moveDown(0.5).font('Helvetica-Bold').fontSize(11).text(labelText(heading))
     page.font('Helvetica').fontSize(9.5)
-    for (const line of lines) page.text(`- ${line}`, { lineGap: 1 })
+    for (const line of lines) page.text(labelText(`- ${line}`), { lineGap: 1 })
   }
   if (labels.length === 0) drawLabel(page, label)
   for (const one of labels) drawBoxLabel(page, one)
@@ -41,7 +42,7 @@ function drawLabel(page: PdfPage, label: readonly string[]) {
   const width = page.page.width - 2 * MARGIN_PT
   page.moveDown(0.8).font('Helvetica-Bold').fontSize(11).text('Label for each box: cut out')
   page.moveDown(0.3).fontSize(12)
-  const text = label.join('\n')
+  const text = label.map(labelText).join('\n')
   const height = page.heightOfString(text, { width: width - 2 * LABEL_PAD_PT }) + 2 * LABEL_PAD_PT
   if (page.y + height > page.page.height - MARGIN_PT) page.addPage()
   const top = page.y
@@ -57,7 +58,7 @@ function drawBoxLabel(page: PdfPage, { heading, lines, note }: BoxLabel) {
   page.font('Helvetica-Bold').fontSize(22)
   page.text(heading, MARGIN_PT + LABEL_PAD_PT, top + LABEL_PAD_PT, inside)
   page.fontSize(15)
-  for (const line of lines) page.text(line, inside)
+  for (const line of lines) page.text(labelText(line), inside)
   const height = page.y - top + LABEL_PAD_PT
   page.lineWidth(1).strokeColor('#000').rect(MARGIN_PT, top, width, height).stroke()
   page.font('Helvetica').fontSize(9.5)

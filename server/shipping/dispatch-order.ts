@@ -41,7 +41,12 @@ const isCheckVerdict = (verdict: string): verdict is DispatchCheck['verdict'] =>
 function checkFacts(row: RouteCheckRow | undefined): DispatchCheck | null {
   if (!row) return null
   const verdict = isCheckVerdict(row.verdict) ? row.verdict : 'unknown'
-  return { verdict, atMs: row.at.getTime(), reasons: reasonsOf({ verdict, reasons: row.facts.reasons }) }
+  const { reasons, packing } = row.facts
+  return {
+    ...{ verdict, atMs: row.at.getTime() },
+    isPackingKnown: packing !== undefined,
+    reasons: reasonsOf({ verdict, reasons }),
+  }
 }
 
 async function learn({ order, terms }: OrderShipped): Promise<Known> {

@@ -1,4 +1,5 @@
 import type { SellerRow } from '@/server/orders/party-store'
+import { requireOrderSize } from '@/server/orders/require-order-size'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
 import type { FoundPlace } from '@/server/places/find-place'
 import type { JudgedWay } from '@/server/shipping/judge-way'
@@ -67,6 +68,7 @@ export async function planReserved(wanted: Wanted): Promise<ReservedShipment | n
   const errors = addressFaults(ask, wanted)
   if (errors.length > 0) throw new Problem('fields-invalid', undefined, { errors })
   const way = wayTo({ terms, seller, quantity: asked.quantity }, place)
+  requireOrderSize(terms, { quantity: asked.quantity, charges: way.charges, pointer: '#/quantity' })
   const { shipDay } = ask
   const { arriveDay } = await requireLawfulDay(way, { shipDay, pointer: '#/ship/shipDay' })
   const judged = await requireSafeWay(way, shipDay)

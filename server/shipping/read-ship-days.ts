@@ -1,5 +1,6 @@
 import { isPublic } from '@/server/listings/listing-policy'
 import { readListingRow, readSellerById } from '@/server/orders/party-store'
+import { requireOrderSize } from '@/server/orders/require-order-size'
 import { readLiveTerms } from '@/server/orders/terms-store'
 import { requirePlace } from '@/server/places/find-place'
 import { judgeListing } from '@/server/rules/judge-listing'
@@ -36,5 +37,7 @@ export async function readShipDays({ listingId, near, quantity }: Asked): Promis
   if (verdict.buy === 'no') {
     throw new Problem('species-prohibited', `These animals are not sold to ${place.state}.`)
   }
-  return offerShipDays(wayTo({ terms, quantity, seller }, place), firstShipDay(terms, seller.zone))
+  const way = wayTo({ terms, quantity, seller }, place)
+  requireOrderSize(terms, { quantity, charges: way.charges, pointer: 'query:quantity' })
+  return offerShipDays(way, firstShipDay(terms, seller.zone))
 }

@@ -4,8 +4,14 @@ import { reasonsOf } from '@/server/shipping/reasons-of'
 import { firstShipDay, shipRuleOf } from '@/server/shipping/ship-rule'
 import type { ShipWay } from '@/server/shipping/ship-way'
 import { Problem } from '@/shared/api/problem'
+import { dateAfter } from '@/shared/domain/calendar/day-number'
 import { faultWords } from '@/shared/domain/shipping/fault-words'
-import { judgeShipDay, nearestShipDay, type JudgedShipDay } from '@/shared/domain/shipping/ship-days'
+import {
+  judgeShipDay,
+  nearestShipDay,
+  SHIP_DAYS_AHEAD,
+  type JudgedShipDay,
+} from '@/shared/domain/shipping/ship-days'
 import { worstWords } from '@/shared/domain/shipping/worst-words'
 
 interface Wanted {
@@ -23,12 +29,15 @@ export async function requireLawfulDay(
   const rule = await shipRuleOf(way.terms, first)
   const judged = judgeShipDay(shipDay, rule)
   const [fault] = judged.faults
-  if (shipDay >= first && !fault) return judged
-  const nearest = nearestShipDay(shipDay > first ? shipDay : first, rule)
+  const last = dateAfter(first, SHIP_DAYS_AHEAD)
+  if (shipDay >= first && shipDay <= last && !fault) return judged
+  const nearest = nearestShipDay(shipDay > first && shipDay <= last ? shipDay : first, rule)
   const why =
-    shipDay < first || !fault
-      ? `The first day on which these animals can leave is ${first}: they need a day or two without food.`
-      : faultWords(fault)
+    shipDay > last
+      ? `Nobody can promise a day so far ahead: the last one to choose is ${last}.`
+      : shipDay < first || !fault
+        ? `The first day on which these animals can leave is ${first}: they need a day or two without food.`
+        : faultWords(fault)
   throw new Problem('fields-invalid', undefined, {
     errors: [{ detail: nearest ? `${why} The nearest day is ${nearest.shipDay}.` : why, pointer }],
     ...(nearest ? { facts: { nearestShipDay: nearest.shipDay } } : {}),

@@ -17,15 +17,7 @@ type Asked = ParsedBody<Endpoints['holdForWeather']> & { commandId: string }
 export async function holdForWeather(caller: Caller, orderId: string, asked: Asked): Promise<ShownOrder> {
   const { order, party } = await orderSeenBy(caller, orderId)
   if (party !== 'seller') throw new Problem('not-found')
-  const isShipped = order.handOver === 'ship'
-  if (isShipped ? asked.windowId : asked.shipDay) {
-    const pointer = isShipped ? '#/windowId' : '#/shipDay'
-    const detail = isShipped
-      ? 'This order is shipped: propose a ship day.'
-      : 'This order is collected: propose a pickup time.'
-    throw new Problem('fields-invalid', undefined, { errors: [{ detail, pointer }] })
-  }
-  if (asked.shipDay && mayAct('hold-for-weather', order, 'seller')) await requireNewDay(order, asked.shipDay)
+  if (mayAct('hold-for-weather', order, 'seller')) await requireNewDay(order, asked)
   await inTransaction(async (tx) => {
     const locked = await lockOrder(tx, order.id)
     if (!locked) throw new Problem('not-found')

@@ -43,6 +43,8 @@ async function windowChange(
   if (windowId === undefined) {
     if (hold.proposedWindowId === null)
       throw new Problem('slot-full', 'No time is proposed yet. Choose one that is offered.')
+    if (hold.proposedStartsAt && hold.proposedStartsAt <= now())
+      throw new Problem('slot-full', 'The proposed time has begun already. Choose one that is offered.')
     if (order.windowId !== null) await freeSlot(tx, order.windowId)
     return {
       windowId: hold.proposedWindowId,

@@ -10,13 +10,17 @@ import {
   zipCode,
 } from '@/shared/contracts/values'
 import { packingClassIds } from '@/shared/domain/season/season-lane'
+import { isLabelText } from '@/shared/domain/shipping/label-text'
+
+const READABLE = 'Carriers and labels need plain letters: write it with A to Z, accents are fine.'
+const labelLine = (most: number) => line(most).normalize('NFC').refine(isLabelText, READABLE)
 
 /** Where a box goes: the seller reads it from the agreed day on, and it is printed on the label. */
 export const shipAddress = z
   .object({
-    name: line(80).min(2, 'Whose name is on the door?'),
-    street: line(120).min(3, 'Street and number.'),
-    city: line(64).min(2, 'Which town?'),
+    name: labelLine(80).min(2, 'Whose name is on the door?'),
+    street: labelLine(120).min(3, 'Street and number.'),
+    city: labelLine(64).min(2, 'Which town?'),
     state: stateCode,
     zip: zipCode,
     phone: line(24).regex(/^[0-9+() .-]{7,24}$/, 'A phone number that the carrier can ring.'),

@@ -12,6 +12,9 @@ export interface BoxCharges {
   freightCents: number
 }
 
+/** The most boxes of one order: nobody packs more in a morning. House rule. */
+export const MOST_BOXES = 500
+
 /** Boxes for a count of animals and what they come to, all boxes together. Throws RangeError below one animal or box size. */
 export function boxCharges(quantity: number, { boxCents, freightCents, mostInBox }: BoxTerms): BoxCharges {
   if (!(Number.isInteger(quantity) && quantity > 0 && Number.isInteger(mostInBox) && mostInBox > 0)) {

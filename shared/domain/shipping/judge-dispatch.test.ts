@@ -21,7 +21,7 @@ const good: DispatchFacts = {
   shipDay: '2027-05-17',
   arriveDay: '2027-05-18',
   today: today('2027-05-17'),
-  check: { verdict: 'safe', atMs: nowMs - 12 * HOUR_MS, reasons: [] },
+  check: { verdict: 'safe', atMs: nowMs - 12 * HOUR_MS, isPackingKnown: true, reasons: [] },
   nowMs,
   ticksNeeded: ['strong-carton', 'carrier-told'],
   ticks: ['carrier-told', 'strong-carton'],
@@ -32,6 +32,7 @@ const codesOf = (change: Partial<DispatchFacts>) =>
 
 const papers = (expiresOn: string, kind = 'Health paper') => [{ kind, expiresOn }]
 const check = (verdict: 'safe' | 'unsafe' | 'unknown', hours: number) => ({
+  isPackingKnown: true,
   verdict,
   atMs: nowMs - hours * HOUR_MS,
   reasons: ['The water would begin to freeze.'],
@@ -39,6 +40,11 @@ const check = (verdict: 'safe' | 'unsafe' | 'unknown', hours: number) => ({
 
 const table: [string, Partial<DispatchFacts>, string[]][] = [
   ['nothing is wrong', {}, []],
+  [
+    'nobody knows how to pack',
+    { check: { ...check('safe', 1), isPackingKnown: false } },
+    ['packing-open #/check'],
+  ],
   ['the animals are not ready', { isReady: false }, ['not-ready #/state']],
   ['the balance is not paid', { isBalanceCaptured: false }, ['balance-unpaid #/balance']],
   ['a paper is not named', { papers: [] }, ['paper-missing #/papers']],

@@ -7,6 +7,8 @@ const HOUR_MS = 3_600_000
 export interface DispatchCheck {
   verdict: 'safe' | 'unsafe' | 'unknown'
   atMs: number
+  /** Whether it says how the boxes are packed. */
+  isPackingKnown: boolean
   /** Why it is not safe, in sentences. */
   reasons: readonly string[]
 }
@@ -38,6 +40,7 @@ export interface DispatchFault {
     | 'check-missing'
     | 'check-old'
     | 'check-not-safe'
+    | 'packing-open'
     | 'day-not-agreed'
     | 'day-not-lawful'
     | 'tick-missing'
@@ -102,6 +105,11 @@ function checkFaults({ check, shipDay, nowMs }: DispatchFacts): DispatchFault[] 
   if (check.verdict !== 'safe') {
     const said = check.verdict === 'unsafe' ? 'The way is not safe.' : 'Nobody can say that the way is safe.'
     faults.push({ code: 'check-not-safe', pointer, detail: [said, ...check.reasons].join(' ') })
+  }
+  if (check.verdict === 'safe' && !check.isPackingKnown) {
+    const detail =
+      'The forecast did not answer, and without it nobody knows how to pack. Look at the way once more.'
+    faults.push({ code: 'packing-open', pointer, detail })
   }
   const ageMs = nowMs - check.atMs
   if (ageMs > FRESH_MS) {
