@@ -101,11 +101,3 @@ export async function tabTo(page: Page, name: string | RegExp): Promise<void> {
   }
   throw new Error(`Tab never reached ${name}; it met: ${[...new Set(met)].join(' | ')}`)
 }
-
-/** The same in both of the app's looks; the page keeps the one it had. */
-export async function expectNoAxeInBothThemes(page: Page): Promise<void> {
-  for (const colorScheme of ['dark', 'light'] as const) {
-    await page.emulateMedia({ colorScheme })
-    await expectNoAxeViolations(page)
-  }
-}

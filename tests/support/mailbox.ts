@@ -49,11 +49,11 @@ export async function clearMails(mailOrigin: string): Promise<void> {
   await fetch(`${mailOrigin}/api/messages`, { method: 'DELETE' })
 }
 
-/** What an attached file says; fails when the mail has none of that name. */
-export async function fileIn(mailOrigin: string, mail: Mail, name: string): Promise<string> {
+/** The bytes of an attached file; fails when the mail has none of that name. */
+export async function fileIn(mailOrigin: string, mail: Mail, name: string): Promise<Uint8Array> {
   const at = mail.attachments.findIndex((file) => file.name === name)
   if (at < 0) throw new Error(`"${mail.subject}" brings ${JSON.stringify(mail.attachments)}, not ${name}`)
-  const answer = await fetch(`${mailOrigin}/messages/${mail.id}/files/${at}`)
+  const answer = await fetch(`${mailOrigin}/mails/${mail.id}/files/${at}`)
   if (!answer.ok) throw new Error(`the mail catcher answered ${answer.status}`)
-  return answer.text()
+  return new Uint8Array(await answer.arrayBuffer())
 }
