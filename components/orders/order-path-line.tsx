@@ -13,6 +13,7 @@ function pathOf(order: ShownOrder): OrderPath {
   return orderPath({
     ...{ state, party, handOver, balanceDue, balancePaid, reason, needsAcceptance },
     isPooled: false,
+    hasArrived: Boolean(order.shipment?.arrivedAt),
     clock: clock ? { atMs: Date.parse(clock.at), edge: clock.edge } : null,
   })
 }

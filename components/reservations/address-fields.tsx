@@ -48,7 +48,7 @@ export function AddressFields({ address, onChange, states, errorAt }: Props) {
             autoComplete="postal-code"
             inputMode="numeric"
             maxLength={5}
-            hint="It decides which rules and which weather count."
+            hint="For rules and weather."
             {...part('zip')}
           />
         </View>

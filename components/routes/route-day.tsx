@@ -3,7 +3,7 @@ import { StyleSheet, View } from 'react-native'
 
 import type { RouteDay as Day } from './group-routes'
 import { RouteCard } from './route-card'
-import { checkedWords, dayTotals } from './route-words'
+import { checkedWords, dayTotals, openRows } from './route-words'
 import { RoutesTable } from './routes-table'
 
 import { ActFailed } from '@/components/orders/act-failed'
@@ -28,7 +28,10 @@ export function RouteDay({ day: { shipDay, rows } }: { day: Day }) {
     check.mutate(
       { shipDay, hold },
       {
-        onSuccess: (answer) => say({ text: `${words}: ${checkedWords(answer)}` }),
+        onSuccess: ({ rows: all, held }) =>
+          say({
+            text: `${words}: ${checkedWords({ rows: all.filter((row) => row.shipDay === shipDay), held })}`,
+          }),
         onSettled: () => setAsking(false),
       },
     )
@@ -41,23 +44,25 @@ export function RouteDay({ day: { shipDay, rows } }: { day: Day }) {
           {dayTotals(rows)}
         </Text>
       </View>
-      <View style={styles.acts}>
-        <Button
-          kind="secondary"
-          icon="thermometer"
-          label="Look at all ways again"
-          spokenLabel={`Look at all ways again: ${words}`}
-          isBusy={running === false}
-          busyLabel="Looking at the weather"
-          onPress={() => look(false)}
-        />
-        <Button
-          kind="quiet"
-          label="…and hold those that are not safe"
-          spokenLabel={`…and hold those that are not safe: ${words}`}
-          onPress={() => setAsking(true)}
-        />
-      </View>
+      {openRows(rows).length === 0 ? null : (
+        <View style={styles.acts}>
+          <Button
+            kind="secondary"
+            icon="thermometer"
+            label="Look at all ways again"
+            spokenLabel={`Look at all ways again: ${words}`}
+            isBusy={running === false}
+            busyLabel="Looking at the weather"
+            onPress={() => look(false)}
+          />
+          <Button
+            kind="quiet"
+            label="Look again and hold what is not safe"
+            spokenLabel={`Look again and hold what is not safe: ${words}`}
+            onPress={() => setAsking(true)}
+          />
+        </View>
+      )}
       <ActFailed error={check.error} />
       {isWide ? (
         <RoutesTable label={`Orders that leave ${words}`} rows={rows} />

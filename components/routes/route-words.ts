@@ -36,10 +36,14 @@ export function dayTotals(rows: readonly RouteRow[]): string {
   return parts.filter(Boolean).join(', ')
 }
 
-/** What looking again has brought, in a line. */
+/** Ways that a look is of use for: what is on hold waits for the buyer's answer. */
+export const openRows = (rows: readonly RouteRow[]) => rows.filter(({ state }) => state !== 'weather_hold')
+
+/** What looking again at the ways of a day has brought, in a line. */
 export function checkedWords({ rows, held }: { rows: readonly RouteRow[]; held: number }): string {
-  const looked = `Looked at ${rows.length === 1 ? '1 way' : `${rows.length} ways`}`
+  const count = openRows(rows).length + held
+  const looked = `Looked at ${count === 1 ? '1 way' : `${count} ways`}`
   if (held > 0) return `${looked}; ${held} held, and the buyers told.`
-  const bad = rows.filter(({ verdict }) => verdict === 'unsafe').length
+  const bad = openRows(rows).filter(({ verdict }) => verdict === 'unsafe').length
   return bad > 0 ? `${looked}: ${bad} not safe.` : `${looked}: none to be held.`
 }

@@ -47,7 +47,9 @@ describe('what a seller ships', () => {
   it('tells what looking again has brought', () => {
     const rows = [row({ verdict: 'safe' }), row({ verdict: 'unsafe' })]
     expect(checkedWords({ rows, held: 0 })).toBe('Looked at 2 ways: 1 not safe.')
-    expect(checkedWords({ rows, held: 1 })).toBe('Looked at 2 ways; 1 held, and the buyers told.')
+    const held = [row({ verdict: 'safe' }), row({ verdict: 'unsafe', state: 'weather_hold' })]
+    expect(checkedWords({ rows: held, held: 1 })).toBe('Looked at 2 ways; 1 held, and the buyers told.')
+    expect(checkedWords({ rows: held, held: 0 })).toBe('Looked at 1 way: none to be held.')
     expect(checkedWords({ rows: rows.slice(0, 1), held: 0 })).toBe('Looked at 1 way: none to be held.')
   })
 })

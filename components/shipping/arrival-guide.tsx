@@ -12,11 +12,16 @@ export function ArrivalGuide({ order }: { order: ShownOrder }) {
   const { shipment, party, state } = order
   const isComing = state === 'dispatched'
   if (party !== 'buyer' || !(isComing || AFTER.includes(state))) return null
+  // Once all is well nobody opens the box again; what holds for weeks stays.
+  const isSettled = state === 'settled'
   const isBedding = shipment?.check?.packing !== undefined && shipment.check.packing.bagsPerBox === undefined
-  const steps = shipment && !isBedding ? openingSteps(hoursInBag(shipment)) : []
+  const steps = shipment && !isBedding && !isSettled ? openingSteps(hoursInBag(shipment)) : []
   return (
-    <Banner tone="info" title={isComing ? 'When the box comes' : 'Look after them now'}>
-      {shipment ? (
+    <Banner
+      tone="info"
+      title={isComing ? 'When the box comes' : isSettled ? 'From now on' : 'Look after them now'}
+    >
+      {shipment && !isSettled ? (
         <Text>
           {isBedding
             ? 'Open the box at once, in the shade. Take a photo if anything is wrong.'
@@ -28,7 +33,7 @@ export function ArrivalGuide({ order }: { order: ShownOrder }) {
       ))}
       {isBedding ? null : (
         <>
-          {steps.length > 0 ? null : <Text>{fillCaution('G-8', { hours: '6' })}</Text>}
+          {steps.length > 0 || isSettled ? null : <Text>{fillCaution('G-8', { hours: '6' })}</Text>}
           <Text>{fillCaution('G-7', {})}</Text>
         </>
       )}

@@ -5,7 +5,9 @@ import { Button } from '@/components/ui/button'
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import type { MovementFacts } from '@/shared/contracts/shipments'
-import { printMoment } from '@/shared/times/print-time'
+import { printLongDay, printMoment } from '@/shared/times/print-time'
+
+const paperDay = (day: string) => printLongDay(`${day}T12:00:00Z`, 'UTC')
 
 /** What the paper that travels with the animals says, to be shown when somebody asks. */
 export function MovementCard({ movement, zone }: { movement: MovementFacts; zone: string }) {
@@ -28,7 +30,7 @@ export function MovementCard({ movement, zone }: { movement: MovementFacts; zone
           <Fact name="Carrier">{`${movement.carrier}, ${movement.tracking}`}</Fact>
           {permits.map((permit) => (
             <Fact key={permit.number} name="Permit">
-              {`${permit.kind}: ${permit.number}, by ${permit.issuer}, ${permit.issuedOn} to ${permit.expiresOn}`}
+              {`${permit.kind}: ${permit.number}, by ${permit.issuer}, ${paperDay(permit.issuedOn)} to ${paperDay(permit.expiresOn)}`}
             </Fact>
           ))}
           <Fact name="Note">{movement.notForRelease}</Fact>

@@ -4,7 +4,7 @@ import { dayWords } from './ship-day-words'
 import { Fact } from '@/components/orders/fact'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import type { RoutePaper, ShownShipment } from '@/shared/contracts/shipments'
-import { printLongDay, printMoment } from '@/shared/times/print-time'
+import { printClock, printLongDay, printMoment } from '@/shared/times/print-time'
 import { printCents } from '@/shared/units/money'
 
 const boxesWords = (boxes: number) => (boxes === 1 ? '1 box' : `${boxes} boxes`)
@@ -30,7 +30,7 @@ export function ShipmentFacts({ shipment, order: { party, money } }: Props) {
     <>
       <Fact name="Box and freight">{`${printCents(money.boxCents)} for packing, ${printCents(money.freightCents)} freight`}</Fact>
       <Fact name="Leaves">{`${dayWords(shipDay)}, ${boxesWords(boxes)}`}</Fact>
-      <Fact name="Arrives">{`${dayWords(arriveDay)}; promised until ${printMoment(promisedAt, toZone)}`}</Fact>
+      <Fact name="Arrives">{`${dayWords(arriveDay)}, promised by ${printClock(promisedAt, toZone)}`}</Fact>
       <Fact name="Handed over">{deliverWords[shipment.deliverTo]}</Fact>
       <Fact name="To">
         {address

@@ -33,6 +33,8 @@ interface Choice {
   stage: Stage
   noShipDays: NoShipDays
   chance: Chance
+  /** Buyers of the same story. */
+  taken: readonly Actor[]
 }
 
 function shipDayFor(zone: string, { daysFromNow: [least, most] }: ShipStory, choice: Choice): string | null {
@@ -49,9 +51,12 @@ function shipDayFor(zone: string, { daysFromNow: [least, most] }: ShipStory, cho
   return null
 }
 
-function buyerFor({ farm }: BatchPlan, { buyer }: ShipStory, { stage, chance }: Choice): Actor {
+/** Nobody has two boxes of the same story under way. */
+function buyerFor({ farm }: BatchPlan, { buyer }: ShipStory, { stage, chance, taken }: Choice): Actor {
   if (buyer) return need(stage.people.get(buyer), buyer)
-  return chance.pick(stage.growers.filter((grower) => grower.state === farm.facts.state))
+  return chance.pick(
+    stage.growers.filter((grower) => grower.state === farm.facts.state && !taken.includes(grower)),
+  )
 }
 
 /** A batch on sale early enough whose animals travel well; every one of them may be shipped from then on. */
@@ -87,16 +92,16 @@ function batchFor(
 function cast(
   batches: readonly BatchPlan[],
   story: ShipStory,
-  given: { stage: Stage; noShipDays: NoShipDays; key: string },
+  given: Omit<Choice, 'chance'> & { key: string },
 ): OrderPlan[] {
-  const { stage, key, noShipDays } = given
-  const chance = seededRandom(`order ${key}`)
-  const found = batchFor(batches, story, { stage, noShipDays, chance })
+  const { key, ...rest } = given
+  const choice = { ...rest, chance: seededRandom(`order ${key}`) }
+  const found = batchFor(batches, story, choice)
   // On some dates no lawful day lies in reach: the demo does without that story.
   if (!found) return []
   const { batch, shipDay, reservedAt } = found
   const home = batch.farm.facts.state
-  const buyer = buyerFor(batch, story, { stage, noShipDays, chance })
+  const buyer = buyerFor(batch, story, choice)
   batch.body = {
     ...batch.body,
     shipping: boxTerms,
@@ -108,7 +113,7 @@ function cast(
       quantity: batch.body.minOrder,
       payMode: 'deposit',
       slot: slotOn({ day: shipDay, from: '06:00', until: '18:00', capacity: 1 }, batch.farm.zone),
-      ship: { shipDay, street: chance.pick(shipStreets) },
+      ship: { shipDay, street: choice.chance.pick(shipStreets) },
     },
   ]
 }
@@ -116,9 +121,13 @@ function cast(
 /** All orders of the demo that are shipped. They change the terms of their batches: plan them before those are published. */
 export function planShipped(stage: Stage, batches: readonly BatchPlan[]): OrderPlan[] {
   const noShipDays = carriersRest(stage)
-  return shipStories.flatMap((story, row) =>
-    Array.from({ length: story.times }, (_, at) => `box ${row}.${at} ${story.path}`).flatMap((key) =>
-      cast(batches, story, { stage, noShipDays, key }),
-    ),
-  )
+  return shipStories.flatMap((story, row) => {
+    const plans: OrderPlan[] = []
+    for (let at = 0; at < story.times; at++) {
+      const key = `box ${row}.${at} ${story.path}`
+      const taken = plans.map(({ buyer }) => buyer)
+      plans.push(...cast(batches, story, { stage, noShipDays, taken, key }))
+    }
+    return plans
+  })
 }

@@ -11,6 +11,7 @@ export interface ShipStory {
 }
 
 // Ordered five days ahead, inside the forecast: so they come out in every month of the year.
+// Two neighbours have a day's boxes go to two growers each, who then answer the weather differently.
 // prettier-ignore
 export const shipStories: readonly ShipStory[] = [
   { path: 'ship-settled', times: 1, daysFromNow: [-16, -9], farm: 'hatchery', buyer: 'beginner' },
@@ -18,9 +19,10 @@ export const shipStories: readonly ShipStory[] = [
   { path: 'ship-late', times: 1, daysFromNow: [-9, -4] },
   { path: 'ship-leaving', times: 1, daysFromNow: [0, 6], farm: 'hatchery' },
   { path: 'ship-leaving', times: 2, daysFromNow: [0, 6] },
-  { path: 'ship-coming', times: 1, daysFromNow: [2, 6], farm: 'hatchery', buyer: 'beginner' },
-  { path: 'ship-coming', times: 1, daysFromNow: [2, 6] },
-  { path: 'ship-held', times: 1, daysFromNow: [2, 6] },
+  { path: 'ship-coming', times: 1, daysFromNow: [1, 6], farm: 'hatchery', buyer: 'beginner' },
+  { path: 'ship-coming', times: 2, daysFromNow: [1, 6], farm: 'darbyflat' },
+  { path: 'ship-coming', times: 2, daysFromNow: [1, 6], farm: 'riverstep' },
+  { path: 'ship-held', times: 1, daysFromNow: [1, 6] },
 ]
 
 /** Hardy in a box, and allowed between the three states by the demonstration's rows. */

@@ -17,6 +17,7 @@ import type { ParsedBody } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { packingTicks } from '@/shared/contracts/ship-acts'
+import { printDate } from '@/shared/domain/calendar/print-date'
 import {
   judgeDispatch,
   type DispatchCheck,
@@ -91,7 +92,8 @@ function refuse(
 ): void {
   if (faults.length === 0) return
   const errors = faults.map(({ detail, pointer }) => ({ detail, pointer }))
-  const next = nearest && nearest !== today ? ` The nearest day on which it may leave is ${nearest}.` : ''
+  const next =
+    nearest && nearest !== today ? ` The nearest day on which it may leave is ${printDate(nearest)}.` : ''
   throw new Problem('dispatch-refused', `${faults[0]?.detail ?? ''}${next} The animals and the money stay.`, {
     errors,
     ...(nearest ? { facts: { nearestShipDay: nearest } } : {}),

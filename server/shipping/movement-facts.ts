@@ -1,6 +1,7 @@
 import { describeListing } from '@/server/listings/describe-listing'
 import type { OrderShipped } from '@/server/shipping/order-shipped'
 import type { MovementFacts } from '@/shared/contracts/shipments'
+import { printDateOfYear } from '@/shared/domain/calendar/print-date'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 import { printLengthRange } from '@/shared/units/length'
@@ -33,7 +34,7 @@ export function movementFactsOf({ order, shipment, terms, seller, tracking, at }
     size: printLengthRange({ minCm: terms.sizeLoMm / 10, maxCm: terms.sizeHiMm / 10 }, 'us'),
     count: order.quantity,
     ...{ boxes, carrier, tracking },
-    batch: `${title}, hatched ${terms.hatchedOn}`,
+    batch: `${title}, hatched ${printDateOfYear(terms.hatchedOn)}`,
     notForRelease: fillCaution('G-1', {}),
   }
 }

@@ -10,6 +10,7 @@ import { readLatestCheck } from '@/server/shipping/route-check-store'
 import type { RouteCheckRow } from '@/server/weather/weather-store'
 import { Problem } from '@/shared/api/problem'
 import { dateAfter } from '@/shared/domain/calendar/day-number'
+import { printDate } from '@/shared/domain/calendar/print-date'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import { FORECAST_DAYS } from '@/shared/domain/shipping/forecast-weather'
 import type { ShipmentPlan } from '@/shared/domain/shipping/plan-shipment'
@@ -27,7 +28,7 @@ function planOf({ order, shipment, terms }: OrderShipped, check: RouteCheckRow |
   if (plan) return plan
   throw new Problem(
     'packing-open',
-    `The forecast decides how these boxes are packed, and it reaches ${shipDay} from ${dateAfter(shipDay, -FORECAST_DAYS)} on. Look at the way once more then; the sheet is here as soon as that is done.`,
+    `The forecast decides how these boxes are packed, and it reaches ${printDate(shipDay)} from ${printDate(dateAfter(shipDay, -FORECAST_DAYS))} on. Look at the way once more then; the sheet is here as soon as that is done.`,
   )
 }
 

@@ -5,6 +5,7 @@ import { firstShipDay, shipRuleOf } from '@/server/shipping/ship-rule'
 import type { ShipWay } from '@/server/shipping/ship-way'
 import { Problem } from '@/shared/api/problem'
 import { dateAfter } from '@/shared/domain/calendar/day-number'
+import { printDate } from '@/shared/domain/calendar/print-date'
 import { faultWords } from '@/shared/domain/shipping/fault-words'
 import {
   judgeShipDay,
@@ -34,12 +35,12 @@ export async function requireLawfulDay(
   const nearest = nearestShipDay(shipDay > first && shipDay <= last ? shipDay : first, rule)
   const why =
     shipDay > last
-      ? `Nobody can promise a day so far ahead: the last one to choose is ${last}.`
+      ? `Nobody can promise a day so far ahead: the last one to choose is ${printDate(last)}.`
       : shipDay < first || !fault
-        ? `The first day on which these animals can leave is ${first}: they need a day or two without food.`
+        ? `The first day on which these animals can leave is ${printDate(first)}: they need a day or two without food.`
         : faultWords(fault)
   throw new Problem('fields-invalid', undefined, {
-    errors: [{ detail: nearest ? `${why} The nearest day is ${nearest.shipDay}.` : why, pointer }],
+    errors: [{ detail: nearest ? `${why} The nearest day is ${printDate(nearest.shipDay)}.` : why, pointer }],
     ...(nearest ? { facts: { nearestShipDay: nearest.shipDay } } : {}),
   })
 }
@@ -55,7 +56,7 @@ export async function requireSafeWay(way: ShipWay, shipDay: string): Promise<Jud
   const said = [
     ...(facts.worst ? [worstWords(facts.worst)] : []),
     ...reasonsOf({ verdict, reasons: facts.reasons }),
-    ...(nearest ? [`The nearest day that is safe is ${nearest}.`] : []),
+    ...(nearest ? [`The nearest day that is safe is ${printDate(nearest)}.`] : []),
   ]
   throw new Problem('trip-unsafe', said.join(' '), {
     facts: { verdict, ...(nearest ? { nearestSafeDay: nearest } : {}) },

@@ -6,9 +6,9 @@ import { holdOrder } from '@/server/weather/hold-order'
 import { loadOrderWay, type OrderWay } from '@/server/weather/order-way'
 import { proposeShipDay } from '@/server/weather/propose-ship-day'
 import { insertRouteCheck, type RouteCheckKind } from '@/server/weather/weather-store'
+import { printDate } from '@/shared/domain/calendar/print-date'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import { reasonSentences } from '@/shared/domain/shipping/reason-sentences'
-import { printDay } from '@/shared/times/print-time'
 import { printBothTemperatures } from '@/shared/units/temperature'
 
 interface Checking {
@@ -18,11 +18,9 @@ interface Checking {
   isFresh: boolean
 }
 
-const noon = (day: string) => `${day}T12:00:00Z`
-
 /** G-10, or the same without a day when none can be named. */
 function whyOf(way: OrderWay, judged: JudgedWay, proposed: string | null): string {
-  const day = printDay(noon(way.shipment.shipDay), 'UTC')
+  const day = printDate(way.shipment.shipDay)
   const { worst, reasons } = judged.facts
   if (!worst) {
     const [text = 'The way is not safe.'] = reasonSentences(reasons)
@@ -36,7 +34,7 @@ function whyOf(way: OrderWay, judged: JudgedWay, proposed: string | null): strin
       day,
       place: worst.place,
       temperature,
-      date: printDay(noon(proposed), 'UTC'),
+      date: printDate(proposed),
     })
   }
   return `The route is too ${extreme} on ${day}: ${worst.place} ${temperature}. No better day can be named yet. You may cancel for a full refund.`

@@ -1,5 +1,4 @@
 import { eq } from 'drizzle-orm'
-import { getDocument } from 'pdfjs-dist/legacy/build/pdf.mjs'
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
 import { orderEvent } from '@/db/schema/orders'
@@ -11,6 +10,7 @@ import type { ShipDayOffers } from '@/shared/contracts/shipments'
 import { calendarFaults } from '@/shared/calendar/calendar-faults'
 import { brokenInvariants } from '@/tests/support/money-invariants'
 import { keyed } from '@/tests/support/order-desk'
+import { pdfWords } from '@/tests/support/pdf-words'
 import {
   beaAddress,
   leaving,
@@ -35,19 +35,6 @@ afterAll(() => desk.close())
 
 const subjects = (to: string) =>
   desk.letters.filter((letter) => letter.to.email === to).map((letter) => letter.subject)
-
-async function textOf(bytes: Uint8Array): Promise<string[]> {
-  const file = await getDocument({ data: bytes, verbosity: 0 }).promise
-  return Promise.all(
-    Array.from({ length: file.numPages }, async (_, at) => {
-      const { items } = await (await file.getPage(at + 1)).getTextContent()
-      return items
-        .map((item) => ('str' in item ? item.str : ''))
-        .join(' ')
-        .replace(/\s+/g, ' ')
-    }),
-  )
-}
 
 describe('the days on which a box could leave', () => {
   const days = (listingId: string, query: object) =>
@@ -378,7 +365,7 @@ describe('a shipped order', () => {
     const box = await desk.scheduled('labels', { body: { shipping: { ...shipping, mostInBox: 40 } } })
     const reply = await box.hatchery.get(`${box.path}/packing-sheet`).buffer(true).expect(200)
     expect(reply.headers['content-type']).toBe('application/pdf')
-    const pages = await textOf(new Uint8Array(reply.body as Uint8Array))
+    const pages = await pdfWords(new Uint8Array(reply.body as Uint8Array))
     expect(pages).toHaveLength(3)
     expect(pages[0]).toMatch(/60 Bluegill/i)
     expect(pages[0]).toContain('2 boxes')

@@ -48,3 +48,12 @@ export function linkIn(mail: Mail, pattern: RegExp): string {
 export async function clearMails(mailOrigin: string): Promise<void> {
   await fetch(`${mailOrigin}/api/messages`, { method: 'DELETE' })
 }
+
+/** The bytes of an attached file; fails when the mail has none of that name. */
+export async function fileIn(mailOrigin: string, mail: Mail, name: string): Promise<Uint8Array> {
+  const at = mail.attachments.findIndex((file) => file.name === name)
+  if (at < 0) throw new Error(`"${mail.subject}" brings ${JSON.stringify(mail.attachments)}, not ${name}`)
+  const answer = await fetch(`${mailOrigin}/mails/${mail.id}/files/${at}`)
+  if (!answer.ok) throw new Error(`the mail catcher answered ${answer.status}`)
+  return new Uint8Array(await answer.arrayBuffer())
+}

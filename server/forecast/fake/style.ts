@@ -15,7 +15,7 @@ h2 { font-size: 1.25rem; margin: 2rem 0 .5rem }
 .told { border-left: .375rem solid var(--act); padding: .5rem 1rem; background: var(--sheet) }
 form.sheet { background: var(--sheet); border: 1px solid var(--line); border-radius: .5rem; padding: 1rem }
 fieldset { border: 0; margin: 0 0 1rem; padding: 0; min-width: 0 }
-legend { font-weight: 700; padding: 0 }
+legend { font-weight: 700; padding: 0 0 .375rem }
 .row { display: grid; grid-template-columns: repeat(auto-fit, minmax(8rem, 1fr)); gap: .75rem }
 label { display: block; font-weight: 600 }
 label.choice { display: flex; align-items: center; gap: .75rem; min-height: 2.75rem; font-weight: 400 }

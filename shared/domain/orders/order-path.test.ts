@@ -65,6 +65,16 @@ describe('the order path', () => {
     )
   })
 
+  it('leaves a box that has not come where it was sent, and names no hour', () => {
+    const claim = { state: 'claim_open', handOver: 'ship', clock: { atMs: 42, edge: 'E42' } } as const
+    const now = (given: Partial<PathFacts>) => {
+      const { steps, untilMs, ifNobodyMoves } = orderPath(pickup({ ...claim, ...given }))
+      return [steps.find(({ mark }) => mark === 'now')?.step, untilMs, ifNobodyMoves !== '']
+    }
+    expect(now({})).toEqual(['sent', null, false])
+    expect(now({ hasArrived: true })).toEqual(['arrived', 42, true])
+  })
+
   it('asks the buyer for a balance that is due before the day', () => {
     const owing = pickup({ state: 'scheduled', balanceDue: 'before' })
     expect(orderPath(owing).move).toEqual({ whose: 'you', words: 'Pay the balance.' })

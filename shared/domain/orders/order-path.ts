@@ -15,6 +15,8 @@ export interface PathFacts extends MoveFacts {
   needsAcceptance: boolean
   isPooled: boolean
   clock: { atMs: number; edge: string } | null
+  /** Of a box; absent where nobody said so. */
+  hasArrived?: boolean
 }
 
 export interface OrderPath {
@@ -32,6 +34,8 @@ export function orderPath(facts: PathFacts): OrderPath {
   const here = facts.state === 'cancelled' ? -1 : line.indexOf(currentStep(facts))
   const end = facts.state === 'cancelled' && facts.reason ? endWords[facts.reason] : null
   const isOver = facts.state === 'settled' || facts.state === 'cancelled'
+  // A moderator decides about a box that has not come, whenever that is: silence does nothing.
+  const hasNoClock = isOver || isMissing(facts)
   return {
     steps: line.map((step, at) => ({
       step,
@@ -39,8 +43,8 @@ export function orderPath(facts: PathFacts): OrderPath {
       mark: markOf(at, here, facts.state === 'settled'),
     })),
     move: end === null ? whoseMove(facts) : { whose: 'nobody', words: asRead(end, facts.party) },
-    untilMs: isOver ? null : (facts.clock?.atMs ?? null),
-    ifNobodyMoves: isOver ? '' : (silenceWords[(facts.clock?.edge ?? '') as EdgeId] ?? ''),
+    untilMs: hasNoClock ? null : (facts.clock?.atMs ?? null),
+    ifNobodyMoves: hasNoClock ? '' : (silenceWords[(facts.clock?.edge ?? '') as EdgeId] ?? ''),
   }
 }
 
@@ -62,7 +66,12 @@ function stepsOf({ handOver, needsAcceptance, isPooled }: PathFacts): PathStep[]
   ]
 }
 
-function currentStep({ state, handOver }: PathFacts): PathStep {
+const isMissing = ({ state, handOver, hasArrived = false }: PathFacts) =>
+  state === 'claim_open' && handOver === 'ship' && !hasArrived
+
+function currentStep(facts: PathFacts): PathStep {
+  const { state, handOver } = facts
+  if (isMissing(facts)) return 'sent'
   if (state === 'claim_open') return handOver === 'ship' ? 'arrived' : 'handed-over'
   return state === 'cancelled' ? 'held' : stepOf[state]
 }

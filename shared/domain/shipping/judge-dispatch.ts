@@ -1,3 +1,4 @@
+import { printDate, printDateOfYear } from '@/shared/domain/calendar/print-date'
 import { clockMs } from '@/shared/domain/orders/clocks.facts'
 import { faultWords } from '@/shared/domain/shipping/fault-words'
 import type { JudgedShipDay } from '@/shared/domain/shipping/ship-days'
@@ -90,7 +91,7 @@ function paperFaults({ papersNeeded, papers, arriveDay }: DispatchFacts): Dispat
       const detail = `This way needs a paper that is not named yet: ${kind}.`
       return [{ code: 'paper-missing', pointer: '#/papers', detail }]
     }
-    const detail = `${kind} expires on ${last}, before the box arrives on ${arriveDay}.`
+    const detail = `${kind} expires on ${printDateOfYear(last)}, before the box arrives on ${printDate(arriveDay)}.`
     return [{ code: 'paper-expired', pointer: '#/papers', detail }]
   })
 }
@@ -98,7 +99,7 @@ function paperFaults({ papersNeeded, papers, arriveDay }: DispatchFacts): Dispat
 function checkFaults({ check, shipDay, nowMs }: DispatchFacts): DispatchFault[] {
   const pointer = '#/check'
   if (check === null) {
-    const detail = `The way has not been looked at for ${shipDay}. Check it now.`
+    const detail = `The way has not been looked at for ${printDate(shipDay)}. Look again now.`
     return [{ code: 'check-missing', pointer, detail }]
   }
   const faults: DispatchFault[] = []
@@ -114,7 +115,7 @@ function checkFaults({ check, shipDay, nowMs }: DispatchFacts): DispatchFault[] 
   const ageMs = nowMs - check.atMs
   if (ageMs > FRESH_MS) {
     const [hours, most] = [Math.floor(ageMs / HOUR_MS), FRESH_MS / HOUR_MS]
-    const detail = `The last look at the way is ${hours} hours old; it counts for ${most}. Check it now.`
+    const detail = `The last look at the way is ${hours} hours old; it counts for ${most}. Look again now.`
     faults.push({ code: 'check-old', pointer, detail })
   }
   return faults
@@ -129,7 +130,7 @@ function dayFaults({ today, shipDay }: DispatchFacts): DispatchFault[] {
           {
             code: 'day-not-agreed',
             pointer,
-            detail: `The day agreed is ${shipDay}; today is ${today.shipDay}.`,
+            detail: `The day agreed is ${printDate(shipDay)}; today is ${printDate(today.shipDay)}.`,
           },
         ]
   const lawful = today.faults.map((fault): DispatchFault => {

@@ -1,4 +1,4 @@
-import { fahrenheitFromC } from '@/shared/units/temperature'
+import { printBothTemperatures } from '@/shared/units/temperature'
 
 interface Worst {
   side: 'cold' | 'hot'
@@ -6,8 +6,7 @@ interface Worst {
   airC: number
 }
 
-/** The worst air of a way in a sentence, both scales: 'Too cold: -12 °C (10 °F) in Cincinnati, OH.' */
+/** The worst air of a way in a sentence, both scales: 'Too cold: 10 °F (-12 °C) in Cincinnati, OH.' */
 export function worstWords({ side, place, airC }: Worst): string {
-  const scales = `${Math.round(airC)} °C (${Math.round(fahrenheitFromC(airC))} °F)`
-  return `Too ${side}: ${scales} in ${place}.`
+  return `Too ${side}: ${printBothTemperatures(airC, 'us')} in ${place}.`
 }

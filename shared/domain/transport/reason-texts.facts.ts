@@ -13,7 +13,7 @@ export const reasonTexts = {
     text: 'The water comes within 1 °C of the warmest this animal should travel in.',
   },
   freezes: { unit: '°C', text: 'The water would begin to freeze.' },
-  'changes-too-far': { unit: '°C', text: 'The water changes by more than 10 °C on the way.' },
+  'changes-too-far': { unit: '°C', text: 'The water changes by more than 18 °F (10 °C) on the way.' },
   'bag-too-full': {
     unit: 'g/L',
     text: 'More animals in the bag than the loading table allows for this long and this warm.',
