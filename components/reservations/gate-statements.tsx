@@ -16,6 +16,8 @@ interface Props {
 export function GateStatements({ gate, ticked, onChange, errorAt }: Props) {
   const toggle = (id: string, isOn: boolean) =>
     onChange(isOn ? [...ticked, id] : ticked.filter((one) => one !== id))
+  // What is ticked already is not said a second time below.
+  const cautions = gate.cautions.filter(({ text }) => !gate.ticks.some((tick) => tick.text === text))
   return (
     <Card labelledBy="statements">
       <Heading level={2} size="lead" nativeID="statements">
@@ -39,7 +41,7 @@ export function GateStatements({ gate, ticked, onChange, errorAt }: Props) {
       {gate.papersNeeded.map((paper) => (
         <Text key={paper}>{`Paper needed before the animals leave: ${paper}`}</Text>
       ))}
-      {gate.cautions.map((caution) => (
+      {cautions.map((caution) => (
         <Text key={caution.id} size="note" tint="muted">
           {caution.text}
         </Text>

@@ -5,6 +5,7 @@ import { connect, disconnect } from '@/db/client'
 import { calendarFaults } from '@/shared/calendar/calendar-faults'
 import { dateAfter } from '@/shared/domain/calendar/day-number'
 import { printDate } from '@/shared/domain/calendar/print-date'
+import type { ShownOrder } from '@/shared/contracts/orders'
 import { printCents } from '@/shared/units/money'
 import { expectNoAxeViolations, keepShot, openBrowser, type TestBrowser } from '@/tests/support/browser'
 import { twoBoxesToCome, type DemoBox } from '@/tests/support/demo-boxes'
@@ -74,14 +75,23 @@ async function openHeld(page: Page, box: DemoBox, since: Date): Promise<string> 
   return day
 }
 
+interface Told {
+  to: string
+  /** The day it leaves, in words. */
+  leaves: string
+  /** The day of the party's own calendar: a seller sends, a buyer receives. */
+  day: string
+  since: Date
+}
+
 /** The mail to a party after the new day was agreed on: it carries a file for their calendar. */
-async function expectCalendar(to: string, day: string, since: Date): Promise<void> {
-  const mail = await waitForMail(mailOrigin, { to, subject: `New day: leaves ${day}`, since })
+async function expectCalendar({ to, leaves, day, since }: Told): Promise<void> {
+  const mail = await waitForMail(mailOrigin, { to, subject: `New day: leaves ${leaves}`, since })
   const bytes = await fileIn(mailOrigin, mail, 'box.ics')
   expect(calendarFaults(bytes)).toEqual([])
   const file = new TextDecoder().decode(bytes)
   const [, year = '', month = '', date = ''] = /DTSTART[^:]*:(\d{4})(\d\d)(\d\d)/.exec(file) ?? []
-  expect(printDate(`${year}-${month}-${date}`)).toBe(day)
+  expect(`${year}-${month}-${date}`).toBe(day)
   expect(file).toMatch(/SEQUENCE:[1-9]/)
 }
 
@@ -92,15 +102,20 @@ interface Agreeing {
 }
 
 async function agree({ buyer, seller, box }: Agreeing, since: Date): Promise<void> {
-  const day = await openHeld(buyer, box, since)
+  const leaves = await openHeld(buyer, box, since)
   await fingers(buyer).press('Agree to the new day')
   await buyer.getByText('Day agreed', { exact: true }).first().waitFor()
   await seller.goto(`/orders/${box.orderId}`)
   for (const page of [buyer, seller]) {
-    await page.getByText(`${day}, 1 box`).waitFor()
+    await page.getByText(`${leaves}, 1 box`).waitFor()
     await expectNoAxeViolations(page)
   }
-  for (const to of [box.buyerEmail, box.sellerEmail]) await expectCalendar(to, day, since)
+  const answer = await buyer.request.get(`/api/v1/orders/${box.orderId}`)
+  const { shipment } = (await answer.json()) as ShownOrder
+  if (!shipment) throw new Error('the order has lost its shipment')
+  expect(printDate(shipment.shipDay)).toBe(leaves)
+  await expectCalendar({ to: box.sellerEmail, leaves, day: shipment.shipDay, since })
+  await expectCalendar({ to: box.buyerEmail, leaves, day: shipment.arriveDay, since })
 }
 
 async function takeTheMoney(page: Page, box: DemoBox, since: Date): Promise<void> {

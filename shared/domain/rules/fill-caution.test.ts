@@ -36,6 +36,7 @@ describe('caution texts', () => {
     expect(worded.map((one) => one.id)).toEqual(['G-1', 'G-2', 'G-3', 'G-5', 'G-6', 'G-13'])
     for (const { text } of worded) expect(text).not.toMatch(/[{}]/)
     expect(worded[1]?.text).toContain('Demonstration only')
+    expect(worded[1]?.text).toMatch(/, checked [A-Z][a-z]{2}, [A-Z][a-z]{2} \d+, \d{4}\. /)
     expect(worded[2]?.text).toContain('Ohio')
   })
 })

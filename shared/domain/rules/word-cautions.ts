@@ -1,3 +1,4 @@
+import { printDateOfYear } from '@/shared/domain/calendar/print-date'
 import { type CautionId } from '@/shared/domain/rules/caution-texts.facts'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import { findState } from '@/shared/domain/rules/find-state'
@@ -29,7 +30,9 @@ function wordOne(id: CautionId, judgement: GateJudgement, { buyerState, holdUnti
       (one) => !one.hint && !one.overdue && one.status === judgement.status,
     )
     const told = deciding ?? judgement.reasons[0]
-    return told ? fillCaution('G-2', { source: told.sourceTitle, date: told.checkedOn, agency }) : null
+    return told
+      ? fillCaution('G-2', { source: told.sourceTitle, date: printDateOfYear(told.checkedOn), agency })
+      : null
   }
   if (id === 'G-3') {
     const unread = new Set(judgement.gaps.map((gap) => gap.jurisdiction))
