@@ -12,21 +12,24 @@ interface Props {
   sidePx?: number
   /** On a phone the side comes first when it holds what must be seen at once. */
   isSideFirst?: boolean
+  /** Where the story is a form with much to read, a tablet has no room beside it. */
+  needsDesk?: boolean
 }
 
 /** A page's story and what goes with it: beside each other where there is room, else one under the other. */
-export function TwoColumns({ main, side, sideLabel, sidePx = 340, isSideFirst }: Props) {
-  const isPhone = useBreakpoint() === 'phone'
+export function TwoColumns({ main, side, sideLabel, sidePx = 340, isSideFirst, needsDesk = false }: Props) {
+  const breakpoint = useBreakpoint()
+  const isStacked = breakpoint === 'phone' || (needsDesk && breakpoint !== 'wide')
   const sideView = (
     <View
       role="complementary"
       aria-label={sideLabel}
-      style={[styles.part, isPhone ? null : { width: sidePx }]}
+      style={[styles.part, isStacked ? null : { width: sidePx }]}
     >
       {side}
     </View>
   )
-  if (isPhone) {
+  if (isStacked) {
     return (
       <View style={styles.stack}>
         {isSideFirst ? sideView : null}

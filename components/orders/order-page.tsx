@@ -84,6 +84,7 @@ export function OrderPage({ orderId, from }: { orderId: string; from: { paid?: s
       <Returned order={order} from={from} />
       <TwoColumns
         sideLabel="Money"
+        needsDesk
         // Once it is over, what became of the money is what one comes to see.
         isSideFirst={order.state === 'cancelled' || order.state === 'settled'}
         main={

@@ -19,7 +19,7 @@ legend { font-weight: 700; padding: 0 0 .375rem }
 .row { display: grid; grid-template-columns: repeat(auto-fit, minmax(8rem, 1fr)); gap: .75rem }
 label { display: block; font-weight: 600 }
 label.choice { display: flex; align-items: center; gap: .75rem; min-height: 2.75rem; font-weight: 400 }
-input[type=radio] { width: 1.375rem; height: 1.375rem; flex: none; accent-color: var(--act) }
+input[type=radio] { width: 1.375rem; height: 1.375rem; flex: none; margin: 0; accent-color: var(--act) }
 input:not([type=radio]) { width: 100%; min-width: 0; min-height: 2.75rem; font: inherit; color: inherit;
   background: var(--sheet); border: 1px solid var(--line); border-radius: .375rem; padding: .5rem .625rem }
 input[aria-invalid=true] { border: 2px solid var(--wrong) }
