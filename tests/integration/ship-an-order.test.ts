@@ -8,6 +8,7 @@ import { remindBoxes } from '@/server/notices/remind-boxes'
 import { remindPickups } from '@/server/notices/remind-pickups'
 import type { ShipDayOffers } from '@/shared/contracts/shipments'
 import { calendarFaults } from '@/shared/calendar/calendar-faults'
+import { printDate } from '@/shared/domain/calendar/print-date'
 import { brokenInvariants } from '@/tests/support/money-invariants'
 import { keyed } from '@/tests/support/order-desk'
 import { pdfWords } from '@/tests/support/pdf-words'
@@ -135,7 +136,7 @@ describe('reserving a box', () => {
     expect(offers.days[0]?.reasons.join(' ')).toContain('colder')
     expect(safe).toMatch(/^2027-0[12]-/)
     expect(later.body.facts).toEqual({ verdict: 'unsafe', nearestSafeDay: safe })
-    expect(later.body.detail).toContain(`The nearest day that is safe is ${safe}.`)
+    expect(later.body.detail).toContain(`The nearest day that is safe is ${printDate(safe ?? '')}.`)
   })
 
   it('refuses animals so small that no figures reach them', async () => {
@@ -379,7 +380,7 @@ describe('a shipped order', () => {
     const perch = await desk.scheduled('open packing', { body: { taxonId: 'yellow_perch' } })
     const open = await perch.hatchery.get(`${perch.path}/packing-sheet`)
     expect([open.status, open.body.type]).toEqual([409, '/problems/packing-open'])
-    expect(open.body.detail).toContain('2027-05-03')
+    expect(open.body.detail).toContain('it reaches Mon, May 10 from Mon, May 3 on.')
   })
 
   it('stands in both calendars on its own day, and is not called a pickup the evening before', async () => {
