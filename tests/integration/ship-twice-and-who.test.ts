@@ -82,6 +82,22 @@ describe('staff without the second factor', () => {
   })
 })
 
+describe('looks at the way', () => {
+  it('are not made without end', async () => {
+    const box = await desk.scheduled('many looks')
+    const last = async (path: string, send: object, most: number) => {
+      const hatchery = await desk.signedIn(desk.hatcheryEmail)
+      const statuses: number[] = []
+      for (let at = 0; at <= most; at++)
+        statuses.push((await hatchery.post(path).set(keyed()).send(send)).status)
+      return [statuses.at(-2), statuses.at(-1)]
+    }
+    // Refused for their words, and counted all the same.
+    expect(await last(`${box.path}/weather-hold`, { why: '' }, 60)).toEqual([422, 429])
+    expect(await last('/api/v1/routes/checks', { shipDay: '2027-05-11', hold: false }, 6)).toEqual([200, 429])
+  })
+})
+
 describe('days an order could be moved to', () => {
   it('are told while a day can be moved, and not before or after', async () => {
     const box = await desk.held('days', { body: { accept: 'ask' } })
