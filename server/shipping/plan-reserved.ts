@@ -12,7 +12,7 @@ import { Problem, type FieldProblem } from '@/shared/api/problem'
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { BoxCharges } from '@/shared/domain/shipping/box-charges'
 
-export type AskedShip = NonNullable<ReserveAsked['ship']>
+type AskedShip = NonNullable<ReserveAsked['ship']>
 
 /** Everything a shipped order needs beside the pickup's facts, found before anything is held. */
 export interface ReservedShipment {

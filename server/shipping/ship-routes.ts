@@ -16,6 +16,7 @@ import { readShipDays } from '@/server/shipping/read-ship-days'
 import { reportArrival } from '@/server/shipping/report-arrival'
 import { reportLateArrival } from '@/server/shipping/report-late-arrival'
 import { reportLateBox } from '@/server/shipping/report-late-box'
+import { lookLimit } from '@/server/weather/look-limit'
 import * as days from '@/shared/contracts/no-ship-days'
 import * as acts from '@/shared/contracts/ship-acts'
 
@@ -24,6 +25,7 @@ export function shipRoutes(): Router {
   // Each answer judges up to nine trips: it costs what a search costs.
   const limit = searchLimit()
   for (const { path } of [acts.readShipDays, acts.listOrderShipDays]) router.get(path, limit)
+  router.post([acts.chooseShipDay.path, acts.checkRoute.path], lookLimit())
   router.get(acts.printOrderPacking.path, packingLimit())
   on(router, acts.readShipDays)(async ({ params, query }) => readShipDays({ ...params, ...query }))
   on(router, acts.listOrderShipDays)(async ({ caller, params }) => listOrderShipDays(caller, params.orderId))

@@ -20,14 +20,3 @@ export function shipSlot(shipDay: string, zone: string): { slotStartsAt: Date; s
 
 /** Until when a box is promised, where it arrives. */
 export const promisedAtOf = (arriveDay: string, toZone: string): Date => wallOf(arriveDay, ARRIVES_BY, toZone)
-
-/** When the way is looked at: the evening before and the morning of the ship day, at the seller's place. */
-export function checkMoments(
-  shipDay: string,
-  dayBefore: string,
-  zone: string,
-): { evening: Date; morning: Date } {
-  const evening = `${temperatureCheckHours.dayBefore}:00`
-  const morning = `${String(temperatureCheckHours.dayOf).padStart(2, '0')}:00`
-  return { evening: wallOf(dayBefore, evening, zone), morning: wallOf(shipDay, morning, zone) }
-}

@@ -1,6 +1,9 @@
 import type { Caller } from '@/server/http/caller'
+import { fewAtATime } from '@/server/jobs/few-at-a-time'
+import type { OrderRow } from '@/server/orders/order-store'
 import { findSellerOf } from '@/server/orders/party-store'
 import { listShipmentsOf } from '@/server/orders/shipment-store'
+import { LANES } from '@/server/weather/check-due-ways'
 import { checkWay } from '@/server/weather/check-way'
 import { listRoutes } from '@/server/weather/list-routes'
 import { listToShip } from '@/server/weather/weather-store'
@@ -22,14 +25,15 @@ export async function checkRoutes(
   // A place is asked about anew once; further boxes to it share the answer.
   const asking = new Set<string>()
   let held = 0
-  for (const order of orders) {
+  const check = async (order: OrderRow) => {
     const shipment = shipments.find((one) => one.orderId === order.id)
     if (shipment?.shipDay !== asked.shipDay || order.state === 'weather_hold' || order.freeze !== 'none')
-      continue
+      return
     const place = `${shipment.toLat} ${shipment.toLng}`
     const isFresh = !asking.has(place)
     asking.add(place)
     if (await checkWay(order, { kind: 'seller', holds: asked.hold, isFresh })) held += 1
   }
+  await fewAtATime(orders, LANES, check)
   return { ...(await listRoutes(caller, MOST_ROUTES)), held }
 }

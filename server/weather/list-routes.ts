@@ -5,7 +5,7 @@ import { findSellerOf, readPeople } from '@/server/orders/party-store'
 import { listShipmentsOf } from '@/server/orders/shipment-store'
 import { readTermsOf } from '@/server/orders/terms-store'
 import { presentRoute } from '@/server/weather/present-route'
-import { listChecksOf, listToShip } from '@/server/weather/weather-store'
+import { listChecksOfDay, listToShip } from '@/server/weather/weather-store'
 import { Problem } from '@/shared/api/problem'
 import type { ReplyOf } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
@@ -18,7 +18,7 @@ export async function listRoutes(caller: Caller, limit: number): Promise<ReplyOf
   const ids = orders.map((order) => order.id)
   const [shipments, checks, people, terms] = await Promise.all([
     listShipmentsOf(ids),
-    listChecksOf(ids),
+    listChecksOfDay(ids),
     readPeople([...new Set(orders.map((order) => order.buyerId))]),
     readTermsOf([...new Set(orders.map((order) => order.listingVersionId))]),
   ])
@@ -26,7 +26,7 @@ export async function listRoutes(caller: Caller, limit: number): Promise<ReplyOf
     const shipment = shipments.find((one) => one.orderId === order.id)
     const body = terms.get(order.listingVersionId)
     if (!shipment || !body) return []
-    const check = checks.findLast((one) => one.orderId === order.id && one.shipDay === shipment.shipDay)
+    const check = checks.find((one) => one.orderId === order.id)
     const buyerName = people.get(order.buyerId)?.name ?? 'A member who left'
     return [presentRoute({ order, shipment, title: describeListing(body).title, buyerName, check })]
   })

@@ -16,7 +16,7 @@ interface RouteParts {
 }
 
 /** The worst of the way, or how the boxes are to be packed, in a sentence. */
-export function wordsOfCheck({ verdict, facts }: Pick<RouteCheckRow, 'verdict' | 'facts'>): string {
+function wordsOfCheck({ verdict, facts }: Pick<RouteCheckRow, 'verdict' | 'facts'>): string {
   const { worst, packing, reasons } = facts
   if (verdict === 'unknown') return 'Nobody can say: figures or weather are missing for this way.'
   if (worst) return worstWords(worst)

@@ -5,10 +5,13 @@ import { agreeNewDay, declineNewDay } from '@/server/weather/answer-hold'
 import { checkRoutes } from '@/server/weather/check-routes'
 import { holdForWeather } from '@/server/weather/hold-for-weather'
 import { listRoutes } from '@/server/weather/list-routes'
+import { bulkLookLimit, lookLimit } from '@/server/weather/look-limit'
 import * as calls from '@/shared/contracts/ship-acts'
 
 export function weatherRoutes(): Router {
   const router = Router()
+  router.post([calls.holdForWeather.path, calls.agreeNewDay.path], lookLimit())
+  router.post(calls.checkRoutes.path, bulkLookLimit())
   on(
     router,
     calls.holdForWeather,

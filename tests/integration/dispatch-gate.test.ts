@@ -81,7 +81,7 @@ describe('the dispatch gate refuses', () => {
     await box.act(box.hatchery, 'route-papers', { papers: [{ ...permit, expiresOn: SHIP_DAY }] })
     const over = await refused(box)
     expect(over.pointers).toEqual(['#/papers'])
-    expect(over.detail).toContain(`expires on ${SHIP_DAY}`)
+    expect(over.detail).toContain('expires on Mon, May 10, 2027')
     await stays(box)
     const backwards = { ...permit, expiresOn: '2026-01-01' }
     expect((await box.press(box.hatchery, 'route-papers', { papers: [backwards] })).status).toBe(422)
@@ -116,7 +116,7 @@ describe('the dispatch gate refuses', () => {
     await box.act(box.hatchery, 'route-check')
     const early = await refused(box)
     expect([early.pointers, early.nearestShipDay]).toEqual([['#/shipDay'], SHIP_DAY])
-    expect(early.detail).toContain(SHIP_DAY)
+    expect(early.detail).toContain('Mon, May 10')
     await desk.travelTo(new Date('2027-05-11T14:00:00Z'))
     await box.act(box.hatchery, 'route-check')
     const late = await refused(box)
@@ -146,8 +146,10 @@ describe('the dispatch gate refuses', () => {
     await box.act(box.hatchery, 'route-papers', { papers: [permit] })
     await box.act(box.hatchery, 'route-check')
     const told = await refused(box)
-    expect([told.pointers, told.nearestShipDay]).toEqual([['#/shipDay', '#/shipDay'], '2027-06-21'])
-    expect(told.errors.map(({ detail }) => detail).join(' ')).toMatch(/2027-06-18.*Juneteenth/)
+    // In June cold and heat of many years ask for two packings: without a forecast nobody knows which.
+    const pointers = ['#/check', '#/shipDay', '#/shipDay']
+    expect([told.pointers, told.nearestShipDay]).toEqual([pointers, '2027-06-21'])
+    expect(told.errors.map(({ detail }) => detail).join(' ')).toMatch(/Fri, Jun 18.*Juneteenth/)
     await stays(box)
   })
 

@@ -1,9 +1,9 @@
 import { eq } from 'drizzle-orm'
-import { getDocument } from 'pdfjs-dist/legacy/build/pdf.mjs'
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
 import { seller as sellers } from '@/db/schema/sellers'
 import { brokenInvariants } from '@/tests/support/money-invariants'
+import { pdfWords } from '@/tests/support/pdf-words'
 import {
   beaAddress,
   leaving,
@@ -27,16 +27,6 @@ afterEach(async () => {
   expect(await brokenInvariants(desk.db)).toEqual([])
 })
 afterAll(() => desk.close())
-
-async function textOf(bytes: Uint8Array): Promise<string[]> {
-  const file = await getDocument({ data: bytes, verbosity: 0 }).promise
-  return Promise.all(
-    Array.from({ length: file.numPages }, async (_, at) => {
-      const { items } = await (await file.getPage(at + 1)).getTextContent()
-      return items.map((one) => ('str' in one ? one.str : '')).join(' ')
-    }),
-  )
-}
 
 const addressed = (change: Partial<typeof beaAddress>) => ({
   ship: { address: { ...beaAddress, ...change } },
@@ -103,7 +93,7 @@ describe('what is printed', () => {
     const box = await desk.scheduled('accents', addressed({ name: 'Zoe\u0308 Núñez' }))
     expect((await box.seen()).shipment?.address?.name).toBe('Zoë Núñez')
     const reply = await box.hatchery.get(`${box.path}/packing-sheet`).buffer(true).expect(200)
-    expect((await textOf(new Uint8Array(reply.body as Uint8Array)))[1]).toContain('Zoë Núñez')
+    expect((await pdfWords(reply.body as Uint8Array))[1]).toContain('Zoë Núñez')
   })
 
   it('keeps the longest label on one page, and prints nothing that the font does not have', async () => {
@@ -113,7 +103,7 @@ describe('what is printed', () => {
     })
     await desk.db.update(sellers).set({ farmName: 'Łąka ферма 🐟', street: 'W'.repeat(120) })
     const reply = await box.hatchery.get(`${box.path}/packing-sheet`).buffer(true).expect(200)
-    const pages = await textOf(new Uint8Array(reply.body as Uint8Array))
+    const pages = await pdfWords(reply.body as Uint8Array)
     expect(pages).toHaveLength(2)
     expect(pages[1]).toContain('?aka ????? ?')
     await desk.db.update(sellers).set({ farmName: 'Marsh Hatchery', street: '12 Mill Lane' })
