@@ -79,7 +79,12 @@ export const clockEdges: Partial<Record<string, ClockEdge>> = {
   E19: (order) => takeDayBySilence(order, ringOf('E19', order)),
   E21: byClock('E21', (tx, order) => refundEverything(tx, order, 'hold-no-consent')),
   E17: byClock('E17', (tx, order) => refundEverything(tx, order, 'never-scheduled')),
-  E23: byClock('E23', (tx, order) => keepDeposit(tx, order, 'balance-unpaid')),
+  // A day that came by silence may be cancelled free of cost, so not paying for it costs nothing either.
+  E23: byClock('E23', (tx, order) =>
+    order.isDayBySilence
+      ? refundEverything(tx, order, 'balance-unpaid')
+      : keepDeposit(tx, order, 'balance-unpaid'),
+  ),
   E26: dayMissed('E26'),
   E31: buyerAbsent,
   E32: sellerAbsent,

@@ -139,7 +139,8 @@ function presentOrder(seen: OrderSeen, facts: OrderFacts): ShownOrder {
     ...onItsWay(seen, facts),
     ...afterwards(facts),
     arrivalPromise: promiseWords(terms.promise),
-    ...(order.clockAt && order.clockEdge
+    // What staff decide waits for them alone: no time ends it by itself.
+    ...(order.clockAt && order.clockEdge && order.state !== 'claim_open'
       ? { clock: { at: order.clockAt.toISOString(), edge: order.clockEdge } }
       : {}),
     ...freedom(order, facts.terms),

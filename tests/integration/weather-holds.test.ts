@@ -125,6 +125,18 @@ describe('a cold snap before a box leaves', () => {
     expect(seller?.daysMissed).toBe(0)
   })
 
+  it('keeps no deposit for a day that came by silence, when its balance is not paid', async () => {
+    const box = await desk.scheduled('silent and unpaid', { ship: { shipDay: '2027-05-12' } })
+    frost('2027-05-10', '2027-05-14')
+    await box.act(box.hatchery, 'weather-hold', { why: 'Ice on the road.', shipDay: '2027-05-17' })
+    await wait(SHIP_NOW, 72.1)
+    expect((await box.seen()).state).toBe('scheduled')
+    await desk.travelTo(new Date('2027-05-16T10:00:30Z'))
+    const ended = await box.seen()
+    expect(ended).toMatchObject({ state: 'cancelled', reason: 'balance_unpaid' })
+    expect(ended.money.refundedCents).toBe(1335)
+  })
+
   it('catches in the morning what the evening did not know, also when the animals are ready', async () => {
     const box = await desk.ready('morning')
     await lookAt(EVENING)

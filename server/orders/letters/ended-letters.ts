@@ -77,6 +77,12 @@ export const endings = {
     seller:
       'The balance did not come. The deposit is yours, less our fee on it, and the animals are free again.',
   }),
+  silentDayUnpaid: ended({
+    subject: 'The balance was not paid',
+    buyer: `The balance for the new day did not come, so the order has ended. You had not chosen that day: ${ALL_BACK.charAt(0).toLowerCase()}${ALL_BACK.slice(1)}`,
+    seller:
+      'The balance for the new day did not come. The buyer had not chosen that day and gets everything back; the animals are free again.',
+  }),
   dayMissed: ended({
     subject: 'The day passed without your animals',
     buyer: `The seller did not have them ready. ${ALL_BACK}`,

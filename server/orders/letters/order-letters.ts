@@ -163,7 +163,7 @@ const orderLetters: Partial<Record<EdgeId, Writer>> = {
   E20: endings.holdDeclined,
   E21: endings.holdNoConsent,
   E22: ready,
-  E23: endings.balanceUnpaid,
+  E23: (facts) => (facts.order.isDayBySilence ? endings.silentDayUnpaid : endings.balanceUnpaid)(facts),
   E25: endings.sellerCancelled,
   E26: endings.dayMissed,
   E28: scheduled,
