@@ -254,6 +254,7 @@ async function ask(row: AccessRow, role: Role, id: string) {
     .replace('*splat', 'get-session')
     .replace(':token', 'forged')
     .replace(':file', `${'0'.repeat(32)}-320.webp`)
+    .replace(':month', '2027-01')
     .replace(/:\w+/, id)
   const verb =
     call.method === 'ALL' ? 'get' : (call.method.toLowerCase() as 'get' | 'post' | 'patch' | 'delete')
