@@ -3,6 +3,7 @@ import type { OrderPath } from '@/seed/demo/order-story.facts'
 import type { OrderPlan } from '@/seed/demo/plan-orders'
 import type { ShipPath } from '@/seed/demo/ship-story.facts'
 import { after, DAY_MS, HOUR_MS, MINUTE_MS, type Step } from '@/seed/demo/timeline'
+import { claimWindowHours } from '@/shared/domain/listings/claim-promise'
 
 type Timed = readonly [at: Date, act: keyof OrderDesk]
 
@@ -135,7 +136,7 @@ const paths: Record<OrderPath | ShipPath, (times: Times) => Timed[]> = {
 export function orderSteps(plan: OrderPlan, desk: OrderDesk, now: Date): Step[] {
   const { key, path, slot, reservedAt, batch } = plan
   const times: Times = {
-    ...{ reserved: reservedAt, now, claimHours: batch.body.promise.windowHours },
+    ...{ reserved: reservedAt, now, claimHours: claimWindowHours(batch.body) },
     begins: slot?.startsAt ?? reservedAt,
     ends: slot?.endsAt ?? reservedAt,
   }
