@@ -7,6 +7,7 @@ import { listOpenWindows } from '@/server/listings/window-store'
 import { presentTakenDown } from '@/server/moderation/present-report'
 import { listTakenDown } from '@/server/moderation/report-store'
 import type { ListingDraft, OwnListing } from '@/shared/contracts/listings'
+import { matchCrop } from '@/shared/domain/produce/find-crop'
 import { heldWords } from '@/shared/domain/listings/held-words'
 import { lotTitle, type NamedLot } from '@/shared/domain/listings/lot-title'
 
@@ -22,7 +23,7 @@ function draftLot(draft: ListingDraft): NamedLot | null {
   }
   if (category === 'produce' && cropId) {
     const variety = typed(draft.variety) || undefined
-    return { category, cropId: typed(cropId), variety, form: typed(draft.form) }
+    return { category, cropId: matchCrop(typed(cropId))?.id ?? '', variety, form: typed(draft.form) }
   }
   if (!typed(taxonId)) return null
   if (category === 'worms') return { category, taxonId: typed(taxonId), strain }

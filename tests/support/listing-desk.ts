@@ -73,11 +73,7 @@ export async function decide(
 }
 
 /** A listing that went the whole way: drafted, sent in, approved. */
-export async function liveListing(
-  hatchery: Hatchery,
-  moderator: TestAgent,
-  change: Partial<FishBody> = {},
-) {
+export async function liveListing(hatchery: Hatchery, moderator: TestAgent, change: Partial<FishBody> = {}) {
   const drafted = await begin(hatchery, draftOf(hatchery, change))
   await submit(hatchery, drafted).expect(200)
   await (
