@@ -23,7 +23,7 @@ export interface ListingDesk {
   begin: (plan: LotPlan, draft?: ListingDraft) => Promise<void>
   submit: (plan: LotPlan, change?: object) => Promise<void>
   decide: (key: string, given: Decision) => Promise<void>
-  /** Submitted one day, approved the next: the two steps most batches go. */
+  /** Submitted one day and, where animals are looked at first, approved the next. */
   publish: (plan: LotPlan) => Step[]
 }
 
@@ -31,6 +31,8 @@ const typedWindows = ({ slots }: LotPlan): ListingBody['windows'] =>
   slots
     .toSorted((one, other) => one.startsAt.getTime() - other.startsAt.getTime())
     .map(({ day, from, until, capacity }) => ({ day, from, until, capacity }))
+
+const isLookedAt = ({ body }: LotPlan) => body.category === 'fish' || body.category === 'worms'
 
 export function openListingDesk(stage: Stage, photos: PhotoDesk): ListingDesk {
   const ids = new Map<string, string>()
@@ -72,12 +74,16 @@ export function openListingDesk(stage: Stage, photos: PhotoDesk): ListingDesk {
     ...{ idOf, begin, submit, decide },
     publish: (plan) => [
       { at: plan.submittedAt, story: plan.key, what: 'submitted', run: () => submit(plan) },
-      {
-        at: plan.decidedAt,
-        story: plan.key,
-        what: 'approved',
-        run: () => decide(plan.key, { decision: 'approve' }),
-      },
+      ...(isLookedAt(plan)
+        ? [
+            {
+              at: plan.decidedAt,
+              story: plan.key,
+              what: 'approved',
+              run: () => decide(plan.key, { decision: 'approve' }),
+            },
+          ]
+        : []),
     ],
   }
 }

@@ -161,29 +161,26 @@ describe('what asks for a paper', () => {
 })
 
 describe('words and measures', () => {
-  it.each<[string, Change, string, RegExp]>([
+  it.each<[string, Change, [pointer: string, words: RegExp]]>([
     [
       'kale by the bag',
       { cropId: 'kale', saleUnit: { kind: 'bag' } as never },
-      '#/draft/saleUnit',
-      /net weight/,
+      ['#/draft/saleUnit', /net weight/],
     ],
     [
       'organic without a paper',
       { growing: 'Organic, on rafts.' },
-      '#/draft/growing',
-      /without synthetic pesticides/,
+      ['#/draft/growing', /without synthetic pesticides/],
     ],
-    ['sprouts', { cropId: 'alfalfa sprouts' }, '#/draft/cropId', /Sprouts are not sold here/],
-    ['a crop nobody knows', { cropId: 'moon cabbage' }, '#/draft/cropId', /Ask us to add it/],
+    ['sprouts', { cropId: 'alfalfa sprouts' }, ['#/draft/cropId', /Sprouts are not sold here/]],
+    ['a crop nobody knows', { cropId: 'moon cabbage' }, ['#/draft/cropId', /Ask us to add it/]],
     [
       'a harvest in a month',
       {
         harvest: { day: dayAt(NOW, 30), time: '07:00' },
         windows: [{ day: dayAt(NOW, 31), from: '17:00', until: '19:00', capacity: 4 }],
       },
-      '#/draft/harvest/day',
-      /14 days ahead/,
+      ['#/draft/harvest/day', /14 days ahead/],
     ],
     [
       'a harvest long past',
@@ -191,12 +188,11 @@ describe('words and measures', () => {
         harvest: { day: dayAt(NOW, -30), time: '07:00' },
         windows: [{ day: dayAt(NOW, -29), from: '17:00', until: '19:00', capacity: 4 }],
       },
-      '#/draft/harvest/day',
-      /last day of sale was/,
+      ['#/draft/harvest/day', /last day of sale was/],
     ],
-    ['a small order on credit', { depositPct: 20 }, '#/draft/depositPct', /paid in full/],
-    ['a wish to ship', { shipping: {} }, '#/draft', /Not expected here: shipping/],
-  ])('refuses %s at its field, with what to do', async (_name, change, pointer, words) => {
+    ['a small order on credit', { depositPct: 20 }, ['#/draft/depositPct', /paid in full/]],
+    ['a wish to ship', { shipping: {} }, ['#/draft', /Not expected here: shipping/]],
+  ])('refuses %s at its field, with what to do', async (_name, change, [pointer, words]) => {
     const answer = await refused(change)
     expect(answer.status).toBe(422)
     expect(

@@ -31,11 +31,11 @@ beforeEach(() => setClockOffset(NOON.getTime() - Date.now()))
 afterAll(() => desk.close())
 
 const lot = (name: string, whole: ListingBody) => desk.batch(name, { whole, free: whole.countOnHand })
-async function reserve(by: Agent, batch: DeskBatch, quantity: number, change: object = {}) {
+async function reserve(by: Agent, batch: DeskBatch, quantity: number) {
   return by
     .post(`/api/v1/listings/${batch.publicId}/orders`)
     .set(keyed())
-    .send(reserveBody(batch, { quantity, ...change }))
+    .send(reserveBody(batch, { quantity }))
 }
 async function bought(by: Agent, batch: DeskBatch, quantity: number): Promise<ShownOrder> {
   const reply = await reserve(by, batch, quantity)
@@ -45,7 +45,8 @@ async function bought(by: Agent, batch: DeskBatch, quantity: number): Promise<Sh
 }
 const seen = async (by: Agent, { orderId }: ShownOrder) =>
   (await by.get(`/api/v1/orders/${orderId}`).expect(200)).body as ShownOrder
-async function act(by: Agent, { orderId }: ShownOrder, what: string, send: object = {}) {
+async function act(by: Agent, { orderId }: ShownOrder, done: string | [what: string, send: object]) {
+  const [what, send] = typeof done === 'string' ? [done, {}] : done
   const answer = await by.post(`/api/v1/orders/${orderId}/${what}`).set(keyed()).send(send)
   await desk.quiet()
   return answer
@@ -77,7 +78,7 @@ describe('greens, paid at once', () => {
     expect(order.state).toBe('scheduled')
     expect((await act(grower, order, 'readiness')).status).toBe(200)
     const { handOverCode } = await seen(bea, order)
-    const handed = await act(grower, order, 'hand-over', { code: handOverCode, count: 3 })
+    const handed = await act(grower, order, ['hand-over', { code: handOverCode, count: 3 }])
     expect(handed.status, JSON.stringify(handed.body)).toBe(200)
     const after = await seen(bea, order)
     expect(after.survival).toBeUndefined()
@@ -178,7 +179,7 @@ describe('a short harvest', () => {
     expect(again.body).toMatchObject({ unsold: 0, cut: [] })
     await act(grower, second, 'readiness')
     const { handOverCode } = await seen(cal, second)
-    await act(grower, second, 'hand-over', { code: handOverCode, count: 4 })
+    await act(grower, second, ['hand-over', { code: handOverCode, count: 4 }])
     expect((await seen(cal, second)).money.refundedCents).toBe(600)
     await act(cal, second, 'confirmation')
     expect(await seen(cal, second)).toMatchObject({ state: 'settled', money: { feeCents: 72 } })
@@ -234,7 +235,7 @@ describe('a short harvest', () => {
     const anew = (await act(bea, order, 'balance-payment')).body as ShownOrder
     await desk.pay(anew)
     const { handOverCode } = await seen(bea, order)
-    await act(grower, order, 'hand-over', { code: handOverCode, count: 3 })
+    await act(grower, order, ['hand-over', { code: handOverCode, count: 3 }])
     await act(bea, order, 'confirmation')
     expect(await seen(bea, order)).toMatchObject({
       state: 'settled',
