@@ -1,11 +1,11 @@
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 
 const DAY_MS = 86_400_000
 const day = (at: Date, daysLater: number) =>
   new Date(at.getTime() + daysLater * DAY_MS).toISOString().slice(0, 10)
 
 /** A sound batch of bluegill as of `at`; whatever is given takes the place of what stands here. */
-export function batchBody(at: Date, change: Partial<ListingBody>): ListingBody {
+export function batchBody(at: Date, change: Partial<FishBody>): FishBody {
   return {
     category: 'fish',
     taxonId: 'bluegill',

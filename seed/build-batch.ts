@@ -9,6 +9,7 @@ import { photo } from '@/db/schema/photos'
 import { batchBody } from '@/seed/batch-body'
 import type { BuiltSeller } from '@/seed/build-seller'
 import { seededPublicId } from '@/seed/seeded-id'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { listingBody, type ListingBody, type ListingDraft } from '@/shared/contracts/listings'
 
 export interface BuiltBatch {
@@ -28,7 +29,9 @@ interface BatchWish {
   /** Free to order; 500 unless said. */
   free?: number
   state?: 'live' | 'paused' | 'sold_out' | 'expired'
-  body?: Partial<ListingBody>
+  body?: Partial<FishBody>
+  /** A whole listing of another category, in the place of a batch of fish. */
+  whole?: ListingBody
   /** Not built: the photos are there already. */
   hasPhotos?: boolean
 }
@@ -74,10 +77,12 @@ async function buildPhotos(db: Tx, wish: BatchWish): Promise<ListingBody['photos
  */
 export async function buildBatch(db: Tx, wish: BatchWish): Promise<BuiltBatch> {
   const { seller, name, at } = wish
-  const free = wish.free ?? wish.body?.countOnHand ?? 500
+  const free = wish.free ?? wish.whole?.countOnHand ?? wish.body?.countOnHand ?? 500
   const photos = wish.hasPhotos ? {} : { photos: await buildPhotos(db, wish) }
   const counted = { countOnHand: Math.max(free, wish.body?.minOrder ?? 25), ...wish.body }
-  const body = listingBody.parse(batchBody(at, { ...counted, ...photos }))
+  const body = listingBody.parse(
+    wish.whole ? { ...wish.whole, ...photos } : batchBody(at, { ...counted, ...photos }),
+  )
   const publicId = seededPublicId(`batch ${seller.publicId} ${name}`)
   const [made] = await db
     .insert(listing)

@@ -1,8 +1,8 @@
 import { FactRows } from './fact-rows'
 
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 
-export function ArrivalPromise({ promise }: Pick<ListingBody, 'promise'>) {
+export function ArrivalPromise({ promise }: Pick<FishBody, 'promise'>) {
   const remedy =
     promise.remedy === 'refund'
       ? 'Every animal short of the number you paid for is refunded at the price you paid.'

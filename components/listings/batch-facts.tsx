@@ -11,13 +11,13 @@ import { FactRows } from './fact-rows'
 import { plainDay } from './pickup-words'
 
 import { useUnits } from '@/hooks/use-units'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { printCount } from '@/shared/units/count'
 import { printLengthRange } from '@/shared/units/length'
 import { printBothTemperatures } from '@/shared/units/temperature'
 
 /** Everything the seller says about the batch, in groups, with the words of the trade explained. */
-export function BatchFacts({ body }: { body: ListingBody }) {
+export function BatchFacts({ body }: { body: FishBody }) {
   const units = useUnits()
   const { water, health } = body
   const size = printLengthRange({ minCm: body.sizeLoMm / 10, maxCm: body.sizeHiMm / 10 }, units)

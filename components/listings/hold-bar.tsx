@@ -47,7 +47,7 @@ export function HoldBar({ listing, count, near }: Props) {
       <ButtonLink
         icon="lock"
         href={href}
-        label={`Hold ${printCount(count)} ${animalWord(body.taxonId, count)}`}
+        label={`Hold ${printCount(count)} ${body.category === 'fish' ? animalWord(body.taxonId, count) : ''}`.trim()}
       />
     </View>
   )

@@ -28,6 +28,8 @@ import { useBreakpoint } from '@/hooks/use-breakpoint'
 import { useCurrentPlace } from '@/hooks/use-current-place'
 import { useUnits } from '@/hooks/use-units'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { promiseOf } from '@/shared/domain/listings/claim-promise'
+import { shippingOf } from '@/shared/domain/listings/shipping-of'
 
 interface Props {
   listing: ShownListing
@@ -63,6 +65,7 @@ export function ListingStory(props: Props) {
   const units = useUnits()
   const { choose } = useCurrentPlace()
   const { body, gate } = listing
+  const promise = promiseOf(body)
   const canBuy = refusal === null
   // Where the law is why nothing can be held, it is the first thing to read.
   const isLawful = gate?.buy !== 'no' && gate?.buy !== 'ask-moderators'
@@ -92,12 +95,12 @@ export function ListingStory(props: Props) {
                 <Text>{body.words}</Text>
               </Card>
             ) : null}
-            {canBuy ? (
+            {canBuy && body.category === 'fish' ? (
               <LazyPart label="Loading the trip check">
                 <TripCheck listing={listing} count={count} near={near} />
               </LazyPart>
             ) : null}
-            {body.shipping ? (
+            {shippingOf(body) ? (
               <LazyPart label="Loading the shipping season">
                 <ListingShipping listing={listing}>
                   <LazyPart label="Loading the next ship days">
@@ -106,12 +109,16 @@ export function ListingStory(props: Props) {
                 </ListingShipping>
               </LazyPart>
             ) : null}
-            <BatchFacts body={body} />
-            <LazyPart label="Loading the waters">
-              <YourWater water={body.water} />
-            </LazyPart>
+            {body.category === 'fish' ? (
+              <>
+                <BatchFacts body={body} />
+                <LazyPart label="Loading the waters">
+                  <YourWater water={body.water} />
+                </LazyPart>
+              </>
+            ) : null}
             <MoneyTerms body={body} />
-            <ArrivalPromise promise={body.promise} />
+            {promise ? <ArrivalPromise promise={promise} /> : null}
             <CautionList cautions={listingCautions(gate)} />
           </>
         }

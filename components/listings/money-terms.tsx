@@ -2,31 +2,34 @@ import { FactRows } from './fact-rows'
 import { percent } from './percent'
 
 import type { ListingBody } from '@/shared/contracts/listings'
-import { clocks } from '@/shared/domain/orders/clocks.facts'
+import { thingsOf } from '@/shared/domain/listings/count-words'
+import { shippingOf } from '@/shared/domain/listings/shipping-of'
+import { clockMs, clocks } from '@/shared/domain/orders/clocks.facts'
 
 const minutesPerHour = 60
+const minuteMs = 60_000
 
 /** Deposit, balance, cancelling and not coming, in plain words. */
 export function MoneyTerms({ body }: { body: ListingBody }) {
-  const answerHours = clocks.sellerAnswer.minutes / minutesPerHour
-  const graceMinutes = clocks.pickupGrace.minutes
+  const answerHours = clockMs('sellerAnswer', body.category) / minuteMs / minutesPerHour
+  const graceMinutes = clockMs('pickupGrace', body.category) / minuteMs
   return (
     <FactRows
       title="Paying and cancelling"
       facts={[
         {
           term: 'Holding',
-          value: `Holding sets your animals aside for ${clocks.checkoutHold.minutes} minutes while you pay the deposit.`,
+          value: `Holding sets your ${thingsOf(body)} aside for ${clocks.checkoutHold.minutes} minutes while you pay the deposit.`,
         },
         {
           term: 'Deposit',
-          value: `${percent(body.depositPct)} of the price of the animals, by card, when you hold them. Our payment processor holds it; the grower gets it after you confirm.`,
+          value: `${percent(body.depositPct)} of the price, by card, when you hold them. Our payment processor holds it; the grower gets it after you confirm.`,
         },
         {
           term: 'The rest',
           value:
             body.balanceDue === 'at-handover'
-              ? 'By card before you collect; it is released when you have the animals and say all is good.'
+              ? 'By card before you collect; it is released when you have the ${thingsOf(body)} and say all is good.'
               : `By card, at the latest ${clocks.balanceDue.minutes / minutesPerHour} hours before the pickup window.`,
         },
         {
@@ -40,7 +43,7 @@ export function MoneyTerms({ body }: { body: ListingBody }) {
           term: 'Cancelling',
           value: `Free until ${body.freeCancelHours} hours before the window. After that the grower may keep the deposit, never more.`,
         },
-        ...(body.shipping
+        ...(shippingOf(body)
           ? [
               {
                 term: 'When shipped',

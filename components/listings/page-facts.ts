@@ -6,6 +6,10 @@ import type { TagBadge, TagFacts } from './tag-facts'
 
 import { legalWords } from '@/components/rules/legal-words'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { thingsOf, unitWordOf } from '@/shared/domain/listings/count-words'
+import { lotSize } from '@/shared/domain/listings/lot-size'
+import { printSaleUnit } from '@/shared/domain/listings/sale-unit'
+import { shippingOf } from '@/shared/domain/listings/shipping-of'
 import { tierFor } from '@/shared/domain/money/tier-price'
 import { printCount } from '@/shared/units/count'
 import { aboutDistance } from '@/shared/units/distance'
@@ -25,12 +29,10 @@ export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFa
   const next = listing.windows.find(({ placesLeft }) => placesLeft > 0)
   return {
     title: listing.title,
-    sizeText: printLengthRange({ minCm: body.sizeLoMm / 10, maxCm: body.sizeHiMm / 10 }, units),
-    stage: stageName(body.stage),
     countText: `${printCount(listing.free)} left`,
-    waterText: printBothTemperatures(body.water.temperatureC, units),
+    ...kindFacts(body, units),
     priceText: printCents(tierFor(body.tiers, count)?.unitCents ?? 0),
-    priceUnitText: `a ${animalWord(body.taxonId, 1)}, for ${printCount(count)}`,
+    priceUnitText: `a ${body.category === 'fish' ? animalWord(body.taxonId, 1) : unitWordOf(body)}, for ${printCount(count)}`,
     distanceText:
       distanceKm === undefined ? undefined : `${aboutDistance(distanceKm, units)} ${bearing ?? ''}`.trim(),
     placeText: seller.placeText,
@@ -39,8 +41,21 @@ export function pageFacts(listing: ShownListing, { units, count }: Asked): TagFa
   }
 }
 
+/** Size, stage and water of fish; of everything else what one unit is. */
+function kindFacts(body: ShownListing['body'], units: UnitSystem) {
+  const size = lotSize(body)
+  if (body.category !== 'fish' || !size) {
+    return { sizeText: body.category === 'fish' ? '' : printSaleUnit(body.saleUnit, thingsOf(body)) }
+  }
+  return {
+    sizeText: printLengthRange({ minCm: size.loMm / 10, maxCm: size.hiMm / 10 }, units),
+    stage: stageName(body.stage),
+    waterText: printBothTemperatures(body.water.temperatureC, units),
+  }
+}
+
 function badges({ body, gate, shipped }: ShownListing): TagBadge[] {
   const legal = gate ? [legalWords(gate.status, gate.buyerState)] : []
-  if (!body.shipping) return legal
+  if (!shippingOf(body)) return legal
   return [...legal, shipped && gate ? shippingBadge(shipped, gate.buyerState) : canBeShipped]
 }

@@ -15,6 +15,7 @@ const icons: Record<NoticeKind, IconName> = {
   ended: 'stop',
   unclear: 'warn',
   'weather-held': 'warn',
+  'quantity-cut': 'warn',
   'no-show': 'warn',
   'evening-before': 'clock',
   'two-hours-before': 'clock',

@@ -11,6 +11,7 @@ const shipping = {
 }
 const listing = {
   body: {
+    category: 'fish',
     minOrder: 20,
     orderStep: 5,
     tiers: [{ fromCount: 20, unitCents: 95 }],

@@ -3,6 +3,8 @@ import { shipAddressErrors, type AddressTyping } from './ship-address'
 import type { FormError } from '@/components/ui/error-summary'
 import type { ShownListing } from '@/shared/contracts/listings'
 import type { ShipDayOffer } from '@/shared/contracts/shipments'
+import { shippingOf } from '@/shared/domain/listings/shipping-of'
+import { statesServed } from '@/shared/domain/listings/states-served'
 import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
 import { quoteOrder } from '@/shared/domain/money/quote-order'
 import { landedCentsEach } from '@/shared/domain/pricing/landed-cost'
@@ -30,11 +32,12 @@ const NO_FEE_BP = 0
 
 /** Shipping is offered where the seller ships to the buyer's state and no rule hides it there. */
 export const isShippedHere = ({ body, shipped }: Pick<ShownListing, 'body' | 'shipped'>) =>
-  body.shipping !== undefined && shipped?.isServed === true
+  shippingOf(body) !== null && shipped?.isServed === true
 
 /** What the buyer pays for a count, by the same functions that the server charges with. */
 export function quoteCount({ body }: Pick<ShownListing, 'body'>, quantity: number, way: Way) {
-  const { tiers, depositPct, shipping } = body
+  const { tiers, depositPct } = body
+  const shipping = shippingOf(body)
   const charges = way === 'ship' && shipping ? boxCharges(quantity, shipping) : null
   const totals = quoteOrder({
     tiers,
@@ -109,5 +112,5 @@ function shipErrors(listing: ShownListing, draft: ReservationDraft): FormError[]
 
 export function notServedWords({ body, gate }: Pick<ShownListing, 'body' | 'gate'>): string {
   const where = gate ? ` to ${gate.buyerState}` : ' there'
-  return `It is not shipped${where}. The seller ships to ${body.statesServed.join(', ')}.`
+  return `It is not shipped${where}. The seller ships to ${statesServed(body)?.join(', ') ?? 'nobody'}.`
 }

@@ -15,8 +15,9 @@ import type { BatchShipping } from '@/shared/contracts/fish-batch'
 /** Where the box goes, on which day it leaves, and who takes it in. */
 export function ShipChoice({ form }: { form: Reservation }) {
   const { listing } = form
-  const { shipping, statesServed } = listing.body
-  if (!shipping) return null
+  const { body } = listing
+  if (body.category !== 'fish' || !body.shipping) return null
+  const { shipping, statesServed } = body
   return (
     <>
       <Card labelledBy="ship-to">

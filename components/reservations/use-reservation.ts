@@ -12,6 +12,8 @@ import { useReserveBatch } from '@/hooks/use-orders'
 import { useShipDays } from '@/hooks/use-ship-days'
 import { Problem } from '@/shared/api/problem'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { shippingOf } from '@/shared/domain/listings/shipping-of'
+import { statesServed } from '@/shared/domain/listings/states-served'
 import { mayPayInFull } from '@/shared/domain/orders/pay-in-full'
 
 /** The answer was lost, or the first press is still being worked on: it may hold animals already. */
@@ -40,10 +42,11 @@ export function useReservation({ listing: opened, count, wantedWay }: Asked) {
   const [windowId, setWindow] = useState(open.length === 1 ? (open[0]?.windowId ?? '') : '')
   const [shipDay, setShipDay] = useState('')
   const [deliverTo, setDeliverTo] = useState<'door' | 'counter'>(
-    opened.body.shipping?.holdsAtCounter ? 'counter' : 'door',
+    shippingOf(opened.body)?.holdsAtCounter ? 'counter' : 'door',
   )
   const near = place?.near ?? ''
-  const onlyState = opened.body.statesServed.length === 1 ? opened.body.statesServed[0] : undefined
+  const served = statesServed(opened.body)
+  const onlyState = served?.length === 1 ? served[0] : undefined
   const [typedAddress, setAddress] = useState<AddressTyping | null>(null)
   // The place searched for comes late for a member who has just signed in: it fills the form until something is typed.
   const address = typedAddress ?? blankAddress(isZip(near) ? near : '', onlyState ?? place?.state ?? '')

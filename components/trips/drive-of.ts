@@ -21,6 +21,7 @@ const PPM_PER_MEQ = 50
 
 /** The listing's animals as the trip engine reads them. null: no figures are published for them. */
 export function animalsOf({ body }: Pick<ShownListing, 'body'>, count: number): Animals | null {
+  if (body.category !== 'fish') return null
   const species = findSpecies(findTaxon(body.taxonId)?.speciesId ?? '')
   // The longest of the batch weigh most: plan by them.
   const massG = species && massForLoadG(species, body.sizeHiMm)
@@ -42,8 +43,9 @@ export function driveOf(
   const { count, choice, way } = given
   const animals = animalsOf(listing, count)
   const container = homeContainers.find(({ id }) => id === choice.containerId)
-  if (!animals || !container || !way.origin || !way.destination) return null
-  const { temperatureC, khPpm, pH } = listing.body.water
+  const { body } = listing
+  if (body.category !== 'fish' || !animals || !container || !way.origin || !way.destination) return null
+  const { temperatureC, khPpm, pH } = body.water
   const { aeration, ride, driveHours, parkedMinutes, departHour } = choice
   return {
     animals,

@@ -24,8 +24,8 @@ interface Props {
 
 /** How a batch may be shipped, and in which weeks it usually arrives alive where the buyer is. */
 export function ListingShipping({ listing: { body, shipped, gate }, children }: Props) {
+  if (body.category !== 'fish' || !body.shipping) return null
   const { shipping, statesServed } = body
-  if (!shipping) return null
   const days = shipping.days.map((day) => shipDayNames[day]).join(', ')
   return (
     <Card labelledBy="shipping">

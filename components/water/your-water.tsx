@@ -12,7 +12,7 @@ import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
 import { keepWater, keptWater, onKeptWater } from '@/hooks/kept-water'
 import { useUnits } from '@/hooks/use-units'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import { compareWaters, type WaterFigure } from '@/shared/domain/water/compare-waters'
 import { waterMatch } from '@/shared/domain/water/water-match.facts'
@@ -35,7 +35,7 @@ const asked: Record<WaterFigure, { label: string; us: string; metric: string; er
 const figures = Object.keys(asked) as WaterFigure[]
 
 /** The water the animals come out of against the reader's own tank, and how to bring the two together. */
-export function YourWater({ water }: { water: ListingBody['water'] }) {
+export function YourWater({ water }: { water: FishBody['water'] }) {
   const kept = useSyncExternalStore(onKeptWater, keptWater, keptWater)
   const theirs = { waterC: water.temperatureC, pH: water.pH, khPpm: water.khPpm }
   const compared = compareWaters(theirs, kept)

@@ -29,11 +29,18 @@ export const order = mysqlTable(
       .references(() => listing.id),
     /** The snapshot: terms, price and words as they stood. */
     listingVersionId: int({ unsigned: true }).notNull(),
+    /** Of the listing: produce has clocks of its own. */
+    category: varchar({ length: 12 }).notNull().default('fish'),
     state: varchar({ length: 16 }).notNull(),
     reason: varchar({ length: 32 }),
     /** Rises with every change; each change names the version it saw. */
     version: int({ unsigned: true }).notNull().default(1),
     quantity: int({ unsigned: true }).notNull(),
+    /** Units the seller has cut since, because fewer were there; `quantity` is what is left. */
+    quantityCut: int({ unsigned: true }).notNull().default(0),
+    quantityCutAt: instant(),
+    /** Part of their price that was never charged: taken off the balance, and off goods and total with it. */
+    cutFromBalanceCents: int({ unsigned: true }).notNull().default(0),
     handOver: varchar({ length: 8 }).notNull(),
     payMode: varchar({ length: 8 }).notNull(),
     balanceDue: varchar({ length: 12 }).notNull(),

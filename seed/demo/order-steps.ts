@@ -1,8 +1,9 @@
 import type { OrderDesk } from '@/seed/demo/order-desk'
 import type { OrderPath } from '@/seed/demo/order-story.facts'
-import type { OrderPlan } from '@/seed/demo/plan-orders'
+import type { GoodsPath, OrderPlan } from '@/seed/demo/plan-orders'
 import type { ShipPath } from '@/seed/demo/ship-story.facts'
 import { after, DAY_MS, HOUR_MS, MINUTE_MS, type Step } from '@/seed/demo/timeline'
+import { claimWindowHours } from '@/shared/domain/listings/claim-promise'
 
 type Timed = readonly [at: Date, act: keyof OrderDesk]
 
@@ -64,7 +65,7 @@ const sent = (times: Times): Timed[] => [
   [after(times.begins, 8 * HOUR_MS + 10 * MINUTE_MS), 'dispatch'],
 ]
 
-const paths: Record<OrderPath | ShipPath, (times: Times) => Timed[]> = {
+const paths: Record<OrderPath | ShipPath | GoodsPath, (times: Times) => Timed[]> = {
   'ship-settled': (times) => [
     ...sent(times),
     [after(times.begins, 28 * HOUR_MS), 'arrive'],
@@ -78,6 +79,10 @@ const paths: Record<OrderPath | ShipPath, (times: Times) => Timed[]> = {
   'ship-held': (times) => [
     ...boxed(times).filter(([at]) => at < times.now),
     [after(times.now, -90 * MINUTE_MS), 'holdForWeather'],
+  ],
+  'goods-settled': (times) => [
+    ...handedOver(times),
+    [after(times.begins, times.claimHours * HOUR_MS + 16 * MINUTE_MS), 'ring'],
   ],
   confirmed: (times) => [
     ...handedOver(times),
@@ -135,7 +140,7 @@ const paths: Record<OrderPath | ShipPath, (times: Times) => Timed[]> = {
 export function orderSteps(plan: OrderPlan, desk: OrderDesk, now: Date): Step[] {
   const { key, path, slot, reservedAt, batch } = plan
   const times: Times = {
-    ...{ reserved: reservedAt, now, claimHours: batch.body.promise.windowHours },
+    ...{ reserved: reservedAt, now, claimHours: claimWindowHours(batch.body) },
     begins: slot?.startsAt ?? reservedAt,
     ends: slot?.endsAt ?? reservedAt,
   }

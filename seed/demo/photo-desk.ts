@@ -6,7 +6,7 @@ import { fileURLToPath } from 'node:url'
 
 import sharp from 'sharp'
 
-import type { BatchPlan, Shot } from '@/seed/demo/batch-plan'
+import type { LotPlan, Shot } from '@/seed/demo/batch-plan'
 import { seededRandom } from '@/seed/seeded-random'
 import type { Caller } from '@/server/http/caller'
 import { uploadPhoto } from '@/server/photos/upload-photo'
@@ -46,7 +46,7 @@ export interface PhotoDesk {
 }
 
 /** Takes and uploads the photos of all batches through the product's own upload, two at a time, in the given order. */
-export async function openPhotoDesk(plans: readonly BatchPlan[]): Promise<PhotoDesk> {
+export async function openPhotoDesk(plans: readonly LotPlan[]): Promise<PhotoDesk> {
   const folder = await mkdtemp(path.join(tmpdir(), 'tankward-demo-photos-'))
   let taken = 0
   const take = async (shot: Shot, caller: Caller): Promise<string> => {

@@ -1,4 +1,4 @@
-import type { BatchPlan } from '@/seed/demo/batch-plan'
+import type { BatchPlan, LotPlan } from '@/seed/demo/batch-plan'
 import { orderPaths, type OrderPath, type PathFacts } from '@/seed/demo/order-story.facts'
 import type { ShipPath } from '@/seed/demo/ship-story.facts'
 import { slotAfter, slotBefore, type Slot } from '@/seed/demo/pickup-times'
@@ -6,10 +6,13 @@ import { need, type Actor, type Stage } from '@/seed/demo/stage'
 import { after, DAY_MS, HOUR_MS, MINUTE_MS } from '@/seed/demo/timeline'
 import { seededRandom, type Chance } from '@/seed/seeded-random'
 
+/** Collected, and settled by time; nothing of it is rated or counted again. */
+export type GoodsPath = 'goods-settled'
+
 export interface OrderPlan {
   key: string
-  path: OrderPath | ShipPath
-  batch: BatchPlan
+  path: OrderPath | ShipPath | GoodsPath
+  batch: LotPlan
   buyer: Actor
   quantity: number
   payMode: 'deposit' | 'full'

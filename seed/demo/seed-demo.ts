@@ -8,6 +8,7 @@ import { openOrderDesk } from '@/seed/demo/order-desk'
 import { orderSteps } from '@/seed/demo/order-steps'
 import { openPhotoDesk } from '@/seed/demo/photo-desk'
 import { planBatches } from '@/seed/demo/plan-batches'
+import { planLotOrders, planLots } from '@/seed/demo/plan-lots'
 import { planShipped } from '@/seed/demo/plan-shipped'
 import { planOrders } from '@/seed/demo/plan-orders'
 import { planQueueStories } from '@/seed/demo/queue-stories'
@@ -66,9 +67,14 @@ export async function seedDemo(options: DemoOptions): Promise<void> {
   const stage = await setStage(options, at)
   const batches = planBatches(stage)
   const stories = planQueueStories(stage)
-  const orders = [...planOrders(stage, batches), ...planShipped(stage, batches)]
+  const lots = planLots(stage)
+  const orders = [
+    ...planOrders(stage, batches),
+    ...planShipped(stage, batches),
+    ...planLotOrders(stage, lots),
+  ]
   const isIdle = (plan: BatchPlan) => !orders.some((order) => order.batch === plan)
-  const plans = [...batches, ...stories.map((story) => story.plan)]
+  const plans = [...batches, ...lots, ...stories.map((story) => story.plan)]
   const photos = await openPhotoDesk(
     plans.toSorted((one, other) => one.submittedAt.getTime() - other.submittedAt.getTime()),
   )
@@ -87,7 +93,7 @@ export async function seedDemo(options: DemoOptions): Promise<void> {
   try {
     const brokenOff = await playTimeline([
       lastDay,
-      ...batches.flatMap((plan) => listings.publish(plan)),
+      ...[...batches, ...lots].flatMap((plan) => listings.publish(plan)),
       ...stories.flatMap((story) => story.steps(listings)),
       ...pauseSteps(stage, batches.filter(isIdle), listings),
       ...orders.flatMap((plan) => orderSteps(plan, openOrderDesk(plan, listings, moderator), at)),

@@ -1,22 +1,15 @@
 import type { SellerRow } from '@/server/sellers/seller-store'
 import type { FieldProblem } from '@/shared/api/problem'
-import type { ListingBody } from '@/shared/contracts/listings'
-import { findBlock } from '@/shared/domain/rules/find-block'
+import type { FishBody } from '@/shared/contracts/fish-batch'
+import type { WormBody } from '@/shared/contracts/worm-lot'
 import { findState } from '@/shared/domain/rules/find-state'
 import { shipmentOf } from '@/shared/domain/season/shipment-of'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 import { stageFitsLength } from '@/shared/domain/species/stage-fits-length'
-import { traceLineage } from '@/shared/domain/species/trace-lineage'
 
 const MM_PER_INCH = 25.4
 
-/** Why we do not list this animal at all. null: we do. */
-export function blockOn(taxonId: string): string | null {
-  const lineage = traceLineage(taxonId)
-  return lineage ? (findBlock(lineage)?.why ?? null) : null
-}
-
-function animalFaults(body: ListingBody): FieldProblem[] {
+function animalFaults(body: FishBody): FieldProblem[] {
   const taxon = findTaxon(body.taxonId)
   const pointer = '#/draft/taxonId'
   if (!taxon) return [{ detail: 'Pick the species from the list.', pointer }]
@@ -29,7 +22,7 @@ function animalFaults(body: ListingBody): FieldProblem[] {
   return []
 }
 
-function stageFaults(body: ListingBody): FieldProblem[] {
+function stageFaults(body: FishBody): FieldProblem[] {
   const fits = stageFitsLength(body.stage, body.sizeLoMm / MM_PER_INCH, body.sizeHiMm / MM_PER_INCH)
   if (fits !== false) return []
   return [
@@ -40,7 +33,8 @@ function stageFaults(body: ListingBody): FieldProblem[] {
   ]
 }
 
-function stateFaults(body: ListingBody, seller: SellerRow): FieldProblem[] {
+/** Living animals go where we trade them, from sellers who have answered for their state. */
+export function checkStates(body: FishBody | WormBody, seller: SellerRow): FieldProblem[] {
   const faults: FieldProblem[] = []
   if (!findState(seller.state)?.takesAnimals) {
     faults.push({
@@ -66,7 +60,7 @@ function stateFaults(body: ListingBody, seller: SellerRow): FieldProblem[] {
 }
 
 /** A batch that search could not judge would only ever be hidden by it. */
-function shippingFaults(body: ListingBody, { cellLat: lat, cellLng: lng }: SellerRow): FieldProblem[] {
+function shippingFaults(body: FishBody, { cellLat: lat, cellLng: lng }: SellerRow): FieldProblem[] {
   if (!body.shipping) return []
   const from = { lat, lng }
   const shipment = shipmentOf({ taxonId: body.taxonId, packing: body.shipping.packing, from }, from)
@@ -77,11 +71,11 @@ function shippingFaults(body: ListingBody, { cellLat: lat, cellLng: lng }: Selle
 }
 
 /** What is wrong with the animal named, its stage, and where it would be sold or shipped. */
-export function checkAnimal(body: ListingBody, seller: SellerRow): FieldProblem[] {
+export function checkAnimal(body: FishBody, seller: SellerRow): FieldProblem[] {
   return [
     ...animalFaults(body),
     ...stageFaults(body),
-    ...stateFaults(body, seller),
+    ...checkStates(body, seller),
     ...shippingFaults(body, seller),
   ]
 }

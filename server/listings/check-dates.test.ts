@@ -5,6 +5,7 @@ import type { ListingBody } from '@/shared/contracts/listings'
 
 const today = '2027-01-15'
 const asked = {
+  category: 'fish',
   hatchedOn: '2026-11-01',
   water: { measuredOn: '2027-01-10' },
   photos: [{ takenOn: '2027-01-10' }],

@@ -1,5 +1,7 @@
 import type { FieldProblem } from '@/shared/api/problem'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { ListingBody } from '@/shared/contracts/listings'
+import type { ProduceBody } from '@/shared/contracts/produce-lot'
 
 const DAY_MS = 86_400_000
 const WATER_DAYS = 14
@@ -9,7 +11,7 @@ const PHOTO_DAYS = 60
 const daysBetween = (earlier: string, later: string) =>
   Math.round((Date.parse(later) - Date.parse(earlier)) / DAY_MS)
 
-function hatchFaults(body: ListingBody, today: string): FieldProblem[] {
+function hatchFaults(body: FishBody, today: string): FieldProblem[] {
   const { hatchedOn, readyOn } = body
   const faults: FieldProblem[] = []
   if (hatchedOn > today && !readyOn) {
@@ -28,7 +30,7 @@ function hatchFaults(body: ListingBody, today: string): FieldProblem[] {
   return faults
 }
 
-function waterFaults({ water }: ListingBody, today: string): FieldProblem[] {
+function waterFaults({ water }: FishBody, today: string): FieldProblem[] {
   const pointer = '#/draft/water/measuredOn'
   if (water.measuredOn > today) return [{ detail: 'That day has not come yet.', pointer }]
   if (daysBetween(water.measuredOn, today) > WATER_DAYS) {
@@ -48,6 +50,26 @@ function photoFaults({ photos }: ListingBody, today: string): FieldProblem[] {
   })
 }
 
+/** House rule: what is cut in more than two weeks is not offered yet. */
+const HARVEST_AHEAD_DAYS = 14
+
+function harvestFaults({ harvest, sellBy }: ProduceBody, today: string): FieldProblem[] {
+  if (daysBetween(today, harvest.day) > HARVEST_AHEAD_DAYS) {
+    const detail = `Offer a harvest at most ${HARVEST_AHEAD_DAYS} days ahead.`
+    return [{ detail, pointer: '#/draft/harvest/day' }]
+  }
+  if (sellBy !== undefined && sellBy < today) {
+    const detail = `Its last day of sale was ${sellBy}. Was that the day of the harvest?`
+    return [{ detail, pointer: '#/draft/harvest/day' }]
+  }
+  return []
+}
+
+function batchFaults(body: FishBody, today: string, onSale: ListingBody | null): FieldProblem[] {
+  const isSameWater = onSale?.category === 'fish' && same(onSale.water, body.water)
+  return [...hatchFaults(body, today), ...(isSameWater ? [] : waterFaults(body, today))]
+}
+
 const same = (one: unknown, other: unknown) => JSON.stringify(one) === JSON.stringify(other)
 
 /**
@@ -56,8 +78,8 @@ const same = (one: unknown, other: unknown) => JSON.stringify(one) === JSON.stri
  */
 export function checkDates(body: ListingBody, today: string, onSale: ListingBody | null): FieldProblem[] {
   return [
-    ...hatchFaults(body, today),
-    ...(onSale && same(onSale.water, body.water) ? [] : waterFaults(body, today)),
+    ...(body.category === 'fish' ? batchFaults(body, today, onSale) : []),
+    ...(body.category === 'produce' ? harvestFaults(body, today) : []),
     ...(onSale && same(onSale.photos, body.photos) ? [] : photoFaults(body, today)),
   ]
 }

@@ -1,10 +1,16 @@
 import type { Tx } from '@/db/transaction'
+import { hasApprovedCut } from '@/server/listings/lot-code-store'
 import { countRemovedOf, type ListingRow } from '@/server/listings/listing-store'
 import { listOtherBodies } from '@/server/listings/version-store'
 import { findTwinsElsewhere, type PhotoRow } from '@/server/photos/photo-store'
 import type { SellerRow } from '@/server/sellers/seller-store'
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { GateVerdict } from '@/shared/contracts/rules'
+import { judgeStatedWeight } from '@/shared/domain/media/media-weight'
+import { findMedia } from '@/shared/domain/media/find-media'
+import { gateOf } from '@/shared/domain/listings/gated-lot'
+import { judgeForm } from '@/shared/domain/produce/judge-form'
+import { judgeWords } from '@/shared/domain/produce/judge-words'
 import { contactInText } from '@/shared/domain/listings/contact-in-text'
 import { changedFields } from '@/shared/domain/listings/flatten-body'
 import { effectOfField } from '@/shared/domain/listings/material-edit'
@@ -21,19 +27,27 @@ export interface Submitted {
   gate: GateVerdict
 }
 
+function textsOf(body: ListingBody): (string | undefined)[] {
+  switch (body.category) {
+    case 'fish': {
+      const { strain, feed, health, promise } = body
+      const { treatments, lastLosses, papers } = health
+      return [strain, feed.words, treatments, lastLosses, papers, promise.evidence]
+    }
+    case 'worms':
+      return [body.strain, body.bedding, body.promise.evidence]
+    case 'media':
+      return [body.materialWords, body.usedWords]
+    case 'produce':
+      return [body.variety, body.growing, body.organicCertifier]
+  }
+}
+
 /** Everything the seller wrote freely, as one text. */
 function wordsOf(body: ListingBody): string {
-  const { strain, feed, health, promise, words, photos } = body
-  const texts = [
-    strain,
-    words,
-    feed.words,
-    health.treatments,
-    health.lastLosses,
-    health.papers,
-    promise.evidence,
-  ]
-  return [...texts, ...photos.map((photo) => photo.caption)].filter(Boolean).join('\n')
+  return [...textsOf(body), body.words, ...body.photos.map((photo) => photo.caption)]
+    .filter(Boolean)
+    .join('\n')
 }
 
 function editFlags({ body, onSale }: Submitted): string[] {
@@ -44,20 +58,54 @@ function editFlags({ body, onSale }: Submitted): string[] {
   })
 }
 
+/** Names of fish mean nothing on a bunch of rainbow chard: produce is read for plants and for words of the law. */
+function namedFlags(body: ListingBody, text: string): string[] {
+  if (body.category === 'produce') {
+    const taxonId = gateOf(body).taxonId
+    return judgeWords(text, { organic: body.organic ?? null, form: body.form, taxonId })
+      .filter(({ effect }) => effect === 'hold')
+      .map(({ word }) => `words-hold:${word}`)
+  }
+  return nameOtherTaxa(text, gateOf(body).taxonId ?? '')
+    .filter(({ blocked }) => blocked || body.category !== 'media')
+    .map(({ taxonId, blocked }) => `${blocked ? 'names-blocked' : 'names-other'}:${taxonId}`)
+}
+
+/** What its own answers ask a moderator to look at. */
+async function lotFlags({ body, seller }: Submitted, tx: Tx): Promise<string[]> {
+  switch (body.category) {
+    case 'fish':
+      return []
+    case 'worms':
+      return body.raisedInUs ? [] : ['not-raised-in-us']
+    case 'media': {
+      const material = findMedia(body.material)
+      if (!material || body.saleUnit.kind !== 'volume') return []
+      return judgeStatedWeight(material, body.saleUnit).verdict === 'caution' ? ['weight-differs'] : []
+    }
+    case 'produce': {
+      const taxonId = gateOf(body).taxonId
+      const isHeld =
+        body.form === 'cut-mixed-or-washed' &&
+        judgeForm(body.form, await hasApprovedCut(seller.id, tx)).effect === 'held'
+      return [...(taxonId ? [`permit-plant:${taxonId}`] : []), ...(isHeld ? ['form-needs-licence'] : [])]
+    }
+  }
+}
+
 function textFlags(body: ListingBody): string[] {
   const text = wordsOf(body)
-  const named = nameOtherTaxa(text, body.taxonId).map(
-    ({ taxonId, blocked }) => `${blocked ? 'names-blocked' : 'names-other'}:${taxonId}`,
-  )
-  return [...named, ...contactInText(text).map((kind) => `contact:${kind}`)]
+  return [...namedFlags(body, text), ...contactInText(text).map((kind) => `contact:${kind}`)]
 }
 
 function lawFlags({ body, seller, gate }: Submitted): string[] {
+  const { taxonId, isAnimal } = gateOf(body)
+  if (!isAnimal) return []
   const answer = seller.licences.find((licence) => licence.state === seller.state)?.answer
   return [
     ...(gate.status === 'unknown' ? ['law-unknown'] : []),
     ...(answer === 'unsure' ? ['licence-unsure'] : []),
-    ...(traceLineage(body.taxonId)?.flags.includes('protected-papers') ? ['protected-papers'] : []),
+    ...(traceLineage(taxonId ?? '')?.flags.includes('protected-papers') ? ['protected-papers'] : []),
   ]
 }
 
@@ -93,6 +141,7 @@ async function historyFlags({ listing, onSale, seller }: Submitted, tx: Tx): Pro
 export async function collectFlags(submitted: Submitted, tx: Tx): Promise<string[]> {
   return [
     ...textFlags(submitted.body),
+    ...(await lotFlags(submitted, tx)),
     ...(await photoFlags(submitted, tx)),
     ...(await historyFlags(submitted, tx)),
     ...lawFlags(submitted),

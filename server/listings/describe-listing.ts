@@ -1,5 +1,5 @@
 import type { ListingBody } from '@/shared/contracts/listings'
-import { listingTitle } from '@/shared/domain/listings/listing-title'
+import { lotTitle } from '@/shared/domain/listings/lot-title'
 
 export interface ListingFace {
   title: string
@@ -13,14 +13,14 @@ const PLAIN_GROUND = '#e4e9f1'
 export function photoAlt(body: ListingBody, at: number): string {
   const photo = body.photos[at]
   const ruler = photo?.hasRuler ? ', beside a ruler' : ''
-  return photo?.caption || `${listingTitle(body)}${ruler}, photo ${at + 1} of ${body.photos.length}`
+  return photo?.caption || `${lotTitle(body)}${ruler}, photo ${at + 1} of ${body.photos.length}`
 }
 
 /** Name and first picture of a batch; `grounds` holds the pictures' own colours by their ids. */
 export function describeListing(body: ListingBody, grounds?: ReadonlyMap<string, string>): ListingFace {
   const [first] = body.photos
   return {
-    title: listingTitle(body),
+    title: lotTitle(body),
     ...(first
       ? {
           photo: {

@@ -1,5 +1,6 @@
 import type { Tx } from '@/db/transaction'
 import { checkWindows } from '@/server/listings/apply-windows'
+import { assignLotCode } from '@/server/listings/assign-lot-code'
 import { collectFlags, type Submitted } from '@/server/listings/collect-flags'
 import { lockListing, setListing } from '@/server/listings/listing-store'
 import { publishVersion } from '@/server/listings/publish-version'
@@ -7,6 +8,7 @@ import { findLatestVersion, insertVersion, supersedeWaiting } from '@/server/lis
 import { projectListings } from '@/server/search/project-listings'
 import { Problem } from '@/shared/api/problem'
 import { riskOfFlags } from '@/shared/domain/listings/flag-weights'
+import { heldWords } from '@/shared/domain/listings/held-words'
 import { changedFields } from '@/shared/domain/listings/flatten-body'
 import { effectOfEdit, type EditEffect } from '@/shared/domain/listings/material-edit'
 
@@ -21,6 +23,16 @@ async function standByApproved({ listing, seller, onSale, at }: Kept, tx: Tx): P
   await publishVersion({ listing, version, zone: seller.zone, by: seller.memberId, at }, tx)
 }
 
+/**
+ * What submitting does. Animals are always looked at first. Media and produce are on sale at once unless something
+ * about them asks for a moderator: nobody is poisoned by an unread page of gravel, and greens wait for nobody.
+ */
+function effectOf({ body, onSale, flags }: Pick<Submitted, 'body' | 'onSale'> & { flags: string[] }) {
+  const byEdit = onSale ? (effectOfEdit(onSale, body) ?? 'live') : 'hide'
+  const isAnimal = body.category === 'fish' || body.category === 'worms'
+  return isAnimal || flags.some((flag) => heldWords(flag) !== null) ? byEdit : 'live'
+}
+
 /** Where the listing stands while the new version waits: hidden, or on sale as it was approved. */
 function stateWhileWaiting(effect: EditEffect, before: string): string {
   return effect === 'hide' || before === 'draft' ? 'pending_review' : before
@@ -28,7 +40,7 @@ function stateWhileWaiting(effect: EditEffect, before: string): string {
 
 /** Writes the version and does what the edit calls for, in one transaction with search. */
 export async function keepSubmission(submitted: Kept, tx: Tx): Promise<void> {
-  const { body, onSale, seller, at } = submitted
+  const { onSale, seller, at } = submitted
   const listing = await lockListing(submitted.listing.id, tx)
   if (
     !listing ||
@@ -38,13 +50,19 @@ export async function keepSubmission(submitted: Kept, tx: Tx): Promise<void> {
     throw new Problem('version-stale', 'The listing has changed meanwhile. Load it again.')
   }
   const latest = await findLatestVersion(listing.id, tx)
+  const { id: listingId } = listing
+  const body = await assignLotCode(
+    { body: submitted.body, latest: latest?.body ?? null, listingId, sellerId: seller.id },
+    tx,
+  )
   const isRepeat = latest?.review === 'waiting' && changedFields(latest.body, body).length === 0
   if (isRepeat) return
-  const effect = onSale ? effectOfEdit(onSale, body) : 'hide'
   await checkWindows({ listingId: listing.id, body, zone: seller.zone, at }, tx)
-  if (effect === null) return standByApproved({ ...submitted, listing }, tx)
-
-  const flags = await collectFlags({ ...submitted, listing }, tx)
+  if (onSale && changedFields(onSale, body).length === 0) {
+    return standByApproved({ ...submitted, body, listing }, tx)
+  }
+  const flags = await collectFlags({ ...submitted, body, listing }, tx)
+  const effect = effectOf({ body, onSale, flags })
   await supersedeWaiting(listing.id, at, tx)
   const number = (latest?.number ?? 0) + 1
   await insertVersion(
@@ -61,6 +79,7 @@ export async function keepSubmission(submitted: Kept, tx: Tx): Promise<void> {
     )
     return
   }
-  await setListing(listing.id, { state: stateWhileWaiting(effect, listing.state), updatedAt: at }, tx)
+  const state = stateWhileWaiting(effect, listing.state)
+  await setListing(listing.id, { state, category: body.category, updatedAt: at }, tx)
   await projectListings(tx, [listing.id])
 }

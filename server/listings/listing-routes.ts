@@ -4,6 +4,7 @@ import { on } from '@/server/http/on'
 import { adjustStock } from '@/server/listings/adjust-stock'
 import { beginListing } from '@/server/listings/begin-listing'
 import { changeSelling } from '@/server/listings/change-selling'
+import { cutHarvest } from '@/server/listings/cut-harvest'
 import { discardDraft } from '@/server/listings/discard-draft'
 import { listOwnListings } from '@/server/listings/list-own-listings'
 import { readListing } from '@/server/listings/read-listing'
@@ -46,6 +47,12 @@ export function listingRoutes(): Router {
     calls.adjustStock,
   )(async ({ caller, params, body, key }) =>
     adjustStock(caller, params.listingId, { ...body, commandId: key }),
+  )
+  on(
+    router,
+    calls.cutHarvest,
+  )(async ({ caller, params, body, key }) =>
+    cutHarvest(caller, params.listingId, { ...body, commandId: key }),
   )
   return router
 }

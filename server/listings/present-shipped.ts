@@ -1,14 +1,16 @@
 import type { SeasonWeek } from '@/server/listings/season-week'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { ShippedThroughYear, ShippedTo } from '@/shared/contracts/shipping'
 import type { CellPoint } from '@/shared/domain/geo/location-cell'
+import { statesServed } from '@/shared/domain/listings/states-served'
 import { findState } from '@/shared/domain/rules/find-state'
 import { nextSafeWeek, seasonAt, seasonStrip } from '@/shared/domain/season/season-at'
 import { shipmentOf } from '@/shared/domain/season/shipment-of'
 import { comingMonday } from '@/shared/times/coming-monday'
 
 interface Way {
-  body: Pick<ListingBody, 'taxonId' | 'shipping' | 'statesServed'>
+  body: ListingBody | Pick<FishBody, 'category' | 'taxonId' | 'shipping' | 'statesServed'>
   from: CellPoint
   to: { centre: CellPoint; state: string }
   /** What the legal gate says of that state. */
@@ -19,7 +21,7 @@ interface Way {
 const isSafe = (verdict: string) => verdict === 'safe' || verdict === 'safe-with-packs'
 
 function wayOf({ body, from, to }: Way) {
-  if (!body.shipping) return null
+  if (body.category !== 'fish' || !body.shipping) return null
   return shipmentOf({ taxonId: body.taxonId, packing: body.shipping.packing, from }, to.centre)
 }
 
@@ -27,7 +29,7 @@ function wayOf({ body, from, to }: Way) {
 const isServed = ({ body, to, status }: Way) =>
   status !== 'prohibited' &&
   findState(to.state)?.takesAnimals === true &&
-  body.statesServed.includes(to.state)
+  (statesServed(body)?.includes(to.state) ?? false)
 
 /** Whether it may be shipped to a place in a week; undefined: this batch is not shipped. */
 export function presentShipped(way: Way): ShippedTo | undefined {

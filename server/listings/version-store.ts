@@ -52,7 +52,7 @@ export async function findLatestVersion(listingId: number, tx: Tx = db()): Promi
 /** The newest version of each listing, without its body. */
 export async function listLatestReviews(
   listingIds: number[],
-): Promise<Map<number, Pick<Row, 'number' | 'review' | 'reasonCode' | 'reasonText'>>> {
+): Promise<Map<number, Pick<Row, 'number' | 'review' | 'reasonCode' | 'reasonText' | 'flags'>>> {
   if (listingIds.length === 0) return new Map()
   const rows = await db()
     .select({
@@ -61,6 +61,7 @@ export async function listLatestReviews(
       review: listingVersion.review,
       reasonCode: listingVersion.reasonCode,
       reasonText: listingVersion.reasonText,
+      flags: listingVersion.flags,
     })
     .from(listingVersion)
     .where(inArray(listingVersion.listingId, listingIds))

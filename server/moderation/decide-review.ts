@@ -18,7 +18,7 @@ import { findSeller, type SellerRow } from '@/server/sellers/seller-store'
 import { Problem } from '@/shared/api/problem'
 import type { ParsedBody } from '@/shared/api/endpoint'
 import type { decideReview as decideReviewCall, Review } from '@/shared/contracts/moderation'
-import { listingTitle } from '@/shared/domain/listings/listing-title'
+import { lotTitle } from '@/shared/domain/listings/lot-title'
 
 type Decision = ParsedBody<typeof decideReviewCall>
 
@@ -82,7 +82,7 @@ async function tellSeller({ given, version, listing, seller }: Deciding, tx: Tx)
     to: { name: member.name, email: member.email },
     origin: orderSettings().origin,
     listingId: listing.publicId,
-    title: listingTitle(version.body),
+    title: lotTitle(version.body),
     ...given,
   }
   await tellMember(tx, {

@@ -6,7 +6,7 @@ import { listOwnCategories } from '@/server/moderation/review-store'
 import { readCursor, writeCursor } from '@/shared/api/cursor'
 import { Problem } from '@/shared/api/problem'
 import type { ReportedListing } from '@/shared/contracts/listing-reports'
-import { listingTitle } from '@/shared/domain/listings/listing-title'
+import { lotTitle } from '@/shared/domain/listings/lot-title'
 
 function idAfter(cursor: string): number {
   const { id } = readCursor(cursor)
@@ -32,7 +32,7 @@ export async function listReportedListings(
   return {
     items: shown.map((row) => ({
       listingId: row.publicId,
-      title: listingTitle(row.body),
+      title: lotTitle(row.body),
       farmName: row.farmName,
       state: row.state as ReportedListing['state'],
       people: row.people,

@@ -9,13 +9,13 @@ import {
 import { readCursor, writeCursor } from '@/shared/api/cursor'
 import { Problem } from '@/shared/api/problem'
 import type { ReviewRow } from '@/shared/contracts/moderation'
-import { listingTitle } from '@/shared/domain/listings/listing-title'
+import { lotTitle } from '@/shared/domain/listings/lot-title'
 
 function presentRow(row: QueueRow): ReviewRow {
   return {
     versionId: String(row.id),
     listingId: row.listingPublicId,
-    title: listingTitle(row.body),
+    title: lotTitle(row.body),
     farmName: row.farmName,
     state: row.listingState,
     number: row.number,

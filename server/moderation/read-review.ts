@@ -15,7 +15,7 @@ import { Problem } from '@/shared/api/problem'
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { Review } from '@/shared/contracts/moderation'
 import { compareBodies } from '@/shared/domain/listings/compare-bodies'
-import { listingTitle } from '@/shared/domain/listings/listing-title'
+import { lotTitle } from '@/shared/domain/listings/lot-title'
 
 /** What the version is held against: the one buyers see, or else the one submitted before. */
 async function versionBefore(version: VersionRow, liveVersion: number | null): Promise<VersionRow | null> {
@@ -75,7 +75,7 @@ export async function readReview(caller: Caller, versionId: number): Promise<Rev
     listingId: listing.publicId,
     listingState: listing.state as Review['listingState'],
     number: version.number,
-    title: listingTitle(body),
+    title: lotTitle(body),
     review: version.review as Review['review'],
     flags: version.flags,
     submittedAt: version.submittedAt.toISOString(),

@@ -14,7 +14,7 @@ import { projectListings } from '@/server/search/project-listings'
 import type { SellerRow } from '@/server/sellers/seller-store'
 import type { ParsedBody, ReplyOf } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
-import { listingTitle } from '@/shared/domain/listings/listing-title'
+import { lotTitle } from '@/shared/domain/listings/lot-title'
 
 type Given = ParsedBody<Endpoints['takeDownListing']>
 
@@ -29,7 +29,7 @@ async function tellSeller(
     countOpenOrders([listing.id], tx),
   ])
   if (!member || !version) return
-  const title = listingTitle(version.body)
+  const title = lotTitle(version.body)
   await tellMember(tx, {
     memberId: seller.memberId,
     kind: 'listing-taken-down',

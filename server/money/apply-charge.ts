@@ -42,6 +42,9 @@ async function takeBalance(tx: Tx, { payment, order }: Locked): Promise<void> {
     // The clock that waited for the balance waits for the day from now on.
     const clock = order.state === 'scheduled' ? await clockAfter(tx, paid, at) : {}
     await changeOrder(tx, order, { balancePaidAt: at, updatedAt: at, ...clock })
+    // The page was open while the seller cut the order: what is too much goes straight back.
+    const tooMuch = payment.amountCents - order.balanceCents
+    if (tooMuch > 0) await refundPayment(tx, { order, payment, amountCents: tooMuch, why: STRAY })
     return
   }
   await refundPayment(tx, { order, payment, amountCents: payment.amountCents, why: STRAY })

@@ -1,6 +1,8 @@
 import type { Letter } from '@/server/mail/letter'
 import type { ReminderKind } from '@/server/notices/reminder-moments'
+import { bringWords } from '@/server/orders/letters/care-words'
 import { orderTag, orderUrl, slotText, type LetterFacts } from '@/server/orders/letters/letter-facts'
+import { countWords, thingsOf } from '@/shared/domain/listings/count-words'
 import { printCents } from '@/shared/units/money'
 
 const placeOf = ({ seller }: LetterFacts) => `${seller.street}, ${seller.city}, ${seller.state} ${seller.zip}`
@@ -28,7 +30,7 @@ function toBuyer(facts: LetterFacts, kind: ReminderKind): Omit<Letter, 'to'> {
       {
         kind: 'text',
         text: isTomorrow
-          ? 'Put a lidded bucket or cooler ready tonight, and your own tank water to half fill it.'
+          ? bringWords(facts.terms)
           : `${isPaid(facts) ? '' : 'Pay the rest on your phone at the gate. '}Your six-digit code stands on the order page once the animals are ready and paid: count together first and give it last.`,
       },
       { kind: 'button', label: 'Open the order', url: orderUrl(facts) },
@@ -41,7 +43,7 @@ function toSeller(facts: LetterFacts, kind: ReminderKind): Omit<Letter, 'to'> {
   const isTomorrow = kind === 'evening-before'
   const isReady = order.state === 'ready'
   return {
-    subject: `${isTomorrow ? 'Tomorrow' : 'In two hours'}: ${order.quantity} animals for ${buyer.name}`,
+    subject: `${isTomorrow ? 'Tomorrow' : 'In two hours'}: ${countWords(facts.terms, order.quantity)} for ${buyer.name}`,
     heading: `${buyer.name} comes ${isTomorrow ? 'tomorrow' : 'in two hours'}`,
     blocks: [
       orderTag(facts),
@@ -49,7 +51,7 @@ function toSeller(facts: LetterFacts, kind: ReminderKind): Omit<Letter, 'to'> {
         kind: 'facts',
         rows: [
           ['When', slotText(facts)],
-          ['Count', `${order.quantity} animals`],
+          ['Count', countWords(facts.terms, order.quantity)],
           ['The buyer still pays', toPay(facts)],
         ],
       },
@@ -57,7 +59,7 @@ function toSeller(facts: LetterFacts, kind: ReminderKind): Omit<Letter, 'to'> {
         kind: 'text',
         text: isReady
           ? 'Count together at the gate; the buyer gives the code last.'
-          : 'Mark the order ready when the animals are counted and waiting.',
+          : `Mark the order ready when the ${thingsOf(facts.terms)} are counted and waiting.`,
       },
       { kind: 'button', label: 'See the order', url: orderUrl(facts) },
     ],

@@ -16,6 +16,8 @@ import { readShipment } from '@/server/orders/shipment-store'
 import { readTerms } from '@/server/orders/terms-store'
 import { queueOrderLetters } from '@/server/orders/queue-order-letters'
 import { Problem } from '@/shared/api/problem'
+import { claimWindowHours } from '@/shared/domain/listings/claim-promise'
+import { readyDay } from '@/shared/domain/listings/ready-day'
 import { edges, type Edge, type EdgeActor, type EdgeId } from '@/shared/domain/orders/edges.facts'
 import { nextClock } from '@/shared/domain/orders/next-clock'
 import type { OrderState } from '@/shared/domain/orders/states.facts'
@@ -66,16 +68,17 @@ export async function clockAfter(
   at: Date,
 ): Promise<{ clockAt: Date | null; clockEdge: string | null }> {
   const terms = await readTerms(tx, order.listingVersionId)
+  const readyOn = readyDay(terms)
   const next = nextClock({
     state: order.state as OrderState,
     sinceMs: at.getTime(),
     category: terms.category,
-    readyMs: terms.readyOn ? Date.parse(`${terms.readyOn}T23:59:59Z`) : null,
+    readyMs: readyOn ? Date.parse(`${readyOn}T23:59:59Z`) : null,
     slotStartMs: order.slotStartsAt?.getTime() ?? null,
     slotEndMs: order.slotEndsAt?.getTime() ?? null,
     balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
     isBalancePaid: order.balancePaidAt !== null || order.balanceCents === 0,
-    claimWindowHours: terms.promise.windowHours,
+    claimWindowHours: claimWindowHours(terms),
     promisedDeliveryMs: (await readShipment(tx, order.id))?.promisedAt.getTime() ?? null,
     handOver: order.handOver === 'ship' ? 'ship' : 'pickup',
     silenceMoves: (await readOpenHold(tx, order.id))?.silenceMoves ?? false,

@@ -21,7 +21,8 @@ import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 type Asked = ParsedBody<Endpoints['cancelOrder']> & { commandId: string }
 
 const byBuyer: Record<string, EdgeId> = { deposit_paid: 'E15', scheduled: 'E24', ready: 'E56' }
-const bySeller: Record<string, EdgeId> = {
+/** How a seller ends an order, by its state. */
+export const bySeller: Record<string, EdgeId> = {
   deposit_paid: 'E16',
   scheduled: 'E25',
   weather_hold: 'E54',

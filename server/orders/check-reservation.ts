@@ -57,7 +57,11 @@ export async function checkReservation(
       'The seller has just changed this listing. Look at it again before you pay.',
     )
   }
-  if (live.terms.hatchedOn > now().toISOString().slice(0, 10) && !live.terms.readyOn) {
+  if (
+    live.terms.category === 'fish' &&
+    live.terms.hatchedOn > now().toISOString().slice(0, 10) &&
+    !live.terms.readyOn
+  ) {
     throw new Problem('listing-closed', 'This batch has no promised ready date yet.')
   }
   checkQuantity(live.terms, asked.quantity)

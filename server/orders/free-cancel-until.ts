@@ -9,7 +9,7 @@ export function freeCancelUntil(order: OrderRow, terms: ListingBody): Date | nul
     slotStartMs: isAgreed ? (order.slotStartsAt?.getTime() ?? null) : null,
     category: terms.category,
     freeCancelHours: terms.freeCancelHours,
-    quantityCutMs: null,
+    quantityCutMs: order.quantityCutAt?.getTime() ?? null,
     // A day that came by silence was no choice of the buyer's either.
     isMovedBySeller: order.sellerMoves > 0 || order.isDayBySilence,
   })

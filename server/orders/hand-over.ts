@@ -7,6 +7,7 @@ import { refundOrder } from '@/server/money/refund-order'
 import { applyEdge } from '@/server/orders/apply-edge'
 import { mayAct } from '@/server/orders/order-policy'
 import { changeOrder, lockOrder, type OrderRow } from '@/server/orders/order-store'
+import { paidUnitCents } from '@/server/orders/paid-unit'
 import { orderSeenBy } from '@/server/orders/party-of'
 import { showAgain } from '@/server/orders/show-order'
 import { moveStock } from '@/server/orders/stock-store'
@@ -61,7 +62,7 @@ async function refundShort(tx: Tx, order: OrderRow, count: number): Promise<void
   const short = shortfallRefund({
     ordered: order.quantity,
     alive: count,
-    price: { kind: 'each', unitCents: order.goodsCents / order.quantity },
+    price: { kind: 'each', unitCents: paidUnitCents(order) },
     boxCents: order.boxCents,
     freightCents: order.freightCents,
     isSellersFault: false,

@@ -20,7 +20,7 @@ const STOPPABLE = ['requested', ...CANCELLABLE, 'weather_hold']
 
 /** The promised delivery is over: the clock of a sent box rings 36 hours after it. */
 const isBoxLate = (order: OrderRow) =>
-  order.clockAt !== null && now().getTime() >= order.clockAt.getTime() - clockMs('lateBox', 'fish')
+  order.clockAt !== null && now().getTime() >= order.clockAt.getTime() - clockMs('lateBox', order.category)
 
 const isSellersBox = (order: OrderRow, party: Party) => party === 'seller' && isShipped(order)
 
@@ -28,7 +28,7 @@ const isSellersBox = (order: OrderRow, party: Party) => party === 'seller' && is
 function hasWaited(order: OrderRow, party: Party): boolean {
   const { slotStartsAt, slotEndsAt } = order
   if (!slotStartsAt || !slotEndsAt) return false
-  const graceMs = clockMs('pickupGrace', 'fish')
+  const graceMs = clockMs('pickupGrace', order.category)
   return party === 'buyer' ? now() >= slotStartsAt : now().getTime() >= slotEndsAt.getTime() + graceMs
 }
 

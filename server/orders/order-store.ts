@@ -26,6 +26,7 @@ export type OrderRow = typeof order.$inferSelect
 export type OrderEventRow = typeof orderEvent.$inferSelect
 
 const FINAL = ['settled', 'cancelled']
+const TO_SERVE = ['reserved', 'requested', 'pledged', 'deposit_paid', 'scheduled', 'weather_hold', 'ready']
 
 /**
  * Takes fish from the free count in one conditional update: true when they were there. Nothing is read first, so two
@@ -152,6 +153,24 @@ export async function listEventsOf(orderIds: number[], tx: Tx = db()): Promise<O
 
 export async function countUnpaidHolds(tx: Tx, buyerId: string): Promise<number> {
   return tx.$count(order, and(eq(order.buyerId, buyerId), eq(order.state, 'reserved')))
+}
+
+/** Pickups a buyer has let pass since a moment. */
+export async function countNoShows(tx: Tx, buyerId: string, since: Date): Promise<number> {
+  return tx.$count(
+    order,
+    and(eq(order.buyerId, buyerId), eq(order.reason, 'buyer_no_show'), gte(order.noShowAt, since)),
+  )
+}
+
+/** Running orders of a listing whose goods have not left yet, the last one made first; locked. */
+export async function lockOrdersToServe(tx: Tx, listingId: number): Promise<OrderRow[]> {
+  return tx
+    .select()
+    .from(order)
+    .where(and(eq(order.listingId, listingId), inArray(order.state, TO_SERVE)))
+    .orderBy(desc(order.createdAt), desc(order.id))
+    .for('update')
 }
 
 /** Animals of one listing that a buyer has in orders still running or done. */

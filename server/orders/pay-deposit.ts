@@ -22,7 +22,7 @@ export async function openFor(
     if (seen.order.reason === 'hold_expired') {
       throw new Problem(
         'deposit-expired',
-        'The 15 minutes are over and the animals are free again. Hold them anew.',
+        'The 15 minutes are over and what you held is free again. Hold them anew.',
       )
     }
     throw new Problem('order-moved', undefined, { facts: { state: seen.order.state } })
@@ -32,7 +32,7 @@ export async function openFor(
   if (!shown.payUrl) {
     throw new Problem(
       'payments-away',
-      'The payment service does not answer right now. Your animals are still held; try again in a moment.',
+      'The payment service does not answer right now. What you chose is still held; try again in a moment.',
     )
   }
   return shown

@@ -8,6 +8,7 @@ import type { CheckedReservation } from '@/server/orders/check-reservation'
 import { orderSettings } from '@/server/orders/order-settings'
 import {
   countBought,
+  countNoShows,
   countUnpaidHolds,
   findWindow,
   hasOpenWindow,
@@ -30,6 +31,11 @@ import type { GateVerdict } from '@/shared/contracts/rules'
 import { quoteOrder } from '@/shared/domain/money/quote-order'
 import { mayPayInFull } from '@/shared/domain/orders/pay-in-full'
 import { clockMs } from '@/shared/domain/orders/clocks.facts'
+
+/** Who has let three pickups pass in sixty days holds for a shorter time and pays everything at once. House rules. */
+const FORGETFUL = { noShows: 3, days: 60, holdMinutes: 5 } as const
+const DAY_MS = 86_400_000
+const MINUTE_MS = 60_000
 
 /** Unpaid holds one member may have at a time: a hold costs the seller sales. House rule. */
 const MOST_UNPAID_HOLDS = 3
@@ -98,7 +104,7 @@ async function takeFish(tx: Tx, placing: Placing): Promise<void> {
   if (!held) throw shortOf(await readFree(listing.id, tx))
 }
 
-function priced(placing: Placing, slot: Slot) {
+function priced(placing: Placing, slot: Slot, forgetful: boolean) {
   const { terms, asked, at, shipped } = placing
   const { feeBp } = orderSettings()
   const quote = quoteOrder({
@@ -111,12 +117,13 @@ function priced(placing: Placing, slot: Slot) {
     feeBp,
   })
   const isFull =
-    asked.payMode === 'full' &&
-    mayPayInFull({
-      totalCents: quote.totalCents,
-      nowMs: at.getTime(),
-      slotStartMs: slot.slotStartsAt?.getTime() ?? null,
-    })
+    forgetful ||
+    (asked.payMode === 'full' &&
+      mayPayInFull({
+        totalCents: quote.totalCents,
+        nowMs: at.getTime(),
+        slotStartMs: slot.slotStartsAt?.getTime() ?? null,
+      }))
   const firstChargeCents = isFull ? quote.totalCents : quote.depositCents
   return {
     goodsCents: quote.goodsCents,
@@ -127,23 +134,30 @@ function priced(placing: Placing, slot: Slot) {
     depositCents: quote.depositCents,
     feeCents: quote.feeCents,
     feeBp,
-    payMode: isFull ? 'full' : 'deposit',
+    payMode: firstChargeCents === quote.totalCents ? 'full' : 'deposit',
     firstChargeCents,
     balanceCents: quote.totalCents - firstChargeCents,
   }
+}
+
+async function isForgetful(tx: Tx, { caller, at }: Pick<Placing, 'caller' | 'at'>): Promise<boolean> {
+  const since = new Date(at.getTime() - FORGETFUL.days * DAY_MS)
+  return (await countNoShows(tx, caller.memberId, since)) >= FORGETFUL.noShows
 }
 
 async function write(tx: Tx, placing: Placing): Promise<number> {
   const { listing, seller, caller, asked, place, verdict, terms, versionId, shipped, at } = placing
   await takeFish(tx, placing)
   const slot = await takeSlot(tx, placing)
-  const money = priced(placing, slot)
+  const forgetful = await isForgetful(tx, placing)
+  const money = priced(placing, slot, forgetful)
   const orderId = await insertOrder(tx, {
     publicId: newPublicId(),
     buyerId: caller.memberId,
     sellerId: seller.id,
     listingId: listing.id,
     listingVersionId: versionId,
+    category: terms.category,
     state: 'reserved',
     quantity: asked.quantity,
     handOver: shipped ? 'ship' : 'pickup',
@@ -154,7 +168,10 @@ async function write(tx: Tx, placing: Placing): Promise<number> {
     buyerState: place.state,
     buyerCell: place.cellId,
     handOverCode: String(randomInt(0, 1_000_000)).padStart(6, '0'),
-    clockAt: new Date(at.getTime() + clockMs('checkoutHold', terms.category)),
+    clockAt: new Date(
+      at.getTime() +
+        (forgetful ? FORGETFUL.holdMinutes * MINUTE_MS : clockMs('checkoutHold', terms.category)),
+    ),
     clockEdge: 'E02',
     createdAt: at,
     updatedAt: at,

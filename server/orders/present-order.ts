@@ -21,6 +21,7 @@ import { presentRating, presentSurvival } from '@/server/ratings/present-rating'
 import type { AfterHandOver } from '@/server/ratings/rating-policy'
 import { listRatingsOf } from '@/server/ratings/rating-store'
 import { listSurvivalOf } from '@/server/ratings/survival-store'
+import { paidUnitCents } from '@/server/orders/paid-unit'
 import { promiseWords } from '@/server/orders/promise-words'
 import { readTermsOf } from '@/server/orders/terms-store'
 import { listLatestChecks } from '@/server/shipping/route-check-store'
@@ -122,7 +123,7 @@ function presentOrder(seen: OrderSeen, facts: OrderFacts): ShownOrder {
     title: described.title,
     photo: described.photo,
     quantity: order.quantity,
-    unitCents: Math.round(order.goodsCents / order.quantity),
+    unitCents: Math.round(paidUnitCents(order)),
     money: moneyOf(order, facts),
     payMode: order.payMode === 'full' ? 'full' : 'deposit',
     balanceDue: order.balanceDue === 'before' ? 'before' : 'at-handover',
@@ -138,7 +139,7 @@ function presentOrder(seen: OrderSeen, facts: OrderFacts): ShownOrder {
     ...(order.countHandedOver === null ? {} : { countHandedOver: order.countHandedOver }),
     ...onItsWay(seen, facts),
     ...afterwards(facts),
-    arrivalPromise: promiseWords(terms.promise),
+    arrivalPromise: promiseWords(terms),
     // What staff decide waits for them alone: no time ends it by itself.
     ...(order.clockAt && order.clockEdge && order.state !== 'claim_open'
       ? { clock: { at: order.clockAt.toISOString(), edge: order.clockEdge } }

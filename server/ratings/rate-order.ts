@@ -53,7 +53,7 @@ export async function rateOrder(caller: Caller, orderId: string, asked: Asked): 
     if (before)
       throw new Problem('rating-closed', 'You have rated this order already. You can change it for 14 days.')
     if (!mayRate('rate', { order, party }))
-      throw new Problem('rating-closed', 'An order can be rated once the animals have been handed over.')
+      throw new Problem('rating-closed', 'An order can be rated once it has been handed over.')
     await insertRating(tx, {
       ...columnsOf(asked),
       publicId: newPublicId(),

@@ -1,10 +1,11 @@
+import { gateOf, type GatedLot } from '@/shared/domain/listings/gated-lot'
 import { judgeGate, type GateJudgement } from '@/shared/domain/rules/gate'
 import type { Viewer } from '@/shared/domain/rules/gate-question'
 import type { SpeciesRule } from '@/shared/domain/rules/species-rule'
 import { traceLineage } from '@/shared/domain/species/trace-lineage'
 
 export interface GateAsked {
-  body: { taxonId: string; licenceNumbers: string }
+  body: GatedLot
   sellerState: string
   buyerState: string
   viewer: Viewer
@@ -12,18 +13,27 @@ export interface GateAsked {
   approved?: boolean
 }
 
-/** Every name a rule about this animal may hang on. */
-export function taxaOf(taxonId: string): string[] {
-  const lineage = traceLineage(taxonId)
+/** Every name a rule about what is sold may hang on; none where no rule is about it. */
+export function taxaOf(body: GatedLot): string[] {
+  const lineage = traceLineage(gateOf(body).taxonId ?? '')
   return lineage ? [...new Set([...lineage.self, ...lineage.hybridParents.flat()])] : []
 }
 
-/** Puts a pickup of this batch before the gate: the animals change hands where the seller is. */
-export function askGate(asked: GateAsked, rules: readonly SpeciesRule[], today: string): GateJudgement {
-  const taxon = traceLineage(asked.body.taxonId)
-  if (!taxon) throw new Error(`no taxon ${asked.body.taxonId}`)
+/**
+ * Puts a pickup of this batch before the gate: it changes hands where the seller is. null: no living thing that any
+ * rule is about.
+ */
+export function askGate(
+  asked: GateAsked,
+  rules: readonly SpeciesRule[],
+  today: string,
+): GateJudgement | null {
+  const { taxonId, papers } = gateOf(asked.body)
+  if (taxonId === null) return null
+  const taxon = traceLineage(taxonId)
+  if (!taxon) throw new Error(`no taxon ${taxonId}`)
   // A moderator who approves a listing has read the licence number on it; "none needed" is not a paper.
-  const hasPaper = asked.approved !== false && /\d/.test(asked.body.licenceNumbers)
+  const hasPaper = asked.approved !== false && /\d/.test(papers)
   return judgeGate({
     taxon,
     rules,

@@ -1,4 +1,5 @@
 import { askGate, type GateAsked } from '@/server/rules/ask-gate'
+import { gateOf } from '@/shared/domain/listings/gated-lot'
 import { findState } from '@/shared/domain/rules/find-state'
 import type { SpeciesRule } from '@/shared/domain/rules/species-rule'
 import { stateBit, usStates } from '@/shared/domain/rules/state-bits'
@@ -15,16 +16,17 @@ export function hiddenStates(
   rules: readonly SpeciesRule[],
   today: string,
 ): bigint {
-  const { taxonId, licenceNumbers } = batch.body
+  const { taxonId, papers, isAnimal } = gateOf(batch.body)
+  if (taxonId === null) return 0n
   const read = rules.map((rule) => `${rule.ruleKey}.${rule.version}`).join()
-  const key = [taxonId, batch.sellerState, /\d/.test(licenceNumbers), today, read].join('|')
+  const key = [taxonId, batch.sellerState, /\d/.test(papers), today, read].join('|')
   const before = known.get(key)
   if (before !== undefined) return before
   let mask = 0n
   for (const buyerState of usStates) {
-    const served = findState(buyerState)?.takesAnimals === true
+    const served = !isAnimal || findState(buyerState)?.takesAnimals === true
     const judged = askGate({ ...batch, buyerState, viewer: 'visitor' }, rules, today)
-    if (!served || !judged.effect.visible) mask |= stateBit(buyerState) ?? 0n
+    if (!served || judged?.effect.visible === false) mask |= stateBit(buyerState) ?? 0n
   }
   if (known.size >= MOST_KNOWN) known.clear()
   known.set(key, mask)

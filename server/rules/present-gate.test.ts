@@ -10,7 +10,7 @@ import { stateBit } from '@/shared/domain/rules/state-bits'
 const today = '2027-01-15'
 const rules = [...speciesRules, ...demoRules]
 const asked = (taxonId: string, change: Partial<GateAsked> = {}): GateAsked => ({
-  body: { taxonId, licenceNumbers: 'Class A 1142' },
+  body: { category: 'fish', taxonId, licenceNumbers: 'Class A 1142' },
   sellerState: 'OH',
   buyerState: 'OH',
   viewer: 'buyer',
@@ -30,7 +30,11 @@ describe('the gate in words', () => {
   it('takes a licence number for a paper only once a moderator has read it', () => {
     expect(gate(asked('nile_tilapia')).buy).toBe('ticks')
     expect(gate(asked('nile_tilapia', { approved: false })).buy).toBe('reserve-only')
-    const none = { taxonId: 'nile_tilapia', licenceNumbers: 'none needed, indoor tanks' }
+    const none = {
+      category: 'fish',
+      taxonId: 'nile_tilapia',
+      licenceNumbers: 'none needed, indoor tanks',
+    } as const
     expect(gate(asked('nile_tilapia', { body: none })).buy).toBe('reserve-only')
   })
 

@@ -10,8 +10,14 @@ import { readFound, type FoundFacts } from '@/server/search/found-store'
 import { readWindowsWithRoom, type OpenWindow } from '@/server/search/projection-store'
 import type { SearchHit } from '@/server/search/search-query'
 import { presentRating } from '@/server/sellers/present-seller-card'
+import type { ListingBody } from '@/shared/contracts/listings'
 import type { FoundListing } from '@/shared/contracts/search'
 import { bearingWords } from '@/shared/domain/geo/bearing-words'
+import { thingsOf } from '@/shared/domain/listings/count-words'
+import { gateOf } from '@/shared/domain/listings/gated-lot'
+import { printLotPrice } from '@/shared/domain/listings/lot-price'
+import { lotSize } from '@/shared/domain/listings/lot-size'
+import { printSaleUnit } from '@/shared/domain/listings/sale-unit'
 import { mostOrderCents } from '@/shared/domain/money/most-order-cents'
 import type { SpeciesRule } from '@/shared/domain/rules/species-rule'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
@@ -40,11 +46,12 @@ function legalBook(rules: SpeciesRule[], buyerState: string, at: Date): LegalBoo
   const today = at.toISOString().slice(0, 10)
   const judged = new Map<string, FoundListing['legal']>()
   return ({ body, state }) => {
-    const key = `${body.taxonId}|${state}|${/\d/.test(body.licenceNumbers)}`
+    const { taxonId, papers } = gateOf(body)
+    const key = `${body.category}|${taxonId ?? ''}|${state}|${/\d/.test(papers)}`
     const known = judged.get(key)
     if (known) return known
     const asked = { body, sellerState: state, buyerState, viewer: 'visitor' } as const
-    const taxa = taxaOf(body.taxonId)
+    const taxa = taxaOf(body)
     const own = rules.filter((rule) => taxa.includes(rule.taxonId))
     const { status, buy } = presentGate(askGate(asked, own, today), asked)
     judged.set(key, { status, buy })
@@ -55,7 +62,7 @@ function legalBook(rules: SpeciesRule[], buyerState: string, at: Date): LegalBoo
 /** Of the place searched from, and of the one where what is shipped would arrive. */
 async function readLegalBooks(all: FoundFacts[], { place, destination, at }: Around) {
   const rules = await loadRules({
-    taxonIds: [...new Set(all.flatMap(({ body }) => taxaOf(body.taxonId)))],
+    taxonIds: [...new Set(all.flatMap(({ body }) => taxaOf(body)))],
     jurisdictions: [...new Set(['US', place.state, destination.state, ...all.map(({ state }) => state)])],
   })
   const legal = legalBook(rules, place.state, at)
@@ -76,29 +83,49 @@ function totalOf(unitCents: number, count: number | undefined): { totalCents?: n
   return count === undefined || totalCents > mostOrderCents ? {} : { totalCents }
 }
 
+/** What it is, as far as there is a name for it beside the title. */
+function kindOf(body: ListingBody) {
+  if (body.category === 'media') return { material: body.material }
+  if (body.category === 'produce') return { cropId: body.cropId }
+  const taxon = findTaxon(body.taxonId)
+  const size = lotSize(body)
+  return {
+    ...(taxon ? { scientificName: taxon.scientificName } : {}),
+    ...(taxon?.speciesId ? { speciesId: taxon.speciesId } : {}),
+    ...(size ? { sizeLoMm: size.loMm, sizeHiMm: size.hiMm } : {}),
+    ...(body.category === 'fish' ? { stage: body.stage, waterC: body.water.temperatureC } : {}),
+  }
+}
+
+/** What one unit is, and the price that offers are compared by, printed here: the tables behind it stay on the server. */
+function soldAs(body: ListingBody, unitCents: number): Pick<FoundListing, 'soldBy' | 'comparable'> {
+  if (body.category === 'fish') return {}
+  const us = printLotPrice(body, unitCents, 'us').comparable
+  const metric = printLotPrice(body, unitCents, 'metric').comparable
+  return {
+    soldBy: printSaleUnit(body.saleUnit, thingsOf(body)),
+    ...(us !== null && metric !== null ? { comparable: { us, metric } } : {}),
+  }
+}
+
 function presentTag(
   hit: Pick<SearchHit, 'listingId' | 'unitCents'>,
   facts: FoundFacts,
   { beside, count }: { beside: Beside; count?: number | undefined },
 ): PlacelessTag {
   const { body, cellLat: lat, cellLng: lng } = facts
-  const taxon = findTaxon(body.taxonId)
   const next = beside.windows.find((window) => window.listingId === facts.listingId)
   const rating = presentRating(facts)
   return {
     listingId: facts.publicId,
     category: body.category,
     ...describeListing(body, beside.grounds),
-    ...(taxon ? { scientificName: taxon.scientificName } : {}),
-    ...(taxon?.speciesId ? { speciesId: taxon.speciesId } : {}),
-    stage: body.stage,
-    sizeLoMm: body.sizeLoMm,
-    sizeHiMm: body.sizeHiMm,
+    ...kindOf(body),
+    ...soldAs(body, hit.unitCents),
     free: facts.free,
     minOrder: body.minOrder,
     unitCents: hit.unitCents,
     ...totalOf(hit.unitCents, count),
-    waterC: body.water.temperatureC,
     farmName: facts.farmName,
     placeText: `${facts.city}, ${facts.state}`,
     state: facts.state,

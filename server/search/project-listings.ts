@@ -15,12 +15,12 @@ async function projectSome(tx: Tx, listingIds: number[]): Promise<void> {
   const ids = facts.map((one) => one.listingId)
   const [windows, rules] = await Promise.all([
     readWindowsWithRoom(ids, at, tx),
-    loadRules({ taxonIds: [...new Set(facts.flatMap((one) => taxaOf(one.body.taxonId)))] }, tx),
+    loadRules({ taxonIds: [...new Set(facts.flatMap((one) => taxaOf(one.body)))] }, tx),
   ])
   // Real time: revisions rise although the demo's date may stand anywhere.
   const rev = Math.floor(Date.now() / 1000)
   const rows = facts.flatMap((one) => {
-    const taxa = taxaOf(one.body.taxonId)
+    const taxa = taxaOf(one.body)
     const batch = { body: one.body, sellerState: one.state }
     const own = rules.filter((rule) => taxa.includes(rule.taxonId))
     const row = searchRowOf(one, {

@@ -1,8 +1,11 @@
 import { escapeHtml } from '@/server/mail/escape-html'
 import type { ShownListing } from '@/shared/contracts/listings'
+import { thingsOf } from '@/shared/domain/listings/count-words'
+import { printLotPrice } from '@/shared/domain/listings/lot-price'
+import { lotSize } from '@/shared/domain/listings/lot-size'
+import { statesServed } from '@/shared/domain/listings/states-served'
 import { tierFor } from '@/shared/domain/money/tier-price'
 import { printLengthRange } from '@/shared/units/length'
-import { printCents } from '@/shared/units/money'
 
 const meta = (property: string, content: string) =>
   `<meta property="${property}" content="${escapeHtml(content)}" />`
@@ -14,9 +17,13 @@ const jsonText = (value: unknown) => JSON.stringify(value).replaceAll('<', '\\u0
 export function listingHead(listing: ShownListing, origin: string): { title: string; tags: string } {
   const { body, seller, photos, listingId, free } = listing
   const unitCents = tierFor(body.tiers, body.minOrder)?.unitCents ?? body.tiers[0]?.unitCents ?? 0
-  const size = printLengthRange({ minCm: body.sizeLoMm / 10, maxCm: body.sizeHiMm / 10 }, 'us')
-  const title = `${listing.title}, ${size}`
-  const about = `${printCents(unitCents)} each near ${seller.placeText}. ${free} left. Pickup from ${seller.farmName}; your money is held until they are alive in hand.`
+  const size = lotSize(body)
+  const title = size
+    ? `${listing.title}, ${printLengthRange({ minCm: size.loMm / 10, maxCm: size.hiMm / 10 }, 'us')}`
+    : listing.title
+  const { price, comparable } = printLotPrice(body, unitCents, 'us')
+  const held = thingsOf(body) === 'goods' ? 'you have it in hand' : 'they are alive in hand'
+  const about = `${comparable ? `${price} (${comparable})` : price} near ${seller.placeText}. ${free} left. Pickup from ${seller.farmName}; your money is held until ${held}.`
   const url = `${origin}/listings/${listingId}`
   const photo = photos[0]
   const image = photo ? `${origin}/photos/${photo.photoId}-800.webp` : `${origin}/icon-512.png`
@@ -32,7 +39,7 @@ export function listingHead(listing: ShownListing, origin: string): { title: str
       price: (unitCents / 100).toFixed(2),
       priceCurrency: 'USD',
       availability: free > 0 ? 'https://schema.org/InStock' : 'https://schema.org/SoldOut',
-      areaServed: body.statesServed,
+      ...(statesServed(body) ? { areaServed: statesServed(body) } : {}),
       seller: { '@type': 'Organization', name: seller.farmName },
     },
   }

@@ -1,5 +1,5 @@
 import { wayWeather, type WayWeather } from '@/server/shipping/way-weather'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { BoxPacking, RouteCheckFacts } from '@/shared/contracts/shipments'
 import { massForLoadG } from '@/shared/domain/animals/length-to-mass'
 import type { CellPoint } from '@/shared/domain/geo/location-cell'
@@ -16,7 +16,7 @@ import { findTaxon } from '@/shared/domain/species/find-taxon'
 import type { Animals } from '@/shared/domain/transport/trip'
 
 export interface AskedWay {
-  terms: ListingBody
+  terms: FishBody
   quantity: number
   boxes: number
   shipDay: string
@@ -46,7 +46,7 @@ function taskOf({ terms, quantity, boxes }: Pick<AskedWay, 'terms' | 'quantity' 
 const PPM_PER_MEQ = 50
 
 /** The animals of an order as the trip engine reads them, fasted as the species asks. null: no figures for them. */
-function animalsOf(terms: ListingBody, count: number): Animals | null {
+function animalsOf(terms: FishBody, count: number): Animals | null {
   const species = findSpecies(findTaxon(terms.taxonId)?.speciesId ?? '')
   // The longest of the batch weigh most: plan by them.
   const massG = species && massForLoadG(species, terms.sizeHiMm)

@@ -6,11 +6,11 @@ import { readSellerById, type SellerRow } from '@/server/orders/party-store'
 import { listShipmentsOf, readShipment, type ShipmentRow } from '@/server/orders/shipment-store'
 import { readTermsOf } from '@/server/orders/terms-store'
 import { Problem } from '@/shared/api/problem'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 
 export interface OrderShipped extends OrderSeen {
   shipment: ShipmentRow
-  terms: ListingBody
+  terms: FishBody
   seller: SellerRow
 }
 
@@ -41,7 +41,7 @@ async function withShipment(seen: OrderSeen): Promise<OrderShipped> {
     readSellerById(order.sellerId),
   ])
   const body = terms.get(order.listingVersionId)
-  if (!shipment) throw notShipped()
+  if (!shipment || (body && body.category !== 'fish')) throw notShipped()
   if (!body || !seller) throw new Problem('not-found')
   return { ...seen, shipment, terms: body, seller }
 }

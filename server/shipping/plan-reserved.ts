@@ -3,12 +3,13 @@ import { requireOrderSize } from '@/server/orders/require-order-size'
 import type { ReserveAsked } from '@/server/orders/reserve-batch'
 import type { FoundPlace } from '@/server/places/find-place'
 import type { JudgedWay } from '@/server/shipping/judge-way'
-import { notShippedTo, requireShippedTo } from '@/server/shipping/may-ship-to'
+import { notShippedTo } from '@/server/shipping/may-ship-to'
 import { requireLawfulDay, requireSafeWay } from '@/server/shipping/require-ship-day'
 import { shippingOf } from '@/server/shipping/ship-rule'
 import { promisedAtOf, shipSlot } from '@/server/shipping/ship-slot'
 import { wayTo } from '@/server/shipping/ship-way'
 import { Problem, type FieldProblem } from '@/shared/api/problem'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { ListingBody } from '@/shared/contracts/listings'
 import type { BoxCharges } from '@/shared/domain/shipping/box-charges'
 
@@ -35,7 +36,10 @@ interface Wanted {
 }
 
 /** The address says the same place as the one that was judged, and one that the seller ships to. */
-function addressFaults(ask: AskedShip, { asked, terms, place }: Wanted): FieldProblem[] {
+function addressFaults(
+  ask: AskedShip,
+  { asked, terms, place }: Wanted & { terms: FishBody },
+): FieldProblem[] {
   const { address, deliverTo } = ask
   const faults: FieldProblem[] = []
   if (address.zip !== asked.near) {
@@ -64,8 +68,9 @@ export async function planReserved(wanted: Wanted): Promise<ReservedShipment | n
   const { asked, terms, seller, place } = wanted
   const { ship: ask } = asked
   if (!ask) return null
-  if (!terms.shipping) requireShippedTo(terms, place.state)
-  const errors = addressFaults(ask, wanted)
+  if (terms.category !== 'fish' || !terms.shipping)
+    throw new Problem('not-shipped', notShippedTo(terms, place.state) ?? undefined)
+  const errors = addressFaults(ask, { ...wanted, terms })
   if (errors.length > 0) throw new Problem('fields-invalid', undefined, { errors })
   const way = wayTo({ terms, seller, quantity: asked.quantity }, place)
   requireOrderSize(terms, { quantity: asked.quantity, charges: way.charges, pointer: '#/quantity' })

@@ -22,12 +22,12 @@ export async function readShipDays({ listingId, near, quantity }: Asked): Promis
   const place = await requirePlace(near, 'query:near')
   const listing = await readListingRow(listingId)
   if (!listing || listing.liveVersion === null || !isPublic(listing)) throw new Problem('not-found')
-  const [seller, { terms }] = await Promise.all([
+  const [seller, live] = await Promise.all([
     readSellerById(listing.sellerId),
     readLiveTerms(listing.id, listing.liveVersion),
   ])
   if (!seller) throw new Problem('not-found')
-  requireShippedTo(terms, place.state)
+  const terms = requireShippedTo(live.terms, place.state)
   const verdict = await judgeListing({
     body: terms,
     sellerState: seller.state,

@@ -4,7 +4,7 @@ import type { ShipmentRow } from '@/server/orders/shipment-store'
 import type { FoundPlace } from '@/server/places/find-place'
 import type { AskedWay } from '@/server/shipping/judge-way'
 import { shippingOf } from '@/server/shipping/ship-rule'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { boxCharges, type BoxCharges } from '@/shared/domain/shipping/box-charges'
 
 /** A way between two areas, each known by its middle and its town; the day is asked for later. */
@@ -23,7 +23,7 @@ const fromSeller = ({ cellLat, cellLng, city, state }: SellerRow) => ({
 })
 
 interface Wanted {
-  terms: ListingBody
+  terms: FishBody
   quantity: number
   seller: SellerRow
 }
@@ -40,7 +40,7 @@ export function wayTo({ terms, quantity, seller }: Wanted, place: FoundPlace): S
 
 interface OfOrder {
   order: OrderRow
-  terms: ListingBody
+  terms: FishBody
   seller: SellerRow
   shipment: ShipmentRow
 }

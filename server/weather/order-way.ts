@@ -20,6 +20,7 @@ export async function loadOrderWay(order: OrderRow): Promise<OrderWay | null> {
     readTermsOf([order.listingVersionId]),
   ])
   const terms = versions.get(order.listingVersionId)
-  if (!seller || !terms) throw new Error(`order ${order.id} has lost its seller or its terms`)
+  if (!seller || terms?.category !== 'fish')
+    throw new Error(`order ${order.id} has lost its seller or the batch it ships`)
   return { order, shipment, way: wayOfOrder({ order, terms, seller, shipment }) }
 }

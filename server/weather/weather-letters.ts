@@ -6,6 +6,7 @@ import {
   type LetterFacts,
   type OrderLetter,
 } from '@/server/orders/letters/letter-facts'
+import { countWords } from '@/shared/domain/listings/count-words'
 import { printDay, printMoment, printSlot } from '@/shared/times/print-time'
 
 type Writer = (facts: LetterFacts) => OrderLetter[]
@@ -87,7 +88,7 @@ export const rescheduled: Writer = (facts) => {
     {
       to: facts.sellerPerson,
       subject: `New day: ${when}`,
-      heading: `${facts.order.quantity} animals have a new day`,
+      heading: `${countWords(facts.terms, facts.order.quantity)} have a new day`,
       blocks: [...blocks, button],
     },
   ]

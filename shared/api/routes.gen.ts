@@ -7,6 +7,7 @@ export interface Endpoints {
   adjustStock: typeof import('@/shared/contracts/listings').adjustStock
   beginListing: typeof import('@/shared/contracts/listings').beginListing
   changeSelling: typeof import('@/shared/contracts/listings').changeSelling
+  cutHarvest: typeof import('@/shared/contracts/listings').cutHarvest
   discardDraft: typeof import('@/shared/contracts/listings').discardDraft
   listOwnListings: typeof import('@/shared/contracts/listings').listOwnListings
   readListing: typeof import('@/shared/contracts/listings').readListing
@@ -94,6 +95,7 @@ export const routes: Record<keyof Endpoints, readonly [method: string, path: str
   adjustStock: ['POST', '/sellers/mine/listings/:listingId/stock-movements', false],
   beginListing: ['POST', '/sellers/mine/listings', false],
   changeSelling: ['POST', '/sellers/mine/listings/:listingId/selling', false],
+  cutHarvest: ['POST', '/listings/:listingId/harvest', false],
   discardDraft: ['DELETE', '/sellers/mine/listings/:listingId', false],
   listOwnListings: ['GET', '/sellers/mine/listings', false],
   readListing: ['GET', '/listings/:listingId', false],

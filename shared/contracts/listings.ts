@@ -2,6 +2,9 @@ import { z } from 'zod'
 
 import { endpoint } from '@/shared/api/endpoint'
 import { fishBody } from '@/shared/contracts/fish-batch'
+import { mediaBody } from '@/shared/contracts/media-lot'
+import { produceBody } from '@/shared/contracts/produce-lot'
+import { wormBody } from '@/shared/contracts/worm-lot'
 import { gateVerdict } from '@/shared/contracts/rules'
 import { shippedThroughYear } from '@/shared/contracts/shipping'
 import { sellerCard } from '@/shared/contracts/sellers'
@@ -24,7 +27,7 @@ export const listingDraft = z
   .refine((draft) => JSON.stringify(draft).length <= 20_000, 'That is more text than one listing can hold.')
 export type ListingDraft = z.output<typeof listingDraft>
 
-export const listingBody = fishBody
+export const listingBody = z.discriminatedUnion('category', [fishBody, wormBody, mediaBody, produceBody])
 export type ListingBody = z.output<typeof listingBody>
 
 const listingParams = z.object({ listingId: publicIdText })
@@ -94,6 +97,8 @@ export const ownListing = z.object({
       state: z.string(),
       reasonCode: z.string().optional(),
       reasonText: z.string().optional(),
+      /** Why it waits, a sentence each, where something about it asks for a moderator. */
+      why: z.array(z.string()).optional(),
     })
     .optional(),
   takenDown: z.object({ reason: z.enum(takeDownReasons), note: z.string().optional() }).optional(),
@@ -182,6 +187,29 @@ export const discardDraft = endpoint({
   status: 204,
   summary: 'Throw away a draft that was never submitted',
   params: listingParams,
+})
+
+export const cutHarvest = endpoint({
+  method: 'POST',
+  path: '/listings/:listingId/harvest',
+  auth: 'seller',
+  idempotent: true,
+  summary: 'Fewer are there than were sold: the last units in order time are cut and refunded',
+  params: listingParams,
+  body: z
+    .object({
+      /** Whole units that are really there, for orders not handed over yet and for sale. */
+      count: z.int('How many are there? A whole number.').min(0, 'How many are there? 0 is an answer.'),
+      note: line(200).optional(),
+    })
+    .strict(),
+  reply: z.object({
+    listing: ownListing,
+    /** Orders that were cut or ended, the last one made first. */
+    cut: z.array(z.object({ orderId: publicIdText, units: z.int(), left: z.int(), refundCents: z.int() })),
+    /** Units that were still free and are no longer offered. */
+    unsold: z.int(),
+  }),
 })
 
 export const stockAdjustment = z

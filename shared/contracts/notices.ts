@@ -17,6 +17,7 @@ export const noticeKinds = [
   'ended',
   'unclear',
   'weather-held',
+  'quantity-cut',
   'no-show',
   'evening-before',
   'two-hours-before',

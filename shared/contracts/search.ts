@@ -49,6 +49,13 @@ export const foundListing = z.object({
   stage: z.string().optional(),
   sizeLoMm: z.number().optional(),
   sizeHiMm: z.number().optional(),
+  /** Of media and produce. */
+  material: z.string().optional(),
+  cropId: z.string().optional(),
+  /** One unit in words, of everything but fish: 'head', '250 worms'. */
+  soldBy: z.string().optional(),
+  /** The price offers are compared by, such as $9.33/lb; left out where a unit holds no measured amount. */
+  comparable: z.object({ us: z.string(), metric: z.string() }).optional(),
   free: z.int(),
   minOrder: z.int(),
   unitCents: cents,

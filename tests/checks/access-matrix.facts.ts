@@ -157,6 +157,8 @@ export const accessMatrix: AccessRow[] = [
     send: { change: -1_000_000, reason: 'recount' },
     ...ownersAct('409'),
   },
+  // The caller's listing is one of fish, whose orders are not cut by themselves.
+  { route: 'cutHarvest', send: { count: 0 }, ...ownersAct('409') },
 
   {
     route: 'reserveBatch',

@@ -6,7 +6,7 @@ import { listingSearch } from '@/db/schema/listing-search'
 import { listing, listingVersion, pickupWindow, stockMovement } from '@/db/schema/listings'
 import { callCount } from '@/db/schema/requests'
 import { seller } from '@/db/schema/sellers'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import {
   decide,
   draftOf,
@@ -46,7 +46,7 @@ const isFound = async (publicId: string) => {
   const { id } = await rowOf(publicId)
   return (await desk.db.$count(listingSearch, eq(listingSearch.listingId, id))) === 1
 }
-const edit = (change: Partial<ListingBody>) => resubmit(ann, live, draftOf(ann, change))
+const edit = (change: Partial<FishBody>) => resubmit(ann, live, draftOf(ann, change))
 const shown = async () => (await desk.visitor().get(`/api/v1/listings/${live}`)).body
 
 describe('editing an approved batch', () => {
@@ -54,7 +54,7 @@ describe('editing an approved batch', () => {
     ['another species', { taxonId: 'yellow_perch' }],
     ['another origin', { origin: 'bought-in', originState: 'IN' }],
     ['a named strain', { strain: 'copper-nosed' }],
-  ] as [string, Partial<ListingBody>][])(
+  ] as [string, Partial<FishBody>][])(
     'hides it at once for %s, and shows what changed',
     async (_, change) => {
       const { body } = await edit(change)

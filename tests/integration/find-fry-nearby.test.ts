@@ -11,7 +11,7 @@ import { setClockOffset } from '@/server/clock'
 import { expireListings } from '@/server/listings/expire-listings'
 import { projectListings } from '@/server/search/project-listings'
 import { theSearch } from '@/server/search/the-search'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { searchListings, type FoundListing, type SearchAsked } from '@/shared/contracts/search'
 import { cellBounds } from '@/shared/domain/geo/location-cell'
 import { parseCellId } from '@/shared/domain/geo/location-cell-id'
@@ -31,7 +31,7 @@ async function farm(name: string, zip: string, more: Partial<Parameters<typeof b
   return buildSeller(desk.db, { member, zip, ...more })
 }
 
-async function batch(seller: BuiltSeller, name: string, body: Partial<ListingBody> = {}) {
+async function batch(seller: BuiltSeller, name: string, body: Partial<FishBody> = {}) {
   const built = await buildBatch(desk.db, { seller, name, at, body })
   ids.set(name, built.publicId)
   await inTransaction((tx) => projectListings(tx, [built.id]))

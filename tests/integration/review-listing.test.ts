@@ -6,7 +6,7 @@ import { callCount } from '@/db/schema/requests'
 import { auditLog } from '@/db/schema/moderation'
 import { outbox } from '@/db/schema/outbox'
 import type { Letter } from '@/server/mail/letter'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { buildMember } from '@/seed/build-member'
 import { buildSeller } from '@/seed/build-seller'
 import {
@@ -39,7 +39,7 @@ beforeEach(async () => {
 })
 afterAll(() => desk.close())
 
-const sent = async (change: Partial<ListingBody> = {}, hatchery = ann) => {
+const sent = async (change: Partial<FishBody> = {}, hatchery = ann) => {
   const drafted = await begin(hatchery, draftOf(hatchery, change))
   await submit(hatchery, drafted).expect(200)
   return drafted.listingId

@@ -8,7 +8,7 @@ import { buildBatch } from '@/seed/build-batch'
 import { buildMember } from '@/seed/build-member'
 import { buildSeller, type BuiltSeller } from '@/seed/build-seller'
 import { projectListings } from '@/server/search/project-listings'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { SellerListing } from '@/shared/contracts/search'
 import { openListingDesk, type ListingDesk } from '@/tests/support/listing-desk'
 import { TEST_NOW } from '@/tests/support/server'
@@ -20,7 +20,7 @@ let neighbour: BuiltSeller
 let empty: BuiltSeller
 const made: string[] = []
 
-async function batch(seller: BuiltSeller, name: string, body: Partial<ListingBody> = {}) {
+async function batch(seller: BuiltSeller, name: string, body: Partial<FishBody> = {}) {
   const built = await buildBatch(desk.db, { seller, name, at, body })
   await inTransaction((tx) => projectListings(tx, [built.id]))
   return built

@@ -12,6 +12,7 @@ import { loadRules } from '@/seed/load-rules'
 import { now } from '@/server/clock'
 import { readListing } from '@/server/listings/read-listing'
 import { projectListings } from '@/server/search/project-listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { ListingBody } from '@/shared/contracts/listings'
 
 /** A live batch and the statements its buyers in Ohio have to tick. */
@@ -21,7 +22,8 @@ export interface DeskBatch extends BuiltBatch {
 
 export interface BatchWish {
   free?: number
-  body?: Partial<ListingBody>
+  body?: Partial<FishBody>
+  whole?: ListingBody
 }
 
 export const HATCHERY_EMAIL = 'hatchery@example.org'

@@ -5,7 +5,8 @@ import { buildMember, type BuiltMember } from '@/seed/build-member'
 import { buildSeller, type BuiltSeller } from '@/seed/build-seller'
 import { loadPlaces } from '@/seed/load-places'
 import { loadRules } from '@/seed/load-rules'
-import type { ListingBody, OwnListing } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
+import type { OwnListing } from '@/shared/contracts/listings'
 import { keyed, openTestServer, TEST_NOW, type TestServer } from '@/tests/support/server'
 import { plainPhoto } from '@/tests/support/pictures'
 
@@ -32,7 +33,7 @@ export async function uploadPhoto(agent: TestAgent, width = 640): Promise<string
 }
 
 /** A whole batch as this hatchery would type it on the day of the tests. */
-export function draftOf({ photoId }: Hatchery, change: Partial<ListingBody> = {}): ListingBody {
+export function draftOf({ photoId }: Hatchery, change: Partial<FishBody> = {}): FishBody {
   const photos = [{ photoId, takenOn: '2027-01-12', hasRuler: true }]
   return batchBody(new Date(TEST_NOW), { photos, ...change })
 }
@@ -72,11 +73,7 @@ export async function decide(
 }
 
 /** A listing that went the whole way: drafted, sent in, approved. */
-export async function liveListing(
-  hatchery: Hatchery,
-  moderator: TestAgent,
-  change: Partial<ListingBody> = {},
-) {
+export async function liveListing(hatchery: Hatchery, moderator: TestAgent, change: Partial<FishBody> = {}) {
   const drafted = await begin(hatchery, draftOf(hatchery, change))
   await submit(hatchery, drafted).expect(200)
   await (

@@ -5,7 +5,7 @@ import { listing } from '@/db/schema/listings'
 import { order as orders } from '@/db/schema/orders'
 import { shipment } from '@/db/schema/shipments'
 import { readListing } from '@/server/listings/read-listing'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { packingTicks } from '@/shared/contracts/ship-acts'
 import type { DeskBatch } from '@/tests/support/desk-ground'
@@ -28,7 +28,7 @@ export const beaAddress = {
 }
 export const LOUISVILLE = beaAddress.zip
 
-export const shipping: NonNullable<ListingBody['shipping']> = {
+export const shipping: NonNullable<FishBody['shipping']> = {
   packing: 'foam-38-overnight',
   boxCents: 1200,
   freightCents: 4850,
@@ -40,7 +40,7 @@ export const shipping: NonNullable<ListingBody['shipping']> = {
 }
 
 /** Sixty fish at $0.89, box 12.00, freight 48.50: the worked example of the money rules. */
-const body: Partial<ListingBody> = { shipping, tiers: [{ fromCount: 25, unitCents: 89 }] }
+const body: Partial<FishBody> = { shipping, tiers: [{ fromCount: 25, unitCents: 89 }] }
 
 /** The paper that the demonstration rules ask a seller in Ohio for. */
 export const permit = {
@@ -52,7 +52,7 @@ export const permit = {
 }
 
 interface Wish {
-  body?: Partial<ListingBody>
+  body?: Partial<FishBody>
   /** Of the reservation's body. */
   change?: Record<string, unknown>
   ship?: Record<string, unknown>

@@ -1,4 +1,5 @@
 import { orderTag, orderUrl, type LetterFacts, type OrderLetter } from '@/server/orders/letters/letter-facts'
+import { thingsOf } from '@/shared/domain/listings/count-words'
 import { printCents } from '@/shared/units/money'
 
 type Writer = (facts: LetterFacts) => OrderLetter[]
@@ -9,35 +10,37 @@ interface Ending {
   seller?: string
 }
 
-/** How an order ended, to the buyer and, where there is something to know, to the seller. */
+/** How an order ended, to the buyer and, where there is something to know, to the seller; {things} is what was sold. */
 export function ended({ subject, buyer, seller }: Ending): Writer {
-  return (facts) => [
-    {
-      to: facts.buyer,
-      subject,
-      heading: subject,
-      blocks: [
-        orderTag(facts),
-        { kind: 'text', text: buyer },
-        { kind: 'button', label: 'See the order', url: orderUrl(facts) },
-        { kind: 'text', text: `Others nearby: ${facts.origin}` },
-      ],
-    },
-    ...(seller
-      ? [
-          {
-            to: facts.sellerPerson,
-            subject,
-            heading: subject,
-            blocks: [
-              orderTag(facts),
-              { kind: 'text' as const, text: seller },
-              { kind: 'button' as const, label: 'See the order', url: orderUrl(facts) },
-            ],
-          },
-        ]
-      : []),
-  ]
+  return (facts) => {
+    const said = (text: string) => text.replaceAll('{things}', thingsOf(facts.terms))
+    const title = { subject: said(subject), heading: said(subject) }
+    return [
+      {
+        to: facts.buyer,
+        ...title,
+        blocks: [
+          orderTag(facts),
+          { kind: 'text', text: said(buyer) },
+          { kind: 'button', label: 'See the order', url: orderUrl(facts) },
+          { kind: 'text', text: `Others nearby: ${facts.origin}` },
+        ],
+      },
+      ...(seller
+        ? [
+            {
+              to: facts.sellerPerson,
+              ...title,
+              blocks: [
+                orderTag(facts),
+                { kind: 'text' as const, text: said(seller) },
+                { kind: 'button' as const, label: 'See the order', url: orderUrl(facts) },
+              ],
+            },
+          ]
+        : []),
+    ]
+  }
 }
 
 const BANK = 'Your bank shows it within a few days.'
@@ -46,8 +49,7 @@ const ALL_BACK = `Every cent you paid is on its way back to your card. ${BANK}`
 export const endings = {
   holdOver: ended({
     subject: 'Your hold has ended',
-    buyer:
-      'The 15 minutes passed without payment, so the animals are free again. Nothing was taken from your card.',
+    buyer: 'The time to pay has passed, so the {things} are free again. Nothing was taken from your card.',
   }),
   declined: ended({
     subject: 'The seller had to decline',
@@ -57,7 +59,7 @@ export const endings = {
     subject: 'The seller did not answer in time',
     buyer: `Nothing was taken: the earmarked deposit has been let go. ${BANK} We are sorry for the wait.`,
     seller:
-      'The time to answer passed, so the request has ended and the animals are free again. It counts in your response record.',
+      'The time to answer passed, so the request has ended and the {things} are free again. It counts in your response record.',
   }),
   sellerCancelled: ended({
     subject: 'The seller cancelled the order',
@@ -68,14 +70,14 @@ export const endings = {
     subject: 'No day was agreed',
     buyer: `The time to agree on a day has passed. ${ALL_BACK}`,
     seller:
-      'No day was agreed, so the order has ended and the buyer has everything back. The animals are free again.',
+      'No day was agreed, so the order has ended and the buyer has everything back. The {things} are free again.',
   }),
   balanceUnpaid: ended({
     subject: 'The balance was not paid',
     buyer:
       'The balance did not come in time, so the order has ended. The deposit is kept by the terms you agreed to; nothing else is charged.',
     seller:
-      'The balance did not come. The deposit is yours, less our fee on it, and the animals are free again.',
+      'The balance did not come. The deposit is yours, less our fee on it, and the {things} are free again.',
   }),
   silentDayUnpaid: ended({
     subject: 'The balance was not paid',
@@ -84,7 +86,7 @@ export const endings = {
       'The balance for the new day did not come. The buyer had not chosen that day and gets everything back; the animals are free again.',
   }),
   dayMissed: ended({
-    subject: 'The day passed without your animals',
+    subject: 'The day passed without your {things}',
     buyer: `The seller did not have them ready. ${ALL_BACK}`,
     seller:
       'The day passed and the order was not marked ready, so the buyer has everything back. It counts in your record.',
@@ -104,7 +106,7 @@ export const endings = {
     subject: 'The pickup was missed',
     buyer:
       'Nobody came and nobody objected. The deposit is kept by the terms; everything above it goes back to your card.',
-    seller: 'The deposit is yours, less our fee on it. The animals are free again.',
+    seller: 'The deposit is yours, less our fee on it. The {things} are free again.',
   }),
   sellerAbsent: ended({
     subject: 'The seller was not there',
@@ -115,13 +117,13 @@ export const endings = {
     subject: 'The held order has ended',
     buyer: `You did not want another day. ${ALL_BACK}`,
     seller:
-      'The buyer did not want another day and gets everything back. The animals are free again; it does not count against you.',
+      'The buyer did not want another day and gets everything back. The {things} are free again; it does not count against you.',
   }),
   holdNoConsent: ended({
     subject: 'The held order has ended',
     buyer: `You did not answer about a new day, and silence may not move it again. ${ALL_BACK}`,
     seller:
-      'The buyer did not answer about a new day, so everything goes back. The animals are free again; it does not count against you.',
+      'The buyer did not answer about a new day, so everything goes back. The {things} are free again; it does not count against you.',
   }),
   stopped: ended({
     subject: 'We stopped this order',
@@ -158,8 +160,8 @@ export function buyerCancelled(backCents: number): Writer {
           : `You cancelled the order after its free time. ${back} ${printCents(kept)} of the deposit is kept by the terms you agreed to.`,
       seller:
         kept === 0
-          ? 'The buyer cancelled in the free time and gets everything back. The animals are free again.'
-          : `The buyer cancelled late. ${printCents(kept)} of the deposit is yours, less our fee on it. The animals are free again.`,
+          ? 'The buyer cancelled in the free time and gets everything back. The {things} are free again.'
+          : `The buyer cancelled late. ${printCents(kept)} of the deposit is yours, less our fee on it. The {things} are free again.`,
     })(facts)
   }
 }

@@ -5,6 +5,9 @@ import type { OrderRow } from '@/server/orders/order-store'
 import type { SellerRow } from '@/server/orders/party-store'
 import type { ShipmentRow } from '@/server/orders/shipment-store'
 import type { ListingBody } from '@/shared/contracts/listings'
+import { countWords, thingsOf } from '@/shared/domain/listings/count-words'
+import { lotSize } from '@/shared/domain/listings/lot-size'
+import { printSaleUnit } from '@/shared/domain/listings/sale-unit'
 import { printSlot } from '@/shared/times/print-time'
 import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
@@ -36,14 +39,21 @@ export function orderUrl({ origin, order }: LetterFacts): string {
   return `${origin}/orders/${order.publicId}`
 }
 
+/** The length of animals; of everything else what one unit is. */
+function sizeText(terms: ListingBody): string {
+  const size = lotSize(terms)
+  if (size) return printLengthRange({ minCm: size.loMm / 10, maxCm: size.hiMm / 10 }, 'us')
+  return terms.category === 'fish' ? '' : printSaleUnit(terms.saleUnit, thingsOf(terms))
+}
+
 /** The tag of the order, as on every page. */
 export function orderTag({ order, terms, seller }: LetterFacts): LetterBlock {
   const described = describeListing(terms)
   return {
     kind: 'tag',
     title: described.title,
-    size: printLengthRange({ minCm: terms.sizeLoMm / 10, maxCm: terms.sizeHiMm / 10 }, 'us'),
-    count: `${order.quantity} animals`,
+    size: sizeText(terms),
+    count: countWords(terms, order.quantity),
     price: printCents(order.totalCents),
     place: `${seller.farmName}, ${seller.city}, ${seller.state}`,
   }

@@ -4,10 +4,15 @@ import { say, see, toBuyer, toSeller, untilClock, type Writer } from '@/server/o
 import { settled } from '@/server/orders/letters/settled-letters'
 import { shipLetters } from '@/server/orders/letters/ship-letters'
 import { daysRows } from '@/server/orders/letters/ship-words'
+import { bringWords, careCautions, caution } from '@/server/orders/letters/care-words'
 import { promiseWords } from '@/server/orders/promise-words'
+import { countWords, thingsOf } from '@/shared/domain/listings/count-words'
 import { fillCaution } from '@/shared/domain/rules/fill-caution'
 import type { EdgeId } from '@/shared/domain/orders/edges.facts'
 import { printCents } from '@/shared/units/money'
+
+const counted = ({ terms, order }: LetterFacts) => countWords(terms, order.quantity)
+const things = ({ terms }: LetterFacts) => thingsOf(terms)
 
 const charge = (facts: LetterFacts) => printCents(facts.order.firstChargeCents)
 
@@ -16,8 +21,8 @@ const whenRows = (facts: LetterFacts): [string, string][] =>
 
 const requested: Writer = (facts) => [
   toSeller(facts, {
-    subject: `${facts.order.quantity} animals asked for: please answer`,
-    heading: `${facts.buyer.name} asks for ${facts.order.quantity}`,
+    subject: `${counted(facts)} asked for: please answer`,
+    heading: `${facts.buyer.name} asks for ${counted(facts)}`,
     blocks: [
       orderTag(facts),
       {
@@ -47,7 +52,7 @@ const requested: Writer = (facts) => [
 
 const accepted: Writer = (facts) => [
   toBuyer(facts, {
-    subject: 'Your animals are set aside',
+    subject: `Your ${things(facts)} are set aside`,
     heading: 'Accepted: choose a day next',
     blocks: [
       orderTag(facts),
@@ -78,19 +83,18 @@ const scheduled: Writer = (facts) => [
           ['Still to pay', printCents(facts.order.balanceCents)],
         ],
       },
-      say(
-        'Bring a lidded bucket or cooler half full of your own tank water, never fresh tap water, and go straight home.',
-      ),
-      { kind: 'caution', text: fillCaution('G-12', {}) },
+      say(bringWords(facts.terms)),
+      ...(facts.terms.category === 'produce' ? [caution(fillCaution('G-9', {}))] : []),
+      caution(fillCaution('G-12', {})),
       see(facts, 'Open the pickup sheet'),
     ],
   }),
   toSeller(facts, {
-    subject: `${isMoved(facts) ? 'Moved: pickup' : 'Pickup'} ${slotText(facts)}: ${facts.order.quantity} animals`,
+    subject: `${isMoved(facts) ? 'Moved: pickup' : 'Pickup'} ${slotText(facts)}: ${counted(facts)}`,
     heading: `${facts.buyer.name} comes ${slotText(facts)}`,
     blocks: [
       orderTag(facts),
-      say('Mark the order ready when the animals are counted and waiting.'),
+      say(`Mark the order ready when the ${things(facts)} are counted and waiting.`),
       see(facts, 'See the order'),
     ],
   }),
@@ -99,7 +103,7 @@ const scheduled: Writer = (facts) => [
 const ready: Writer = (facts) => [
   toBuyer(facts, {
     subject: 'Ready for pickup',
-    heading: 'Your animals are ready',
+    heading: `Your ${things(facts)} are ready`,
     blocks: [
       orderTag(facts),
       {
@@ -117,21 +121,19 @@ const ready: Writer = (facts) => [
 
 const handedOver: Writer = (facts) => [
   toBuyer(facts, {
-    subject: 'Handed over: look after them now',
-    heading: `${facts.order.countHandedOver ?? facts.order.quantity} animals are yours`,
+    subject: things(facts) === 'goods' ? 'Handed over' : 'Handed over: look after them now',
+    heading: `${countWords(facts.terms, facts.order.countHandedOver ?? facts.order.quantity)}: yours now`,
     blocks: [
       orderTag(facts),
-      say(promiseWords(facts.terms.promise)),
+      say(promiseWords(facts.terms)),
       { kind: 'facts', rows: [['Your money is held until', untilClock(facts)]] },
-      { kind: 'caution', text: fillCaution('G-8', { hours: '6' }) },
-      { kind: 'caution', text: fillCaution('G-7', {}) },
-      { kind: 'caution', text: fillCaution('G-1', {}) },
+      ...careCautions(facts.terms),
       see(facts, 'All good, or report a loss'),
     ],
   }),
   toSeller(facts, {
     subject: 'Handed over',
-    heading: `${facts.buyer.name} has the animals`,
+    heading: `${facts.buyer.name} has the ${things(facts)}`,
     blocks: [
       orderTag(facts),
       { kind: 'facts', rows: [['The money is released', untilClock(facts)]] },
@@ -144,7 +146,7 @@ const withdrawn: Writer = (facts) => [
   toSeller(facts, {
     subject: 'A request was taken back',
     heading: `${facts.buyer.name} took the request back`,
-    blocks: [orderTag(facts), say('The animals are free again. There is nothing for you to do.')],
+    blocks: [orderTag(facts), say(`The ${things(facts)} are free again. There is nothing for you to do.`)],
   }),
 ]
 

@@ -117,7 +117,7 @@ const arrived = shipped((facts) => [
     heading: `${facts.order.quantity} animals are yours`,
     blocks: [
       orderTag(facts),
-      say(promiseWords(facts.terms.promise)),
+      say(promiseWords(facts.terms)),
       { kind: 'facts', rows: [['Your money is held until', untilClock(facts)]] },
       caution(fillCaution('G-8', { hours: '6' })),
       caution(fillCaution('G-7', {})),

@@ -22,6 +22,13 @@ const hides = [
   'health.treatments',
   'health.lastLosses',
   'health.papers',
+  'raisedInUs',
+  'material',
+  'materialWords',
+  'heatTreated',
+  'cropId',
+  'form',
+  'lotCode',
 ]
 const goesLive = [
   'readyOn',
@@ -48,6 +55,7 @@ const goesLive = [
   'promise.windowHours',
   'promise.survivalDays',
   'promise.remedy',
+  'sellBy',
 ]
 
 /** Serving fewer states can wait for nobody; serving more is read first. */
