@@ -9,6 +9,10 @@ const ABOUT_THIS_BATCH = [
   'windows',
   'photos',
   'health',
+  'harvest',
+  'lotCode',
+  'sellBy',
+  'lotChecked',
 ]
 
 /** A draft for the next batch like this one: terms and words stay, statements about the animals themselves do not. */

@@ -1,0 +1,22 @@
+import { LiveNote } from './live-note'
+
+import { BoundArea } from '@/components/forms/bound/bound-area'
+
+import type { SupplyTyping } from './supply-typing'
+
+/** Free words, with what they claim that the answers do not carry. */
+export function WordsField({ caution }: { caution?: string }) {
+  return (
+    <>
+      <BoundArea<SupplyTyping>
+        name="words"
+        label="In your own words"
+        hint="No phone numbers or addresses: those come with the order."
+        isOptional
+        rows={2}
+        maxLength={2000}
+      />
+      <LiveNote words={caution} tone="caution" />
+    </>
+  )
+}

@@ -1,0 +1,34 @@
+import { StyleSheet, View } from 'react-native'
+
+import { kindWords } from './kind-words'
+
+import { categories, type Category } from '@/components/find/find-params'
+import { ButtonLink } from '@/components/ui/button-link'
+import { space } from '@/constants/theme'
+import type { IconName } from '@/components/ui/icon-paths'
+
+const icons: Record<Category, IconName> = { fish: 'fish', worms: 'worm', media: 'media', produce: 'leaf' }
+
+/** The four things one can list, one tap each. */
+export function KindChoice() {
+  return (
+    <View role="group" aria-label="List something" style={styles.choices}>
+      {categories.map((kind) => (
+        <ButtonLink
+          key={kind}
+          kind="secondary"
+          icon={icons[kind]}
+          label={kindWords[kind].label}
+          spokenLabel={kindWords[kind].title}
+          href={{ pathname: '/sell/listings/new', params: { kind } }}
+          style={styles.choice}
+        />
+      ))}
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  choices: { flexDirection: 'row', flexWrap: 'wrap', gap: space.sm },
+  choice: { flexGrow: 1, flexBasis: 140 },
+})

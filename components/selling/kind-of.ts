@@ -1,0 +1,13 @@
+import type { Category } from '@/components/find/find-params'
+import type { OwnListing } from '@/shared/contracts/listings'
+
+const kinds: readonly Category[] = ['fish', 'worms', 'media', 'produce']
+
+/** What a listing is of, as its draft says; a draft that says nothing was begun before there was a choice: fish. */
+export function kindOf({ draft }: Pick<OwnListing, 'draft'>): Category {
+  return kinds.find((kind) => kind === draft.category) ?? 'fish'
+}
+
+/** From the address. undefined: not chosen yet. */
+export const kindNamed = (text: string | undefined): Category | undefined =>
+  kinds.find((kind) => kind === text)
