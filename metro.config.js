@@ -16,7 +16,7 @@ const isLanguageOfZod = (context, name) =>
 // What no screen asks of zod: schemas printed as JSON Schema and read from it (the API's description does, on the
 // server), schemas made into code (the pages' policy forbids it), schemas rewritten part by part.
 const unasked =
-  /\/(json-schema-processors|json-schema-generator|from-json-schema|compile|memoizer|visit|deep-partial|in-out)\.js$/
+  /\/(json-schema-processors|json-schema-generator|to-json-schema|from-json-schema|compile|visit|deep-partial|in-out)\.js$/
 const isUnaskedOfZod = (context, name) => unasked.test(name) && context.originModulePath.includes(zodV4)
 
 // What the first load would carry on the web although no screen draws it: controls that have better twins in

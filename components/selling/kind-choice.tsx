@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
+import { kindTitles } from './kind-of'
 import { kindWords } from './kind-words'
 
 import { categories, type Category } from '@/components/find/find-params'
@@ -19,7 +20,7 @@ export function KindChoice() {
           kind="secondary"
           icon={icons[kind]}
           label={kindWords[kind].label}
-          spokenLabel={kindWords[kind].title}
+          spokenLabel={kindTitles[kind]}
           href={{ pathname: '/sell/listings/new', params: { kind } }}
           style={styles.choice}
         />

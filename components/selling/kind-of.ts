@@ -11,3 +11,10 @@ export function kindOf({ draft }: Pick<OwnListing, 'draft'>): Category {
 /** From the address. undefined: not chosen yet. */
 export const kindNamed = (text: string | undefined): Category | undefined =>
   kinds.find((kind) => kind === text)
+
+export const kindTitles: Record<Category, string> = {
+  fish: 'List a batch',
+  worms: 'List worms',
+  media: 'List media',
+  produce: 'List produce',
+}

@@ -3,7 +3,6 @@ import type { Category } from '@/components/find/find-params'
 interface KindWords {
   /** On the choice. */
   label: string
-  title: string
   /** "Like an earlier …". */
   earlier: string
   takenOver: string
@@ -14,7 +13,6 @@ interface KindWords {
 export const kindWords: Record<Category, KindWords> = {
   fish: {
     label: 'Fish',
-    title: 'List a batch',
     earlier: 'Like an earlier batch',
     takenOver:
       'Species, prices, terms and words are taken over. Count, dates, health, photos and pickup windows are asked anew.',
@@ -24,7 +22,6 @@ export const kindWords: Record<Category, KindWords> = {
   },
   produce: {
     label: 'Produce',
-    title: 'List produce',
     earlier: 'The same again',
     takenOver: 'Crop, price and terms are taken over, with a new lot code and today’s harvest.',
     begin: 'Another crop',
@@ -33,7 +30,6 @@ export const kindWords: Record<Category, KindWords> = {
   },
   worms: {
     label: 'Worms',
-    title: 'List worms',
     earlier: 'Like an earlier lot',
     takenOver: 'Kind, packs, price and terms are taken over. Look through the new lot before you list it.',
     begin: 'Begin with an empty form',
@@ -41,7 +37,6 @@ export const kindWords: Record<Category, KindWords> = {
   },
   media: {
     label: 'Media',
-    title: 'List media',
     earlier: 'Like an earlier listing',
     takenOver: 'Material, bag, price and terms are taken over.',
     begin: 'Begin with an empty form',

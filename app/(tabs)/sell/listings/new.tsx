@@ -2,8 +2,7 @@ import { useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
 
 import { Page } from '@/components/layout/page'
-import { kindNamed } from '@/components/selling/kind-of'
-import { kindWords } from '@/components/selling/kind-words'
+import { kindNamed, kindTitles } from '@/components/selling/kind-of'
 import { LazyPart } from '@/components/ui/lazy-part'
 
 const BeginBatch = lazy(() =>
@@ -17,7 +16,7 @@ export default function NewListingPage() {
   const kind = kindNamed(useLocalSearchParams<{ kind?: string }>().kind)
   return (
     <Page
-      title={kind ? kindWords[kind].title : 'List something'}
+      title={kind ? kindTitles[kind] : 'List something'}
       width="readable"
       back={{ label: 'Back to selling', href: '/sell' }}
     >
