@@ -69,7 +69,7 @@ function BeginChoices({ kind, farm }: { kind: Category; farm: OwnSeller }) {
               icon="sell"
               isWide
               label={own.title}
-              spokenLabel={`${own.title}: list another batch like it`}
+              spokenLabel={`${own.title}: list another like it`}
               isBusy={begin.isPending && chosen === own.listingId}
               isDisabled={begin.isPending && chosen !== own.listingId}
               onPress={() => start(own)}

@@ -1,14 +1,11 @@
 import { StyleSheet, View } from 'react-native'
 
-import { kindTitles } from './kind-of'
+import { kindIcons, kindTitles } from './kind-of'
 import { kindWords } from './kind-words'
 
-import { categories, type Category } from '@/components/find/find-params'
+import { categories } from '@/components/find/find-params'
 import { ButtonLink } from '@/components/ui/button-link'
 import { space } from '@/constants/theme'
-import type { IconName } from '@/components/ui/icon-paths'
-
-const icons: Record<Category, IconName> = { fish: 'fish', worms: 'worm', media: 'media', produce: 'leaf' }
 
 /** The four things one can list, one tap each. */
 export function KindChoice() {
@@ -18,9 +15,9 @@ export function KindChoice() {
         <ButtonLink
           key={kind}
           kind="secondary"
-          icon={icons[kind]}
+          icon={kindIcons[kind]}
           label={kindWords[kind].label}
-          spokenLabel={kindTitles[kind]}
+          spokenLabel={`${kindWords[kind].label}: ${kindTitles[kind].toLowerCase()}`}
           href={{ pathname: '/sell/listings/new', params: { kind } }}
           style={styles.choice}
         />

@@ -1,4 +1,5 @@
 import type { Category } from '@/components/find/find-params'
+import type { IconName } from '@/components/ui/icon-paths'
 import type { OwnListing } from '@/shared/contracts/listings'
 
 const kinds: readonly Category[] = ['fish', 'worms', 'media', 'produce']
@@ -17,4 +18,11 @@ export const kindTitles: Record<Category, string> = {
   worms: 'List worms',
   media: 'List media',
   produce: 'List produce',
+}
+
+export const kindIcons: Record<Category, IconName> = {
+  fish: 'fish',
+  worms: 'worm',
+  media: 'media',
+  produce: 'leaf',
 }

@@ -47,7 +47,7 @@ export function SellHome() {
             </Heading>
             <KindChoice />
           </View>
-          <OwnList />
+          <OwnList farm={farm} />
         </View>
       )}
     </SellerGate>

@@ -24,7 +24,6 @@ const touches = [
   { value: 'not-sure', label: 'Not sure' },
 ]
 const organics = [
-  { value: '', label: 'No claim' },
   { value: 'certified', label: 'Certified organic' },
   { value: 'exempt-small', label: 'Organic, exempt as a small farm' },
 ]
@@ -94,8 +93,14 @@ export function HandlingGroup({ notes }: { notes: ReturnType<typeof Goods.produc
           maxLength={400}
           placeholder="On rafts, in fish water, without synthetic pesticides."
         />
-        <LiveNote words={notes.words.growing} tone="caution" />
-        <BoundChoice<ProduceTyping> name="organic" label="“Organic”" choices={organics} isFolded />
+        <LiveNote words={errors.growing ? null : notes.words.growing} tone="caution" />
+        <BoundChoice<ProduceTyping>
+          name="organic"
+          label="“Organic”"
+          choices={organics}
+          isFolded
+          emptyLabel="No claim"
+        />
         {organic === 'certified' ? (
           <BoundText<ProduceTyping> name="organicCertifier" label="Who certified you?" maxLength={120} />
         ) : null}

@@ -14,7 +14,7 @@ interface Props {
 /** What is judged beside a field while it is filled; read out when it changes. */
 export function LiveNote({ words, tone = 'plain' }: Props) {
   return (
-    <View role="status">
+    <View role="status" style={words ? null : styles.silent}>
       {words ? (
         <View style={styles.row}>
           {tone === 'caution' ? <Icon name="warn" sizePx={18} tint="warm" /> : null}
@@ -30,4 +30,6 @@ export function LiveNote({ words, tone = 'plain' }: Props) {
 const styles = StyleSheet.create({
   row: { flexDirection: 'row', alignItems: 'flex-start', gap: space.sm },
   words: { flex: 1, minWidth: 0 },
+  // Stays for readers, and takes no room between the fields.
+  silent: { position: 'absolute' },
 })

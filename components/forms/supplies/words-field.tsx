@@ -1,3 +1,5 @@
+import { useFormState } from 'react-hook-form'
+
 import { LiveNote } from './live-note'
 
 import { BoundArea } from '@/components/forms/bound/bound-area'
@@ -6,6 +8,7 @@ import type { SupplyTyping } from './supply-typing'
 
 /** Free words, with what they claim that the answers do not carry. */
 export function WordsField({ caution }: { caution?: string }) {
+  const { errors } = useFormState<SupplyTyping>({ name: 'words' })
   return (
     <>
       <BoundArea<SupplyTyping>
@@ -16,7 +19,7 @@ export function WordsField({ caution }: { caution?: string }) {
         rows={2}
         maxLength={2000}
       />
-      <LiveNote words={caution} tone="caution" />
+      <LiveNote words={errors.words ? null : caution} tone="caution" />
     </>
   )
 }

@@ -1,7 +1,7 @@
 import { numberOf, partOf, textOf } from './read-part'
-import { unitOf } from './read-unit'
 
 import type { ListingDraft } from '@/shared/contracts/listings'
+import { readUnit } from '@/shared/domain/listings/read-unit'
 import type { SaleUnitKind } from '@/shared/domain/listings/sale-unit'
 import type { Crop } from '@/shared/domain/produce/crop'
 import { judgeStanding, type FarmAddress, type FarmStanding } from '@/shared/domain/produce/farm-standing'
@@ -67,7 +67,7 @@ export function produceNotes(draft: ListingDraft, farm: FarmAddress, units: Unit
 }
 
 function priceOf(draft: ListingDraft, crop: Crop, units: UnitSystem): UnitPrice | null {
-  const unit = unitOf(draft)
+  const unit = readUnit(draft)
   const unitCents = numberOf(partOf(draft, 'tiers.0'), 'unitCents')
   return unit && unitCents !== null && unitCents > 0 ? unitPrice({ crop, unit, unitCents }, units) : null
 }

@@ -1,11 +1,11 @@
 import { numberOf, partOf, textOf } from './read-part'
-import { unitOf } from './read-unit'
 
 import type { ListingDraft } from '@/shared/contracts/listings'
 import { findMedia } from '@/shared/domain/media/find-media'
 import { carLoadWords, judgeStatedWeight } from '@/shared/domain/media/media-weight'
 import { supplyPrice } from '@/shared/domain/pricing/supply-price'
 import { heatCaution, type HeatAnswer } from '@/shared/domain/worms/heat-treated'
+import { readUnit } from '@/shared/domain/listings/read-unit'
 import { findWormKind } from '@/shared/domain/worms/find-worm-kind'
 import { judgeWormLot } from '@/shared/domain/worms/judge-worm-lot'
 import type { UnitSystem } from '@/shared/units/unit-system'
@@ -28,7 +28,7 @@ const priceOf = (draft: ListingDraft) => numberOf(partOf(draft, 'tiers.0'), 'uni
 /** Beside the fields of media, by the functions the server judges with. */
 export function mediaNotes(draft: ListingDraft, units: UnitSystem): MediaNotes {
   const material = findMedia(textOf(draft, 'material'))
-  const unit = unitOf(draft)
+  const unit = readUnit(draft)
   const litres = litresOf(draft)
   const weightKg = unit?.kind === 'volume' ? unit.weightKg : unit?.kind === 'weight' ? unit.netG / 1000 : null
   const heat = textOf(draft, 'heatTreated') as HeatAnswer | ''
@@ -78,7 +78,7 @@ export function wormNotes(draft: ListingDraft, units: UnitSystem): WormNotes {
 }
 
 function printPrice(draft: ListingDraft, units: UnitSystem): string | null {
-  const unit = unitOf(draft)
+  const unit = readUnit(draft)
   const unitCents = priceOf(draft)
   if (unitCents === null || unitCents <= 0) return null
   if (unit?.kind !== 'pack' && unit?.kind !== 'weight' && unit?.kind !== 'volume') return null
