@@ -102,7 +102,7 @@ function Material({ notes, units }: { notes: Notes; units: SupplySetting['units'
           <ChipChoice<MediaTyping>
             name="vinegarTest"
             label="A handful in vinegar"
-            hint="Stone that fizzes holds lime and pushes the pH up for months."
+            hint="Stone that fizzes holds lime and pushes the pH up."
             choices={vinegar}
           />
         </>

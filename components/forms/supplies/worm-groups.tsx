@@ -193,7 +193,7 @@ function Legal({ setting, review }: { setting: SupplySetting; review: readonly s
     <FormGroup groupId="legal" title="Where they come from">
       <ChipChoice<WormTyping>
         name="origin"
-        label="Where do they come from?"
+        label="Bred, grown on or bought?"
         choices={origins}
         onChosen={(value) => {
           if (value !== 'bought-in') setValue('originState', '')

@@ -76,3 +76,12 @@ describe.each(lots)('what the form says of %s before it is sent', (kind, contrac
     expect(differing).toEqual([])
   })
 })
+
+it('asks until when basil from the fridge is sold, whatever else is still open', () => {
+  const basil = changeAt({ ...lettuce, cropId: 'basil', saleUnit: { kind: 'bunch' } }, ['handling'], {
+    touchesSystemWater: 'no',
+    heldC: 3,
+  })
+  const told = lotIssues('produce', basil as ListingDraft).map(({ path }) => path.join('.'))
+  expect(told).toEqual(['handling.rinsedInDrinkingWater', 'handling.coldAtPickup', 'sellBy'])
+})

@@ -47,10 +47,10 @@ const lentMedia = { ...lent, material: 'vermiculite', saleUnit: { kind: 'weight'
 
 // What is said of these rests on that: with that lent, nothing is said of them.
 const restsOn: Readonly<Record<string, readonly string[]>> = {
-  cropId: ['saleUnit', 'handling', 'sellBy', 'windows'],
-  form: ['handling', 'sellBy', 'windows'],
-  harvest: ['sellBy', 'windows'],
-  handling: ['sellBy', 'windows'],
+  cropId: ['saleUnit', 'handling.heldC', 'handling.coldAtPickup', 'sellBy', 'windows'],
+  form: ['handling.heldC', 'handling.coldAtPickup', 'sellBy', 'windows'],
+  'harvest.day': ['sellBy', 'windows'],
+  'handling.heldC': ['sellBy', 'windows'],
   countOnHand: ['minOrder'],
   minOrder: ['mostPerBuyer', 'tiers', 'depositPct'],
   tiers: ['depositPct'],
@@ -87,16 +87,28 @@ const asked: Record<SupplyKind, Asked> = {
 export function lotIssues(kind: SupplyKind, draft: ListingDraft): LotIssue[] {
   const { rules, lent: standIn, between } = asked[kind]
   const found = checkShape(draft, rules)
-  const wrongFields = new Set(found.map(({ path }) => String(path[0])))
-  const known = Object.entries(draft).filter(([field]) => !wrongFields.has(field))
-  const unsaid = new Set([...wrongFields].flatMap((field) => [field, ...(restsOn[field] ?? [])]))
-  const lot = { ...pick(standIn, wrongFields), ...Object.fromEntries(known) }
+  const wrong = new Set(found.flatMap(({ path }) => [String(path[0]), path.join('.')]))
+  const unsaid = new Set([...wrong].flatMap((field) => [field, ...(restsOn[field] ?? [])]))
   const also: LotIssue[] = []
-  between(lot, (path, message) => {
-    if (!unsaid.has(String(path[0]))) also.push({ path, message })
+  between(complete(draft, standIn, wrong), (path, message) => {
+    if (!unsaid.has(path.length > 1 && isGroup(draft[String(path[0])]) ? path.join('.') : String(path[0])))
+      also.push({ path, message })
   })
   return [...found, ...also]
 }
 
-const pick = (from: ListingDraft, fields: ReadonlySet<string>) =>
-  Object.fromEntries(Object.entries(from).filter(([field]) => fields.has(field)))
+const isGroup = (value: unknown): value is ListingDraft =>
+  typeof value === 'object' && value !== null && !Array.isArray(value)
+
+/** The draft with what is wrong in it replaced by what is lent; of a group only the wrong parts are. */
+function complete(draft: ListingDraft, standIn: ListingDraft, wrong: ReadonlySet<string>): ListingDraft {
+  const kept = Object.entries(draft).flatMap(([field, value]): [string, unknown][] => {
+    const lentPart = standIn[field]
+    if (!wrong.has(field)) return [[field, value]]
+    if (field === 'saleUnit' || !isGroup(value) || !isGroup(lentPart)) return []
+    const right = Object.entries(value).filter(([part]) => !wrong.has(`${field}.${part}`))
+    return [[field, { ...lentPart, ...Object.fromEntries(right) }]]
+  })
+  const missing = Object.entries(standIn).filter(([field]) => wrong.has(field))
+  return { ...Object.fromEntries(missing), ...Object.fromEntries(kept) }
+}
