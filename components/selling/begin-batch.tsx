@@ -40,7 +40,7 @@ function BeginChoices({ kind, farm }: { kind: Category; farm: OwnSeller }) {
   function start(copyOf: OwnListing | undefined) {
     setChosen(copyOf?.listingId ?? 'empty')
     begin.mutate(
-      { kind, copyOf, last: ofKind[0] },
+      { kind, copyOf, last: earlier[0] ?? ofKind[0] },
       {
         onSuccess: ({ listingId }) =>
           router.replace({ pathname: '/sell/listings/[listingId]', params: { listingId } }),
