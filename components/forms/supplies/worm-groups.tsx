@@ -66,7 +66,7 @@ export function WormGroups({ setting }: { setting: SupplySetting }) {
               name="promise.windowHours"
               label="Alive for"
               suffix="hours"
-              hint="4 to 24 hours after the hand-over."
+              hint="4 to 24 hours."
               isFigure
             />
           </FieldCell>
