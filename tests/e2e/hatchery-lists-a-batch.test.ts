@@ -109,6 +109,9 @@ const parts: readonly ((page: Page) => Promise<void>)[] = [
     await field(page, 'Packed in').selectOption({ label: 'Foam box with 1 1/2 in walls, overnight' })
     await field(page, 'Charge for a box').fill('12')
     await field(page, 'Most fish in a box').fill('100')
+    await field(page, 'Carrier and service').fill('Overnight by air')
+    await field(page, 'Freight for a box').fill('38')
+    await page.getByRole('checkbox', { name: /accepts these animals/ }).click()
     await button(page, 'Monday').click()
   },
   async function depositAndPromise(page) {
@@ -272,6 +275,8 @@ describe('with the keyboard alone', () => {
     await page.goto('/sell')
     await page.getByRole('link', { name: 'Start selling' }).waitFor()
     await openFarmByKeyboard(page, `Key Pond ${stamp}`)
+    await pressOn(page, 'List something')
+    await page.getByRole('link', { name: 'Fish: list a batch' }).waitFor()
     await pressOn(page, 'Fish: list a batch')
     await page.getByRole('button', { name: 'Begin with an empty form' }).waitFor()
     await pressOn(page, 'Begin with an empty form')
