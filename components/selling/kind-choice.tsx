@@ -1,8 +1,9 @@
 import { StyleSheet, View } from 'react-native'
 
-import { kindIcons, kindTitles } from './kind-of'
+import { kindTitles } from './kind-of'
 import { kindWords } from './kind-words'
 
+import { categoryIcons } from '@/components/find/found-facts'
 import { categories } from '@/components/find/find-params'
 import { ButtonLink } from '@/components/ui/button-link'
 import { space } from '@/constants/theme'
@@ -15,7 +16,7 @@ export function KindChoice() {
         <ButtonLink
           key={kind}
           kind="secondary"
-          icon={kindIcons[kind]}
+          icon={categoryIcons[kind]}
           label={kindWords[kind].label}
           spokenLabel={`${kindWords[kind].label}: ${kindTitles[kind].toLowerCase()}`}
           href={{ pathname: '/sell/listings/new', params: { kind } }}

@@ -1,6 +1,7 @@
-import { kindIcons, kindOf } from './kind-of'
+import { kindOf } from './kind-of'
 import { ownBadges } from './own-state-words'
 
+import { categoryIcons } from '@/components/find/found-facts'
 import { pickupDay } from '@/components/listings/pickup-words'
 import { photoUrl } from '@/hooks/api'
 import type { OwnListing } from '@/shared/contracts/listings'
@@ -43,7 +44,7 @@ export function ownFacts(own: OwnListing, units: UnitSystem): TagFacts {
     placeText: orderWords(own.openOrders),
     dayText: next ? `Next pickup ${pickupDay(next)}` : undefined,
     photoUrl: typeof photo === 'string' ? photoUrl(photo, 320) : undefined,
-    icon: kindIcons[kind],
+    icon: categoryIcons[kind],
     badges: ownBadges(own),
     href: hrefOf(own),
   }

@@ -18,7 +18,6 @@ import { BoundText } from '@/components/forms/bound/bound-text'
 import { FieldCell, FieldRow, FormGroup } from '@/components/forms/form-group'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 import { stateFacts } from '@/shared/domain/rules/us-states.facts'
-import { wormKinds } from '@/shared/domain/worms/worms.facts'
 
 import type { SupplySetting } from './supply-setting'
 import type { WormTyping } from './supply-typing'
@@ -98,6 +97,7 @@ export function WormGroups({ setting }: { setting: SupplySetting }) {
 type Notes = ReturnType<ReturnType<typeof useGoods>['wormNotes']>
 
 function Kind({ notes, units }: { notes: Notes; units: SupplySetting['units'] }) {
+  const { wormKinds } = useGoods()
   const taxonId = useWatch<WormTyping, 'taxonId'>({ name: 'taxonId' })
   const grading = useWatch<WormTyping, 'grading'>({ name: 'grading' })
   const kinds = wormKinds.map((kind) => ({
