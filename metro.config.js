@@ -13,9 +13,11 @@ const zodV4 = `${path.sep}zod${path.sep}v4${path.sep}`
 const isLanguageOfZod = (context, name) =>
   name === '../locales/index.js' && context.originModulePath.includes(zodV4)
 
-// What prints a schema as JSON Schema: the API's description does, on the server; no screen does.
-const isPrinterOfZod = (context, name) =>
-  name.endsWith('/json-schema-processors.js') && context.originModulePath.includes(zodV4)
+// What no screen asks of zod: schemas printed as JSON Schema and read from it (the API's description does, on the
+// server), schemas made into code (the pages' policy forbids it), schemas rewritten part by part.
+const unasked =
+  /\/(json-schema-processors|json-schema-generator|to-json-schema|from-json-schema|compile|visit|deep-partial|in-out)\.js$/
+const isUnaskedOfZod = (context, name) => unasked.test(name) && context.originModulePath.includes(zodV4)
 
 // What the first load would carry on the web although no screen draws it: controls that have better twins in
 // components/ui, the colour arithmetic of a header we hide, the router's own list of routes.
@@ -29,7 +31,7 @@ const isUndrawn = (context, name) =>
 
 config.resolver.resolveRequest = (context, name, platform) =>
   isLanguageOfZod(context, name) ||
-  isPrinterOfZod(context, name) ||
+  isUnaskedOfZod(context, name) ||
   (platform === 'web' && isUndrawn(context, name))
     ? { type: 'empty' }
     : context.resolveRequest(context, name, platform)

@@ -11,6 +11,7 @@ import { ownListingQuery, ownListingsKey, rememberOwnListing } from '@/hooks/own
 import { STALE } from '@/hooks/stale'
 import type { BodyOf } from '@/shared/api/endpoint'
 import type { Endpoints } from '@/shared/api/routes.gen'
+import type { ListingDraft, OwnListing } from '@/shared/contracts/listings'
 
 const ownListingsQuery = infiniteQueryOptions({
   queryKey: ownListingsKey,
@@ -34,6 +35,19 @@ export function useBeginListing() {
   return useMutation({
     mutationFn: ({ copyOf, key }: { copyOf?: string; key: string }) =>
       call('beginListing', { body: { copyOf }, key }),
+    onSuccess: (own) => rememberOwnListing(client, own),
+  })
+}
+
+/** Puts a first draft into a listing that was just begun. */
+export function useFillDraft() {
+  const client = useQueryClient()
+  return useMutation({
+    mutationFn: async ({ own, draft }: { own: OwnListing; draft: ListingDraft }): Promise<OwnListing> => {
+      const { listingId, draftRevision } = own
+      const saved = await call('saveDraft', { params: { listingId }, body: { draft, draftRevision } })
+      return { ...own, draft, draftRevision: saved.draftRevision }
+    },
     onSuccess: (own) => rememberOwnListing(client, own),
   })
 }

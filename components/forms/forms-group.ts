@@ -4,3 +4,4 @@ import './without-eval'
 // Only ever imported by React.lazy: `lazy(() => import(…).then((group) => ({ default: group.X })))`.
 export { BatchDesk } from './batch/batch-desk'
 export { FarmForm } from './farm/farm-form'
+export { SupplyDesk } from './supplies/supply-desk'

@@ -1,22 +1,26 @@
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 
+import { countedNoun, countedWords } from './counted-words'
 import { fitCount, type CountLimits } from './order-count'
 
 import { IconButton } from '@/components/ui/icon-button'
 import { NumberField } from '@/components/ui/number-field'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
+import type { SupplyBody } from '@/components/supplies/supply-body'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { parseCount, printCount } from '@/shared/units/count'
 
 interface Props {
+  body: FishBody | SupplyBody
   count: number
   limits: CountLimits
   onChange: (count: number) => void
 }
 
 /** How many, in the steps of the seller; what does not fit is moved to the closest that does, and said. */
-export function CountPicker({ count, limits, onChange }: Props) {
+export function CountPicker({ body, count, limits, onChange }: Props) {
   const [typed, setTyped] = useState<string | null>(null)
   const [said, setSaid] = useState('')
   const { least, step, most } = limits
@@ -32,7 +36,7 @@ export function CountPicker({ count, limits, onChange }: Props) {
     setSaid(
       fitting === wanted
         ? ''
-        : `${printCount(wanted)} cannot be had here. The closest is ${printCount(fitting)}.`,
+        : `${printCount(wanted)} cannot be had here. The closest is ${countedWords(body, fitting)}.`,
     )
     onChange(fitting)
   }
@@ -48,6 +52,7 @@ export function CountPicker({ count, limits, onChange }: Props) {
         <View style={styles.field}>
           <NumberField
             label="How many?"
+            suffix={countedNoun(body, count) || undefined}
             hint={`From ${printCount(least)} to ${printCount(most)}${steps}.`}
             value={typed ?? printCount(count)}
             inputMode="numeric"

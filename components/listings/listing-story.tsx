@@ -127,7 +127,7 @@ export function ListingStory(props: Props) {
             {isLawful ? null : legal}
             {canBuy ? (
               <Card>
-                <CountPicker count={count} limits={limits} onChange={onCount} />
+                <CountPicker body={body} count={count} limits={limits} onChange={onCount} />
               </Card>
             ) : null}
             <PriceTable body={body} count={count} />

@@ -1,23 +1,30 @@
+import { countedWords } from './counted-words'
+
+import type { SupplyBody } from '@/components/supplies/supply-body'
 import { Card } from '@/components/ui/card'
 import { DataTable } from '@/components/ui/data-table'
 import type { Column } from '@/components/ui/data-table-types'
 import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
-import type { ListingBody } from '@/shared/contracts/listings'
+import type { FishBody } from '@/shared/contracts/fish-batch'
 import { nextTier, tierFor } from '@/shared/domain/money/tier-price'
 import { printCount } from '@/shared/units/count'
 import { printCents } from '@/shared/units/money'
 
-type Tier = ListingBody['tiers'][number]
+type Tier = FishBody['tiers'][number]
 
-const columns: readonly Column<Tier>[] = [
+const ofAll: readonly Column<Tier>[] = [
   { key: 'from', title: 'From', cell: ({ fromCount }) => printCount(fromCount), isNumeric: true },
   { key: 'one', title: 'For one', cell: ({ unitCents }) => printCents(unitCents), isNumeric: true },
+]
+/** Fish are compared by the hundred; a hundred heads of lettuce compare with nothing. */
+const ofFish: readonly Column<Tier>[] = [
+  ...ofAll,
   { key: 'hundred', title: 'For 100', cell: ({ unitCents }) => printCents(unitCents * 100), isNumeric: true },
 ]
 
 interface Props {
-  body: ListingBody
+  body: FishBody | SupplyBody
   count: number
 }
 
@@ -33,12 +40,12 @@ export function PriceTable({ body, count }: Props) {
       </Heading>
       <DataTable
         label="Price by count"
-        columns={columns}
+        columns={body.category === 'fish' ? ofFish : ofAll}
         rows={tiers}
         rowKey={(tier) => String(tier.fromCount)}
       />
       <Text>
-        {printCount(count)} cost{' '}
+        {countedWords(body, count)} {count === 1 ? 'costs' : 'cost'}{' '}
         <Text face="strong" isFigures>
           {printCents(unitCents * count)}
         </Text>

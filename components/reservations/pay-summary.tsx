@@ -2,6 +2,7 @@ import { StyleSheet, View } from 'react-native'
 
 import { quoteCount, type Quote, type Way } from './reservation'
 
+import { countedWords } from '@/components/listings/counted-words'
 import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import { RadioGroup } from '@/components/ui/radio-group'
@@ -60,7 +61,10 @@ export function PaySummary({ listing, quote, way, mode, mayFull, onMode }: Props
       <Heading level={2} size="lead" nativeID="pay-summary">
         What you pay
       </Heading>
-      <Line name={`${quote.quantity} × ${printCents(quote.unitCents)}`} cents={quote.goodsCents} />
+      <Line
+        name={`${countedWords(listing.body, quote.quantity)} × ${printCents(quote.unitCents)}`}
+        cents={quote.goodsCents}
+      />
       {isShipped ? (
         <ShippedLines listing={listing} quote={quote} />
       ) : (
@@ -75,7 +79,7 @@ export function PaySummary({ listing, quote, way, mode, mayFull, onMode }: Props
             {
               value: 'deposit',
               label: `The deposit, ${printCents(quote.depositCents)}`,
-              hint: `${depositPct} % of the animals`,
+              hint: `${depositPct} % of the price`,
             },
             {
               value: 'full',

@@ -6,6 +6,7 @@ import { ReserveProblem } from './reserve-problem'
 import { ShipChoice } from './ship-choice'
 import { useReservation } from './use-reservation'
 
+import { countedNoun } from '@/components/listings/counted-words'
 import { Button } from '@/components/ui/button'
 import { Card } from '@/components/ui/card'
 import { ErrorSummary } from '@/components/ui/error-summary'
@@ -37,6 +38,7 @@ export function ReserveBatchForm(props: Props) {
           fieldId="quantity"
           value={form.quantityText}
           onChangeText={form.setQuantity}
+          suffix={countedNoun(listing.body, 2) || undefined}
           hint={`From ${listing.body.minOrder}, in steps of ${listing.body.orderStep}; ${listing.free} left`}
           error={form.errorAt('quantity')}
         />

@@ -1,8 +1,10 @@
 import { lazy, useEffect } from 'react'
 
 import { BatchPage } from './batch-page'
+import { kindOf } from './kind-of'
 import { OwnListingGate } from './own-listing-gate'
 import { SellerGate } from './seller-gate'
+import { SupplyScreen } from './supply-screen'
 
 import { LazyPart } from '@/components/ui/lazy-part'
 import { SkeletonRows } from '@/components/ui/skeleton'
@@ -26,11 +28,18 @@ export function BatchScreen({ listingId, atField }: Props) {
     <SellerGate frame={BatchPage}>
       {(farm) => (
         <OwnListingGate listingId={listingId} isFresh frame={BatchPage}>
-          {(own) => (
-            <LazyPart label="Loading the form" fallback={<FormLoading />}>
-              <BatchDesk own={own} farm={farm} units={units} atField={atField} />
-            </LazyPart>
-          )}
+          {(own) => {
+            const kind = kindOf(own)
+            return (
+              <LazyPart label="Loading the form" fallback={<FormLoading />}>
+                {kind === 'fish' ? (
+                  <BatchDesk own={own} farm={farm} units={units} atField={atField} />
+                ) : (
+                  <SupplyScreen kind={kind} own={own} farm={farm} units={units} />
+                )}
+              </LazyPart>
+            )
+          }}
         </OwnListingGate>
       )}
     </SellerGate>

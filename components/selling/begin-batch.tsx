@@ -2,8 +2,12 @@ import { useRouter } from 'expo-router'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 
+import { kindOf } from './kind-of'
+import { kindWords } from './kind-words'
 import { SellerGate } from './seller-gate'
+import { useBegin } from './use-begin'
 
+import type { Category } from '@/components/find/find-params'
 import { TagSkeleton } from '@/components/listings/tag-skeleton'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
@@ -11,37 +15,38 @@ import { Card } from '@/components/ui/card'
 import { Heading } from '@/components/ui/heading'
 import { Text } from '@/components/ui/text'
 import { space } from '@/constants/theme'
-import { newRequestKey } from '@/hooks/request-key'
-import { useBeginListing, useOwnListings } from '@/hooks/use-own-listings'
+import { useOwnListings } from '@/hooks/use-own-listings'
+import type { OwnListing } from '@/shared/contracts/listings'
+import type { OwnSeller } from '@/shared/contracts/sellers'
 
 const mostCopies = 3
 
-/** The one question before the form: like an earlier batch, or from nothing. */
-export function BeginBatch() {
-  return <SellerGate>{() => <BeginChoices />}</SellerGate>
+/** The one question before the form: like an earlier listing of its kind, or from nothing. */
+export function BeginBatch({ kind }: { kind: Category }) {
+  return <SellerGate>{(farm) => <BeginChoices key={kind} kind={kind} farm={farm} />}</SellerGate>
 }
 
-function BeginChoices() {
+function BeginChoices({ kind, farm }: { kind: Category; farm: OwnSeller }) {
   const router = useRouter()
   const listings = useOwnListings(true)
-  const begin = useBeginListing()
-  const [key] = useState(newRequestKey)
+  const begin = useBegin(farm)
   const [chosen, setChosen] = useState('')
-  function start(copyOf: string | undefined) {
-    setChosen(copyOf ?? 'empty')
-    // One key a choice: pressing the same twice begins one draft.
+  const words = kindWords[kind]
+  if (listings.isPending) return <TagSkeleton label="Loading your listings" count={1} />
+  const ofKind = (listings.data?.pages[0]?.items ?? []).filter((own) => kindOf(own) === kind)
+  const earlier = ofKind
+    .filter((own) => own.liveVersion !== undefined || own.review !== undefined)
+    .slice(0, mostCopies)
+  function start(copyOf: OwnListing | undefined) {
+    setChosen(copyOf?.listingId ?? 'empty')
     begin.mutate(
-      { copyOf, key: `${key}-${(copyOf ?? 'empty').slice(0, 24)}` },
+      { kind, copyOf, last: earlier[0] ?? ofKind[0] },
       {
         onSuccess: ({ listingId }) =>
           router.replace({ pathname: '/sell/listings/[listingId]', params: { listingId } }),
       },
     )
   }
-  if (listings.isPending) return <TagSkeleton label="Loading your listings" count={1} />
-  const earlier = (listings.data?.pages[0]?.items ?? [])
-    .filter((own) => own.liveVersion !== undefined || own.review !== undefined)
-    .slice(0, mostCopies)
   return (
     <View style={styles.frame}>
       {begin.error ? (
@@ -52,11 +57,10 @@ function BeginChoices() {
       {earlier.length > 0 ? (
         <Card>
           <Heading level={2} size="lead">
-            Like an earlier batch
+            {words.earlier}
           </Heading>
           <Text tint="muted" size="note">
-            Species, prices, terms and words are taken over. Count, dates, health, photos and pickup windows
-            are asked anew.
+            {words.takenOver}
           </Text>
           {earlier.map((own) => (
             <Button
@@ -65,27 +69,26 @@ function BeginChoices() {
               icon="sell"
               isWide
               label={own.title}
-              spokenLabel={`${own.title}: list another batch like it`}
+              spokenLabel={`${own.title}: list another like it`}
               isBusy={begin.isPending && chosen === own.listingId}
               isDisabled={begin.isPending && chosen !== own.listingId}
-              onPress={() => start(own.listingId)}
+              onPress={() => start(own)}
             />
           ))}
         </Card>
       ) : null}
       <Card>
         <Heading level={2} size="lead">
-          {earlier.length > 0 ? 'Something else' : 'A new batch'}
+          {earlier.length > 0 ? 'Something else' : 'Something new'}
         </Heading>
         <Text tint="muted" size="note">
-          Have at hand: the count, a photo with a ruler beside the fish, and a water test not older than 14
-          days. It saves itself, so you can stop and go on later.
+          {words.atHand}
         </Text>
         <Button
           kind={earlier.length > 0 ? 'secondary' : 'primary'}
           icon="plus"
           isWide
-          label="Begin with an empty form"
+          label={words.begin}
           isBusy={begin.isPending && chosen === 'empty'}
           isDisabled={begin.isPending && chosen !== 'empty'}
           onPress={() => start(undefined)}

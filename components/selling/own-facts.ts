@@ -1,8 +1,12 @@
+import { kindOf } from './kind-of'
 import { ownBadges } from './own-state-words'
 
+import { categoryIcons } from '@/components/find/found-facts'
 import { pickupDay } from '@/components/listings/pickup-words'
 import { photoUrl } from '@/hooks/api'
 import type { OwnListing } from '@/shared/contracts/listings'
+import { readUnit } from '@/shared/domain/listings/read-unit'
+import { soldAs, unitNoun } from '@/shared/domain/listings/unit-words'
 import { printCount } from '@/shared/units/count'
 import { printLengthRange } from '@/shared/units/length'
 import { printCents } from '@/shared/units/money'
@@ -25,23 +29,29 @@ export function ownFacts(own: OwnListing, units: UnitSystem): TagFacts {
   const cents = number(part(first(draft.tiers), 'unitCents'))
   const photo = part(first(draft.photos), 'photoId')
   const next = own.windows[0]
+  const kind = kindOf(own)
+  const fishSize =
+    lo && hi && hi >= lo ? printLengthRange({ minCm: lo / 10, maxCm: hi / 10 }, units) : 'size to come'
+  const unit = kind === 'fish' ? null : readUnit(draft)
   return {
     title: own.title,
-    sizeText:
-      lo && hi && hi >= lo ? printLengthRange({ minCm: lo / 10, maxCm: hi / 10 }, units) : 'size to come',
+    sizeText: kind === 'fish' ? fishSize : unit ? soldAs(unit, manyOf(draft)) : 'unit to come',
     countText:
       own.liveVersion === undefined ? plannedCount(draft.countOnHand) : `${printCount(stock.free)} free`,
     waterText: waterC === undefined ? undefined : printBothTemperatures(waterC, units),
     priceText: cents === undefined ? '$ ?' : printCents(cents),
-    priceUnitText: 'a fish',
+    priceUnitText: kind === 'fish' ? 'a fish' : unit ? `a ${unitNoun(unit, 1)}` : 'each',
     placeText: orderWords(own.openOrders),
     dayText: next ? `Next pickup ${pickupDay(next)}` : undefined,
     photoUrl: typeof photo === 'string' ? photoUrl(photo, 320) : undefined,
-    icon: 'fish',
+    icon: categoryIcons[kind],
     badges: ownBadges(own),
     href: hrefOf(own),
   }
 }
+
+const manyOf = ({ taxonId }: OwnListing['draft']) =>
+  taxonId === 'black_soldier_fly_larvae' ? 'larvae' : 'worms'
 
 const plannedCount = (count: unknown) => (typeof count === 'number' ? printCount(count) : 'count to come')
 

@@ -1,5 +1,6 @@
 import { StyleSheet, View } from 'react-native'
 
+import { AgainAct } from './again-act'
 import { isAnswerDue } from './own-state-words'
 import { ownFacts } from './own-facts'
 import { ReviewOutcome } from './review-outcome'
@@ -13,9 +14,10 @@ import { space } from '@/constants/theme'
 import { useOwnListings } from '@/hooks/use-own-listings'
 import { useUnits } from '@/hooks/use-units'
 import type { OwnListing } from '@/shared/contracts/listings'
+import type { OwnSeller } from '@/shared/contracts/sellers'
 
 /** The seller's listings as tags: those a moderator asks about first, then the newest change. */
-export function OwnList() {
+export function OwnList({ farm }: { farm: OwnSeller }) {
   const query = useOwnListings(true)
   if (query.isPending) return <TagSkeleton label="Loading your listings" count={3} />
   if (!query.data) {
@@ -33,7 +35,7 @@ export function OwnList() {
     return (
       <EmptyState
         title="Nothing listed yet"
-        body="A batch takes about five minutes: have the count, a ruler photo and a water test at hand."
+        body="Greens take about two minutes, a batch of fish about five: have the count and a photo at hand."
       />
     )
   }
@@ -42,7 +44,7 @@ export function OwnList() {
     <View style={styles.frame}>
       <View role="list" aria-label="Your listings" style={styles.list}>
         {ordered.map((own) => (
-          <OwnTag key={own.listingId} own={own} />
+          <OwnTag key={own.listingId} own={own} farm={farm} />
         ))}
       </View>
       {query.hasNextPage ? (
@@ -58,12 +60,13 @@ export function OwnList() {
   )
 }
 
-function OwnTag({ own }: { own: OwnListing }) {
+function OwnTag({ own, farm }: { own: OwnListing; farm: OwnSeller }) {
   const units = useUnits()
   return (
     <View role="listitem" style={styles.one}>
       <Tag size="row" facts={ownFacts(own, units)} />
       <ReviewOutcome own={own} />
+      <AgainAct own={own} farm={farm} />
     </View>
   )
 }

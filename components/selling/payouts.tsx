@@ -26,7 +26,7 @@ function PayoutState({ farm }: { farm: OwnSeller }) {
         The processor pays you after each order is settled. You can publish now.
       </Banner>
       <View style={styles.acts}>
-        <ButtonLink href="/sell/listings/new" icon="plus" label="List a batch" />
+        <ButtonLink href="/sell/listings/new" icon="plus" label="List something" />
         <ButtonLink kind="secondary" href="/sell" label="To your listings" />
       </View>
     </View>

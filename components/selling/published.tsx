@@ -56,7 +56,7 @@ function Outcome({ own }: { own: OwnListing }) {
             href={{ pathname: '/listings/[listingId]', params: { listingId } }}
           />
         ) : null}
-        <ButtonLink kind="quiet" icon="plus" href="/sell/listings/new" label="List another batch" />
+        <ButtonLink kind="quiet" icon="plus" href="/sell/listings/new" label="List something else" />
       </View>
     </View>
   )

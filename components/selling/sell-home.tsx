@@ -1,11 +1,11 @@
 import { StyleSheet, View } from 'react-native'
 
+import { KindChoice } from './kind-choice'
 import { OrdersWaiting } from './orders-waiting'
 import { OwnList } from './own-list'
 import { PayoutsBanner } from './payouts-banner'
 import { SellerGate } from './seller-gate'
 
-import { ButtonLink } from '@/components/ui/button-link'
 import { Heading } from '@/components/ui/heading'
 import { Link } from '@/components/ui/link'
 import { Text } from '@/components/ui/text'
@@ -40,14 +40,14 @@ export function SellHome() {
                 </Link>
               </Text>
             </View>
-            <ButtonLink
-              href="/sell/listings/new"
-              icon="plus"
-              label="List a batch"
-              style={isPhone ? styles.whole : null}
-            />
           </View>
-          <OwnList />
+          <View style={styles.list}>
+            <Heading level={2} size="lead">
+              List something
+            </Heading>
+            <KindChoice />
+          </View>
+          <OwnList farm={farm} />
         </View>
       )}
     </SellerGate>
@@ -58,5 +58,5 @@ const styles = StyleSheet.create({
   home: { gap: space.lg },
   head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.lg },
   farm: { flexGrow: 1, flexShrink: 1, minWidth: 220, gap: 2 },
-  whole: { width: '100%' },
+  list: { gap: space.sm },
 })

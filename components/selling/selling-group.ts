@@ -3,6 +3,7 @@
 export { BatchScreen } from './batch-screen'
 export { BeginBatch } from './begin-batch'
 export { FarmScreen } from './farm-screen'
+export { KindChoice } from './kind-choice'
 export { ManageListing } from './manage-listing'
 export { Payouts } from './payouts'
 export { Published } from './published'

@@ -9,10 +9,9 @@ import {
   askedYesNo,
   freeLine,
 } from '@/shared/contracts/asked'
-import { checkStock, checkWindows, type Wrong } from '@/shared/contracts/check-lot'
+import { checkWorms } from '@/shared/contracts/check-worms'
 import { wormUnit } from '@/shared/contracts/sale-unit'
 import { supplyTerms } from '@/shared/contracts/supply-terms'
-import { judgeWormLot } from '@/shared/domain/worms/judge-worm-lot'
 
 const survival = 'No survival promise (0), or 3 to 7 days.'
 const wormMm = askedNumber(3, 400, 'A length, like 3 in.')
@@ -30,7 +29,7 @@ const promise = z
   .strict()
 
 /** Composting worms and larvae, by the counted pack or by packed weight. */
-export const wormBody = z
+const wormFields = z
   .object({
     category: z.literal('worms'),
     taxonId: askedLine(60, 'Pick the worm from the list, genus and species.'),
@@ -64,36 +63,8 @@ export const wormBody = z
     ...supplyTerms({ least: 10, most: 50, leastFreeHours: 12 }),
   })
   .strict()
-  .superRefine((lot, ctx) => {
-    const wrong: Wrong = (path, message) => ctx.addIssue({ code: 'custom', path, message })
-    const judged = judgeWormLot({
-      taxonId: lot.taxonId,
-      names: lot.strain ?? '',
-      words: lot.words,
-      raisedInUs: lot.raisedInUs,
-      lotChecked: lot.lotChecked,
-    })
-    if (judged.effect === 'refuse') {
-      for (const { field, saying } of judged.reasons)
-        if (field === 'taxonId' || field === 'strain') wrong([field], saying)
-    }
-    if (lot.saleUnit.kind === 'pack' && !lot.countMethod) {
-      wrong(
-        ['countMethod'],
-        'Sold by count: say how you count, by hand, by a weighed sample or by displacement.',
-      )
-    }
-    if (lot.grading === 'sized' && (lot.sizeLoMm === undefined || lot.sizeHiMm === undefined)) {
-      const missing = lot.sizeLoMm === undefined ? 'sizeLoMm' : 'sizeHiMm'
-      wrong([missing], 'Sorted by size: from how long to how long are they?')
-    }
-    if ((lot.sizeHiMm ?? Infinity) < (lot.sizeLoMm ?? 0)) {
-      wrong(['sizeHiMm'], 'The longest cannot be shorter than the shortest.')
-    }
-    if (lot.origin === 'bought-in' && lot.raisedInUs && !lot.originState) {
-      wrong(['originState'], 'From which state?')
-    }
-    checkStock(lot, wrong)
-    checkWindows(lot, wrong)
-  })
-export type WormBody = z.output<typeof wormBody>
+
+export type WormBody = z.output<typeof wormFields>
+export const wormBody = wormFields.superRefine((lot, ctx) => {
+  checkWorms(lot, (path, message) => ctx.addIssue({ code: 'custom', path, message }))
+})

@@ -292,6 +292,20 @@ describe('drafts', () => {
     expect(body.draft.water).not.toHaveProperty('measuredOn')
   })
 
+  it('are copied without what was said about one harvest or one lot of worms', async () => {
+    const said = { harvest: { day: '2027-01-12', time: '07:00' }, lotCode: 'L-0112', sellBy: '2027-01-14' }
+    const draft = {
+      category: 'produce',
+      cropId: 'leaf_lettuce',
+      standing: 'covered',
+      ...said,
+      lotChecked: true,
+    }
+    const { listingId } = await begin(ann, draft)
+    const { body } = await ann.agent.post(own).set(keyed()).send({ copyOf: listingId }).expect(201)
+    expect(body.draft).toEqual({ category: 'produce', cropId: 'leaf_lettuce', standing: 'covered' })
+  })
+
   it('are thrown away while they are drafts, and not later', async () => {
     const { listingId } = await begin(ann, {})
     await ann.agent.delete(`${own}/${listingId}`).expect(204)

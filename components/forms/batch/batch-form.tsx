@@ -5,7 +5,7 @@ import { batchAsks } from './batch-asks'
 import { batchBlank, batchDefaults } from './batch-defaults'
 import { batchIssues } from './batch-issues'
 import { draftFromTyping } from './draft-from-typing'
-import { batchLists } from './name-of-pointer'
+import { batchLists, nameOfPointer } from './name-of-pointer'
 import { SteppedBatch } from './stepped-batch'
 import { typingFromDraft } from './typing-from-draft'
 import { useAutosave } from './use-autosave'
@@ -61,6 +61,7 @@ export function BatchForm(props: BatchFormProps) {
     form,
     keeper,
     listingId: own.listingId,
+    nameOf: nameOfPointer,
     onPublished: () => router.replace(`/sell/listings/${own.listingId}/published`),
   })
   const mine = () => opened.rival ?? readDraft(form.getValues())

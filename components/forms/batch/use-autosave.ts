@@ -1,18 +1,17 @@
 import { useEffect, useEffectEvent } from 'react'
-import type { UseFormReturn } from 'react-hook-form'
+import type { FieldValues, UseFormReturn } from 'react-hook-form'
 
-import type { BatchTyping } from './batch-typing'
 import type { DraftKeeper } from '@/hooks/draft-keeper'
 import type { ListingDraft } from '@/shared/contracts/listings'
 
-interface Saving {
-  form: UseFormReturn<BatchTyping>
+interface Saving<T extends FieldValues> {
+  form: UseFormReturn<T>
   keeper: DraftKeeper
-  readDraft: (typing: BatchTyping) => ListingDraft
+  readDraft: (typing: T) => ListingDraft
 }
 
 /** Hands every change of the form to the keeper; what changed nothing is not sent. */
-export function useAutosave({ form, keeper, readDraft }: Saving) {
+export function useAutosave<T extends FieldValues>({ form, keeper, readDraft }: Saving<T>) {
   const asDraft = useEffectEvent(readDraft)
   useEffect(() => {
     let last = JSON.stringify(asDraft(form.getValues()))

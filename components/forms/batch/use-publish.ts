@@ -1,21 +1,20 @@
 import { useRef, useState } from 'react'
-import type { UseFormReturn } from 'react-hook-form'
+import type { FieldPath, FieldValues, UseFormReturn } from 'react-hook-form'
 
 import { newRequestKey } from '@/hooks/request-key'
 import { useSubmitListing } from '@/hooks/use-submit-listing'
 import { NoAnswer } from '@/shared/api/call'
 import { Problem } from '@/shared/api/problem'
 
-import { nameOfPointer } from './name-of-pointer'
-
-import type { BatchTyping } from './batch-typing'
 import type { DraftKeeper } from '@/hooks/draft-keeper'
 import type { OwnListing } from '@/shared/contracts/listings'
 
-interface Publishing {
-  form: UseFormReturn<BatchTyping>
+interface Publishing<T extends FieldValues> {
+  form: UseFormReturn<T>
   keeper: DraftKeeper
   listingId: string
+  /** The form's name for a place the server points at; null: no field of this form. */
+  nameOf: (pointer: string) => FieldPath<T> | null
   onPublished: (own: OwnListing) => void
 }
 
@@ -26,7 +25,8 @@ export interface PublishTrouble {
 }
 
 /** Checks, saves what waits, then publishes exactly the revision that was saved. */
-export function usePublish({ form, keeper, listingId, onPublished }: Publishing) {
+export function usePublish<T extends FieldValues>(publishing: Publishing<T>) {
+  const { form, keeper, listingId, nameOf, onPublished } = publishing
   const submit = useSubmitListing(listingId)
   const [attempt, setAttempt] = useState(0)
   const [isBusy, setIsBusy] = useState(false)
@@ -37,7 +37,7 @@ export function usePublish({ form, keeper, listingId, onPublished }: Publishing)
   function stopped(error: unknown) {
     if (error instanceof Problem && error.slug === 'version-stale') keeper.markStale()
     for (const { pointer, detail } of (error instanceof Problem && error.errors) || []) {
-      const name = nameOfPointer(pointer)
+      const name = nameOf(pointer)
       if (name) form.setError(name, { type: 'server', message: detail })
     }
     const hasFields = error instanceof Problem && Boolean(error.errors?.length)

@@ -2,7 +2,7 @@ import { cautionTexts } from '@/shared/domain/rules/caution-texts.facts'
 import { findBlock } from '@/shared/domain/rules/find-block'
 import { scanForTaxa } from '@/shared/domain/species/match-taxon'
 import { traceLineage } from '@/shared/domain/species/trace-lineage'
-import { findWormKind } from '@/shared/domain/worms/worm-count'
+import { findWormKind } from '@/shared/domain/worms/find-worm-kind'
 import type { SourceKey } from '@/shared/sources'
 
 export const wormLotSources: readonly SourceKey[] = ['mn-worms-2024', 'house-rule']

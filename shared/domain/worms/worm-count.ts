@@ -2,15 +2,10 @@ import { findSpecies } from '@/shared/domain/species/find-species'
 import { findTaxon } from '@/shared/domain/species/find-taxon'
 import type { Range, SpeciesRecord } from '@/shared/domain/species/species-record'
 import { printBothMasses } from '@/shared/domain/listings/sale-unit'
-import { wormKinds, type WormKind } from '@/shared/domain/worms/worms.facts'
+import { findWormKind } from '@/shared/domain/worms/find-worm-kind'
 import { poundsFromG } from '@/shared/units/mass'
 import { printCount } from '@/shared/units/count'
 import { roundTo } from '@/shared/units/round-to'
-
-/** null: not an animal of the category of worms. */
-export function findWormKind(taxonId: string): WormKind | null {
-  return wormKinds.find((kind) => kind.taxonId === taxonId) ?? null
-}
 
 function factsOf(taxonId: string): SpeciesRecord | null {
   const speciesId = findTaxon(taxonId)?.speciesId ?? null

@@ -1,0 +1,2 @@
+/** What is sold beside fish. */
+export type SupplyKind = 'produce' | 'worms' | 'media'
