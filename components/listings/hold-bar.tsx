@@ -2,6 +2,7 @@ import type { Href } from 'expo-router'
 import { StyleSheet, View } from 'react-native'
 
 import { animalWord } from './animal-words'
+import { countedWords } from './counted-words'
 
 import { ButtonLink } from '@/components/ui/button-link'
 import { Text } from '@/components/ui/text'
@@ -47,7 +48,7 @@ export function HoldBar({ listing, count, near }: Props) {
       <ButtonLink
         icon="lock"
         href={href}
-        label={`Hold ${printCount(count)} ${body.category === 'fish' ? animalWord(body.taxonId, count) : ''}`.trim()}
+        label={`Hold ${countedWords(body, count)} ${body.category === 'fish' ? animalWord(body.taxonId, count) : ''}`.trim()}
       />
     </View>
   )

@@ -11,6 +11,7 @@ import { PickupWindows } from './pickup-windows'
 import { PriceTable } from './price-table'
 import { ReportListing } from './report-listing'
 import type { Refusal } from './selling-state'
+import { SupplyStory } from './supply-story'
 import { Tag } from './tag'
 
 import { TwoColumns } from '@/components/layout/two-columns'
@@ -116,7 +117,11 @@ export function ListingStory(props: Props) {
                   <YourWater water={body.water} />
                 </LazyPart>
               </>
-            ) : null}
+            ) : (
+              <LazyPart label="Loading the facts">
+                <SupplyStory body={body} count={count} />
+              </LazyPart>
+            )}
             <MoneyTerms body={body} />
             {promise ? <ArrivalPromise promise={promise} /> : null}
             <CautionList cautions={listingCautions(gate)} />
@@ -134,7 +139,7 @@ export function ListingStory(props: Props) {
             <PickupWindows windows={listing.windows} />
             <Card>
               <PlaceField
-                label="Where will they live?"
+                label={body.category === 'fish' ? 'Where will they live?' : 'Where are you?'}
                 hint={
                   gate ? undefined : 'Then we can say how far it is, and what we know about the rules there.'
                 }

@@ -4,7 +4,7 @@ import { Page } from '@/components/layout/page'
 import { LazyPart } from '@/components/ui/lazy-part'
 
 const RecordHome = lazy(() =>
-  import('@/components/record/record-group').then((group) => ({ default: group.RecordHome })),
+  import('@/components/selling/selling-group').then((group) => ({ default: group.RecordHome })),
 )
 
 export default function RecordPage() {
