@@ -25,7 +25,8 @@ export function shipRoutes(): Router {
   // Each answer judges up to nine trips: it costs what a search costs.
   const limit = searchLimit()
   for (const { path } of [acts.readShipDays, acts.listOrderShipDays]) router.get(path, limit)
-  router.post([acts.chooseShipDay.path, acts.checkRoute.path], lookLimit())
+  const looks = lookLimit()
+  for (const { path } of [acts.chooseShipDay, acts.checkRoute]) router.post(path, looks)
   router.get(acts.printOrderPacking.path, packingLimit())
   on(router, acts.readShipDays)(async ({ params, query }) => readShipDays({ ...params, ...query }))
   on(router, acts.listOrderShipDays)(async ({ caller, params }) => listOrderShipDays(caller, params.orderId))

@@ -10,7 +10,8 @@ import * as calls from '@/shared/contracts/ship-acts'
 
 export function weatherRoutes(): Router {
   const router = Router()
-  router.post([calls.holdForWeather.path, calls.agreeNewDay.path], lookLimit())
+  const looks = lookLimit()
+  for (const { path } of [calls.holdForWeather, calls.agreeNewDay]) router.post(path, looks)
   router.post(calls.checkRoutes.path, bulkLookLimit())
   on(
     router,
