@@ -3,7 +3,7 @@ import { expect, it } from 'vitest'
 import { countedNoun, countedWords } from './counted-words'
 
 import type { SupplyBody } from '@/components/supplies/supply-body'
-import { clay, redWigglers } from '@/components/forms/supplies/lots-for-tests'
+import { clay, redWigglers } from '@/shared/domain/listings/lots-for-tests'
 import type { FishBody } from '@/shared/contracts/fish-batch'
 
 const lettuce = { category: 'produce', saleUnit: { kind: 'head' } }

@@ -4,7 +4,7 @@ import { supplyCautions } from './supply-cautions'
 import { supplyFacts } from './supply-facts'
 
 import type { SupplyBody } from './supply-body'
-import { clay, redWigglers } from '@/components/forms/supplies/lots-for-tests'
+import { clay, redWigglers } from '@/shared/domain/listings/lots-for-tests'
 
 const basil = {
   category: 'produce',

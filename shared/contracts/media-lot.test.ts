@@ -1,33 +1,15 @@
 import { describe, expect, it } from 'vitest'
 
 import { mediaBody } from '@/shared/contracts/media-lot'
+import { clay as usedClay } from '@/shared/domain/listings/lots-for-tests'
 import { changeAt, issuesOf, badlyTold, type Path } from '@/shared/contracts/lot-issues-for-tests'
 
 const clay = {
-  category: 'media',
-  material: 'expanded_clay',
-  saleUnit: { kind: 'volume', litres: 50, weightKg: 14 },
-  grainLoMm: 8,
-  grainHiMm: 16,
-  rinsed: false,
-  vinegarTest: 'no-fizz',
-  used: 'used',
-  usedWords: 'Two years in a tilapia bed, no salt, no copper',
-  countOnHand: 20,
-  minOrder: 1,
-  orderStep: 1,
+  ...usedClay,
   tiers: [
     { fromCount: 1, unitCents: 4000 },
     { fromCount: 5, unitCents: 3500 },
   ],
-  placeKind: 'public-place',
-  windows: [{ day: '2027-04-13', from: '09:00', until: '10:00', capacity: 6 }],
-  accept: 'instant',
-  balanceDue: 'at-handover',
-  depositPct: 0,
-  freeCancelHours: 24,
-  photos: [{ photoId: 'a'.repeat(32), takenOn: '2027-04-12', hasRuler: false }],
-  words: '',
 }
 const told = (...changes: [Path, unknown][]) =>
   issuesOf(

@@ -1,40 +1,10 @@
 import { describe, expect, it } from 'vitest'
 
 import { wormBody } from '@/shared/contracts/worm-lot'
+import { redWigglers } from '@/shared/domain/listings/lots-for-tests'
 import { changeAt, issuesOf, badlyTold, type Path } from '@/shared/contracts/lot-issues-for-tests'
 
-const worms = {
-  category: 'worms',
-  taxonId: 'red_wiggler',
-  grading: 'bed-run',
-  bedding: 'Damp peat and coir',
-  saleUnit: { kind: 'pack', count: 500 },
-  countMethod: 'sample-weight',
-  overcountPct: 5,
-  raisedInUs: true,
-  lotChecked: true,
-  origin: 'hatched-here',
-  wildCaught: false,
-  licenceNumbers: 'None needed for worms raised here',
-  statesServed: ['OH', 'IN'],
-  promise: { windowHours: 24, survivalDays: 0, remedy: 'refund', evidence: 'A photo of the open bag' },
-  countOnHand: 40,
-  minOrder: 1,
-  orderStep: 1,
-  mostPerBuyer: 10,
-  tiers: [
-    { fromCount: 1, unitCents: 2400 },
-    { fromCount: 4, unitCents: 2200 },
-  ],
-  placeKind: 'public-place',
-  windows: [{ day: '2027-04-13', from: '09:00', until: '10:00', capacity: 6 }],
-  accept: 'ask',
-  balanceDue: 'at-handover',
-  depositPct: 25,
-  freeCancelHours: 72,
-  photos: [{ photoId: 'a'.repeat(32), takenOn: '2027-04-12', hasRuler: false }],
-  words: 'The lot was looked through for jumping worms.',
-}
+const worms = { ...redWigglers, words: 'The lot was looked through for jumping worms.' }
 const told = (...changes: [Path, unknown][]) =>
   issuesOf(
     wormBody,

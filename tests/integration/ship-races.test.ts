@@ -3,9 +3,6 @@ import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from
 
 import { listing, pickupWindow } from '@/db/schema/listings'
 import { routeCheck } from '@/db/schema/shipments'
-import { startForecast } from '@/server/forecast/fake/start-fake'
-import { configureForecast } from '@/server/forecast/forecast-settings'
-import { forgetForecasts } from '@/server/forecast/read-forecast'
 import { clockEdges } from '@/server/orders/clock-edges'
 import { readOrder } from '@/server/orders/order-store'
 import { keepFederalDays } from '@/server/shipping/no-ship-days'
@@ -13,35 +10,18 @@ import { checkDueWays } from '@/server/weather/check-due-ways'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { brokenInvariants } from '@/tests/support/money-invariants'
 import { keyed } from '@/tests/support/order-desk'
-import {
-  leaving,
-  onShipDay,
-  openShipDesk,
-  permit,
-  SHIP_DAY,
-  SHIP_NOW,
-  shipBody,
-  type Box,
-  type ShipDesk,
-} from '@/tests/support/ship-desk'
+import { leaving, onShipDay, permit, SHIP_DAY, SHIP_NOW, shipBody, type Box } from '@/tests/support/ship-desk'
+import { openWeatherDesk, type WeatherDesk } from '@/tests/support/weather-desk'
 
-let desk: ShipDesk
-let weather: Awaited<ReturnType<typeof startForecast>>
+let desk: WeatherDesk
 
 beforeAll(async () => {
-  desk = await openShipDesk('ship_races')
-  weather = await startForecast({})
-  configureForecast({ url: weather.url })
+  desk = await openWeatherDesk('ship_races')
 })
-afterAll(async () => {
-  configureForecast({ url: null })
-  await weather.stop()
-  await desk.close()
-})
+afterAll(() => desk.close())
 beforeEach(() => desk.travelToWithoutRest(SHIP_NOW))
 afterEach(async () => {
-  weather.clearWeather()
-  forgetForecasts()
+  desk.mild()
   await desk.quiet()
   expect(await brokenInvariants(desk.db)).toEqual([])
 })
@@ -49,10 +29,7 @@ afterEach(async () => {
 const HOUR_MS = 3_600_000
 const EVENING = new Date('2027-05-09T20:00:30Z')
 
-function frost(from: string, until: string): void {
-  weather.setWeather({ from, until, minC: -14, maxC: -4 })
-  forgetForecasts()
-}
+const frost = (from: string, until: string) => desk.frost(from, until)
 
 const rowOf = async (box: Pick<Box, 'order'>) => {
   const found = await readOrder(box.order.orderId)

@@ -4,32 +4,23 @@ import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from
 import { routeCheck, weatherHold } from '@/db/schema/shipments'
 import { pickupWindow } from '@/db/schema/listings'
 import { seller as sellers } from '@/db/schema/sellers'
-import { startForecast } from '@/server/forecast/fake/start-fake'
-import { configureForecast } from '@/server/forecast/forecast-settings'
 import { forgetForecasts } from '@/server/forecast/read-forecast'
 import { checkDueWays } from '@/server/weather/check-due-ways'
 import type { ShownOrder } from '@/shared/contracts/orders'
 import { brokenInvariants } from '@/tests/support/money-invariants'
 import { keyed } from '@/tests/support/order-desk'
-import { openShipDesk, SHIP_DAY, SHIP_NOW, type ShipDesk } from '@/tests/support/ship-desk'
+import { SHIP_DAY, SHIP_NOW } from '@/tests/support/ship-desk'
+import { openWeatherDesk, type WeatherDesk } from '@/tests/support/weather-desk'
 
-let desk: ShipDesk
-let weather: Awaited<ReturnType<typeof startForecast>>
+let desk: WeatherDesk
 
 beforeAll(async () => {
-  desk = await openShipDesk('weather_holds')
-  weather = await startForecast({})
-  configureForecast({ url: weather.url })
+  desk = await openWeatherDesk('weather_holds')
 })
-afterAll(async () => {
-  configureForecast({ url: null })
-  await weather.stop()
-  await desk.close()
-})
+afterAll(() => desk.close())
 beforeEach(() => desk.travelToWithoutRest(SHIP_NOW))
 afterEach(async () => {
-  weather.clearWeather()
-  forgetForecasts()
+  desk.mild()
   expect(await brokenInvariants(desk.db)).toEqual([])
 })
 
@@ -38,10 +29,7 @@ const DAY_MS = 86_400_000
 const EVENING = new Date('2027-05-09T20:00:30Z')
 const MORNING = new Date('2027-05-10T10:00:30Z')
 
-function frost(from: string, until: string): void {
-  weather.setWeather({ from, until, minC: -14, maxC: -4 })
-  forgetForecasts()
-}
+const frost = (from: string, until: string) => desk.frost(from, until)
 
 /** The day agreed and everything paid: what an unpaid balance does is another story. */
 async function agreed(name: string) {
@@ -188,12 +176,12 @@ describe('a cold snap before a box leaves', () => {
 
   it('keeps what it found where nobody can say, and falls back on many years when the forecast is away', async () => {
     const box = await agreed('no forecast')
-    weather.setMode('refuses')
+    desk.weather.setMode('refuses')
     forgetForecasts()
     await lookAt(EVENING)
     expect(await checksOf(box, 'evening')).toMatchObject([{ verdict: 'safe', facts: { basis: 'long-term' } }])
     expect((await box.seen()).shipment?.check?.basis).toBe('long-term')
-    weather.setMode('normal')
+    desk.weather.setMode('normal')
   })
 })
 

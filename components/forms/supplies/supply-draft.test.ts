@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 
 import { firstDraft, nextHarvest } from '@/components/selling/first-draft'
 import { lotIssues } from './goods/lot-issues'
-import { clay, redWigglers } from './lots-for-tests'
+import { clay, redWigglers } from '@/shared/domain/listings/lots-for-tests'
 import { supplyDraftOf, supplyTypingOf } from './supply-draft'
 
 import type { SupplyKind } from './supply-kind'

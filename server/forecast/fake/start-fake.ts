@@ -20,7 +20,7 @@ export interface RunningForecast {
 }
 
 export interface ForecastWish {
-  /** Left out: any free one. */
+  /** Left out: one that is free. */
   port?: number
   clockOffsetMs?: number
   /** Left out: nothing is kept. */

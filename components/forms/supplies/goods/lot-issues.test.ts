@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 
 import { lotIssues } from './lot-issues'
 
-import { clay, redWigglers } from '@/components/forms/supplies/lots-for-tests'
+import { clay, redWigglers } from '@/shared/domain/listings/lots-for-tests'
 import { lettuce } from '@/shared/contracts/lettuce-for-tests'
 import { changeAt, issuesOf, type Path } from '@/shared/contracts/lot-issues-for-tests'
 import { mediaBody } from '@/shared/contracts/media-lot'
