@@ -4,14 +4,10 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 import { orderEvent } from '@/db/schema/orders'
 import { routeCheck } from '@/db/schema/shipments'
 import { buildMember } from '@/seed/build-member'
-import { remindBoxes } from '@/server/notices/remind-boxes'
-import { remindPickups } from '@/server/notices/remind-pickups'
 import type { ShipDayOffers } from '@/shared/contracts/shipments'
-import { calendarFaults } from '@/shared/calendar/calendar-faults'
 import { printDate } from '@/shared/domain/calendar/print-date'
 import { brokenInvariants } from '@/tests/support/money-invariants'
 import { keyed } from '@/tests/support/order-desk'
-import { pdfWords } from '@/tests/support/pdf-words'
 import {
   beaAddress,
   leaving,
@@ -36,58 +32,6 @@ afterAll(() => desk.close())
 
 const subjects = (to: string) =>
   desk.letters.filter((letter) => letter.to.email === to).map((letter) => letter.subject)
-
-describe('the days on which a box could leave', () => {
-  const days = (listingId: string, query: object) =>
-    desk.visitor().get(`/api/v1/listings/${listingId}/ship-days`).query(query)
-
-  it('are told to anybody, lawful, judged, with what the boxes cost', async () => {
-    const batch = await desk.batchOf('days')
-    const { body } = await days(batch.publicId, { near: LOUISVILLE, quantity: 120 }).expect(200)
-    const offers = body as ShipDayOffers
-    expect(offers).toMatchObject({ boxes: 2, boxCents: 2400, freightCents: 9700 })
-    expect(offers.days.map(({ shipDay }) => shipDay).slice(0, 4)).toEqual([
-      ...['2027-05-05', '2027-05-10', '2027-05-11', '2027-05-12'],
-    ])
-    expect(offers.days).toHaveLength(9)
-    expect(offers.days[1]).toMatchObject({ arriveDay: '2027-05-11', verdict: 'safe', basis: 'long-term' })
-    expect(offers.days[1]?.packing).toMatchObject({ animalsPerBox: 60, packs: 'none' })
-    expect(JSON.stringify(offers)).not.toContain('trueLat')
-  })
-
-  it('leave out the holiday and the day before it, and days that a moderator closes', async () => {
-    const batch = await desk.batchOf('holidays')
-    await desk.travelToWithoutRest(new Date('2027-05-24T14:00:00Z'))
-    const asked = { near: LOUISVILLE, quantity: 60 }
-    const told = async () => {
-      const { body } = await days(batch.publicId, asked).expect(200)
-      return (body as ShipDayOffers).days.map(({ shipDay }) => shipDay)
-    }
-    // Memorial Day 2027 is Monday, May 31: nothing leaves on it.
-    expect((await told()).slice(0, 3)).toEqual(['2027-05-26', '2027-06-01', '2027-06-02'])
-    const staff = await desk.staff('staff@example.org')
-    const keep = (body: object) => staff.post('/api/v1/moderation/no-ship-days').set(keyed()).send(body)
-    await keep({ day: '2027-06-02', why: 'Carriers on strike', isOff: false }).expect(200)
-    const kept = await keep({ day: '2027-05-31', why: 'Carriers work', isOff: true }).expect(200)
-    expect(kept.body.days).toContainEqual({
-      ...{ day: '2027-05-31', why: 'Carriers work', source: 'federal', isOff: true },
-    })
-    // The strike also closes the day on whose morrow it lies; the holiday taken off does not come back.
-    expect((await told()).slice(0, 3)).toEqual(['2027-05-26', '2027-05-31', '2027-06-07'])
-    await keep({ day: '2027-05-01', why: 'Long ago', isOff: false }).expect(422)
-    await desk.visitor().get('/api/v1/moderation/no-ship-days').expect(401)
-  })
-
-  it('are refused where nothing is shipped', async () => {
-    const [batch, near] = [await desk.batchOf('served', { body: { statesServed: ['OH'] } }), LOUISVILLE]
-    const collected = await desk.batch('collected')
-    const elsewhere = await days(batch.publicId, { near, quantity: 60 })
-    expect([elsewhere.status, elsewhere.body.type]).toEqual([409, '/problems/not-shipped'])
-    expect(elsewhere.body.detail).toContain('Kentucky')
-    expect((await days(collected.publicId, { near, quantity: 60 })).body.type).toBe('/problems/not-shipped')
-    expect((await days('A'.repeat(22), { near, quantity: 60 })).status).toBe(404)
-  })
-})
 
 describe('reserving a box', () => {
   it('asks for an address that is the place judged, and for what the seller offers', async () => {
@@ -345,72 +289,5 @@ describe('a shipped order', () => {
     expect((await press(bea, 'no-show')).status).toBe(409)
     await act(bea, 'cancellation')
     expect(await brokenInvariants(desk.db)).toEqual([])
-  })
-
-  it('carries a paper of everything that travels, kept as it stood', async () => {
-    const box = await desk.dispatched('movement')
-    const paper = (await box.bea.get(`${box.path}/movement-document`).expect(200)).body
-    expect(paper).toMatchObject({
-      seller: { licences: 'Class A 1142', address: expect.stringContaining('12 Mill Lane') },
-      buyer: { name: 'Bea Holt', address: '77 Quiet Alley, Louisville, KY 40202' },
-      ...{ count: 60, boxes: 1, carrier: 'Overnight air', tracking: '9400 1112 0255 5512' },
-      scientificName: 'Lepomis macrochirus',
-      notForRelease: expect.stringContaining('storm drain'),
-    })
-    const staff = await desk.staff('staff@example.org')
-    expect((await staff.get(`${box.path}/movement-document`).expect(200)).body).toEqual(paper)
-    expect(JSON.stringify(await box.seen(staff))).not.toContain('Quiet Alley')
-  })
-
-  it('prints how to pack and a label for each box, for its seller alone', async () => {
-    const box = await desk.scheduled('labels', { body: { shipping: { ...shipping, mostInBox: 40 } } })
-    const reply = await box.hatchery.get(`${box.path}/packing-sheet`).buffer(true).expect(200)
-    expect(reply.headers['content-type']).toBe('application/pdf')
-    const pages = await pdfWords(new Uint8Array(reply.body as Uint8Array))
-    expect(pages).toHaveLength(3)
-    expect(pages[0]).toMatch(/60 Bluegill/i)
-    expect(pages[0]).toContain('2 boxes')
-    expect(pages[0]).toContain('no free postal boxes')
-    for (const [at, page] of pages.slice(1).entries()) {
-      expect(page).toContain(`Box ${at + 1} of 2: 30`)
-      for (const words of ['LIVE ANIMALS', 'This side up', 'Keep between', '77 Quiet Alley', '12 Mill Lane'])
-        expect(page).toContain(words)
-    }
-    await box.bea.get(`${box.path}/packing-sheet`).expect(404)
-    const perch = await desk.scheduled('open packing', { body: { taxonId: 'yellow_perch' } })
-    const open = await perch.hatchery.get(`${perch.path}/packing-sheet`)
-    expect([open.status, open.body.type]).toEqual([409, '/problems/packing-open'])
-    expect(open.body.detail).toContain('it reaches Mon, May 10 from Mon, May 3 on.')
-  })
-
-  it('stands in both calendars on its own day, and is not called a pickup the evening before', async () => {
-    const box = await desk.ready('calendar')
-    const file = async (by: typeof box.bea) =>
-      Buffer.from((await by.get(`${box.path}/calendar.ics`).expect(200)).text)
-    const [mine, theirs] = [await file(box.bea), await file(box.hatchery)]
-    expect([...calendarFaults(mine), ...calendarFaults(theirs)]).toEqual([])
-    expect(mine.toString()).toContain('DTSTART:20270511T130000Z')
-    expect(theirs.toString()).toContain('DTSTART:20270510T100000Z')
-    expect(theirs.toString()).not.toContain('Quiet Alley')
-    const remindAt = async (at: Date) => {
-      desk.letters.length = 0
-      await desk.travelToWithoutRest(at)
-      await remindPickups()
-      await remindBoxes()
-      await remindBoxes()
-      await desk.quiet()
-      return desk.letters.filter(({ blocks }) => JSON.stringify(blocks).includes(box.order.orderId))
-    }
-    const before = await remindAt(new Date('2027-05-09T22:30:00Z'))
-    expect(before.map(({ subject }) => subject)).toEqual(['Tomorrow: 1 box to bea'])
-    await desk.travelTo(onShipDay(18))
-    await box.act(box.hatchery, 'route-papers', { papers: [permit] })
-    await box.act(box.hatchery, 'route-check')
-    await box.act(box.hatchery, 'dispatch', leaving())
-    const evening = await remindAt(onShipDay(22))
-    expect(evening.map(({ subject, to }) => [subject, to.email])).toEqual([
-      ['Tomorrow: your animals arrive', 'bea@example.org'],
-    ])
-    expect(JSON.stringify(evening)).toContain('Be at home')
   })
 })
